@@ -1,0 +1,1 @@
+namespace PartPick; internal static class Program { private static int Main() => 0; }

@@ -1,0 +1,1 @@
+namespace PartPick.Benchmarks; internal static class Program { private static void Main() { } }
