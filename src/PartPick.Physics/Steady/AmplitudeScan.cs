@@ -1,0 +1,225 @@
+using System.Numerics;
+
+namespace PartPick.Physics.Steady;
+
+/// <summary>
+/// Follows −Re Zc(I) from small signals upwards: where it first falls through Rm lies the running amplitude, and its
+/// largest value is the running margin.
+/// </summary>
+internal sealed class AmplitudeScan
+{
+    private const double LargestRatio = 1.35;
+    private const double SmallestRatio = 1.01;
+    private const int MostSteps = 400;
+    private readonly Refinement _refinement;
+    private readonly double _resistance;
+    private AmplitudeBalance _balance;
+    private double[] _before = [];
+
+    public AmplitudeScan(Refinement refinement, double radians, double resistanceOhms)
+    {
+        _refinement = refinement;
+        _resistance = resistanceOhms;
+        _balance = refinement.Coarse();
+        _balance.SetFrequency(radians);
+        Run();
+    }
+
+    /// <summary>The balance solved at the running amplitude; null where there is none.</summary>
+    public AmplitudeBalance? Running { get; private set; }
+
+    /// <summary>Largest −Re Zc in ohms found on the way, between steps by the cubic through values and slopes.</summary>
+    public double LargestNegativeOhms { get; private set; } = double.NegativeInfinity;
+
+    private void Run()
+    {
+        if (_balance.StartSaturated(_resistance) is { } saturated)
+        {
+            RunDown(saturated);
+        }
+        else
+        {
+            RunUp();
+        }
+    }
+
+    // A steep limiter holds its own input still at small amplitudes (no single zero crossing): only the limited branch is followed.
+    private void RunDown(double peak)
+    {
+        double ratio = LargestRatio;
+        if (!_balance.SolveAt(peak))
+        {
+            return;
+        }
+
+        double linear = _balance.LinearPeakAmps;
+        double negative = Note();
+        double slope = -_balance.ResistanceSlope;
+        while (ratio > SmallestRatio && peak > linear)
+        {
+            _before = [.. _balance.State];
+            if (!_balance.SolveAt(peak / ratio))
+            {
+                _before.CopyTo(_balance.State, 0);
+                ratio = Math.Sqrt(ratio);
+                continue;
+            }
+
+            double next = Note();
+            double nextSlope = -_balance.ResistanceSlope;
+            LargestNegativeOhms = Math.Max(LargestNegativeOhms, HermitePeak(next, nextSlope, negative, slope, Math.Log(ratio)));
+            if (Running is null && negative <= _resistance && next > _resistance)
+            {
+                AmplitudeBalance scanning = _balance;
+                _balance = _refinement.Copy(scanning);
+                FindRunning(peak / ratio, peak);
+                _balance = scanning;
+            }
+
+            if (next < 0.5 * LargestNegativeOhms && nextSlope > 0)
+            {
+                return;
+            }
+
+            peak /= ratio;
+            ratio = Math.Min(LargestRatio, ratio * ratio);
+            (negative, slope) = (next, nextSlope);
+        }
+    }
+
+    private void RunUp()
+    {
+        double peak = _balance.LinearPeakAmps;
+        _balance.StartLinear(peak);
+        if (!double.IsFinite(peak) || !_balance.SolveAt(peak))
+        {
+            return;
+        }
+
+        double ratio = LargestRatio;
+        double negative = Note();
+        double slope = -_balance.ResistanceSlope;
+        for (int step = 0; step < MostSteps; step++)
+        {
+            _before = [.. _balance.State];
+            if (!_balance.SolveAt(peak * ratio))
+            {
+                _before.CopyTo(_balance.State, 0);
+                ratio = Math.Sqrt(ratio);
+                if (ratio < SmallestRatio)
+                {
+                    return;
+                }
+
+                continue;
+            }
+
+            if (_refinement.IsIncomplete(_balance))
+            {
+                // Back to the last amplitude, where the missing current is still small, and on from there with it.
+                _before.CopyTo(_balance.State, 0);
+                if (!_balance.SolveAt(peak))
+                {
+                    return;
+                }
+
+                _balance = _refinement.Complete(_balance);
+                if (!_balance.SolveAt(peak))
+                {
+                    return;
+                }
+
+                continue;
+            }
+
+            double next = -_balance.Impedance.Real;
+            double nextSlope = -_balance.ResistanceSlope;
+            LargestNegativeOhms = Math.Max(LargestNegativeOhms, HermitePeak(negative, slope, next, nextSlope, Math.Log(ratio)));
+            Note();
+            if (negative > _resistance && next <= _resistance)
+            {
+                FindRunning(peak, peak * ratio);
+                return;
+            }
+
+            if (next < 0.5 * LargestNegativeOhms && next < 0.5 * _resistance && nextSlope < 0)
+            {
+                return;
+            }
+
+            if (next < 0 && nextSlope > -1e-6 * _resistance && step > 60)
+            {
+                return;
+            }
+
+            peak *= ratio;
+            ratio = Math.Min(LargestRatio, ratio * ratio);
+            (negative, slope) = (next, nextSlope);
+        }
+    }
+
+    private double Note()
+    {
+        double negative = -_balance.Impedance.Real;
+        LargestNegativeOhms = Math.Max(LargestNegativeOhms, negative);
+        return negative;
+    }
+
+    private void FindRunning(double below, double above)
+    {
+        double[] upper = [.. _balance.State];
+        if (_balance.SolveRunning(_resistance) && _balance.PeakAmps > below * 0.999 && _balance.PeakAmps < above * 1.001)
+        {
+            Running = _balance;
+            return;
+        }
+
+        upper.CopyTo(_balance.State, 0);
+        for (int step = 0; step < 60; step++)
+        {
+            double middle = Math.Sqrt(below * above);
+            if (!_balance.SolveAt(middle))
+            {
+                return;
+            }
+
+            if (-_balance.Impedance.Real > _resistance)
+            {
+                below = middle;
+            }
+            else
+            {
+                above = middle;
+            }
+
+            if (above / below - 1 < 1e-12)
+            {
+                Running = _balance;
+                return;
+            }
+        }
+    }
+
+    private static double HermitePeak(double y0, double m0, double y1, double m1, double width)
+    {
+        if (!(m0 > 0 && m1 < 0))
+        {
+            return double.NegativeInfinity;
+        }
+
+        // Derivative of the cubic through both ends on t in 0 … 1: a t² + b t + c = 0.
+        double c = m0 * width;
+        double b = 6 * (y1 - y0) - 4 * m0 * width - 2 * m1 * width;
+        double a = 3 * (m0 + m1) * width - 6 * (y1 - y0);
+        Complex root = Math.Abs(a) < 1e-12 * Math.Abs(b) ? -c / b : (-b - Complex.Sqrt(b * b - 4 * a * c)) / (2 * a);
+        double t = root.Real;
+        if (!(t > 0 && t < 1))
+        {
+            t = m0 / (m0 - m1);
+        }
+
+        double t2 = t * t;
+        double t3 = t2 * t;
+        return (2 * t3 - 3 * t2 + 1) * y0 + (t3 - 2 * t2 + t) * width * m0 + (3 * t2 - 2 * t3) * y1 + (t3 - t2) * width * m1;
+    }
+}

@@ -1,0 +1,107 @@
+using PartPick.Physics.Network;
+using PartPick.Physics.SmallSignal;
+
+namespace PartPick.Physics.Steady;
+
+/// <summary>
+/// The large-signal steady state: found with few harmonics, then refined until twice the harmonics change the frequency by
+/// less than 0.03 ppm and the current by less than 0.1 %; the finer of the two is taken.
+/// </summary>
+internal static class SteadySolver
+{
+    private const double FrequencyAgreement = 3e-8;
+    private const double CurrentAgreement = 1e-3;
+
+    /// <summary>Scans the amplitude and refines the running state.</summary>
+    /// <param name="crystal">The crystal.</param>
+    /// <param name="network">The linearised circuit, for the first guess of the frequency.</param>
+    /// <param name="siemens">Transconductance at the bias point.</param>
+    /// <param name="refinement">The balances of the circuit.</param>
+    /// <param name="largestNegativeOhms">Largest −Re Zc(I) over the amplitude, in ohms.</param>
+    /// <returns>The steady state, or null where there is none.</returns>
+    public static SteadyState? Solve<TNetwork>(
+        Crystal crystal, in TNetwork network, double siemens, Refinement refinement, out double largestNegativeOhms)
+        where TNetwork : struct, ILinearNetwork
+    {
+        var branch = new CrystalBranch(crystal);
+        GrowthWindow window = GrowthWindow.Find(branch, network);
+        double guess = window.CriticalSiemens is { } critical && critical < siemens ? critical : siemens;
+        double radians = branch.SeriesRadians;
+        for (int step = 0; step < 3; step++)
+        {
+            double reactance = network.At(new System.Numerics.Complex(0, radians)).Impedance(guess).Imaginary;
+            radians = branch.SeriesRadians * (1 + branch.OffsetForReactance(reactance));
+        }
+
+        var scan = new AmplitudeScan(refinement, radians, crystal.ResistanceOhms);
+        largestNegativeOhms = scan.LargestNegativeOhms;
+        return scan.Running is { } running ? Refine(crystal, branch, refinement, running) : null;
+    }
+
+    private static SteadyState? Refine(Crystal crystal, in CrystalBranch branch, Refinement refinement, AmplitudeBalance balance)
+    {
+        double frequency = double.NaN;
+        double current = double.NaN;
+        while (true)
+        {
+            if (!Settle(branch, balance))
+            {
+                return null;
+            }
+
+            if (refinement.IsIncomplete(balance))
+            {
+                balance = refinement.Complete(balance);
+                continue;
+            }
+
+            bool agrees = Math.Abs(balance.Radians - frequency) < FrequencyAgreement * frequency
+                && Math.Abs(balance.PeakAmps - current) < CurrentAgreement * current;
+            (frequency, current) = (balance.Radians, balance.PeakAmps);
+            AmplitudeBalance? finer = agrees ? null : refinement.Finer(balance);
+            if (finer is null)
+            {
+                return Describe(crystal, balance);
+            }
+
+            balance = finer;
+        }
+    }
+
+    /// <summary>Repeats the running state at the frequency it gives until the frequency stands.</summary>
+    private static bool Settle(in CrystalBranch branch, AmplitudeBalance balance)
+    {
+        for (int step = 0; step < 12; step++)
+        {
+            if (!balance.SolveRunning(branch.ResistanceOhms))
+            {
+                return false;
+            }
+
+            double radians = branch.SeriesRadians * (1 + branch.OffsetForReactance(balance.Impedance.Imaginary));
+            bool stands = Math.Abs(radians - balance.Radians) < 2e-13 * radians;
+            balance.SetFrequency(radians);
+            if (stands)
+            {
+                return true;
+            }
+        }
+
+        return true;
+    }
+
+    private static SteadyState Describe(Crystal crystal, AmplitudeBalance balance)
+    {
+        double hertz = balance.Radians / (2 * Math.PI);
+        double rms = balance.PeakAmps / Math.Sqrt(2);
+        return new SteadyState
+        {
+            FrequencyHz = hertz,
+            LoadFarads = crystal.LoadAtFrequencyFarads(hertz),
+            CurrentRmsAmps = rms,
+            DriveWatts = crystal.ResistanceOhms * rms * rms,
+            OutputSwingVolts = balance.OutputSwingVolts(),
+            LimitedBySupply = balance.LimitedBySupply,
+        };
+    }
+}
