@@ -1,0 +1,135 @@
+using LiteDB;
+using PartPick.Catalog.Mapping;
+
+namespace PartPick.Catalog;
+
+/// <summary>An open catalogue file; the lock has to be held while it is.</summary>
+internal sealed class CatalogFile : IDisposable
+{
+    /// <summary>The number of the form in which the documents are stored.</summary>
+    public const int Schema = 1;
+
+    private const string FingerprintKey = "builtInFingerprint";
+    private const int PageBytes = 8192;
+    private const int MarkOffset = 32;
+
+    private readonly LiteDatabase _database;
+
+    private CatalogFile(string path)
+    {
+        // The collation is stored in the file: ordinal and without a culture, the same on every machine.
+        var connection = new ConnectionString
+        {
+            Filename = path,
+            Connection = ConnectionType.Direct,
+            Collation = new Collation("/Ordinal"),
+        };
+        _database = new LiteDatabase(connection, new BsonMapper());
+    }
+
+    public int StoredSchema => _database.UserVersion;
+
+    public string? BuiltInFingerprint
+    {
+        get => TextDocument.Read(About.FindById(FingerprintKey));
+        private set => About.Upsert(TextDocument.Write(FingerprintKey, value!));
+    }
+
+    private ILiteCollection<BsonDocument> Parts => _database.GetCollection(PartDocument.Collection);
+
+    private ILiteCollection<BsonDocument> About => _database.GetCollection(TextDocument.AboutCollection);
+
+    private ILiteCollection<BsonDocument> Settings => _database.GetCollection(TextDocument.SettingsCollection);
+
+    /// <summary>Opens a file that is there.</summary>
+    /// <exception cref="InvalidDataException">It is no catalogue.</exception>
+    public static CatalogFile Open(string path)
+    {
+        if (!LooksWhole(path))
+        {
+            throw new InvalidDataException("The file is not a catalogue, or only a piece of one.");
+        }
+
+        return new CatalogFile(path);
+    }
+
+    /// <summary>
+    /// Makes a new file with the built-in parts. It is filled under another name and renamed when it is complete and on the disk.
+    /// </summary>
+    public static void Create(string path, BuiltInFiles builtIn)
+    {
+        string unfinished = path + ".new";
+        Delete(unfinished);
+        using (var file = new CatalogFile(unfinished))
+        {
+            file._database.UserVersion = Schema;
+            file.ReplaceBuiltIn(builtIn);
+        }
+
+        using (var stream = new FileStream(unfinished, FileMode.Open, FileAccess.ReadWrite))
+        {
+            stream.Flush(flushToDisk: true);
+        }
+
+        // What an older file of this name left unfinished must not be applied to the new one.
+        File.Delete(LogOf(path));
+        File.Move(unfinished, path);
+        Delete(unfinished);
+    }
+
+    /// <summary>All parts; null where a document holds none.</summary>
+    public List<Part?> ReadParts() => [.. Parts.FindAll().Select(PartDocument.Read)];
+
+    /// <summary>Puts the built-in parts in the place of the earlier ones, in one transaction; a part of the user's own stays.</summary>
+    public void ReplaceBuiltIn(BuiltInFiles builtIn)
+    {
+        _database.BeginTrans();
+        Parts.DeleteMany(BsonExpression.Create($"$.{PartDocument.BuiltIn} = @0", true));
+        HashSet<string> own = [.. Parts.FindAll().Select(document => document["_id"].AsString)];
+        Parts.Insert(builtIn.ReadCatalog().All.Where(part => !own.Contains(part.Id)).Select(part => PartDocument.Write(part, true)));
+        BuiltInFingerprint = builtIn.Fingerprint();
+        _database.Commit();
+    }
+
+    /// <summary>Puts in parts of the user's own; a part of the same id is replaced.</summary>
+    public void PutOwn(IEnumerable<Part> parts)
+    {
+        _database.BeginTrans();
+        foreach (Part part in parts)
+        {
+            Parts.Upsert(PartDocument.Write(part, false));
+        }
+
+        _database.Commit();
+    }
+
+    public string? ReadSetting(string key) => TextDocument.Read(Settings.FindById(key));
+
+    public void WriteSetting(string key, string text) => Settings.Upsert(TextDocument.Write(key, text));
+
+    public void Dispose() => _database.Dispose();
+
+    // A file of whole pages that carries the mark of the file format: anything else would be taken for a new, empty file.
+    private static bool LooksWhole(string path)
+    {
+        using FileStream stream = File.OpenRead(path);
+        if (stream.Length < PageBytes || stream.Length % PageBytes != 0)
+        {
+            return false;
+        }
+
+        ReadOnlySpan<byte> mark = "** This is a LiteDB file **"u8;
+        Span<byte> start = stackalloc byte[MarkOffset + 27];
+        stream.ReadExactly(start);
+        return start[MarkOffset..].SequenceEqual(mark);
+    }
+
+    private static void Delete(string path)
+    {
+        File.Delete(path);
+        File.Delete(LogOf(path));
+    }
+
+    private static string LogOf(string path) => Path.Combine(
+        Path.GetDirectoryName(path) ?? "", $"{Path.GetFileNameWithoutExtension(path)}-log{Path.GetExtension(path)}");
+}
