@@ -30,7 +30,9 @@ public static class CatalogStore
             : Result.Ok<string?>(null);
     }
 
-    /// <summary>Keeps a small text, such as the last requirement. A file that is not there is made as in <see cref="Load(string)"/>.</summary>
+    /// <summary>
+    /// Keeps a small text, such as the last requirement. A file that is not there is made as in <see cref="Load(string)"/>.
+    /// </summary>
     /// <param name="path">The path of the file.</param>
     /// <param name="key">The name of the text.</param>
     /// <param name="text">The text.</param>
@@ -111,7 +113,8 @@ public static class CatalogStore
         {
             file?.Abandon();
             return Result.Fail<T>(
-                path, $"is damaged or no catalogue: {error.Message}", "a catalogue made by this program; move this file away to begin anew");
+                path, $"is damaged or no catalogue: {error.Message}",
+                "a catalogue made by this program; move this file away to begin anew");
         }
         catch
         {
