@@ -17,6 +17,9 @@ internal abstract class Refinement
     /// <summary>The same state with twice the harmonics; null at the finest.</summary>
     public abstract AmplitudeBalance? Finer(AmplitudeBalance balance);
 
+    /// <summary>A balance of the fineness of a kept state, in that state; null where the state is of another kind of circuit.</summary>
+    public abstract AmplitudeBalance? From(RunningState state);
+
     /// <summary>Whether the last solution shows a current that the balance leaves out.</summary>
     public virtual bool IsIncomplete(AmplitudeBalance balance) => false;
 

@@ -15,6 +15,9 @@ internal sealed class OneStageRefinement(GateNetwork network, SquareLaw law) : R
 
     public override AmplitudeBalance? Finer(AmplitudeBalance balance) =>
         balance.State.Length < MostPoints ? ((OneStageBalance)balance).Refined() : null;
+
+    public override AmplitudeBalance? From(RunningState state) =>
+        state.Kind == typeof(OneStageBalance) ? state.PutInto(new OneStageBalance(network, law, state.Points)) : null;
 }
 
 /// <summary>Finenesses of the buffered gate: 4 to 64 odd harmonics of the input.</summary>
@@ -28,6 +31,10 @@ internal sealed class BufferedRefinement(GateNetwork network, BufferedInverter i
 
     public override AmplitudeBalance? Finer(AmplitudeBalance balance) =>
         balance.State.Length < 2 * MostHarmonics ? ((BufferedBalance)balance).Refined() : null;
+
+    public override AmplitudeBalance? From(RunningState state) => state.Kind == typeof(BufferedBalance)
+        ? state.PutInto(new BufferedBalance(network, inverter.Gain, inverter.Ron, supplyVolts, state.Points))
+        : null;
 }
 
 /// <summary>Finenesses of the follower: 32 to 512 points per period, with the collector junction where it conducts.</summary>
@@ -43,6 +50,11 @@ internal sealed class FollowerRefinement(FollowerCircuit circuit, FollowerBias b
         var follower = (FollowerBalance)balance;
         return follower.Points < MostPoints ? follower.Refined(follower.Reverse, 2 * follower.Points) : null;
     }
+
+    public override AmplitudeBalance? From(RunningState state) =>
+        state.Kind == typeof(FollowerBalance) && state.HoldsCurrent == circuit.EmitterCurrentAmps is not null
+            ? state.PutInto(new FollowerBalance(circuit, bias, state.Reverse, state.Points))
+            : null;
 
     public override bool IsIncomplete(AmplitudeBalance balance) => ((FollowerBalance)balance).NeedsReverse;
 

@@ -11,6 +11,7 @@ internal static class SteadySolver
 {
     private const double FrequencyAgreement = 3e-8;
     private const double CurrentAgreement = 1e-3;
+    private const int FollowedLevel = 1;
 
     /// <summary>Scans the amplitude and refines the running state.</summary>
     /// <param name="crystal">The crystal.</param>
@@ -18,9 +19,10 @@ internal static class SteadySolver
     /// <param name="siemens">Transconductance at the bias point.</param>
     /// <param name="refinement">The balances of the circuit.</param>
     /// <param name="largestNegativeOhms">Largest −Re Zc(I) over the amplitude, in ohms.</param>
+    /// <param name="state">The state, as a starting point for circuits like this one.</param>
     /// <returns>The steady state, or null where there is none.</returns>
     public static SteadyState? Solve<TNetwork>(
-        Crystal crystal, in TNetwork network, double siemens, Refinement refinement, out double largestNegativeOhms)
+        Crystal crystal, in TNetwork network, double siemens, Refinement refinement, out double largestNegativeOhms, out RunningState? state)
         where TNetwork : struct, ILinearNetwork
     {
         var branch = new CrystalBranch(crystal);
@@ -35,14 +37,31 @@ internal static class SteadySolver
 
         var scan = new AmplitudeScan(refinement, radians, crystal.ResistanceOhms);
         largestNegativeOhms = scan.LargestNegativeOhms;
-        return scan.Running is { } running ? Refine(crystal, branch, refinement, running) : null;
+        state = null;
+        return scan.Running is { } running ? Refine(crystal, branch, refinement, running, out state) : null;
     }
 
-    private static SteadyState? Refine(Crystal crystal, in CrystalBranch branch, Refinement refinement, AmplitudeBalance balance)
+    /// <summary>The steady state near one of a circuit like this one, at the same fineness; null where it is not found from there.</summary>
+    public static SteadyState? Follow(Crystal crystal, Refinement refinement, RunningState near, out RunningState? state)
     {
+        state = null;
+        var branch = new CrystalBranch(crystal);
+        if (refinement.From(near) is not { } balance || !Settle(branch, balance) || refinement.IsIncomplete(balance))
+        {
+            return null;
+        }
+
+        state = balance.Keep();
+        return Describe(crystal, balance);
+    }
+
+    private static SteadyState? Refine(
+        Crystal crystal, in CrystalBranch branch, Refinement refinement, AmplitudeBalance balance, out RunningState? state)
+    {
+        state = null;
         double frequency = double.NaN;
         double current = double.NaN;
-        while (true)
+        for (int level = 0; ; level++)
         {
             if (!Settle(branch, balance))
             {
@@ -52,7 +71,13 @@ internal static class SteadySolver
             if (refinement.IsIncomplete(balance))
             {
                 balance = refinement.Complete(balance);
+                level--;
                 continue;
+            }
+
+            if (state is null || (level == FollowedLevel && !state.Reverse))
+            {
+                state = balance.Keep();
             }
 
             bool agrees = Math.Abs(balance.Radians - frequency) < FrequencyAgreement * frequency
