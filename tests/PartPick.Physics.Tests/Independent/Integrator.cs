@@ -49,9 +49,9 @@ internal sealed class Integrator
     public double Current { get; set; }
 
     /// <summary>Voltage over the motional capacitance.</summary>
-    public double MotionalVolts { get; set; }
+    public double MotionalVolts { get; private set; }
 
-    /// <summary>Mean part of that voltage: the static voltage over the crystal.</summary>
+    /// <summary>Stretches the step so that this frequency comes out exact.</summary>
     public void TuneTo(double frequencyHz)
     {
         double omega = 2 * Math.PI * frequencyHz;

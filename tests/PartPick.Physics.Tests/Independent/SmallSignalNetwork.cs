@@ -69,7 +69,11 @@ internal sealed class SmallSignalNetwork
     }
 
     /// <summary>Impedance between the crystal's terminals in ohms, by a solution of the full nodal matrix.</summary>
-    public Complex Impedance(Complex s)
+    public Complex Impedance(Complex s) =>
+        Voltage(s, CrystalPlus) - (CrystalMinus >= 0 ? Voltage(s, CrystalMinus) : Complex.Zero);
+
+    /// <summary>Voltage of a node per ampere through the crystal's terminals, in ohms.</summary>
+    public Complex Voltage(Complex s, int node)
     {
         Matrix<Complex> admittance = Conductance(s) + Capacitance().ToComplex() * s;
         var current = Vector<Complex>.Build.Dense(Nodes);
@@ -79,8 +83,7 @@ internal sealed class SmallSignalNetwork
             current[CrystalMinus] = -1;
         }
 
-        Vector<Complex> voltage = admittance.Solve(current);
-        return voltage[CrystalPlus] - (CrystalMinus >= 0 ? voltage[CrystalMinus] : Complex.Zero);
+        return admittance.Solve(current)[node];
     }
 
     private static SmallSignalNetwork Gate(GateCircuit gate, double transconductance)

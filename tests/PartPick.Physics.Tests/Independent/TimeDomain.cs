@@ -15,10 +15,13 @@ internal static class TimeDomain
 {
     private const int WindowCycles = 24;
 
+    /// <summary>How far −Re Zc may stay from Rm, as a share of Rm.</summary>
+    private const double Tolerance = 1e-4;
+
     /// <summary>The steady state, or null where the oscillation dies.</summary>
     /// <param name="circuit">Circuit.</param>
     /// <param name="stepsPerCycle">Time steps per cycle.</param>
-    /// <param name="startPeakAmps">Motional current to start with; null for a guess from the supply.</param>
+    /// <param name="startPeakAmps">Motional current to start with; null for one above what the supply can sustain.</param>
     public static Oscillation? Settle(OscillatorCircuit circuit, int stepsPerCycle = 256, double? startPeakAmps = null)
     {
         CircuitInTime network = circuit switch
@@ -31,11 +34,12 @@ internal static class TimeDomain
         double frequency = crystal.SeriesHz;
         double floor = 1e-6 * Guess(circuit);
         var integrator = new Integrator(network, crystal, 1 / (frequency * stepsPerCycle));
-        Excite(integrator, crystal, startPeakAmps ?? Guess(circuit));
+        integrator.Current = startPeakAmps ?? Guess(circuit);
 
         int settleCycles = (int)Math.Clamp(5 * network.SlowestSeconds * frequency, 16, 800);
         double toExcess = 2 * crystal.InductanceHenries / crystal.ResistanceOhms;
         double? lastLog = null, lastExcess = null;
+        double slope = -1;
         int cycles = 0;
         for (int round = 0; round < 60; round++)
         {
@@ -45,7 +49,7 @@ internal static class TimeDomain
             cycles += settleCycles + WindowCycles;
             double log = Math.Log(window.PeakAmps);
             double excess = window.GrowthPerSecond * toExcess;
-            if (Math.Abs(excess) < 2e-5)
+            if (Math.Abs(excess) < Tolerance)
             {
                 return new Oscillation(
                     window.PeakAmps,
@@ -61,11 +65,16 @@ internal static class TimeDomain
                 return null;
             }
 
-            double slope = lastLog is { } l && lastExcess is { } e && Math.Abs(log - l) > 1e-9 ? (excess - e) / (log - l) : -1;
-            double change = slope < -0.02 ? -excess / slope : Math.Sign(excess) * 0.5;
-            change = Math.Clamp(change, -0.7, 0.7);
+            // Too short a secant measures noise: then the slope known so far serves on.
+            if (lastLog is { } l && lastExcess is { } e && Math.Abs(log - l) > 3e-3)
+            {
+                slope = (excess - e) / (log - l);
+            }
+
+            double change = slope < -0.02 ? -excess / slope : Math.Sign(excess) * 0.3;
+            change = Math.Clamp(change, -0.4, 0.4);
             (lastLog, lastExcess) = (log, excess);
-            Scale(integrator, window, Math.Exp(change + log) / window.LastPeakAmps);
+            Scale(integrator, stepsPerCycle, Math.Exp(change + log) / window.LastPeakAmps);
         }
 
         throw new InvalidOperationException("The amplitude did not settle.");
@@ -77,21 +86,21 @@ internal static class TimeDomain
         return circuit switch
         {
             FollowerCircuit follower => Math.Min(4 * FollowerBias.Of(follower).EmitterAmps, 0.5 * circuit.SupplyVolts * susceptance),
-            _ => 0.4 * circuit.SupplyVolts * susceptance,
+            _ => 0.8 * circuit.SupplyVolts * susceptance,
         };
     }
 
-    private static void Excite(Integrator integrator, Crystal crystal, double peakAmps)
+    /// <summary>
+    /// Gives the motional current another amplitude at its crest, where the voltages that it makes over capacitances pass
+    /// zero: anywhere else the bias would be left with an offset that takes long to decay.
+    /// </summary>
+    private static void Scale(Integrator integrator, int stepsPerCycle, double factor)
     {
-        // At the top of the voltage over the motional capacitance the current passes zero.
-        integrator.Current = 0;
-        integrator.MotionalVolts += peakAmps / (2 * Math.PI * crystal.SeriesHz * crystal.MotionalFarads);
-    }
+        for (int k = 0; k < stepsPerCycle / 4; k++)
+        {
+            integrator.Advance();
+        }
 
-    /// <summary>Called at an upward zero crossing of the current, where the motional voltage is at its lowest.</summary>
-    private static void Scale(Integrator integrator, Window window, double factor)
-    {
         integrator.Current *= factor;
-        integrator.MotionalVolts = window.MeanMotionalVolts + factor * (integrator.MotionalVolts - window.MeanMotionalVolts);
     }
 }

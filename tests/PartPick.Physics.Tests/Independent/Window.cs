@@ -6,7 +6,6 @@ internal sealed record Window(
     double LastPeakAmps,
     double FrequencyHz,
     double GrowthPerSecond,
-    double MeanMotionalVolts,
     double SwingVolts,
     double HighestWatchedVolts)
 {
@@ -17,7 +16,6 @@ internal sealed record Window(
         double[] squares = new double[cycles];
         int seen = -1;
         double square = 0, lowest = double.MaxValue, highest = double.MinValue, watched = double.MinValue;
-        double least = double.MaxValue, most = double.MinValue;
         double limit = step * 1e4 * (cycles + 4);
         while (seen < cycles)
         {
@@ -50,8 +48,6 @@ internal sealed record Window(
             double output = integrator.Voltages[network.OutputNode];
             lowest = Math.Min(lowest, output);
             highest = Math.Max(highest, output);
-            least = Math.Min(least, integrator.MotionalVolts);
-            most = Math.Max(most, integrator.MotionalVolts);
             watched = Math.Max(watched, network.Watched(integrator.Voltages));
         }
 
@@ -63,7 +59,6 @@ internal sealed record Window(
             Math.Exp(mean + slope * (cycles - 1) / 2.0),
             frequency,
             slope * frequency,
-            (least + most) / 2,
             highest - lowest,
             watched);
     }
