@@ -80,13 +80,7 @@ public sealed class StartUpAgainstNaturalModesTests
         int failed = 0;
         for (int k = 0; k < CircuitsPerKind; k++)
         {
-            OscillatorCircuit circuit = kind switch
-            {
-                "one stage" => RandomCircuits.OneStage(random),
-                "clock" => RandomCircuits.Clock(random),
-                "buffered" => RandomCircuits.Buffered(random),
-                _ => RandomCircuits.Follower(random),
-            };
+            OscillatorCircuit circuit = RandomCircuits.Next(random, kind);
             if (compare(circuit, OscillatorAnalysis.AnalyseStartUp(circuit)) is { } failure)
             {
                 failed++;

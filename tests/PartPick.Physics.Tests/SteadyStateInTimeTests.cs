@@ -90,6 +90,23 @@ public sealed class SteadyStateInTimeTests
     [MemberData(nameof(FollowerNames))]
     public void Followers_agree(string name) => Agrees(Followers[name], 0.01, 0.1 * Pico);
 
+    [Theory]
+    [InlineData("one stage")]
+    [InlineData("clock")]
+    [InlineData("follower")]
+    public void Circuits_drawn_at_random_agree(string kind)
+    {
+        var random = new Random(78);
+        for (int k = 0; k < 8; k++)
+        {
+            OscillatorCircuit circuit = RandomCircuits.LowQuality(RandomCircuits.Next(random, kind));
+            if (TimeDomain.Settle(circuit) is not null)
+            {
+                Agrees(circuit, 0.01, 0.1 * Pico);
+            }
+        }
+    }
+
     [Fact]
     public void A_gate_below_its_critical_gain_has_no_steady_state() =>
         Assert.Null(OscillatorAnalysis.FindSteadyState(Samples.StrongGate(0.05e-3, 200e3, 0)));
@@ -101,12 +118,12 @@ public sealed class SteadyStateInTimeTests
         Oscillation? time = TimeDomain.Settle(circuit);
         SteadyState? found = OscillatorAnalysis.FindSteadyState(circuit);
         Assert.NotNull(time);
-        Assert.True(found is not null, $"No steady state found; in time {time}");
+        Assert.True(found is not null, $"No steady state found; in time {time}\n{circuit}");
 
         string both = FormattableString.Invariant(
             $"in time {time.PeakAmps * 1e3:F5} mA peak, {time.LoadFarads / Pico:F4} pF, swing {time.OutputSwingVolts:F4} V; ")
             + FormattableString.Invariant(
-            $"found {found.CurrentRmsAmps * Math.Sqrt(2) * 1e3:F5} mA, {found.LoadFarads / Pico:F4} pF, {found.OutputSwingVolts:F4} V");
+            $"found {found.CurrentRmsAmps * Math.Sqrt(2) * 1e3:F5} mA, {found.LoadFarads / Pico:F4} pF, {found.OutputSwingVolts:F4} V\n{circuit}");
         Assert.True(Math.Abs(found.CurrentRmsAmps * Math.Sqrt(2) / time.PeakAmps - 1) <= currentRatio, "Current: " + both);
         Assert.True(Math.Abs(found.LoadFarads - time.LoadFarads) <= loadFarads, "Load: " + both);
         if (circuit is not GateCircuit { Inverter: BufferedInverter })

@@ -16,6 +16,9 @@ internal sealed class FollowerInTime : CircuitInTime
     private readonly FollowerBias _bias;
     private readonly double _couplingSeconds;
 
+    /// <summary>What the coupling capacitor's reactance adds at the emitter, taken off again there, in farads.</summary>
+    private readonly double _compensation;
+
     public FollowerInTime(FollowerCircuit circuit)
         : base(CountNodes(circuit), B, -1)
     {
@@ -25,7 +28,6 @@ internal sealed class FollowerInTime : CircuitInTime
         _i = circuit.Transistor.BaseSpreadingOhms > 0 ? next++ : B;
         Capacitor(B, -1, circuit.Crystal.ShuntFarads + circuit.Strays.AcrossFarads);
         Capacitor(B, E, circuit.C1Farads);
-        Capacitor(E, -1, circuit.C2Farads + circuit.Strays.OutputFarads);
         Capacitor(_i, -1, circuit.Transistor.CollectorFarads);
         Capacitor(_i, E, circuit.Transistor.JunctionFarads);
         if (_i != B)
@@ -45,9 +47,13 @@ internal sealed class FollowerInTime : CircuitInTime
         if (coupled > 0)
         {
             _couplingSeconds = CouplingCycles / circuit.Crystal.NominalHz;
+            double cyclesPerRadian = 1 / (2 * Math.PI * CouplingCycles);
+            _compensation = -coupled * cyclesPerRadian / (2 * Math.PI * circuit.Crystal.NominalHz);
             Capacitor(E, next, _couplingSeconds * coupled);
             Resistor(next, -1, 1 / coupled);
         }
+
+        Capacitor(E, -1, circuit.C2Farads + circuit.Strays.OutputFarads + _compensation);
     }
 
     public override int OutputNode => E;

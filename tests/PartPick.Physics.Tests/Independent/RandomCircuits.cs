@@ -16,6 +16,30 @@ internal static class RandomCircuits
         _ => Follower(random),
     };
 
+    public static OscillatorCircuit Next(Random random, string kind) => kind switch
+    {
+        "one stage" => OneStage(random),
+        "clock" => Clock(random),
+        "buffered" => Buffered(random),
+        "follower" => Follower(random),
+        _ => throw new ArgumentException("No such kind.", nameof(kind)),
+    };
+
+    /// <summary>
+    /// The same circuit with a crystal of some fifteen hundred in quality, which settles soon in time; its motional capacitance
+    /// stays a tenth of C0, so that harmonics still find it open. A given emitter current gets a supply that does not limit it,
+    /// for the base's mean voltage is not defined then.
+    /// </summary>
+    public static OscillatorCircuit LowQuality(OscillatorCircuit circuit)
+    {
+        Crystal crystal = circuit.Crystal;
+        double motional = 1 / (2 * Math.PI * crystal.NominalHz * crystal.ResistanceOhms * 1500);
+        return (circuit is FollowerCircuit { EmitterCurrentAmps: not null } ? circuit with { SupplyVolts = 60 } : circuit) with
+        {
+            Crystal = crystal with { MotionalFarads = Math.Min(motional, crystal.ShuntFarads / 10) },
+        };
+    }
+
     public static double Transconductance(OscillatorCircuit circuit) => circuit switch
     {
         GateCircuit gate => gate.Inverter.TransconductanceSiemens,
