@@ -141,17 +141,4 @@ public sealed class SteadyStateInTimeTests
                 FormattableString.Invariant($"vBC reaches {time.HighestWatchedVolts} V, limited: {found.LimitedBySupply}"));
         }
     }
-
-    /// <summary>What the integration alone says of every circuit here: each oscillates and settles soon.</summary>
-    [Fact]
-    public void Every_circuit_here_settles_in_time()
-    {
-        foreach ((string name, OscillatorCircuit circuit) in OneStageGates.Concat(BufferedGates).Concat(Followers))
-        {
-            var watch = System.Diagnostics.Stopwatch.StartNew();
-            Oscillation? time = TimeDomain.Settle(circuit);
-            Assert.True(time is not null, name);
-            TestContext.Current.TestOutputHelper?.WriteLine(FormattableString.Invariant($"{name}: {time} {watch.ElapsedMilliseconds} ms"));
-        }
-    }
 }
