@@ -47,7 +47,7 @@ public sealed class SteadyStateExistsTests
         Assert.True(failed == 0, $"{failed} of {tried}:\n{failures}");
     }
 
-    // Integrated in time with a motional capacitance of 0.3 pF and 30 to 20 Ω such a follower settles, vBC at 0.67 V.
+    // With 0.3 pF of motional capacitance and 1 kΩ the integration in time settles at 13.0 mA peak, vBC reaching 0.67 V.
     [Theory]
     [InlineData(1e3)]
     [InlineData(2.2e3)]
