@@ -46,9 +46,6 @@ internal abstract class AmplitudeBalance
         PrepareHarmonics(radians);
     }
 
-    /// <summary>Takes frequency, amplitude and state of another balance of the same kind and fineness.</summary>
-    public void TakeState(AmplitudeBalance other) => TakeState(other.Radians, other.PeakAmps, other.State);
-
     /// <summary>Takes a frequency in rad/s, an amplitude in amperes and a state of the same kind and fineness.</summary>
     public void TakeState(double radians, double peakAmps, ReadOnlySpan<double> state)
     {
@@ -132,7 +129,7 @@ internal abstract class AmplitudeBalance
 
             if (total < Tolerance)
             {
-                return resistanceOhms is not null || Finish(n, factored);
+                return resistanceOhms is not null || Finish(n);
             }
 
             if (!factored || total > KeepRatio * before)
@@ -162,10 +159,10 @@ internal abstract class AmplitudeBalance
         return false;
     }
 
-    // Factors of the last steps serve for the slope; without any (the start was the solution) they are made now.
-    private bool Finish(int n, bool factored)
+    // The slope of the solved state along the amplitude, with factors of that very state.
+    private bool Finish(int n)
     {
-        if (!factored && !Factor(n, n, null))
+        if (!Factor(n, n, null))
         {
             return false;
         }

@@ -6,14 +6,6 @@ internal abstract class Refinement
     /// <summary>The balance with the fewest harmonics, for the search over amplitude.</summary>
     public abstract AmplitudeBalance Coarse();
 
-    /// <summary>An independent balance of the same fineness in the same state.</summary>
-    public AmplitudeBalance Copy(AmplitudeBalance balance)
-    {
-        AmplitudeBalance copy = Coarse();
-        copy.TakeState(balance);
-        return copy;
-    }
-
     /// <summary>The same state with twice the harmonics; null at the finest.</summary>
     public abstract AmplitudeBalance? Finer(AmplitudeBalance balance);
 

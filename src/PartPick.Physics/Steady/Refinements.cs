@@ -20,11 +20,11 @@ internal sealed class OneStageRefinement(GateNetwork network, SquareLaw law) : R
         state.Kind == typeof(OneStageBalance) ? state.PutInto(new OneStageBalance(network, law, state.Points)) : null;
 }
 
-/// <summary>Finenesses of the buffered gate: 4 to 64 odd harmonics of the input.</summary>
+/// <summary>Finenesses of the buffered gate: 4 to 32 odd harmonics of the input.</summary>
 internal sealed class BufferedRefinement(GateNetwork network, BufferedInverter inverter, double supplyVolts) : Refinement
 {
     private const int FewestHarmonics = 4;
-    private const int MostHarmonics = 64;
+    private const int MostHarmonics = 32;
 
     public override AmplitudeBalance Coarse() =>
         new BufferedBalance(network, inverter.Gain, inverter.Ron, supplyVolts, FewestHarmonics);

@@ -61,11 +61,12 @@ internal static class SteadySolver
         state = null;
         double frequency = double.NaN;
         double current = double.NaN;
+        AmplitudeBalance? coarser = null;
         for (int level = 0; ; level++)
         {
             if (!Settle(branch, balance))
             {
-                return null;
+                return coarser is null ? null : Describe(crystal, coarser);
             }
 
             if (refinement.IsIncomplete(balance))
@@ -89,6 +90,7 @@ internal static class SteadySolver
                 return Describe(crystal, balance);
             }
 
+            coarser = balance;
             balance = finer;
         }
     }
