@@ -45,25 +45,59 @@ public static class OscillatorAnalysis
     public static SteadyState? FindSteadyState(OscillatorCircuit circuit) => Analyse(circuit).Steady;
 
     /// <summary>
-    /// The steady state of a circuit like one whose running state is known: many times cheaper than from nothing, and the same
-    /// state. Where it is not found from there, it is sought from nothing.
+    /// The steady state of a circuit like one whose running state is known: many times cheaper than from nothing. Where it is
+    /// not found from there, it is sought from nothing.
     /// </summary>
     /// <param name="circuit">The circuit.</param>
     /// <param name="near">The running state of a circuit like it.</param>
+    /// <param name="refine">
+    /// True to refine it like a state sought from nothing; false to stay at the known state's fineness, good for differences
+    /// between circuits alike.
+    /// </param>
     /// <param name="state">The running state; null where there is none.</param>
-    public static SteadyState? FindSteadyState(OscillatorCircuit circuit, RunningState near, out RunningState? state)
+    public static SteadyState? FindSteadyState(OscillatorCircuit circuit, RunningState near, bool refine, out RunningState? state)
     {
         ArgumentNullException.ThrowIfNull(near);
-        Refinement? refinement = circuit switch
-        {
-            GateCircuit gate => Balances(gate),
-            FollowerCircuit follower => new FollowerRefinement(follower, FollowerBias.Solve(follower)),
-            _ => throw new ArgumentException("Unknown kind of circuit.", nameof(circuit)),
-        };
         state = null;
-        SteadyState? steady = refinement is null ? null : SteadySolver.Follow(circuit.Crystal, refinement, near, out state);
+        SteadyState? steady = Balances(circuit) is { } refinement
+            ? SteadySolver.Follow(circuit.Crystal, refinement, near, refine, out state)
+            : null;
         return steady ?? Analyse(circuit, out state).Steady;
     }
+
+    /// <summary>A quick estimate of the steady state; null where there is none.</summary>
+    /// <param name="circuit">The circuit.</param>
+    /// <param name="near">The state of an estimate of a circuit like it; null to start from nothing.</param>
+    /// <param name="state">The state, for the next estimate.</param>
+    public static SteadyEstimate? EstimateSteadyState(OscillatorCircuit circuit, RunningState? near, out RunningState? state)
+    {
+        state = null;
+        if (Balances(circuit) is not { } refinement)
+        {
+            return null;
+        }
+
+        switch (circuit)
+        {
+            case GateCircuit gate:
+                return SteadySolver.Estimate(gate.Crystal, SmallSignals(gate), Transconductance(gate), refinement, near, out state);
+            case FollowerCircuit follower:
+                double siemens = FollowerBias.Solve(follower).TransconductanceSiemens;
+                return SteadySolver.Estimate(follower.Crystal, new FollowerNetwork(follower), siemens, refinement, near, out state);
+            default:
+                throw new ArgumentException("Unknown kind of circuit.", nameof(circuit));
+        }
+    }
+
+    /// <summary>Start-up margin and growth rate alone, the cheapest figures of all.</summary>
+    /// <param name="circuit">The circuit.</param>
+    public static StartFigures FindStartFigures(OscillatorCircuit circuit) => circuit switch
+    {
+        GateCircuit gate => StartUpSolver.Figures(gate.Crystal, SmallSignals(gate), Transconductance(gate)),
+        FollowerCircuit follower => StartUpSolver.Figures(
+            follower.Crystal, new FollowerNetwork(follower), FollowerBias.Solve(follower).TransconductanceSiemens),
+        _ => throw new ArgumentException("Unknown kind of circuit.", nameof(circuit)),
+    };
 
     /// <summary>ln(Î/Î0)/σ with the thermal current Î0 = √(kT/Lm) of the motional branch, in seconds.</summary>
     /// <param name="circuit">The circuit.</param>
@@ -126,6 +160,20 @@ public static class OscillatorAnalysis
         gate.Inverter is OneStageInverter oneStage && SquareLaw.Fit(oneStage, gate.SupplyVolts) is null
             ? 0
             : gate.Inverter.TransconductanceSiemens;
+
+    private static Refinement? Balances(OscillatorCircuit circuit)
+    {
+        switch (circuit)
+        {
+            case GateCircuit gate:
+                return Balances(gate);
+            case FollowerCircuit follower:
+                FollowerBias bias = FollowerBias.Solve(follower);
+                return bias.EmitterAmps > 0 ? new FollowerRefinement(follower, bias) : null;
+            default:
+                throw new ArgumentException("Unknown kind of circuit.", nameof(circuit));
+        }
+    }
 
     private static Refinement? Balances(GateCircuit gate) => gate.Inverter switch
     {

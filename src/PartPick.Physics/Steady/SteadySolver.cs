@@ -26,23 +26,17 @@ internal static class SteadySolver
         where TNetwork : struct, ILinearNetwork
     {
         var branch = new CrystalBranch(crystal);
-        GrowthWindow window = GrowthWindow.Find(branch, network);
-        double guess = window.CriticalSiemens is { } critical && critical < siemens ? critical : siemens;
-        double radians = branch.SeriesRadians;
-        for (int step = 0; step < 3; step++)
-        {
-            double reactance = network.At(new System.Numerics.Complex(0, radians)).Impedance(guess).Imaginary;
-            radians = branch.SeriesRadians * (1 + branch.OffsetForReactance(reactance));
-        }
-
-        var scan = new AmplitudeScan(refinement, radians, crystal.ResistanceOhms);
+        var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms);
         largestNegativeOhms = scan.LargestNegativeOhms;
         state = null;
         return scan.Running is { } running ? Refine(crystal, branch, refinement, running, out state) : null;
     }
 
-    /// <summary>The steady state near one of a circuit like this one, at the same fineness; null where it is not found from there.</summary>
-    public static SteadyState? Follow(Crystal crystal, Refinement refinement, RunningState near, out RunningState? state)
+    /// <summary>
+    /// The steady state near one of a circuit like this one; null where it is not found from there. At the same fineness, or
+    /// refined like a state sought from nothing.
+    /// </summary>
+    public static SteadyState? Follow(Crystal crystal, Refinement refinement, RunningState near, bool refine, out RunningState? state)
     {
         state = null;
         var branch = new CrystalBranch(crystal);
@@ -51,8 +45,43 @@ internal static class SteadySolver
             return null;
         }
 
+        if (!refine)
+        {
+            state = balance.Keep();
+            return Describe(crystal, balance);
+        }
+
+        SteadyState? steady = Refine(crystal, branch, refinement, balance, out _);
+        state = near;
+        return steady;
+    }
+
+    /// <summary>
+    /// A quick estimate with the fewest harmonics, from the state of a circuit like this one or from nothing. Its frequency is
+    /// off by about a hundredth of the pull from series resonance: good to leave out what is far off, never shown.
+    /// </summary>
+    public static SteadyEstimate? Estimate<TNetwork>(
+        Crystal crystal, in TNetwork network, double siemens, Refinement refinement, RunningState? near, out RunningState? state)
+        where TNetwork : struct, ILinearNetwork
+    {
+        state = null;
+        var branch = new CrystalBranch(crystal);
+        AmplitudeBalance? balance = near is null ? null : refinement.From(near);
+        if (balance is null || !balance.SolveRunning(crystal.ResistanceOhms) || refinement.IsIncomplete(balance))
+        {
+            var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms);
+            balance = scan.Running;
+        }
+
+        if (balance is null)
+        {
+            return null;
+        }
+
+        double radians = branch.SeriesRadians * (1 + branch.OffsetForReactance(balance.Impedance.Imaginary));
+        double rms = balance.PeakAmps / Math.Sqrt(2);
         state = balance.Keep();
-        return Describe(crystal, balance);
+        return new SteadyEstimate(radians / (2 * Math.PI), crystal.ResistanceOhms * rms * rms);
     }
 
     private static SteadyState? Refine(
@@ -93,6 +122,22 @@ internal static class SteadySolver
             coarser = balance;
             balance = finer;
         }
+    }
+
+    // ω at the critical transconductance, to which the device's effective one falls.
+    private static double FirstGuess<TNetwork>(in CrystalBranch branch, in TNetwork network, double siemens)
+        where TNetwork : struct, ILinearNetwork
+    {
+        GrowthWindow window = GrowthWindow.Find(branch, network);
+        double guess = window.CriticalSiemens is { } critical && critical < siemens ? critical : siemens;
+        double radians = branch.SeriesRadians;
+        for (int step = 0; step < 3; step++)
+        {
+            double reactance = network.At(new System.Numerics.Complex(0, radians)).Impedance(guess).Imaginary;
+            radians = branch.SeriesRadians * (1 + branch.OffsetForReactance(reactance));
+        }
+
+        return radians;
     }
 
     /// <summary>Repeats the running state at the frequency it gives until the frequency stands.</summary>
