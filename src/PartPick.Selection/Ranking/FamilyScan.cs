@@ -18,7 +18,7 @@ internal sealed class FamilyScan
     // Load seen over load of the capacitors in series: never outside these bounds in the model, and steady between neighbours.
     private const double LowestLoadShare = 0.5;
     private const double HighestLoadShare = 1.5;
-    private const double NeighbourShare = 0.12;
+    private const double NeighbourShare = 0.07;
     private const double MarginSlack = 0.98;
     private readonly SearchSpace _space;
     private readonly CircuitFamily _family;
@@ -27,6 +27,7 @@ internal sealed class FamilyScan
     private readonly double _lowestLoad;
     private readonly double _highestLoad;
     private readonly double[] _loadShares;
+    private readonly OperatingPoint _nominal;
 
     public FamilyScan(SearchSpace space, CircuitFamily family, CancellationToken cancellation)
     {
@@ -34,6 +35,7 @@ internal sealed class FamilyScan
         _family = family;
         _cancellation = cancellation;
         _template = family.Members[0].Template;
+        _nominal = OperatingPoint.Nominal(space.Requirement);
         _loadShares = new double[family.Options.Length];
         _lowestLoad = double.PositiveInfinity;
         _highestLoad = 0;
@@ -87,31 +89,12 @@ internal sealed class FamilyScan
     {
         double c1 = _space.Capacitors[i].Farads;
         double c2 = _space.Capacitors[j].Farads;
+        double wanted = _space.Requirement.AllowDisturbance ? double.NegativeInfinity : _space.Requirement.Margin * MarginSlack;
         double before = double.NegativeInfinity;
         double share = 0;
         RunningState? near = null;
-        bool orderedBySeries = _family.Kind != CircuitKind.Follower;
         for (int option = 0; option < _family.Options.Length; option++)
         {
-            CircuitValues values = _family.Options[option].With(c1, c2);
-            double wanted = _space.Requirement.AllowDisturbance ? double.NegativeInfinity : _space.Requirement.Margin * MarginSlack;
-            double margin = WorstMargin(values, orderedBySeries ? double.NegativeInfinity : wanted);
-            if (margin < wanted)
-            {
-                NoteMarginMiss(option, i, j, margin);
-                if (orderedBySeries && margin < before)
-                {
-                    // The margin rises, if at all, and then falls along Rs: nothing beyond has it.
-                    MarginRejections += weight * (_family.Options.Length - option);
-                    return;
-                }
-
-                before = margin;
-                MarginRejections += weight;
-                continue;
-            }
-
-            before = margin;
             double known = share != 0 ? share : _loadShares[option];
             double expected = staticLoad * known;
             if (known != 0 && (expected * (1 + NeighbourShare) < _lowestLoad || expected * (1 - NeighbourShare) > _highestLoad))
@@ -120,33 +103,47 @@ internal sealed class FamilyScan
                 continue;
             }
 
-            OscillatorCircuit circuit = _template.At(values, OperatingPoint.Nominal(_space.Requirement));
+            CircuitValues values = _family.Options[option].With(c1, c2);
+            double margin = WorstMargin(values, wanted, out double first);
+            if (margin < wanted)
+            {
+                NoteMarginMiss(option, i, j, margin);
+                if (_family.Kind != CircuitKind.Follower && first < wanted && first < before)
+                {
+                    // At one corner the margin rises, if at all, and then falls along Rs: nothing beyond has it.
+                    MarginRejections += weight * (_family.Options.Length - option);
+                    return;
+                }
+
+                before = first;
+                MarginRejections += weight;
+                continue;
+            }
+
+            before = first;
+            OscillatorCircuit circuit = _template.At(values, _nominal);
             if (OscillatorAnalysis.EstimateSteadyState(circuit, near, out RunningState? state) is not { } estimate || state is null)
             {
-                // No estimate is no proof: the full analysis decides.
                 ErrorRejections += weight;
                 continue;
             }
 
             near = state;
-            Crystal crystal = _template.Crystal.Crystal;
-            double load = crystal.LoadAtFrequencyFarads(estimate.FrequencyHz);
+            double load = _template.Crystal.Crystal.LoadAtFrequencyFarads(estimate.FrequencyHz);
             share = load / staticLoad;
             _loadShares[option] = share;
-            Estimates.Add(new Estimate(option, i, j, margin, load, estimate.DriveWatts, state));
+            Estimates.Add(new Estimate(option, i, j, margin, load, estimate, state.Slim()));
         }
     }
 
-    private double WorstMargin(in CircuitValues values, double enough)
+    // The first corner is the weakest device at the lowest supply.
+    private double WorstMargin(in CircuitValues values, double wanted, out double first)
     {
-        double least = double.PositiveInfinity;
-        foreach (OperatingPoint point in _template.AmplifierCorners)
+        first = OscillatorAnalysis.FindStartFigures(_template.At(values, _template.AmplifierCorners[0])).Margin;
+        double least = first;
+        for (int corner = 1; corner < _template.AmplifierCorners.Length && least >= wanted; corner++)
         {
-            least = Math.Min(least, OscillatorAnalysis.FindStartFigures(_template.At(values, point)).Margin);
-            if (least < enough)
-            {
-                break;
-            }
+            least = Math.Min(least, OscillatorAnalysis.FindStartFigures(_template.At(values, _template.AmplifierCorners[corner])).Margin);
         }
 
         return least;
@@ -163,7 +160,7 @@ internal sealed class FamilyScan
     private double StaticLoad(double c1, double c2)
     {
         Strays strays = _space.Requirement.Board.Strays;
-        if (_template.At(new CircuitValues(c1, c2), OperatingPoint.Nominal(_space.Requirement)) is GateCircuit gate)
+        if (_template.At(new CircuitValues(c1, c2), _nominal) is GateCircuit gate)
         {
             double a = c1 + strays.InputFarads + gate.Inverter.InputFarads;
             double b = c2 + strays.OutputFarads + gate.Inverter.OutputFarads / 2;

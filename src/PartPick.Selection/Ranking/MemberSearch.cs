@@ -11,6 +11,8 @@ internal sealed class MemberSearch
 {
     private const double MarginSlack = 1.01;
     private const double SlopeShare = 0.4;
+    private const double BaseSlack = 1e-6;
+    private const double BaseDriveSlack = 0.01;
     private readonly SearchRun _run;
     private readonly CircuitFamily _family;
     private readonly FamilyMember _member;
@@ -30,21 +32,7 @@ internal sealed class MemberSearch
         var prospects = new List<Prospect>();
         foreach (Estimate estimate in estimates)
         {
-            Prospect prospect = Prospective(estimate);
-            double weight = Weight(estimate);
-            if (prospect.ErrorRatio > _budget)
-            {
-                Miss(estimate, prospect, Limit.Error, weight);
-            }
-            else if (estimate.DriveWatts * (1 - DriveSlack) > _member.Crystal.DriveLevelWatts)
-            {
-                Miss(estimate, prospect, Limit.Drive, weight);
-            }
-            else if (prospect.Cost > _run.Space.Requirement.CostLimit)
-            {
-                Miss(estimate, prospect, Limit.Cost, weight);
-            }
-            else
+            if (Prospective(estimate) is { } prospect)
             {
                 prospects.Add(prospect);
             }
@@ -71,19 +59,41 @@ internal sealed class MemberSearch
     private double Weight(Estimate estimate) =>
         (double)_run.Space.Capacitors[estimate.C1].Parts.Length * _run.Space.Capacitors[estimate.C2].Parts.Length;
 
-    // What a combination could reach at best: an error, a margin and a cost that the full analysis can only worsen.
-    private Prospect Prospective(Estimate estimate)
+    // What a combination could reach at best: an error, a margin and a cost that the full analysis can only worsen. Null where
+    // even that breaks a limit, or can no longer change the answer.
+    private Prospect? Prospective(Estimate estimate)
     {
         Crystal crystal = _member.Model.Crystal;
-        double load = estimate.LoadFarads;
-        double frequency = crystal.FrequencyAtLoadHz(load);
+        double frequency = crystal.FrequencyAtLoadHz(estimate.LoadFarads);
         double slack = FamilyScan.EstimateError(crystal, frequency);
         double centre = Math.Max(0, Math.Abs(frequency / _member.TargetHz - 1) - slack);
-        double error = _member.TermsRatio + centre + AssumedShift(frequency) + CapacitorTerms(estimate, load);
+        double error = _member.TermsRatio + centre + AssumedShift(frequency) + CapacitorTerms(estimate, estimate.LoadFarads);
         double margin = _run.Space.Requirement.AllowDisturbance ? double.PositiveInfinity : estimate.Margin * MarginSlack;
         AmplifierOption option = _family.Options[estimate.Option];
         decimal cost = _member.BaseCost + _run.Prices.Option(_family, option) + _run.Prices.CheapestPair(estimate.C1, estimate.C2);
-        return new Prospect(estimate, error, margin, cost);
+        var prospect = new Prospect(estimate, error, margin, cost);
+        if (Breaks(prospect) || !_run.MayEnter(_member, error, margin, cost))
+        {
+            return null;
+        }
+
+        CircuitValues values = option.With(_run.Space.Capacitors[estimate.C1].Farads, _run.Space.Capacitors[estimate.C2].Farads);
+        prospect = prospect with { ErrorRatio = error + estimate.LeastAmplifierRatio(_member.Template, values) };
+        return Breaks(prospect) || !_run.MayEnter(_member, prospect.ErrorRatio, margin, cost) ? null : prospect;
+    }
+
+    private bool Breaks(Prospect prospect)
+    {
+        Limit? limit = prospect.ErrorRatio > _budget ? Limit.Error
+            : prospect.Estimate.Steady.DriveWatts * (1 - DriveSlack) > _member.Crystal.DriveLevelWatts ? Limit.Drive
+            : prospect.Cost > _run.Space.Requirement.CostLimit ? Limit.Cost
+            : null;
+        if (limit is { } broken)
+        {
+            Miss(prospect.Estimate, prospect, broken, Weight(prospect.Estimate));
+        }
+
+        return limit is not null;
     }
 
     private double AssumedShift(double frequencyHz)
@@ -117,37 +127,42 @@ internal sealed class MemberSearch
         CapacitorValue c1 = _run.Space.Capacitors[estimate.C1];
         CapacitorValue c2 = _run.Space.Capacitors[estimate.C2];
         CircuitValues values = _family.Options[estimate.Option].With(c1.Farads, c2.Farads);
+       
         var analysis = new ValueAnalysis(_member.Template, _run.Space.Requirement, values, estimate.State);
-        if (analysis.Steady is not { } steady)
+        if (analysis.Base is not { } nominal)
         {
             _run.Tally.Reject(Limit.Error, weight);
             return;
         }
 
-        double centre = Math.Abs(steady.FrequencyHz / _member.TargetHz - 1);
-        double others = AssumedShift(steady.FrequencyHz) + CapacitorTerms(estimate, steady.LoadFarads);
-        double error = _member.TermsRatio + centre + others;
-        if (error > _budget || steady.DriveWatts > _member.Crystal.DriveLevelWatts)
+        double centre = Math.Max(0, Math.Abs(nominal.FrequencyHz / _member.TargetHz - 1) - BaseSlack);
+        double others = _member.TermsRatio + AssumedShift(nominal.FrequencyHz) + CapacitorTerms(estimate, nominal.LoadFarads);
+        if (nominal.DriveWatts * (1 - BaseDriveSlack) > _member.Crystal.DriveLevelWatts)
         {
-            Miss(estimate, prospect with { ErrorRatio = error }, error > _budget ? Limit.Error : Limit.Drive, weight);
+            Miss(estimate, prospect, Limit.Drive, weight);
             return;
         }
 
-        if (!_run.MayEnter(_member, error, prospect.Margin, prospect.Cost))
+        if (!Goes(Math.Max(prospect.ErrorRatio, centre + others)))
         {
             return;
         }
 
-        error += analysis.AmplifierRatio;
-        if (!(error <= _budget))
-        {
-            Miss(estimate, prospect with { ErrorRatio = error }, Limit.Error, weight);
-            return;
-        }
-
-        if (_run.MayEnter(_member, error, prospect.Margin, prospect.Cost))
+       
+        if (Goes(centre + others + analysis.AmplifierRatio) && analysis.Steady is not null)
         {
             Complete(prospect, analysis, values, c1, c2);
+        }
+
+        bool Goes(double error)
+        {
+            if (error <= _budget)
+            {
+                return _run.MayEnter(_member, error, prospect.Margin, prospect.Cost);
+            }
+
+            Miss(estimate, prospect with { ErrorRatio = error }, Limit.Error, weight);
+            return false;
         }
     }
 
@@ -223,7 +238,7 @@ internal sealed class MemberSearch
     {
         _run.Tally.Reject(limit, weight);
         double penalty = Math.Max(1, prospect.ErrorRatio / _budget)
-            * Math.Max(1, estimate.DriveWatts / _member.Crystal.DriveLevelWatts ?? 1)
+            * Math.Max(1, estimate.Steady.DriveWatts / _member.Crystal.DriveLevelWatts ?? 1)
             * Math.Max(1, (double)(prospect.Cost / _run.Space.Requirement.CostLimit ?? 1));
         _run.NearMisses.Offer(_member, penalty, () => Choice(
             estimate,
@@ -235,3 +250,4 @@ internal sealed class MemberSearch
 
     private sealed record Prospect(Estimate Estimate, double ErrorRatio, double Margin, decimal Cost);
 }
+
