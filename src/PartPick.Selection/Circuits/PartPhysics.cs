@@ -5,17 +5,10 @@ using PartPick.Values;
 
 namespace PartPick.Selection;
 
-/// <summary>Parts of the catalogue as the nominal devices of the model.</summary>
+/// <summary>Parts that a circuit file names, as typical devices of the model.</summary>
 internal static class PartPhysics
 {
-    public static Crystal Crystal(CrystalPart part) => new()
-    {
-        NominalHz = part.FrequencyHz,
-        LoadFarads = part.LoadFarads,
-        ShuntFarads = part.ShuntFarads ?? 0,
-        MotionalFarads = part.MotionalFarads ?? 1e-15,
-        ResistanceOhms = part.ResistanceOhms ?? 50,
-    };
+    public static Crystal Crystal(CrystalPart part) => CrystalModel.From(part).Crystal;
 
     public static CrystalRatings Ratings(CrystalPart part) => new()
     {
@@ -26,7 +19,12 @@ internal static class PartPhysics
     };
 
     public static Result<Inverter> Inverter(AmplifierPart part, double supplyVolts) =>
-        Result.Fail<Inverter>("supply", $"{part.Id} has no model at {supplyVolts} V", "plain values");
+        InverterModel.At(part, supplyVolts, DeviceStrength.Typical) is { } inverter
+            ? Result.Ok(inverter)
+            : Result.Fail<Inverter>(
+                "supply",
+                $"{Say.Volts(supplyVolts)} is outside what {part.Id} is specified for",
+                $"{Say.Volts(part.Points[0].SupplyVolts)} to {Say.Volts(part.Points[^1].SupplyVolts)}");
 
-    public static Transistor Transistor(TransistorPart part) => new() { Beta = part.Beta };
+    public static Transistor Transistor(TransistorPart part) => TransistorModel.At(part, DeviceStrength.Typical);
 }

@@ -122,10 +122,10 @@ internal sealed class FieldReader
     }
 
     /// <summary>One of some words; null where it is absent.</summary>
-    public T? Word<T>(string key, IReadOnlyDictionary<string, T> words)
+    public T? Word<T>(string key, IReadOnlyDictionary<string, T> words, string? fits = null)
         where T : struct
     {
-        string fits = "one of " + string.Join(", ", words.Keys);
+        fits ??= "one of " + string.Join(", ", words.Keys);
         return Text(key, fits) is { } text ? FieldValue.Word(text, Where(key), words, fits, _box) : null;
     }
 
@@ -144,6 +144,94 @@ internal sealed class FieldReader
 
         _box.Add(field.Where, $"is {JsonText.Kind(field.Value)}", "true or false");
         return null;
+    }
+
+    /// <summary>The items of a list, or a single value as its only item; null where it is absent.</summary>
+    public IReadOnlyList<Field>? Items(string key, string fits)
+    {
+        if (!_fields.TryGetValue(key, out Field field))
+        {
+            return null;
+        }
+
+        if (field.Value.ValueKind == JsonValueKind.Object)
+        {
+            _box.Add(field.Where, $"is {JsonText.Kind(field.Value)}", fits);
+            return null;
+        }
+
+        return field.Value.ValueKind == JsonValueKind.Array
+            ? [.. field.Value.EnumerateArray().Select(item => field with { Value = item })]
+            : [field];
+    }
+
+    /// <summary>The value of an item.</summary>
+    public double ValueOf(Field item, Dimension dimension)
+    {
+        Result<double> read = FieldValue.Read(item, dimension);
+        if (!read.IsOk)
+        {
+            _box.Add(read.Problem);
+        }
+
+        return read.ValueOr(1);
+    }
+
+    /// <summary>The word of an item; null where it is none of those known.</summary>
+    public T? WordOf<T>(Field item, IReadOnlyDictionary<string, T> words, string fits)
+        where T : struct
+    {
+        if (item.Value.ValueKind == JsonValueKind.String)
+        {
+            return FieldValue.Word(item.Value.GetString()!, item.Where, words, fits, _box);
+        }
+
+        _box.Add(item.Where, $"holds {JsonText.Kind(item.Value)}", fits);
+        return null;
+    }
+
+    /// <summary>Two values, the first not above the second; a single value stands for both.</summary>
+    public (double Min, double Max) Range(string key, Dimension dimension, (double Min, double Max) usual, bool positive)
+    {
+        string fits = "two values, the lower first, each " + FieldValue.Fits(dimension);
+        if (Items(key, fits) is not { } items)
+        {
+            return usual;
+        }
+
+        if (items.Count is not (1 or 2))
+        {
+            Reject(key, $"has {items.Count} values", fits);
+            return usual;
+        }
+
+        double[] values = [.. items.SelectMany(Ends).Select(item => ValueOf(item, dimension))];
+        if (values[0] > values[^1])
+        {
+            Reject(key, $"runs from {ValueText.Format(values[0], dimension)} down to {ValueText.Format(values[^1], dimension)}", fits);
+        }
+
+        if (positive && values[0] <= 0)
+        {
+            Reject(key, "is zero", "values above zero");
+        }
+
+        return (values[0], values[^1]);
+    }
+
+    // "4.5 V..5.5 V" holds both ends.
+    private static IEnumerable<Field> Ends(Field item) =>
+        item.Value.ValueKind == JsonValueKind.String && item.Value.GetString()!.Split("..", 2) is { Length: 2 } ends
+            ? ends.Select(end => item with { Value = JsonSerializer.SerializeToElement(end) })
+            : [item];
+
+    /// <summary>Copies the fields.</summary>
+    public void CopyTo(Dictionary<string, Field> fields)
+    {
+        foreach ((string key, Field field) in _fields)
+        {
+            fields[key] = field;
+        }
     }
 
     /// <summary>The raw field; null where it is absent.</summary>

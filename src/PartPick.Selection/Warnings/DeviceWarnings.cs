@@ -54,8 +54,8 @@ internal static class DeviceWarnings
 
     private static string? Clock(AmplifierPart part, double supply, double hertz)
     {
-        double? guaranteed = AtSupply(part, supply, point => point.ClockMinHz);
-        double? typical = AtSupply(part, supply, point => point.ClockHz);
+        double? guaranteed = InverterModel.GuaranteedClockHz(part, supply);
+        double? typical = InverterModel.TypicalClockHz(part, supply);
         if (guaranteed is { } least && hertz > least)
         {
             string reach = typical is { } usual && hertz <= usual
@@ -68,15 +68,6 @@ internal static class DeviceWarnings
         return guaranteed is null && typical is { } only && hertz > only
             ? $"The crystal's {Say.Hertz(hertz)} is above the {Say.Hertz(only)} that is typical of {part.Id} at {Say.Volts(supply)}."
             : null;
-    }
-
-    private static double? AtSupply(AmplifierPart part, double supply, Func<SupplyPoint, double?> figure)
-    {
-        SupplyPoint below = part.Points.Last(point => point.SupplyVolts <= supply);
-        SupplyPoint above = part.Points.First(point => point.SupplyVolts >= supply);
-        double span = above.SupplyVolts - below.SupplyVolts;
-        double share = span > 0 ? (supply - below.SupplyVolts) / span : 0;
-        return figure(below) + (figure(above) - figure(below)) * share;
     }
 
     private static string? Temperature(CircuitDescription description, string id, double? lowest, double? highest) =>
