@@ -34,9 +34,10 @@ internal static class CommandLine
         {
             return Say(surroundings, "stopped", ExitStatus.Stopped);
         }
-        catch (IOException) when (surroundings.Cancellation.IsCancellationRequested)
+        catch (IOException error)
         {
-            return ExitStatus.Stopped;
+            // Files and catalogue report their own problems: what is left is an output whose reader has gone, or a full disk.
+            return Say(surroundings, $"the output cannot be written: {Problem.Quote(error.Message)[1..^1]}", ExitStatus.Stopped);
         }
 #pragma warning disable CA1031 // No stack trace may reach a user: this is the one place that catches everything.
         catch (Exception error)

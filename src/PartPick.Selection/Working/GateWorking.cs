@@ -52,7 +52,8 @@ internal static class GateWorking
         double free = q / (1 - q * swing / 2);
         double lambda = free >= 0 && free <= 0.2 ? free : 0.2;
         double k = one.Gm / (2 * v * (1 + lambda * swing / 2));
-        double rest = Math.Max(0, 1 / one.Ro - k * v * v * lambda);
+        double rest = 1 / one.Ro - k * v * v * lambda;
+        rest = rest > 1e-12 / one.Ro ? rest : 0;
         yield return new WorkingStep(Device, "q", "2 / (gm Ro v)", $"2 / ({Numbers.Siemens(one.Gm)} {Numbers.Ohms(one.Ro)} {Numbers.Of(v)} V)",
             $"{Numbers.Of(q)} /V", source);
         yield return new WorkingStep(Device, "channel-length modulation lambda", "q / (1 - q VDD/2), at most 0.2 /V",

@@ -23,7 +23,8 @@ internal static class WorkingOutput
             output.WriteLine($"  {step.Quantity}: {step.Formula}");
             if (step.Numbers.Length > 0)
             {
-                output.WriteLine($"    = {step.Numbers}");
+                bool equation = step.Numbers.Contains('=', StringComparison.Ordinal);
+                output.WriteLine($"    {(equation ? "with" : "=")} {step.Numbers}");
             }
 
             output.WriteLine($"    = {step.Value}" + (step.Source.Length == 0 ? "" : $"   [{step.Source}]"));
