@@ -38,6 +38,24 @@ internal sealed record DampingCure(double Ohms, double DriveWatts, double Margin
         return null;
     }
 
+    /// <summary>The smallest resistor of E12 above the circuit's own with which it starts with a margin.</summary>
+    /// <param name="gate">The circuit.</param>
+    /// <param name="leastMargin">Smallest start-up margin.</param>
+    /// <returns>The resistor in ohms and the margin; null where none does it.</returns>
+    public static (double Ohms, double Margin)? FindStart(GateCircuit gate, double leastMargin)
+    {
+        foreach (double ohms in PreferredSeries.Named("E12").Value.ValuesBetween(Math.Max(gate.SeriesOhms * 1.0001, 1), LargestOhms))
+        {
+            StartUp start = OscillatorAnalysis.AnalyseStartUp(gate with { SeriesOhms = ohms });
+            if (start.Margin >= leastMargin && start.GrowthRatePerSecond > 0)
+            {
+                return (ohms, start.Margin);
+            }
+        }
+
+        return null;
+    }
+
     // The drive falls as Rs grows: halve the list until the first value within the limit stands.
     private static int FirstWithin(GateCircuit gate, IReadOnlyList<double> values, double limitWatts)
     {

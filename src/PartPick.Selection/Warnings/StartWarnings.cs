@@ -29,7 +29,7 @@ internal static class StartWarnings
         }
         else if (result.Start == StartKind.None)
         {
-            yield return NoStart(start);
+            yield return NoStart(start) + Cure(description.Circuit);
         }
         else if (Thin(start.Margin) is { } thin)
         {
@@ -64,8 +64,13 @@ internal static class StartWarnings
 
     private static string NoStart(StartUp start) => start.CriticalSiemens is { } critical
         ? $"It does not start: the start-up margin is {Say.Number(start.Margin)} and at least 1 is needed; "
-            + $"the transconductance is {Say.Siemens(start.TransconductanceSiemens)} and the critical one {Say.Siemens(critical)}."
-        : $"It does not start: the start-up margin is {Say.Number(start.Margin)}, and no transconductance would start this circuit.";
+            + $"the transconductance is {Say.Siemens(start.TransconductanceSiemens)} and the critical one {Say.Siemens(critical)}"
+        : $"It does not start: the start-up margin is {Say.Number(start.Margin)}, and no transconductance would start this circuit";
+
+    private static string Cure(OscillatorCircuit circuit) =>
+        circuit is GateCircuit gate && DampingCure.FindStart(gate, UsualMargin) is { } cure
+            ? $"; Rs = {Say.Ohms(cure.Ohms)} would give it a start-up margin of {Say.Number(cure.Margin)}."
+            : ".";
 
     private static string? Thin(double margin) => margin switch
     {
