@@ -55,15 +55,16 @@ internal static class RankCommand
             var wanted = new RankingOptions
             {
                 Top = Counts.Read(parsed.GetValue(top), top.Name) ?? (parsed.GetValue(all) ? null : 50),
+                Front = parsed.GetValue(front),
                 All = parsed.GetValue(all),
             };
-            return Run(context, parsed, requirement, wanted, parsed.GetValue(front), parsed.GetValue(quiet));
+            return Run(context, parsed, requirement, wanted, parsed.GetValue(quiet));
         });
         return command;
     }
 
     private static int Run(
-        CommandContext context, ParseResult parsed, Requirement requirement, RankingOptions options, bool frontOnly, bool quiet)
+        CommandContext context, ParseResult parsed, Requirement requirement, RankingOptions options, bool quiet)
     {
         Catalog.PartsCatalog catalog = context.LoadCatalog(parsed);
         RankingProgress? progress = quiet || !context.Surroundings.ErrorIsTerminal ? null : new RankingProgress(context.Surroundings.Error);
@@ -77,7 +78,7 @@ internal static class RankCommand
             progress?.Clear();
         }
 
-        var view = new RankView(result, frontOnly ? result.Front : result.Candidates, context.Surroundings.UsesColour);
+        var view = new RankView(result, context.Surroundings.UsesColour);
         switch (context.FormatOf(parsed))
         {
             case OutputFormat.Json:

@@ -14,7 +14,7 @@ internal static class RankCsv
 
     /// <summary>Prints it.</summary>
     public static void Write(TextWriter output, RankView view) =>
-        CsvOutput.Write(output, Header, (view.NothingFits ? view.Result.NearestMisses : view.Shown).Select(Row));
+        CsvOutput.Write(output, Header, (view.NothingFits ? view.Result.NearestMisses : view.Result.Candidates).Select(Row));
 
     private static IEnumerable<string> Row(Candidate candidate) =>
     [

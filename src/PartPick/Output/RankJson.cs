@@ -16,8 +16,8 @@ internal static class RankJson
             ["requirement"] = RequirementFile.Write(result.Requirement),
             ["combinations"] = result.Combinations,
             ["fit"] = result.Fit,
-            ["candidates"] = new JsonArray([.. view.Shown.Select(candidate => (JsonNode)Candidate(candidate, target))]),
-            ["front"] = new JsonArray([.. result.Front.Select(candidate => (JsonNode)candidate.Id)]),
+            ["candidates"] = new JsonArray([.. view.Result.Candidates.Select(candidate => (JsonNode)Candidate(candidate, target))]),
+            ["front"] = new JsonArray([.. result.Front.Select(id => (JsonNode)id)]),
             ["rejections"] = new JsonObject(
                 result.Rejections.OrderBy(limit => limit.Key).Select(limit => KeyValuePair.Create(LimitWords.Key(limit.Key), (JsonNode?)limit.Value))),
             ["elapsed"] = result.ElapsedSeconds,

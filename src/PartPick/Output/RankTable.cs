@@ -22,11 +22,11 @@ internal static class RankTable
             return;
         }
 
-        WriteCandidates(output, view, view.Shown);
+        WriteCandidates(output, view, view.Result.Candidates);
         output.WriteLine();
         output.WriteLine("* on the front: no fit candidate beats it on error, margin and cost together. Error is the worst case; margin, start-up");
         output.WriteLine("  time and drive level are those of the worst corner.");
-        WriteWarnings(output, view.Shown);
+        WriteWarnings(output, view.Result.Candidates);
         output.WriteLine();
         output.WriteLine(HelpFooter.Cautions);
     }

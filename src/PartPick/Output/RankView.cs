@@ -1,13 +1,11 @@
-using System.Collections.Immutable;
 using PartPick.Selection;
 
 namespace PartPick.Output;
 
-/// <summary>A ranking and which of its candidates are shown.</summary>
+/// <summary>A ranking and how it is shown.</summary>
 /// <param name="Result">The ranking.</param>
-/// <param name="Shown">The candidates to show.</param>
 /// <param name="Colour">Whether colour may be used.</param>
-internal sealed record RankView(RankingResult Result, ImmutableArray<Candidate> Shown, bool Colour)
+internal sealed record RankView(RankingResult Result, bool Colour)
 {
     /// <summary>Whether nothing fits the requirement.</summary>
     public bool NothingFits => Result.Candidates.IsEmpty;
