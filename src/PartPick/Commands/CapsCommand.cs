@@ -26,13 +26,16 @@ internal static class CapsCommand
         var across = new Option<string?>("--across") { Description = "Stray capacitance across the crystal (0)", HelpName = "VALUE" };
         var series = new Option<string>("--series")
         {
-            Description = "Series of preferred values", HelpName = "NAME", DefaultValueFactory = _ => "E24",
+            Description = "Series of preferred values",
+            HelpName = "NAME",
+            DefaultValueFactory = _ => "E24",
         };
         var parallel = new Option<bool>("--parallel") { Description = "Allow two capacitors in parallel at each side" };
         var top = new Option<string?>("--top") { Description = "Number of pairs (10)", HelpName = "N" };
         var crystal = new Option<string?>("--crystal")
         {
-            Description = "A crystal file (the keys of a circuit file's crystal): adds the frequency in ppm", HelpName = "FILE",
+            Description = "A crystal file (the keys of a circuit file's crystal): adds the frequency in ppm",
+            HelpName = "FILE",
         };
         var command = new Command("caps", "Finds the load capacitors of a series that come nearest to a load, with the strays.")
         {

@@ -17,7 +17,10 @@ public class CircuitFileReadTests
             gate.Crystal.ShuntFarads, gate.Crystal.MotionalFarads, gate.Crystal.ResistanceOhms));
         Assert.Equal(new OneStageInverter(10e-3, 2000)
         {
-            ThresholdVolts = 0.8, InputFarads = 3e-12, OutputFarads = 5e-12, FeedbackFarads = 0.5e-12,
+            ThresholdVolts = 0.8,
+            InputFarads = 3e-12,
+            OutputFarads = 5e-12,
+            FeedbackFarads = 0.5e-12,
         }, gate.Inverter);
         Assert.Equal((22e-12, 22e-12, 220.0, 1e6), (gate.C1Farads, gate.C2Farads, gate.SeriesOhms, gate.FeedbackOhms));
         Assert.Equal(new Strays(3e-12, 3e-12, 1e-12), gate.Strays);
@@ -67,7 +70,11 @@ public class CircuitFileReadTests
 
         Assert.Equal(new Transistor
         {
-            Beta = 200, JunctionFarads = 9e-12, TransitSeconds = 0.6e-9, CollectorFarads = 3e-12, BaseSpreadingOhms = 90,
+            Beta = 200,
+            JunctionFarads = 9e-12,
+            TransitSeconds = 0.6e-9,
+            CollectorFarads = 3e-12,
+            BaseSpreadingOhms = 90,
             BaseEmitterVolts = 0.65,
         }, follower.Transistor);
         Assert.Equal((47e3, 47e3, 2200.0, 10e3), (follower.BaseTopOhms, follower.BaseBottomOhms, follower.EmitterOhms, follower.LoadOhms));
