@@ -52,14 +52,14 @@ public static class OscillatorAnalysis
     /// <param name="near">The running state of a circuit like it.</param>
     /// <param name="fineness">How finely it is resolved.</param>
     /// <param name="state">The running state; null where there is none.</param>
-    public static SteadyState? FindSteadyState(OscillatorCircuit circuit, RunningState near, Fineness fineness, out RunningState? state)
+    public static RunningFigures? FindSteadyState(OscillatorCircuit circuit, RunningState near, Fineness fineness, out RunningState? state)
     {
         ArgumentNullException.ThrowIfNull(near);
         state = null;
-        SteadyState? steady = Balances(circuit) is { } refinement
+        RunningFigures? figures = Balances(circuit) is { } refinement
             ? SteadySolver.Follow(circuit.Crystal, refinement, near, fineness, out state)
             : null;
-        return steady ?? Analyse(circuit, out state).Steady;
+        return figures ?? Analyse(circuit, out state).Steady?.Figures;
     }
 
     /// <summary>A quick estimate of the steady state; null where there is none.</summary>

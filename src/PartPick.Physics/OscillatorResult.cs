@@ -59,6 +59,9 @@ public sealed record SteadyState
     /// <summary>Output swing in volts peak to peak: at the inverter's output, or at the emitter.</summary>
     public required double OutputSwingVolts { get; init; }
 
+    /// <summary>The figures that corners and sensitivities ask for.</summary>
+    public RunningFigures Figures => new(FrequencyHz, LoadFarads, CurrentRmsAmps, DriveWatts);
+
     /// <summary>True where the collector junction conducts within the cycle (vBC above 0.4 V).</summary>
     public required bool LimitedBySupply { get; init; }
 }

@@ -85,6 +85,9 @@ internal abstract class AmplitudeBalance
     /// </summary>
     public virtual double? StartSaturated(double resistanceOhms) => null;
 
+    /// <summary>Notes the frequency that the state gives, too near the one it was solved at to solve it again.</summary>
+    public void CorrectFrequency(double radians) => Radians = radians;
+
     /// <summary>Solves the periodic state at a given peak current, from the last state.</summary>
     public bool SolveAt(double peakAmps)
     {

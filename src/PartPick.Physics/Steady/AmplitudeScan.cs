@@ -15,15 +15,21 @@ internal sealed class AmplitudeScan
     private readonly Refinement _refinement;
     private readonly double _resistance;
     private readonly double _radians;
+    private readonly bool _runningOnly;
     private AmplitudeBalance _balance;
     private double[] _before = [];
     private int _finer;
 
-    public AmplitudeScan(Refinement refinement, double radians, double resistanceOhms)
+    /// <param name="refinement">The circuit's balances.</param>
+    /// <param name="radians">Frequency of the motional current in rad/s.</param>
+    /// <param name="resistanceOhms">Rm in ohms.</param>
+    /// <param name="runningOnly">True to stop at the running amplitude, without the largest −Re Zc.</param>
+    public AmplitudeScan(Refinement refinement, double radians, double resistanceOhms, bool runningOnly = false)
     {
         _refinement = refinement;
         _resistance = resistanceOhms;
         _radians = radians;
+        _runningOnly = runningOnly;
         _balance = Fresh();
         Run();
     }
@@ -79,6 +85,10 @@ internal sealed class AmplitudeScan
                 _balance = _refinement.From(scanning.Keep())!;
                 FindRunning(peak / ratio, peak);
                 _balance = scanning;
+                if (_runningOnly)
+                {
+                    return true;
+                }
             }
 
             if (next < 0.5 * LargestNegativeOhms && nextSlope > 0)

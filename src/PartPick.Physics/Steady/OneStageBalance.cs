@@ -168,8 +168,10 @@ internal sealed class OneStageBalance : AmplitudeBalance
         int n = state.Length;
         for (int j = 0; j < n; j++)
         {
-            _input[j] = peakAmps * _inputDrive[j] + Rows.Dot(_inputKernel.AsSpan(n - 1 - j, n), state);
-            _output[j] = peakAmps * _outputDrive[j] + Rows.Dot(_outputKernel.AsSpan(n - 1 - j, n), state);
+            Rows.Dots(
+                _inputKernel.AsSpan(n - 1 - j, n), _outputKernel.AsSpan(n - 1 - j, n), state, out double input, out double output);
+            _input[j] = peakAmps * _inputDrive[j] + input;
+            _output[j] = peakAmps * _outputDrive[j] + output;
         }
     }
 }

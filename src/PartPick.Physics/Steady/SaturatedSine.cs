@@ -4,24 +4,25 @@ namespace PartPick.Physics.Steady;
 
 /// <summary>
 /// Fourier coefficients of tanh(α u(θ)) for an input u of odd harmonics that crosses zero twice a period, and of its
-/// derivative. However steep the tanh, the integrals are exact to about 1e-11.
+/// derivative. A steep tanh is a square wave whose edges are those of tanh along a straight line, in closed form; a shallow
+/// one is summed at equal steps.
 /// </summary>
 internal sealed class SaturatedSine
 {
-    private const double Reach = 18;
-    private const int FewestUniform = 64;
-    private const int MostUniform = 512;
-    private static readonly double[] Panels = [0, 2, 5, 10, Reach];
-    private static readonly (double Node, double Weight)[] Gauss = GaussNodes();
+    // Below this width of an edge, in radians, the input is straight across it: what is left is of the order of width⁴.
+    private const double StraightWidth = 0.02;
+    private const double StepsPerWidth = 8;
+    private const int StepQuantum = 64;
+    private const int MostSteps = 448;
     private readonly double _steepness;
-    private readonly double[] _angles;
-    private readonly double[] _values;
-    private readonly double[] _slopes;
+    private readonly double[] _values = new double[MostSteps];
+    private readonly double[] _slopes = new double[MostSteps];
     private readonly Complex[] _moments;
+    private readonly Complex[] _harmonics;
     private int _count;
-    private double _flatFrom;
-    private double _flatTo;
-    private double _flatValue;
+    private double _crossing;
+    private double _width;
+    private double _sign;
 
     /// <param name="harmonics">Number of odd harmonics of the input.</param>
     /// <param name="steepness">α in 1/V.</param>
@@ -29,77 +30,39 @@ internal sealed class SaturatedSine
     {
         _steepness = steepness;
         Input = new Complex[harmonics];
-        _angles = new double[MostUniform];
-        _values = new double[MostUniform];
-        _slopes = new double[MostUniform];
         _moments = new Complex[2 * harmonics + 1];
+        _harmonics = new Complex[harmonics];
     }
 
     /// <summary>Complex amplitudes of the input's odd harmonics 1, 3, …, in volts.</summary>
     public Complex[] Input { get; }
 
-    /// <summary>Takes the input as it stands and evaluates the tanh and its derivative where they change.</summary>
+    /// <summary>Takes the input as it stands and computes the coefficients of the tanh and of its derivative.</summary>
     public void Prepare()
     {
-        Complex[] input = Input;
-        double crossing = ZeroCrossing(input);
-        Evaluate(input, crossing, out double slope);
-        double width = 1 / (_steepness * Math.Abs(slope));
-        // The tanh's nearest pole is (π/2)·width off the real axis: 8/width equal steps in half a period leave an error of 1e-11.
-        double wanted = Math.Max(8 / width, Math.Max(FewestUniform, 4 * input.Length));
-        if (wanted > MostUniform)
+        _crossing = ZeroCrossing(Input);
+        Evaluate(Input, _crossing, out double slope);
+        _width = 1 / (_steepness * Math.Abs(slope));
+        _sign = Math.Sign(slope);
+        if (_width < StraightWidth)
         {
-            PlaceRound(crossing, width);
-            _flatFrom = crossing + Reach * width;
-            _flatTo = crossing + Math.PI - Reach * width;
-            _flatValue = Math.Sign(slope);
+            PrepareEdges(slope);
         }
         else
         {
-            // In steps of 64, so that a small change of the input does not change the rule.
-            _count = (int)Math.Ceiling(wanted / FewestUniform) * FewestUniform;
-            for (int j = 0; j < _count; j++)
-            {
-                _angles[j] = Math.PI * j / _count;
-                _slopes[j] = Math.PI / _count;
-            }
-
-            _flatFrom = _flatTo = _flatValue = 0;
-        }
-
-        Array.Clear(_moments);
-        for (int j = 0; j < _count; j++)
-        {
-            double weight = _slopes[j];
-            double value = Math.Tanh(_steepness * Evaluate(input, _angles[j], out _));
-            _values[j] = value * weight;
-            _slopes[j] = _steepness * (1 - value * value) * weight;
-            Complex turn = Complex.FromPolarCoordinates(1, -2 * _angles[j]);
-            Complex term = _slopes[j] * 2 / Math.PI;
-            for (int k = 0; k < _moments.Length; k++)
-            {
-                _moments[k] += term;
-                term *= turn;
-            }
+            PrepareSteps();
         }
     }
 
     /// <summary>Complex amplitude of the odd harmonic n of the tanh.</summary>
     public Complex Harmonic(int n)
     {
-        Complex sum = Complex.Zero;
-        for (int j = 0; j < _count; j++)
+        if (n / 2 < _harmonics.Length)
         {
-            sum += _values[j] * Complex.FromPolarCoordinates(1, -n * _angles[j]);
+            return _harmonics[n / 2];
         }
 
-        if (_flatValue != 0)
-        {
-            Complex ends = Complex.FromPolarCoordinates(1, -n * _flatTo) - Complex.FromPolarCoordinates(1, -n * _flatFrom);
-            sum += _flatValue * ends / new Complex(0, -n);
-        }
-
-        return sum * (2 / Math.PI);
+        return _count == 0 ? Edge(n) : Sum(n);
     }
 
     /// <summary>Derivative of harmonic n of the tanh by the real and the imaginary part of harmonic m of the input.</summary>
@@ -135,8 +98,8 @@ internal sealed class SaturatedSine
 
     private static double Evaluate(Complex[] input, double angle, out double slope)
     {
-        Complex turn = Complex.FromPolarCoordinates(1, 2 * angle);
         Complex root = Complex.FromPolarCoordinates(1, angle);
+        Complex turn = root * root;
         double value = 0;
         slope = 0;
         for (int h = 0; h < input.Length; h++)
@@ -150,28 +113,75 @@ internal sealed class SaturatedSine
         return value;
     }
 
-    private static (double Node, double Weight)[] GaussNodes()
-    {
-        const int Order = 10;
-        var rule = new MathNet.Numerics.Integration.GaussLegendreRule(-1, 1, Order);
-        return [.. Enumerable.Range(0, Order).Select(i => (rule.GetAbscissa(i), rule.GetWeight(i)))];
-    }
-
-    private void PlaceRound(double crossing, double width)
+    private void PrepareEdges(double slope)
     {
         _count = 0;
-        for (int panel = 0; panel + 1 < Panels.Length; panel++)
+        for (int h = 0; h < _harmonics.Length; h++)
         {
-            double half = (Panels[panel + 1] - Panels[panel]) / 2 * width;
-            double middle = (Panels[panel + 1] + Panels[panel]) / 2 * width;
-            foreach ((double node, double weight) in Gauss)
+            _harmonics[h] = Edge(2 * h + 1);
+        }
+
+        for (int k = 0; k < _moments.Length; k++)
+        {
+            double size = 4 / (Math.PI * Math.Abs(slope)) * Rounding(2 * k);
+            _moments[k] = Complex.FromPolarCoordinates(size, -2 * k * _crossing);
+        }
+    }
+
+    // A square wave's harmonic times the spectrum of its edge.
+    private Complex Edge(int n) =>
+        _sign * 4 / (Math.PI * n) * Rounding(n) * new Complex(0, -1) * Complex.FromPolarCoordinates(1, -n * _crossing);
+
+    // The spectrum of sech²(θ/w)/(2w): (πnw/2)/sinh(πnw/2).
+    private double Rounding(int n)
+    {
+        double x = Math.PI * n * _width / 2;
+        return x < 1e-4 ? 1 - x * x / 6 : x / Math.Sinh(x);
+    }
+
+    // The tanh's nearest pole is (π/2)·width off the real axis: 8/width equal steps in half a period leave an error of 1e-11.
+    private void PrepareSteps()
+    {
+        double wanted = Math.Max(StepsPerWidth / _width, 4 * Input.Length);
+        _count = Math.Min(MostSteps, (int)Math.Ceiling(wanted / StepQuantum) * StepQuantum);
+        Array.Clear(_moments);
+        Array.Clear(_harmonics);
+        double step = Math.PI / _count;
+        for (int j = 0; j < _count; j++)
+        {
+            double value = Math.Tanh(_steepness * Evaluate(Input, j * step, out _));
+            _values[j] = value;
+            _slopes[j] = _steepness * (1 - value * value);
+            Complex root = Complex.FromPolarCoordinates(1, -j * step);
+            Complex turn = root * root;
+            Complex power = 2.0 / _count;
+            for (int k = 0; k < _moments.Length; k++)
             {
-                double distance = middle + half * node;
-                _angles[_count] = crossing + distance;
-                _slopes[_count++] = weight * half;
-                _angles[_count] = crossing - distance;
-                _slopes[_count++] = weight * half;
+                _moments[k] += _slopes[j] * power;
+                if (k < _harmonics.Length)
+                {
+                    _harmonics[k] += value * (power * root);
+                }
+
+                power *= turn;
             }
         }
+    }
+
+    private Complex Sum(int n)
+    {
+        // Beyond half the steps the sum would fold back; what lies there is as good as nothing.
+        if (n >= _count)
+        {
+            return Complex.Zero;
+        }
+
+        Complex sum = Complex.Zero;
+        for (int j = 0; j < _count; j++)
+        {
+            sum += _values[j] * Complex.FromPolarCoordinates(1, -n * j * Math.PI / _count);
+        }
+
+        return sum * (2.0 / _count);
     }
 }

@@ -12,7 +12,10 @@ internal static class SteadySolver
     private const double FrequencyAgreement = 3e-8;
     private const double CurrentAgreement = 1e-3;
     private const int FollowedLevel = 1;
-    private const double EstimateTolerance = 1e-4;
+    private const double EstimateTolerance = 1e-7;
+    private const double RoughTolerance = 1e-9;
+    private const double RoughStep = 1e-7;
+    private const double FineStep = 1e-11;
 
     /// <summary>Scans the amplitude and refines the running state.</summary>
     /// <param name="crystal">The crystal.</param>
@@ -30,13 +33,15 @@ internal static class SteadySolver
         var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms);
         largestNegativeOhms = scan.LargestNegativeOhms;
         state = null;
-        return scan.Running is { } running ? Refine(crystal, branch, refinement, running, out state) : null;
+        return scan.Running is { } running && Refine(branch, refinement, running, out state) is { } refined
+            ? Describe(crystal, refined)
+            : null;
     }
 
     /// <summary>
     /// The steady state near one of a circuit like this one; null where it is not found from there.
     /// </summary>
-    public static SteadyState? Follow(
+    public static RunningFigures? Follow(
         Crystal crystal, Refinement refinement, RunningState near, Fineness fineness, out RunningState? state)
     {
         state = null;
@@ -48,10 +53,10 @@ internal static class SteadySolver
 
         if (fineness == Fineness.Converged)
         {
-            return Refine(crystal, branch, refinement, balance, out state);
+            return Refine(branch, refinement, balance, out state) is { } refined ? FiguresOf(crystal, refined) : null;
         }
 
-        if (!Settle(branch, balance) || refinement.IsIncomplete(balance))
+        if (!Settle(branch, balance, roughly: true) || refinement.IsIncomplete(balance))
         {
             return null;
         }
@@ -59,14 +64,14 @@ internal static class SteadySolver
         if (fineness == Fineness.OneFiner)
         {
             balance = refinement.Finer(balance) ?? balance;
-            if (!Settle(branch, balance) || refinement.IsIncomplete(balance))
+            if (!Settle(branch, balance, roughly: true) || refinement.IsIncomplete(balance))
             {
                 return null;
             }
         }
 
         state = balance.Keep();
-        return Describe(crystal, balance);
+        return FiguresOf(crystal, balance);
     }
 
     /// <summary>
@@ -82,7 +87,7 @@ internal static class SteadySolver
         AmplitudeBalance? balance = near is null ? null : refinement.From(near);
         if (balance is null || !balance.SolveRunning(crystal.ResistanceOhms, EstimateTolerance) || refinement.IsIncomplete(balance))
         {
-            var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms);
+            var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms, runningOnly: true);
             balance = scan.Running;
         }
 
@@ -97,8 +102,8 @@ internal static class SteadySolver
         return new SteadyEstimate(radians / (2 * Math.PI), crystal.ResistanceOhms * rms * rms);
     }
 
-    private static SteadyState? Refine(
-        Crystal crystal, in CrystalBranch branch, Refinement refinement, AmplitudeBalance balance, out RunningState? state)
+    private static AmplitudeBalance? Refine(
+        in CrystalBranch branch, Refinement refinement, AmplitudeBalance balance, out RunningState? state)
     {
         state = null;
         double frequency = double.NaN;
@@ -108,7 +113,7 @@ internal static class SteadySolver
         {
             if (!Settle(branch, balance))
             {
-                return coarser is null ? null : Describe(crystal, coarser);
+                return coarser;
             }
 
             if (refinement.IsIncomplete(balance))
@@ -129,7 +134,7 @@ internal static class SteadySolver
             AmplitudeBalance? finer = agrees ? null : refinement.Finer(balance);
             if (finer is null)
             {
-                return Describe(crystal, balance);
+                return balance;
             }
 
             coarser = balance;
@@ -153,38 +158,49 @@ internal static class SteadySolver
         return radians;
     }
 
-    /// <summary>Repeats the running state at the frequency it gives until the frequency stands.</summary>
-    private static bool Settle(in CrystalBranch branch, AmplitudeBalance balance)
+    // Repeats the running state at the frequency it gives until the frequency stands. The state changes with ω only as fast as
+    // the network does, so what is left is C/Cm times smaller than the last step.
+    private static bool Settle(in CrystalBranch branch, AmplitudeBalance balance, bool roughly = false)
     {
         for (int step = 0; step < 12; step++)
         {
-            if (!balance.SolveRunning(branch.ResistanceOhms))
+            bool solved = roughly
+                ? balance.SolveRunning(branch.ResistanceOhms, RoughTolerance)
+                : balance.SolveRunning(branch.ResistanceOhms);
+            if (!solved)
             {
                 return false;
             }
 
             double radians = branch.SeriesRadians * (1 + branch.OffsetForReactance(balance.Impedance.Imaginary));
-            bool stands = Math.Abs(radians - balance.Radians) < 2e-13 * radians;
-            balance.SetFrequency(radians);
-            if (stands)
+            if (Math.Abs(radians - balance.Radians) < (roughly ? RoughStep : FineStep) * radians)
             {
+                balance.CorrectFrequency(radians);
                 return true;
             }
+
+            balance.SetFrequency(radians);
         }
 
         return true;
     }
 
-    private static SteadyState Describe(Crystal crystal, AmplitudeBalance balance)
+    private static RunningFigures FiguresOf(Crystal crystal, AmplitudeBalance balance)
     {
         double hertz = balance.Radians / (2 * Math.PI);
         double rms = balance.PeakAmps / Math.Sqrt(2);
+        return new RunningFigures(hertz, crystal.LoadAtFrequencyFarads(hertz), rms, crystal.ResistanceOhms * rms * rms);
+    }
+
+    private static SteadyState Describe(Crystal crystal, AmplitudeBalance balance)
+    {
+        RunningFigures figures = FiguresOf(crystal, balance);
         return new SteadyState
         {
-            FrequencyHz = hertz,
-            LoadFarads = crystal.LoadAtFrequencyFarads(hertz),
-            CurrentRmsAmps = rms,
-            DriveWatts = crystal.ResistanceOhms * rms * rms,
+            FrequencyHz = figures.FrequencyHz,
+            LoadFarads = figures.LoadFarads,
+            CurrentRmsAmps = figures.CurrentRmsAmps,
+            DriveWatts = figures.DriveWatts,
             OutputSwingVolts = balance.OutputSwingVolts(),
             LimitedBySupply = balance.LimitedBySupply,
         };

@@ -81,7 +81,7 @@ public static class BudgetBuilder
     /// Largest relative change of f when Cm or C0 is off by a factor either way: the crystal stays on its nominal frequency at
     /// its rated load, so only the shift from there changes.
     /// </summary>
-    public static double ShiftOf(Crystal crystal, SteadyState steady, double motionalFactor, double shuntFactor)
+    public static double ShiftOf(Crystal crystal, RunningFigures steady, double motionalFactor, double shuntFactor)
     {
         ArgumentNullException.ThrowIfNull(crystal);
         ArgumentNullException.ThrowIfNull(steady);

@@ -15,7 +15,7 @@ public sealed class ValueAnalysis
     private readonly CircuitValues _values;
     private readonly OperatingPoint _nominal;
     private readonly RunningState? _state;
-    private SteadyState? _steady;
+    private RunningFigures? _steady;
     private double? _amplifier;
     private (double C1, double C2, double Across)? _slopes;
 
@@ -43,7 +43,7 @@ public sealed class ValueAnalysis
         if (near is null)
         {
             Result = OscillatorAnalysis.Analyse(Circuit, out _state);
-            _steady = Result.Steady;
+            _steady = Result.Steady?.Figures;
             Base = Follow(Circuit);
         }
         else
@@ -59,7 +59,7 @@ public sealed class ValueAnalysis
     public OscillatorResult? Result { get; }
 
     /// <summary>The nominal steady state; null where there is none.</summary>
-    public SteadyState? Steady => _steady ??= _state is null
+    public RunningFigures? Steady => _steady ??= _state is null
         ? null
         : OscillatorAnalysis.FindSteadyState(Circuit, _state, Fineness.Converged, out _);
 
@@ -67,7 +67,7 @@ public sealed class ValueAnalysis
     /// The nominal steady state at the fineness of the corners: differences are taken between states of one fineness, so that
     /// what the fineness leaves cancels. Its frequency is within a few tenths of a ppm of <see cref="Steady"/>.
     /// </summary>
-    public SteadyState? Base { get; }
+    public RunningFigures? Base { get; }
 
     /// <summary>Largest relative |f(corner) − f| over amplifier, supply and ambient; infinite where a corner has no steady state.</summary>
     public double AmplifierRatio => _amplifier ??= FindAmplifierRatio();
@@ -76,10 +76,10 @@ public sealed class ValueAnalysis
     public (double C1, double C2, double Across) SlopesPerFarad => _slopes ??= FindSlopes();
 
     /// <summary>The steady state at a corner; null where there is none.</summary>
-    public SteadyState? SteadyAt(OperatingPoint point, double c1Tolerance, double c2Tolerance) =>
+    public RunningFigures? SteadyAt(OperatingPoint point, double c1Tolerance, double c2Tolerance) =>
         Follow(_template.At(_values, point, c1Tolerance, c2Tolerance));
 
-    private SteadyState? Follow(OscillatorCircuit circuit) =>
+    private RunningFigures? Follow(OscillatorCircuit circuit) =>
         _state is null ? null : OscillatorAnalysis.FindSteadyState(circuit, _state, Fineness.Same, out _);
 
     private double BaseHz() => Base?.FrequencyHz ?? double.NaN;
@@ -109,8 +109,8 @@ public sealed class ValueAnalysis
 
     private double Slope(double step, Func<double, OscillatorCircuit> shifted)
     {
-        SteadyState? above = Follow(shifted(step));
-        SteadyState? below = Follow(shifted(-step));
+        RunningFigures? above = Follow(shifted(step));
+        RunningFigures? below = Follow(shifted(-step));
         return above is null || below is null
             ? double.NaN
             : (above.FrequencyHz - below.FrequencyHz) / (2 * step * BaseHz());

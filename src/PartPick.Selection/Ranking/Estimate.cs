@@ -14,7 +14,7 @@ internal sealed record Estimate(
     int Option, int C1, int C2, double Margin, double LoadFarads, SteadyEstimate Steady, RunningState State)
 {
     // Share of an estimated shift that is sure, and what is taken off it.
-    private const double SureShare = 0.7;
+    private const double SureShare = 0.9;
     private const double Slack = 0.5e-6;
     private double? _amplifierRatio;
 

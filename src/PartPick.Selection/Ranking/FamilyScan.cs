@@ -28,6 +28,7 @@ internal sealed class FamilyScan
     private readonly double _highestLoad;
     private readonly double[] _loadShares;
     private readonly OperatingPoint _nominal;
+    private RunningState? _last;
 
     public FamilyScan(SearchSpace space, CircuitFamily family, CancellationToken cancellation)
     {
@@ -92,7 +93,6 @@ internal sealed class FamilyScan
         double wanted = _space.Requirement.AllowDisturbance ? double.NegativeInfinity : _space.Requirement.Margin * MarginSlack;
         double before = double.NegativeInfinity;
         double share = 0;
-        RunningState? near = null;
         for (int option = 0; option < _family.Options.Length; option++)
         {
             double known = share != 0 ? share : _loadShares[option];
@@ -122,13 +122,13 @@ internal sealed class FamilyScan
 
             before = first;
             OscillatorCircuit circuit = _template.At(values, _nominal);
-            if (OscillatorAnalysis.EstimateSteadyState(circuit, near, out RunningState? state) is not { } estimate || state is null)
+            if (OscillatorAnalysis.EstimateSteadyState(circuit, _last, out RunningState? state) is not { } estimate || state is null)
             {
                 ErrorRejections += weight;
                 continue;
             }
 
-            near = state;
+            _last = state;
             double load = _template.Crystal.Crystal.LoadAtFrequencyFarads(estimate.FrequencyHz);
             share = load / staticLoad;
             _loadShares[option] = share;

@@ -10,7 +10,7 @@ namespace PartPick.Selection.Search;
 internal sealed class MemberSearch
 {
     private const double MarginSlack = 1.01;
-    private const double SlopeShare = 0.4;
+    private const double SlopeShare = 0.6;
     private const double BaseSlack = 1e-6;
     private const double BaseDriveSlack = 0.01;
     private readonly SearchRun _run;
@@ -78,7 +78,7 @@ internal sealed class MemberSearch
         }
 
         CircuitValues values = option.With(_run.Space.Capacitors[estimate.C1].Farads, _run.Space.Capacitors[estimate.C2].Farads);
-        prospect = prospect with { ErrorRatio = error + estimate.LeastAmplifierRatio(_member.Template, values) };
+        prospect = prospect with { ErrorRatio = error + estimate.LeastAmplifierRatio(_family.Members[0].Template, values) };
         return Breaks(prospect) || !_run.MayEnter(_member, prospect.ErrorRatio, margin, cost) ? null : prospect;
     }
 
@@ -108,16 +108,25 @@ internal sealed class MemberSearch
         return 0.9 * CrystalModel.MotionalUncertainty * Math.Max(0, shift - slack);
     }
 
-    // The slopes of the load by C1 and C2 are those of two capacitors in series, within a factor that the device never halves.
+    // The slopes of the load by C1, C2 and the strays are those of two capacitors in series beside a third, within a factor
+    // that the device does not undercut.
     private double CapacitorTerms(Estimate estimate, double load)
     {
         CapacitorValue c1 = _run.Space.Capacitors[estimate.C1];
         CapacitorValue c2 = _run.Space.Capacitors[estimate.C2];
-        double sum = c1.Farads + c2.Farads;
-        double trim = Math.Abs(_member.Model.Crystal.TrimSensitivityPerFarad(load));
-        double first = c2.Farads / sum * (c2.Farads / sum) * c1.Farads * _run.Prices.LeastSpread(estimate.C1);
-        double second = c1.Farads / sum * (c1.Farads / sum) * c2.Farads * _run.Prices.LeastSpread(estimate.C2);
-        return SlopeShare * trim * (first + second);
+        Board board = _run.Space.Requirement.Board;
+        bool gate = _family.Kind != CircuitKind.Follower;
+        double first = c1.Farads + (gate ? board.Strays.InputFarads : 0);
+        double second = c2.Farads + board.Strays.OutputFarads;
+        double firstShare = second / (first + second) * (second / (first + second));
+        double secondShare = first / (first + second) * (first / (first + second));
+        double farads = firstShare * c1.Farads * _run.Prices.LeastSpread(estimate.C1)
+            + secondShare * c2.Farads * _run.Prices.LeastSpread(estimate.C2)
+            + board.UncertaintyRatio * (
+                (gate ? firstShare * board.Strays.InputFarads : 0)
+                + secondShare * board.Strays.OutputFarads
+                + board.Strays.AcrossFarads);
+        return SlopeShare * Math.Abs(_member.Model.Crystal.TrimSensitivityPerFarad(load)) * farads;
     }
 
     private void Analyse(Prospect prospect)
