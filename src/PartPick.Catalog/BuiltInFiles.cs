@@ -27,20 +27,23 @@ internal sealed class BuiltInFiles(IReadOnlyDictionary<PartKind, string> texts)
         return new BuiltInFiles(texts);
     }
 
+    /// <summary>The text of a kind's file; empty where there is none.</summary>
+    public string TextOf(PartKind kind) => texts.GetValueOrDefault(kind, "");
+
     /// <summary>Changes whenever a file does.</summary>
     public string Fingerprint()
     {
         using var hash = IncrementalHash.CreateHash(HashAlgorithmName.SHA256);
         foreach (PartKind kind in PartKinds.All)
         {
-            hash.AppendData(Encoding.UTF8.GetBytes($"{kind.Word()}\0{texts.GetValueOrDefault(kind, "")}\0"));
+            hash.AppendData(Encoding.UTF8.GetBytes($"{kind.Word()}\0{TextOf(kind)}\0"));
         }
 
         return Convert.ToHexString(hash.GetHashAndReset());
     }
 
     /// <summary>Reads the parts.</summary>
-    /// <exception cref="InvalidOperationException">A file is wrong, which is a mistake in the program.</exception>
+    /// <exception cref="BuiltInPartsException">A file is wrong, which is a mistake in the program.</exception>
     public PartsCatalog ReadCatalog()
     {
         var parts = new List<Part>();
@@ -57,7 +60,7 @@ internal sealed class BuiltInFiles(IReadOnlyDictionary<PartKind, string> texts)
 
             if (first is not null)
             {
-                throw new InvalidOperationException($"The parts inside the program are wrong: {first}");
+                throw new BuiltInPartsException($"The parts inside the program are wrong: {first}");
             }
 
             parts.AddRange(read);

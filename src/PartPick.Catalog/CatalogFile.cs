@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using LiteDB;
 using PartPick.Catalog.Mapping;
 
@@ -12,6 +13,9 @@ internal sealed class CatalogFile : IDisposable
     private const string FingerprintKey = "builtInFingerprint";
     private const int PageBytes = 8192;
     private const int MarkOffset = 32;
+
+    // A transaction that could not be ended throws again when it is finalized, which would end the process: keep it reachable.
+    private static readonly ConcurrentBag<LiteDatabase> Abandoned = [];
 
     private readonly LiteDatabase _database;
 
@@ -31,7 +35,7 @@ internal sealed class CatalogFile : IDisposable
 
     public string? BuiltInFingerprint
     {
-        get => TextDocument.Read(About.FindById(FingerprintKey));
+        get => TextDocument.Read(About.FindAll().FirstOrDefault(document => document["_id"] == FingerprintKey));
         private set => About.Upsert(TextDocument.Write(FingerprintKey, value!));
     }
 
@@ -106,6 +110,20 @@ internal sealed class CatalogFile : IDisposable
     public string? ReadSetting(string key) => TextDocument.Read(Settings.FindById(key));
 
     public void WriteSetting(string key, string text) => Settings.Upsert(TextDocument.Write(key, text));
+
+    /// <summary>Closes the file as far as that goes, after something in it went wrong.</summary>
+    public void Abandon()
+    {
+        Abandoned.Add(_database);
+        try
+        {
+            _database.Dispose();
+        }
+        catch (Exception)
+        {
+            // The first error says what is wrong; closing a damaged file only repeats it.
+        }
+    }
 
     public void Dispose() => _database.Dispose();
 

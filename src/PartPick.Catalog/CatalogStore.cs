@@ -1,4 +1,3 @@
-using LiteDB;
 using PartPick.Values;
 
 namespace PartPick.Catalog;
@@ -31,7 +30,9 @@ public static class CatalogStore
             : Result.Ok<string?>(null);
     }
 
-    /// <summary>Keeps a small text, such as the last requirement. A file that is not there is made as in <see cref="Load(string)"/>.</summary>
+    /// <summary>
+    /// Keeps a small text, such as the last requirement. A file that is not there is made as in <see cref="Load(string)"/>.
+    /// </summary>
     /// <param name="path">The path of the file.</param>
     /// <param name="key">The name of the text.</param>
     /// <param name="text">The text.</param>
@@ -90,7 +91,7 @@ public static class CatalogStore
                 return WorkOn(path, work);
             }
         }
-        catch (Exception error) when (error is IOException or UnauthorizedAccessException or NotSupportedException)
+        catch (Exception error) when (error is IOException or UnauthorizedAccessException)
         {
             return Result.Fail<T>(path, $"cannot be opened: {error.Message}", "a file in a directory that can be written to");
         }
@@ -98,22 +99,31 @@ public static class CatalogStore
 
     private static Result<T> WorkOn<T>(string path, Func<CatalogFile, T> work)
     {
+        CatalogFile? file = null;
         try
         {
-            using CatalogFile file = CatalogFile.Open(path);
-            return file.StoredSchema == CatalogFile.Schema
+            file = CatalogFile.Open(path);
+            Result<T> result = file.StoredSchema == CatalogFile.Schema
                 ? Result.Ok(work(file))
                 : Result.Fail<T>(path, $"is of schema {file.StoredSchema}", $"a catalogue of schema {CatalogFile.Schema}");
+            file.Dispose();
+            return result;
         }
         catch (Exception error) when (IsDamage(error))
         {
+            file?.Abandon();
             return Result.Fail<T>(
-                path, $"is damaged or no catalogue: {error.Message}", "a catalogue made by this program; move this file away to begin anew");
+                path, $"is damaged or no catalogue: {error.Message}",
+                "a catalogue made by this program; move this file away to begin anew");
+        }
+        catch
+        {
+            file?.Abandon();
+            throw;
         }
     }
 
-    // Reading pages of a damaged file fails in whatever way its bytes happen to mislead.
-    private static bool IsDamage(Exception error) => error is LiteException or InvalidDataException or EndOfStreamException
-        or InvalidCastException or ArgumentException or IndexOutOfRangeException or KeyNotFoundException or NullReferenceException
-        or OverflowException or FormatException or ObjectDisposedException;
+    // Reading pages of a damaged file fails in whatever way its bytes happen to mislead; what the disk refuses is no damage.
+    private static bool IsDamage(Exception error) =>
+        error is EndOfStreamException or not (IOException or UnauthorizedAccessException or BuiltInPartsException);
 }

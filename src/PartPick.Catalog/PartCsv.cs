@@ -45,7 +45,8 @@ public static class PartCsv
             long line = reader.LineNumber;
             if (malformed.Contains(line))
             {
-                problems.Add(new Problem(Place(fileName, line), "has a quote that is not closed, or text after one", "quotes as in RFC 4180"));
+                problems.Add(new Problem(
+                    Place(fileName, line), "has a quote that is not closed, or text after one", "quotes as in RFC 4180"));
             }
             else if (reader.FieldCount != fields.Length)
             {
@@ -60,7 +61,8 @@ public static class PartCsv
                 else
                 {
                     problems.Add(new Problem(
-                        Place(fileName, line, "id"), $"{Problem.Quote(part.Id)} is already in line {firstLine[part.Id]}", "an id of its own"));
+                        Place(fileName, line, "id"), $"{Problem.Quote(part.Id)} is already in line {firstLine[part.Id]}",
+                        "an id of its own"));
                 }
             }
         }
@@ -127,7 +129,8 @@ public static class PartCsv
         string place = Place(fileName, 1);
         foreach (string missing in known.Except(header))
         {
-            problems.Add(new Problem(place, $"the column {Problem.Quote(missing)} is missing", "every column of the kind, empty where nothing is known"));
+            problems.Add(new Problem(
+                place, $"the column {Problem.Quote(missing)} is missing", "every column of the kind, empty where nothing is known"));
         }
 
         foreach (string unknown in header.Except(known))

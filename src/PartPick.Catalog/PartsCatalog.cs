@@ -55,7 +55,7 @@ public sealed class PartsCatalog
 
     /// <summary>The parts that travel inside the program.</summary>
     /// <returns>The catalogue, read once.</returns>
-    /// <exception cref="InvalidOperationException">The files in the program are wrong.</exception>
+    /// <exception cref="BuiltInPartsException">The files in the program are wrong.</exception>
     public static PartsCatalog BuiltIn() => Embedded.Value;
 
     /// <summary>The parts of one kind.</summary>

@@ -12,10 +12,15 @@ public static class OscillatorAnalysis
 {
     /// <summary>Analyses a circuit at its supply and temperature: start-up, running margin and steady state.</summary>
     /// <param name="circuit">The circuit; its values must be finite and positive where the model needs them.</param>
-    public static OscillatorResult Analyse(OscillatorCircuit circuit) => circuit switch
+    public static OscillatorResult Analyse(OscillatorCircuit circuit) => Analyse(circuit, out _);
+
+    /// <summary>Analyses a circuit, and keeps its running state as a starting point for circuits like it.</summary>
+    /// <param name="circuit">The circuit.</param>
+    /// <param name="state">The running state; null where there is none.</param>
+    public static OscillatorResult Analyse(OscillatorCircuit circuit, out RunningState? state) => circuit switch
     {
-        GateCircuit gate => Analyse(gate),
-        FollowerCircuit follower => Analyse(follower),
+        GateCircuit gate => Analyse(gate, out state),
+        FollowerCircuit follower => Analyse(follower, out state),
         _ => throw new ArgumentException("Unknown kind of circuit.", nameof(circuit)),
     };
 
@@ -39,26 +44,95 @@ public static class OscillatorAnalysis
     /// <param name="circuit">The circuit.</param>
     public static SteadyState? FindSteadyState(OscillatorCircuit circuit) => Analyse(circuit).Steady;
 
-    private static OscillatorResult Analyse(GateCircuit gate)
+    /// <summary>
+    /// The steady state of a circuit like one whose running state is known: many times cheaper than from nothing. Where it is
+    /// not found from there, it is sought from nothing.
+    /// </summary>
+    /// <param name="circuit">The circuit.</param>
+    /// <param name="near">The running state of a circuit like it.</param>
+    /// <param name="refine">
+    /// True to refine it like a state sought from nothing; false to stay at the known state's fineness, good for differences
+    /// between circuits alike.
+    /// </param>
+    /// <param name="state">The running state; null where there is none.</param>
+    public static SteadyState? FindSteadyState(OscillatorCircuit circuit, RunningState near, bool refine, out RunningState? state)
+    {
+        ArgumentNullException.ThrowIfNull(near);
+        state = null;
+        SteadyState? steady = Balances(circuit) is { } refinement
+            ? SteadySolver.Follow(circuit.Crystal, refinement, near, refine, out state)
+            : null;
+        return steady ?? Analyse(circuit, out state).Steady;
+    }
+
+    /// <summary>A quick estimate of the steady state; null where there is none.</summary>
+    /// <param name="circuit">The circuit.</param>
+    /// <param name="near">The state of an estimate of a circuit like it; null to start from nothing.</param>
+    /// <param name="state">The state, for the next estimate.</param>
+    public static SteadyEstimate? EstimateSteadyState(OscillatorCircuit circuit, RunningState? near, out RunningState? state)
+    {
+        state = null;
+        if (Balances(circuit) is not { } refinement)
+        {
+            return null;
+        }
+
+        switch (circuit)
+        {
+            case GateCircuit gate:
+                return SteadySolver.Estimate(gate.Crystal, SmallSignals(gate), Transconductance(gate), refinement, near, out state);
+            case FollowerCircuit follower:
+                double siemens = FollowerBias.Solve(follower).TransconductanceSiemens;
+                return SteadySolver.Estimate(follower.Crystal, new FollowerNetwork(follower), siemens, refinement, near, out state);
+            default:
+                throw new ArgumentException("Unknown kind of circuit.", nameof(circuit));
+        }
+    }
+
+    /// <summary>Start-up margin and growth rate alone, the cheapest figures of all.</summary>
+    /// <param name="circuit">The circuit.</param>
+    public static StartFigures FindStartFigures(OscillatorCircuit circuit) => circuit switch
+    {
+        GateCircuit gate => StartUpSolver.Figures(gate.Crystal, SmallSignals(gate), Transconductance(gate)),
+        FollowerCircuit follower => StartUpSolver.Figures(
+            follower.Crystal, new FollowerNetwork(follower), FollowerBias.Solve(follower).TransconductanceSiemens),
+        _ => throw new ArgumentException("Unknown kind of circuit.", nameof(circuit)),
+    };
+
+    /// <summary>ln(Î/Î0)/σ with the thermal current Î0 = √(kT/Lm) of the motional branch, in seconds.</summary>
+    /// <param name="circuit">The circuit.</param>
+    /// <param name="growthRatePerSecond">Growth rate σ in 1/s, above zero.</param>
+    /// <param name="currentRmsAmps">Steady motional current in amperes rms.</param>
+    public static double StartUpTimeSeconds(OscillatorCircuit circuit, double growthRatePerSecond, double currentRmsAmps)
+    {
+        ArgumentNullException.ThrowIfNull(circuit);
+        double kelvins = circuit.TemperatureCelsius + PhysicalConstants.ZeroCelsiusKelvins;
+        double thermal = Math.Sqrt(PhysicalConstants.BoltzmannJoulesPerKelvin * kelvins / circuit.Crystal.InductanceHenries);
+        return Math.Log(currentRmsAmps * Math.Sqrt(2) / thermal) / growthRatePerSecond;
+    }
+
+    private static OscillatorResult Analyse(GateCircuit gate, out RunningState? state)
     {
         GateNetwork network = SmallSignals(gate);
         StartUp startUp = StartUpSolver.Solve(gate.Crystal, network, Transconductance(gate));
         double largest = double.NegativeInfinity;
+        state = null;
         SteadyState? steady = Balances(gate) is { } refinement
-            ? SteadySolver.Solve(gate.Crystal, network, startUp.TransconductanceSiemens, refinement, out largest)
+            ? SteadySolver.Solve(gate.Crystal, network, startUp.TransconductanceSiemens, refinement, out largest, out state)
             : null;
         return Combine(gate, startUp, steady, largest, null);
     }
 
-    private static OscillatorResult Analyse(FollowerCircuit follower)
+    private static OscillatorResult Analyse(FollowerCircuit follower, out RunningState? state)
     {
         FollowerBias bias = FollowerBias.Solve(follower);
         var network = new FollowerNetwork(follower);
         StartUp startUp = StartUpSolver.Solve(follower.Crystal, network, bias.TransconductanceSiemens);
         double largest = double.NegativeInfinity;
+        state = null;
         SteadyState? steady = bias.EmitterAmps > 0
             ? SteadySolver.Solve(
-                follower.Crystal, network, bias.TransconductanceSiemens, new FollowerRefinement(follower, bias), out largest)
+                follower.Crystal, network, bias.TransconductanceSiemens, new FollowerRefinement(follower, bias), out largest, out state)
             : null;
         return Combine(follower, startUp, steady, largest, bias.EmitterAmps);
     }
@@ -74,18 +148,10 @@ public static class OscillatorAnalysis
             StartUp = startUp,
             Start = start,
             RunningMargin = Math.Max(startUp.Margin, largestNegativeOhms / circuit.Crystal.ResistanceOhms),
-            StartUpTimeSeconds = start == StartKind.BuildsUp && steady is not null ? StartUpTime(circuit, startUp, steady) : null,
+            StartUpTimeSeconds = start == StartKind.BuildsUp && steady is not null ? StartUpTimeSeconds(circuit, startUp.GrowthRatePerSecond, steady.CurrentRmsAmps) : null,
             Steady = steady,
             EmitterCurrentAmps = emitterAmps,
         };
-    }
-
-    /// <summary>ln(Î/Î0)/σ with the thermal current Î0 = √(kT/Lm) of the motional branch.</summary>
-    private static double StartUpTime(OscillatorCircuit circuit, StartUp startUp, SteadyState steady)
-    {
-        double kelvins = circuit.TemperatureCelsius + PhysicalConstants.ZeroCelsiusKelvins;
-        double thermal = Math.Sqrt(PhysicalConstants.BoltzmannJoulesPerKelvin * kelvins / circuit.Crystal.InductanceHenries);
-        return Math.Log(steady.CurrentRmsAmps * Math.Sqrt(2) / thermal) / startUp.GrowthRatePerSecond;
     }
 
     private static GateNetwork SmallSignals(GateCircuit gate) => new(gate, 1 / gate.Inverter.OutputOhms);
@@ -94,6 +160,20 @@ public static class OscillatorAnalysis
         gate.Inverter is OneStageInverter oneStage && SquareLaw.Fit(oneStage, gate.SupplyVolts) is null
             ? 0
             : gate.Inverter.TransconductanceSiemens;
+
+    private static Refinement? Balances(OscillatorCircuit circuit)
+    {
+        switch (circuit)
+        {
+            case GateCircuit gate:
+                return Balances(gate);
+            case FollowerCircuit follower:
+                FollowerBias bias = FollowerBias.Solve(follower);
+                return bias.EmitterAmps > 0 ? new FollowerRefinement(follower, bias) : null;
+            default:
+                throw new ArgumentException("Unknown kind of circuit.", nameof(circuit));
+        }
+    }
 
     private static Refinement? Balances(GateCircuit gate) => gate.Inverter switch
     {

@@ -23,10 +23,19 @@ public sealed class PartsCatalogTests
         Assert.Equal(PartsCatalog.BuiltIn().All.Length, PartKinds.All.Sum(kind => PartsCatalog.BuiltIn().OfKind(kind).Count()));
 
     [Fact]
+    public void The_files_inside_the_program_are_as_the_program_writes_them() => Assert.All(PartKinds.All, kind =>
+    {
+        string text = BuiltInFiles.Embedded().TextOf(kind);
+        (IReadOnlyList<Part> parts, IReadOnlyList<Problem> problems) = PartCsv.Read(kind, new StringReader(text), kind.Word());
+        Assert.Equal(text, text.Length == 0 ? "" : Samples.Csv(kind, parts));
+        Assert.True(text.Length == 0 || problems.Count == 0);
+    });
+
+    [Fact]
     public void A_mistake_in_the_parts_inside_the_program_is_named()
     {
         var files = new BuiltInFiles(new Dictionary<PartKind, string> { [PartKind.Resistor] = "id\n" });
-        Assert.Contains("resistors.csv line 1", Assert.Throws<InvalidOperationException>(files.ReadCatalog).Message, StringComparison.Ordinal);
+        Assert.Contains("resistors.csv line 1", Assert.Throws<BuiltInPartsException>(files.ReadCatalog).Message, StringComparison.Ordinal);
     }
 
     [Fact]

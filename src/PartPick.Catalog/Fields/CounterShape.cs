@@ -20,7 +20,7 @@ internal sealed class CounterShape() : AmplifierShape(PartKind.Counter, Text("ta
         var taps = ImmutableArray.CreateBuilder<int>();
         foreach (string entry in reader.RequiredText("taps").Split(';', StringSplitOptions.RemoveEmptyEntries))
         {
-            if (!int.TryParse(entry, NumberStyles.AllowLeadingWhite | NumberStyles.AllowTrailingWhite, CultureInfo.InvariantCulture, out int tap)
+            if (!int.TryParse(entry.Trim(), NumberStyles.None, CultureInfo.InvariantCulture, out int tap)
                 || tap is < 1 or > 62
                 || (taps.Count > 0 && tap <= taps[^1]))
             {

@@ -13,6 +13,7 @@ internal readonly struct FollowerNetwork : ILinearNetwork
     private readonly double _groundB;
     private readonly double _groundI;
     private readonly double _emitterSiemens;
+    private readonly double _loadSiemens;
     private readonly double _baseSiemens;
     private readonly double _c1;
     private readonly double _junction;
@@ -25,7 +26,8 @@ internal readonly struct FollowerNetwork : ILinearNetwork
         _groundE = circuit.C2Farads + circuit.Strays.OutputFarads;
         _groundB = circuit.Crystal.ShuntFarads + circuit.Strays.AcrossFarads;
         _groundI = circuit.Transistor.CollectorFarads;
-        _emitterSiemens = 1 / circuit.EmitterOhms + 1 / circuit.LoadOhms;
+        _emitterSiemens = 1 / circuit.EmitterOhms;
+        _loadSiemens = 1 / circuit.LoadOhms;
         _baseSiemens = 1 / circuit.BaseTopOhms + 1 / circuit.BaseBottomOhms;
         _c1 = circuit.C1Farads;
         _junction = circuit.Transistor.JunctionFarads;
@@ -37,8 +39,10 @@ internal readonly struct FollowerNetwork : ILinearNetwork
     /// <summary>Transfer impedances of the ports that the transistor and the crystal see.</summary>
     public FollowerPorts Ports(Complex s)
     {
+        // The load stands behind a large capacitor: it answers to the signal, not to DC.
+        double emitterSiemens = s == Complex.Zero ? _emitterSiemens : _emitterSiemens + _loadSiemens;
         var network = new ThreeNodeNetwork(
-            s * _groundE + _emitterSiemens,
+            s * _groundE + emitterSiemens,
             s * _groundB + _baseSiemens,
             s * _groundI,
             s * _c1,

@@ -4,29 +4,46 @@ using System.Runtime.InteropServices;
 namespace PartPick.Physics.Numerics;
 
 /// <summary>
-/// Gaussian elimination with partial pivoting on a dense row-major matrix, in place and without allocation: the inner loop
-/// of the harmonic balance, too small and too frequent for a general library call.
+/// LU factors with partial pivoting of a dense row-major matrix, in place and without allocation once sized: the inner loop of
+/// the harmonic balance, too small and too frequent for a general library call.
 /// </summary>
-internal static class DenseSolver
+internal sealed class DenseSolver
 {
-    /// <summary>
-    /// Solves the leading n×n system for every right-hand column that follows it in the same row. On return the columns
-    /// n … n + rightHandSides − 1 hold the solutions. False where the matrix is singular.
-    /// </summary>
-    /// <param name="matrix">Rows of <paramref name="stride"/> numbers.</param>
-    /// <param name="n">Number of equations.</param>
-    /// <param name="rightHandSides">Number of columns to solve for.</param>
-    /// <param name="stride">Length of a row, at least n + rightHandSides.</param>
-    public static bool Solve(Span<double> matrix, int n, int rightHandSides, int stride)
+    private double[] _matrix = [];
+    private int[] _pivots = [];
+    private int _n;
+    private int _stride;
+
+    /// <summary>True while factors of the last matrix are there to solve with.</summary>
+    public bool IsFactored { get; private set; }
+
+    /// <summary>Sizes the matrix and gives its storage, rows of <paramref name="stride"/> numbers.</summary>
+    public Span<double> Matrix(int n, out int stride)
     {
-        int width = n + rightHandSides;
-        for (int column = 0; column < n; column++)
+        _n = n;
+        _stride = (n + 3) / 4 * 4;
+        if (_matrix.Length < n * _stride)
+        {
+            _matrix = new double[n * _stride];
+            _pivots = new int[n];
+        }
+
+        IsFactored = false;
+        stride = _stride;
+        return _matrix;
+    }
+
+    /// <summary>Factors the matrix in place; false where it is singular.</summary>
+    public bool Factor()
+    {
+        Span<double> matrix = _matrix;
+        for (int column = 0; column < _n; column++)
         {
             int pivot = column;
-            double largest = Math.Abs(matrix[column * stride + column]);
-            for (int row = column + 1; row < n; row++)
+            double largest = Math.Abs(matrix[column * _stride + column]);
+            for (int row = column + 1; row < _n; row++)
             {
-                double size = Math.Abs(matrix[row * stride + column]);
+                double size = Math.Abs(matrix[row * _stride + column]);
                 if (size > largest)
                 {
                     largest = size;
@@ -39,22 +56,20 @@ internal static class DenseSolver
                 return false;
             }
 
-            Span<double> pivotRow = matrix.Slice(column * stride, width);
+            _pivots[column] = pivot;
+            Span<double> pivotRow = matrix.Slice(column * _stride, _n);
             if (pivot != column)
             {
-                Span<double> other = matrix.Slice(pivot * stride, width);
-                for (int k = column; k < width; k++)
-                {
-                    (pivotRow[k], other[k]) = (other[k], pivotRow[k]);
-                }
+                Swap(pivotRow, matrix.Slice(pivot * _stride, _n));
             }
 
             double inverse = 1 / pivotRow[column];
             ReadOnlySpan<double> tail = pivotRow[(column + 1)..];
-            for (int row = column + 1; row < n; row++)
+            for (int row = column + 1; row < _n; row++)
             {
-                Span<double> target = matrix.Slice(row * stride, width);
+                Span<double> target = matrix.Slice(row * _stride, _n);
                 double factor = target[column] * inverse;
+                target[column] = factor;
                 if (factor != 0)
                 {
                     SubtractMultiple(target[(column + 1)..], tail, factor);
@@ -62,31 +77,48 @@ internal static class DenseSolver
             }
         }
 
-        return BackSubstitute(matrix, n, width, stride);
+        IsFactored = true;
+        return true;
     }
 
-    private static bool BackSubstitute(Span<double> matrix, int n, int width, int stride)
+    /// <summary>Solves for one right-hand side, in place; false where the solution is not finite.</summary>
+    public bool Solve(Span<double> right)
     {
-        for (int right = n; right < width; right++)
+        ReadOnlySpan<double> matrix = _matrix;
+        for (int row = 0; row < _n; row++)
         {
-            for (int row = n - 1; row >= 0; row--)
+            int pivot = _pivots[row];
+            if (pivot != row)
             {
-                Span<double> line = matrix.Slice(row * stride, width);
-                double sum = line[right];
-                for (int k = row + 1; k < n; k++)
-                {
-                    sum -= line[k] * matrix[k * stride + right];
-                }
+                (right[row], right[pivot]) = (right[pivot], right[row]);
+            }
+        }
 
-                line[right] = sum / line[row];
-                if (!double.IsFinite(line[right]))
-                {
-                    return false;
-                }
+        for (int row = 1; row < _n; row++)
+        {
+            right[row] -= Rows.Dot(matrix.Slice(row * _stride, row), right[..row]);
+        }
+
+        for (int row = _n - 1; row >= 0; row--)
+        {
+            ReadOnlySpan<double> line = matrix.Slice(row * _stride, _n);
+            double sum = right[row] - Rows.Dot(line[(row + 1)..], right[(row + 1).._n]);
+            right[row] = sum / line[row];
+            if (!double.IsFinite(right[row]))
+            {
+                return false;
             }
         }
 
         return true;
+    }
+
+    private static void Swap(Span<double> left, Span<double> right)
+    {
+        for (int k = 0; k < left.Length; k++)
+        {
+            (left[k], right[k]) = (right[k], left[k]);
+        }
     }
 
     private static void SubtractMultiple(Span<double> target, ReadOnlySpan<double> source, double factor)

@@ -26,6 +26,15 @@ internal static class StartUpSolver
         };
     }
 
+    /// <summary>Start-up margin and growth rate alone.</summary>
+    public static StartFigures Figures<TNetwork>(Crystal crystal, in TNetwork network, double siemens)
+        where TNetwork : struct, ILinearNetwork
+    {
+        NaturalMode mode = NaturalMode.Find(new CrystalBranch(crystal), network, siemens);
+        double negative = NegativeResistance(network, mode.Radians, siemens);
+        return new StartFigures(negative / crystal.ResistanceOhms, mode.GrowthRate);
+    }
+
     /// <summary>−Re Zc(jω; gm) in ohms.</summary>
     public static double NegativeResistance<TNetwork>(in TNetwork network, double radians, double siemens)
         where TNetwork : struct, ILinearNetwork =>

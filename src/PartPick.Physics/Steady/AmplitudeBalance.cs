@@ -9,9 +9,16 @@ namespace PartPick.Physics.Steady;
 /// </summary>
 internal abstract class AmplitudeBalance
 {
-    private const int MostSteps = 40;
+    private const int MostSteps = 60;
+    private const int MostHalvings = 11;
     private const double LargestLogStep = 0.7;
-    private double[] _work = [];
+    private const double Tolerance = 1e-11;
+    private const double KeepRatio = 0.15;
+    private readonly DenseSolver _solver = new();
+    private double[] _residual = [];
+    private double[] _step = [];
+    private double[] _gradient = [];
+    private double[] _byLog = [];
     private double[] _trial = [];
 
     /// <summary>Peak motional current in amperes at which the state was last solved.</summary>
@@ -20,7 +27,7 @@ internal abstract class AmplitudeBalance
     /// <summary>Zc(I) = V₁/I in ohms of the last solved state.</summary>
     public Complex Impedance { get; private set; }
 
-    /// <summary>d Re Zc / d ln I in ohms at the last state solved for a given amplitude or running.</summary>
+    /// <summary>d Re Zc / d ln I in ohms at the last state solved for a given amplitude.</summary>
     public double ResistanceSlope { get; private set; }
 
     /// <summary>The unknowns of the balance: the state itself, kept between calls as the next starting point.</summary>
@@ -39,13 +46,16 @@ internal abstract class AmplitudeBalance
         PrepareHarmonics(radians);
     }
 
-    /// <summary>Takes frequency, amplitude and state of another balance of the same kind and fineness.</summary>
-    public void TakeState(AmplitudeBalance other)
+    /// <summary>Takes a frequency in rad/s, an amplitude in amperes and a state of the same kind and fineness.</summary>
+    public void TakeState(double radians, double peakAmps, ReadOnlySpan<double> state)
     {
-        SetFrequency(other.Radians);
-        PeakAmps = other.PeakAmps;
-        other.State.CopyTo(State, 0);
+        SetFrequency(radians);
+        PeakAmps = peakAmps;
+        state.CopyTo(State);
     }
+
+    /// <summary>The state as a starting point for a circuit like this one.</summary>
+    public abstract RunningState Keep();
 
     /// <summary>Puts the state of small signals at an amplitude as the starting point.</summary>
     public abstract void StartLinear(double peakAmps);
@@ -78,14 +88,11 @@ internal abstract class AmplitudeBalance
     /// <summary>Computes what depends on the frequency alone.</summary>
     protected abstract void PrepareHarmonics(double radians);
 
-    /// <summary>
-    /// Fills the residual's negative (column n), the Jacobian (columns 0 … n−1) and the derivative of the residual by
-    /// ln I, negated (column n + 1), in rows of <paramref name="stride"/>. Returns the residual's size relative to its scale.
-    /// </summary>
-    protected abstract double Linearise(ReadOnlySpan<double> state, double peakAmps, Span<double> matrix, int stride);
+    /// <summary>The residual at a state; returns its size relative to its scale.</summary>
+    protected abstract double Residual(ReadOnlySpan<double> state, double peakAmps, Span<double> residual);
 
-    /// <summary>The residual's size alone, relative to its scale.</summary>
-    protected abstract double ResidualSize(ReadOnlySpan<double> state, double peakAmps);
+    /// <summary>The residual's Jacobian, in rows of <paramref name="stride"/>, and its derivative by ln I.</summary>
+    protected abstract void Linearise(ReadOnlySpan<double> state, double peakAmps, Span<double> matrix, int stride, Span<double> byLogAmps);
 
     /// <summary>Zc for a state, and the gradient of its real part by the state and by ln I.</summary>
     protected abstract Complex ImpedanceOf(ReadOnlySpan<double> state, double peakAmps, Span<double> gradient, out double byLogAmps);
@@ -93,124 +100,146 @@ internal abstract class AmplitudeBalance
     /// <summary>Largest step that Newton may take at once, as a fraction of the full one.</summary>
     protected virtual double StepLimit(ReadOnlySpan<double> step) => 1;
 
+    // Newton's method that keeps its factors while they still shrink the residual well. With a resistance the amplitude is
+    // one more unknown and Re Zc + Rm one more equation.
     private bool Newton(double? resistanceOhms)
     {
         int n = Count;
-        int stride = n + 4;
-        if (_work.Length < (n + 1) * stride)
-        {
-            _work = new double[(n + 1) * stride];
-        }
-
-        if (_trial.Length != n)
-        {
-            _trial = new double[n];
-        }
-
-        Span<double> matrix = _work;
-        double size = double.PositiveInfinity;
+        int order = resistanceOhms is null ? n : n + 1;
+        Size(n + 1);
+        double before = double.PositiveInfinity;
+        bool factored = false;
+        double size = Residual(State, PeakAmps, _residual.AsSpan(0, n));
         for (int step = 0; step < MostSteps; step++)
         {
-            size = Linearise(State, PeakAmps, matrix, stride);
-            if (!double.IsFinite(size))
+            double mismatch = 0;
+            if (resistanceOhms is { } resistance)
+            {
+                Impedance = ImpedanceOf(State, PeakAmps, _gradient.AsSpan(0, n), out double byLog);
+                _gradient[n] = byLog / resistance;
+                mismatch = Impedance.Real / resistance + 1;
+                _residual[n] = mismatch;
+            }
+
+            double total = Math.Max(size, Math.Abs(mismatch));
+            if (!double.IsFinite(total))
             {
                 return false;
             }
 
-            Span<double> border = matrix.Slice(n * stride, stride);
-            Complex impedance = ImpedanceOf(State, PeakAmps, border[..n], out double byLog);
-            if (resistanceOhms is { } resistance)
+            if (total < Tolerance)
             {
-                double mismatch = impedance.Real + resistance;
-                for (int row = 0; row < n; row++)
-                {
-                    Span<double> line = matrix.Slice(row * stride, stride);
-                    (line[n], line[n + 1]) = (-line[n + 1], line[n]);
-                }
-
-                border[n] = byLog;
-                border[n + 1] = -mismatch;
-                if (!DenseSolver.Solve(matrix, n + 1, 1, stride))
-                {
-                    return false;
-                }
-
-                bool done = size < 1e-9 && Math.Abs(mismatch) < 1e-9 * resistance;
-                double logStep = matrix[n * stride + n + 1];
-                double limit = ApplyStep(matrix, n + 1, stride, size, logStep);
-                if (limit == 0)
-                {
-                    return false;
-                }
-
-                if (done && limit == 1)
-                {
-                    return FinishAt();
-                }
+                return resistanceOhms is not null || Finish(n);
             }
-            else
+
+            if (!factored || total > KeepRatio * before)
             {
-                if (!DenseSolver.Solve(matrix, n, 2, stride))
+                if (!Factor(n, order, resistanceOhms))
                 {
                     return false;
                 }
 
-                double slope = byLog;
-                for (int row = 0; row < n; row++)
-                {
-                    slope += border[row] * matrix[row * stride + n + 1];
-                }
-
-                bool done = size < 1e-9;
-                double limit = ApplyStep(matrix, n, stride, size, 0);
-                if (limit == 0)
-                {
-                    return false;
-                }
-
-                if (done && limit == 1)
-                {
-                    ResistanceSlope = slope;
-                    Impedance = ImpedanceOf(State, PeakAmps, border[..n], out _);
-                    return true;
-                }
+                factored = true;
             }
+
+            before = total;
+            for (int row = 0; row < order; row++)
+            {
+                _step[row] = -_residual[row];
+            }
+
+            if (!_solver.Solve(_step.AsSpan(0, order)))
+            {
+                return false;
+            }
+
+            size = TakeStep(n, order == n ? 0 : _step[n], size);
         }
 
         return false;
     }
 
-    // The amplitude of a running state is known; one more solution at that amplitude gives the slope there.
-    private bool FinishAt() => Newton(null);
-
-    private double ApplyStep(ReadOnlySpan<double> matrix, int column, int stride, double size, double logStep)
+    // The slope of the solved state along the amplitude, with factors of that very state.
+    private bool Finish(int n)
     {
-        int n = Count;
-        for (int row = 0; row < n; row++)
+        if (!Factor(n, n, null))
         {
-            _trial[row] = matrix[row * stride + column];
+            return false;
         }
 
-        double fraction = Math.Min(StepLimit(_trial), LargestLogStep / Math.Max(LargestLogStep, Math.Abs(logStep)));
+        Impedance = ImpedanceOf(State, PeakAmps, _gradient.AsSpan(0, n), out double slope);
+        for (int row = 0; row < n; row++)
+        {
+            _step[row] = -_byLog[row];
+        }
+
+        if (!_solver.Solve(_step.AsSpan(0, n)))
+        {
+            return false;
+        }
+
+        for (int row = 0; row < n; row++)
+        {
+            slope += _gradient[row] * _step[row];
+        }
+
+        ResistanceSlope = slope;
+        return true;
+    }
+
+    private bool Factor(int n, int order, double? resistanceOhms)
+    {
+        Span<double> matrix = _solver.Matrix(order, out int stride);
+        Linearise(State, PeakAmps, matrix, stride, _byLog.AsSpan(0, n));
+        if (resistanceOhms is { } resistance)
+        {
+            Span<double> border = matrix.Slice(n * stride, order);
+            for (int k = 0; k < n; k++)
+            {
+                matrix[k * stride + n] = _byLog[k];
+                border[k] = _gradient[k] / resistance;
+            }
+
+            border[n] = _gradient[n];
+        }
+
+        return _solver.Factor();
+    }
+
+    // The full step, or less of it where the state's own limit or a growing residual asks for less; returns the residual's size.
+    private double TakeStep(int n, double logStep, double size)
+    {
+        double fraction = Math.Min(StepLimit(_step.AsSpan(0, n)), LargestLogStep / Math.Max(LargestLogStep, Math.Abs(logStep)));
         double peak = PeakAmps;
-        for (int halving = 0; halving < 12; halving++)
+        for (int halving = 0; ; halving++)
         {
             for (int row = 0; row < n; row++)
             {
-                _trial[row] = State[row] + fraction * matrix[row * stride + column];
+                _trial[row] = State[row] + fraction * _step[row];
             }
 
             double trialPeak = peak * Math.Exp(fraction * logStep);
-            if (size < 1e-6 || ResidualSize(_trial, trialPeak) < size * 1.5 || halving == 11)
+            double trialSize = Residual(_trial, trialPeak, _residual.AsSpan(0, n));
+            if (size < 1e-6 || trialSize < size * 1.5 || halving == MostHalvings)
             {
                 (State, _trial) = (_trial, State);
                 PeakAmps = trialPeak;
-                return fraction;
+                return trialSize;
             }
 
             fraction /= 2;
         }
+    }
 
-        return 0;
+    private void Size(int order)
+    {
+        if (_residual.Length < order)
+        {
+            _residual = new double[order];
+            _step = new double[order];
+            _gradient = new double[order];
+            _byLog = new double[order];
+            _trial = new double[order - 1];
+        }
     }
 }

@@ -9,19 +9,22 @@ namespace PartPick.Physics.Steady;
 internal sealed class AmplitudeScan
 {
     private const double LargestRatio = 1.35;
-    private const double SmallestRatio = 1.01;
+    private const double SmallestRatio = 1.03;
     private const int MostSteps = 400;
+    private const int MostFiner = 3;
     private readonly Refinement _refinement;
     private readonly double _resistance;
+    private readonly double _radians;
     private AmplitudeBalance _balance;
     private double[] _before = [];
+    private int _finer;
 
     public AmplitudeScan(Refinement refinement, double radians, double resistanceOhms)
     {
         _refinement = refinement;
         _resistance = resistanceOhms;
-        _balance = refinement.Coarse();
-        _balance.SetFrequency(radians);
+        _radians = radians;
+        _balance = Fresh();
         Run();
     }
 
@@ -37,7 +40,8 @@ internal sealed class AmplitudeScan
         {
             RunDown(saturated);
         }
-        else
+
+        if (Running is null)
         {
             RunUp();
         }
@@ -55,13 +59,16 @@ internal sealed class AmplitudeScan
         double linear = _balance.LinearPeakAmps;
         double negative = Note();
         double slope = -_balance.ResistanceSlope;
-        while (ratio > SmallestRatio && peak > linear)
+        while (peak > linear)
         {
             _before = [.. _balance.State];
             if (!_balance.SolveAt(peak / ratio))
             {
-                _before.CopyTo(_balance.State, 0);
-                ratio = Math.Sqrt(ratio);
+                if (!StepBack(peak, ref ratio))
+                {
+                    return;
+                }
+
                 continue;
             }
 
@@ -71,7 +78,7 @@ internal sealed class AmplitudeScan
             if (Running is null && negative <= _resistance && next > _resistance)
             {
                 AmplitudeBalance scanning = _balance;
-                _balance = _refinement.Copy(scanning);
+                _balance = _refinement.From(scanning.Keep())!;
                 FindRunning(peak / ratio, peak);
                 _balance = scanning;
             }
@@ -87,8 +94,17 @@ internal sealed class AmplitudeScan
         }
     }
 
+    private AmplitudeBalance Fresh()
+    {
+        AmplitudeBalance balance = _refinement.Coarse();
+        balance.SetFrequency(_radians);
+        return balance;
+    }
+
     private void RunUp()
     {
+        _balance = Fresh();
+        _finer = 0;
         double peak = _balance.LinearPeakAmps;
         _balance.StartLinear(peak);
         if (!double.IsFinite(peak) || !_balance.SolveAt(peak))
@@ -104,9 +120,7 @@ internal sealed class AmplitudeScan
             _before = [.. _balance.State];
             if (!_balance.SolveAt(peak * ratio))
             {
-                _before.CopyTo(_balance.State, 0);
-                ratio = Math.Sqrt(ratio);
-                if (ratio < SmallestRatio)
+                if (!StepBack(peak, ref ratio))
                 {
                     return;
                 }
@@ -156,6 +170,27 @@ internal sealed class AmplitudeScan
             ratio = Math.Min(LargestRatio, ratio * ratio);
             (negative, slope) = (next, nextSlope);
         }
+    }
+
+    // Back to the last amplitude for a smaller step; where steps become too small, on with twice the harmonics.
+    private bool StepBack(double peak, ref double ratio)
+    {
+        _before.CopyTo(_balance.State, 0);
+        ratio = Math.Sqrt(ratio);
+        if (ratio >= SmallestRatio)
+        {
+            return true;
+        }
+
+        if (_finer == MostFiner || !_balance.SolveAt(peak) || _refinement.Finer(_balance) is not { } finer || !finer.SolveAt(peak))
+        {
+            return false;
+        }
+
+        _finer++;
+        _balance = finer;
+        ratio = LargestRatio;
+        return true;
     }
 
     private double Note()

@@ -58,6 +58,10 @@ internal sealed class BufferedBalance : AmplitudeBalance
     }
 
     /// <inheritdoc/>
+    public override RunningState Keep() =>
+        new(typeof(BufferedBalance), Count / 2, false, false, Radians, PeakAmps, [.. State]);
+
+    /// <inheritdoc/>
     public override void StartLinear(double peakAmps)
     {
         PeakAmps = peakAmps;
@@ -146,22 +150,44 @@ internal sealed class BufferedBalance : AmplitudeBalance
     }
 
     /// <inheritdoc/>
-    protected override double Linearise(ReadOnlySpan<double> state, double peakAmps, Span<double> matrix, int stride)
+    protected override double Residual(ReadOnlySpan<double> state, double peakAmps, Span<double> residual)
+    {
+        Take(state);
+        double worst = 0;
+        for (int h = 0; h < state.Length / 2; h++)
+        {
+            Complex difference = new Complex(state[2 * h], state[2 * h + 1]) - _loops[h] * _shape.Harmonic(2 * h + 1);
+            if (h == 0)
+            {
+                difference -= peakAmps * _delay * _ports.Input;
+            }
+
+            residual[2 * h] = difference.Real;
+            residual[2 * h + 1] = difference.Imaginary;
+            worst = Math.Max(worst, Complex.Abs(difference));
+        }
+
+        return worst / (peakAmps * Complex.Abs(_ports.Input));
+    }
+
+    /// <inheritdoc/>
+    protected override void Linearise(ReadOnlySpan<double> state, double peakAmps, Span<double> matrix, int stride, Span<double> byLogAmps)
     {
         int n = state.Length;
         Take(state);
         Complex drive = peakAmps * _delay * _ports.Input;
+        byLogAmps.Clear();
+        byLogAmps[0] = -drive.Real;
+        byLogAmps[1] = -drive.Imaginary;
         for (int row = 0; row < n / 2; row++)
         {
-            Complex loop = _loops[row];
-            Complex residual = Residual(state, peakAmps, row);
-            Span<double> real = matrix.Slice(2 * row * stride, n + 2);
-            Span<double> imaginary = matrix.Slice((2 * row + 1) * stride, n + 2);
+            Span<double> real = matrix.Slice(2 * row * stride, n);
+            Span<double> imaginary = matrix.Slice((2 * row + 1) * stride, n);
             for (int column = 0; column < n / 2; column++)
             {
                 _shape.Derivative(2 * row + 1, 2 * column + 1, out Complex byReal, out Complex byImaginary);
-                byReal *= loop;
-                byImaginary *= loop;
+                byReal *= _loops[row];
+                byImaginary *= _loops[row];
                 real[2 * column] = -byReal.Real;
                 real[2 * column + 1] = -byImaginary.Real;
                 imaginary[2 * column] = -byReal.Imaginary;
@@ -170,20 +196,7 @@ internal sealed class BufferedBalance : AmplitudeBalance
 
             real[2 * row] += 1;
             imaginary[2 * row + 1] += 1;
-            real[n] = -residual.Real;
-            imaginary[n] = -residual.Imaginary;
-            real[n + 1] = row == 0 ? drive.Real : 0;
-            imaginary[n + 1] = row == 0 ? drive.Imaginary : 0;
         }
-
-        return Size(state, peakAmps);
-    }
-
-    /// <inheritdoc/>
-    protected override double ResidualSize(ReadOnlySpan<double> state, double peakAmps)
-    {
-        Take(state);
-        return Size(state, peakAmps);
     }
 
     /// <inheritdoc/>
@@ -203,12 +216,6 @@ internal sealed class BufferedBalance : AmplitudeBalance
         return _ports.Own + sum;
     }
 
-    private Complex Residual(ReadOnlySpan<double> state, double peakAmps, int h)
-    {
-        Complex residual = new Complex(state[2 * h], state[2 * h + 1]) - _loops[h] * _shape.Harmonic(2 * h + 1);
-        return h == 0 ? residual - peakAmps * _delay * _ports.Input : residual;
-    }
-
     private void Take(ReadOnlySpan<double> state)
     {
         bool same = true;
@@ -223,16 +230,5 @@ internal sealed class BufferedBalance : AmplitudeBalance
         {
             _shape.Prepare();
         }
-    }
-
-    private double Size(ReadOnlySpan<double> state, double peakAmps)
-    {
-        double worst = 0;
-        for (int h = 0; h < state.Length / 2; h++)
-        {
-            worst = Math.Max(worst, Complex.Abs(Residual(state, peakAmps, h)));
-        }
-
-        return worst / (peakAmps * Complex.Abs(_ports.Input));
     }
 }

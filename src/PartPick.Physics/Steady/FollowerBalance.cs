@@ -99,6 +99,10 @@ internal sealed class FollowerBalance : AmplitudeBalance
     }
 
     /// <inheritdoc/>
+    public override RunningState Keep() =>
+        new(typeof(FollowerBalance), _points, _reverse, GivenCurrent, Radians, PeakAmps, [.. State]);
+
+    /// <inheritdoc/>
     public override void StartLinear(double peakAmps)
     {
         PeakAmps = peakAmps;
@@ -208,67 +212,65 @@ internal sealed class FollowerBalance : AmplitudeBalance
     }
 
     /// <inheritdoc/>
-    protected override double Linearise(ReadOnlySpan<double> state, double peakAmps, Span<double> matrix, int stride)
+    protected override double Residual(ReadOnlySpan<double> state, double peakAmps, Span<double> residual)
     {
-        int total = state.Length;
         ComputeCurrents(state);
         double worst = 0;
         for (int j = 0; j < _points; j++)
         {
-            Span<double> row = matrix.Slice(j * stride, total + 2);
+            residual[j] = state[j] - JunctionVolts(state, peakAmps, j);
+            worst = Math.Max(worst, Math.Abs(residual[j]));
+            if (_reverse)
+            {
+                residual[_points + j] = state[_points + j] - InternalVolts(peakAmps, j);
+                worst = Math.Max(worst, Math.Abs(residual[_points + j]));
+            }
+        }
+
+        worst /= _bias.ThermalVolts;
+        if (GivenCurrent)
+        {
+            residual[state.Length - 1] = -HeldMismatch();
+            worst = Math.Max(worst, Math.Abs(residual[state.Length - 1]));
+        }
+
+        return worst;
+    }
+
+    /// <inheritdoc/>
+    protected override void Linearise(ReadOnlySpan<double> state, double peakAmps, Span<double> matrix, int stride, Span<double> byLogAmps)
+    {
+        int total = state.Length;
+        ComputeCurrents(state);
+        byLogAmps.Clear();
+        for (int j = 0; j < _points; j++)
+        {
+            Span<double> row = matrix.Slice(j * stride, total);
             FillRow(row, j, _junctionForward, _junctionReverse);
             row[j] += 1;
-            row[total] = JunctionVolts(state, peakAmps, j) - state[j];
-            row[total + 1] = peakAmps * _junctionDrive[j];
+            byLogAmps[j] = -peakAmps * _junctionDrive[j];
             if (GivenCurrent)
             {
                 row[total - 1] = -1;
             }
 
-            worst = Math.Max(worst, Math.Abs(row[total]));
-            if (!_reverse)
-            {
-                continue;
-            }
-
-            Span<double> second = matrix.Slice((_points + j) * stride, total + 2);
-            FillRow(second, j, _internalForward, _internalReverse);
-            second[_points + j] += 1;
-            second[total] = InternalVolts(peakAmps, j) - state[_points + j];
-            second[total + 1] = peakAmps * _internalDrive[j];
-            if (GivenCurrent)
-            {
-                second[total - 1] = 0;
-            }
-
-            worst = Math.Max(worst, Math.Abs(second[total]));
-        }
-
-        if (!GivenCurrent)
-        {
-            return worst / _bias.ThermalVolts;
-        }
-
-        Span<double> held = matrix.Slice((total - 1) * stride, total + 2);
-        FillHeldCurrent(held);
-        return Math.Max(worst / _bias.ThermalVolts, Math.Abs(held[total]));
-    }
-
-    /// <inheritdoc/>
-    protected override double ResidualSize(ReadOnlySpan<double> state, double peakAmps)
-    {
-        ComputeCurrents(state);
-        double worst = 0;
-        for (int j = 0; j < _points; j++)
-        {
-            worst = Math.Max(worst, Math.Abs(JunctionVolts(state, peakAmps, j) - state[j]));
             if (_reverse)
             {
-                worst = Math.Max(worst, Math.Abs(InternalVolts(peakAmps, j) - state[_points + j]));
+                Span<double> second = matrix.Slice((_points + j) * stride, total);
+                FillRow(second, j, _internalForward, _internalReverse);
+                second[_points + j] += 1;
+                byLogAmps[_points + j] = -peakAmps * _internalDrive[j];
+                if (GivenCurrent)
+                {
+                    second[total - 1] = 0;
+                }
             }
         }
 
-        return Math.Max(worst / _bias.ThermalVolts, GivenCurrent ? Math.Abs(HeldMismatch()) : 0);
+        if (GivenCurrent)
+        {
+            FillHeldCurrent(matrix.Slice((total - 1) * stride, total));
+        }
     }
 
     /// <inheritdoc/>
@@ -357,7 +359,6 @@ internal sealed class FollowerBalance : AmplitudeBalance
             }
         }
 
-        row[^2] = HeldMismatch();
     }
 
     private double HeldMismatch()

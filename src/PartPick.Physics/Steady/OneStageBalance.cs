@@ -59,6 +59,10 @@ internal sealed class OneStageBalance : AmplitudeBalance
     }
 
     /// <inheritdoc/>
+    public override RunningState Keep() =>
+        new(typeof(OneStageBalance), Count, false, false, Radians, PeakAmps, [.. State]);
+
+    /// <inheritdoc/>
     public override void StartLinear(double peakAmps)
     {
         PeakAmps = peakAmps;
@@ -105,43 +109,34 @@ internal sealed class OneStageBalance : AmplitudeBalance
     }
 
     /// <inheritdoc/>
-    protected override double Linearise(ReadOnlySpan<double> state, double peakAmps, Span<double> matrix, int stride)
+    protected override double Residual(ReadOnlySpan<double> state, double peakAmps, Span<double> residual)
     {
-        int n = state.Length;
         ComputeVoltages(state, peakAmps);
         double worst = 0;
-        double largest = 0;
-        for (int j = 0; j < n; j++)
+        double largest = 1e-300;
+        for (int j = 0; j < state.Length; j++)
         {
-            double current = _law.Current(_input[j], _output[j], out double byInput, out double byOutput);
-            Span<double> row = matrix.Slice(j * stride, n + 2);
-            ReadOnlySpan<double> inputs = _inputKernel.AsSpan(n - 1 - j, n);
-            ReadOnlySpan<double> outputs = _outputKernel.AsSpan(n - 1 - j, n);
-            Rows.Combine(row[..n], inputs, -byInput, outputs, -byOutput);
-            row[j] += 1;
-            row[n] = current - state[j];
-            row[n + 1] = peakAmps * (byInput * _inputDrive[j] + byOutput * _outputDrive[j]);
-            worst = Math.Max(worst, Math.Abs(row[n]));
+            residual[j] = state[j] - _law.Current(_input[j], _output[j], out _, out _);
+            worst = Math.Max(worst, Math.Abs(residual[j]));
             largest = Math.Max(largest, Math.Abs(state[j]));
         }
 
-        return worst / Math.Max(largest, 1e-300);
+        return worst / largest;
     }
 
     /// <inheritdoc/>
-    protected override double ResidualSize(ReadOnlySpan<double> state, double peakAmps)
+    protected override void Linearise(ReadOnlySpan<double> state, double peakAmps, Span<double> matrix, int stride, Span<double> byLogAmps)
     {
+        int n = state.Length;
         ComputeVoltages(state, peakAmps);
-        double worst = 0;
-        double largest = 0;
-        for (int j = 0; j < state.Length; j++)
+        for (int j = 0; j < n; j++)
         {
-            double current = _law.Current(_input[j], _output[j], out _, out _);
-            worst = Math.Max(worst, Math.Abs(current - state[j]));
-            largest = Math.Max(largest, Math.Abs(state[j]));
+            _law.Current(_input[j], _output[j], out double byInput, out double byOutput);
+            Span<double> row = matrix.Slice(j * stride, n);
+            Rows.Combine(row, _inputKernel.AsSpan(n - 1 - j, n), -byInput, _outputKernel.AsSpan(n - 1 - j, n), -byOutput);
+            row[j] += 1;
+            byLogAmps[j] = -peakAmps * (byInput * _inputDrive[j] + byOutput * _outputDrive[j]);
         }
-
-        return worst / Math.Max(largest, 1e-300);
     }
 
     /// <inheritdoc/>

@@ -6,16 +6,11 @@ internal abstract class Refinement
     /// <summary>The balance with the fewest harmonics, for the search over amplitude.</summary>
     public abstract AmplitudeBalance Coarse();
 
-    /// <summary>An independent balance of the same fineness in the same state.</summary>
-    public AmplitudeBalance Copy(AmplitudeBalance balance)
-    {
-        AmplitudeBalance copy = Coarse();
-        copy.TakeState(balance);
-        return copy;
-    }
-
     /// <summary>The same state with twice the harmonics; null at the finest.</summary>
     public abstract AmplitudeBalance? Finer(AmplitudeBalance balance);
+
+    /// <summary>A balance of the fineness of a kept state, in that state; null where the state is of another kind of circuit.</summary>
+    public abstract AmplitudeBalance? From(RunningState state);
 
     /// <summary>Whether the last solution shows a current that the balance leaves out.</summary>
     public virtual bool IsIncomplete(AmplitudeBalance balance) => false;

@@ -9,7 +9,8 @@ namespace PartPick.Physics.Steady;
 internal sealed class SaturatedSine
 {
     private const double Reach = 18;
-    private const int UniformPoints = 128;
+    private const int FewestUniform = 64;
+    private const int MostUniform = 512;
     private static readonly double[] Panels = [0, 2, 5, 10, Reach];
     private static readonly (double Node, double Weight)[] Gauss = GaussNodes();
     private readonly double _steepness;
@@ -28,10 +29,9 @@ internal sealed class SaturatedSine
     {
         _steepness = steepness;
         Input = new Complex[harmonics];
-        int most = Math.Max(UniformPoints, 2 * (Panels.Length - 1) * Gauss.Length);
-        _angles = new double[most];
-        _values = new double[most];
-        _slopes = new double[most];
+        _angles = new double[MostUniform];
+        _values = new double[MostUniform];
+        _slopes = new double[MostUniform];
         _moments = new Complex[2 * harmonics + 1];
     }
 
@@ -45,7 +45,9 @@ internal sealed class SaturatedSine
         double crossing = ZeroCrossing(input);
         Evaluate(input, crossing, out double slope);
         double width = 1 / (_steepness * Math.Abs(slope));
-        if (width * Reach < Math.PI / 2)
+        // The tanh's nearest pole is (π/2)·width off the real axis: 8/width equal steps in half a period leave an error of 1e-11.
+        double wanted = Math.Max(8 / width, Math.Max(FewestUniform, 4 * input.Length));
+        if (wanted > MostUniform)
         {
             PlaceRound(crossing, width);
             _flatFrom = crossing + Reach * width;
@@ -54,11 +56,12 @@ internal sealed class SaturatedSine
         }
         else
         {
-            _count = UniformPoints;
-            for (int j = 0; j < UniformPoints; j++)
+            // In steps of 64, so that a small change of the input does not change the rule.
+            _count = (int)Math.Ceiling(wanted / FewestUniform) * FewestUniform;
+            for (int j = 0; j < _count; j++)
             {
-                _angles[j] = Math.PI * j / UniformPoints;
-                _slopes[j] = Math.PI / UniformPoints;
+                _angles[j] = Math.PI * j / _count;
+                _slopes[j] = Math.PI / _count;
             }
 
             _flatFrom = _flatTo = _flatValue = 0;

@@ -11,6 +11,7 @@ internal static class SteadySolver
 {
     private const double FrequencyAgreement = 3e-8;
     private const double CurrentAgreement = 1e-3;
+    private const int FollowedLevel = 1;
 
     /// <summary>Scans the amplitude and refines the running state.</summary>
     /// <param name="crystal">The crystal.</param>
@@ -18,41 +19,95 @@ internal static class SteadySolver
     /// <param name="siemens">Transconductance at the bias point.</param>
     /// <param name="refinement">The balances of the circuit.</param>
     /// <param name="largestNegativeOhms">Largest −Re Zc(I) over the amplitude, in ohms.</param>
+    /// <param name="state">The state, as a starting point for circuits like this one.</param>
     /// <returns>The steady state, or null where there is none.</returns>
     public static SteadyState? Solve<TNetwork>(
-        Crystal crystal, in TNetwork network, double siemens, Refinement refinement, out double largestNegativeOhms)
+        Crystal crystal, in TNetwork network, double siemens, Refinement refinement, out double largestNegativeOhms, out RunningState? state)
         where TNetwork : struct, ILinearNetwork
     {
         var branch = new CrystalBranch(crystal);
-        GrowthWindow window = GrowthWindow.Find(branch, network);
-        double guess = window.CriticalSiemens is { } critical && critical < siemens ? critical : siemens;
-        double radians = branch.SeriesRadians;
-        for (int step = 0; step < 3; step++)
-        {
-            double reactance = network.At(new System.Numerics.Complex(0, radians)).Impedance(guess).Imaginary;
-            radians = branch.SeriesRadians * (1 + branch.OffsetForReactance(reactance));
-        }
-
-        var scan = new AmplitudeScan(refinement, radians, crystal.ResistanceOhms);
+        var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms);
         largestNegativeOhms = scan.LargestNegativeOhms;
-        return scan.Running is { } running ? Refine(crystal, branch, refinement, running) : null;
+        state = null;
+        return scan.Running is { } running ? Refine(crystal, branch, refinement, running, out state) : null;
     }
 
-    private static SteadyState? Refine(Crystal crystal, in CrystalBranch branch, Refinement refinement, AmplitudeBalance balance)
+    /// <summary>
+    /// The steady state near one of a circuit like this one; null where it is not found from there. At the same fineness, or
+    /// refined like a state sought from nothing.
+    /// </summary>
+    public static SteadyState? Follow(Crystal crystal, Refinement refinement, RunningState near, bool refine, out RunningState? state)
     {
+        state = null;
+        var branch = new CrystalBranch(crystal);
+        if (refinement.From(near) is not { } balance || !Settle(branch, balance) || refinement.IsIncomplete(balance))
+        {
+            return null;
+        }
+
+        if (!refine)
+        {
+            state = balance.Keep();
+            return Describe(crystal, balance);
+        }
+
+        SteadyState? steady = Refine(crystal, branch, refinement, balance, out _);
+        state = near;
+        return steady;
+    }
+
+    /// <summary>
+    /// A quick estimate with the fewest harmonics, from the state of a circuit like this one or from nothing. Its frequency is
+    /// off by about a hundredth of the pull from series resonance: good to leave out what is far off, never shown.
+    /// </summary>
+    public static SteadyEstimate? Estimate<TNetwork>(
+        Crystal crystal, in TNetwork network, double siemens, Refinement refinement, RunningState? near, out RunningState? state)
+        where TNetwork : struct, ILinearNetwork
+    {
+        state = null;
+        var branch = new CrystalBranch(crystal);
+        AmplitudeBalance? balance = near is null ? null : refinement.From(near);
+        if (balance is null || !balance.SolveRunning(crystal.ResistanceOhms) || refinement.IsIncomplete(balance))
+        {
+            var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms);
+            balance = scan.Running;
+        }
+
+        if (balance is null)
+        {
+            return null;
+        }
+
+        double radians = branch.SeriesRadians * (1 + branch.OffsetForReactance(balance.Impedance.Imaginary));
+        double rms = balance.PeakAmps / Math.Sqrt(2);
+        state = balance.Keep();
+        return new SteadyEstimate(radians / (2 * Math.PI), crystal.ResistanceOhms * rms * rms);
+    }
+
+    private static SteadyState? Refine(
+        Crystal crystal, in CrystalBranch branch, Refinement refinement, AmplitudeBalance balance, out RunningState? state)
+    {
+        state = null;
         double frequency = double.NaN;
         double current = double.NaN;
-        while (true)
+        AmplitudeBalance? coarser = null;
+        for (int level = 0; ; level++)
         {
             if (!Settle(branch, balance))
             {
-                return null;
+                return coarser is null ? null : Describe(crystal, coarser);
             }
 
             if (refinement.IsIncomplete(balance))
             {
                 balance = refinement.Complete(balance);
+                level--;
                 continue;
+            }
+
+            if (state is null || (level == FollowedLevel && !state.Reverse))
+            {
+                state = balance.Keep();
             }
 
             bool agrees = Math.Abs(balance.Radians - frequency) < FrequencyAgreement * frequency
@@ -64,8 +119,25 @@ internal static class SteadySolver
                 return Describe(crystal, balance);
             }
 
+            coarser = balance;
             balance = finer;
         }
+    }
+
+    // ω at the critical transconductance, to which the device's effective one falls.
+    private static double FirstGuess<TNetwork>(in CrystalBranch branch, in TNetwork network, double siemens)
+        where TNetwork : struct, ILinearNetwork
+    {
+        GrowthWindow window = GrowthWindow.Find(branch, network);
+        double guess = window.CriticalSiemens is { } critical && critical < siemens ? critical : siemens;
+        double radians = branch.SeriesRadians;
+        for (int step = 0; step < 3; step++)
+        {
+            double reactance = network.At(new System.Numerics.Complex(0, radians)).Impedance(guess).Imaginary;
+            radians = branch.SeriesRadians * (1 + branch.OffsetForReactance(reactance));
+        }
+
+        return radians;
     }
 
     /// <summary>Repeats the running state at the frequency it gives until the frequency stands.</summary>

@@ -1,0 +1,6 @@
+namespace PartPick.Physics;
+
+/// <summary>A quick estimate of a steady state, for leaving out what is far from wanted; never a figure to show.</summary>
+/// <param name="FrequencyHz">Frequency at the crystal in hertz.</param>
+/// <param name="DriveWatts">Drive level in watts.</param>
+public readonly record struct SteadyEstimate(double FrequencyHz, double DriveWatts);

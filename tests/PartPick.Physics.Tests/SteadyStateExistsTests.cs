@@ -1,0 +1,78 @@
+using System.Text;
+using PartPick.Physics.Circuits;
+using PartPick.Physics.Tests.Independent;
+
+namespace PartPick.Physics.Tests;
+
+/// <summary>
+/// Negative resistance above Rm at one amplitude and none at a very large one leave a steady state between them
+/// (intermediate values; arithmetic, no publication). Buffered gates are left out of the random draw: with little or no
+/// damping resistor a delayed chain of large gain can oscillate through the capacitance across the crystal alone, and then the
+/// argument does not hold.
+/// </summary>
+public sealed class SteadyStateExistsTests
+{
+    private const double Pico = 1e-12;
+
+    private static Crystal Crystal => new()
+    {
+        NominalHz = 4e6, LoadFarads = 20 * Pico, ShuntFarads = 4 * Pico, MotionalFarads = 12e-15, ResistanceOhms = 30,
+    };
+
+    [Theory]
+    [InlineData("one stage")]
+    [InlineData("clock")]
+    [InlineData("follower")]
+    public void A_circuit_that_builds_up_or_has_a_running_margin_has_a_steady_state(string kind)
+    {
+        var random = new Random(77);
+        var failures = new StringBuilder();
+        int failed = 0, tried = 0;
+        for (int k = 0; k < 40; k++)
+        {
+            OscillatorCircuit circuit = RandomCircuits.Next(random, kind);
+            OscillatorResult found = OscillatorAnalysis.Analyse(circuit);
+            if (found.StartUp.GrowthRatePerSecond > 0 || found.RunningMargin > 1.05)
+            {
+                tried++;
+                if (found.Steady is null || found.Start == StartKind.None)
+                {
+                    failed++;
+                    failures.Append(FormattableString.Invariant($"margin {found.StartUp.Margin:F3}, running {found.RunningMargin:F3}: "))
+                        .Append(circuit).AppendLine();
+                }
+            }
+        }
+
+        Assert.True(failed == 0, $"{failed} of {tried}:\n{failures}");
+    }
+
+    // With 0.3 pF of motional capacitance and 1 kΩ the integration in time settles at 13.0 mA peak, vBC reaching 0.67 V.
+    [Theory]
+    [InlineData(1e3)]
+    [InlineData(2.2e3)]
+    public void A_follower_of_much_reserve_limited_by_its_supply_has_a_steady_state(double emitter)
+    {
+        FollowerCircuit follower = Samples.FullFollower(220 * Pico) with
+        {
+            Crystal = Crystal with { ResistanceOhms = 20 },
+            Strays = new Strays(0, 2 * Pico, 1 * Pico),
+            EmitterCurrentAmps = null,
+            EmitterOhms = emitter,
+        };
+
+        Assert.NotNull(OscillatorAnalysis.FindSteadyState(follower));
+    }
+
+    [Fact]
+    public void A_buffered_gate_that_runs_in_time_has_a_steady_state_and_needs_a_disturbance()
+    {
+        GateCircuit gate = Samples.BufferedGate(300, 100, 470, 0) with { Crystal = Samples.LowQuality with { ResistanceOhms = 30 } };
+        OscillatorResult found = OscillatorAnalysis.Analyse(gate);
+
+        Assert.NotNull(TimeDomain.Settle(gate));
+        Assert.True(found.RunningMargin > 1, $"{found}");
+        Assert.NotNull(found.Steady);
+        Assert.Equal(StartKind.NeedsDisturbance, found.Start);
+    }
+}
