@@ -21,8 +21,8 @@ public sealed record Glyphs
     {
         IsAscii = false,
         Horizontal = '─', Vertical = '│', DownRight = '┌', DownLeft = '┐', UpRight = '└', UpLeft = '┘',
-        TeeRight = '├', TeeLeft = '┤', TeeDown = '┬', TeeUp = '┴', Ground = "═╧═", Full = '■', Free = '·',
-        Pointer = "►", Up = "↑", Down = "↓", Left = "←", Right = "→",
+        TeeRight = '├', TeeLeft = '┤', TeeDown = '┬', TeeUp = '┴', Cross = '┼', Ground = "═╧═", Full = '■', Free = '·',
+        Chosen = "►", Up = "↑", Down = "↓", Left = "←", Right = "→",
     };
 
     /// <summary>ASCII alone.</summary>
@@ -30,8 +30,8 @@ public sealed record Glyphs
     {
         IsAscii = true,
         Horizontal = '-', Vertical = '|', DownRight = '+', DownLeft = '+', UpRight = '+', UpLeft = '+',
-        TeeRight = '+', TeeLeft = '+', TeeDown = '+', TeeUp = '+', Ground = "===", Full = '#', Free = '.',
-        Pointer = ">", Up = "Up", Down = "Down", Left = "Left", Right = "Right",
+        TeeRight = '+', TeeLeft = '+', TeeDown = '+', TeeUp = '+', Cross = '+', Ground = "===", Full = '#', Free = '.',
+        Chosen = ">", Up = "Up", Down = "Down", Left = "Left", Right = "Right",
     };
 
     /// <summary>Whether every sign has to be ASCII.</summary>
@@ -67,6 +67,9 @@ public sealed record Glyphs
     /// <summary>Horizontal line with a branch up.</summary>
     public required char TeeUp { get; init; }
 
+    /// <summary>Crossing of two lines that are joined.</summary>
+    public required char Cross { get; init; }
+
     /// <summary>Ground, three cells.</summary>
     public required string Ground { get; init; }
 
@@ -77,7 +80,7 @@ public sealed record Glyphs
     public required char Free { get; init; }
 
     /// <summary>Mark of the chosen row.</summary>
-    public required string Pointer { get; init; }
+    public required string Chosen { get; init; }
 
     /// <summary>Name of the key Up.</summary>
     public required string Up { get; init; }

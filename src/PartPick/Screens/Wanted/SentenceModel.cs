@@ -161,9 +161,9 @@ public sealed class SentenceModel
             return SentenceAnswer.NotMine;
         }
 
-        if (requirement == Accepted)
+        if (Field is CircuitsField && requirement == Accepted)
         {
-            Problem = new Problem(Field.Name, "nothing would be left", "at least one");
+            Problem = new Problem(Field.Name, "none would be left", "at least one of them");
         }
 
         Accepted = requirement;

@@ -1,0 +1,83 @@
+using PartPick.Catalog;
+using PartPick.Selection;
+using PartPick.Values;
+
+namespace PartPick.Screens;
+
+/// <summary>Opens the terminal interface.</summary>
+public static class ScreenHost
+{
+    private const int Done = 0;
+    private const int WrongInput = 2;
+    private const int NoCatalogue = 3;
+    private const int InternalError = 70;
+
+    /// <summary>Runs the terminal interface until it is left.</summary>
+    /// <param name="catalogPath">Path of the catalogue's file.</param>
+    /// <param name="requirementPath">A requirement file to begin with; null to go on with the one that was kept.</param>
+    /// <param name="text">Reads and writes requirements.</param>
+    /// <returns>0; 2 where there is no terminal or the file is wrong; 3 where the catalogue cannot be used.</returns>
+    internal static int Run(string catalogPath, string? requirementPath, IRequirementText text)
+    {
+        if (Console.IsInputRedirected || Console.IsOutputRedirected)
+        {
+            return Fail(WrongInput, "the screens need a terminal; the commands work without one (partpick --help)");
+        }
+
+        try
+        {
+            return Open(catalogPath, requirementPath, text);
+        }
+        catch (Exception error)
+        {
+            // The terminal is back as it was: what went wrong is one line below the prompt.
+            return Fail(InternalError, $"a fault of the program: {error.GetType().Name}: {error.Message}");
+        }
+    }
+
+    private static int Open(string catalogPath, string? requirementPath, IRequirementText text)
+    {
+        Result<PartsCatalog> catalog = CatalogStore.Load(catalogPath);
+        if (!catalog.IsOk)
+        {
+            return Fail(NoCatalogue, catalog.Problem.ToString());
+        }
+
+        var keeper = new RequirementKeeper(catalogPath, text);
+        Result<Requirement?> start = requirementPath is null ? keeper.Recall() : ReadFile(requirementPath, text);
+        if (!start.IsOk && requirementPath is not null)
+        {
+            return Fail(WrongInput, start.Problem.ToString());
+        }
+
+        string? notice = !start.IsOk ? "! " + start.Problem
+            : start.Value is null ? "Press e and say what is wanted; ? shows all keys."
+            : null;
+        var run = new TerminalRun(
+            new CatalogRanking(catalog.Value), TerminalTraits.Of(Environment.GetEnvironmentVariable),
+            requirement => keeper.Keep(requirement));
+        Requirement end = run.Show(start.ValueOr(null) ?? First, notice);
+        return keeper.Keep(end) is { } problem ? Fail(NoCatalogue, problem.ToString()) : Done;
+    }
+
+    /// <summary>The sentence of the very first time.</summary>
+    private static Requirement First => new() { OutputHz = 1000, Waveform = Waveform.Square };
+
+    private static Result<Requirement?> ReadFile(string path, IRequirementText text)
+    {
+        try
+        {
+            return text.Read(File.ReadAllText(path), path).Map<Requirement?>(requirement => requirement);
+        }
+        catch (Exception error) when (error is IOException or UnauthorizedAccessException or ArgumentException or NotSupportedException)
+        {
+            return Result.Fail<Requirement?>(path, "cannot be read: " + error.Message, "a requirement file");
+        }
+    }
+
+    private static int Fail(int status, string line)
+    {
+        Console.Error.WriteLine("partpick: " + line.ReplaceLineEndings(" "));
+        return status;
+    }
+}
