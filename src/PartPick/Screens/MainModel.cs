@@ -244,11 +244,11 @@ public sealed class MainModel
 
     private ImmutableArray<Line> WideBody(int width, int room)
     {
-        const int left = 81;
+        const int left = 79;
         int right = width - left - 1;
         ImmutableArray<Line> list = [AnswerRule(left), List.Heading(_glyphs), .. Rows(room - 2)];
         ImmutableArray<Line> pane = List.Chosen is { } candidate
-            ? [Rule(CircuitPane.Title(candidate), "", right), .. CircuitPane.Beside(candidate, List.Result!.Requirement, right, _glyphs)]
+            ? [Rule(CircuitPane.ShortTitle(candidate), "", right), .. CircuitPane.Beside(candidate, List.Result!.Requirement, right, _glyphs)]
             : [Rule("", "", right)];
         var bar = new Line([new Span(_glyphs.Vertical.ToString(), Tone.Quiet)]);
         var lines = ImmutableArray.CreateBuilder<Line>();
@@ -286,6 +286,11 @@ public sealed class MainModel
 
     private Line Rule(string left, string right, int width, Tone tone = Tone.Strong)
     {
+        if (_glyphs.Show(left).Length + _glyphs.Show(right).Length + 8 > width)
+        {
+            right = "";
+        }
+
         int end = width - (right.Length == 0 ? 1 : _glyphs.Show(right).Length + 4);
         LineBuilder line = new LineBuilder(_glyphs).RuleTo(1);
         if (left.Length > 0)
@@ -322,7 +327,7 @@ public sealed class MainModel
             Place.Sentence => Typing(line, "Tab", "next", "Esc", "list", width),
             Place.Circuit => Keys(
                 line, (_glyphs.Up + " " + _glyphs.Down, "scroll"), (_glyphs.Left + " " + _glyphs.Right, "other circuits"),
-                ("Esc", "list"), ("e", "edit the wanted"), ("?", "keys")),
+                ("Esc", "list"), ("e", "edit"), ("?", "keys")),
             _ => Keys(line, (_glyphs.Up + " " + _glyphs.Down, "choose"), ("Enter", "open"), ("e", "edit the wanted"), ("?", "keys"), ("q", "quit")),
         };
     }

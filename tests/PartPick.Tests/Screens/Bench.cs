@@ -33,7 +33,7 @@ internal sealed class Bench : IDisposable
 
     public string Text => _app.ToString()!;
 
-    public string[] Rows => [.. Text.Split('\n').Select(row => row.TrimEnd())];
+    public string[] Rows => [.. Text.TrimEnd('\r', '\n').Split('\n').Select(row => row.TrimEnd())];
 
     public void Press(params Key[] keys)
     {

@@ -5,6 +5,8 @@ namespace PartPick.Screens;
 /// <summary>Draws limits as quiet bars.</summary>
 public static class Bars
 {
+    private const int WideCells = 16;
+
     /// <summary>A bar: used cells, free cells, and an exclamation mark in the last cell where the limit is broken.</summary>
     /// <param name="used">The used part; null draws an empty stretch.</param>
     /// <param name="cells">Width in cells.</param>
@@ -39,7 +41,7 @@ public static class Bars
         string[] figures = Figures.LineUp([.. uses.Select(use => Number(use.Figure))]);
         int figureWidth = uses.Select((use, i) => figures[i].Length + Unit(use.Figure).Length).Max();
         int againstWidth = uses.Max(use => glyphs.Show(use.Against).Length);
-        int cells = narrow ? Math.Clamp(width - 15 - figureWidth - againstWidth, 4, 20) : 20;
+        int cells = narrow ? Math.Clamp(width - 15 - figureWidth - againstWidth, 4, WideCells) : WideCells;
         var lines = ImmutableArray.CreateBuilder<Line>();
         for (int i = 0; i < uses.Length; i++)
         {
@@ -52,12 +54,12 @@ public static class Bars
             if (narrow)
             {
                 lines.Add(line.Build());
-                lines.Add(new LineBuilder(glyphs).To(10).Column(use.Because, Math.Max(1, width - 11), Tone.Quiet).Build());
+                lines.Add(new LineBuilder(glyphs).To(10).Words(use.Because, width - 11, Tone.Quiet).Build());
                 continue;
             }
 
             line.Add("  ");
-            lines.Add(line.Column(use.Because, Math.Max(1, width - line.Width), Tone.Quiet).Build());
+            lines.Add(line.Words(use.Because, width - line.Width, Tone.Quiet).Build());
         }
 
         return lines.ToImmutable();

@@ -108,14 +108,14 @@ public static class CircuitPage
             yield return Row(texts[i + 1], terms[i].Ratio, terms[i].Term + (terms[i].RestsOn is { } rest ? $" ({rest})" : ""));
         }
 
-        yield return Row(texts[^2], budget.WorstRatio, "worst case: all of them together, the ranked figure");
-        yield return Row(texts[^1], budget.RssRatio, "as independent spreads: root of the sum of squares");
+        yield return Row(texts[^2], budget.WorstRatio, "worst case, all together: the ranked figure");
+        yield return Row(texts[^1], budget.RssRatio, "root of the sum of squares");
 
         Line Row(string figure, double ratio, string words)
         {
             LineBuilder line = new LineBuilder(glyphs).Add(" ").Add(figure).Add(" [", Tone.Quiet)
                 .Add(Bars.Bar(ratio / requirement.BudgetRatio, Share, glyphs)).Add("] ", Tone.Quiet);
-            return line.Column(words, Math.Max(1, width - line.Width)).Build();
+            return line.Words(words, width - line.Width).Build();
         }
     }
 
@@ -141,7 +141,7 @@ public static class CircuitPage
         Line Row(string what, string figure, string corner)
         {
             LineBuilder line = new LineBuilder(glyphs).Add(" ").Column(what, 23).Column(figure, 10).Add("  ");
-            return line.Column("at " + corner, Math.Max(1, width - line.Width), Tone.Quiet).Build();
+            return line.Words("at " + corner, width - line.Width, Tone.Quiet).Build();
         }
     }
 }

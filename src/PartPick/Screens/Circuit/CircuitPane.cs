@@ -16,6 +16,15 @@ public static class CircuitPane
             + (stage.Length == 0 ? "" : ", " + stage);
     }
 
+    /// <summary>The title in short: circuit, amplifier and divider.</summary>
+    /// <param name="candidate">The candidate.</param>
+    public static string ShortTitle(Candidate candidate)
+    {
+        ArgumentNullException.ThrowIfNull(candidate);
+        string stage = Trade.Stage(candidate.Choice.Tap);
+        return $"{Trade.Word(candidate.Choice.Circuit)} {candidate.Choice.Amplifier.Id}" + (stage.Length == 0 ? "" : ", " + stage);
+    }
+
     /// <summary>The pane below the list.</summary>
     /// <param name="candidate">The candidate.</param>
     /// <param name="requirement">The requirement that it was ranked for.</param>
@@ -26,7 +35,7 @@ public static class CircuitPane
         Passives(candidate, width, glyphs)[0],
         .. Bars.Draw(LimitUses.Of(candidate, requirement), width, glyphs),
         .. Watched(candidate, glyphs).Take(1).Select(text =>
-            new LineBuilder(glyphs).Add(" ! ", Tone.Warning).Column(text, width - 3, Tone.Warning).Build()),
+            new LineBuilder(glyphs).Add(" ! ", Tone.Warning).Words(text, width - 3, Tone.Warning).Build()),
     ];
 
     /// <summary>The pane beside the list, with the drawing.</summary>
@@ -37,7 +46,7 @@ public static class CircuitPane
     public static ImmutableArray<Line> Beside(Candidate candidate, Requirement requirement, int width, Glyphs glyphs) =>
     [
         .. Schematic.Draw(candidate, glyphs),
-        Line.Empty,
+        new LineBuilder(glyphs).Add(" Y1 is ", Tone.Quiet).Column(candidate.Choice.Crystal.Id, width - 7, Tone.Quiet).Build(),
         .. Bars.Draw(LimitUses.Of(candidate, requirement), width, glyphs),
         .. Watched(candidate, glyphs).SelectMany(text => Paragraph.Of(text, width, glyphs, " ! ", 3, Tone.Warning)),
     ];

@@ -7,10 +7,10 @@ namespace PartPick.Screens;
 /// <summary>The circuit round an emitter follower.</summary>
 internal static class FollowerDrawing
 {
-    private const int CrystalColumn = 2;
-    private const int BiasColumn = 14;
-    private const int CapacitorColumn = 21;
-    private const int EmitterColumn = 30;
+    private const int CrystalColumn = 1;
+    private const int BiasColumn = 13;
+    private const int CapacitorColumn = 20;
+    private const int EmitterColumn = 31;
     private const int BaseRow = 5;
     private const int EmitterRow = 10;
     private const int GroundRow = 15;
@@ -29,8 +29,8 @@ internal static class FollowerDrawing
     private static void Supply(Candidate candidate, CircuitParts parts, TextCanvas canvas, Symbols symbols, Glyphs glyphs)
     {
         string supply = "+" + ValueText.Format(candidate.Nominal.SupplyVolts, Dimension.Voltage);
-        canvas.PutBefore(BiasColumn - 3, 0, supply);
-        canvas.Across(BiasColumn - 2, EmitterColumn, 0);
+        canvas.PutBefore(BiasColumn - 2, 0, supply);
+        canvas.Across(BiasColumn - 1, EmitterColumn, 0);
         canvas.Put(EmitterColumn, 0, glyphs.DownLeft);
         canvas.DownFrom(EmitterColumn, 1, 3);
         if (parts.BaseTop is { } top)
@@ -55,7 +55,13 @@ internal static class FollowerDrawing
         canvas.Put(CapacitorColumn, BaseRow, glyphs.TeeDown);
         canvas.DownFrom(CrystalColumn, BaseRow + 1, GroundRow - 1);
         symbols.Crystal(CrystalColumn, BaseRow + 2);
-        symbols.Label(CrystalColumn + 2, BaseRow + 6, parts.Crystal);
+        canvas.Put(CrystalColumn + 2, BaseRow + 6, parts.Crystal.Designator);
+        string[] frequency = parts.Crystal.Value.Split(' ');
+        for (int i = 0; i < frequency.Length; i++)
+        {
+            canvas.Put(CrystalColumn + 2, BaseRow + 7 + i, frequency[i]);
+        }
+
         symbols.Ground(CrystalColumn, GroundRow);
 
         if (parts.BaseBottom is not { } bottom)
@@ -75,9 +81,9 @@ internal static class FollowerDrawing
     {
         canvas.DownFrom(CapacitorColumn, BaseRow + 1, GroundRow - 1);
         symbols.Capacitor(CapacitorColumn, BaseRow + 2);
-        symbols.Label(CapacitorColumn + 2, BaseRow + 2, parts.C1);
+        symbols.Label(CapacitorColumn + 3, BaseRow + 2, parts.C1);
         symbols.Capacitor(CapacitorColumn, EmitterRow + 2);
-        symbols.Label(CapacitorColumn + 2, EmitterRow + 2, parts.C2);
+        symbols.Label(CapacitorColumn + 3, EmitterRow + 2, parts.C2);
         symbols.Ground(CapacitorColumn, GroundRow);
 
         canvas.DownFrom(EmitterColumn, BaseRow + 2, GroundRow - 1);

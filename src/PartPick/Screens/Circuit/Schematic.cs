@@ -7,7 +7,7 @@ namespace PartPick.Screens;
 public static class Schematic
 {
     /// <summary>Width of every drawing in cells.</summary>
-    public const int Width = 39;
+    public const int Width = 40;
 
     /// <summary>The drawing.</summary>
     /// <param name="candidate">The candidate.</param>

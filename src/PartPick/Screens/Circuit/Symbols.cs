@@ -18,8 +18,7 @@ internal sealed class Symbols(TextCanvas canvas, Glyphs glyphs)
     public void Crystal(int x, int y)
     {
         Plate(x, y, glyphs.TeeUp);
-        canvas.Put(x - 1, y + 1, "[");
-        canvas.Put(x + 1, y + 1, "]");
+        canvas.Put(x - 1, y + 1, "[ ]");
         Plate(x, y + 2, glyphs.TeeDown);
     }
 
@@ -27,6 +26,7 @@ internal sealed class Symbols(TextCanvas canvas, Glyphs glyphs)
     public void Resistor(int x, int y)
     {
         Box(x - 1, y, x + 1, y + 2);
+        canvas.Put(x, y + 1, " ");
         canvas.Put(x, y, glyphs.TeeUp);
         canvas.Put(x, y + 2, glyphs.TeeDown);
     }

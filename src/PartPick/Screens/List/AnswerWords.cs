@@ -33,17 +33,17 @@ public static class AnswerWords
             return circuits + of;
         }
 
-        return "nothing fits" + of + MostRemoved(result);
+        return MostRemoved(result);
     }
 
     private static string MostRemoved(RankingResult result)
     {
         if (result.Rejections.IsEmpty)
         {
-            return "";
+            return $"nothing fits, of {Figures.Count(result.Combinations)} combinations";
         }
 
         (Limit limit, double count) = result.Rejections.OrderByDescending(pair => pair.Value).ThenBy(pair => pair.Key).First();
-        return $"; {Trade.Words(limit)} removed {Figures.Count(count)}";
+        return $"nothing fits; {Trade.Words(limit)} removed {Figures.Count(count)} of {Figures.Count(result.Combinations)}";
     }
 }

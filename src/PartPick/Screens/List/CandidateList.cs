@@ -8,7 +8,7 @@ public sealed class CandidateList
 {
     private const int BarCells = 4;
 
-    private bool _moved;
+    private Candidate? _picked;
     private int _top;
 
     /// <summary>The answer that is shown; null before the first one.</summary>
@@ -34,17 +34,10 @@ public sealed class CandidateList
     public void Show(RankingResult result)
     {
         ArgumentNullException.ThrowIfNull(result);
-        Candidate? before = Chosen;
         Result = result;
         Candidates = result.Candidates.IsEmpty ? result.NearestMisses : result.Candidates;
-        int at = before is null || !_moved ? 0 : IndexOf(candidate => candidate.Id == before.Id);
-        if (at < 0)
-        {
-            at = IndexOf(candidate => SameGroup(candidate, before!));
-        }
-
-        At = Math.Max(0, at);
-        _moved &= at >= 0;
+        int at = _picked is null ? 0 : IndexOf(candidate => candidate.Id == _picked.Id);
+        At = Math.Max(0, at >= 0 ? at : IndexOf(candidate => SameGroup(candidate, _picked!)));
     }
 
     /// <summary>Moves the choice.</summary>
@@ -52,7 +45,7 @@ public sealed class CandidateList
     public void Move(int step)
     {
         At = Candidates.IsEmpty ? 0 : Math.Clamp(At + step, 0, Candidates.Length - 1);
-        _moved = At > 0;
+        _picked = At > 0 ? Chosen : null;
     }
 
     /// <summary>The heading.</summary>
@@ -60,9 +53,9 @@ public sealed class CandidateList
     public Line Heading(Glyphs glyphs)
     {
         string currency = Chosen?.Currency ?? "";
-        return new LineBuilder(glyphs).Add("  circuit  crystal MHz  CL pF amplifier     ", Tone.Quiet)
+        return new LineBuilder(glyphs).Add("  circuit  crystal MHz CL pF amplifier    ", Tone.Quiet)
             .Column(glyphs.IsAscii ? "div" : "÷", 5, Tone.Quiet, true)
-            .Add("  error ppm   margin     ", Tone.Quiet).Add("cost " + currency, Tone.Quiet).Build();
+            .Add("  error ppm  margin    ", Tone.Quiet).Column(currency.Length > 3 ? "cost" : "cost " + currency, 8, Tone.Quiet, true).Build();
     }
 
     /// <summary>The rows that fit a height, with the chosen one among them.</summary>
@@ -97,9 +90,9 @@ public sealed class CandidateList
         LimitUse? nearest = LimitUses.Nearest(cells.Uses);
         LineBuilder line = new LineBuilder(glyphs).Column(here ? glyphs.Chosen : "", 2)
             .Column(cells.Circuit, 9)
-            .Column(cells.FrequencyMegaHertz, 11, right: true).Add("  ")
+            .Column(cells.FrequencyMegaHertz, 11, right: true).Add(" ")
             .Column(cells.LoadPicofarads, 5, right: true).Add(" ")
-            .Column(cells.Amplifier, 13).Add(" ")
+            .Column(cells.Amplifier, 12).Add(" ")
             .Column(cells.Divider, 5, right: true).Add(" ");
         Figure(line, cells.ErrorPpm, 6, LimitName.Error);
         Figure(line, cells.Margin, 5, LimitName.Margin);
@@ -110,7 +103,7 @@ public sealed class CandidateList
         {
             LimitUse use = cells.Uses.First(other => other.Name == name);
             target.Column(text, width, ToneOf(use), right: true).Add(" ")
-                .Add(Bars.Bar(use.Used, BarCells, glyphs), ToneOf(use)).Add("  ");
+                .Add(Bars.Bar(use.Used, BarCells, glyphs), ToneOf(use)).Add(" ");
         }
 
         Tone ToneOf(LimitUse use) =>

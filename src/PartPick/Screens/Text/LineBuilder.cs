@@ -31,6 +31,24 @@ public sealed class LineBuilder(Glyphs glyphs)
         return Add(right ? shown.PadLeft(width) : shown.PadRight(width), tone);
     }
 
+    /// <summary>Adds words, cut after a whole word with a mark where they are too long.</summary>
+    /// <param name="text">The text.</param>
+    /// <param name="width">The most cells it may take.</param>
+    /// <param name="tone">Its tone.</param>
+    public LineBuilder Words(string text, int width, Tone tone = Tone.Normal)
+    {
+        string shown = glyphs.Show(text);
+        if (shown.Length <= width)
+        {
+            return Add(shown, tone);
+        }
+
+        string mark = " " + glyphs.Show("…");
+        int room = width - mark.Length;
+        int end = room > 0 ? shown.LastIndexOf(' ', room) : -1;
+        return end > 0 ? Add(shown[..end].TrimEnd(',', ';') + mark, tone) : Add(Cut(shown, Math.Max(0, width)), tone);
+    }
+
     /// <summary>Adds spaces up to a column.</summary>
     /// <param name="column">The column, from zero; nothing is added where the line is already there.</param>
     public LineBuilder To(int column) => Width < column ? Add(new string(' ', column - Width)) : this;
