@@ -51,9 +51,7 @@ internal static class SteadySolver
             return Describe(crystal, balance);
         }
 
-        SteadyState? steady = Refine(crystal, branch, refinement, balance, out _);
-        state = near;
-        return steady;
+        return Refine(crystal, branch, refinement, balance, out state);
     }
 
     /// <summary>

@@ -23,8 +23,8 @@ public sealed record RankingResult
     /// </summary>
     public required ImmutableArray<Candidate> Candidates { get; init; }
 
-    /// <summary>The front, in order.</summary>
-    public required ImmutableArray<Candidate> Front { get; init; }
+    /// <summary>Ids of the candidates on the front, in order.</summary>
+    public required ImmutableArray<string> Front { get; init; }
 
     /// <summary>The nearest misses where nothing is fit, nearest first.</summary>
     public required ImmutableArray<Candidate> NearestMisses { get; init; }

@@ -1,0 +1,60 @@
+using System.Collections.Immutable;
+using PartPick.Catalog;
+
+namespace PartPick.Selection;
+
+/// <summary>Analyses one choice of parts in full: every figure from nothing, whatever was computed before.</summary>
+/// <param name="requirement">What is needed.</param>
+/// <param name="market">What can be bought.</param>
+public sealed class CandidateBuilder(Requirement requirement, Market market)
+{
+    /// <summary>The candidate; null where its amplifier is not specified over the supply range.</summary>
+    public Candidate? Build(CandidateParts choice)
+    {
+        ArgumentNullException.ThrowIfNull(choice);
+        CrystalModel model = CrystalModel.From(choice.Crystal);
+        SupportParts support = SupportParts.For(choice.Circuit, choice.Crystal.FrequencyHz, market);
+        double feedback = support.Feedback?.ValueOhms ?? double.PositiveInfinity;
+        if (CircuitTemplate.Create(requirement, choice.Circuit, model, choice.Amplifier, feedback) is not { } template)
+        {
+            return null;
+        }
+
+        CircuitValues values = CircuitValues.Of(choice);
+        var analysis = new ValueAnalysis(template, requirement, values);
+        var corners = new CornerAnalysis(
+            template, requirement, values, BudgetBuilder.Tolerance(choice.C1), BudgetBuilder.Tolerance(choice.C2));
+        ErrorBudget? budget = BudgetBuilder.Build(choice, requirement, model, CrystalSpread.Of(choice.Crystal, requirement), analysis);
+        AtCorner? drive = budget is null ? null : corners.Drive(analysis);
+        AtCorner? time = budget is null ? null : corners.StartUpTime(analysis);
+        decimal cost = BillOfParts.UnitCost(choice, support, market);
+        ImmutableArray<Miss> misses = Judge.Misses(
+            requirement,
+            market,
+            BillOfParts.FirstShortage(choice, support, market),
+            cost,
+            corners.Starts,
+            corners.Margin,
+            budget,
+            drive,
+            choice.Crystal.DriveLevelWatts,
+            time);
+        return new Candidate
+        {
+            Id = CandidateId.Of(choice),
+            Choice = choice,
+            Parts = BillOfParts.List(choice, support),
+            Nominal = analysis.Circuit,
+            Result = analysis.Result!,
+            Budget = budget,
+            Margin = corners.Margin,
+            Drive = drive,
+            StartUpTime = time,
+            RatedDriveWatts = choice.Crystal.DriveLevelWatts,
+            Cost = cost,
+            Currency = market.Currency,
+            Misses = misses,
+            Warnings = [],
+        };
+    }
+}

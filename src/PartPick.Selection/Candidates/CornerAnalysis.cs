@@ -1,0 +1,112 @@
+using PartPick.Physics;
+using PartPick.Physics.Circuits;
+
+namespace PartPick.Selection;
+
+/// <summary>The worst of margin, drive level and start-up time over the corners, for capacitors of given tolerances.</summary>
+public sealed class CornerAnalysis
+{
+    private readonly CircuitTemplate _template;
+    private readonly CircuitValues _values;
+    private readonly Requirement _requirement;
+    private readonly double _c1Tolerance;
+    private readonly double _c2Tolerance;
+    private (AtCorner Margin, bool BuildsUp)? _start;
+    private (AtCorner? Drive, AtCorner? Time)? _running;
+
+    /// <param name="template">Circuit, crystal and amplifier.</param>
+    /// <param name="requirement">What is needed.</param>
+    /// <param name="values">Nominal values.</param>
+    /// <param name="c1Tolerance">Tolerance of C1 as a ratio.</param>
+    /// <param name="c2Tolerance">Tolerance of C2 as a ratio.</param>
+    public CornerAnalysis(CircuitTemplate template, Requirement requirement, CircuitValues values, double c1Tolerance, double c2Tolerance)
+    {
+        ArgumentNullException.ThrowIfNull(template);
+        ArgumentNullException.ThrowIfNull(requirement);
+        _template = template;
+        _values = values;
+        _requirement = requirement;
+        _c1Tolerance = c1Tolerance;
+        _c2Tolerance = c2Tolerance;
+    }
+
+    /// <summary>
+    /// Least margin: the start-up margin, or, where a disturbance is allowed and a corner needs one, the running margin there.
+    /// </summary>
+    public AtCorner Margin => (_start ??= FindStart()).Margin;
+
+    /// <summary>Whether it builds up, or may be kicked into running, at every corner.</summary>
+    public bool Starts => (_start ??= FindStart()).BuildsUp;
+
+    /// <summary>Highest drive level in watts; null where a corner has no steady state.</summary>
+    public AtCorner? Drive(ValueAnalysis analysis) => (_running ??= FindRunning(analysis)).Drive;
+
+    /// <summary>Longest start-up time in seconds; null where a corner does not build up or has no steady state.</summary>
+    public AtCorner? StartUpTime(ValueAnalysis analysis) => (_running ??= FindRunning(analysis)).Time;
+
+    private (AtCorner Margin, bool BuildsUp) FindStart()
+    {
+        double least = double.PositiveInfinity;
+        OperatingPoint where = _template.Corners[0];
+        bool starts = true;
+        foreach (OperatingPoint point in _template.Corners)
+        {
+            OscillatorCircuit circuit = _template.At(_values, point, _c1Tolerance, _c2Tolerance);
+            StartFigures figures = OscillatorAnalysis.FindStartFigures(circuit);
+            double margin = figures.Margin;
+            if (figures.GrowthRatePerSecond <= 0)
+            {
+                bool kicked = false;
+                if (_requirement.AllowDisturbance)
+                {
+                    OscillatorResult result = OscillatorAnalysis.Analyse(circuit);
+                    kicked = result.Start == StartKind.NeedsDisturbance;
+                    margin = kicked ? result.RunningMargin : margin;
+                }
+
+                starts &= kicked;
+            }
+
+            if (margin < least)
+            {
+                (least, where) = (margin, point);
+            }
+        }
+
+        return (new AtCorner(least, where.Describe(_template.Kind)), starts);
+    }
+
+    private (AtCorner? Drive, AtCorner? Time) FindRunning(ValueAnalysis analysis)
+    {
+        double mostDrive = double.NegativeInfinity;
+        double longest = double.NegativeInfinity;
+        OperatingPoint driven = _template.Corners[0];
+        OperatingPoint slow = driven;
+        foreach (OperatingPoint point in _template.Corners)
+        {
+            if (analysis.SteadyAt(point, _c1Tolerance, _c2Tolerance) is not { } steady)
+            {
+                return (null, null);
+            }
+
+            if (steady.DriveWatts > mostDrive)
+            {
+                (mostDrive, driven) = (steady.DriveWatts, point);
+            }
+
+            OscillatorCircuit circuit = _template.At(_values, point, _c1Tolerance, _c2Tolerance);
+            double growth = OscillatorAnalysis.FindStartFigures(circuit).GrowthRatePerSecond;
+            double time = growth > 0
+                ? OscillatorAnalysis.StartUpTimeSeconds(circuit, growth, steady.CurrentRmsAmps)
+                : double.PositiveInfinity;
+            if (time > longest)
+            {
+                (longest, slow) = (time, point);
+            }
+        }
+
+        return (
+            new AtCorner(mostDrive, driven.Describe(_template.Kind)),
+            double.IsFinite(longest) ? new AtCorner(longest, slow.Describe(_template.Kind)) : null);
+    }
+}

@@ -1,0 +1,100 @@
+using PartPick.Physics;
+using PartPick.Physics.Circuits;
+
+namespace PartPick.Selection;
+
+/// <summary>
+/// The figures of a circuit that depend on nominal values alone: the steady state, its sensitivities, the amplifier's and
+/// supply's share of the frequency. Each is computed when first asked for and kept; parts of one value and several tolerances
+/// share them.
+/// </summary>
+public sealed class ValueAnalysis
+{
+    private const double Step = 0.02;
+    private readonly CircuitTemplate _template;
+    private readonly CircuitValues _values;
+    private readonly OperatingPoint _nominal;
+    private readonly RunningState? _state;
+    private double? _base;
+    private double? _amplifier;
+    private (double C1, double C2, double Across)? _slopes;
+
+    /// <param name="template">Circuit, crystal and amplifier.</param>
+    /// <param name="requirement">What is needed.</param>
+    /// <param name="values">Nominal values.</param>
+    /// <param name="near">A running state near, which makes it cheaper; null to find everything from nothing.</param>
+    public ValueAnalysis(CircuitTemplate template, Requirement requirement, CircuitValues values, RunningState? near = null)
+    {
+        ArgumentNullException.ThrowIfNull(template);
+        _template = template;
+        _values = values;
+        _nominal = OperatingPoint.Nominal(requirement);
+        Circuit = template.At(values, _nominal);
+        if (near is null)
+        {
+            Result = OscillatorAnalysis.Analyse(Circuit, out _state);
+            Steady = Result.Steady;
+        }
+        else
+        {
+            Steady = OscillatorAnalysis.FindSteadyState(Circuit, near, refine: true, out _state);
+        }
+    }
+
+    /// <summary>The nominal circuit.</summary>
+    public OscillatorCircuit Circuit { get; }
+
+    /// <summary>The nominal circuit's figures; null where only the steady state was sought.</summary>
+    public OscillatorResult? Result { get; }
+
+    /// <summary>The nominal steady state; null where there is none.</summary>
+    public SteadyState? Steady { get; }
+
+    /// <summary>Largest relative |f(corner) − f| over amplifier, supply and ambient; infinite where a corner has no steady state.</summary>
+    public double AmplifierRatio => _amplifier ??= FindAmplifierRatio();
+
+    /// <summary>∂f/f by C1 (and the stray beside it), C2 (and the stray beside it) and the stray across, per farad.</summary>
+    public (double C1, double C2, double Across) SlopesPerFarad => _slopes ??= FindSlopes();
+
+    /// <summary>The steady state at a corner; null where there is none.</summary>
+    public SteadyState? SteadyAt(OperatingPoint point, double c1Tolerance, double c2Tolerance) =>
+        Follow(_template.At(_values, point, c1Tolerance, c2Tolerance));
+
+    private SteadyState? Follow(OscillatorCircuit circuit) =>
+        _state is null ? null : OscillatorAnalysis.FindSteadyState(circuit, _state, refine: false, out _);
+
+    // Differences are taken between states of one fineness, so that what the fineness leaves cancels.
+    private double BaseHz() => _base ??= Follow(Circuit)?.FrequencyHz ?? double.NaN;
+
+    private double FindAmplifierRatio()
+    {
+        double most = 0;
+        foreach (OperatingPoint point in _template.AmplifierCorners)
+        {
+            double shift = Follow(_template.At(_values, point)) is { } state
+                ? Math.Abs(state.FrequencyHz / BaseHz() - 1)
+                : double.PositiveInfinity;
+            most = Math.Max(most, double.IsNaN(shift) ? double.PositiveInfinity : shift);
+        }
+
+        return most;
+    }
+
+    private (double C1, double C2, double Across) FindSlopes()
+    {
+        double total = Circuit.Crystal.ShuntFarads + Circuit.Strays.AcrossFarads + 1e-12;
+        return (
+            Slope(Step * _values.C1Farads, d => Circuit with { C1Farads = _values.C1Farads + d }),
+            Slope(Step * _values.C2Farads, d => Circuit with { C2Farads = _values.C2Farads + d }),
+            Slope(Step * total, d => Circuit with { Strays = Circuit.Strays with { AcrossFarads = Circuit.Strays.AcrossFarads + d } }));
+    }
+
+    private double Slope(double step, Func<double, OscillatorCircuit> shifted)
+    {
+        SteadyState? above = Follow(shifted(step));
+        SteadyState? below = Follow(shifted(-step));
+        return above is null || below is null
+            ? double.NaN
+            : (above.FrequencyHz - below.FrequencyHz) / (2 * step * BaseHz());
+    }
+}

@@ -1,0 +1,181 @@
+using System.Collections.Immutable;
+using PartPick.Catalog;
+
+namespace PartPick.Selection.Search;
+
+/// <summary>Everything that a search may combine, and what its limits removed before any circuit was looked at.</summary>
+internal sealed class SearchSpace
+{
+    private readonly Dictionary<Limit, double> _rejections = [];
+    private readonly AmplifierOptions _options;
+
+    public SearchSpace(Requirement requirement, PartsCatalog catalog)
+    {
+        Requirement = requirement;
+        Catalog = catalog;
+        Market = new Market(catalog, requirement.Builds);
+        Capacitors = CapacitorChoice.Of(requirement, Market);
+        _options = new AmplifierOptions(requirement, Market);
+        Families = [.. Kinds().SelectMany(FamiliesOf)];
+    }
+
+    /// <summary>What is needed.</summary>
+    public Requirement Requirement { get; }
+
+    /// <summary>All parts.</summary>
+    public PartsCatalog Catalog { get; }
+
+    /// <summary>What can be bought.</summary>
+    public Market Market { get; }
+
+    /// <summary>Load capacitors by value.</summary>
+    public ImmutableArray<CapacitorValue> Capacitors { get; }
+
+    /// <summary>What is left to look into.</summary>
+    public ImmutableArray<CircuitFamily> Families { get; }
+
+    /// <summary>Number of combinations of the whole space.</summary>
+    public double Combinations { get; private set; }
+
+    /// <summary>Combinations removed before any circuit was looked at, by limit.</summary>
+    public IReadOnlyDictionary<Limit, double> Rejections => _rejections;
+
+    /// <summary>Number of combinations of C1 and C2 parts.</summary>
+    public double CapacitorPairs
+    {
+        get
+        {
+            double parts = Capacitors.Sum(value => value.Parts.Length);
+            return parts * parts;
+        }
+    }
+
+    private IEnumerable<CircuitKind> Kinds() => Requirement.Circuits.Distinct().Order().Where(kind => Requirement.Waveform switch
+    {
+        Waveform.Sine => kind == CircuitKind.Follower,
+        Waveform.Square => kind != CircuitKind.Follower,
+        _ => true,
+    });
+
+    private IEnumerable<Part> Amplifiers(CircuitKind kind) => kind switch
+    {
+        CircuitKind.Gate => Catalog.Inverters,
+        CircuitKind.Counter => Catalog.Counters,
+        CircuitKind.Port => Catalog.Ports,
+        _ => Catalog.Transistors,
+    };
+
+    private IEnumerable<CircuitFamily> FamiliesOf(CircuitKind kind)
+    {
+        foreach (Part amplifier in Amplifiers(kind).Where(Market.IsListed))
+        {
+            ImmutableArray<AmplifierOption> options = amplifier is TransistorPart transistor ? _options.BiasFor(transistor) : _options.Series;
+            double size = CapacitorPairs * options.Length;
+            var members = new List<(FamilyMember Member, SupportParts Support)>();
+            foreach (CrystalPart crystal in Catalog.Crystals.Where(part => part.Overtone == 1 && Market.IsListed(part)))
+            {
+                CrystalModel model = CrystalModel.From(crystal);
+                foreach (int tap in (amplifier as CounterPart)?.Taps ?? [0])
+                {
+                    double target = Requirement.OutputHz * Math.Pow(2, tap);
+                    if (!Reaches(model, target))
+                    {
+                        continue;
+                    }
+
+                    Combinations += size;
+                    SupportParts support = SupportParts.For(kind, crystal.FrequencyHz, Market);
+                    (FamilyMember? member, Limit limit) = Admit(kind, amplifier, crystal, model, tap, target, support);
+                    if (member is not null)
+                    {
+                        members.Add((member, support));
+                    }
+                    else
+                    {
+                        _rejections[limit] = _rejections.GetValueOrDefault(limit) + size;
+                    }
+                }
+            }
+
+            foreach (var family in members.GroupBy(pair => (
+                pair.Member.Crystal.FrequencyHz,
+                pair.Member.Model.Crystal.ShuntFarads,
+                pair.Member.Model.Crystal.ResistanceOhms,
+                pair.Member.Model.Crystal.MotionalFarads,
+                pair.Support)))
+            {
+                yield return new CircuitFamily
+                {
+                    Kind = kind,
+                    Amplifier = amplifier,
+                    Support = family.Key.Support,
+                    Options = options,
+                    Members = [.. family.Select(pair => pair.Member)],
+                };
+            }
+        }
+    }
+
+    // Whatever the load, a crystal runs between its series and its antiresonant frequency.
+    private bool Reaches(CrystalModel model, double targetHz)
+    {
+        double series = model.Crystal.SeriesHz;
+        double highest = series * Math.Sqrt(1 + model.Crystal.MotionalFarads / model.Crystal.ShuntFarads);
+        return targetHz * (1 + Requirement.BudgetRatio) >= series && targetHz * (1 - Requirement.BudgetRatio) <= highest;
+    }
+
+    private (FamilyMember? Member, Limit Limit) Admit(
+        CircuitKind kind, Part amplifier, CrystalPart crystal, CrystalModel model, int tap, double targetHz, SupportParts support)
+    {
+        double feedback = support.Feedback?.ValueOhms ?? double.PositiveInfinity;
+        CircuitTemplate? template = CircuitTemplate.Create(Requirement, kind, model, amplifier, feedback);
+        if (template is null)
+        {
+            return (null, Limit.Supply);
+        }
+
+        if (!Specification.CoversTemperature(crystal, amplifier, Requirement))
+        {
+            return (null, Limit.Temperature);
+        }
+
+        if (!Specification.CoversClock(amplifier, crystal.FrequencyHz, Requirement))
+        {
+            return (null, Limit.Clock);
+        }
+
+        bool complete = kind == CircuitKind.Follower || support.Feedback is not null;
+        if (!Market.Covers(crystal, 1) || !Market.Covers(amplifier, 1) || !complete)
+        {
+            return (null, Limit.Stock);
+        }
+
+        ImmutableArray<BudgetTerm> terms = CrystalSpread.Of(crystal, Requirement);
+        double ratio = terms.Sum(term => term.Ratio);
+        decimal cost = Market.UnitCost(crystal, 1) + Market.UnitCost(amplifier, 1)
+            + Cost(support.Feedback) + Cost(support.Decoupling) + Cost(support.Coupling);
+        if (cost > Requirement.CostLimit)
+        {
+            return (null, Limit.Cost);
+        }
+
+        if (ratio > Requirement.BudgetRatio)
+        {
+            return (null, Limit.Error);
+        }
+
+        return (new FamilyMember
+        {
+            Crystal = crystal,
+            Model = model,
+            Template = template,
+            Tap = tap,
+            Terms = terms,
+            TermsRatio = ratio,
+            BaseCost = cost,
+            TargetHz = targetHz,
+        }, default);
+    }
+
+    private decimal Cost(Part? part) => part is null ? 0 : Market.UnitCost(part, 1);
+}
