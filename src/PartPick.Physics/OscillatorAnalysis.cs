@@ -50,17 +50,14 @@ public static class OscillatorAnalysis
     /// </summary>
     /// <param name="circuit">The circuit.</param>
     /// <param name="near">The running state of a circuit like it.</param>
-    /// <param name="refine">
-    /// True to refine it like a state sought from nothing; false to stay at the known state's fineness, good for differences
-    /// between circuits alike.
-    /// </param>
+    /// <param name="fineness">How finely it is resolved.</param>
     /// <param name="state">The running state; null where there is none.</param>
-    public static SteadyState? FindSteadyState(OscillatorCircuit circuit, RunningState near, bool refine, out RunningState? state)
+    public static SteadyState? FindSteadyState(OscillatorCircuit circuit, RunningState near, Fineness fineness, out RunningState? state)
     {
         ArgumentNullException.ThrowIfNull(near);
         state = null;
         SteadyState? steady = Balances(circuit) is { } refinement
-            ? SteadySolver.Follow(circuit.Crystal, refinement, near, refine, out state)
+            ? SteadySolver.Follow(circuit.Crystal, refinement, near, fineness, out state)
             : null;
         return steady ?? Analyse(circuit, out state).Steady;
     }

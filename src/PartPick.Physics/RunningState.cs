@@ -1,3 +1,4 @@
+using PartPick.Physics.Numerics;
 using PartPick.Physics.Steady;
 
 namespace PartPick.Physics;
@@ -9,9 +10,10 @@ namespace PartPick.Physics;
 public sealed class RunningState
 {
     private readonly double[] _state;
+    private readonly DenseSolver? _factors;
 
     internal RunningState(
-        Type kind, int points, bool reverse, bool holdsCurrent, double radians, double peakAmps, double[] state)
+        Type kind, int points, bool reverse, bool holdsCurrent, double radians, double peakAmps, double[] state, DenseSolver? factors)
     {
         Kind = kind;
         Points = points;
@@ -20,7 +22,11 @@ public sealed class RunningState
         Radians = radians;
         PeakAmps = peakAmps;
         _state = state;
+        _factors = factors;
     }
+
+    /// <summary>The same starting point without what makes a solution quicker from it: much smaller, to keep many.</summary>
+    public RunningState Slim() => new(Kind, Points, Reverse, HoldsCurrent, Radians, PeakAmps, _state, null);
 
     internal Type Kind { get; }
 
@@ -36,7 +42,7 @@ public sealed class RunningState
 
     internal AmplitudeBalance PutInto(AmplitudeBalance balance)
     {
-        balance.TakeState(Radians, PeakAmps, _state);
+        balance.TakeState(Radians, PeakAmps, _state, _factors);
         return balance;
     }
 }

@@ -17,6 +17,9 @@ internal sealed class DenseSolver
     /// <summary>True while factors of the last matrix are there to solve with.</summary>
     public bool IsFactored { get; private set; }
 
+    /// <summary>Number of equations of the last matrix.</summary>
+    public int Order => _n;
+
     /// <summary>Sizes the matrix and gives its storage, rows of <paramref name="stride"/> numbers.</summary>
     public Span<double> Matrix(int n, out int stride)
     {

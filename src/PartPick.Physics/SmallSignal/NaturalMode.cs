@@ -14,7 +14,11 @@ internal readonly record struct NaturalMode(double Radians, double GrowthRate)
     /// Solves Rm + sLm + 1/(sCm) + Zc(s; gm) = 0 for s by repeating s → Zc(s) → s. The motional branch is stiffer than the
     /// network by C/Cm, so each step gains three to four digits.
     /// </summary>
-    public static NaturalMode Find<TNetwork>(in CrystalBranch branch, in TNetwork network, double siemens)
+    /// <param name="branch">The motional branch.</param>
+    /// <param name="network">The rest of the circuit.</param>
+    /// <param name="siemens">Transconductance in siemens.</param>
+    /// <param name="accuracy">Largest last step, relative to the offset from resonance.</param>
+    public static NaturalMode Find<TNetwork>(in CrystalBranch branch, in TNetwork network, double siemens, double accuracy = 1e-15)
         where TNetwork : struct, ILinearNetwork
     {
         Complex offset = Complex.Zero;
@@ -24,7 +28,7 @@ internal readonly record struct NaturalMode(double Radians, double GrowthRate)
             Complex next = branch.OffsetFor(network.At(s).Impedance(siemens));
             double change = Complex.Abs(next - offset);
             offset = next;
-            if (change < 1e-17 + 1e-15 * Complex.Abs(offset))
+            if (change < 1e-17 + accuracy * Complex.Abs(offset))
             {
                 break;
             }

@@ -6,6 +6,9 @@ namespace PartPick.Physics.SmallSignal;
 /// <summary>Start-up figures of a linear network (model of small signals at the bias point).</summary>
 internal static class StartUpSolver
 {
+    // The step after the last one would be smaller by C/Cm again: the figures are good to 1e-9.
+    private const double FiguresAccuracy = 1e-7;
+
     /// <summary>All start-up figures.</summary>
     public static StartUp Solve<TNetwork>(Crystal crystal, in TNetwork network, double siemens)
         where TNetwork : struct, ILinearNetwork
@@ -30,7 +33,7 @@ internal static class StartUpSolver
     public static StartFigures Figures<TNetwork>(Crystal crystal, in TNetwork network, double siemens)
         where TNetwork : struct, ILinearNetwork
     {
-        NaturalMode mode = NaturalMode.Find(new CrystalBranch(crystal), network, siemens);
+        NaturalMode mode = NaturalMode.Find(new CrystalBranch(crystal), network, siemens, FiguresAccuracy);
         double negative = NegativeResistance(network, mode.Radians, siemens);
         return new StartFigures(negative / crystal.ResistanceOhms, mode.GrowthRate);
     }

@@ -14,7 +14,8 @@ internal abstract class AmplitudeBalance
     private const double LargestLogStep = 0.7;
     private const double Tolerance = 1e-11;
     private const double KeepRatio = 0.15;
-    private readonly DenseSolver _solver = new();
+    private DenseSolver _solver = new();
+    private bool _borrowed;
     private double[] _residual = [];
     private double[] _step = [];
     private double[] _gradient = [];
@@ -46,12 +47,27 @@ internal abstract class AmplitudeBalance
         PrepareHarmonics(radians);
     }
 
-    /// <summary>Takes a frequency in rad/s, an amplitude in amperes and a state of the same kind and fineness.</summary>
-    public void TakeState(double radians, double peakAmps, ReadOnlySpan<double> state)
+    /// <summary>
+    /// Takes a frequency in rad/s, an amplitude in amperes and a state of the same kind and fineness, and borrows the factors
+    /// with which that state was solved: between circuits that differ little they serve as well.
+    /// </summary>
+    public void TakeState(double radians, double peakAmps, ReadOnlySpan<double> state, DenseSolver? factors)
     {
         SetFrequency(radians);
         PeakAmps = peakAmps;
         state.CopyTo(State);
+        if (factors is not null)
+        {
+            _solver = factors;
+            _borrowed = true;
+        }
+    }
+
+    /// <summary>Gives the factors of the last solution away to be borrowed; this balance makes its own again when it needs some.</summary>
+    protected DenseSolver LendFactors()
+    {
+        _borrowed = true;
+        return _solver;
     }
 
     /// <summary>The state as a starting point for a circuit like this one.</summary>
@@ -73,11 +89,13 @@ internal abstract class AmplitudeBalance
     public bool SolveAt(double peakAmps)
     {
         PeakAmps = peakAmps;
-        return Newton(null);
+        return Newton(null, Tolerance);
     }
 
     /// <summary>Solves state and amplitude together for Re Zc(I) = −Rm, from the last state.</summary>
-    public bool SolveRunning(double resistanceOhms) => Newton(resistanceOhms);
+    /// <param name="resistanceOhms">Rm in ohms.</param>
+    /// <param name="tolerance">Largest relative residual that is left.</param>
+    public bool SolveRunning(double resistanceOhms, double tolerance = Tolerance) => Newton(resistanceOhms, tolerance);
 
     /// <summary>Output swing in volts peak to peak of the last solved state.</summary>
     public abstract double OutputSwingVolts();
@@ -102,13 +120,13 @@ internal abstract class AmplitudeBalance
 
     // Newton's method that keeps its factors while they still shrink the residual well. With a resistance the amplitude is
     // one more unknown and Re Zc + Rm one more equation.
-    private bool Newton(double? resistanceOhms)
+    private bool Newton(double? resistanceOhms, double tolerance)
     {
         int n = Count;
         int order = resistanceOhms is null ? n : n + 1;
         Size(n + 1);
         double before = double.PositiveInfinity;
-        bool factored = false;
+        bool factored = _solver.IsFactored && _solver.Order == order;
         double size = Residual(State, PeakAmps, _residual.AsSpan(0, n));
         for (int step = 0; step < MostSteps; step++)
         {
@@ -127,7 +145,7 @@ internal abstract class AmplitudeBalance
                 return false;
             }
 
-            if (total < Tolerance)
+            if (total < tolerance)
             {
                 return resistanceOhms is not null || Finish(n);
             }
@@ -189,6 +207,12 @@ internal abstract class AmplitudeBalance
 
     private bool Factor(int n, int order, double? resistanceOhms)
     {
+        if (_borrowed)
+        {
+            _solver = new DenseSolver();
+            _borrowed = false;
+        }
+
         Span<double> matrix = _solver.Matrix(order, out int stride);
         Linearise(State, PeakAmps, matrix, stride, _byLog.AsSpan(0, n));
         if (resistanceOhms is { } resistance)

@@ -100,7 +100,7 @@ internal sealed class FollowerBalance : AmplitudeBalance
 
     /// <inheritdoc/>
     public override RunningState Keep() =>
-        new(typeof(FollowerBalance), _points, _reverse, GivenCurrent, Radians, PeakAmps, [.. State]);
+        new(typeof(FollowerBalance), _points, _reverse, GivenCurrent, Radians, PeakAmps, [.. State], LendFactors());
 
     /// <inheritdoc/>
     public override void StartLinear(double peakAmps)

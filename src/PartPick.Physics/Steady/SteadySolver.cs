@@ -12,6 +12,7 @@ internal static class SteadySolver
     private const double FrequencyAgreement = 3e-8;
     private const double CurrentAgreement = 1e-3;
     private const int FollowedLevel = 1;
+    private const double EstimateTolerance = 1e-4;
 
     /// <summary>Scans the amplitude and refines the running state.</summary>
     /// <param name="crystal">The crystal.</param>
@@ -33,25 +34,39 @@ internal static class SteadySolver
     }
 
     /// <summary>
-    /// The steady state near one of a circuit like this one; null where it is not found from there. At the same fineness, or
-    /// refined like a state sought from nothing.
+    /// The steady state near one of a circuit like this one; null where it is not found from there.
     /// </summary>
-    public static SteadyState? Follow(Crystal crystal, Refinement refinement, RunningState near, bool refine, out RunningState? state)
+    public static SteadyState? Follow(
+        Crystal crystal, Refinement refinement, RunningState near, Fineness fineness, out RunningState? state)
     {
         state = null;
         var branch = new CrystalBranch(crystal);
-        if (refinement.From(near) is not { } balance || !Settle(branch, balance) || refinement.IsIncomplete(balance))
+        if (refinement.From(near) is not { } balance)
         {
             return null;
         }
 
-        if (!refine)
+        if (fineness == Fineness.Converged)
         {
-            state = balance.Keep();
-            return Describe(crystal, balance);
+            return Refine(crystal, branch, refinement, balance, out state);
         }
 
-        return Refine(crystal, branch, refinement, balance, out state);
+        if (!Settle(branch, balance) || refinement.IsIncomplete(balance))
+        {
+            return null;
+        }
+
+        if (fineness == Fineness.OneFiner)
+        {
+            balance = refinement.Finer(balance) ?? balance;
+            if (!Settle(branch, balance) || refinement.IsIncomplete(balance))
+            {
+                return null;
+            }
+        }
+
+        state = balance.Keep();
+        return Describe(crystal, balance);
     }
 
     /// <summary>
@@ -65,7 +80,7 @@ internal static class SteadySolver
         state = null;
         var branch = new CrystalBranch(crystal);
         AmplitudeBalance? balance = near is null ? null : refinement.From(near);
-        if (balance is null || !balance.SolveRunning(crystal.ResistanceOhms) || refinement.IsIncomplete(balance))
+        if (balance is null || !balance.SolveRunning(crystal.ResistanceOhms, EstimateTolerance) || refinement.IsIncomplete(balance))
         {
             var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms);
             balance = scan.Running;

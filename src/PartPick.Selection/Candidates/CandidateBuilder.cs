@@ -1,5 +1,4 @@
 using System.Collections.Immutable;
-using PartPick.Catalog;
 
 namespace PartPick.Selection;
 

@@ -15,15 +15,25 @@ public sealed class ValueAnalysis
     private readonly CircuitValues _values;
     private readonly OperatingPoint _nominal;
     private readonly RunningState? _state;
-    private double? _base;
+    private SteadyState? _steady;
     private double? _amplifier;
     private (double C1, double C2, double Across)? _slopes;
 
+    /// <summary>Analyses the values from nothing.</summary>
     /// <param name="template">Circuit, crystal and amplifier.</param>
     /// <param name="requirement">What is needed.</param>
     /// <param name="values">Nominal values.</param>
-    /// <param name="near">A running state near, which makes it cheaper; null to find everything from nothing.</param>
-    public ValueAnalysis(CircuitTemplate template, Requirement requirement, CircuitValues values, RunningState? near = null)
+    public ValueAnalysis(CircuitTemplate template, Requirement requirement, CircuitValues values)
+        : this(template, requirement, values, null)
+    {
+    }
+
+    /// <summary>Analyses the values from an estimate's running state: cheaper, and the same figures.</summary>
+    /// <param name="template">Circuit, crystal and amplifier.</param>
+    /// <param name="requirement">What is needed.</param>
+    /// <param name="values">Nominal values.</param>
+    /// <param name="near">The running state; null to start from nothing.</param>
+    public ValueAnalysis(CircuitTemplate template, Requirement requirement, CircuitValues values, RunningState? near)
     {
         ArgumentNullException.ThrowIfNull(template);
         _template = template;
@@ -33,11 +43,12 @@ public sealed class ValueAnalysis
         if (near is null)
         {
             Result = OscillatorAnalysis.Analyse(Circuit, out _state);
-            Steady = Result.Steady;
+            _steady = Result.Steady;
+            Base = Follow(Circuit);
         }
         else
         {
-            Steady = OscillatorAnalysis.FindSteadyState(Circuit, near, refine: true, out _state);
+            Base = OscillatorAnalysis.FindSteadyState(Circuit, near, Fineness.OneFiner, out _state);
         }
     }
 
@@ -48,7 +59,15 @@ public sealed class ValueAnalysis
     public OscillatorResult? Result { get; }
 
     /// <summary>The nominal steady state; null where there is none.</summary>
-    public SteadyState? Steady { get; }
+    public SteadyState? Steady => _steady ??= _state is null
+        ? null
+        : OscillatorAnalysis.FindSteadyState(Circuit, _state, Fineness.Converged, out _);
+
+    /// <summary>
+    /// The nominal steady state at the fineness of the corners: differences are taken between states of one fineness, so that
+    /// what the fineness leaves cancels. Its frequency is within a few tenths of a ppm of <see cref="Steady"/>.
+    /// </summary>
+    public SteadyState? Base { get; }
 
     /// <summary>Largest relative |f(corner) − f| over amplifier, supply and ambient; infinite where a corner has no steady state.</summary>
     public double AmplifierRatio => _amplifier ??= FindAmplifierRatio();
@@ -61,10 +80,9 @@ public sealed class ValueAnalysis
         Follow(_template.At(_values, point, c1Tolerance, c2Tolerance));
 
     private SteadyState? Follow(OscillatorCircuit circuit) =>
-        _state is null ? null : OscillatorAnalysis.FindSteadyState(circuit, _state, refine: false, out _);
+        _state is null ? null : OscillatorAnalysis.FindSteadyState(circuit, _state, Fineness.Same, out _);
 
-    // Differences are taken between states of one fineness, so that what the fineness leaves cancels.
-    private double BaseHz() => _base ??= Follow(Circuit)?.FrequencyHz ?? double.NaN;
+    private double BaseHz() => Base?.FrequencyHz ?? double.NaN;
 
     private double FindAmplifierRatio()
     {

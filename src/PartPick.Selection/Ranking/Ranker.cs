@@ -1,4 +1,5 @@
 using PartPick.Catalog;
+using PartPick.Selection.Search;
 
 namespace PartPick.Selection;
 
@@ -18,5 +19,11 @@ public static class Ranker
         PartsCatalog catalog,
         RankingOptions? options = null,
         IProgress<RankingResult>? progress = null,
-        CancellationToken cancellation = default) => throw new NotImplementedException();
+        CancellationToken cancellation = default)
+    {
+        ArgumentNullException.ThrowIfNull(requirement);
+        ArgumentNullException.ThrowIfNull(catalog);
+        var space = new SearchSpace(requirement, catalog);
+        return new SearchRun(space, options ?? new RankingOptions(), progress, cancellation).Run();
+    }
 }

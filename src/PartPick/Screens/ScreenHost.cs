@@ -7,47 +7,41 @@ namespace PartPick.Screens;
 /// <summary>Opens the terminal interface.</summary>
 public static class ScreenHost
 {
-    private const int Done = 0;
-    private const int WrongInput = 2;
-    private const int NoCatalogue = 3;
-    private const int InternalError = 70;
-
     /// <summary>Runs the terminal interface until it is left.</summary>
     /// <param name="catalogPath">Path of the catalogue's file.</param>
     /// <param name="requirementPath">A requirement file to begin with; null to go on with the one that was kept.</param>
-    /// <param name="text">Reads and writes requirements.</param>
     /// <returns>0; 2 where there is no terminal or the file is wrong; 3 where the catalogue cannot be used.</returns>
-    internal static int Run(string catalogPath, string? requirementPath, IRequirementText text)
+    public static int Run(string catalogPath, string? requirementPath)
     {
         if (Console.IsInputRedirected || Console.IsOutputRedirected)
         {
-            return Fail(WrongInput, "the screens need a terminal; the commands work without one (partpick --help)");
+            return Fail(ExitStatus.WrongInput, "the screens need a terminal; the commands work without one (partpick --help)");
         }
 
         try
         {
-            return Open(catalogPath, requirementPath, text);
+            return Open(catalogPath, requirementPath);
         }
         catch (Exception error)
         {
             // The terminal is back as it was: what went wrong is one line below the prompt.
-            return Fail(InternalError, $"a fault of the program: {error.GetType().Name}: {error.Message}");
+            return Fail(ExitStatus.Fault, $"a fault of the program: {error.GetType().Name}: {error.Message}");
         }
     }
 
-    private static int Open(string catalogPath, string? requirementPath, IRequirementText text)
+    private static int Open(string catalogPath, string? requirementPath)
     {
         Result<PartsCatalog> catalog = CatalogStore.Load(catalogPath);
         if (!catalog.IsOk)
         {
-            return Fail(NoCatalogue, catalog.Problem.ToString());
+            return Fail(ExitStatus.NoCatalog, catalog.Problem.ToString());
         }
 
-        var keeper = new RequirementKeeper(catalogPath, text);
-        Result<Requirement?> start = requirementPath is null ? keeper.Recall() : ReadFile(requirementPath, text);
+        var keeper = new RequirementKeeper(catalogPath);
+        Result<Requirement?> start = requirementPath is null ? keeper.Recall() : ReadFile(requirementPath);
         if (!start.IsOk && requirementPath is not null)
         {
-            return Fail(WrongInput, start.Problem.ToString());
+            return Fail(ExitStatus.WrongInput, start.Problem.ToString());
         }
 
         string? notice = !start.IsOk ? "! " + start.Problem
@@ -57,17 +51,17 @@ public static class ScreenHost
             new CatalogRanking(catalog.Value), TerminalTraits.Of(Environment.GetEnvironmentVariable),
             requirement => keeper.Keep(requirement));
         Requirement end = run.Show(start.ValueOr(null) ?? First, notice);
-        return keeper.Keep(end) is { } problem ? Fail(NoCatalogue, problem.ToString()) : Done;
+        return keeper.Keep(end) is { } problem ? Fail(ExitStatus.NoCatalog, problem.ToString()) : ExitStatus.Done;
     }
 
     /// <summary>The sentence of the very first time.</summary>
     private static Requirement First => new() { OutputHz = 1000, Waveform = Waveform.Square };
 
-    private static Result<Requirement?> ReadFile(string path, IRequirementText text)
+    private static Result<Requirement?> ReadFile(string path)
     {
         try
         {
-            return text.Read(File.ReadAllText(path), path).Map<Requirement?>(requirement => requirement);
+            return RequirementFile.Read(File.ReadAllText(path), path).Map<Requirement?>(requirement => requirement);
         }
         catch (Exception error) when (error is IOException or UnauthorizedAccessException or ArgumentException or NotSupportedException)
         {

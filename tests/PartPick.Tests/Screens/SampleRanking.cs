@@ -36,7 +36,7 @@ internal static class SampleRanking
         Covered = 4_123_000,
         Fit = 8200,
         Candidates = [.. candidates],
-        Front = [.. candidates.Where(candidate => candidate.OnFront)],
+        Front = [.. candidates.Where(candidate => candidate.OnFront).Select(candidate => candidate.Id)],
         NearestMisses = [],
         Rejections = ImmutableDictionary<Limit, double>.Empty,
         IsComplete = true,
@@ -77,12 +77,12 @@ internal static class SampleRanking
             Strays = Board.TwoLayer.Strays, SupplyVolts = 5,
         };
         PartUse[] resistors = choice.Series is { } series
-            ? [new("R1", "feedback resistor", Resistor(feedback), "1 MΩ"), new("R2", "damping resistor Rs", series, "1 kΩ")]
-            : [new("R1", "feedback resistor", Resistor(feedback), hertz < 1e5 ? "10 MΩ" : "1 MΩ")];
+            ? [new("R1", "feedback Rf", Resistor(feedback), "1 MΩ"), new("R2", "damping Rs", series, "1 kΩ")]
+            : [new("R1", "feedback Rf", Resistor(feedback), hertz < 1e5 ? "10 MΩ" : "1 MΩ")];
         return Make(choice, circuit,
         [
             new("C1", "load capacitor", choice.C1, Value(choice.C1)), new("C2", "load capacitor", choice.C2, Value(choice.C2)),
-            new("C3", "decoupling capacitor", Capacitor("C-100n"), "100 nF"), .. resistors,
+            new("C3", "decoupling", Capacitor("C-100n"), "100 nF"), .. resistors,
             new("U1", "amplifier", amplifier, ""), new("Y1", "crystal", crystal, Values.ValueText.FormatExact(hertz, Values.Dimension.Frequency)),
         ]);
     }
@@ -106,7 +106,7 @@ internal static class SampleRanking
         return Make(choice, circuit,
         [
             new("C1", "load capacitor", choice.C1, "100 pF"), new("C2", "load capacitor", choice.C2, "100 pF"),
-            new("C3", "output coupling capacitor", Capacitor("C-10n-"), "10 nF"), new("C4", "decoupling capacitor", Capacitor("C-100n"), "100 nF"),
+            new("C3", "output coupling", Capacitor("C-10n-"), "10 nF"), new("C4", "decoupling", Capacitor("C-100n"), "100 nF"),
             new("Q1", "amplifier", transistor, ""), new("R1", "base resistor to the supply", choice.BaseTop, "100 kΩ"),
             new("R2", "base resistor to ground", choice.BaseBottom, "100 kΩ"), new("R3", "emitter resistor", choice.Emitter, "2.2 kΩ"),
             new("Y1", "crystal", crystal, "4 MHz"),

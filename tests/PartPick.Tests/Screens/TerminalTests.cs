@@ -1,7 +1,6 @@
 using PartPick.Catalog;
 using PartPick.Screens;
 using PartPick.Selection;
-using PartPick.Values;
 
 namespace PartPick.Tests.Screens;
 
@@ -34,11 +33,13 @@ public class TerminalTests
         try
         {
             string path = Path.Combine(directory, "catalog.db");
-            var text = new OutputOnly();
-            Assert.Null(new RequirementKeeper(path, text).Recall().Value);
-            var keeper = new RequirementKeeper(path, text);
-            Assert.Null(keeper.Keep(SampleRanking.Wanted with { OutputHz = 4242 }));
-            Assert.Equal(4242, new RequirementKeeper(path, text).Recall().Value!.OutputHz);
+            Assert.Null(new RequirementKeeper(path).Recall().Value);
+            var keeper = new RequirementKeeper(path);
+            Requirement wanted = SampleRanking.Wanted with { Name = "logger", OutputHz = 4242, CostLimit = null, AllowDisturbance = true };
+            Assert.Null(keeper.Keep(wanted));
+            Requirement recalled = new RequirementKeeper(path).Recall().Value!;
+            Assert.Equal(wanted with { Circuits = recalled.Circuits }, recalled);
+            Assert.Equal(wanted.Circuits, recalled.Circuits);
             Assert.True(CatalogStore.Load(path).IsOk);
         }
         finally
@@ -48,14 +49,14 @@ public class TerminalTests
     }
 
     [Fact]
+    public void Without_a_terminal_it_ends_with_status_2()
+    {
+        // The runner of the tests takes standard output away, as a pipe does.
+        Assert.True(Console.IsOutputRedirected || Console.IsInputRedirected);
+        Assert.Equal(2, ScreenHost.Run("/nowhere/catalog.db", null));
+    }
+
+    [Fact]
     public void Ascii_spells_what_it_cannot_show() =>
         Assert.Equal("+/-4.7 kohm at 25 degC, 3 uW ?", Glyphs.Ascii.Show("±4.7 kΩ at 25 °C, 3 µW 水"));
-
-    private sealed class OutputOnly : IRequirementText
-    {
-        public Result<Requirement> Read(string text, string where) =>
-            ValueText.Parse(text, Dimension.Frequency, where).Map(hertz => new Requirement { OutputHz = hertz });
-
-        public string Write(Requirement requirement) => ValueText.FormatExact(requirement.OutputHz, Dimension.Frequency);
-    }
 }

@@ -6,8 +6,7 @@ namespace PartPick.Screens;
 
 /// <summary>Keeps the last requirement in the catalogue's file. May be called from any thread.</summary>
 /// <param name="catalogPath">Path of the catalogue's file.</param>
-/// <param name="text">The requirement as text.</param>
-public sealed class RequirementKeeper(string catalogPath, IRequirementText text)
+public sealed class RequirementKeeper(string catalogPath)
 {
     private const string Setting = "requirement";
 
@@ -21,7 +20,7 @@ public sealed class RequirementKeeper(string catalogPath, IRequirementText text)
         Result<string?> kept = CatalogStore.ReadSetting(catalogPath, Setting);
         return kept.Then(json => json is null
             ? Result.Ok<Requirement?>(null)
-            : text.Read(json, "the requirement that was kept").Map<Requirement?>(requirement => requirement));
+            : RequirementFile.Read(json, "the requirement that was kept").Map<Requirement?>(requirement => requirement));
     }
 
     /// <summary>Keeps a requirement, if it is another one than before.</summary>
@@ -29,7 +28,7 @@ public sealed class RequirementKeeper(string catalogPath, IRequirementText text)
     /// <returns>The problem; null when it is kept.</returns>
     public Problem? Keep(Requirement requirement)
     {
-        string json = text.Write(requirement);
+        string json = RequirementFile.Write(requirement).ToJsonString();
         lock (_lock)
         {
             if (json == _kept)

@@ -1,0 +1,14 @@
+namespace PartPick.Physics;
+
+/// <summary>How finely a steady state near a known one is resolved.</summary>
+public enum Fineness
+{
+    /// <summary>As finely as the known state: good for differences between circuits alike.</summary>
+    Same,
+
+    /// <summary>With twice the harmonics of the known state.</summary>
+    OneFiner,
+
+    /// <summary>Until twice the harmonics change nothing that matters, like a state sought from nothing.</summary>
+    Converged,
+}

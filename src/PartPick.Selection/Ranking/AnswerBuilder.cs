@@ -1,0 +1,61 @@
+using System.Collections.Immutable;
+
+namespace PartPick.Selection.Search;
+
+/// <summary>Makes the answer of what a run has found: the listed candidates are analysed in full, from nothing.</summary>
+internal sealed class AnswerBuilder(SearchRun run, RankingOptions options)
+{
+    private const int BestSoFarListed = 12;
+    private const int NearestListed = 10;
+
+    /// <summary>Builds the answer.</summary>
+    public RankingResult Build(bool complete, double elapsedSeconds)
+    {
+        Requirement requirement = run.Space.Requirement;
+        decimal cheapest = run.Leaders.Cheapest ?? 0;
+        ImmutableArray<FitPoint> front = [.. run.Leaders.Order(run.Front.Points, cheapest)];
+        var onFront = front.Select(point => point.Id).ToHashSet(StringComparer.Ordinal);
+        IEnumerable<FitPoint> listed = options.Front ? front : options.All ? run.Leaders.Order(Snapshot(), cheapest) : run.Leaders.Best();
+        int most = complete ? options.Top ?? int.MaxValue : Math.Min(options.Top ?? BestSoFarListed, BestSoFarListed);
+        var builder = new CandidateBuilder(requirement, run.Space.Market);
+        FitPoint[] points = [.. listed.Take(most)];
+        Candidate[] candidates =
+        [
+            .. points.AsParallel().AsOrdered().WithDegreeOfParallelism(complete ? Environment.ProcessorCount : 1).Select(point =>
+                builder.Build(point.Choice)! with
+                {
+                    Score = Score.Of(requirement, point.ErrorRatio, point.Margin, point.Cost, cheapest),
+                    OnFront = onFront.Contains(point.Id),
+                }),
+        ];
+        ImmutableArray<Candidate> nearest = complete && points.Length == 0
+            ? [.. run.NearMisses.Nearest(3 * NearestListed)
+                .Select(builder.Build).OfType<Candidate>()
+                .OrderBy(Distance).ThenBy(candidate => candidate.Id, StringComparer.Ordinal)
+                .Take(NearestListed)]
+            : [];
+        return new RankingResult
+        {
+            Requirement = requirement,
+            Combinations = run.Space.Combinations,
+            Covered = complete ? run.Space.Combinations : run.Tally.Covered,
+            Fit = complete && options.All ? run.Tally.Fit : null,
+            Candidates = [.. candidates],
+            Front = [.. front.Select(point => point.Id)],
+            NearestMisses = nearest,
+            Rejections = run.Tally.Rejections(),
+            IsComplete = complete,
+            ElapsedSeconds = elapsedSeconds,
+        };
+    }
+
+    private static double Distance(Candidate candidate) => candidate.Misses.Sum(miss => Math.Log(Math.Max(miss.Ratio, 1)));
+
+    private FitPoint[] Snapshot()
+    {
+        lock (run.All)
+        {
+            return [.. run.All];
+        }
+    }
+}

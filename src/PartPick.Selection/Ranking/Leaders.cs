@@ -1,0 +1,122 @@
+namespace PartPick.Selection.Search;
+
+/// <summary>
+/// The best scores of the groups found so far, to leave out what can no longer be listed. The cheapest fit cost, by which
+/// scores are scaled, is known only between two bounds; a score is linear in its inverse, so what loses at both bounds loses.
+/// </summary>
+internal sealed class Leaders
+{
+    private const double Tie = 1e-9;
+    private readonly Requirement _requirement;
+    private readonly int? _listed;
+    private readonly decimal _floor;
+    private readonly Lock _gate = new();
+    private readonly Dictionary<FamilyMember, List<FitPoint>> _points = [];
+    private decimal? _cheapest;
+    private (double AtCheapest, double AtFloor)? _threshold;
+
+    /// <param name="requirement">What is needed.</param>
+    /// <param name="listed">Number of groups listed; null for all.</param>
+    /// <param name="floor">A cost that no combination undercuts.</param>
+    public Leaders(Requirement requirement, int? listed, decimal floor)
+    {
+        _requirement = requirement;
+        _listed = listed;
+        _floor = floor;
+    }
+
+    /// <summary>Cheapest fit cost so far; null before the first fit combination.</summary>
+    public decimal? Cheapest
+    {
+        get
+        {
+            lock (_gate)
+            {
+                return _cheapest;
+            }
+        }
+    }
+
+    /// <summary>Adds a fit combination to its group.</summary>
+    public void Add(FamilyMember member, FitPoint point)
+    {
+        lock (_gate)
+        {
+            if (!_points.TryGetValue(member, out List<FitPoint>? points))
+            {
+                _points.Add(member, points = []);
+            }
+
+            if (points.Any(other => other.Dominates(point.ErrorRatio, point.Margin, point.Cost)))
+            {
+                return;
+            }
+
+            points.RemoveAll(other => point.Dominates(other.ErrorRatio, other.Margin, other.Cost));
+            points.Add(point);
+            _cheapest = _cheapest is { } cheapest ? Math.Min(cheapest, point.Cost) : point.Cost;
+            _threshold = null;
+        }
+    }
+
+    /// <summary>Whether figures no better than these could still make the best of a listed group.</summary>
+    public bool MayLead(FamilyMember member, double errorRatio, double margin, decimal cost)
+    {
+        lock (_gate)
+        {
+            if (_cheapest is not { } cheapest)
+            {
+                return true;
+            }
+
+            double atCheapest = Score.Of(_requirement, errorRatio, margin, cost, cheapest) - Tie;
+            double atFloor = Score.Of(_requirement, errorRatio, margin, cost, _floor) - Tie;
+            if (_points.TryGetValue(member, out List<FitPoint>? points))
+            {
+                foreach (FitPoint point in points)
+                {
+                    if (Of(point, cheapest) < atCheapest && Of(point, _floor) < atFloor)
+                    {
+                        return false;
+                    }
+                }
+            }
+
+            if (_listed is not { } listed || _points.Count < listed || _points.ContainsKey(member) && _points.Count == listed)
+            {
+                return true;
+            }
+
+            _threshold ??= Threshold(listed, cheapest);
+            return atCheapest <= _threshold.Value.AtCheapest || atFloor <= _threshold.Value.AtFloor;
+        }
+    }
+
+    /// <summary>The best of each group, in order, for the cheapest fit cost found.</summary>
+    public IReadOnlyList<FitPoint> Best()
+    {
+        lock (_gate)
+        {
+            decimal cheapest = _cheapest ?? 0;
+            return [.. Order(_points.Values.Select(points => Order(points, cheapest).First()), cheapest)];
+        }
+    }
+
+    /// <summary>The order of a list: by score, then error, cost and id.</summary>
+    public IOrderedEnumerable<FitPoint> Order(IEnumerable<FitPoint> points, decimal cheapest) => points
+        .OrderBy(point => Of(point, cheapest))
+        .ThenBy(point => point.ErrorRatio)
+        .ThenBy(point => point.Cost)
+        .ThenBy(point => point.Id, StringComparer.Ordinal);
+
+    // A set of as many groups as are listed, best at the cheapest cost; what is worse than all of them at both bounds is not listed.
+    private (double AtCheapest, double AtFloor) Threshold(int listed, decimal cheapest)
+    {
+        var chosen = _points.Values.Select(points => points.MinBy(point => Of(point, cheapest))!)
+            .OrderBy(point => Of(point, cheapest)).Take(listed).ToList();
+        return (chosen.Max(point => Of(point, cheapest)), chosen.Max(point => Of(point, _floor)));
+    }
+
+    private double Of(FitPoint point, decimal cheapest) =>
+        Score.Of(_requirement, point.ErrorRatio, point.Margin, point.Cost, cheapest);
+}

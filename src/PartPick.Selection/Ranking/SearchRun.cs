@@ -1,0 +1,191 @@
+using System.Collections.Immutable;
+using System.Diagnostics;
+using PartPick.Catalog;
+
+namespace PartPick.Selection.Search;
+
+/// <summary>One run of the search: what its threads share.</summary>
+internal sealed class SearchRun
+{
+    private readonly RankingOptions _options;
+    private readonly IProgress<RankingResult>? _progress;
+    private readonly Stopwatch _watch = Stopwatch.StartNew();
+    private readonly Lock _reporting = new();
+    private double _nextReport = 0.1;
+    private int _next;
+
+    public SearchRun(SearchSpace space, RankingOptions options, IProgress<RankingResult>? progress, CancellationToken cancellation)
+    {
+        Space = space;
+        _options = options;
+        _progress = progress;
+        Cancellation = cancellation;
+        Prices = new Prices(space);
+        decimal cheapest = space.Families.SelectMany(family => family.Members).Select(member => member.BaseCost).DefaultIfEmpty(0).Min();
+        Floor = Math.Max(cheapest + Prices.CheapestOfAllPairs(), 1e-6m);
+        Leaders = new Leaders(space.Requirement, options.Front ? 1 : options.Top, Floor);
+        foreach ((Limit limit, double count) in space.Rejections)
+        {
+            Tally.Reject(limit, count);
+            Tally.Cover(count);
+        }
+    }
+
+    /// <summary>What is searched.</summary>
+    public SearchSpace Space { get; }
+
+    /// <summary>Ends the search.</summary>
+    public CancellationToken Cancellation { get; }
+
+    /// <summary>Costs.</summary>
+    public Prices Prices { get; }
+
+    /// <summary>A cost that no combination undercuts.</summary>
+    public decimal Floor { get; }
+
+    /// <summary>The best of each group.</summary>
+    public Leaders Leaders { get; }
+
+    /// <summary>The front.</summary>
+    public Front Front { get; } = new();
+
+    /// <summary>Every fit combination, where all are wanted.</summary>
+    public List<FitPoint> All { get; } = [];
+
+    /// <summary>The choices that came nearest.</summary>
+    public NearMisses NearMisses { get; } = new();
+
+    /// <summary>Counts.</summary>
+    public Tally Tally { get; } = new();
+
+    /// <summary>Whether figures no better than these could still change the answer.</summary>
+    public bool MayEnter(FamilyMember member, double errorRatio, double margin, decimal cost) =>
+        _options.All || Leaders.MayLead(member, errorRatio, margin, cost) || !Front.Beats(errorRatio, margin, cost);
+
+    /// <summary>Adds a fit combination.</summary>
+    public void Add(FamilyMember member, FitPoint point)
+    {
+        Tally.CountFit();
+        Leaders.Add(member, point);
+        Front.Add(point);
+        if (_options.All)
+        {
+            lock (All)
+            {
+                All.Add(point);
+            }
+        }
+    }
+
+    /// <summary>The choice of parts of a combination.</summary>
+    public static CandidateParts Choice(CircuitFamily family, FamilyMember member, int option, CapacitorPart c1, CapacitorPart c2)
+    {
+        AmplifierOption resistors = family.Options[option];
+        return new CandidateParts
+        {
+            Circuit = family.Kind,
+            Crystal = member.Crystal,
+            Amplifier = family.Amplifier,
+            Tap = member.Tap,
+            C1 = c1,
+            C2 = c2,
+            Series = resistors.Series,
+            BaseTop = resistors.BaseTop,
+            BaseBottom = resistors.BaseBottom,
+            Emitter = resistors.Emitter,
+        };
+    }
+
+    /// <summary>Searches all families, the most promising first, on several threads.</summary>
+    public RankingResult Run()
+    {
+        ImmutableArray<CircuitFamily> order =
+        [
+            .. Space.Families
+                .OrderBy(Promise)
+                .ThenBy(family => family.Amplifier.Id, StringComparer.Ordinal)
+                .ThenBy(family => family.Members[0].Crystal.Id, StringComparer.Ordinal),
+        ];
+        int threads = Math.Clamp(_options.Threads ?? Environment.ProcessorCount, 1, Math.Max(1, order.Length));
+        var workers = new Task[threads - 1];
+        for (int i = 0; i < workers.Length; i++)
+        {
+            workers[i] = Task.Run(() => Work(order), CancellationToken.None);
+        }
+
+        try
+        {
+            Work(order);
+        }
+        finally
+        {
+            Interlocked.Exchange(ref _next, order.Length);
+            Task.WaitAll(workers, CancellationToken.None);
+        }
+
+        return new AnswerBuilder(this, _options).Build(complete: true, _watch.Elapsed.TotalSeconds);
+    }
+
+    /// <summary>Reports a best-so-far now and then.</summary>
+    public void Report()
+    {
+        if (_progress is null || _watch.Elapsed.TotalSeconds < Volatile.Read(ref _nextReport) || !_reporting.TryEnter())
+        {
+            return;
+        }
+
+        try
+        {
+            _progress.Report(new AnswerBuilder(this, _options).Build(complete: false, _watch.Elapsed.TotalSeconds));
+            Volatile.Write(ref _nextReport, _watch.Elapsed.TotalSeconds + 0.3);
+        }
+        finally
+        {
+            _reporting.Exit();
+        }
+    }
+
+    private void Work(ImmutableArray<CircuitFamily> families)
+    {
+        while (true)
+        {
+            int place = Interlocked.Increment(ref _next) - 1;
+            if (place >= families.Length)
+            {
+                return;
+            }
+
+            Search(families[place]);
+            Report();
+        }
+    }
+
+    private void Search(CircuitFamily family)
+    {
+        var scan = new FamilyScan(Space, family, Cancellation);
+        scan.Run();
+        Tally.Reject(Limit.Margin, scan.MarginRejections * family.Members.Length);
+        Tally.Reject(Limit.Error, scan.ErrorRejections * family.Members.Length);
+        foreach (FamilyMember member in family.Members)
+        {
+            if (scan.Estimates.Count == 0 && scan.BestMarginMiss is { } miss)
+            {
+                NearMisses.Offer(
+                    member,
+                    Space.Requirement.Margin / Math.Max(miss.Margin, 1e-3),
+                    () => Choice(family, member, miss.Option, Prices.Tightest(miss.C1), Prices.Tightest(miss.C2)));
+            }
+
+            new MemberSearch(this, family, member).Run(scan.Estimates);
+            Tally.Cover(Space.CapacitorPairs * family.Options.Length);
+        }
+    }
+
+    private double Promise(CircuitFamily family)
+    {
+        Requirement requirement = Space.Requirement;
+        return family.Members.Min(member =>
+            requirement.Weights.Error * member.TermsRatio / requirement.BudgetRatio
+            + requirement.Weights.Cost * (double)(member.BaseCost / Floor));
+    }
+}
