@@ -266,7 +266,7 @@ public sealed class MainModel
         ImmutableArray<Line> page = CircuitPage.Draw(candidate, List.Result!, width, _glyphs);
         ImmutableArray<Line> shown = _circuitScroll.Cut(page, room - 1);
         string number = FormattableString.Invariant($"{List.At + 1} of {List.Candidates.Length}");
-        return [Rule(CircuitPane.Title(candidate), _circuitScroll.HasMore ? number + ", more below" : number, width), .. shown];
+        return [Rule(CircuitPane.ShortTitle(candidate), _circuitScroll.HasMore ? number + ", more below" : number, width), .. shown];
     }
 
     private ImmutableArray<Line> KeysBody(int width, int room)
@@ -308,7 +308,9 @@ public sealed class MainModel
         LineBuilder line = new LineBuilder(_glyphs).Add(" ");
         if (Wanted.Problem is { } problem && Place == Place.Sentence)
         {
-            return line.Column("! " + problem, width - 1, Tone.Warning).Build();
+            string whole = _glyphs.Show("! " + problem);
+            string fits = whole.Length < width ? whole : $"! {problem.Where}: fits {problem.Fits}";
+            return line.Column(fits, width - 1, Tone.Warning).Build();
         }
 
         if (_notice is { } notice)

@@ -26,7 +26,14 @@ internal sealed class FakeRanking : IRankingService
         return Holds ? answer.Task : Task.FromResult(Answer(requirement));
     }
 
-    public void Finish(int number) => _asked[number].Answer.SetResult(Answer(_asked[number].Requirement));
+    /// <summary>Gives an answer that was held; when this returns, it has arrived.</summary>
+    public void Finish(int number)
+    {
+        SynchronizationContext? before = SynchronizationContext.Current;
+        SynchronizationContext.SetSynchronizationContext(null);
+        _asked[number].Answer.SetResult(Answer(_asked[number].Requirement));
+        SynchronizationContext.SetSynchronizationContext(before);
+    }
 
     public void Report(int number, RankingResult result) => _asked[number].Progress.Report(result);
 }

@@ -17,11 +17,11 @@ internal static class SampleRanking
         StartUpTimeSeconds = 0.05, Builds = 200, CostLimit = 2.5m,
     };
 
-    public static Candidate Counter { get; } = Gate(CircuitKind.Counter, "CNT-14-HC", 4.096e6, 12, "C-027p", "C-033p", true);
+    public static Candidate Counter { get; } = Gate(CircuitKind.Counter, "CNT-14-HC", 4.096e6, 12, "C-015p", "C-018p", true);
 
-    public static Candidate SecondCounter { get; } = Gate(CircuitKind.Counter, "CNT-14-HC", 16.384e6, 14, "C-022p", "C-022p", true);
+    public static Candidate SecondCounter { get; } = Gate(CircuitKind.Counter, "CNT-14-HC", 16.384e6, 14, "C-010p", "C-008p2", true);
 
-    public static Candidate Undamped { get; } = Gate(CircuitKind.Gate, "INV-HC-U-1", 4e6, 0, "C-022p", "C-022p", false);
+    public static Candidate Undamped { get; } = Gate(CircuitKind.Gate, "INV-HC-U-1", 4e6, 0, "C-020p", "C-018p", false);
 
     public static Candidate Port { get; } = Gate(CircuitKind.Port, "MCU-KHZ-C", 32768, 0, "C-012p", "C-012p", false);
 
