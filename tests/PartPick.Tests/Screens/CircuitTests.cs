@@ -62,8 +62,9 @@ public class CircuitTests
         Requirement free = SampleRanking.Wanted with { StartUpTimeSeconds = null, CostLimit = null };
         ImmutableArray<LimitUse> uses = LimitUses.Of(SampleRanking.Counter with { RatedDriveWatts = null }, free);
         Assert.All(uses[2..], use => Assert.Null(use.Used));
-        Assert.Equal("not rated", uses[2].Against);
-        Assert.Equal("no limit", uses[3].Against);
+        Assert.EndsWith("W, not rated", uses[2].Against, StringComparison.Ordinal);
+        Assert.Equal("ms, no limit", uses[3].Against);
+        Assert.Equal("EUR, no limit", uses[4].Against);
         Assert.All(Bars.Draw(uses, 80, Glyphs.Drawn)[2..], line => Assert.DoesNotContain("[", line.Text, StringComparison.Ordinal));
     }
 

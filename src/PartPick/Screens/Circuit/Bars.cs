@@ -5,7 +5,7 @@ namespace PartPick.Screens;
 /// <summary>Draws limits as quiet bars.</summary>
 public static class Bars
 {
-    private const int WideCells = 16;
+    private const int Cells = 14;
 
     /// <summary>A bar: used cells, free cells, and an exclamation mark in the last cell where the limit is broken.</summary>
     /// <param name="used">The used part; null draws an empty stretch.</param>
@@ -38,10 +38,10 @@ public static class Bars
         ArgumentNullException.ThrowIfNull(glyphs);
         bool narrow = width < 70;
         LimitUse? nearest = LimitUses.Nearest(uses);
-        string[] figures = Figures.LineUp([.. uses.Select(use => Number(use.Figure))]);
-        int figureWidth = uses.Select((use, i) => figures[i].Length + Unit(use.Figure).Length).Max();
+        string[] figures = Figures.LineUp([.. uses.Select(use => use.Figure)]);
+        int figureWidth = figures[0].Length;
         int againstWidth = uses.Max(use => glyphs.Show(use.Against).Length);
-        int cells = narrow ? Math.Clamp(width - 15 - figureWidth - againstWidth, 4, WideCells) : WideCells;
+        int cells = narrow ? Math.Clamp(width - 15 - figureWidth - againstWidth, 4, Cells) : width < 100 ? Cells : 2 * Cells;
         var lines = ImmutableArray.CreateBuilder<Line>();
         for (int i = 0; i < uses.Length; i++)
         {
@@ -50,11 +50,11 @@ public static class Bars
             LineBuilder line = new LineBuilder(glyphs).Add(" ").Column(use.Word, 9, tone)
                 .Add(use.Used is null ? " " : "[", Tone.Quiet).Add(Bar(use.Used, cells, glyphs), tone)
                 .Add(use.Used is null ? "  " : "] ", Tone.Quiet)
-                .Column(figures[i] + Unit(use.Figure), figureWidth).Add(" ").Column(use.Against, againstWidth);
+                .Add(figures[i]).Add(" ").Column(use.Against, againstWidth);
             if (narrow)
             {
                 lines.Add(line.Build());
-                lines.Add(new LineBuilder(glyphs).To(10).Words(use.Because, width - 11, Tone.Quiet).Build());
+                lines.Add(new LineBuilder(glyphs).To(4).Words(use.Because, width - 4, Tone.Quiet).Build());
                 continue;
             }
 
@@ -63,17 +63,5 @@ public static class Bars
         }
 
         return lines.ToImmutable();
-    }
-
-    private static string Number(string figure)
-    {
-        int space = figure.IndexOf(' ', StringComparison.Ordinal);
-        return space < 0 ? figure : figure[..space];
-    }
-
-    private static string Unit(string figure)
-    {
-        int space = figure.IndexOf(' ', StringComparison.Ordinal);
-        return space < 0 ? "" : figure[space..];
     }
 }

@@ -100,7 +100,7 @@ public static class LimitUses
         string boards = FormattableString.Invariant($"each, for {requirement.Builds} boards");
         if (requirement.CostLimit is not { } limit || limit == 0)
         {
-            return Unlimited(LimitName.Cost, "cost", Figures.Money(candidate.Cost), candidate.Currency + ", no limit", boards);
+            return Unlimited(LimitName.Cost, "cost", Figures.Money(candidate.Cost) + " " + candidate.Currency, "no limit", boards);
         }
 
         return new LimitUse
@@ -116,8 +116,9 @@ public static class LimitUses
         Name = name, Word = word, Figure = "-", Against = "", Because = why, Used = null,
     };
 
-    private static LimitUse Unlimited(LimitName name, string word, string figure, string against, string because) => new()
+    // The unit goes with the words, so that the numbers of all limits stand in one column.
+    private static LimitUse Unlimited(LimitName name, string word, string value, string against, string because) => new()
     {
-        Name = name, Word = word, Figure = figure, Against = against, Because = because, Used = null,
+        Name = name, Word = word, Figure = value.Split(' ')[0], Against = string.Join(' ', value.Split(' ').Skip(1)) + ", " + against, Because = because, Used = null,
     };
 }
