@@ -36,24 +36,19 @@ internal sealed class AmplitudeScan
 
     private void Run()
     {
-        if (_balance.StartSaturated(_resistance) is { } saturated)
-        {
-            RunDown(saturated);
-        }
-
-        if (Running is null)
+        if (_balance.StartSaturated(_resistance) is not { } saturated || !RunDown(saturated))
         {
             RunUp();
         }
     }
 
     // A steep limiter holds its own input still at small amplitudes (no single zero crossing): only the limited branch is followed.
-    private void RunDown(double peak)
+    private bool RunDown(double peak)
     {
         double ratio = LargestRatio;
         if (!_balance.SolveAt(peak))
         {
-            return;
+            return false;
         }
 
         double linear = _balance.LinearPeakAmps;
@@ -64,10 +59,13 @@ internal sealed class AmplitudeScan
             _before = [.. _balance.State];
             if (!_balance.SolveAt(peak / ratio))
             {
-                if (!StepBack(peak, ref ratio))
+                ratio = Math.Sqrt(ratio);
+                if (ratio < SmallestRatio)
                 {
-                    return;
+                    return true;
                 }
+
+                _before.CopyTo(_balance.State, 0);
 
                 continue;
             }
@@ -85,13 +83,15 @@ internal sealed class AmplitudeScan
 
             if (next < 0.5 * LargestNegativeOhms && nextSlope > 0)
             {
-                return;
+                return true;
             }
 
             peak /= ratio;
             ratio = Math.Min(LargestRatio, ratio * ratio);
             (negative, slope) = (next, nextSlope);
         }
+
+        return true;
     }
 
     private AmplitudeBalance Fresh()
