@@ -1,15 +1,77 @@
+using PartPick.Catalog;
+using PartPick.Selection;
+using PartPick.Values;
+
 namespace PartPick.Screens;
 
 /// <summary>Opens the terminal interface.</summary>
-internal static class ScreenHost
+public static class ScreenHost
 {
-    /// <summary>Runs the interface until the user leaves it.</summary>
-    /// <param name="catalogPath">Path of the catalogue.</param>
-    /// <param name="requirementPath">Requirement to open with; null for the last one.</param>
-    /// <returns>The exit status.</returns>
+    /// <summary>Runs the terminal interface until it is left.</summary>
+    /// <param name="catalogPath">Path of the catalogue's file.</param>
+    /// <param name="requirementPath">A requirement file to begin with; null to go on with the one that was kept.</param>
+    /// <returns>0; 2 where there is no terminal or the file is wrong; 3 where the catalogue cannot be used.</returns>
     public static int Run(string catalogPath, string? requirementPath)
     {
-        Console.Error.WriteLine("partpick: no terminal to draw on; fits a command such as partpick rank (see partpick --help)");
-        return ExitStatus.WrongInput;
+        if (Console.IsInputRedirected || Console.IsOutputRedirected)
+        {
+            return Fail(ExitStatus.WrongInput, "the screens need a terminal; the commands work without one (partpick --help)");
+        }
+
+        try
+        {
+            return Open(catalogPath, requirementPath);
+        }
+        catch (Exception error)
+        {
+            // The terminal is back as it was: what went wrong is one line below the prompt.
+            return Fail(ExitStatus.Fault, $"a fault of the program: {error.GetType().Name}: {error.Message}");
+        }
+    }
+
+    private static int Open(string catalogPath, string? requirementPath)
+    {
+        Result<PartsCatalog> catalog = CatalogStore.Load(catalogPath);
+        if (!catalog.IsOk)
+        {
+            return Fail(ExitStatus.NoCatalog, catalog.Problem.ToString());
+        }
+
+        var keeper = new RequirementKeeper(catalogPath);
+        Result<Requirement?> start = requirementPath is null ? keeper.Recall() : ReadFile(requirementPath);
+        if (!start.IsOk && requirementPath is not null)
+        {
+            return Fail(ExitStatus.WrongInput, start.Problem.ToString());
+        }
+
+        string? notice = !start.IsOk ? "! " + start.Problem
+            : start.Value is null ? "Press e and say what is wanted; ? shows all keys."
+            : null;
+        var run = new TerminalRun(
+            new CatalogRanking(catalog.Value), TerminalTraits.Of(Environment.GetEnvironmentVariable),
+            requirement => keeper.Keep(requirement));
+        Requirement end = run.Show(start.ValueOr(null) ?? First, notice);
+        return keeper.Keep(end) is { } problem ? Fail(ExitStatus.NoCatalog, problem.ToString()) : ExitStatus.Done;
+    }
+
+    /// <summary>The sentence of the very first time.</summary>
+    private static Requirement First => new() { OutputHz = 1000, Waveform = Waveform.Square };
+
+    private static Result<Requirement?> ReadFile(string path)
+    {
+        try
+        {
+            return RequirementFile.Read(File.ReadAllText(path), path).Map<Requirement?>(requirement => requirement);
+        }
+        catch (Exception error) when (error is IOException or UnauthorizedAccessException or ArgumentException or NotSupportedException)
+        {
+            return Result.Fail<Requirement?>(path, "cannot be read: " + error.Message, "a requirement file");
+        }
+    }
+
+    private static int Fail(int status, string line)
+    {
+        Console.Error.WriteLine("partpick: " + line.ReplaceLineEndings(" "));
+        return status;
     }
 }

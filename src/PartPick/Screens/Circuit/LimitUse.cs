@@ -1,0 +1,45 @@
+namespace PartPick.Screens;
+
+/// <summary>The limits that have a picture.</summary>
+public enum LimitName
+{
+    /// <summary>Frequency error.</summary>
+    Error,
+
+    /// <summary>Start-up margin.</summary>
+    Margin,
+
+    /// <summary>Drive level.</summary>
+    Drive,
+
+    /// <summary>Start-up time.</summary>
+    StartUp,
+
+    /// <summary>Cost.</summary>
+    Cost,
+}
+
+/// <summary>A limit and the part of it that is used up.</summary>
+public sealed record LimitUse
+{
+    /// <summary>Which limit.</summary>
+    public required LimitName Name { get; init; }
+
+    /// <summary>Its word on the screen.</summary>
+    public required string Word { get; init; }
+
+    /// <summary>The figure, without its unit where the limit has it.</summary>
+    public required string Figure { get; init; }
+
+    /// <summary>The limit in words: "of 80 ppm", "wanted 5".</summary>
+    public required string Against { get; init; }
+
+    /// <summary>What makes the figure what it is: "most: crystal over temperature".</summary>
+    public required string Because { get; init; }
+
+    /// <summary>The used part: 1 at the limit, more beyond it; null where there is no limit or no figure.</summary>
+    public required double? Used { get; init; }
+
+    /// <summary>Whether the limit is broken.</summary>
+    public bool IsBroken => Used > 1;
+}

@@ -1,0 +1,65 @@
+using System.Collections.Immutable;
+
+namespace PartPick.Screens;
+
+/// <summary>All keys, what the pictures mean, and the cautions.</summary>
+public static class KeysPage
+{
+    /// <summary>The page.</summary>
+    /// <param name="width">Width in cells.</param>
+    /// <param name="glyphs">The signs.</param>
+    public static ImmutableArray<Line> Draw(int width, Glyphs glyphs)
+    {
+        ArgumentNullException.ThrowIfNull(glyphs);
+        var lines = ImmutableArray.CreateBuilder<Line>();
+        Head("In the list");
+        Key($"{glyphs.Up} {glyphs.Down}", "the circuit before, the next one; PgUp, PgDn, Home and End go further");
+        Key("Enter", "open the whole circuit: drawing, parts, error budget, figures, warnings, reasons");
+        Key("e or Tab", "edit the wanted sentence; so does " + glyphs.Up + " on the first circuit");
+        Key("?", "this page");
+        Key("q", "quit; the wanted sentence is kept for the next time");
+        Head("In the wanted sentence");
+        Key($"{glyphs.Left} {glyphs.Right} Tab", "the value before, the next one; " + glyphs.Up + " and " + glyphs.Down + " change the line");
+        Key("type", "put in a new value; the list below answers while you type");
+        Key("Enter", "change the value that is there; Enter again keeps it");
+        Key("Space", "the next of a few choices; the first letter of a choice picks it");
+        Key("Esc", "leave the value as it was; once more, back to the list");
+        Head("In a circuit");
+        Key($"{glyphs.Up} {glyphs.Down}", "scroll; PgUp, PgDn, Home and End go further");
+        Key($"{glyphs.Left} {glyphs.Right}", "the circuit before, the next one");
+        Key("Esc", "back to the list");
+        Head("The pictures");
+        Text($"[{Bars.Bar(0.5, 8, glyphs)}] is a limit and the part of it that is used up: half of it here. " +
+            $"[{Bars.Bar(2, 8, glyphs)}] is beyond it. The margin's bar is the wanted margin over the one there is. " +
+            "The limit that is nearest has the accent, and the circuit's page names it.");
+        Text("Error is the worst case over tolerance, temperature, ageing, capacitors, strays and amplifier. Margin, drive and " +
+            "start-up are taken at their worst corners of supply, temperature, device and capacitance. Cost is for one board, " +
+            "with prices at the quantity built.");
+        Head("Cautions");
+        Text("The figures come from a model and from the parts' stated data: measure the start-up margin of the first board. " +
+            "Radiating a signal needs a licence where the law says so. Timing that safety rests on needs a review by a qualified " +
+            "person. Local codes and the law come before anything shown here.");
+        return lines.ToImmutable();
+
+        void Head(string text)
+        {
+            if (lines.Count > 0)
+            {
+                lines.Add(Line.Empty);
+            }
+
+            lines.Add(new LineBuilder(glyphs).Add(" " + text, Tone.Strong).Build());
+        }
+
+        void Key(string key, string does)
+        {
+            ImmutableArray<Line> words = Paragraph.Of(does, Math.Max(20, width - 19), glyphs);
+            for (int i = 0; i < words.Length; i++)
+            {
+                lines.Add(new LineBuilder(glyphs).Add("   ").Column(i == 0 ? key : "", 15, Tone.Strong).Add(words[i].Text).Build());
+            }
+        }
+
+        void Text(string text) => lines.AddRange(Paragraph.Of(text, width - 1, glyphs, "   ", 3));
+    }
+}

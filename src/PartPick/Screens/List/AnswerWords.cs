@@ -1,0 +1,49 @@
+using System.Globalization;
+using PartPick.Selection;
+
+namespace PartPick.Screens;
+
+/// <summary>Says how far the ranking is and what it found.</summary>
+public static class AnswerWords
+{
+    /// <summary>The words above the list.</summary>
+    /// <param name="result">The answer that is shown; null before the first one.</param>
+    /// <param name="running">Whether a better or newer answer is being computed.</param>
+    /// <param name="stale">Whether the answer shown is one to an older requirement.</param>
+    public static string Of(RankingResult? result, bool running, bool stale)
+    {
+        if (result is null)
+        {
+            return running ? "computing" : "nothing ranked yet";
+        }
+
+        if (running)
+        {
+            string far = stale || !(result.Combinations > 0)
+                ? ""
+                : string.Create(CultureInfo.InvariantCulture, $" {Math.Floor(100 * Math.Min(1, result.Covered / result.Combinations)):F0} %");
+            return "computing" + far + (stale ? "; the list is still the one before" : ", best so far");
+        }
+
+        string of = $", of {Figures.Count(result.Combinations)} combinations";
+        if (!result.Candidates.IsEmpty)
+        {
+            int count = result.Candidates.Length;
+            string circuits = string.Create(CultureInfo.InvariantCulture, $"{count} {(count == 1 ? "circuit fits" : "circuits fit")}");
+            return circuits + of;
+        }
+
+        return MostRemoved(result);
+    }
+
+    private static string MostRemoved(RankingResult result)
+    {
+        if (result.Rejections.IsEmpty)
+        {
+            return $"nothing fits, of {Figures.Count(result.Combinations)} combinations";
+        }
+
+        (Limit limit, double count) = result.Rejections.OrderByDescending(pair => pair.Value).ThenBy(pair => pair.Key).First();
+        return $"nothing fits; {Trade.Words(limit)} removed {Figures.Count(count)} of {Figures.Count(result.Combinations)}";
+    }
+}

@@ -1,0 +1,58 @@
+using System.Runtime.InteropServices;
+using PartPick.Selection;
+using Terminal.Gui.App;
+using Terminal.Gui.Drivers;
+
+namespace PartPick.Screens;
+
+/// <summary>Owns the terminal from the first to the last drawn row.</summary>
+/// <param name="ranking">What ranks.</param>
+/// <param name="traits">What the terminal can show.</param>
+/// <param name="keep">Keeps a requirement; called from any thread.</param>
+internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits, Action<Requirement> keep)
+{
+    private const string MouseReportsOff = "\x1b[?1003l\x1b[?1015l\x1b[?1006l";
+
+    /// <summary>Shows the screen until it is left.</summary>
+    /// <param name="start">The requirement to begin with.</param>
+    /// <param name="notice">A line to show until the first key; null for none.</param>
+    /// <returns>The requirement at the end.</returns>
+    public Requirement Show(Requirement start, string? notice)
+    {
+        // The terminal's own sixteen colours: they fit its background, and few of them are sent.
+        Driver.Force16Colors = true;
+        Glyphs glyphs = traits.IsUtf8 ? Glyphs.Drawn : Glyphs.Ascii;
+        Palette palette = traits.HasColour ? Palette.Coloured : Palette.Plain;
+        using IApplication app = Application.Create().Init(DriverRegistry.Names.ANSI);
+        app.Driver!.WriteRaw(MouseReportsOff);
+        using var live = new LiveRanking(ranking, action => Post(app, action), TimeProvider.System);
+        var model = new MainModel(start, live, glyphs, notice);
+        model.Settled += requirement => _ = Task.Run(() => keep(requirement));
+        using var screen = new MainScreen(model, palette);
+        using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, Leave);
+        using PosixSignalRegistration interrupt = PosixSignalRegistration.Create(PosixSignal.SIGINT, Leave);
+
+        // After a hang-up there is no terminal to give back: keep the requirement, and let the process end.
+        using PosixSignalRegistration hangUp = PosixSignalRegistration.Create(PosixSignal.SIGHUP, _ => keep(model.Wanted.Accepted));
+        app.Run(screen);
+        return model.Wanted.Accepted;
+
+        void Leave(PosixSignalContext context)
+        {
+            context.Cancel = true;
+            Post(app, app.RequestStop);
+        }
+    }
+
+    private static void Post(IApplication app, Action action)
+    {
+        try
+        {
+            app.Invoke(action);
+        }
+        catch (NotInitializedException)
+        {
+            // The screen was left in the meantime.
+        }
+    }
+}

@@ -1,0 +1,219 @@
+using PartPick.Screens;
+using PartPick.Selection;
+using Terminal.Gui.Input;
+
+namespace PartPick.Tests.Screens;
+
+public class MainScreenTests
+{
+    [Fact]
+    public void At_80_by_24_sentence_list_and_limits_are_all_in_sight()
+    {
+        using var bench = new Bench();
+        string text = bench.Text;
+        Assert.Contains("Wanted: 1 kHz square, within ±80 ppm for 5 years", text, StringComparison.Ordinal);
+        Assert.Contains("5 circuits fit, of 4.1 million combinations", text, StringComparison.Ordinal);
+        Assert.Contains("most: crystal over temperature", text, StringComparison.Ordinal);
+        Assert.Contains("least at 4.5 V, 50 °C", text, StringComparison.Ordinal);
+        Assert.Contains("of 2.50 EUR", text, StringComparison.Ordinal);
+        Assert.Contains("Enter open", text, StringComparison.Ordinal);
+        Assert.All(bench.Rows, row => Assert.True(row.Length <= 80));
+    }
+
+    [Fact]
+    public void Down_chooses_the_next_circuit_and_its_limits()
+    {
+        using var bench = new Bench();
+        Assert.Contains("counter CNT-14-HC", bench.Text, StringComparison.Ordinal);
+        bench.Press(Key.CursorDown, Key.CursorDown);
+        Assert.Equal(2, bench.Model.List.At);
+        Assert.Contains("gate INV-HC-U-1", bench.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Typing_a_value_ranks_again_and_keeps_it()
+    {
+        using var bench = new Bench();
+        bench.Press(new Key('e'));
+        bench.Type("2k");
+        Assert.Equal(2000, bench.Ranking.Asked[^1].OutputHz);
+        Assert.Equal(1000, bench.Model.Wanted.Accepted.OutputHz);
+        bench.Press(Key.Enter);
+        Assert.Equal(2000, bench.Model.Wanted.Accepted.OutputHz);
+        Assert.Contains("Wanted: 2 kHz square", bench.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Wrong_text_says_what_fits_in_one_line_and_keeps_the_old_value()
+    {
+        using var bench = new Bench();
+        bench.Press(new Key('e'));
+        bench.Type("5 Ohm");
+        bench.Press(Key.Enter);
+        Assert.Contains("! output frequency:", bench.Rows[^1], StringComparison.Ordinal);
+        Assert.Contains("fits a frequency", bench.Rows[^1], StringComparison.Ordinal);
+        Assert.Equal(1000, bench.Model.Wanted.Accepted.OutputHz);
+        bench.Press(Key.Esc);
+        Assert.Contains("Wanted: 1 kHz square", bench.Text, StringComparison.Ordinal);
+        Assert.Equal(Place.Sentence, bench.Model.Place);
+        bench.Press(Key.Esc);
+        Assert.Equal(Place.List, bench.Model.Place);
+    }
+
+    [Fact]
+    public void Escape_while_typing_goes_back_to_the_old_value_and_its_ranking()
+    {
+        using var bench = new Bench();
+        bench.Press(new Key('e'));
+        bench.Type("7");
+        Assert.Equal(7, bench.Ranking.Asked[^1].OutputHz);
+        bench.Press(Key.Esc);
+        Assert.Equal(1000, bench.Ranking.Asked[^1].OutputHz);
+    }
+
+    [Fact]
+    public void Tab_and_letters_pick_a_board()
+    {
+        using var bench = new Bench();
+        bench.Press(new Key('e'));
+        while (bench.Model.Wanted.Field.Name != "board")
+        {
+            bench.Press(Key.Tab);
+        }
+
+        bench.Press(new Key('f'));
+        Assert.Equal(Board.FourLayer, bench.Model.Wanted.Accepted.Board);
+        bench.Press(Key.Space);
+        Assert.Equal(Board.Breadboard, bench.Model.Wanted.Accepted.Board);
+        Assert.Equal(Board.Breadboard, bench.Ranking.Asked[^1].Board);
+    }
+
+    [Fact]
+    public void The_old_list_stays_until_the_new_answer_comes()
+    {
+        using var bench = new Bench();
+        bench.Ranking.Holds = true;
+        bench.Press(new Key('e'));
+        bench.Type("3");
+        Assert.Contains("computing; the list is still the one before", bench.Text, StringComparison.Ordinal);
+        Assert.Contains("CNT-14-HC", bench.Text, StringComparison.Ordinal);
+        bench.Type("2");
+        Assert.True(bench.Ranking.IsCancelled(1));
+        bench.Ranking.Answer = requirement => SampleRanking.Answer(requirement, SampleRanking.Port);
+        bench.Ranking.Finish(2);
+        bench.Press(Key.Enter);
+        Assert.Contains("1 circuit fits", bench.Text, StringComparison.Ordinal);
+        Assert.Contains("MCU-KHZ-C", bench.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_best_so_far_is_shown_with_the_computing_mark()
+    {
+        using var bench = new Bench(ranking: new FakeRanking { Holds = true });
+        Assert.Contains("computing", bench.Text, StringComparison.Ordinal);
+        bench.Ranking.Report(0, SampleRanking.Answer(SampleRanking.Wanted, SampleRanking.Counter) with { IsComplete = false, Covered = 1_400_000 });
+        bench.Press(Key.CursorDown);
+        Assert.Contains("computing 33 %, best so far", bench.Text, StringComparison.Ordinal);
+        Assert.Contains("CNT-14-HC", bench.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void When_nothing_fits_the_nearest_misses_and_the_limit_are_named()
+    {
+        using var bench = new Bench(ranking: new FakeRanking { Answer = SampleRanking.Nothing });
+        Assert.Contains("nothing fits; the frequency error removed 3.4 million of 4.1 million", bench.Text, StringComparison.Ordinal);
+        Assert.Contains("The frequency error is 74.9 ppm, the budget 20 ppm.", bench.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Enter_opens_the_whole_circuit_and_escape_comes_back_to_the_same_row()
+    {
+        using var bench = new Bench(height: 200);
+        bench.Press(Key.CursorDown, Key.Enter);
+        string text = bench.Text;
+        Assert.Contains("Wanted: 1 kHz square", text, StringComparison.Ordinal);
+        Assert.Contains("÷16384", text, StringComparison.Ordinal);
+        Assert.Contains("decoupling", text, StringComparison.Ordinal);
+        Assert.Contains("centre: nominal values at 25 °C", text, StringComparison.Ordinal);
+        Assert.Contains("negative resistance", text, StringComparison.Ordinal);
+        Assert.Contains("Why this circuit", text, StringComparison.Ordinal);
+        bench.Press(Key.Esc);
+        Assert.Equal(1, bench.Model.List.At);
+        Assert.Contains("Enter open", bench.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void The_circuit_page_scrolls_and_right_goes_to_the_next_circuit()
+    {
+        using var bench = new Bench();
+        bench.Press(Key.Enter);
+        Assert.Contains("1 of 5, more below", bench.Text, StringComparison.Ordinal);
+        bench.Press(Key.End);
+        Assert.Contains("Score 1.900", bench.Text, StringComparison.Ordinal);
+        bench.Press(Key.CursorRight);
+        Assert.Contains("2 of 5", bench.Text, StringComparison.Ordinal);
+        Assert.Contains("The motional capacitance", bench.Rows[5], StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_question_mark_shows_keys_and_cautions_and_escape_leaves_them()
+    {
+        using var bench = new Bench(height: 60);
+        bench.Press(new Key('?'));
+        Assert.Contains("licence", bench.Text, StringComparison.Ordinal);
+        Assert.Contains("qualified", bench.Text, StringComparison.Ordinal);
+        Assert.Contains("Local codes", bench.Text, StringComparison.Ordinal);
+        bench.Press(Key.Esc);
+        Assert.DoesNotContain("licence", bench.Text, StringComparison.Ordinal);
+        Assert.Equal(Place.List, bench.Model.Place);
+    }
+
+    [Fact]
+    public void At_120_columns_the_drawing_stands_beside_the_list()
+    {
+        using var bench = new Bench(120, 40);
+        Assert.Contains(bench.Rows, row => row.Contains("CNT-14-HC", StringComparison.Ordinal) && row.Contains('┤', StringComparison.Ordinal));
+        Assert.Contains("÷4096", bench.Text, StringComparison.Ordinal);
+        bench.Resize(80, 24);
+        Assert.DoesNotContain("÷4096 ", bench.Text, StringComparison.Ordinal);
+        Assert.Contains("Wanted:", bench.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void In_ascii_nothing_else_is_drawn()
+    {
+        using var bench = new Bench(120, 40, glyphs: Glyphs.Ascii);
+        for (int i = 0; i < 5; i++)
+        {
+            Assert.Empty(NotAscii(bench.Text));
+            bench.Press(Key.CursorDown);
+        }
+
+        bench.Press(Key.Enter);
+        Assert.Empty(NotAscii(bench.Text));
+        bench.Press(Key.Esc, new Key('?'));
+        Assert.Empty(NotAscii(bench.Text));
+
+        static string NotAscii(string text) => new([.. text.Where(sign => !char.IsAscii(sign))]);
+    }
+
+    [Fact]
+    public void A_tiny_screen_says_what_it_needs_and_recovers()
+    {
+        using var bench = new Bench(30, 8);
+        Assert.Contains("40 x 12", bench.Text, StringComparison.Ordinal);
+        bench.Resize(80, 24);
+        Assert.Contains("5 circuits fit", bench.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Q_ends_it_and_escape_in_the_list_does_not()
+    {
+        using var bench = new Bench();
+        bench.Press(Key.Esc);
+        Assert.False(bench.Model.IsDone);
+        Assert.Contains("q quits", bench.Rows[^1], StringComparison.Ordinal);
+        bench.Press(new Key('q'));
+        Assert.True(bench.Model.IsDone);
+    }
+}

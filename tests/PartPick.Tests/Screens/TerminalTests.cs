@@ -1,0 +1,62 @@
+using PartPick.Catalog;
+using PartPick.Screens;
+using PartPick.Selection;
+
+namespace PartPick.Tests.Screens;
+
+public class TerminalTests
+{
+    [Theory]
+    [InlineData("xterm-256color", null, true)]
+    [InlineData("linux", null, true)]
+    [InlineData("linux", "", true)]
+    [InlineData("xterm-256color", "1", false)]
+    [InlineData("vt100", null, false)]
+    [InlineData("dumb", null, false)]
+    [InlineData("xterm-mono", null, false)]
+    public void Colours_follow_the_terminal_and_NO_COLOR(string term, string? noColor, bool expected) =>
+        Assert.Equal(expected, TerminalTraits.Of(name => name switch { "TERM" => term, "NO_COLOR" => noColor, _ => null }).HasColour);
+
+    [Theory]
+    [InlineData("de_AT.UTF-8", null, null, true)]
+    [InlineData("C", "en_US.utf8", null, true)]
+    [InlineData("de_AT.UTF-8", null, "C", false)]
+    [InlineData("C", null, null, false)]
+    [InlineData(null, null, null, false)]
+    public void Signs_follow_the_first_locale_that_is_set(string? lang, string? type, string? all, bool expected) =>
+        Assert.Equal(expected, TerminalTraits.Of(name => name switch { "LANG" => lang, "LC_CTYPE" => type, "LC_ALL" => all, _ => null }).IsUtf8);
+
+    [Fact]
+    public void The_requirement_is_kept_and_recalled()
+    {
+        string directory = Directory.CreateTempSubdirectory("partpick-screens").FullName;
+        try
+        {
+            string path = Path.Combine(directory, "catalog.db");
+            Assert.Null(new RequirementKeeper(path).Recall().Value);
+            var keeper = new RequirementKeeper(path);
+            Requirement wanted = SampleRanking.Wanted with { Name = "logger", OutputHz = 4242, CostLimit = null, AllowDisturbance = true };
+            Assert.Null(keeper.Keep(wanted));
+            Requirement recalled = new RequirementKeeper(path).Recall().Value!;
+            Assert.Equal(wanted with { Circuits = recalled.Circuits }, recalled);
+            Assert.Equal(wanted.Circuits, recalled.Circuits);
+            Assert.True(CatalogStore.Load(path).IsOk);
+        }
+        finally
+        {
+            Directory.Delete(directory, true);
+        }
+    }
+
+    [Fact]
+    public void Without_a_terminal_it_ends_with_status_2()
+    {
+        // The runner of the tests takes standard output away, as a pipe does.
+        Assert.True(Console.IsOutputRedirected || Console.IsInputRedirected);
+        Assert.Equal(2, ScreenHost.Run("/nowhere/catalog.db", null));
+    }
+
+    [Fact]
+    public void Ascii_spells_what_it_cannot_show() =>
+        Assert.Equal("+/-4.7 kohm at 25 degC, 3 uW ?", Glyphs.Ascii.Show("±4.7 kΩ at 25 °C, 3 µW 水"));
+}
