@@ -38,7 +38,7 @@ public sealed class CandidateBuilder(Requirement requirement, Market market)
             drive,
             choice.Crystal.DriveLevelWatts,
             time);
-        return new Candidate
+        var candidate = new Candidate
         {
             Id = CandidateId.Of(choice),
             Choice = choice,
@@ -55,5 +55,6 @@ public sealed class CandidateBuilder(Requirement requirement, Market market)
             Misses = misses,
             Warnings = [],
         };
+        return candidate with { Warnings = CircuitWarnings.Of(candidate.Describe(requirement.OutputHz), candidate.Result) };
     }
 }
