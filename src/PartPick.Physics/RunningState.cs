@@ -32,6 +32,8 @@ public sealed class RunningState
 
     internal int Points { get; }
 
+    internal int Unknowns => _state.Length;
+
     internal bool Reverse { get; }
 
     internal bool HoldsCurrent { get; }

@@ -100,6 +100,43 @@ internal abstract class AmplitudeBalance
     /// <param name="tolerance">Largest relative residual that is left.</param>
     public bool SolveRunning(double resistanceOhms, double tolerance = Tolerance) => Newton(resistanceOhms, tolerance);
 
+    /// <summary>
+    /// Takes one Newton step towards the running state of a circuit that differs little from the one the state was solved for, and
+    /// finds the impedance there; right to the first order of the difference.
+    /// </summary>
+    public bool StepTowardsRunning(double resistanceOhms)
+    {
+        int n = Count;
+        Size(n + 1);
+        Residual(State, PeakAmps, _residual.AsSpan(0, n));
+        Impedance = ImpedanceOf(State, PeakAmps, _gradient.AsSpan(0, n), out double byLog);
+        _gradient[n] = byLog / resistanceOhms;
+        _residual[n] = Impedance.Real / resistanceOhms + 1;
+        if ((!_solver.IsFactored || _solver.Order != n + 1) && !Factor(n, n + 1, resistanceOhms))
+        {
+            return false;
+        }
+
+        for (int row = 0; row <= n; row++)
+        {
+            _step[row] = -_residual[row];
+        }
+
+        if (!_solver.Solve(_step.AsSpan(0, n + 1)))
+        {
+            return false;
+        }
+
+        for (int row = 0; row < n; row++)
+        {
+            State[row] += _step[row];
+        }
+
+        PeakAmps *= Math.Exp(_step[n]);
+        Impedance = ImpedanceOf(State, PeakAmps, _gradient.AsSpan(0, n), out _);
+        return double.IsFinite(Impedance.Imaginary);
+    }
+
     /// <summary>Output swing in volts peak to peak of the last solved state.</summary>
     public abstract double OutputSwingVolts();
 

@@ -51,27 +51,32 @@ internal static class SteadySolver
             return null;
         }
 
-        if (fineness == Fineness.Converged)
-        {
-            return Refine(branch, refinement, balance, out state) is { } refined ? FiguresOf(crystal, refined) : null;
-        }
+        return Follow(crystal, branch, refinement, balance, fineness, out state);
+    }
 
-        if (!Settle(branch, balance, roughly: true) || refinement.IsIncomplete(balance))
+    /// <summary>
+    /// The same state, sought from nothing and taken to the fineness that following would have had.
+    /// </summary>
+    public static RunningFigures? Seek<TNetwork>(
+        Crystal crystal, in TNetwork network, double siemens, Refinement refinement, RunningState near, Fineness fineness, out RunningState? state)
+        where TNetwork : struct, ILinearNetwork
+    {
+        state = null;
+        var branch = new CrystalBranch(crystal);
+        var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms, runningOnly: true);
+        AmplitudeBalance? balance = scan.Running;
+        while (balance is not null && balance.State.Length < near.Unknowns)
         {
-            return null;
-        }
-
-        if (fineness == Fineness.OneFiner)
-        {
-            balance = refinement.Finer(balance) ?? balance;
-            if (!Settle(branch, balance, roughly: true) || refinement.IsIncomplete(balance))
+            AmplitudeBalance? finer = Settle(branch, balance, roughly: true) ? refinement.Finer(balance) : null;
+            if (finer is null)
             {
                 return null;
             }
+
+            balance = finer;
         }
 
-        state = balance.Keep();
-        return FiguresOf(crystal, balance);
+        return balance is null ? null : Follow(crystal, branch, refinement, balance, fineness, out state);
     }
 
     /// <summary>
@@ -100,6 +105,45 @@ internal static class SteadySolver
         double rms = balance.PeakAmps / Math.Sqrt(2);
         state = balance.Keep();
         return new SteadyEstimate(radians / (2 * Math.PI), crystal.ResistanceOhms * rms * rms);
+    }
+
+    /// <summary>
+    /// The frequency in hertz of a circuit that differs little from one whose running state is known, right to the first order of
+    /// the difference: one Newton step from that state.
+    /// </summary>
+    public static double? FirstOrder(Crystal crystal, Refinement refinement, RunningState near)
+    {
+        var branch = new CrystalBranch(crystal);
+        return refinement.From(near) is { } balance && balance.StepTowardsRunning(crystal.ResistanceOhms)
+            ? branch.SeriesRadians * (1 + branch.OffsetForReactance(balance.Impedance.Imaginary)) / (2 * Math.PI)
+            : null;
+    }
+
+    private static RunningFigures? Follow(
+        Crystal crystal, in CrystalBranch branch, Refinement refinement, AmplitudeBalance balance, Fineness fineness, out RunningState? state)
+    {
+        state = null;
+        if (fineness == Fineness.Converged)
+        {
+            return Refine(branch, refinement, balance, out state) is { } refined ? FiguresOf(crystal, refined) : null;
+        }
+
+        if (!Settle(branch, balance, roughly: true) || refinement.IsIncomplete(balance))
+        {
+            return null;
+        }
+
+        if (fineness == Fineness.OneFiner)
+        {
+            balance = refinement.Finer(balance) ?? balance;
+            if (!Settle(branch, balance, roughly: true) || refinement.IsIncomplete(balance))
+            {
+                return null;
+            }
+        }
+
+        state = balance.Keep();
+        return FiguresOf(crystal, balance);
     }
 
     private static AmplitudeBalance? Refine(
