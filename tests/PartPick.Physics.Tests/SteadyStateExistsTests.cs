@@ -75,4 +75,21 @@ public sealed class SteadyStateExistsTests
         Assert.NotNull(found.Steady);
         Assert.Equal(StartKind.NeedsDisturbance, found.Start);
     }
+
+    // The top of −Re Zc(I) does not depend on Rm, so the running margin is that top over Rm (arithmetic).
+    [Theory]
+    [InlineData(6)]
+    [InlineData(7.3)]
+    [InlineData(8.7)]
+    [InlineData(10)]
+    [InlineData(13)]
+    public void A_buffered_gate_of_little_running_margin_runs_exactly_where_it_is_above_one(double delayNanoseconds)
+    {
+        GateCircuit gate = Samples.BufferedGate(2500, 45, 220, delayNanoseconds * 1e-9) with { Crystal = Crystal with { ResistanceOhms = 40 } };
+        double top = 40 * OscillatorAnalysis.Analyse(gate).RunningMargin;
+
+        Assert.True(top > 1, $"{top}");
+        Assert.NotNull(OscillatorAnalysis.FindSteadyState(gate with { Crystal = Crystal with { ResistanceOhms = top / 1.01 } }));
+        Assert.Null(OscillatorAnalysis.FindSteadyState(gate with { Crystal = Crystal with { ResistanceOhms = top * 1.01 } }));
+    }
 }
