@@ -4,7 +4,7 @@ namespace PartPick.Tests;
 
 public class CheckCommandTests
 {
-    private const string Circuit = """
+    internal const string Circuit = """
         {
           "circuit": "gate",
           "crystal": { "frequency": "4 MHz", "load": "18 pF", "shunt": "5 pF", "motional": "12 fF", "resistance": "100",
