@@ -16,7 +16,7 @@ public class CheckCommandTests
         }
         """;
 
-    private static readonly string[] Keys =
+    internal static readonly string[] Keys =
     [
         "frequency", "outputFrequency", "error", "negativeResistance", "startUpMargin", "gainMargin", "criticalTransconductance",
         "upperTransconductance", "growthRate", "start", "runningMargin", "startUpTime", "motionalCurrent", "driveLevel",

@@ -30,7 +30,11 @@ internal sealed record Run(int Status, string Output, string Error)
     public static Run Of(params string[] arguments) => WithInput("", arguments);
 
     /// <summary>Runs the program with something on standard input.</summary>
-    public static Run WithInput(string input, params string[] arguments)
+    public static Run WithInput(string input, params string[] arguments) =>
+        In(name => name == CatalogPath.Variable ? Path.Combine(Directory, "catalog.db") : null, input, arguments);
+
+    /// <summary>Runs the program in an environment.</summary>
+    public static Run In(Func<string, string?> environment, string input, params string[] arguments)
     {
         using var output = new StringWriter { NewLine = "\n" };
         using var error = new StringWriter { NewLine = "\n" };
@@ -39,7 +43,7 @@ internal sealed record Run(int Status, string Output, string Error)
             Input = new StringReader(input),
             Output = output,
             Error = error,
-            Environment = name => name == CatalogPath.Variable ? Path.Combine(Directory, "catalog.db") : null,
+            Environment = environment,
         });
         return new Run(status, output.ToString(), error.ToString());
     }
