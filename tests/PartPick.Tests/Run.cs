@@ -34,7 +34,14 @@ internal sealed record Run(int Status, string Output, string Error)
         In(name => name == CatalogPath.Variable ? Path.Combine(Directory, "catalog.db") : null, input, arguments);
 
     /// <summary>Runs the program in an environment.</summary>
-    public static Run In(Func<string, string?> environment, string input, params string[] arguments)
+    public static Run In(Func<string, string?> environment, string input, params string[] arguments) =>
+        Of(environment, input, arguments, CancellationToken.None);
+
+    /// <summary>Runs the program until it is stopped.</summary>
+    public static Run Until(CancellationToken stop, params string[] arguments) =>
+        Of(name => name == CatalogPath.Variable ? Path.Combine(Directory, "catalog.db") : null, "", arguments, stop);
+
+    private static Run Of(Func<string, string?> environment, string input, string[] arguments, CancellationToken stop)
     {
         using var output = new StringWriter { NewLine = "\n" };
         using var error = new StringWriter { NewLine = "\n" };
@@ -44,6 +51,7 @@ internal sealed record Run(int Status, string Output, string Error)
             Output = output,
             Error = error,
             Environment = environment,
+            Cancellation = stop,
         });
         return new Run(status, output.ToString(), error.ToString());
     }
