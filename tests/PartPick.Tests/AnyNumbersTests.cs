@@ -61,7 +61,7 @@ public class AnyNumbersTests
     // Mostly near a usual power of ten, now and then anywhere.
     private static string N(Random random, double usual)
     {
-        double power = random.Next(12) == 0 ? random.NextDouble() * 46 - 28 : usual + random.NextDouble() - 0.5;
+        double power = random.Next(12) == 0 ? random.NextDouble() * 80 - 60 : usual + random.NextDouble() - 0.5;
         return Math.Pow(10, power).ToString("R", CultureInfo.InvariantCulture);
     }
 }

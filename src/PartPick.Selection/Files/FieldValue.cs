@@ -6,8 +6,7 @@ namespace PartPick.Selection.Files;
 /// <summary>Reads single values: a JSON number, or a text as people write values.</summary>
 internal static class FieldValue
 {
-    // Beyond these no figure of a circuit on a board lies, whatever its unit; within them nothing overflows.
-    private const double Smallest = 1e-24;
+    // Beyond these no figure of a circuit on a board lies, whatever its unit.
     private const double Largest = 1e15;
     private const double Coldest = -200;
     private const double Hottest = 500;
@@ -29,7 +28,7 @@ internal static class FieldValue
 
         bool within = dimension == Dimension.Temperature
             ? read.Value is >= Coldest and <= Hottest
-            : read.Value == 0 || Math.Abs(read.Value) is >= Smallest and <= Largest;
+            : Math.Abs(read.Value) <= Largest;
         if (within)
         {
             return read;
