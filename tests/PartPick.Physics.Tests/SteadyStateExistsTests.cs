@@ -86,7 +86,10 @@ public sealed class SteadyStateExistsTests
     [InlineData(13)]
     public void A_buffered_gate_of_little_running_margin_runs_exactly_where_it_is_above_one(double delayNanoseconds)
     {
-        GateCircuit gate = Samples.BufferedGate(2500, 45, 220, delayNanoseconds * 1e-9) with { Crystal = Crystal with { ResistanceOhms = 40 } };
+        GateCircuit gate = Samples.BufferedGate(2500, 45, 220, delayNanoseconds * 1e-9) with
+        {
+            Crystal = Crystal with { ResistanceOhms = 40 },
+        };
         double top = 40 * OscillatorAnalysis.Analyse(gate).RunningMargin;
 
         Assert.True(top > 1, $"{top}");

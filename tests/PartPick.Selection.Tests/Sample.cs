@@ -29,13 +29,24 @@ internal static class Sample
         FeedbackFarads = 1e-12,
         Points =
         [
-            new SupplyPoint { SupplyVolts = 2, GmMinSiemens = 1e-3, GmSiemens = 2e-3, GmMaxSiemens = 3e-3, RoOhms = 10e3, ClockMinHz = 6e6, ClockHz = 15e6 },
-            new SupplyPoint { SupplyVolts = 6, GmMinSiemens = 9e-3, GmSiemens = 18e-3, GmMaxSiemens = 27e-3, RoOhms = 1e3, ClockMinHz = 30e6, ClockHz = 95e6 },
+            new SupplyPoint
+            {
+                SupplyVolts = 2, GmMinSiemens = 1e-3, GmSiemens = 2e-3, GmMaxSiemens = 3e-3, RoOhms = 10e3,
+                ClockMinHz = 6e6, ClockHz = 15e6,
+            },
+            new SupplyPoint
+            {
+                SupplyVolts = 6, GmMinSiemens = 9e-3, GmSiemens = 18e-3, GmMaxSiemens = 27e-3, RoOhms = 1e3,
+                ClockMinHz = 30e6, ClockHz = 95e6,
+            },
         ],
     };
 
     public static CapacitorPart Capacitor(double farads, string id, string prices = "1:0.01", int? stock = null) =>
-        new() { Id = id, Description = "", Offer = Price(prices), ValueFarads = farads, ToleranceRatio = 0.05, Dielectric = "C0G", Stock = stock };
+        new()
+        {
+            Id = id, Description = "", Offer = Price(prices), ValueFarads = farads, ToleranceRatio = 0.05, Dielectric = "C0G", Stock = stock,
+        };
 
     public static ResistorPart Resistor(double ohms, string id, string prices = "1:0.01", int? stock = null) =>
         new() { Id = id, Description = "", Offer = Price(prices), ValueOhms = ohms, ToleranceRatio = 0.05, Stock = stock };

@@ -27,7 +27,9 @@ public class CatalogStateTests
         string path = Run.File("", "catalog.db");
         File.WriteAllBytes(path, bytes);
 
-        Assert.Contains("is damaged or no catalogue", Run.WithInput(NamesParts, "check", "-", "--catalog", path).WrongLine(3), StringComparison.Ordinal);
+        string line = Run.WithInput(NamesParts, "check", "-", "--catalog", path).WrongLine(3);
+
+        Assert.Contains("is damaged or no catalogue", line, StringComparison.Ordinal);
         Assert.Equal(bytes, File.ReadAllBytes(path));
     }
 

@@ -2,7 +2,9 @@ using System.Text;
 
 namespace PartPick.Tests;
 
-/// <summary>Whatever is wrong with a file: one line on standard error that names it, says what is wrong and what fits, and status 2.</summary>
+/// <summary>
+/// Whatever is wrong with a file: one line on standard error that names it, says what is wrong and what fits, and status 2.
+/// </summary>
 public class WrongFilesTests
 {
     private static readonly (string Command, string Option, string Good)[] Commands =

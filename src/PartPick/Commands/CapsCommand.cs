@@ -23,7 +23,7 @@ internal static class CapsCommand
     public static Command Build(CommandContext context)
     {
         var load = new Option<string?>("--load") { Description = "Wanted load capacitance; else the crystal's", HelpName = "VALUE" };
-        var stray = new Option<string?>("--stray") { Description = "Stray capacitance as one figure beside the pair (0)", HelpName = "VALUE" };
+        var stray = new Option<string?>("--stray") { Description = "Stray capacitance as one figure (0)", HelpName = "VALUE" };
         var pin = new Option<string?>("--pin-stray") { Description = "Stray capacitance at each pin to ground (0)", HelpName = "VALUE" };
         var series = new Option<string>("--series")
         {
@@ -67,7 +67,8 @@ internal static class CapsCommand
         if (request.LoadFarads == 0 || request.LoadFarads > 1e-6)
         {
             throw new CommandFailure(
-                new Problem("--load", "is no load of a crystal", "a capacitance above zero and up to 1 uF such as 18 pF"), ExitStatus.WrongInput);
+                new Problem("--load", "is no load of a crystal", "a capacitance above zero and up to 1 uF such as 18 pF"),
+                ExitStatus.WrongInput);
         }
 
         ImmutableArray<LoadPair> pairs = LoadCapacitorPairs.Find(request);

@@ -15,7 +15,8 @@ public class ExcessDelayTests
     [InlineData("INV-HCT-B-1", 4.5, 0.7, 10e-9, 10e6)]
     [InlineData("INV-FC-B-1", 4.5, 0.6, 4.5e-9, 10e6)]
     [InlineData("INV-BS-B-1", 10, 1, 33e-9, 4e6)]
-    public void A_buffered_chain_is_as_slow_as_it_is_for_a_sine(string id, double supply, double threshold, double propagation, double hertz)
+    public void A_buffered_chain_is_as_slow_as_it_is_for_a_sine(
+        string id, double supply, double threshold, double propagation, double hertz)
     {
         var part = (AmplifierPart)BuiltInParts.Catalog.Find(id)!;
         SupplyPoint point = Assert.Single(part.Points, point => point.SupplyVolts == supply);

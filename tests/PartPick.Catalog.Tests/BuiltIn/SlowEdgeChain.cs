@@ -33,8 +33,10 @@ internal sealed class SlowEdgeChain
     public double ExcessDelay(double hertz)
     {
         double period = 1 / hertz;
-        double fall = Falls(2.8 * period, 1.9 * period, OscillatorLoadFarads, t => (_supply / 2) + (_supply / 3 * Math.Sin(2 * Math.PI * hertz * t)));
+        double fall = Falls(2.8 * period, 1.9 * period, OscillatorLoadFarads, Sine);
         return fall - (2 * period) - (Math.Log(2) * _ron * OscillatorLoadFarads);
+
+        double Sine(double t) => (_supply / 2) + (_supply / 3 * Math.Sin(2 * Math.PI * hertz * t));
     }
 
     private double StepDelay()

@@ -1,3 +1,4 @@
+using PartPick.Catalog;
 using PartPick.Physics;
 
 namespace PartPick.Selection.Tests.Candidates;
@@ -53,8 +54,10 @@ public class ErrorBudgetTests
     [Fact]
     public void A_capacitor_that_states_its_tolerance_in_farads_or_not_at_all_has_one()
     {
-        Assert.Equal(0.25 / 4.7, BudgetBuilder.Tolerance(Sample.Capacitor(4.7e-12, "C") with { ToleranceRatio = null, ToleranceFarads = 0.25e-12 }), 1e-12);
-        Assert.Equal(0.2, BudgetBuilder.Tolerance(Sample.Capacitor(4.7e-12, "C") with { ToleranceRatio = null }));
+        CapacitorPart part = Sample.Capacitor(4.7e-12, "C") with { ToleranceRatio = null };
+
+        Assert.Equal(0.25 / 4.7, BudgetBuilder.Tolerance(part with { ToleranceFarads = 0.25e-12 }), 1e-12);
+        Assert.Equal(0.2, BudgetBuilder.Tolerance(part));
     }
 
     [Fact]

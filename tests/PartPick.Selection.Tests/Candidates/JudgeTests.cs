@@ -13,40 +13,51 @@ public class JudgeTests
     public void Figures_at_their_limits_are_fit() => Assert.Empty(Judged(Fine));
 
     [Fact]
-    public void Too_little_stock_is_a_miss() => Only(Limit.Stock, Fine with { Shortage = Sample.Crystal with { Stock = 3 } }, "stock of X is 3, too few for 10 boards");
+    public void Too_little_stock_is_a_miss() =>
+        Only(Limit.Stock, Fine with { Shortage = Sample.Crystal with { Stock = 3 } }, "stock of X is 3, too few for 10 boards");
 
     [Fact]
-    public void Cost_above_the_limit_is_a_miss() => Only(Limit.Cost, Fine with { Cost = 2.51m }, "costs 2.51 EUR of 2.50 allowed", 2.51 / 2.5);
+    public void Cost_above_the_limit_is_a_miss() =>
+        Only(Limit.Cost, Fine with { Cost = 2.51m }, "costs 2.51 EUR of 2.50 allowed", 2.51 / 2.5);
 
     [Fact]
-    public void A_corner_that_does_not_start_is_a_miss() => Only(Limit.Start, Fine with { Starts = false }, "does not build up from noise at corner");
+    public void A_corner_that_does_not_start_is_a_miss() =>
+        Only(Limit.Start, Fine with { Starts = false }, "does not build up from noise at corner");
 
     [Fact]
-    public void Margin_below_the_required_one_is_a_miss() => Only(Limit.Margin, Fine with { Margin = 4 }, "margin 4.0 of 5.0 wanted, at corner", 1.25);
+    public void Margin_below_the_required_one_is_a_miss() =>
+        Only(Limit.Margin, Fine with { Margin = 4 }, "margin 4.0 of 5.0 wanted, at corner", 1.25);
 
     [Fact]
-    public void No_margin_at_all_is_a_miss() => Only(Limit.Margin, Fine with { Margin = double.NaN }, "margin NaN of 5.0 wanted, at corner", 100);
+    public void No_margin_at_all_is_a_miss() =>
+        Only(Limit.Margin, Fine with { Margin = double.NaN }, "margin NaN of 5.0 wanted, at corner", 100);
 
     [Fact]
-    public void Error_above_the_budget_is_a_miss() => Only(Limit.Error, Fine with { Error = 120e-6 }, "error 120 ppm of 100 ppm allowed", 1.2);
+    public void Error_above_the_budget_is_a_miss() =>
+        Only(Limit.Error, Fine with { Error = 120e-6 }, "error 120 ppm of 100 ppm allowed", 1.2);
 
     [Fact]
-    public void Error_that_is_not_known_is_a_miss() => Assert.Equal([Limit.Error], Judged(Fine with { Error = double.NaN }).Select(miss => miss.Limit));
+    public void Error_that_is_not_known_is_a_miss() =>
+        Assert.Equal([Limit.Error], Judged(Fine with { Error = double.NaN }).Select(miss => miss.Limit));
 
     [Fact]
-    public void Drive_above_the_rating_is_a_miss() => Only(Limit.Drive, Fine with { Drive = 600e-6 }, "drive level 600 µW of 500 µW rated, at corner", 1.2);
+    public void Drive_above_the_rating_is_a_miss() =>
+        Only(Limit.Drive, Fine with { Drive = 600e-6 }, "drive level 600 µW of 500 µW rated, at corner", 1.2);
 
     [Fact]
     public void A_crystal_without_a_rating_has_no_limit_of_drive() => Assert.Empty(Judged(Fine with { Drive = 1, Rated = null }));
 
     [Fact]
-    public void A_corner_without_a_steady_state_is_a_miss() => Only(Limit.Drive, Fine with { Drive = null }, "has no steady state at a corner");
+    public void A_corner_without_a_steady_state_is_a_miss() =>
+        Only(Limit.Drive, Fine with { Drive = null }, "has no steady state at a corner");
 
     [Fact]
-    public void Starting_too_slowly_is_a_miss() => Only(Limit.StartUpTime, Fine with { Time = 0.06 }, "starts in 60 ms of 50 ms allowed, at corner", 1.2);
+    public void Starting_too_slowly_is_a_miss() =>
+        Only(Limit.StartUpTime, Fine with { Time = 0.06 }, "starts in 60 ms of 50 ms allowed, at corner", 1.2);
 
     [Fact]
-    public void A_start_that_never_comes_is_a_miss() => Only(Limit.StartUpTime, Fine with { Time = null }, "start-up time is not defined where it does not build up", 100);
+    public void A_start_that_never_comes_is_a_miss() =>
+        Only(Limit.StartUpTime, Fine with { Time = null }, "start-up time is not defined where it does not build up", 100);
 
     [Fact]
     public void No_steady_state_is_one_miss_of_the_error_alone() =>

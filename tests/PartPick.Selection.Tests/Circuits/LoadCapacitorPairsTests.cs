@@ -56,7 +56,10 @@ public class LoadCapacitorPairsTests
     [Fact]
     public void Frequency_comes_from_the_crystals_exact_formula()
     {
-        var crystal = new Crystal { NominalHz = 4e6, LoadFarads = 18e-12, ShuntFarads = 4e-12, MotionalFarads = 12e-15, ResistanceOhms = 50 };
+        var crystal = new Crystal
+        {
+            NominalHz = 4e6, LoadFarads = 18e-12, ShuntFarads = 4e-12, MotionalFarads = 12e-15, ResistanceOhms = 50,
+        };
 
         LoadPair pair = LoadCapacitorPairs.Find(Request(20e-12, "E6") with { PinStrayFarads = 7e-12, Crystal = crystal })
             .First(pair => pair is { IsEqual: true, C1.Farads: 33e-12 });

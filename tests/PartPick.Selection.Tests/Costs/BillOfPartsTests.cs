@@ -8,7 +8,10 @@ public class BillOfPartsTests
     private static readonly CapacitorPart Load = Sample.Capacitor(22e-12, "C22", "1:0.10;20:0.04");
     private static readonly SupportParts None = new(null, null, null);
 
-    private static CandidateParts Choice => new() { Circuit = CircuitKind.Gate, Crystal = Sample.Crystal, Amplifier = Sample.Inverter, C1 = Load, C2 = Load };
+    private static CandidateParts Choice => new()
+    {
+        Circuit = CircuitKind.Gate, Crystal = Sample.Crystal, Amplifier = Sample.Inverter, C1 = Load, C2 = Load,
+    };
 
     [Fact]
     public void Two_equal_capacitors_are_bought_together()

@@ -36,7 +36,10 @@ public class CrystalAndTransistorModelTests
     [Fact]
     public void A_shunt_capacitance_that_is_a_maximum_is_uncertain()
     {
-        CrystalPart part = Sample.Crystal with { Basis = new Dictionary<string, Basis> { ["shunt"] = Basis.Maximum, ["motional"] = Basis.Assumed } };
+        CrystalPart part = Sample.Crystal with
+        {
+            Basis = new Dictionary<string, Basis> { ["shunt"] = Basis.Maximum, ["motional"] = Basis.Assumed },
+        };
 
         Assert.True(CrystalModel.From(part).ShuntUncertain);
         Assert.True(CrystalModel.From(part).MotionalAssumed);

@@ -18,7 +18,9 @@ public class InverterModelTests
 
         // The stage keeps its gain over the spread: gm Ro of the typical device.
         Assert.Equal(10e-3 * 5500, inverter.TransconductanceSiemens * inverter.OutputOhms, 1e-9);
-        Assert.Equal((0.7, 4e-12, 5e-12, 1e-12), (inverter.ThresholdVolts, inverter.InputFarads, inverter.OutputFarads, inverter.FeedbackFarads));
+        Assert.Equal(
+            (0.7, 4e-12, 5e-12, 1e-12),
+            (inverter.ThresholdVolts, inverter.InputFarads, inverter.OutputFarads, inverter.FeedbackFarads));
     }
 
     [Theory]

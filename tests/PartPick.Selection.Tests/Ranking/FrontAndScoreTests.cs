@@ -7,7 +7,8 @@ namespace PartPick.Selection.Tests.Ranking;
 public class FrontAndScoreTests
 {
     private static readonly Gen<(double Error, double Margin, int Cost)[]> Points =
-        Gen.Select(Gen.Int[1, 6], Gen.Int[1, 6], Gen.Int[1, 6]).Select(point => ((double)point.Item1, (double)point.Item2, point.Item3)).Array[1, 40];
+        Gen.Select(Gen.Int[1, 6], Gen.Int[1, 6], Gen.Int[1, 6])
+            .Select(point => ((double)point.Item1, (double)point.Item2, point.Item3)).Array[1, 40];
 
     [Fact]
     public void The_front_holds_exactly_what_no_other_beats_whatever_the_order() => Points.Sample(points =>
@@ -35,7 +36,11 @@ public class FrontAndScoreTests
         Assert.Equal(
             expected,
             Score.Of(
-                Sample.Requirement with { Weights = new Weights(error, margin, cost), Margin = 5 }, ratio, factor, (decimal)price, (decimal)cheapest),
+                Sample.Requirement with { Weights = new Weights(error, margin, cost), Margin = 5 },
+                ratio,
+                factor,
+                (decimal)price,
+                (decimal)cheapest),
             1e-12);
 
     private static bool Beats((double Error, double Margin, int Cost) one, (double Error, double Margin, int Cost) other) =>

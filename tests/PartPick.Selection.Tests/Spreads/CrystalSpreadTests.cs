@@ -10,6 +10,8 @@ public class CrystalSpreadTests
         ToleranceRatio = 30e-6, StabilityRatio = 50e-6, AgeingRatio = 3e-6, AgeingYearlyRatio = 1e-6,
     };
 
+    private static readonly Dictionary<string, Basis> Typical = new() { ["tolerance"] = Basis.Typical };
+
     [Fact]
     public void Stated_figures_are_taken_as_they_are_and_rest_on_nothing()
     {
@@ -58,5 +60,5 @@ public class CrystalSpreadTests
     [Fact]
     public void A_typical_figure_carries_that_word() => Assert.Equal(
         "typical",
-        CrystalSpread.Of(Stated with { Basis = new Dictionary<string, Basis> { ["tolerance"] = Basis.Typical } }, Sample.Requirement)[0].RestsOn);
+        CrystalSpread.Of(Stated with { Basis = Typical }, Sample.Requirement)[0].RestsOn);
 }
