@@ -4,7 +4,7 @@ namespace PartPick.Tests;
 
 public class CheckCommandTests
 {
-    private const string Circuit = """
+    internal const string Circuit = """
         {
           "circuit": "gate",
           "crystal": { "frequency": "4 MHz", "load": "18 pF", "shunt": "5 pF", "motional": "12 fF", "resistance": "100",
@@ -16,7 +16,7 @@ public class CheckCommandTests
         }
         """;
 
-    private static readonly string[] Keys =
+    internal static readonly string[] Keys =
     [
         "frequency", "outputFrequency", "error", "negativeResistance", "startUpMargin", "gainMargin", "criticalTransconductance",
         "upperTransconductance", "growthRate", "start", "runningMargin", "startUpTime", "motionalCurrent", "driveLevel",

@@ -13,6 +13,7 @@ internal abstract class AmplitudeBalance
     private const int MostHalvings = 11;
     private const double LargestLogStep = 0.7;
     private const double Tolerance = 1e-11;
+    private const double RoundingFloor = 1e-9;
     private const double KeepRatio = 0.15;
     private DenseSolver _solver = new();
     private bool _borrowed;
@@ -167,6 +168,7 @@ internal abstract class AmplitudeBalance
         Size(n + 1);
         double before = double.PositiveInfinity;
         bool factored = _solver.IsFactored && _solver.Order == order;
+        bool fresh = false;
         double size = Residual(State, PeakAmps, _residual.AsSpan(0, n));
         for (int step = 0; step < MostSteps; step++)
         {
@@ -185,12 +187,15 @@ internal abstract class AmplitudeBalance
                 return false;
             }
 
-            if (total < tolerance)
+            // A strong device at small signals is the difference of large currents: what rounding leaves of it is enough.
+            bool rounding = fresh && total < RoundingFloor && total > before / 2;
+            if (total < tolerance || rounding)
             {
                 return resistanceOhms is not null || Finish(n);
             }
 
-            if (!factored || total > KeepRatio * before)
+            fresh = !factored || total > KeepRatio * before;
+            if (fresh)
             {
                 if (!Factor(n, order, resistanceOhms))
                 {

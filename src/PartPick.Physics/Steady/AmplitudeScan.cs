@@ -78,14 +78,23 @@ internal sealed class AmplitudeScan
 
             double next = Note();
             double nextSlope = -_balance.ResistanceSlope;
-            LargestNegativeOhms = Math.Max(LargestNegativeOhms, HermitePeak(next, nextSlope, negative, slope, Math.Log(ratio)));
-            if (Running is null && negative <= _resistance && next > _resistance)
+            (double top, double place) = HermitePeak(next, nextSlope, negative, slope, Math.Log(ratio));
+            LargestNegativeOhms = Math.Max(LargestNegativeOhms, top);
+            if (Running is null && negative <= _resistance && Math.Max(next, top) > _resistance)
             {
                 AmplitudeBalance scanning = _balance;
                 _balance = _refinement.From(scanning.Keep())!;
-                FindRunning(peak / ratio, peak);
+                if (next > _resistance)
+                {
+                    FindRunning(peak / ratio, peak);
+                }
+                else
+                {
+                    FindRunningBeyond(peak / ratio * Math.Pow(ratio, place), peak);
+                }
+
                 _balance = scanning;
-                if (_runningOnly)
+                if (_runningOnly && Running is not null)
                 {
                     return true;
                 }
@@ -158,12 +167,25 @@ internal sealed class AmplitudeScan
 
             double next = -_balance.Impedance.Real;
             double nextSlope = -_balance.ResistanceSlope;
-            LargestNegativeOhms = Math.Max(LargestNegativeOhms, HermitePeak(negative, slope, next, nextSlope, Math.Log(ratio)));
+            (double top, double place) = HermitePeak(negative, slope, next, nextSlope, Math.Log(ratio));
+            LargestNegativeOhms = Math.Max(LargestNegativeOhms, top);
             Note();
             if (negative > _resistance && next <= _resistance)
             {
                 FindRunning(peak, peak * ratio);
                 return;
+            }
+
+            if (Math.Max(negative, next) <= _resistance && top > _resistance)
+            {
+                double[] above = [.. _balance.State];
+                FindRunningBeyond(peak * Math.Pow(ratio, place), peak * ratio);
+                if (Running is not null)
+                {
+                    return;
+                }
+
+                above.CopyTo(_balance.State, 0);
             }
 
             if (next < 0.5 * LargestNegativeOhms && next < 0.5 * _resistance && nextSlope < 0)
@@ -210,6 +232,15 @@ internal sealed class AmplitudeScan
         return negative;
     }
 
+    // The curve rises above Rm only between two steps: from its top on, where it does.
+    private void FindRunningBeyond(double top, double above)
+    {
+        if (_balance.SolveAt(top) && Note() > _resistance)
+        {
+            FindRunning(top, above);
+        }
+    }
+
     private void FindRunning(double below, double above)
     {
         double[] upper = [.. _balance.State];
@@ -245,14 +276,15 @@ internal sealed class AmplitudeScan
         }
     }
 
-    private static double HermitePeak(double y0, double m0, double y1, double m1, double width)
+    // The top of the cubic through both ends, and where it lies between them on 0 … 1; none where it has none inside.
+    private static (double Value, double Place) HermitePeak(double y0, double m0, double y1, double m1, double width)
     {
         if (!(m0 > 0 && m1 < 0))
         {
-            return double.NegativeInfinity;
+            return (double.NegativeInfinity, double.NaN);
         }
 
-        // Derivative of the cubic through both ends on t in 0 … 1: a t² + b t + c = 0.
+        // Derivative of the cubic on t in 0 … 1: a t² + b t + c = 0.
         double c = m0 * width;
         double b = 6 * (y1 - y0) - 4 * m0 * width - 2 * m1 * width;
         double a = 3 * (m0 + m1) * width - 6 * (y1 - y0);
@@ -265,6 +297,7 @@ internal sealed class AmplitudeScan
 
         double t2 = t * t;
         double t3 = t2 * t;
-        return (2 * t3 - 3 * t2 + 1) * y0 + (t3 - 2 * t2 + t) * width * m0 + (3 * t2 - 2 * t3) * y1 + (t3 - t2) * width * m1;
+        double value = (2 * t3 - 3 * t2 + 1) * y0 + (t3 - 2 * t2 + t) * width * m0 + (3 * t2 - 2 * t3) * y1 + (t3 - t2) * width * m1;
+        return (value, t);
     }
 }
