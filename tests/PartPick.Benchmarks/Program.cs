@@ -1,1 +1,13 @@
-namespace PartPick.Benchmarks; internal static class Program { private static void Main() { } }
+using BenchmarkDotNet.Configs;
+using BenchmarkDotNet.Running;
+using PartPick.Benchmarks;
+
+if (args is ["--rankings", .. var rest])
+{
+    return RankingTable.Print(rest, Console.Out, Console.Error);
+}
+
+// Reports go beside what the build makes, whatever folder this is started in.
+string reports = Path.GetFullPath(Path.Combine(AppContext.BaseDirectory, "..", "..", "..", "benchmarks"));
+BenchmarkSwitcher.FromAssembly(typeof(RankingTable).Assembly).Run(args, DefaultConfig.Instance.WithArtifactsPath(reports));
+return 0;

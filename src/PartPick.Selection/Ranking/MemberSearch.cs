@@ -136,7 +136,7 @@ internal sealed class MemberSearch
         CapacitorValue c1 = _run.Space.Capacitors[estimate.C1];
         CapacitorValue c2 = _run.Space.Capacitors[estimate.C2];
         CircuitValues values = _family.Options[estimate.Option].With(c1.Farads, c2.Farads);
-       
+        _run.Tally.CountAnalysed();
         var analysis = new ValueAnalysis(_member.Template, _run.Space.Requirement, values, estimate.State);
         if (analysis.Base is not { } nominal)
         {
@@ -157,7 +157,6 @@ internal sealed class MemberSearch
             return;
         }
 
-       
         if (Goes(centre + others + analysis.AmplifierRatio) && analysis.Steady is not null)
         {
             Complete(prospect, analysis, values, c1, c2);
