@@ -9,7 +9,7 @@ internal static class RankingTable
     private const string Row = "{0,-16}  {1,22}  {2,12}  {3,12}  {4,13}";
 
     /// <summary>Prints the table.</summary>
-    /// <param name="arguments">The number of runs (5), then the beginnings of names of requirements (all).</param>
+    /// <param name="arguments">The number of runs (5), then parts of the names of requirements (all).</param>
     /// <param name="output">Where the table goes.</param>
     /// <param name="error">Where mistakes go.</param>
     /// <returns>0; 2 for a wrong argument.</returns>

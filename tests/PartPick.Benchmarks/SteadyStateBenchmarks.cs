@@ -1,5 +1,6 @@
 using BenchmarkDotNet.Attributes;
 using PartPick.Physics;
+using PartPick.Physics.Circuits;
 
 namespace PartPick.Benchmarks;
 
@@ -49,7 +50,7 @@ public class SteadyStateBenchmarks
     [Benchmark]
     public SteadyEstimate? EstimateFromNeighbour() => OscillatorAnalysis.EstimateSteadyState(_subject.Circuit, _estimate, out _);
 
-    private RunningState StateOf(PartPick.Physics.Circuits.OscillatorCircuit circuit)
+    private RunningState StateOf(OscillatorCircuit circuit)
     {
         OscillatorAnalysis.Analyse(circuit, out RunningState? state);
         return state ?? throw new InvalidOperationException($"The {Circuit} does not run.");

@@ -13,11 +13,17 @@ public sealed class Subject
     private readonly CircuitTemplate _template;
     private readonly CircuitValues _values;
 
-    private Subject(CircuitKind kind, string crystalId, string amplifierId, CircuitValues values)
+    private Subject(
+        CircuitKind kind, string crystalId, string amplifierId, CircuitValues values, double supplyMinVolts = 4.5, double supplyMaxVolts = 5.5)
     {
         PartsCatalog catalog = PartsCatalog.BuiltIn();
         var crystal = (CrystalPart)catalog.Find(crystalId)!;
-        Requirement = new Requirement { OutputHz = crystal.FrequencyHz };
+        Requirement = new Requirement
+        {
+            OutputHz = crystal.FrequencyHz,
+            SupplyMinVolts = supplyMinVolts,
+            SupplyMaxVolts = supplyMaxVolts,
+        };
         SupportParts support = SupportParts.For(kind, crystal.FrequencyHz, new Market(catalog, Requirement.Builds));
         _values = values;
         _template = CircuitTemplate.Create(
@@ -35,7 +41,7 @@ public sealed class Subject
     /// <summary>The words by which subjects are chosen.</summary>
     public static IEnumerable<string> Names => ["gate", "buffered gate", "counter", "port", "follower"];
 
-    /// <summary>Only the output frequency; everything else is left to its default.</summary>
+    /// <summary>Output frequency and supply; everything else is left to its default.</summary>
     public Requirement Requirement { get; }
 
     /// <summary>The nominal circuit.</summary>
@@ -57,7 +63,7 @@ public sealed class Subject
         "gate" => new(CircuitKind.Gate, "X-04M0-16-H49-30", "INV-HC-U-1", new CircuitValues(22e-12, 22e-12, 1000)),
         "buffered gate" => new(CircuitKind.Gate, "X-04M0-16-H49-30", "INV-HC-B-1", new CircuitValues(22e-12, 22e-12, 2200)),
         "counter" => new(CircuitKind.Counter, "X-04M096-20-H49-10", "CNT-14-HC", new CircuitValues(15e-12, 47e-12, 680)),
-        "port" => new(CircuitKind.Port, "X-04M0-16-H49-30", "MCU-MHZ-A", new CircuitValues(22e-12, 22e-12)),
+        "port" => new(CircuitKind.Port, "X-04M0-16-H49-30", "MCU-MHZ-A", new CircuitValues(22e-12, 22e-12), 3.0, 3.6),
         "follower" => new(CircuitKind.Follower, "X-04M0-16-H49-30", "TR-GP-0300-A", new CircuitValues(
             100e-12, 100e-12, BaseTopOhms: 100e3, EmitterOhms: 2.2e3)),
         _ => throw new ArgumentOutOfRangeException(nameof(name), name, "Not a subject."),

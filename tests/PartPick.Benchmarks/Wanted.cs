@@ -22,10 +22,10 @@ internal static class Wanted
         new() { Name = "32.768 kHz gate", OutputHz = 32768, Circuits = [CircuitKind.Gate] },
         new() { Name = "4 MHz gate", OutputHz = 4e6, Circuits = [CircuitKind.Gate] },
         new() { Name = "4 MHz sine", OutputHz = 4e6, Waveform = Waveform.Sine },
-        new() { Name = "8 MHz port", OutputHz = 8e6, Circuits = [CircuitKind.Port] },
+        new() { Name = "8 MHz port", OutputHz = 8e6, SupplyMinVolts = 3.0, SupplyMaxVolts = 3.6, Circuits = [CircuitKind.Port] },
     ];
 
-    /// <summary>Finds a requirement by the beginning of its name; null where there is none.</summary>
-    public static Requirement? Named(string beginning) =>
-        All.FirstOrDefault(wanted => wanted.Name.StartsWith(beginning, StringComparison.OrdinalIgnoreCase));
+    /// <summary>Finds a requirement by a part of its name; null where there is none.</summary>
+    public static Requirement? Named(string part) =>
+        All.FirstOrDefault(wanted => wanted.Name.Contains(part, StringComparison.OrdinalIgnoreCase));
 }
