@@ -157,7 +157,10 @@ public sealed class AnalysisLawsTests
             circuit.Strays.InputFarads * capacitance, circuit.Strays.OutputFarads * capacitance, circuit.Strays.AcrossFarads * capacitance);
         OscillatorCircuit common = circuit with
         {
-            Crystal = crystal, Strays = strays, C1Farads = circuit.C1Farads * capacitance, C2Farads = circuit.C2Farads * capacitance,
+            Crystal = crystal,
+            Strays = strays,
+            C1Farads = circuit.C1Farads * capacitance,
+            C2Farads = circuit.C2Farads * capacitance,
         };
         return common switch
         {
