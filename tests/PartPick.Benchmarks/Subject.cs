@@ -14,7 +14,8 @@ public sealed class Subject
     private readonly CircuitValues _values;
 
     private Subject(
-        CircuitKind kind, string crystalId, string amplifierId, CircuitValues values, double supplyMinVolts = 4.5, double supplyMaxVolts = 5.5)
+        CircuitKind kind, string crystalId, string amplifierId, CircuitValues values,
+        double supplyMinVolts = 4.5, double supplyMaxVolts = 5.5)
     {
         PartsCatalog catalog = PartsCatalog.BuiltIn();
         var crystal = (CrystalPart)catalog.Find(crystalId)!;

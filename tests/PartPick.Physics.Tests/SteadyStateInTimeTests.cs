@@ -135,7 +135,8 @@ public sealed class SteadyStateInTimeTests
         string both = FormattableString.Invariant(
             $"in time {time.PeakAmps * 1e3:F5} mA peak, {time.LoadFarads / Pico:F4} pF, swing {time.OutputSwingVolts:F4} V; ")
             + FormattableString.Invariant(
-            $"found {found.CurrentRmsAmps * Math.Sqrt(2) * 1e3:F5} mA, {found.LoadFarads / Pico:F4} pF, {found.OutputSwingVolts:F4} V\n{circuit}");
+            $"found {found.CurrentRmsAmps * Math.Sqrt(2) * 1e3:F5} mA, {found.LoadFarads / Pico:F4} pF, {found.OutputSwingVolts:F4} V")
+            + "\n" + circuit;
         Assert.True(Math.Abs(found.CurrentRmsAmps * Math.Sqrt(2) / time.PeakAmps - 1) <= currentRatio, "Current: " + both);
         Assert.True(Math.Abs(found.LoadFarads - time.LoadFarads) <= loadFarads, "Load: " + both);
         if (circuit is not GateCircuit { Inverter: BufferedInverter })
@@ -145,7 +146,8 @@ public sealed class SteadyStateInTimeTests
         }
 
         Assert.Equal(circuit.Crystal.LoadAtFrequencyFarads(found.FrequencyHz), found.LoadFarads, 1e-4 * Pico);
-        Assert.Equal(circuit.Crystal.ResistanceOhms * found.CurrentRmsAmps * found.CurrentRmsAmps, found.DriveWatts, 1e-9 * found.DriveWatts);
+        double watts = circuit.Crystal.ResistanceOhms * found.CurrentRmsAmps * found.CurrentRmsAmps;
+        Assert.Equal(watts, found.DriveWatts, 1e-9 * found.DriveWatts);
         if (circuit is FollowerCircuit { EmitterCurrentAmps: null })
         {
             Assert.True(
