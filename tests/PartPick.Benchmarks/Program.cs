@@ -9,5 +9,6 @@ if (args is ["--rankings", .. var rest])
 
 // Reports go beside what the build makes, whatever folder this is started in.
 string reports = Path.GetFullPath(Path.Combine(AppContext.BaseDirectory, "..", "..", "..", "benchmarks"));
-BenchmarkSwitcher.FromAssembly(typeof(RankingTable).Assembly).Run(args, DefaultConfig.Instance.WithArtifactsPath(reports));
+ManualConfig config = DefaultConfig.Instance.WithArtifactsPath(reports).HideColumns("Error", "StdDev", "RatioSD");
+BenchmarkSwitcher.FromAssembly(typeof(RankingTable).Assembly).Run(args, config);
 return 0;
