@@ -54,20 +54,11 @@ public sealed class SteadyStateInTimeTests
         ["one base resistor"] = OneResistor,
         ["one base resistor, free of the supply"] = OneResistor with
         {
-            BaseTopOhms = 470e3,
-            EmitterOhms = 4.7e3,
-            SupplyVolts = 12,
-            C1Farads = 220 * Pico,
-            C2Farads = 220 * Pico,
+            BaseTopOhms = 470e3, EmitterOhms = 4.7e3, SupplyVolts = 12, C1Farads = 220 * Pico, C2Farads = 220 * Pico,
         },
         ["divider, free of the supply"] = OneResistor with
         {
-            BaseTopOhms = 100e3,
-            BaseBottomOhms = 68e3,
-            EmitterOhms = 3.3e3,
-            SupplyVolts = 12,
-            C1Farads = 220 * Pico,
-            LoadOhms = 10e3,
+            BaseTopOhms = 100e3, BaseBottomOhms = 68e3, EmitterOhms = 3.3e3, SupplyVolts = 12, C1Farads = 220 * Pico, LoadOhms = 10e3,
         },
         ["one base resistor, hot"] = OneResistor with { TemperatureCelsius = 70 },
         ["divider with load"] = OneResistor with { BaseTopOhms = 47e3, BaseBottomOhms = 47e3, LoadOhms = 3.3e3, SupplyVolts = 9 },
@@ -76,10 +67,7 @@ public sealed class SteadyStateInTimeTests
 
     private static FollowerCircuit OneResistor => Samples.FullFollower(82 * Pico) with
     {
-        EmitterCurrentAmps = null,
-        BaseTopOhms = 220e3,
-        EmitterOhms = 2.2e3,
-        SupplyVolts = 9,
+        EmitterCurrentAmps = null, BaseTopOhms = 220e3, EmitterOhms = 2.2e3, SupplyVolts = 9,
     };
 
     [Theory]
@@ -135,8 +123,7 @@ public sealed class SteadyStateInTimeTests
         string both = FormattableString.Invariant(
             $"in time {time.PeakAmps * 1e3:F5} mA peak, {time.LoadFarads / Pico:F4} pF, swing {time.OutputSwingVolts:F4} V; ")
             + FormattableString.Invariant(
-            $"found {found.CurrentRmsAmps * Math.Sqrt(2) * 1e3:F5} mA, {found.LoadFarads / Pico:F4} pF, {found.OutputSwingVolts:F4} V")
-            + "\n" + circuit;
+            $"found {found.CurrentRmsAmps * Math.Sqrt(2) * 1e3:F5} mA, {found.LoadFarads / Pico:F4} pF, {found.OutputSwingVolts:F4} V\n{circuit}");
         Assert.True(Math.Abs(found.CurrentRmsAmps * Math.Sqrt(2) / time.PeakAmps - 1) <= currentRatio, "Current: " + both);
         Assert.True(Math.Abs(found.LoadFarads - time.LoadFarads) <= loadFarads, "Load: " + both);
         if (circuit is not GateCircuit { Inverter: BufferedInverter })
@@ -146,8 +133,7 @@ public sealed class SteadyStateInTimeTests
         }
 
         Assert.Equal(circuit.Crystal.LoadAtFrequencyFarads(found.FrequencyHz), found.LoadFarads, 1e-4 * Pico);
-        double watts = circuit.Crystal.ResistanceOhms * found.CurrentRmsAmps * found.CurrentRmsAmps;
-        Assert.Equal(watts, found.DriveWatts, 1e-9 * found.DriveWatts);
+        Assert.Equal(circuit.Crystal.ResistanceOhms * found.CurrentRmsAmps * found.CurrentRmsAmps, found.DriveWatts, 1e-9 * found.DriveWatts);
         if (circuit is FollowerCircuit { EmitterCurrentAmps: null })
         {
             Assert.True(
