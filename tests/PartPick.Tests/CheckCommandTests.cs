@@ -35,7 +35,9 @@ public class CheckCommandTests
 
     [Fact]
     public void Hyphen_reads_standard_input_and_gives_the_same() =>
-        Assert.Equal(Run.Of("check", Run.File(Circuit), "--format", "json").Output, Run.WithInput(Circuit, "check", "-", "--format", "json").Output);
+        Assert.Equal(
+            Run.Of("check", Run.File(Circuit), "--format", "json").Output,
+            Run.WithInput(Circuit, "check", "-", "--format", "json").Output);
 
     [Fact]
     public void Table_names_figures_units_and_warnings()

@@ -84,9 +84,12 @@ public class RankCommandTests
         string path = Run.File("""{ "output": "1 kHz", "builds": 0 }""", "need.json");
 
         Assert.StartsWith("need.json: builds: is zero",
-            Run.Of("rank", "--supply", "4.5", "5.5", "--temperature", "-10", "50", "--allowDisturbance", path).WrongLine(), StringComparison.Ordinal);
-        Assert.StartsWith("need.json: builds: is zero", Run.Of("rank", "--supply", "4.5 V..5.5 V", path).WrongLine(), StringComparison.Ordinal);
-        Assert.StartsWith("need.json: builds: is zero", Run.Of("rank", "--circuits", "gate", "counter", path).WrongLine(), StringComparison.Ordinal);
+            Run.Of("rank", "--supply", "4.5", "5.5", "--temperature", "-10", "50", "--allowDisturbance", path).WrongLine(),
+            StringComparison.Ordinal);
+        Assert.StartsWith(
+            "need.json: builds: is zero", Run.Of("rank", "--supply", "4.5 V..5.5 V", path).WrongLine(), StringComparison.Ordinal);
+        Assert.StartsWith(
+            "need.json: builds: is zero", Run.Of("rank", "--circuits", "gate", "counter", path).WrongLine(), StringComparison.Ordinal);
     }
 
     [Fact]

@@ -45,6 +45,7 @@ internal sealed class AnswerBuilder(SearchRun run, RankingOptions options)
             Combinations = run.Space.Combinations,
             Covered = complete ? run.Space.Combinations : run.Tally.Covered,
             Fit = complete && options.All ? run.Tally.Fit : null,
+            Analysed = run.Tally.Analysed,
             Candidates = [.. candidates],
             Front = [.. front.Select(point => point.Id)],
             NearestMisses = nearest,

@@ -50,6 +50,7 @@ internal sealed class ProspectAnalysis
             return;
         }
 
+        _run.Tally.CountAnalysed();
         var analysis = new ValueAnalysis(_member.Template, _requirement, _values, _estimate.State);
         if (analysis.Base is not { } nominal)
         {
