@@ -153,7 +153,8 @@ internal sealed class EstimateGrid
         {
             CircuitValues values = _family.Options[option].With(_space.Capacitors[c1].Farads, _space.Capacitors[c2].Farads);
             node = new Node();
-            if (OscillatorAnalysis.EstimateSteadyState(_template.At(values, _nominal), _last, out RunningState? state) is { } estimate && state is not null)
+            RunningState? near = Near(option, c1, c2) ?? _last;
+            if (OscillatorAnalysis.EstimateSteadyState(_template.At(values, _nominal), near, out RunningState? state) is { } estimate && state is not null)
             {
                 _last = state;
                 double load = _template.Crystal.Crystal.LoadAtFrequencyFarads(estimate.FrequencyHz);
@@ -165,6 +166,18 @@ internal sealed class EstimateGrid
         }
 
         return node;
+    }
+
+    // The state of the nearest node that is known.
+    private RunningState? Near(int option, int c1, int c2)
+    {
+        int o = _family.IsGate ? option / Step * Step : option;
+        int i = c1 / Step * Step;
+        int j = c2 / Step * Step;
+        return Known(o, i, j) ?? Known(o, i, j - Step) ?? Known(o, i - Step, j) ?? Known(o - Step, i, j);
+
+        RunningState? Known(int atOption, int atC1, int atC2) =>
+            _nodes.TryGetValue((atOption, atC1, atC2), out Node? node) ? node.Estimate?.State : null;
     }
 
     private double FindAmplifierRatio(Estimate estimate)
