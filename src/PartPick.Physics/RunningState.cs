@@ -13,11 +13,11 @@ public sealed class RunningState
     private readonly DenseSolver? _factors;
 
     internal RunningState(
-        Type kind, int points, bool reverse, bool holdsCurrent, double radians, double peakAmps, double[] state, DenseSolver? factors)
+        Type kind, int points, bool holdsCurrent, double radians, double peakAmps, double[] state, DenseSolver? factors, PeriodMesh? mesh = null)
     {
+        Mesh = mesh;
         Kind = kind;
         Points = points;
-        Reverse = reverse;
         HoldsCurrent = holdsCurrent;
         Radians = radians;
         PeakAmps = peakAmps;
@@ -26,15 +26,17 @@ public sealed class RunningState
     }
 
     /// <summary>The same starting point without what makes a solution quicker from it: much smaller, to keep many.</summary>
-    public RunningState Slim() => new(Kind, Points, Reverse, HoldsCurrent, Radians, PeakAmps, _state, null);
+    public RunningState Slim() => new(Kind, Points, HoldsCurrent, Radians, PeakAmps, _state, null, Mesh);
 
     internal Type Kind { get; }
 
     internal int Points { get; }
 
-    internal bool Reverse { get; }
-
     internal bool HoldsCurrent { get; }
+
+    internal PeriodMesh? Mesh { get; }
+
+    internal ReadOnlySpan<double> State => _state;
 
     internal double Radians { get; }
 

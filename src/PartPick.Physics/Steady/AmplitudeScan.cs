@@ -16,8 +16,7 @@ internal sealed class AmplitudeScan
     private readonly double _resistance;
     private readonly double _radians;
     private readonly bool _runningOnly;
-    private AmplitudeBalance _balance;
-    private double[] _before = [];
+    private ForcedState _balance;
     private int _finer;
 
     /// <param name="refinement">The circuit's balances.</param>
@@ -35,7 +34,7 @@ internal sealed class AmplitudeScan
     }
 
     /// <summary>The balance solved at the running amplitude; null where there is none.</summary>
-    public AmplitudeBalance? Running { get; private set; }
+    public ForcedState? Running { get; private set; }
 
     /// <summary>Largest −Re Zc in ohms found on the way, between steps by the cubic through values and slopes.</summary>
     public double LargestNegativeOhms { get; private set; } = double.NegativeInfinity;
@@ -62,7 +61,7 @@ internal sealed class AmplitudeScan
         double slope = -_balance.ResistanceSlope;
         while (peak > linear)
         {
-            _before = [.. _balance.State];
+            _balance.Remember();
             if (!_balance.SolveAt(peak / ratio))
             {
                 ratio = Math.Sqrt(ratio);
@@ -71,7 +70,7 @@ internal sealed class AmplitudeScan
                     return true;
                 }
 
-                _before.CopyTo(_balance.State, 0);
+                _balance.Recall();
 
                 continue;
             }
@@ -81,7 +80,7 @@ internal sealed class AmplitudeScan
             LargestNegativeOhms = Math.Max(LargestNegativeOhms, HermitePeak(next, nextSlope, negative, slope, Math.Log(ratio)));
             if (Running is null && negative <= _resistance && next > _resistance)
             {
-                AmplitudeBalance scanning = _balance;
+                ForcedState scanning = _balance;
                 _balance = _refinement.From(scanning.Keep())!;
                 FindRunning(peak / ratio, peak);
                 _balance = scanning;
@@ -104,9 +103,9 @@ internal sealed class AmplitudeScan
         return true;
     }
 
-    private AmplitudeBalance Fresh()
+    private ForcedState Fresh()
     {
-        AmplitudeBalance balance = _refinement.Coarse();
+        ForcedState balance = _refinement.Coarse();
         balance.SetFrequency(_radians);
         return balance;
     }
@@ -127,28 +126,10 @@ internal sealed class AmplitudeScan
         double slope = -_balance.ResistanceSlope;
         for (int step = 0; step < MostSteps; step++)
         {
-            _before = [.. _balance.State];
+            _balance.Remember();
             if (!_balance.SolveAt(peak * ratio))
             {
                 if (!StepBack(peak, ref ratio))
-                {
-                    return;
-                }
-
-                continue;
-            }
-
-            if (_refinement.IsIncomplete(_balance))
-            {
-                // Back to the last amplitude, where the missing current is still small, and on from there with it.
-                _before.CopyTo(_balance.State, 0);
-                if (!_balance.SolveAt(peak))
-                {
-                    return;
-                }
-
-                _balance = _refinement.Complete(_balance);
-                if (!_balance.SolveAt(peak))
                 {
                     return;
                 }
@@ -185,7 +166,7 @@ internal sealed class AmplitudeScan
     // Back to the last amplitude for a smaller step; where steps become too small, on with twice the harmonics.
     private bool StepBack(double peak, ref double ratio)
     {
-        _before.CopyTo(_balance.State, 0);
+        _balance.Recall();
         ratio = Math.Sqrt(ratio);
         if (ratio >= SmallestRatio)
         {
@@ -212,14 +193,14 @@ internal sealed class AmplitudeScan
 
     private void FindRunning(double below, double above)
     {
-        double[] upper = [.. _balance.State];
+        _balance.Remember();
         if (_balance.SolveRunning(_resistance) && _balance.PeakAmps > below * 0.999 && _balance.PeakAmps < above * 1.001)
         {
             Running = _balance;
             return;
         }
 
-        upper.CopyTo(_balance.State, 0);
+        _balance.Recall();
         for (int step = 0; step < 60; step++)
         {
             double middle = Math.Sqrt(below * above);

@@ -56,7 +56,7 @@ internal static class SteadySolver
             return Refine(branch, refinement, balance, out state) is { } refined ? FiguresOf(crystal, refined) : null;
         }
 
-        if (!Settle(branch, balance, roughly: true) || refinement.IsIncomplete(balance))
+        if (!Settle(branch, balance, roughly: true))
         {
             return null;
         }
@@ -64,7 +64,7 @@ internal static class SteadySolver
         if (fineness == Fineness.OneFiner)
         {
             balance = refinement.Finer(balance) ?? balance;
-            if (!Settle(branch, balance, roughly: true) || refinement.IsIncomplete(balance))
+            if (!Settle(branch, balance, roughly: true))
             {
                 return null;
             }
@@ -84,8 +84,8 @@ internal static class SteadySolver
     {
         state = null;
         var branch = new CrystalBranch(crystal);
-        AmplitudeBalance? balance = near is null ? null : refinement.From(near);
-        if (balance is null || !balance.SolveRunning(crystal.ResistanceOhms, EstimateTolerance) || refinement.IsIncomplete(balance))
+        ForcedState? balance = near is null ? null : refinement.From(near);
+        if (balance is null || !balance.SolveRunning(crystal.ResistanceOhms, EstimateTolerance))
         {
             var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms, runningOnly: true);
             balance = scan.Running;
@@ -102,13 +102,13 @@ internal static class SteadySolver
         return new SteadyEstimate(radians / (2 * Math.PI), crystal.ResistanceOhms * rms * rms);
     }
 
-    private static AmplitudeBalance? Refine(
-        in CrystalBranch branch, Refinement refinement, AmplitudeBalance balance, out RunningState? state)
+    private static ForcedState? Refine(
+        in CrystalBranch branch, Refinement refinement, ForcedState balance, out RunningState? state)
     {
         state = null;
         double frequency = double.NaN;
         double current = double.NaN;
-        AmplitudeBalance? coarser = null;
+        ForcedState? coarser = null;
         for (int level = 0; ; level++)
         {
             if (!Settle(branch, balance))
@@ -116,14 +116,7 @@ internal static class SteadySolver
                 return coarser;
             }
 
-            if (refinement.IsIncomplete(balance))
-            {
-                balance = refinement.Complete(balance);
-                level--;
-                continue;
-            }
-
-            if (state is null || (level == FollowedLevel && !state.Reverse))
+            if (state is null || level == FollowedLevel)
             {
                 state = balance.Keep();
             }
@@ -131,7 +124,7 @@ internal static class SteadySolver
             bool agrees = Math.Abs(balance.Radians - frequency) < FrequencyAgreement * frequency
                 && Math.Abs(balance.PeakAmps - current) < CurrentAgreement * current;
             (frequency, current) = (balance.Radians, balance.PeakAmps);
-            AmplitudeBalance? finer = agrees ? null : refinement.Finer(balance);
+            ForcedState? finer = agrees ? null : refinement.Finer(balance);
             if (finer is null)
             {
                 return balance;
@@ -160,7 +153,7 @@ internal static class SteadySolver
 
     // Repeats the running state at the frequency it gives until the frequency stands. The state changes with ω only as fast as
     // the network does, so what is left is C/Cm times smaller than the last step.
-    private static bool Settle(in CrystalBranch branch, AmplitudeBalance balance, bool roughly = false)
+    private static bool Settle(in CrystalBranch branch, ForcedState balance, bool roughly = false)
     {
         for (int step = 0; step < 12; step++)
         {
@@ -185,14 +178,14 @@ internal static class SteadySolver
         return true;
     }
 
-    private static RunningFigures FiguresOf(Crystal crystal, AmplitudeBalance balance)
+    private static RunningFigures FiguresOf(Crystal crystal, ForcedState balance)
     {
         double hertz = balance.Radians / (2 * Math.PI);
         double rms = balance.PeakAmps / Math.Sqrt(2);
         return new RunningFigures(hertz, crystal.LoadAtFrequencyFarads(hertz), rms, crystal.ResistanceOhms * rms * rms);
     }
 
-    private static SteadyState Describe(Crystal crystal, AmplitudeBalance balance)
+    private static SteadyState Describe(Crystal crystal, ForcedState balance)
     {
         RunningFigures figures = FiguresOf(crystal, balance);
         return new SteadyState
