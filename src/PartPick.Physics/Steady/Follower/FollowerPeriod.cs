@@ -16,7 +16,8 @@ internal sealed class FollowerPeriod : ForcedState
     private const int LogAmps = FollowerPass.LogAmps;
     private const int Width = JunctionStep.Width;
     private const int Voltages = JunctionStep.Voltages;
-    private const int MostPasses = 40;
+    private const int MatrixWidth = 16;
+    private const int MostPasses = 60;
     private const int MostMeshes = 6;
     private const double LargestLogStep = 0.7;
     private readonly FollowerCircuit _circuit;
@@ -28,8 +29,11 @@ internal sealed class FollowerPeriod : ForcedState
     private readonly double _supply;
     private readonly double _meshTolerance;
     private readonly double[] _unknowns = new double[Unknowns];
-    private readonly double[] _matrix = new double[Unknowns * Width];
+    private readonly double[] _matrix = new double[Unknowns * MatrixWidth];
     private PeriodMesh _mesh;
+    private readonly double[] _mismatch = new double[Unknowns];
+    private double[] _keptVolts = [];
+    private double[] _keptSlopes = [];
     private double[] _volts = [];
     private double[] _currents = [];
     private double[] _slopes = [];
@@ -140,7 +144,7 @@ internal sealed class FollowerPeriod : ForcedState
                 change[k] = _tangent[k] * log;
             }
 
-            Apply(change);
+            Advance(change, 1, PeakAmps);
         }
 
         PeakAmps = peakAmps;
@@ -168,44 +172,131 @@ internal sealed class FollowerPeriod : ForcedState
         return Newton(resistance, tolerance);
     }
 
+    public static int Damped;
     private bool Newton(double? resistance, double tolerance)
     {
         Span<double> change = stackalloc double[Unknowns];
+        Span<double> start = stackalloc double[Unknowns];
+        Span<double> inverse = stackalloc double[Unknowns * Unknowns];
+        Span<double> weights = stackalloc double[Unknowns];
+        double startPeak = PeakAmps;
+        double before = double.PositiveInfinity;
+        double fraction = 1;
         for (int pass = 0; pass < MostPasses; pass++)
         {
             Passes++;
             _pass.Run(_mesh, _unknowns, PeakAmps / _bias.EmitterAmps, _volts, _currents, _slopes);
-            if (!double.IsFinite(_pass.Left) || !Linearise(resistance))
+            bool solved = double.IsFinite(_pass.Left) && Linearise(resistance);
+            if (pass > 0)
+            {
+                double now = double.PositiveInfinity;
+                if (solved)
+                {
+                    now = 0;
+                    for (int row = 0; row < Unknowns; row++)
+                    {
+                        double sum = 0;
+                        for (int k = 0; k < Unknowns; k++)
+                        {
+                            sum += inverse[row * Unknowns + k] * _mismatch[k];
+                        }
+
+                        now = Math.Max(now, Math.Abs(sum) * weights[row]);
+                    }
+                }
+
+                if (Trace) Console.WriteLine($"      before {before:E2} now {now:E2} fraction {fraction}");
+                if (!(now < (1 - fraction / 4) * before) && now > 1e-3)
+                {
+                    Damped++;
+                    fraction /= 2;
+                    if (fraction < 1e-3)
+                    {
+                        return false;
+                    }
+
+                    (_volts, _keptVolts) = (_keptVolts, _volts);
+                    (_slopes, _keptSlopes) = (_keptSlopes, _slopes);
+                    start.CopyTo(_unknowns);
+                    Advance(change, fraction, startPeak);
+                    continue;
+                }
+            }
+            else if (!solved)
             {
                 return false;
             }
 
-            double fraction = 1;
             for (int k = 0; k < Unknowns; k++)
             {
-                change[k] = _matrix[k * Width + Unknowns];
-                _tangent[k] = _matrix[k * Width + Unknowns + 1];
+                change[k] = _matrix[k * MatrixWidth + Unknowns];
+                _tangent[k] = _matrix[k * MatrixWidth + Unknowns + 1];
+                for (int column = 0; column < Unknowns; column++)
+                {
+                    inverse[k * Unknowns + column] = _matrix[k * MatrixWidth + Unknowns + 2 + column];
+                }
             }
 
-            fraction = LargestLogStep / Math.Max(LargestLogStep, Math.Abs(change[LogAmps]));
+            Weigh(weights);
+            before = 0;
             for (int k = 0; k < Unknowns; k++)
             {
-                change[k] *= fraction;
+                before = Math.Max(before, weights[k] * Math.Abs(change[k]));
             }
 
-            double largest = Apply(change);
-            PeakAmps *= Math.Exp(change[LogAmps]);
-            if (Trace) Console.WriteLine($"   pass {pass} left {_pass.Left:E2} largest {largest:E2} Z {_pass.Impedance} peak {PeakAmps} q {string.Join(" ", change.ToArray())}");
-            if (_pass.Left < Math.Max(tolerance, 1e-5) && largest < tolerance)
+            if (Trace) Console.WriteLine($"   {_mesh.Count} tol {_meshTolerance:E1} pass {pass} left {_pass.Left:E2} largest {before:E2} Z {_pass.Impedance} peak {PeakAmps}");
+            if (_pass.Left < Math.Max(tolerance, 1e-5) && before < tolerance)
             {
+                Advance(change, 1, PeakAmps);
                 Finish(change);
                 return true;
             }
+
+            _unknowns.CopyTo(start);
+            startPeak = PeakAmps;
+            fraction = Math.Min(Math.Min(1, 2 * fraction), LargestLogStep / Math.Max(LargestLogStep, Math.Abs(change[LogAmps])));
+            Advance(change, fraction, startPeak);
         }
 
         return false;
     }
     public static bool Trace;
+
+    private void Weigh(Span<double> weights)
+    {
+        weights.Clear();
+        for (int k = 0; k < _mesh.Count * Voltages; k++)
+        {
+            for (int column = 0; column < Unknowns; column++)
+            {
+                weights[column] = Math.Max(weights[column], Math.Abs(_slopes[k * Width + column]));
+            }
+        }
+    }
+
+    private void Advance(ReadOnlySpan<double> change, double fraction, double startPeak)
+    {
+        Span<double> part = stackalloc double[Unknowns];
+        for (int k = 0; k < Unknowns; k++)
+        {
+            part[k] = fraction * change[k];
+        }
+
+        for (int k = 0; k < Unknowns - 1; k++)
+        {
+            _unknowns[k] += part[k];
+        }
+
+        PeakAmps = startPeak * Math.Exp(part[LogAmps]);
+        (_volts, _keptVolts) = (_keptVolts, _volts);
+        (_slopes, _keptSlopes) = (_keptSlopes, _slopes);
+        for (int k = 0; k < _mesh.Count * Voltages; k++)
+        {
+            ReadOnlySpan<double> row = _keptSlopes.AsSpan(k * Width, Unknowns);
+            double shift = row[0] * part[0] + row[1] * part[1] + row[2] * part[2] + row[3] * part[3] + row[4] * part[4] + row[5] * part[5];
+            _volts[k] = JunctionStep.Limit(_keptVolts[k], shift);
+        }
+    }
 
     private void Finish(ReadOnlySpan<double> change)
     {
@@ -228,13 +319,13 @@ internal sealed class FollowerPeriod : ForcedState
         matrix.Clear();
         for (int row = 0; row < 3; row++)
         {
-            Span<double> line = matrix.Slice(row * Width, Width);
+            Span<double> line = matrix.Slice(row * MatrixWidth, MatrixWidth);
             _pass.EndRows.Slice(row * Width, Unknowns).CopyTo(line);
             line[row] -= 1;
             line[Unknowns] = _unknowns[row] - _pass.End[row];
         }
 
-        Span<double> first = matrix.Slice(3 * Width, Width);
+        Span<double> first = matrix.Slice(3 * MatrixWidth, MatrixWidth);
         _pass.MeanEmitterSlopes.AsSpan(0, Unknowns).CopyTo(first);
         if (Given)
         {
@@ -247,7 +338,7 @@ internal sealed class FollowerPeriod : ForcedState
             first[Unknowns] = siemens * _unknowns[3] - _pass.MeanEmitter;
         }
 
-        Span<double> second = matrix.Slice(4 * Width, Width);
+        Span<double> second = matrix.Slice(4 * MatrixWidth, MatrixWidth);
         if (Given)
         {
             _pass.MeanReverseSlopes.AsSpan(0, Unknowns).CopyTo(second);
@@ -258,7 +349,7 @@ internal sealed class FollowerPeriod : ForcedState
             second[4] = 1;
         }
 
-        Span<double> third = matrix.Slice(5 * Width, Width);
+        Span<double> third = matrix.Slice(5 * MatrixWidth, MatrixWidth);
         if (resistance is { } ohms)
         {
             for (int k = 0; k < Unknowns; k++)
@@ -274,26 +365,13 @@ internal sealed class FollowerPeriod : ForcedState
             third[Unknowns + 1] = 1;
         }
 
-        return GaussJordan.Reduce(matrix, Unknowns, 2);
-    }
-
-    private double Apply(ReadOnlySpan<double> change)
-    {
-        double largest = 0;
-        for (int k = 0; k < Unknowns - 1; k++)
+        for (int row = 0; row < Unknowns; row++)
         {
-            _unknowns[k] += change[k];
+            _mismatch[row] = matrix[row * MatrixWidth + Unknowns];
+            matrix[row * MatrixWidth + Unknowns + 2 + row] = 1;
         }
 
-        for (int k = 0; k < _mesh.Count * Voltages; k++)
-        {
-            ReadOnlySpan<double> row = _slopes.AsSpan(k * Width, Unknowns);
-            double shift = row[0] * change[0] + row[1] * change[1] + row[2] * change[2] + row[3] * change[3] + row[4] * change[4] + row[5] * change[5];
-            largest = Math.Max(largest, Math.Abs(shift));
-            _volts[k] = JunctionStep.Limit(_volts[k], shift);
-        }
-
-        return largest;
+        return GaussJordan.Reduce(matrix, Unknowns, MatrixWidth / 4);
     }
 
     private bool Adapt()
@@ -386,6 +464,8 @@ internal sealed class FollowerPeriod : ForcedState
         if (_volts.Length < _mesh.Count * Voltages)
         {
             _volts = new double[_mesh.Count * Voltages];
+            _keptVolts = new double[_mesh.Count * Voltages];
+            _keptSlopes = new double[_mesh.Count * Voltages * Width];
             _currents = new double[_mesh.Count * Voltages];
             _slopes = new double[_mesh.Count * Voltages * Width];
         }
@@ -397,7 +477,11 @@ internal sealed class FollowerPeriod : ForcedState
         var finer = new FollowerPeriod(_circuit, _bias, _meshTolerance / 16) { PeakAmps = PeakAmps };
         finer.SetFrequency(Radians);
         finer._mesh = _mesh;
-        finer._volts = _volts;
+        finer._volts = [.. _volts];
+        finer._keptVolts = new double[_volts.Length];
+        finer._keptSlopes = new double[_volts.Length * Width];
+        finer._currents = new double[_volts.Length];
+        finer._slopes = new double[_volts.Length * Width];
         finer.ChangeMesh(_mesh.Halved());
         _unknowns.CopyTo(finer._unknowns, 0);
         return finer;

@@ -57,12 +57,18 @@ internal sealed class JunctionStep
             }
 
             Left = Correct(volts, currents, order, columns);
+            if (Debug && iteration > 200) Console.WriteLine($"      {iteration} {Left:E2} volts {string.Join(" ", volts.ToArray().Select(v => v.ToString("F3")))}");
             if (!both)
             {
                 Follow(map, offsets, volts, currents);
                 if (!IsNegligible(volts[Stages..]))
                 {
                     both = true;
+                    for (int k = Stages; k < Voltages; k++)
+                    {
+                        volts[k] = Math.Min(volts[k], 0);
+                    }
+
                     continue;
                 }
             }
@@ -75,12 +81,19 @@ internal sealed class JunctionStep
         }
 
         Left = double.PositiveInfinity;
+        if (Debug) Console.WriteLine($"      FAIL volts {string.Join(" ", volts.ToArray().Select(v => v.ToString("F3")))} offsets {string.Join(" ", offsets.ToArray().Select(v => v.ToString("F3")))} map {string.Join(" ", map.Slice(0,72).ToArray().Select(v => v.ToString("E2")))}");
     }
+    public static bool Debug;
 
     // Rises of a conducting junction's voltage by Newton's method overshoot: its current's logarithm takes their place.
     public static double Limit(double volts, double change)
     {
         double next = volts + change;
+        if (volts > 0 && change < -4)
+        {
+            return Math.Max(next, Math.Min(volts - 4, -5));
+        }
+
         if (change <= Knee || next <= Knee)
         {
             return next;
