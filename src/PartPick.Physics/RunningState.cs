@@ -12,21 +12,25 @@ public sealed class RunningState
     private readonly double[] _state;
     private readonly DenseSolver? _factors;
 
-    internal RunningState(
-        Type kind, int points, bool holdsCurrent, double radians, double peakAmps, double[] state, DenseSolver? factors, PeriodMesh? mesh = null)
+    internal RunningState(Type kind, int points, double radians, double peakAmps, double[] state, DenseSolver? factors)
     {
-        Mesh = mesh;
         Kind = kind;
         Points = points;
-        HoldsCurrent = holdsCurrent;
         Radians = radians;
         PeakAmps = peakAmps;
         _state = state;
         _factors = factors;
     }
 
+    internal RunningState(double radians, double peakAmps, double[] state, PeriodMesh mesh, bool holdsCurrent)
+        : this(typeof(FollowerPeriod), mesh.Count, radians, peakAmps, state, null)
+    {
+        Mesh = mesh;
+        HoldsCurrent = holdsCurrent;
+    }
+
     /// <summary>The same starting point without what makes a solution quicker from it: much smaller, to keep many.</summary>
-    public RunningState Slim() => new(Kind, Points, HoldsCurrent, Radians, PeakAmps, _state, null, Mesh);
+    public RunningState Slim() => Mesh is null ? new(Kind, Points, Radians, PeakAmps, _state, null) : this;
 
     internal Type Kind { get; }
 

@@ -10,6 +10,7 @@ internal sealed class AmplitudeScan
 {
     private const double LargestRatio = 1.35;
     private const double SmallestRatio = 1.03;
+    private const double RunningTolerance = 1e-7;
     private const int MostSteps = 400;
     private const int MostFiner = 3;
     private readonly Refinement _refinement;
@@ -127,6 +128,11 @@ internal sealed class AmplitudeScan
         for (int step = 0; step < MostSteps; step++)
         {
             _balance.Remember();
+            if (_balance.FallsForGood && slope < 0 && negative > _resistance && Jump(peak))
+            {
+                return;
+            }
+
             if (!_balance.SolveAt(peak * ratio))
             {
                 if (!StepBack(peak, ref ratio))
@@ -161,6 +167,19 @@ internal sealed class AmplitudeScan
             ratio = Math.Min(LargestRatio, ratio * ratio);
             (negative, slope) = (next, nextSlope);
         }
+    }
+
+    // Straight to the running amplitude from one below it, where −Re Zc falls already.
+    private bool Jump(double peak)
+    {
+        if (_balance.SolveRunning(_resistance, RunningTolerance) && _balance.PeakAmps > peak && _balance.ResistanceSlope > 0)
+        {
+            Running = _balance;
+            return true;
+        }
+
+        _balance.Recall();
+        return false;
     }
 
     // Back to the last amplitude for a smaller step; where steps become too small, on with twice the harmonics.

@@ -29,6 +29,11 @@ internal abstract class ForcedState
     /// <summary>True where the supply limits the last solved state (collector junction conducting).</summary>
     public virtual bool LimitedBySupply => false;
 
+    /// <summary>
+    /// True where −Re Zc falls for good once it falls along the amplitude: the running amplitude may then be sought at once.
+    /// </summary>
+    public virtual bool FallsForGood => false;
+
     /// <summary>Sets the frequency of the crystal's current; the state stays as the next starting point.</summary>
     public abstract void SetFrequency(double radians);
 

@@ -11,4 +11,7 @@ internal abstract class Refinement
 
     /// <summary>A balance of the fineness of a kept state, in that state; null where the state is of another kind of circuit.</summary>
     public abstract ForcedState? From(RunningState state);
+
+    /// <summary>Whether the coarsest state is fine enough for figures of circuits alike to be compared.</summary>
+    public virtual bool CoarseIsFollowed => false;
 }

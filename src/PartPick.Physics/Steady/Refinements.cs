@@ -37,26 +37,27 @@ internal sealed class BufferedRefinement(GateNetwork network, BufferedInverter i
         : null;
 }
 
-/// <summary>Finenesses of the follower: steps to a tolerance, halved from one fineness to the next.</summary>
+/// <summary>Finenesses of the follower: steps that follow the currents, halved from one fineness to the next.</summary>
 internal sealed class FollowerRefinement(FollowerCircuit circuit, FollowerBias bias) : Refinement
 {
-    private const double CoarseTolerance = 1e-2;
-    private const int MostSteps = 1500;
+    private const int MostSteps = 1000;
 
-    public override ForcedState Coarse() => new FollowerPeriod(circuit, bias, CoarseTolerance);
+    public override bool CoarseIsFollowed => true;
+
+    public override ForcedState Coarse() => new FollowerPeriod(circuit, bias);
 
     public override ForcedState? Finer(ForcedState state) =>
         state is FollowerPeriod { Steps: < MostSteps } coarse ? coarse.Refined() : null;
 
     public override ForcedState? From(RunningState state)
     {
-        if (state.Mesh is null || state.HoldsCurrent != circuit.EmitterCurrentAmps is not null)
+        if (state.Mesh is not { } mesh || state.HoldsCurrent != circuit.EmitterCurrentAmps is not null)
         {
             return null;
         }
 
-        var period = new FollowerPeriod(circuit, bias, CoarseTolerance);
-        period.TakeState(state);
+        var period = new FollowerPeriod(circuit, bias);
+        period.TakeState(state, mesh);
         return period;
     }
 }

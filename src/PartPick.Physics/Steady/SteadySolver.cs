@@ -61,7 +61,7 @@ internal static class SteadySolver
             return null;
         }
 
-        if (fineness == Fineness.OneFiner)
+        if (fineness == Fineness.OneFiner && !refinement.CoarseIsFollowed)
         {
             balance = refinement.Finer(balance) ?? balance;
             if (!Settle(branch, balance, roughly: true))
@@ -116,7 +116,7 @@ internal static class SteadySolver
                 return coarser;
             }
 
-            if (state is null || level == FollowedLevel)
+            if (state is null || (level == FollowedLevel && !refinement.CoarseIsFollowed))
             {
                 state = balance.Keep();
             }
@@ -153,7 +153,7 @@ internal static class SteadySolver
 
     // Repeats the running state at the frequency it gives until the frequency stands. The state changes with ω only as fast as
     // the network does, so what is left is C/Cm times smaller than the last step.
-    private static bool Settle(in CrystalBranch branch, ForcedState balance, bool roughly = false)
+    public static bool Settle(in CrystalBranch branch, ForcedState balance, bool roughly = false)
     {
         for (int step = 0; step < 12; step++)
         {

@@ -1,4 +1,3 @@
-using PartPick.Physics.Bias;
 using PartPick.Physics.Circuits;
 using PartPick.Physics.Numerics;
 
@@ -35,20 +34,19 @@ internal sealed class FollowerElements
     private readonly bool _merged;
     private readonly double[] _work = new double[Order * 4 * Vectors];
 
-    public FollowerElements(FollowerCircuit circuit, FollowerBias bias)
+    public FollowerElements(FollowerCircuit circuit, FollowerUnits units)
     {
-        double unit = bias.ThermalVolts / bias.EmitterAmps;
-        double spreading = circuit.Transistor.BaseSpreadingOhms;
+        double unit = units.Ohms;
 
         // Without a spreading resistor I's charges and currents are B's, and I's own row says that both are one node.
-        int inner = spreading > 0 ? I : B;
-        _merged = inner == B;
-        Add(_conductance, B, B, BaseSiemens(circuit) * unit);
-        Add(_conductance, E, E, EmitterSiemens(circuit) * unit);
-        double link = spreading > 0 ? unit / spreading : 1;
+        _merged = units.Spreading == 0;
+        int inner = _merged ? B : I;
+        double link = _merged ? 1 : 1 / units.Spreading;
+        Add(_conductance, B, B, units.BaseLoad);
+        Add(_conductance, E, E, units.EmitterLoad);
         Add(_conductance, I, I, link);
         Add(_conductance, I, B, -link);
-        if (spreading > 0)
+        if (!_merged)
         {
             Add(_conductance, B, B, link);
             Add(_conductance, B, I, -link);
@@ -66,12 +64,6 @@ internal sealed class FollowerElements
         _perReverse[inner] = -1;
         _perReverse[E] = -1;
     }
-
-    /// <summary>What loads the base, in siemens.</summary>
-    public static double BaseSiemens(FollowerCircuit circuit) => 1 / circuit.BaseTopOhms + 1 / circuit.BaseBottomOhms;
-
-    /// <summary>What loads the emitter's signal, in siemens.</summary>
-    public static double EmitterSiemens(FollowerCircuit circuit) => 1 / circuit.EmitterOhms + 1 / circuit.LoadOhms;
 
     /// <summary>The charges at given voltages and forward current; time in radians.</summary>
     public void Charges(double radians, double vB, double vI, double vE, double forward, Span<double> charges)

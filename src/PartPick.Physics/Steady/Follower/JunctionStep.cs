@@ -26,18 +26,20 @@ internal sealed class JunctionStep
     private const double Knee = 2;
     private readonly double[] _rows = new double[Voltages * 16];
 
-    /// <summary>The largest correction of the last iteration; infinite where the step was not solved.</summary>
-    public double Left { get; private set; }
-
-    /// <summary>Solves a step.</summary>
+    /// <summary>Solves a step; returns the largest correction of the last iteration, infinite where there is no solution.</summary>
     /// <param name="map">The step's map.</param>
     /// <param name="offsets">The voltages with no current in either junction.</param>
     /// <param name="right">Their derivatives by the unknowns, in rows of <see cref="Width"/>; zero in the last two columns.</param>
     /// <param name="volts">The voltages: a guess, then the solution.</param>
     /// <param name="currents">Receives the currents.</param>
     /// <param name="slopes">Receives the voltages' derivatives, in rows of <see cref="Width"/>.</param>
-    public void Solve(
-        ReadOnlySpan<double> map, ReadOnlySpan<double> offsets, ReadOnlySpan<double> right, Span<double> volts, Span<double> currents, Span<double> slopes)
+    public double Solve(
+        ReadOnlySpan<double> map,
+        ReadOnlySpan<double> offsets,
+        ReadOnlySpan<double> right,
+        Span<double> volts,
+        Span<double> currents,
+        Span<double> slopes)
     {
         bool both = !IsNegligible(volts[Stages..]);
         for (int iteration = 0; iteration < MostIterations; iteration++)
@@ -56,8 +58,7 @@ internal sealed class JunctionStep
                 break;
             }
 
-            Left = Correct(volts, currents, order, columns);
-            if (Debug && iteration > 200) Console.WriteLine($"      {iteration} {Left:E2} volts {string.Join(" ", volts.ToArray().Select(v => v.ToString("F3")))}");
+            double left = Correct(volts, currents, order, columns);
             if (!both)
             {
                 Follow(map, offsets, volts, currents);
@@ -73,17 +74,15 @@ internal sealed class JunctionStep
                 }
             }
 
-            if (Left < LargestLeft)
+            if (left < LargestLeft)
             {
                 Slopes(map, right, currents, slopes, order, columns);
-                return;
+                return left;
             }
         }
 
-        Left = double.PositiveInfinity;
-        if (Debug) Console.WriteLine($"      FAIL volts {string.Join(" ", volts.ToArray().Select(v => v.ToString("F3")))} offsets {string.Join(" ", offsets.ToArray().Select(v => v.ToString("F3")))} map {string.Join(" ", map.Slice(0,72).ToArray().Select(v => v.ToString("E2")))}");
+        return double.PositiveInfinity;
     }
-    public static bool Debug;
 
     // Rises of a conducting junction's voltage by Newton's method overshoot: its current's logarithm takes their place.
     public static double Limit(double volts, double change)

@@ -1,4 +1,3 @@
-using System.Collections.Concurrent;
 using System.Numerics;
 
 namespace PartPick.Physics.Steady;
@@ -9,8 +8,13 @@ namespace PartPick.Physics.Steady;
 /// </summary>
 internal sealed class PeriodMesh
 {
+    /// <summary>Level of the longest steps.</summary>
+    public const int CoarsestLevel = 4;
+
+    /// <summary>Level of the shortest steps.</summary>
     public const int FinestLevel = 13;
-    private static readonly ConcurrentDictionary<int, Complex[]> Turns = new();
+
+    private static readonly Complex[]?[] KnownTurns = new Complex[]?[FinestLevel + 1];
 
     private PeriodMesh(int[] levels)
     {
@@ -41,11 +45,18 @@ internal sealed class PeriodMesh
         return new PeriodMesh(levels);
     }
 
-    /// <summary>e^(jθ) at the stages of all steps of one level.</summary>
-    public static Complex[] TurnsOf(int level) => Turns.GetOrAdd(level, MakeTurns);
+    /// <summary>Length of a step in radians.</summary>
+    public double Length(int step) => 2 * Math.PI / (1 << Levels[step]);
 
-    /// <summary>Index in <see cref="TurnsOf"/> of a step's first stage.</summary>
-    public int TurnIndex(int step) => Radau.Stages * (Starts[step] >> (FinestLevel - Levels[step]));
+    /// <summary>Length of a step in steps of the finest level.</summary>
+    public double Span(int step) => 1 << (FinestLevel - Levels[step]);
+
+    /// <summary>Where a stage stands, in steps of the finest level.</summary>
+    public double Place(int step, int stage) => Starts[step] + Radau.Nodes[stage] * Span(step);
+
+    /// <summary>e^(jθ) at the stages of a step.</summary>
+    public ReadOnlySpan<Complex> Turns(int step) =>
+        TurnsOf(Levels[step]).AsSpan(Radau.Stages * (Starts[step] >> (FinestLevel - Levels[step])), Radau.Stages);
 
     /// <summary>Every step halved.</summary>
     public PeriodMesh Halved()
@@ -80,6 +91,8 @@ internal sealed class PeriodMesh
 
         return new PeriodMesh([.. levels]);
     }
+
+    private static Complex[] TurnsOf(int level) => KnownTurns[level] ??= MakeTurns(level);
 
     private static Complex[] MakeTurns(int level)
     {
