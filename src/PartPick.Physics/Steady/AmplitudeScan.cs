@@ -11,6 +11,7 @@ internal sealed class AmplitudeScan
     private const double LargestRatio = 1.35;
     private const double SmallestRatio = 1.03;
     private const double RunningTolerance = 1e-7;
+    private const double JumpAgain = 0.7;
     private const int MostSteps = 400;
     private const int MostFiner = 3;
     private readonly Refinement _refinement;
@@ -18,6 +19,7 @@ internal sealed class AmplitudeScan
     private readonly double _radians;
     private readonly bool _runningOnly;
     private ForcedState _balance;
+    private double _jumpedAt = double.PositiveInfinity;
     private int _finer;
 
     /// <param name="refinement">The circuit's balances.</param>
@@ -125,10 +127,10 @@ internal sealed class AmplitudeScan
         double ratio = LargestRatio;
         double negative = Note();
         double slope = -_balance.ResistanceSlope;
-        for (int step = 0; step < MostSteps; step++)
+        for (int step = 0; step < MostSteps && peak < _balance.LargestPeakAmps; step++)
         {
             _balance.Remember();
-            if (_balance.FallsForGood && slope < 0 && negative > _resistance && Jump(peak))
+            if (_balance.FallsForGood && slope < 0 && negative > _resistance && negative < JumpAgain * _jumpedAt && Jump(peak))
             {
                 return;
             }
@@ -172,6 +174,7 @@ internal sealed class AmplitudeScan
     // Straight to the running amplitude from one below it, where −Re Zc falls already.
     private bool Jump(double peak)
     {
+        _jumpedAt = -_balance.Impedance.Real;
         if (_balance.SolveRunning(_resistance, RunningTolerance) && _balance.PeakAmps > peak && _balance.ResistanceSlope > 0)
         {
             Running = _balance;

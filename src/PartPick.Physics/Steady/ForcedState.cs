@@ -26,6 +26,9 @@ internal abstract class ForcedState
     /// <summary>Largest amplitude in amperes at which the circuit still acts as linear, about.</summary>
     public abstract double LinearPeakAmps { get; }
 
+    /// <summary>Amplitude in amperes beyond which no steady state need be looked for.</summary>
+    public virtual double LargestPeakAmps => double.PositiveInfinity;
+
     /// <summary>True where the supply limits the last solved state (collector junction conducting).</summary>
     public virtual bool LimitedBySupply => false;
 

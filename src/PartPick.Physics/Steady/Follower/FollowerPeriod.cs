@@ -12,11 +12,12 @@ namespace PartPick.Physics.Steady;
 internal sealed class FollowerPeriod : ForcedState
 {
     private const int LogAmps = FollowerPass.LogAmps;
-    private const int MostMeshes = 5;
     private const double GivenTolerance = 1e-3;
     private const double MeshTolerance = 0.03;
     private const double MeshSlack = 2;
     private const double SupplyLimitVolts = 0.4;
+    private const double JunctionVolts = 1;
+    private const double LargestSwing = 20;
     private const double Halving = 1.0 / 16;
     private readonly FollowerCircuit _circuit;
     private readonly FollowerBias _bias;
@@ -42,12 +43,16 @@ internal sealed class FollowerPeriod : ForcedState
         _network = new FollowerNetwork(circuit);
         _elements = new FollowerElements(circuit, _units);
         _pass = new FollowerPass(_units, _elements, circuit.Transistor.Beta);
-        _shooting = new FollowerShooting(_pass, new FollowerEquations(_units));
+        _shooting = new FollowerShooting(_pass, new FollowerEquations(_units), meshTolerance);
         _remembered = new FollowerOrbit(_shooting.Now.Mesh);
     }
 
     /// <inheritdoc/>
     public override double LinearPeakAmps => 0.2 * _units.Volts / Complex.Abs(LinearControl());
+
+    /// <inheritdoc/>
+    public override double LargestPeakAmps =>
+        LargestSwing * (_circuit.SupplyVolts + JunctionVolts) / Complex.Abs(_ports.Own);
 
     /// <inheritdoc/>
     public override bool FallsForGood => true;
@@ -182,31 +187,15 @@ internal sealed class FollowerPeriod : ForcedState
     private Complex LinearControl() =>
         _network.At(new Complex(0, Radians)).ControlPerCurrent(_bias.TransconductanceSiemens);
 
-    // Roughly until the steps fit the currents, then as closely as asked.
     private bool Solve(double? resistanceOhms, double tolerance, double slack)
     {
-        for (int mesh = 0; mesh < MostMeshes; mesh++)
+        bool solved = _shooting.Solve(resistanceOhms, tolerance, slack);
+        if (solved)
         {
-            if (!_shooting.Solve(resistanceOhms, Math.Max(tolerance, GivenTolerance)))
-            {
-                return false;
-            }
-
-            if (OrbitMeshing.Fit(_shooting.At, _meshTolerance, slack) is not { } fitted)
-            {
-                break;
-            }
-
-            _shooting.Use(fitted);
+            Note(resistanceOhms);
         }
 
-        if (tolerance < GivenTolerance && !_shooting.Solve(resistanceOhms, tolerance))
-        {
-            return false;
-        }
-
-        Note(resistanceOhms);
-        return true;
+        return solved;
     }
 
     private void Note(double? resistanceOhms)

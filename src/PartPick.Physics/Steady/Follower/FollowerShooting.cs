@@ -9,10 +9,13 @@ internal sealed class FollowerShooting
     private const int Unknowns = FollowerPass.Unknowns;
     private const int LogAmps = FollowerPass.LogAmps;
     private const int MostPasses = 60;
-    private const double LargestLogStep = 1;
+    private const int MostMeshes = 8;
+    private const double LargestLogStep = 0.5;
     private const double SmallestFraction = 1e-3;
     private const double SmallMismatch = 1e-3;
     private const double StepsLeft = 1e-5;
+    private const double FarStep = 1;
+    private const double FarSlack = 16;
     private readonly FollowerPass _pass;
     private readonly FollowerEquations _equations;
     private readonly double[] _from = new double[Unknowns];
@@ -21,8 +24,14 @@ internal sealed class FollowerShooting
     private readonly double[] _weights = new double[Unknowns];
     private readonly double[] _inverse = new double[Unknowns * Unknowns];
 
-    public FollowerShooting(FollowerPass pass, FollowerEquations equations)
+    private readonly double _meshTolerance;
+
+    /// <param name="pass">Makes the passes.</param>
+    /// <param name="equations">Says what makes a pass a periodic state.</param>
+    /// <param name="meshTolerance">How closely the steps of the period follow the currents.</param>
+    public FollowerShooting(FollowerPass pass, FollowerEquations equations, double meshTolerance)
     {
+        _meshTolerance = meshTolerance;
         _pass = pass;
         _equations = equations;
         At = new FollowerOrbit(PeriodMesh.Uniform(PeriodMesh.CoarsestLevel));
@@ -47,41 +56,41 @@ internal sealed class FollowerShooting
     /// <summary>d ln(−Re Zc)/d ln I of a state solved for its amplitude.</summary>
     public double RunningSlope => 1 / _inverse[LogAmps * Unknowns + LogAmps];
 
-    /// <summary>Number of passes made.</summary>
-    public static int Passes { get; set; }
-
     /// <summary>Solves for the periodic state, from what is known.</summary>
     /// <param name="resistanceOhms">Rm in ohms; null where the amplitude is given.</param>
     /// <param name="tolerance">Largest last step of a voltage, in thermal voltages.</param>
-    public bool Solve(double? resistanceOhms, double tolerance)
+    /// <param name="slack">How far a step of the period may exceed what its currents ask for.</param>
+    public bool Solve(double? resistanceOhms, double tolerance, double slack)
     {
         double before = double.PositiveInfinity;
         double fraction = 1;
+        int meshes = 0;
         for (int pass = 0; pass < MostPasses; pass++)
         {
-            Passes++;
             bool solved = _pass.Run(Now, Values, Math.Exp(Values[LogAmps])) && _equations.Solve(_pass, Values, resistanceOhms);
-            if (pass > 0)
+            double next = solved ? _equations.Size(_inverse, _weights) : double.PositiveInfinity;
+            if (!solved || (next > SmallMismatch && next > (1 - fraction / 4) * before))
             {
-                double next = solved ? _equations.Size(_inverse, _weights) : double.PositiveInfinity;
-                if (next > SmallMismatch && !(next < (1 - fraction / 4) * before))
+                fraction /= 2;
+                if (fraction < SmallestFraction || double.IsPositiveInfinity(before))
                 {
-                    fraction /= 2;
-                    if (fraction < SmallestFraction)
-                    {
-                        return false;
-                    }
-
-                    Take(fraction);
-                    continue;
+                    return false;
                 }
-            }
-            else if (!solved)
-            {
-                return false;
+
+                Take(fraction);
+                continue;
             }
 
             before = Accept();
+            if (meshes < MostMeshes && OrbitMeshing.Fit(At, _meshTolerance, before > FarStep ? FarSlack : slack) is { } fitted)
+            {
+                meshes++;
+                before = double.PositiveInfinity;
+                Now.Copy(At);
+                Use(fitted);
+                continue;
+            }
+
             if (before < tolerance && _pass.Left < StepsLeft)
             {
                 Take(1);
