@@ -1,5 +1,3 @@
-using System.Numerics;
-
 namespace PartPick.Physics.Steady;
 
 /// <summary>
@@ -12,6 +10,11 @@ internal sealed class AmplitudeScan
     private const double SmallestRatio = 1.03;
     private const double RunningTolerance = 1e-7;
     private const double JumpAgain = 0.7;
+    private const double NearlyRunning = 0.9;
+    private const double SmallerBy = 4;
+    private const double SmallestShare = 1e-4;
+    private const double SmallestLogStep = 1e-3;
+    private const double CrestAccuracy = 1.005;
     private const int MostSteps = 400;
     private const int MostFiner = 3;
     private readonly Refinement _refinement;
@@ -80,7 +83,7 @@ internal sealed class AmplitudeScan
 
             double next = Note();
             double nextSlope = -_balance.ResistanceSlope;
-            LargestNegativeOhms = Math.Max(LargestNegativeOhms, HermitePeak(next, nextSlope, negative, slope, Math.Log(ratio)));
+            Note(CubicCrest.Between(next, nextSlope, negative, slope, Math.Log(ratio)));
             if (Running is null && negative <= _resistance && next > _resistance)
             {
                 ForcedState scanning = _balance;
@@ -127,6 +130,11 @@ internal sealed class AmplitudeScan
         double ratio = LargestRatio;
         double negative = Note();
         double slope = -_balance.ResistanceSlope;
+        if (slope < 0 && negative <= _resistance && negative > NearlyRunning * _resistance && RunSmall(peak))
+        {
+            return;
+        }
+
         for (int step = 0; step < MostSteps && peak < _balance.LargestPeakAmps; step++)
         {
             _balance.Remember();
@@ -147,7 +155,16 @@ internal sealed class AmplitudeScan
 
             double next = -_balance.Impedance.Real;
             double nextSlope = -_balance.ResistanceSlope;
-            LargestNegativeOhms = Math.Max(LargestNegativeOhms, HermitePeak(negative, slope, next, nextSlope, Math.Log(ratio)));
+            CubicCrest crest = CubicCrest.Between(negative, slope, next, nextSlope, Math.Log(ratio));
+            if (crest.Height > CrestAccuracy * Math.Max(negative, next) && crest.Place > SmallestLogStep)
+            {
+                // A sharp crest, or one that alone is above Rm: on to where it should be.
+                _balance.Recall();
+                ratio = Math.Exp(crest.Place);
+                continue;
+            }
+
+            Note(crest);
             Note();
             if (negative > _resistance && next <= _resistance)
             {
@@ -169,6 +186,24 @@ internal sealed class AmplitudeScan
             ratio = Math.Min(LargestRatio, ratio * ratio);
             (negative, slope) = (next, nextSlope);
         }
+    }
+
+    // A circuit that only just builds up runs at an amplitude at which it still acts as linear, about.
+    private bool RunSmall(double peak)
+    {
+        _balance.Remember();
+        for (double small = peak / SmallerBy; small > SmallestShare * peak; small /= SmallerBy)
+        {
+            _balance.StartLinear(small);
+            if (_balance.SolveAt(small) && Note() > _resistance)
+            {
+                FindRunning(small, small * SmallerBy);
+                return true;
+            }
+        }
+
+        _balance.Recall();
+        return false;
     }
 
     // Straight to the running amplitude from one below it, where −Re Zc falls already.
@@ -213,6 +248,8 @@ internal sealed class AmplitudeScan
         return negative;
     }
 
+    private void Note(in CubicCrest crest) => LargestNegativeOhms = Math.Max(LargestNegativeOhms, crest.Height);
+
     private void FindRunning(double below, double above)
     {
         _balance.Remember();
@@ -246,28 +283,5 @@ internal sealed class AmplitudeScan
                 return;
             }
         }
-    }
-
-    private static double HermitePeak(double y0, double m0, double y1, double m1, double width)
-    {
-        if (!(m0 > 0 && m1 < 0))
-        {
-            return double.NegativeInfinity;
-        }
-
-        // Derivative of the cubic through both ends on t in 0 … 1: a t² + b t + c = 0.
-        double c = m0 * width;
-        double b = 6 * (y1 - y0) - 4 * m0 * width - 2 * m1 * width;
-        double a = 3 * (m0 + m1) * width - 6 * (y1 - y0);
-        Complex root = Math.Abs(a) < 1e-12 * Math.Abs(b) ? -c / b : (-b - Complex.Sqrt(b * b - 4 * a * c)) / (2 * a);
-        double t = root.Real;
-        if (!(t > 0 && t < 1))
-        {
-            t = m0 / (m0 - m1);
-        }
-
-        double t2 = t * t;
-        double t3 = t2 * t;
-        return (2 * t3 - 3 * t2 + 1) * y0 + (t3 - 2 * t2 + t) * width * m0 + (3 * t2 - 2 * t3) * y1 + (t3 - t2) * width * m1;
     }
 }

@@ -12,6 +12,7 @@ internal static class SteadySolver
     private const double FrequencyAgreement = 3e-8;
     private const double CurrentAgreement = 1e-3;
     private const int FollowedLevel = 1;
+    private const int MostScans = 3;
     private const double EstimateTolerance = 1e-7;
     private const double RoughTolerance = 1e-9;
     private const double RoughStep = 1e-7;
@@ -30,12 +31,27 @@ internal static class SteadySolver
         where TNetwork : struct, ILinearNetwork
     {
         var branch = new CrystalBranch(crystal);
-        var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms);
-        largestNegativeOhms = scan.LargestNegativeOhms;
+        double radians = FirstGuess(branch, network, siemens);
         state = null;
-        return scan.Running is { } running && Refine(branch, refinement, running, out state) is { } refined
-            ? Describe(crystal, refined)
-            : null;
+        largestNegativeOhms = double.NegativeInfinity;
+        for (int scans = 0; scans < MostScans; scans++)
+        {
+            var scan = new AmplitudeScan(refinement, radians, crystal.ResistanceOhms);
+            largestNegativeOhms = scan.LargestNegativeOhms;
+            if (scan.Running is not { } running)
+            {
+                return null;
+            }
+
+            // Where −Re Zc turns back near Rm, the amplitude found at one frequency may be none at the next.
+            radians = FrequencyOf(branch, running);
+            if (Refine(branch, refinement, running, out state) is { } refined)
+            {
+                return Describe(crystal, refined);
+            }
+        }
+
+        return null;
     }
 
     /// <summary>
@@ -96,7 +112,7 @@ internal static class SteadySolver
             return null;
         }
 
-        double radians = branch.SeriesRadians * (1 + branch.OffsetForReactance(balance.Impedance.Imaginary));
+        double radians = FrequencyOf(branch, balance);
         double rms = balance.PeakAmps / Math.Sqrt(2);
         state = balance.Keep();
         return new SteadyEstimate(radians / (2 * Math.PI), crystal.ResistanceOhms * rms * rms);
@@ -165,7 +181,7 @@ internal static class SteadySolver
                 return false;
             }
 
-            double radians = branch.SeriesRadians * (1 + branch.OffsetForReactance(balance.Impedance.Imaginary));
+            double radians = FrequencyOf(branch, balance);
             if (Math.Abs(radians - balance.Radians) < (roughly ? RoughStep : FineStep) * radians)
             {
                 balance.CorrectFrequency(radians);
@@ -177,6 +193,9 @@ internal static class SteadySolver
 
         return true;
     }
+
+    private static double FrequencyOf(in CrystalBranch branch, ForcedState state) =>
+        branch.SeriesRadians * (1 + branch.OffsetForReactance(state.Impedance.Imaginary));
 
     private static RunningFigures FiguresOf(Crystal crystal, ForcedState balance)
     {

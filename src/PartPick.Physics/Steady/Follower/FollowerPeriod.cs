@@ -13,7 +13,7 @@ internal sealed class FollowerPeriod : ForcedState
 {
     private const int LogAmps = FollowerPass.LogAmps;
     private const double GivenTolerance = 1e-3;
-    private const double MeshTolerance = 0.03;
+    private const double MeshTolerance = 0.02;
     private const double MeshSlack = 2;
     private const double SupplyLimitVolts = 0.4;
     private const double JunctionVolts = 1;
