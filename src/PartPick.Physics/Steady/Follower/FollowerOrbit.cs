@@ -18,32 +18,22 @@ internal sealed class FollowerOrbit
     private double[] _slopes = [];
 
     /// <param name="mesh">The steps.</param>
-    public FollowerOrbit(PeriodMesh mesh) => Use(mesh);
+    public FollowerOrbit(PeriodMesh mesh) => Mesh = mesh;
 
     /// <summary>The steps.</summary>
-    public PeriodMesh Mesh { get; private set; } = null!;
+    public PeriodMesh Mesh { get; private set; }
 
     /// <summary>Voltages, six to a step.</summary>
-    public Span<double> Volts => _volts.AsSpan(0, Mesh.Count * Voltages);
+    public Span<double> Volts => Room(ref _volts, Mesh.Count * Voltages);
 
     /// <summary>Currents, six to a step.</summary>
-    public Span<double> Currents => _currents.AsSpan(0, Mesh.Count * Voltages);
+    public Span<double> Currents => Room(ref _currents, Mesh.Count * Voltages);
 
     /// <summary>Derivatives of the voltages, in rows of <see cref="JunctionStep.Width"/>.</summary>
-    public Span<double> Slopes => _slopes.AsSpan(0, Mesh.Count * Voltages * Width);
+    public Span<double> Slopes => Room(ref _slopes, Mesh.Count * Voltages * Width);
 
     /// <summary>Takes other steps; what is known of the voltages is lost.</summary>
-    public void Use(PeriodMesh mesh)
-    {
-        Mesh = mesh;
-        int count = mesh.Count * Voltages;
-        if (_volts.Length < count)
-        {
-            _volts = new double[count];
-            _currents = new double[count];
-            _slopes = new double[count * Width];
-        }
-    }
+    public void Use(PeriodMesh mesh) => Mesh = mesh;
 
     /// <summary>Takes steps and voltages from another.</summary>
     public void Copy(FollowerOrbit from)
@@ -63,7 +53,7 @@ internal sealed class FollowerOrbit
         Span<double> volts = Volts;
         for (int k = 0; k < volts.Length; k++)
         {
-            volts[k] = JunctionStep.Limit(volts[k], Vector256.Sum(rows[2 * k] * low + rows[2 * k + 1] * high));
+            volts[k] = JunctionLimit.Change(volts[k], Vector256.Sum(rows[2 * k] * low + rows[2 * k + 1] * high));
         }
     }
 
@@ -87,13 +77,14 @@ internal sealed class FollowerOrbit
     /// <summary>Small signals: a mean and a sine at the base–emitter junction, the other junction still.</summary>
     public void Start(double forward, Complex sine, double reverse)
     {
+        Span<double> volts = Volts;
         for (int step = 0; step < Mesh.Count; step++)
         {
             ReadOnlySpan<Complex> turns = Mesh.Turns(step);
             for (int k = 0; k < Stages; k++)
             {
-                _volts[step * Voltages + k] = forward + (sine * turns[k]).Real;
-                _volts[step * Voltages + Stages + k] = reverse;
+                volts[step * Voltages + k] = forward + (sine * turns[k]).Real;
+                volts[step * Voltages + Stages + k] = reverse;
             }
         }
     }
@@ -149,5 +140,15 @@ internal sealed class FollowerOrbit
         }
 
         return (reverse, high - low);
+    }
+
+    private static Span<double> Room(ref double[] array, int count)
+    {
+        if (array.Length < count)
+        {
+            array = new double[count];
+        }
+
+        return array.AsSpan(0, count);
     }
 }

@@ -39,7 +39,7 @@ internal sealed class FollowerPass
     {
         _units = units;
         _elements = elements;
-        Sums = new PassIntegrals(beta);
+        Sums = new PassIntegrals(beta, units.GivenCurrent);
     }
 
     /// <summary>What the pass sums up.</summary>
@@ -78,13 +78,16 @@ internal sealed class FollowerPass
         Left = 0;
         Sums.Clear();
         PeriodMesh mesh = orbit.Mesh;
+        Span<double> allVolts = orbit.Volts;
+        Span<double> allCurrents = orbit.Currents;
+        Span<double> allSlopes = orbit.Slopes;
         for (int step = 0; step < mesh.Count; step++)
         {
             ReadOnlySpan<double> map = MapOf(mesh.Levels[step]);
             ReadOnlySpan<Complex> turns = mesh.Turns(step);
-            Span<double> volts = orbit.Volts.Slice(step * Voltages, Voltages);
-            Span<double> currents = orbit.Currents.Slice(step * Voltages, Voltages);
-            Span<double> slopes = orbit.Slopes.Slice(step * Voltages * Width, Voltages * Width);
+            Span<double> volts = allVolts.Slice(step * Voltages, Voltages);
+            Span<double> currents = allCurrents.Slice(step * Voltages, Voltages);
+            Span<double> slopes = allSlopes.Slice(step * Voltages * Width, Voltages * Width);
             for (int k = 0; k < Stages; k++)
             {
                 Prepare(map, k, _units.JunctionShift, Real(junction, turns[k]));

@@ -93,7 +93,7 @@ internal sealed class FollowerPeriod : ForcedState
         double inner = _units.Base - baseAmps * _units.Spreading;
         double junction = Math.Log(_units.Collector);
         double emitter = inner - junction + _units.JunctionShift;
-        _shooting.Now.Use(PeriodMesh.Uniform(PeriodMesh.CoarsestLevel));
+        _shooting.Now.Use(PeriodMesh.Coarsest);
         _shooting.Now.Start(junction, LinearControl() * peakAmps / _units.Volts, inner + _units.InnerShift);
         _elements.Charges(Radians, _units.Base, inner, emitter, _units.Collector, Values);
         PutAmplitude(peakAmps);

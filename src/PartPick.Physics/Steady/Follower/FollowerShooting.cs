@@ -34,7 +34,7 @@ internal sealed class FollowerShooting
         _meshTolerance = meshTolerance;
         _pass = pass;
         _equations = equations;
-        At = new FollowerOrbit(PeriodMesh.Uniform(PeriodMesh.CoarsestLevel));
+        At = new FollowerOrbit(PeriodMesh.Coarsest);
         Now = new FollowerOrbit(At.Mesh);
     }
 

@@ -17,11 +17,12 @@ internal static class OrbitMeshing
     {
         PeriodMesh mesh = orbit.Mesh;
         Span<int> cuts = mesh.Count <= 512 ? stackalloc int[mesh.Count] : new int[mesh.Count];
-        double total = Integral(orbit);
+        ReadOnlySpan<double> currents = orbit.Currents;
+        double total = Integral(mesh, currents);
         bool changes = false;
         for (int step = 0; step < mesh.Count; step++)
         {
-            double error = mesh.Length(step) * Difference(orbit, step) / (total * tolerance);
+            double error = mesh.Length(step) * Difference(mesh, currents, step) / (total * tolerance);
             if (error > 1)
             {
                 int wanted = Math.Max(1, (int)Math.Ceiling(Math.Log(error) / Math.Log(CutGain) - 0.2));
@@ -73,26 +74,26 @@ internal static class OrbitMeshing
         return Math.Min(highest, Radau.Cubic(t, start, stages[0], stages[1], stages[2]));
     }
 
-    private static double Integral(FollowerOrbit orbit)
+    private static double Integral(PeriodMesh mesh, ReadOnlySpan<double> currents)
     {
         double total = 0;
-        for (int k = 0; k < orbit.Currents.Length; k++)
+        for (int k = 0; k < currents.Length; k++)
         {
-            total += orbit.Currents[k] * Radau.Weights[k % Stages] * orbit.Mesh.Length(k / Voltages);
+            total += currents[k] * Radau.Weights[k % Stages] * mesh.Length(k / Voltages);
         }
 
         return total;
     }
 
-    private static double Difference(FollowerOrbit orbit, int step)
+    private static double Difference(PeriodMesh mesh, ReadOnlySpan<double> currents, int step)
     {
-        int before = (step == 0 ? orbit.Mesh.Count - 1 : step - 1) * Voltages;
+        int before = (step == 0 ? mesh.Count - 1 : step - 1) * Voltages + Stages - 1;
         double sum = 0;
         for (int kind = 0; kind < Voltages; kind += Stages)
         {
-            ReadOnlySpan<double> at = orbit.Currents.Slice(step * Voltages + kind, Stages);
+            ReadOnlySpan<double> at = currents.Slice(step * Voltages + kind, Stages);
             sum += Math.Abs(
-                Radau.ThirdDifference[0] * orbit.Currents[before + kind + 2]
+                Radau.ThirdDifference[0] * currents[before + kind]
                 + Radau.ThirdDifference[1] * at[0]
                 + Radau.ThirdDifference[2] * at[1]
                 + Radau.ThirdDifference[3] * at[2]);

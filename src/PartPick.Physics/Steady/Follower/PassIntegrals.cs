@@ -16,13 +16,20 @@ internal sealed class PassIntegrals
     private readonly double[] _resistance = new double[Width];
     private readonly double[] _reactance = new double[Width];
 
+    private readonly bool _holdsBase;
+
     /// <param name="beta">Current gain.</param>
-    public PassIntegrals(double beta) => _emitterPerForward = 1 + 1 / beta;
+    /// <param name="holdsBase">Whether the mean of the collector junction's voltage is asked for.</param>
+    public PassIntegrals(double beta, bool holdsBase)
+    {
+        _emitterPerForward = 1 + 1 / beta;
+        _holdsBase = holdsBase;
+    }
 
     /// <summary>Mean emitter current.</summary>
     public double MeanEmitter { get; private set; }
 
-    /// <summary>Mean of the collector junction's voltage.</summary>
+    /// <summary>Mean of the collector junction's voltage, where it is asked for.</summary>
     public double MeanReverse { get; private set; }
 
     /// <summary>Zc in ohms.</summary>
@@ -66,27 +73,43 @@ internal sealed class PassIntegrals
         ReadOnlySpan<double> slopes)
     {
         ReadOnlySpan<Vector256<double>> lines = MemoryMarshal.Cast<double, Vector256<double>>(slopes);
+        Span<Vector256<double>> emitter = MemoryMarshal.Cast<double, Vector256<double>>(_emitter.AsSpan());
+        Span<Vector256<double>> resistance = MemoryMarshal.Cast<double, Vector256<double>>(_resistance.AsSpan());
+        Span<Vector256<double>> reactance = MemoryMarshal.Cast<double, Vector256<double>>(_reactance.AsSpan());
+        double real = 0;
+        double imaginary = 0;
         for (int k = 0; k < Stages; k++)
         {
             double weight = Radau.Weights[k] * share;
             double forward = weight * currents[k];
-            double backward = weight * currents[Stages + k];
             Complex turn = Complex.Conjugate(turns[k]) * (2 / amps);
             Complex perForward = ports.OwnPerForward * turn * forward;
-            Complex perReverse = ports.OwnPerReverse * turn * backward;
-            MeanEmitter += _emitterPerForward * forward - backward;
-            MeanReverse += weight * volts[Stages + k];
-            Impedance += perForward + perReverse;
-            for (int half = 0; half < 2; half++)
+            MeanEmitter += _emitterPerForward * forward;
+            real += perForward.Real;
+            imaginary += perForward.Imaginary;
+            Accumulate(emitter, lines, k, _emitterPerForward * forward);
+            Accumulate(resistance, lines, k, perForward.Real);
+            Accumulate(reactance, lines, k, perForward.Imaginary);
+            if (currents[Stages + k] != 0)
             {
-                Vector256<double> u = lines[2 * k + half];
-                Vector256<double> w = lines[2 * (Stages + k) + half];
-                Accumulate(_emitter, half, u, _emitterPerForward * forward, w, -backward);
-                Accumulate(_reverse, half, u, 0, w, weight);
-                Accumulate(_resistance, half, u, perForward.Real, w, perReverse.Real);
-                Accumulate(_reactance, half, u, perForward.Imaginary, w, perReverse.Imaginary);
+                double backward = weight * currents[Stages + k];
+                Complex perReverse = ports.OwnPerReverse * turn * backward;
+                MeanEmitter -= backward;
+                real += perReverse.Real;
+                imaginary += perReverse.Imaginary;
+                Accumulate(emitter, lines, Stages + k, -backward);
+                Accumulate(resistance, lines, Stages + k, perReverse.Real);
+                Accumulate(reactance, lines, Stages + k, perReverse.Imaginary);
+            }
+
+            if (_holdsBase)
+            {
+                MeanReverse += weight * volts[Stages + k];
+                Accumulate(MemoryMarshal.Cast<double, Vector256<double>>(_reverse.AsSpan()), lines, Stages + k, weight);
             }
         }
+
+        Impedance += new Complex(real, imaginary);
     }
 
     /// <summary>Ends a pass: what the crystal's current itself makes at its terminals.</summary>
@@ -97,9 +120,9 @@ internal sealed class PassIntegrals
         Impedance += own;
     }
 
-    private static void Accumulate(double[] sums, int half, Vector256<double> u, double perU, Vector256<double> w, double perW)
+    private static void Accumulate(Span<Vector256<double>> sums, ReadOnlySpan<Vector256<double>> lines, int line, double weight)
     {
-        ref Vector256<double> sum = ref MemoryMarshal.Cast<double, Vector256<double>>(sums.AsSpan())[half];
-        sum += u * perU + w * perW;
+        sums[0] += lines[2 * line] * weight;
+        sums[1] += lines[2 * line + 1] * weight;
     }
 }

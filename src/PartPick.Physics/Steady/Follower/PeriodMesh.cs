@@ -37,13 +37,8 @@ internal sealed class PeriodMesh
     /// <summary>Beginning of each step, in steps of the finest level.</summary>
     public int[] Starts { get; }
 
-    /// <summary>All steps of one level.</summary>
-    public static PeriodMesh Uniform(int level)
-    {
-        int[] levels = new int[1 << level];
-        Array.Fill(levels, level);
-        return new PeriodMesh(levels);
-    }
+    /// <summary>The longest steps throughout.</summary>
+    public static PeriodMesh Coarsest { get; } = new([.. Enumerable.Repeat(CoarsestLevel, 1 << CoarsestLevel)]);
 
     /// <summary>Length of a step in radians.</summary>
     public double Length(int step) => 2 * Math.PI / (1 << Levels[step]);
