@@ -27,7 +27,12 @@ internal static class SteadySolver
     /// <param name="state">The state, as a starting point for circuits like this one.</param>
     /// <returns>The steady state, or null where there is none.</returns>
     public static SteadyState? Solve<TNetwork>(
-        Crystal crystal, in TNetwork network, double siemens, Refinement refinement, out double largestNegativeOhms, out RunningState? state)
+        Crystal crystal,
+        in TNetwork network,
+        double siemens,
+        Refinement refinement,
+        out double largestNegativeOhms,
+        out RunningState? state)
         where TNetwork : struct, ILinearNetwork
     {
         var branch = new CrystalBranch(crystal);

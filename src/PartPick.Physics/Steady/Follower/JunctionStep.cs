@@ -1,5 +1,3 @@
-using System.Runtime.InteropServices;
-using System.Runtime.Intrinsics;
 using PartPick.Physics.Numerics;
 
 namespace PartPick.Physics.Steady;
@@ -23,7 +21,6 @@ internal sealed class JunctionStep
     private const int MostIterations = 60;
     private const double LargestLeft = 1e-3;
     private const double Negligible = -18;
-    private readonly SingleJunction _single = new();
     private readonly double[] _rows = new double[Voltages * 4 * Vectors];
 
     /// <summary>Solves a step; returns the largest correction of the last iteration, infinite where there is no solution.</summary>
@@ -43,7 +40,7 @@ internal sealed class JunctionStep
     {
         if (IsNegligible(volts[Stages..]))
         {
-            double left = _single.Solve(map, offsets, right, volts, currents, slopes);
+            double left = SingleJunction.Solve(map, offsets, right, volts, currents, slopes);
             if (!double.IsFinite(left) || IsNegligible(volts[Stages..]))
             {
                 return left;

@@ -7,7 +7,7 @@ namespace PartPick.Physics.Steady;
 /// A step in which the collector junction carries nothing: three equations, by their adjugate. Most steps are such, and most of
 /// the time of a follower's analysis goes here.
 /// </summary>
-internal sealed class SingleJunction
+internal static class SingleJunction
 {
     private const int Stages = Radau.Stages;
     private const int Width = FollowerElements.MapWidth;
@@ -16,7 +16,7 @@ internal sealed class SingleJunction
     private const double LargestLeft = 1e-3;
 
     /// <summary>Solves the step as <see cref="JunctionStep"/> does; the collector junction's voltages follow.</summary>
-    public double Solve(
+    public static double Solve(
         ReadOnlySpan<double> map,
         ReadOnlySpan<double> offsets,
         ReadOnlySpan<double> right,
