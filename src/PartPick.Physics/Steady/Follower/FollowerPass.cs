@@ -24,12 +24,10 @@ internal sealed class FollowerPass
     private readonly FollowerElements _elements;
     private readonly double[]?[] _maps = new double[PeriodMesh.FinestLevel + 1][];
     private readonly bool[] _mapped = new bool[PeriodMesh.FinestLevel + 1];
-    private readonly JunctionStep _step = new();
     private readonly double[] _offsets = new double[Voltages];
     private readonly double[] _right = new double[Voltages * Width];
     private readonly double[] _end = new double[3];
-    private double[] _endSlopes = new double[3 * Width];
-    private double[] _beginSlopes = new double[3 * Width];
+    private readonly double[] _endSlopes = new double[3 * Width];
     private double _radians;
     private double _baseAmps;
     private double _emitterAmps;
@@ -88,13 +86,8 @@ internal sealed class FollowerPass
             Span<double> volts = allVolts.Slice(step * Voltages, Voltages);
             Span<double> currents = allCurrents.Slice(step * Voltages, Voltages);
             Span<double> slopes = allSlopes.Slice(step * Voltages * Width, Voltages * Width);
-            for (int k = 0; k < Stages; k++)
-            {
-                Prepare(map, k, _units.JunctionShift, Real(junction, turns[k]));
-                Prepare(map, Stages + k, _units.InnerShift, Real(inner, turns[k]));
-            }
-
-            Left = Math.Max(Left, _step.Solve(map, _offsets, _right, volts, currents, slopes));
+            Prepare(map, turns, junction, inner);
+            Left = Math.Max(Left, JunctionStep.Solve(map, _offsets, _right, volts, currents, slopes));
             if (!double.IsFinite(Left))
             {
                 return false;
@@ -122,35 +115,42 @@ internal sealed class FollowerPass
         return map;
     }
 
-    // A voltage of a step with no current in either junction, and its derivatives.
-    private void Prepare(ReadOnlySpan<double> map, int k, double shift, double drive)
+    // The voltages of a step with no current in either junction, and their derivatives.
+    private void Prepare(ReadOnlySpan<double> map, ReadOnlySpan<Complex> turns, Complex junction, Complex inner)
     {
-        ReadOnlySpan<double> line = map.Slice(k * FollowerElements.MapWidth, FollowerElements.MapWidth);
-        Span<Vector256<double>> right = MemoryMarshal.Cast<double, Vector256<double>>(_right.AsSpan(k * Width, Width));
-        _offsets[k] = shift + drive + Linear(line, drive, _endSlopes, out right[0], out right[1]);
+        var begin = new ChargeRows(_endSlopes);
+        Span<Vector256<double>> right = MemoryMarshal.Cast<double, Vector256<double>>(_right.AsSpan());
+        for (int k = 0; k < Voltages; k++)
+        {
+            ReadOnlySpan<double> line = map.Slice(k * FollowerElements.MapWidth, FollowerElements.MapWidth);
+            double drive = k < Stages ? Real(junction, turns[k]) : Real(inner, turns[k - Stages]);
+            _offsets[k] = drive + Linear(line) + (k < Stages ? _units.JunctionShift : _units.InnerShift);
+            begin.Combine(line, PerFirstSource(line), PerSecondSource(line, drive), out right[2 * k], out right[2 * k + 1]);
+        }
     }
 
     private void Advance(ReadOnlySpan<double> map, ReadOnlySpan<double> currents, ReadOnlySpan<double> slopes)
     {
-        (_beginSlopes, _endSlopes) = (_endSlopes, _beginSlopes);
+        var begin = new ChargeRows(_endSlopes);
         ReadOnlySpan<Vector256<double>> lines = MemoryMarshal.Cast<double, Vector256<double>>(slopes);
         Span<Vector256<double>> ends = MemoryMarshal.Cast<double, Vector256<double>>(_endSlopes.AsSpan());
+        int carrying = currents[Stages] == 0 ? Stages : Voltages;
         Span<double> charges = stackalloc double[3];
         for (int row = 0; row < 3; row++)
         {
             ReadOnlySpan<double> line = map.Slice((Voltages + row) * FollowerElements.MapWidth, FollowerElements.MapWidth);
-            charges[row] = Linear(line, 0, _beginSlopes, out Vector256<double> low, out Vector256<double> high);
-            for (int k = 0; k < Voltages; k++)
+            double charge = Linear(line);
+            begin.Combine(line, PerFirstSource(line), PerSecondSource(line, 0), out Vector256<double> low, out Vector256<double> high);
+            ReadOnlySpan<double> gains = line.Slice(FollowerElements.ForwardColumn, carrying);
+            for (int k = 0; k < gains.Length; k++)
             {
-                double term = line[FollowerElements.ForwardColumn + k] * currents[k];
-                if (term != 0)
-                {
-                    charges[row] += term;
-                    low += lines[2 * k] * term;
-                    high += lines[2 * k + 1] * term;
-                }
+                double term = gains[k] * currents[k];
+                charge += term;
+                low += lines[2 * k] * term;
+                high += lines[2 * k + 1] * term;
             }
 
+            charges[row] = charge;
             ends[2 * row] = low;
             ends[2 * row + 1] = high;
         }
@@ -159,15 +159,34 @@ internal sealed class FollowerPass
     }
 
     // What the charges at the beginning and the constant currents make of a row of the map.
-    private double Linear(ReadOnlySpan<double> line, double drive, double[] slopes, out Vector256<double> low, out Vector256<double> high)
+    private double Linear(ReadOnlySpan<double> line) =>
+        line[0] * _end[0] + line[1] * _end[1] + line[2] * _end[2]
+        + line[FollowerElements.BaseColumn] * _baseAmps + line[FollowerElements.EmitterColumn] * _emitterAmps;
+
+    private Vector256<double> PerFirstSource(ReadOnlySpan<double> line) =>
+        Vector256.Create(0, 0, 0, line[FollowerElements.EmitterColumn] * _units.EmitterPerSource);
+
+    private Vector256<double> PerSecondSource(ReadOnlySpan<double> line, double drive) =>
+        Vector256.Create(line[FollowerElements.BaseColumn] * _units.BasePerSource, drive, 0, 0);
+
+    // The derivatives of the three charges at the beginning of a step.
+    private readonly struct ChargeRows
     {
-        ReadOnlySpan<Vector256<double>> rows = MemoryMarshal.Cast<double, Vector256<double>>(slopes.AsSpan());
-        double perBase = line[FollowerElements.BaseColumn];
-        double perEmitter = line[FollowerElements.EmitterColumn];
-        low = rows[0] * line[0] + rows[2] * line[1] + rows[4] * line[2]
-            + Vector256.Create(0, 0, 0, perEmitter * _units.EmitterPerSource);
-        high = rows[1] * line[0] + rows[3] * line[1] + rows[5] * line[2]
-            + Vector256.Create(perBase * _units.BasePerSource, drive, 0, 0);
-        return line[0] * _end[0] + line[1] * _end[1] + line[2] * _end[2] + perBase * _baseAmps + perEmitter * _emitterAmps;
+        private readonly Vector256<double> _low0, _high0, _low1, _high1, _low2, _high2;
+
+        public ChargeRows(double[] slopes)
+        {
+            ReadOnlySpan<Vector256<double>> rows = MemoryMarshal.Cast<double, Vector256<double>>(slopes.AsSpan());
+            (_low2, _high2) = (rows[4], rows[5]);
+            (_low1, _high1) = (rows[2], rows[3]);
+            (_low0, _high0) = (rows[0], rows[1]);
+        }
+
+        public void Combine(
+            ReadOnlySpan<double> line, Vector256<double> addLow, Vector256<double> addHigh, out Vector256<double> low, out Vector256<double> high)
+        {
+            low = addLow + _low0 * line[0] + _low1 * line[1] + _low2 * line[2];
+            high = addHigh + _high0 * line[0] + _high1 * line[1] + _high2 * line[2];
+        }
     }
 }
