@@ -8,7 +8,7 @@ internal sealed class AmplitudeScan
 {
     private const double LargestRatio = 1.35;
     private const double SmallestRatio = 1.03;
-    private const double RunningTolerance = 1e-7;
+    private const double RunningTolerance = 1e-5;
     private const double JumpAgain = 0.7;
     private const double NearlyRunning = 0.9;
     private const double SmallerBy = 4;

@@ -9,7 +9,7 @@ namespace PartPick.Physics.Steady;
 internal abstract class ForcedState
 {
     /// <summary>Largest relative residual that a solution leaves, unless it is asked for less.</summary>
-    protected const double FineTolerance = 1e-11;
+    public const double FineTolerance = 1e-11;
 
     /// <summary>Peak motional current in amperes at which the state was last solved.</summary>
     public double PeakAmps { get; protected set; }

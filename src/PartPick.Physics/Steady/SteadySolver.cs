@@ -13,10 +13,11 @@ internal static class SteadySolver
     private const double CurrentAgreement = 1e-3;
     private const int FollowedLevel = 1;
     private const int MostScans = 3;
-    private const double EstimateTolerance = 1e-7;
+    private const int MostSettlings = 12;
+    private const double EstimateTolerance = 1e-5;
     private const double RoughTolerance = 1e-9;
     private const double RoughStep = 1e-7;
-    private const double FineStep = 1e-11;
+    private const double FineStep = 1e-10;
 
     /// <summary>Scans the amplitude and refines the running state.</summary>
     /// <param name="crystal">The crystal.</param>
@@ -172,22 +173,20 @@ internal static class SteadySolver
         return radians;
     }
 
-    // Repeats the running state at the frequency it gives until the frequency stands. The state changes with ω only as fast as
-    // the network does, so what is left is C/Cm times smaller than the last step.
-    public static bool Settle(in CrystalBranch branch, ForcedState balance, bool roughly = false)
+    // Repeats the running state at the frequency it gives until the frequency stands: loosely first, for the frequency moves it
+    // yet. The state changes with ω only as fast as the network does, so what is left is C/Cm times smaller than the last step.
+    private static bool Settle(in CrystalBranch branch, ForcedState balance, bool roughly = false)
     {
-        for (int step = 0; step < 12; step++)
+        for (int step = 0; step < MostSettlings; step++)
         {
-            bool solved = roughly
-                ? balance.SolveRunning(branch.ResistanceOhms, RoughTolerance)
-                : balance.SolveRunning(branch.ResistanceOhms);
-            if (!solved)
+            double tolerance = step == 0 ? EstimateTolerance : roughly ? RoughTolerance : ForcedState.FineTolerance;
+            if (!balance.SolveRunning(branch.ResistanceOhms, tolerance))
             {
                 return false;
             }
 
             double radians = FrequencyOf(branch, balance);
-            if (Math.Abs(radians - balance.Radians) < (roughly ? RoughStep : FineStep) * radians)
+            if (step > 0 && Math.Abs(radians - balance.Radians) < (roughly ? RoughStep : FineStep) * radians)
             {
                 balance.CorrectFrequency(radians);
                 return true;

@@ -91,7 +91,7 @@ internal sealed class FollowerShooting
                 continue;
             }
 
-            if (before < tolerance && _pass.Left < StepsLeft)
+            if (before < tolerance && _pass.Left < Math.Max(StepsLeft, tolerance / 10))
             {
                 Take(1);
                 return true;
