@@ -125,7 +125,9 @@ internal sealed class FollowerPass
             ReadOnlySpan<double> line = map.Slice(k * FollowerElements.MapWidth, FollowerElements.MapWidth);
             double drive = k < Stages ? Real(junction, turns[k]) : Real(inner, turns[k - Stages]);
             _offsets[k] = drive + Linear(line) + (k < Stages ? _units.JunctionShift : _units.InnerShift);
-            begin.Combine(line, PerFirstSource(line), PerSecondSource(line, drive), out right[2 * k], out right[2 * k + 1]);
+            right[2 * k] = PerFirstSource(line);
+            right[2 * k + 1] = PerSecondSource(line, drive);
+            begin.AddTo(line, ref right[2 * k], ref right[2 * k + 1]);
         }
     }
 
@@ -140,7 +142,9 @@ internal sealed class FollowerPass
         {
             ReadOnlySpan<double> line = map.Slice((Voltages + row) * FollowerElements.MapWidth, FollowerElements.MapWidth);
             double charge = Linear(line);
-            begin.Combine(line, PerFirstSource(line), PerSecondSource(line, 0), out Vector256<double> low, out Vector256<double> high);
+            Vector256<double> low = PerFirstSource(line);
+            Vector256<double> high = PerSecondSource(line, 0);
+            begin.AddTo(line, ref low, ref high);
             ReadOnlySpan<double> gains = line.Slice(FollowerElements.ForwardColumn, carrying);
             for (int k = 0; k < gains.Length; k++)
             {
@@ -168,25 +172,4 @@ internal sealed class FollowerPass
 
     private Vector256<double> PerSecondSource(ReadOnlySpan<double> line, double drive) =>
         Vector256.Create(line[FollowerElements.BaseColumn] * _units.BasePerSource, drive, 0, 0);
-
-    // The derivatives of the three charges at the beginning of a step.
-    private readonly struct ChargeRows
-    {
-        private readonly Vector256<double> _low0, _high0, _low1, _high1, _low2, _high2;
-
-        public ChargeRows(double[] slopes)
-        {
-            ReadOnlySpan<Vector256<double>> rows = MemoryMarshal.Cast<double, Vector256<double>>(slopes.AsSpan());
-            (_low2, _high2) = (rows[4], rows[5]);
-            (_low1, _high1) = (rows[2], rows[3]);
-            (_low0, _high0) = (rows[0], rows[1]);
-        }
-
-        public void Combine(
-            ReadOnlySpan<double> line, Vector256<double> addLow, Vector256<double> addHigh, out Vector256<double> low, out Vector256<double> high)
-        {
-            low = addLow + _low0 * line[0] + _low1 * line[1] + _low2 * line[2];
-            high = addHigh + _high0 * line[0] + _high1 * line[1] + _high2 * line[2];
-        }
-    }
 }
