@@ -109,9 +109,14 @@ internal sealed partial class FollowerPeriod : ForcedState
         return Solve(null, GivenTolerance, 1);
     }
 
-    /// <inheritdoc/>
+    /// <summary>
+    /// Solves state and amplitude together for Re Zc(I) = −Rm, from the last state; false also where a larger I gives more
+    /// negative resistance, so that it would not stay.
+    /// </summary>
+    /// <param name="resistanceOhms">Rm in ohms.</param>
+    /// <param name="tolerance">Largest relative residual that is left.</param>
     public override bool SolveRunning(double resistanceOhms, double tolerance = FineTolerance) =>
-        Solve(resistanceOhms, Math.Sqrt(tolerance), MeshSlack);
+        Solve(resistanceOhms, Math.Sqrt(tolerance), MeshSlack) && ResistanceSlope > 0;
 
     /// <inheritdoc/>
     public override double OutputSwingVolts() => _shooting.Now.Extremes().Swing * _units.Volts;

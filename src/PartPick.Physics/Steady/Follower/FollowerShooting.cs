@@ -134,6 +134,7 @@ internal sealed class FollowerShooting
         (At, Now) = (Now, At);
         Values.CopyTo(_from, 0);
         At.Weigh(_weights);
+        _weights[LogAmps] = Math.Max(1, _weights[LogAmps]);
         _equations.CopyInverse(_inverse);
         double largest = 0;
         for (int k = 0; k < Unknowns; k++)
