@@ -210,7 +210,7 @@ internal sealed class AmplitudeScan
     private bool Jump(double peak)
     {
         _jumpedAt = -_balance.Impedance.Real;
-        if (_balance.SolveRunning(_resistance, RunningTolerance) && _balance.PeakAmps > peak)
+        if (_balance.SolveRunning(_resistance, RunningTolerance) && _balance.PeakAmps > peak && _balance.Stays)
         {
             Running = _balance;
             return true;

@@ -17,7 +17,7 @@ internal abstract class ForcedState
     /// <summary>Zc(I) = V₁/I in ohms of the last solved state.</summary>
     public Complex Impedance { get; protected set; }
 
-    /// <summary>d Re Zc / d ln I in ohms at the last state solved for a given amplitude.</summary>
+    /// <summary>d Re Zc / d ln I in ohms at the last state solved for a given amplitude (for a follower, at any).</summary>
     public double ResistanceSlope { get; protected set; }
 
     /// <summary>Angular frequency in rad/s.</summary>
@@ -36,6 +36,12 @@ internal abstract class ForcedState
     /// True where −Re Zc falls for good once it falls along the amplitude: the running amplitude may then be sought at once.
     /// </summary>
     public virtual bool FallsForGood => false;
+
+    /// <summary>
+    /// False where a running state was found at which a larger amplitude gives more negative resistance, so that another one, or
+    /// none, may be what the circuit comes to.
+    /// </summary>
+    public virtual bool Stays => true;
 
     /// <summary>Sets the frequency of the crystal's current; the state stays as the next starting point.</summary>
     public abstract void SetFrequency(double radians);

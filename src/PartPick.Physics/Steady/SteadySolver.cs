@@ -75,10 +75,10 @@ internal static class SteadySolver
 
         if (fineness == Fineness.Converged)
         {
-            return Refine(branch, refinement, balance, out state) is { } refined ? FiguresOf(crystal, refined) : null;
+            return Refine(branch, refinement, balance, out state) is { Stays: true } refined ? FiguresOf(crystal, refined) : null;
         }
 
-        if (!Settle(branch, balance, roughly: true))
+        if (!Settle(branch, balance, roughly: true) || !balance.Stays)
         {
             return null;
         }
@@ -107,7 +107,7 @@ internal static class SteadySolver
         state = null;
         var branch = new CrystalBranch(crystal);
         ForcedState? balance = near is null ? null : refinement.From(near);
-        if (balance is null || !balance.SolveRunning(crystal.ResistanceOhms, EstimateTolerance))
+        if (balance is null || !balance.SolveRunning(crystal.ResistanceOhms, EstimateTolerance) || !balance.Stays)
         {
             var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms, runningOnly: true);
             balance = scan.Running;

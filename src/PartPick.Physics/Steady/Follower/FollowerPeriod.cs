@@ -58,6 +58,9 @@ internal sealed partial class FollowerPeriod : ForcedState
     public override bool FallsForGood => true;
 
     /// <inheritdoc/>
+    public override bool Stays => ResistanceSlope > 0;
+
+    /// <inheritdoc/>
     public override bool LimitedBySupply =>
         (_shooting.Now.Extremes().Reverse - _units.JunctionShift) * _units.Volts > SupplyLimitVolts;
 
@@ -109,14 +112,9 @@ internal sealed partial class FollowerPeriod : ForcedState
         return Solve(null, GivenTolerance, 1);
     }
 
-    /// <summary>
-    /// Solves state and amplitude together for Re Zc(I) = −Rm, from the last state; false also where a larger I gives more
-    /// negative resistance, so that it would not stay.
-    /// </summary>
-    /// <param name="resistanceOhms">Rm in ohms.</param>
-    /// <param name="tolerance">Largest relative residual that is left.</param>
+    /// <inheritdoc/>
     public override bool SolveRunning(double resistanceOhms, double tolerance = FineTolerance) =>
-        Solve(resistanceOhms, Math.Sqrt(tolerance), MeshSlack) && ResistanceSlope > 0;
+        Solve(resistanceOhms, Math.Sqrt(tolerance), MeshSlack);
 
     /// <inheritdoc/>
     public override double OutputSwingVolts() => _shooting.Now.Extremes().Swing * _units.Volts;
