@@ -46,7 +46,7 @@ public static class OscillatorAnalysis
 
     /// <summary>
     /// The steady state of a circuit like one whose running state is known: many times cheaper than from nothing. Where it is
-    /// not found from there, it is sought from nothing.
+    /// not found from there, it is sought from nothing, to the same fineness.
     /// </summary>
     /// <param name="circuit">The circuit.</param>
     /// <param name="near">The running state of a circuit like it.</param>
@@ -56,10 +56,26 @@ public static class OscillatorAnalysis
     {
         ArgumentNullException.ThrowIfNull(near);
         state = null;
-        RunningFigures? figures = Balances(circuit) is { } refinement
-            ? SteadySolver.Follow(circuit.Crystal, refinement, near, fineness, out state)
-            : null;
-        return figures ?? Analyse(circuit, out state).Steady?.Figures;
+        if (Balances(circuit) is not { } refinement)
+        {
+            return null;
+        }
+
+        if (SteadySolver.Follow(circuit.Crystal, refinement, near, fineness, out state) is { } figures)
+        {
+            return figures;
+        }
+
+        switch (circuit)
+        {
+            case GateCircuit gate:
+                return SteadySolver.Seek(gate.Crystal, SmallSignals(gate), Transconductance(gate), refinement, near, fineness, out state);
+            case FollowerCircuit follower:
+                double siemens = FollowerBias.Solve(follower).TransconductanceSiemens;
+                return SteadySolver.Seek(follower.Crystal, new FollowerNetwork(follower), siemens, refinement, near, fineness, out state);
+            default:
+                throw new ArgumentException("Unknown kind of circuit.", nameof(circuit));
+        }
     }
 
     /// <summary>A quick estimate of the steady state; null where there is none.</summary>
@@ -86,6 +102,18 @@ public static class OscillatorAnalysis
         }
     }
 
+    /// <summary>
+    /// The frequency in hertz of a circuit that differs little from one whose running state is known, right to the first order of
+    /// the difference: many times cheaper than its steady state. Null where it is not found.
+    /// </summary>
+    /// <param name="circuit">The circuit.</param>
+    /// <param name="near">The running state of a circuit like it.</param>
+    public static double? FindFirstOrderFrequencyHz(OscillatorCircuit circuit, RunningState near)
+    {
+        ArgumentNullException.ThrowIfNull(near);
+        return Balances(circuit) is { } refinement ? SteadySolver.FirstOrder(circuit.Crystal, refinement, near) : null;
+    }
+
     /// <summary>Start-up margin and growth rate alone, the cheapest figures of all.</summary>
     /// <param name="circuit">The circuit.</param>
     public static StartFigures FindStartFigures(OscillatorCircuit circuit) => circuit switch
@@ -95,6 +123,25 @@ public static class OscillatorAnalysis
             follower.Crystal, new FollowerNetwork(follower), FollowerBias.Solve(follower).TransconductanceSiemens),
         _ => throw new ArgumentException("Unknown kind of circuit.", nameof(circuit)),
     };
+
+    /// <summary>
+    /// −Re Zc(jω)/Rm at a given frequency instead of the natural mode's: the margin but for what the negative resistance changes
+    /// between the two, at a fraction of the work.
+    /// </summary>
+    /// <param name="circuit">The circuit.</param>
+    /// <param name="hertz">Frequency in hertz, near the crystal's.</param>
+    public static double FindMarginAt(OscillatorCircuit circuit, double hertz)
+    {
+        ArgumentNullException.ThrowIfNull(circuit);
+        var s = new System.Numerics.Complex(0, 2 * Math.PI * hertz);
+        System.Numerics.Complex impedance = circuit switch
+        {
+            GateCircuit gate => SmallSignals(gate).At(s).Impedance(Transconductance(gate)),
+            FollowerCircuit follower => new FollowerNetwork(follower).At(s).Impedance(FollowerBias.Solve(follower).TransconductanceSiemens),
+            _ => throw new ArgumentException("Unknown kind of circuit.", nameof(circuit)),
+        };
+        return -impedance.Real / circuit.Crystal.ResistanceOhms;
+    }
 
     /// <summary>ln(Î/Î0)/σ with the thermal current Î0 = √(kT/Lm) of the motional branch, in seconds.</summary>
     /// <param name="circuit">The circuit.</param>

@@ -36,6 +36,8 @@ public sealed class RunningState
 
     internal int Points { get; }
 
+    internal int Unknowns => _state.Length;
+
     internal bool HoldsCurrent { get; }
 
     internal PeriodMesh? Mesh { get; }

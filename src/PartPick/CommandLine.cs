@@ -30,7 +30,7 @@ internal static class CommandLine
         {
             return Say(surroundings, failure.Problem.ToString(), failure.Status);
         }
-        catch (OperationCanceledException)
+        catch (Exception error) when (IsStop(error))
         {
             return Say(surroundings, "stopped", ExitStatus.Stopped);
         }
@@ -98,6 +98,11 @@ internal static class CommandLine
         surroundings.Error.WriteLine("partpick: " + line);
         return status;
     }
+
+    // A search on several threads may be stopped on each of them.
+    private static bool IsStop(Exception error) => error is AggregateException several
+        ? several.Flatten().InnerExceptions.All(inner => inner is OperationCanceledException)
+        : error is OperationCanceledException;
 
     private static string OneLine(string text) => string.Join(' ', text.Split(default(char[]), StringSplitOptions.RemoveEmptyEntries));
 }

@@ -1,1 +1,14 @@
-namespace PartPick.Benchmarks; internal static class Program { private static void Main() { } }
+using BenchmarkDotNet.Configs;
+using BenchmarkDotNet.Running;
+using PartPick.Benchmarks;
+
+if (args is ["--rankings", .. var rest])
+{
+    return RankingTable.Print(rest, Console.Out, Console.Error);
+}
+
+// Reports go beside what the build makes, whatever folder this is started in.
+string reports = Path.GetFullPath(Path.Combine(AppContext.BaseDirectory, "..", "..", "..", "benchmarks"));
+ManualConfig config = DefaultConfig.Instance.WithArtifactsPath(reports).HideColumns("Error", "StdDev", "RatioSD");
+BenchmarkSwitcher.FromAssembly(typeof(RankingTable).Assembly).Run(args, config);
+return 0;

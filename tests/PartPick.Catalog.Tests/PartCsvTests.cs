@@ -27,7 +27,8 @@ public sealed class PartCsvTests
         + "tolerance (ppm),stability (ppm),ageing (ppm),ageingYearly (ppm),temperatureMin (degC),temperatureMax (degC),"
         + "parabola (ppm/K2),turnover (degC)," + Tail
         + "Y-4M-18,\"4 MHz, \"\"AT\"\", 18 pF\",fork,3,HC-49/U,4000000,18,5.5,12,100,500,30,50,3,1,-20,70,-0.034,25,"
-        + "shunt=typical;motional=assumed;resistance=maximum,shop,A-1,HC-49/U,EUR,1:0.42;10:0.31;100:0.205,1,5,120,yes,\"µ, Ω and a comma\"\n",
+        + "shunt=typical;motional=assumed;resistance=maximum,shop,A-1,HC-49/U,EUR,1:0.42;10:0.31;100:0.205,1,5,120,yes,"
+        + "\"µ, Ω and a comma\"\n",
         Samples.Csv(PartKind.Crystal, Samples.Crystal));
 
     [Fact]
@@ -84,7 +85,8 @@ public sealed class PartCsvTests
     [Fact]
     public void A_cell_may_be_any_form_of_a_value_and_columns_may_be_in_any_order()
     {
-        const string text = "tolerance (%),value (ohm),id,description,basis,supplier,supplierPart,package,currency,prices,minimumOrder,multiple,"
+        const string text =
+            "tolerance (%),value (ohm),id,description,basis,supplier,supplierPart,package,currency,prices,minimumOrder,multiple,"
             + "stock,excluded,note\r\n±1 %,4k7,R1,one,,,,,,,,,,,\r\n1,\"4,7k\",R2,two,,,,,,,,,,,\r\n";
         (IReadOnlyList<Part> parts, IReadOnlyList<Problem> problems) = PartCsv.Read(PartKind.Resistor, new StringReader(text), "r.csv");
         Assert.Empty(problems);

@@ -7,7 +7,11 @@ public sealed class PartsCatalogTests
     [Fact]
     public void Lists_are_ordered_by_ordinal_id_and_parts_are_found()
     {
-        var catalog = new PartsCatalog([Samples.Resistor with { Id = "b" }, Samples.Resistor with { Id = "a" }, Samples.Resistor with { Id = "B" }, Samples.Crystal]);
+        var catalog = new PartsCatalog(
+        [
+            Samples.Resistor with { Id = "b" }, Samples.Resistor with { Id = "a" }, Samples.Resistor with { Id = "B" },
+            Samples.Crystal,
+        ]);
         Assert.Equal(["B", "a", "b"], catalog.Resistors.Select(part => part.Id));
         Assert.Same(Samples.Crystal, catalog.Find("Y-4M-18"));
         Assert.Null(catalog.Find("y-4m-18"));

@@ -17,7 +17,8 @@ public sealed class AnalysisLawsTests
     {
         const double Factor = 1.7;
         OscillatorCircuit circuit = Circuit(kind);
-        OscillatorResult plain = OscillatorAnalysis.Analyse(circuit), scaled = OscillatorAnalysis.Analyse(Scale(circuit, Factor, Factor, 1));
+        OscillatorResult plain = OscillatorAnalysis.Analyse(circuit);
+        OscillatorResult scaled = OscillatorAnalysis.Analyse(Scale(circuit, Factor, Factor, 1));
 
         Assert.NotNull(plain.Steady);
         Assert.NotNull(scaled.Steady);
@@ -36,7 +37,8 @@ public sealed class AnalysisLawsTests
     {
         const double Factor = 2.3;
         OscillatorCircuit circuit = Circuit(kind);
-        OscillatorResult plain = OscillatorAnalysis.Analyse(circuit), scaled = OscillatorAnalysis.Analyse(Scale(circuit, 1, 1 / Factor, Factor));
+        OscillatorResult plain = OscillatorAnalysis.Analyse(circuit);
+        OscillatorResult scaled = OscillatorAnalysis.Analyse(Scale(circuit, 1, 1 / Factor, Factor));
 
         Assert.NotNull(plain.Steady);
         Assert.NotNull(scaled.Steady);
@@ -157,7 +159,10 @@ public sealed class AnalysisLawsTests
             circuit.Strays.InputFarads * capacitance, circuit.Strays.OutputFarads * capacitance, circuit.Strays.AcrossFarads * capacitance);
         OscillatorCircuit common = circuit with
         {
-            Crystal = crystal, Strays = strays, C1Farads = circuit.C1Farads * capacitance, C2Farads = circuit.C2Farads * capacitance,
+            Crystal = crystal,
+            Strays = strays,
+            C1Farads = circuit.C1Farads * capacitance,
+            C2Farads = circuit.C2Farads * capacitance,
         };
         return common switch
         {

@@ -1,5 +1,6 @@
 using System.Text;
 using PartPick.Physics.Circuits;
+using PartPick.Physics.Devices;
 using PartPick.Physics.Tests.Independent;
 
 namespace PartPick.Physics.Tests;
@@ -104,5 +105,51 @@ public sealed class SteadyStateExistsTests
         Assert.True(found.RunningMargin > 1, $"{found}");
         Assert.NotNull(found.Steady);
         Assert.Equal(StartKind.NeedsDisturbance, found.Start);
+    }
+
+    // The top of −Re Zc(I) does not depend on Rm, so the running margin is that top over Rm (arithmetic).
+    [Theory]
+    [InlineData(6)]
+    [InlineData(7.3)]
+    [InlineData(8.7)]
+    [InlineData(10)]
+    [InlineData(13)]
+    public void A_buffered_gate_of_little_running_margin_runs_exactly_where_it_is_above_one(double delayNanoseconds)
+    {
+        GateCircuit gate = Samples.BufferedGate(2500, 45, 220, delayNanoseconds * 1e-9) with
+        {
+            Crystal = Crystal with { ResistanceOhms = 40 },
+        };
+        double top = 40 * OscillatorAnalysis.Analyse(gate).RunningMargin;
+
+        Assert.True(top > 1, $"{top}");
+        Assert.NotNull(OscillatorAnalysis.FindSteadyState(gate with { Crystal = Crystal with { ResistanceOhms = top / 1.01 } }));
+        Assert.Null(OscillatorAnalysis.FindSteadyState(gate with { Crystal = Crystal with { ResistanceOhms = top * 1.01 } }));
+    }
+
+    // At small signals the output current of a strong gate is the difference of two large ones, so rounding shows in it.
+    [Fact]
+    public void A_strong_gate_at_32_768_kHz_has_a_steady_state()
+    {
+        OscillatorResult found = OscillatorAnalysis.Analyse(new GateCircuit
+        {
+            Crystal = new Crystal
+            {
+                NominalHz = 32768, LoadFarads = 9 * Pico, ShuntFarads = 1.1 * Pico, MotionalFarads = 2.6e-15, ResistanceOhms = 50e3,
+            },
+            C1Farads = 2.2 * Pico,
+            C2Farads = 18 * Pico,
+            SeriesOhms = 680e3,
+            FeedbackOhms = 10e6,
+            Strays = new Strays(3 * Pico, 3 * Pico, 1 * Pico),
+            SupplyVolts = 5,
+            Inverter = new OneStageInverter(24.1e-3, 728)
+            {
+                ThresholdVolts = 0.42, InputFarads = 4.5 * Pico, OutputFarads = 5 * Pico, FeedbackFarads = 1.2 * Pico,
+            },
+        });
+
+        Assert.True(found.StartUp.GrowthRatePerSecond > 0);
+        Assert.NotNull(found.Steady);
     }
 }

@@ -4,7 +4,7 @@ namespace PartPick.Tests;
 
 public class CheckCommandTests
 {
-    private const string Circuit = """
+    internal const string Circuit = """
         {
           "circuit": "gate",
           "crystal": { "frequency": "4 MHz", "load": "18 pF", "shunt": "5 pF", "motional": "12 fF", "resistance": "100",
@@ -16,7 +16,7 @@ public class CheckCommandTests
         }
         """;
 
-    private static readonly string[] Keys =
+    internal static readonly string[] Keys =
     [
         "frequency", "outputFrequency", "error", "negativeResistance", "startUpMargin", "gainMargin", "criticalTransconductance",
         "upperTransconductance", "growthRate", "start", "runningMargin", "startUpTime", "motionalCurrent", "driveLevel",
@@ -35,7 +35,9 @@ public class CheckCommandTests
 
     [Fact]
     public void Hyphen_reads_standard_input_and_gives_the_same() =>
-        Assert.Equal(Run.Of("check", Run.File(Circuit), "--format", "json").Output, Run.WithInput(Circuit, "check", "-", "--format", "json").Output);
+        Assert.Equal(
+            Run.Of("check", Run.File(Circuit), "--format", "json").Output,
+            Run.WithInput(Circuit, "check", "-", "--format", "json").Output);
 
     [Fact]
     public void Table_names_figures_units_and_warnings()

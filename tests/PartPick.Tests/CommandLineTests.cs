@@ -43,8 +43,40 @@ public class CommandLineTests
         Assert.Equal("partpick: a fault of the program, please report it: InvalidTimeZoneException: two lines\n", error.ToString());
     }
 
+    [Fact]
+    public void A_search_that_is_stopped_on_its_threads_is_no_fault()
+    {
+        using var error = new StringWriter { NewLine = "\n" };
+        int status = CommandLine.Run(["check", "-"], new Surroundings
+        {
+            Input = new StoppedReader(),
+            Output = TextWriter.Null,
+            Error = error,
+            Environment = _ => null,
+        });
+
+        Assert.Equal((ExitStatus.Stopped, "partpick: stopped\n"), (status, error.ToString()));
+    }
+
+    [Fact]
+    public void A_ranking_that_is_stopped_says_so()
+    {
+        using var stop = new CancellationTokenSource();
+        stop.Cancel();
+
+        Run run = Run.Until(stop.Token, "rank", "--output", "4 MHz", "--circuits", "follower", "--supply", "12");
+
+        Assert.Equal((ExitStatus.Stopped, "", "partpick: stopped\n"), (run.Status, run.Output, run.Error));
+    }
+
     private sealed class FailingReader : TextReader
     {
         public override string ReadToEnd() => throw new InvalidTimeZoneException("two\nlines");
+    }
+
+    private sealed class StoppedReader : TextReader
+    {
+        public override string ReadToEnd() =>
+            throw new AggregateException(new OperationCanceledException(), new AggregateException(new OperationCanceledException()));
     }
 }

@@ -30,7 +30,18 @@ internal sealed record Run(int Status, string Output, string Error)
     public static Run Of(params string[] arguments) => WithInput("", arguments);
 
     /// <summary>Runs the program with something on standard input.</summary>
-    public static Run WithInput(string input, params string[] arguments)
+    public static Run WithInput(string input, params string[] arguments) =>
+        In(name => name == CatalogPath.Variable ? Path.Combine(Directory, "catalog.db") : null, input, arguments);
+
+    /// <summary>Runs the program in an environment.</summary>
+    public static Run In(Func<string, string?> environment, string input, params string[] arguments) =>
+        Of(environment, input, arguments, CancellationToken.None);
+
+    /// <summary>Runs the program until it is stopped.</summary>
+    public static Run Until(CancellationToken stop, params string[] arguments) =>
+        Of(name => name == CatalogPath.Variable ? Path.Combine(Directory, "catalog.db") : null, "", arguments, stop);
+
+    private static Run Of(Func<string, string?> environment, string input, string[] arguments, CancellationToken stop)
     {
         using var output = new StringWriter { NewLine = "\n" };
         using var error = new StringWriter { NewLine = "\n" };
@@ -39,7 +50,8 @@ internal sealed record Run(int Status, string Output, string Error)
             Input = new StringReader(input),
             Output = output,
             Error = error,
-            Environment = name => name == CatalogPath.Variable ? Path.Combine(Directory, "catalog.db") : null,
+            Environment = environment,
+            Cancellation = stop,
         });
         return new Run(status, output.ToString(), error.ToString());
     }

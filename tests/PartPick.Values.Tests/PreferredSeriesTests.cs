@@ -95,7 +95,9 @@ public sealed class PreferredSeriesTests
     public void An_unknown_series_is_a_problem_that_lists_the_known_ones()
     {
         Problem problem = PreferredSeries.Named("E13", "capacitorSeries").Problem!;
-        Assert.Equal("capacitorSeries: 'E13' is no series of preferred values; fits one of E3, E6, E12, E24, E48, E96, E192", problem.ToString());
+        Assert.Equal(
+            "capacitorSeries: 'E13' is no series of preferred values; fits one of E3, E6, E12, E24, E48, E96, E192",
+            problem.ToString());
         Assert.False(PreferredSeries.Named(null).IsOk);
         Assert.True(PreferredSeries.Named(" e24 ").IsOk);
     }

@@ -11,6 +11,7 @@ internal abstract class AmplitudeBalance : ForcedState
     private const int MostSteps = 60;
     private const int MostHalvings = 11;
     private const double LargestLogStep = 0.7;
+    private const double RoundingFloor = 1e-9;
     private const double KeepRatio = 0.15;
     private DenseSolver _solver = new();
     private bool _borrowed;
@@ -79,7 +80,44 @@ internal abstract class AmplitudeBalance : ForcedState
     }
 
     /// <inheritdoc/>
+    public override bool StepTowardsRunning(double resistanceOhms)
+    {
+        int n = Count;
+        Size(n + 1);
+        Residual(State, PeakAmps, _residual.AsSpan(0, n));
+        Impedance = ImpedanceOf(State, PeakAmps, _gradient.AsSpan(0, n), out double byLog);
+        _gradient[n] = byLog / resistanceOhms;
+        _residual[n] = Impedance.Real / resistanceOhms + 1;
+        if ((!_solver.IsFactored || _solver.Order != n + 1) && !Factor(n, n + 1, resistanceOhms))
+        {
+            return false;
+        }
+
+        for (int row = 0; row <= n; row++)
+        {
+            _step[row] = -_residual[row];
+        }
+
+        if (!_solver.Solve(_step.AsSpan(0, n + 1)))
+        {
+            return false;
+        }
+
+        for (int row = 0; row < n; row++)
+        {
+            State[row] += _step[row];
+        }
+
+        PeakAmps *= Math.Exp(_step[n]);
+        Impedance = ImpedanceOf(State, PeakAmps, _gradient.AsSpan(0, n), out _);
+        return double.IsFinite(Impedance.Imaginary);
+    }
+
+    /// <inheritdoc/>
     public override bool SolveRunning(double resistanceOhms, double tolerance = FineTolerance) => Newton(resistanceOhms, tolerance);
+
+    /// <inheritdoc/>
+    public override bool IsCoarserThan(RunningState near) => Count < near.Unknowns;
 
     /// <summary>Computes what depends on the frequency alone.</summary>
     protected abstract void PrepareHarmonics(double radians);
@@ -105,6 +143,7 @@ internal abstract class AmplitudeBalance : ForcedState
         Size(n + 1);
         double before = double.PositiveInfinity;
         bool factored = _solver.IsFactored && _solver.Order == order;
+        bool fresh = false;
         double size = Residual(State, PeakAmps, _residual.AsSpan(0, n));
         for (int step = 0; step < MostSteps; step++)
         {
@@ -123,12 +162,15 @@ internal abstract class AmplitudeBalance : ForcedState
                 return false;
             }
 
-            if (total < tolerance)
+            // A strong device at small signals is the difference of large currents: what rounding leaves of it is enough.
+            bool rounding = fresh && total < RoundingFloor && total > before / 2;
+            if (total < tolerance || rounding)
             {
                 return resistanceOhms is not null || Finish(n);
             }
 
-            if (!factored || total > KeepRatio * before)
+            fresh = !factored || total > KeepRatio * before;
+            if (fresh)
             {
                 if (!Factor(n, order, resistanceOhms))
                 {

@@ -83,14 +83,23 @@ internal sealed class AmplitudeScan
 
             double next = Note();
             double nextSlope = -_balance.ResistanceSlope;
-            Note(CubicCrest.Between(next, nextSlope, negative, slope, Math.Log(ratio)));
-            if (Running is null && negative <= _resistance && next > _resistance)
+            CubicCrest crest = CubicCrest.Between(next, nextSlope, negative, slope, Math.Log(ratio));
+            Note(crest);
+            if (Running is null && negative <= _resistance && Math.Max(next, crest.Height) > _resistance)
             {
                 ForcedState scanning = _balance;
                 _balance = _refinement.From(scanning.Keep())!;
-                FindRunning(peak / ratio, peak);
+                if (next > _resistance)
+                {
+                    FindRunning(peak / ratio, peak);
+                }
+                else
+                {
+                    FindRunningBeyond(peak / ratio * Math.Exp(crest.Place), peak);
+                }
+
                 _balance = scanning;
-                if (_runningOnly)
+                if (_runningOnly && Running is not null)
                 {
                     return true;
                 }
@@ -156,7 +165,9 @@ internal sealed class AmplitudeScan
             double next = -_balance.Impedance.Real;
             double nextSlope = -_balance.ResistanceSlope;
             CubicCrest crest = CubicCrest.Between(negative, slope, next, nextSlope, Math.Log(ratio));
-            if (crest.Height > CrestAccuracy * Math.Max(negative, next) && crest.Place > SmallestLogStep)
+            double higher = Math.Max(negative, next);
+            bool runsBetween = higher <= _resistance && crest.Height > _resistance;
+            if ((runsBetween || crest.Height > CrestAccuracy * higher) && crest.Place > SmallestLogStep)
             {
                 // A sharp crest, or one that alone is above Rm: on to where it should be.
                 _balance.Recall();
@@ -249,6 +260,15 @@ internal sealed class AmplitudeScan
     }
 
     private void Note(in CubicCrest crest) => LargestNegativeOhms = Math.Max(LargestNegativeOhms, crest.Height);
+
+    // The curve rises above Rm only between two steps: from its top on, where it does.
+    private void FindRunningBeyond(double top, double above)
+    {
+        if (_balance.SolveAt(top) && Note() > _resistance)
+        {
+            FindRunning(top, above);
+        }
+    }
 
     private void FindRunning(double below, double above)
     {

@@ -75,6 +75,16 @@ internal abstract class ForcedState
     /// <param name="tolerance">Largest relative residual that is left.</param>
     public abstract bool SolveRunning(double resistanceOhms, double tolerance = FineTolerance);
 
+    /// <summary>
+    /// Takes one Newton step towards the running state of a circuit that differs little from the one the state was solved for, and
+    /// finds the impedance there; right to the first order of the difference.
+    /// </summary>
+    /// <param name="resistanceOhms">Rm in ohms.</param>
+    public abstract bool StepTowardsRunning(double resistanceOhms);
+
+    /// <summary>Whether this state has fewer harmonics than a kept one, for circuits alike to be compared.</summary>
+    public virtual bool IsCoarserThan(RunningState near) => false;
+
     /// <summary>Output swing in volts peak to peak of the last solved state.</summary>
     public abstract double OutputSwingVolts();
 }

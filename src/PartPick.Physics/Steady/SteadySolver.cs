@@ -73,27 +73,39 @@ internal static class SteadySolver
             return null;
         }
 
-        if (fineness == Fineness.Converged)
-        {
-            return Refine(branch, refinement, balance, out state) is { Stays: true } refined ? FiguresOf(crystal, refined) : null;
-        }
+        RunningFigures? figures = Follow(crystal, branch, refinement, ref balance, fineness, out state);
+        return balance.Stays ? figures : null;
+    }
 
-        if (!Settle(branch, balance, roughly: true) || !balance.Stays)
+    /// <summary>
+    /// The same state, sought from nothing and taken to the fineness that following would have had.
+    /// </summary>
+    public static RunningFigures? Seek<TNetwork>(
+        Crystal crystal,
+        in TNetwork network,
+        double siemens,
+        Refinement refinement,
+        RunningState near,
+        Fineness fineness,
+        out RunningState? state)
+        where TNetwork : struct, ILinearNetwork
+    {
+        state = null;
+        var branch = new CrystalBranch(crystal);
+        var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms, runningOnly: true);
+        ForcedState? balance = scan.Running;
+        while (balance is not null && balance.IsCoarserThan(near))
         {
-            return null;
-        }
-
-        if (fineness == Fineness.OneFiner && !refinement.CoarseIsFollowed)
-        {
-            balance = refinement.Finer(balance) ?? balance;
-            if (!Settle(branch, balance, roughly: true))
+            ForcedState? finer = Settle(branch, balance, roughly: true) ? refinement.Finer(balance) : null;
+            if (finer is null)
             {
                 return null;
             }
+
+            balance = finer;
         }
 
-        state = balance.Keep();
-        return FiguresOf(crystal, balance);
+        return balance is null ? null : Follow(crystal, branch, refinement, ref balance, fineness, out state);
     }
 
     /// <summary>
@@ -122,6 +134,50 @@ internal static class SteadySolver
         double rms = balance.PeakAmps / Math.Sqrt(2);
         state = balance.Keep();
         return new SteadyEstimate(radians / (2 * Math.PI), crystal.ResistanceOhms * rms * rms);
+    }
+
+    /// <summary>
+    /// The frequency in hertz of a circuit that differs little from one whose running state is known, right to the first order of
+    /// the difference: one Newton step from that state.
+    /// </summary>
+    public static double? FirstOrder(Crystal crystal, Refinement refinement, RunningState near)
+    {
+        var branch = new CrystalBranch(crystal);
+        return refinement.From(near) is { } balance && balance.StepTowardsRunning(crystal.ResistanceOhms)
+            ? FrequencyOf(branch, balance) / (2 * Math.PI)
+            : null;
+    }
+
+    private static RunningFigures? Follow(
+        Crystal crystal,
+        in CrystalBranch branch,
+        Refinement refinement,
+        ref ForcedState balance,
+        Fineness fineness,
+        out RunningState? state)
+    {
+        state = null;
+        if (fineness == Fineness.Converged)
+        {
+            return Refine(branch, refinement, balance, out state) is { } refined ? FiguresOf(crystal, refined) : null;
+        }
+
+        if (!Settle(branch, balance, roughly: true))
+        {
+            return null;
+        }
+
+        if (fineness == Fineness.OneFiner && !refinement.CoarseIsFollowed)
+        {
+            balance = refinement.Finer(balance) ?? balance;
+            if (!Settle(branch, balance, roughly: true))
+            {
+                return null;
+            }
+        }
+
+        state = balance.Keep();
+        return FiguresOf(crystal, balance);
     }
 
     private static ForcedState? Refine(

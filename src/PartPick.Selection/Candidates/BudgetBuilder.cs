@@ -24,11 +24,18 @@ public static class BudgetBuilder
         ArgumentNullException.ThrowIfNull(requirement);
         ArgumentNullException.ThrowIfNull(crystal);
         ArgumentNullException.ThrowIfNull(analysis);
-        if (analysis.Steady is not { } steady)
-        {
-            return null;
-        }
+        return analysis.Steady is { } steady ? Build(choice, requirement, crystal, crystalTerms, analysis, steady) : null;
+    }
 
+    /// <summary>The error budget about a steady state that is known, which need not be the converged one.</summary>
+    internal static ErrorBudget Build(
+        CandidateParts choice,
+        Requirement requirement,
+        CrystalModel crystal,
+        ImmutableArray<BudgetTerm> crystalTerms,
+        ValueAnalysis analysis,
+        RunningFigures steady)
+    {
         (double byC1, double byC2, double byAcross) = analysis.SlopesPerFarad;
         double reach = TemperatureReach(requirement);
         double strays = requirement.Board.UncertaintyRatio * (

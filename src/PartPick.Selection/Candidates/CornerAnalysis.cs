@@ -12,7 +12,8 @@ public sealed class CornerAnalysis
     private readonly double _c1Tolerance;
     private readonly double _c2Tolerance;
     private (AtCorner Margin, bool BuildsUp)? _start;
-    private (AtCorner? Drive, AtCorner? Time)? _running;
+    private readonly Dictionary<OperatingPoint, RunningFigures?> _running = [];
+    private (AtCorner? Drive, AtCorner? Time)? _worst;
 
     /// <param name="template">Circuit, crystal and amplifier.</param>
     /// <param name="requirement">What is needed.</param>
@@ -39,10 +40,33 @@ public sealed class CornerAnalysis
     public bool Starts => (_start ??= FindStart()).BuildsUp;
 
     /// <summary>Highest drive level in watts; null where a corner has no steady state.</summary>
-    public AtCorner? Drive(ValueAnalysis analysis) => (_running ??= FindRunning(analysis)).Drive;
+    public AtCorner? Drive(ValueAnalysis analysis) => (_worst ??= FindRunning(analysis)).Drive;
 
     /// <summary>Longest start-up time in seconds; null where a corner does not build up or has no steady state.</summary>
-    public AtCorner? StartUpTime(ValueAnalysis analysis) => (_running ??= FindRunning(analysis)).Time;
+    public AtCorner? StartUpTime(ValueAnalysis analysis) => (_worst ??= FindRunning(analysis)).Time;
+
+    /// <summary>
+    /// Whether it runs at every corner with no more than a drive level, looked at from the corner that likely drives most; ends at
+    /// the first that does not.
+    /// </summary>
+    /// <param name="analysis">The figures of the nominal values.</param>
+    /// <param name="ratedWatts">Highest rated drive level in watts; null where none is stated.</param>
+    public bool RunsWithin(ValueAnalysis analysis, double? ratedWatts)
+    {
+        ArgumentNullException.ThrowIfNull(analysis);
+        return _template.Corners.Reverse().All(point => At(analysis, point) is { } steady && !(steady.DriveWatts > ratedWatts));
+    }
+
+    private RunningFigures? At(ValueAnalysis analysis, OperatingPoint point)
+    {
+        if (!_running.TryGetValue(point, out RunningFigures? figures))
+        {
+            figures = analysis.SteadyAt(point, _c1Tolerance, _c2Tolerance);
+            _running.Add(point, figures);
+        }
+
+        return figures;
+    }
 
     private (AtCorner Margin, bool BuildsUp) FindStart()
     {
@@ -84,7 +108,7 @@ public sealed class CornerAnalysis
         OperatingPoint slow = driven;
         foreach (OperatingPoint point in _template.Corners)
         {
-            if (analysis.SteadyAt(point, _c1Tolerance, _c2Tolerance) is not { } steady)
+            if (At(analysis, point) is not { } steady)
             {
                 return (null, null);
             }

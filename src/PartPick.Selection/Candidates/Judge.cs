@@ -24,18 +24,21 @@ internal static class Judge
         var misses = ImmutableArray.CreateBuilder<Miss>();
         if (shortage is not null)
         {
-            misses.Add(new Miss(Limit.Stock, Text($"stock of {shortage.Id} is {shortage.Stock}, too few for {requirement.Builds} boards"), 2));
+            string text = Text($"stock of {shortage.Id} is {shortage.Stock}, too few for {requirement.Builds} boards");
+            misses.Add(new Miss(Limit.Stock, text, 2));
         }
 
         if (cost > requirement.CostLimit)
         {
             double ratio = (double)(cost / requirement.CostLimit.Value);
-            misses.Add(new Miss(Limit.Cost, Text($"costs {cost:0.00##} {market.Currency} of {requirement.CostLimit:0.00##} allowed"), ratio));
+            string text = Text($"costs {cost:0.00##} {market.Currency} of {requirement.CostLimit:0.00##} allowed");
+            misses.Add(new Miss(Limit.Cost, text, ratio));
         }
 
         if (!starts)
         {
-            misses.Add(new Miss(Limit.Start, Text($"does not build up from noise at {margin.Corner}"), Shortfall(requirement.Margin, margin.Value)));
+            string text = Text($"does not build up from noise at {margin.Corner}");
+            misses.Add(new Miss(Limit.Start, text, Shortfall(requirement.Margin, margin.Value)));
         }
 
         if (!(margin.Value >= requirement.Margin))

@@ -21,7 +21,12 @@ public sealed record OperatingPoint(double SupplyVolts, double TemperatureCelsiu
     public static ImmutableArray<OperatingPoint> Corners(Requirement requirement, CircuitKind kind)
     {
         ArgumentNullException.ThrowIfNull(requirement);
-        return [.. AtNominalCapacitances(requirement, kind).SelectMany(point => new[] { point with { Capacitances = -1 }, point with { Capacitances = 1 } })];
+        return
+        [
+            .. from point in AtNominalCapacitances(requirement, kind)
+               from capacitances in new[] { -1, 1 }
+               select point with { Capacitances = capacitances },
+        ];
     }
 
     /// <summary>The corners of amplifier, supply and ambient at nominal capacitances.</summary>
@@ -55,7 +60,9 @@ public sealed record OperatingPoint(double SupplyVolts, double TemperatureCelsiu
             > 0 => ", capacitances high",
             _ => "",
         };
-        string ambient = kind == CircuitKind.Follower ? string.Create(CultureInfo.InvariantCulture, $", {TemperatureCelsius:0.##} °C") : "";
+        string ambient = kind == CircuitKind.Follower
+            ? string.Create(CultureInfo.InvariantCulture, $", {TemperatureCelsius:0.##} °C")
+            : "";
         return string.Create(CultureInfo.InvariantCulture, $"{SupplyVolts:0.###} V{ambient}, {device}{capacitances}");
     }
 }

@@ -11,6 +11,7 @@ namespace PartPick.Selection;
 public sealed class ValueAnalysis
 {
     private const double Step = 0.02;
+    private const double FirstOrderStep = 0.002;
     private readonly CircuitTemplate _template;
     private readonly CircuitValues _values;
     private readonly OperatingPoint _nominal;
@@ -18,6 +19,7 @@ public sealed class ValueAnalysis
     private RunningFigures? _steady;
     private double? _amplifier;
     private (double C1, double C2, double Across)? _slopes;
+    private (double C1, double C2, double Across)? _firstOrderSlopes;
 
     /// <summary>Analyses the values from nothing.</summary>
     /// <param name="template">Circuit, crystal and amplifier.</param>
@@ -73,7 +75,12 @@ public sealed class ValueAnalysis
     public double AmplifierRatio => _amplifier ??= FindAmplifierRatio();
 
     /// <summary>∂f/f by C1 (and the stray beside it), C2 (and the stray beside it) and the stray across, per farad.</summary>
-    public (double C1, double C2, double Across) SlopesPerFarad => _slopes ??= FindSlopes();
+    public (double C1, double C2, double Across) SlopesPerFarad => _slopes ??= Slopes(Step, Slope);
+
+    /// <summary>
+    /// The same slopes from one Newton step each, many times cheaper and within a few per cent; not a number where not found.
+    /// </summary>
+    public (double C1, double C2, double Across) FirstOrderSlopesPerFarad => _firstOrderSlopes ??= Slopes(FirstOrderStep, FirstOrderSlope);
 
     /// <summary>The steady state at a corner; null where there is none.</summary>
     public RunningFigures? SteadyAt(OperatingPoint point, double c1Tolerance, double c2Tolerance) =>
@@ -98,13 +105,13 @@ public sealed class ValueAnalysis
         return most;
     }
 
-    private (double C1, double C2, double Across) FindSlopes()
+    private (double C1, double C2, double Across) Slopes(double share, Func<double, Func<double, OscillatorCircuit>, double> slope)
     {
         double total = Circuit.Crystal.ShuntFarads + Circuit.Strays.AcrossFarads + 1e-12;
         return (
-            Slope(Step * _values.C1Farads, d => Circuit with { C1Farads = _values.C1Farads + d }),
-            Slope(Step * _values.C2Farads, d => Circuit with { C2Farads = _values.C2Farads + d }),
-            Slope(Step * total, d => Circuit with { Strays = Circuit.Strays with { AcrossFarads = Circuit.Strays.AcrossFarads + d } }));
+            slope(share * _values.C1Farads, d => Circuit with { C1Farads = _values.C1Farads + d }),
+            slope(share * _values.C2Farads, d => Circuit with { C2Farads = _values.C2Farads + d }),
+            slope(share * total, d => Circuit with { Strays = Circuit.Strays with { AcrossFarads = Circuit.Strays.AcrossFarads + d } }));
     }
 
     private double Slope(double step, Func<double, OscillatorCircuit> shifted)
@@ -114,5 +121,11 @@ public sealed class ValueAnalysis
         return above is null || below is null
             ? double.NaN
             : (above.FrequencyHz - below.FrequencyHz) / (2 * step * BaseHz());
+    }
+
+    private double FirstOrderSlope(double step, Func<double, OscillatorCircuit> shifted)
+    {
+        double? above = _state is null ? null : OscillatorAnalysis.FindFirstOrderFrequencyHz(shifted(step), _state);
+        return above is { } hertz ? (hertz - BaseHz()) / (step * BaseHz()) : double.NaN;
     }
 }

@@ -7,7 +7,7 @@ namespace PartPick.Selection;
 /// <summary>The figures of one circuit under their fixed keys: the same for a single check and for a candidate.</summary>
 public static class CircuitResults
 {
-    /// <summary>Error of a frequency at the crystal, as a ratio: against the target where there is one, else the nominal frequency.</summary>
+    /// <summary>Error of a frequency at the crystal, as a ratio: against the target, else the nominal frequency.</summary>
     /// <param name="description">The circuit.</param>
     /// <param name="frequencyHz">Frequency at the crystal in hertz.</param>
     public static double ErrorRatio(CircuitDescription description, double frequencyHz)

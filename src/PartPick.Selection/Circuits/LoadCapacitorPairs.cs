@@ -3,7 +3,8 @@ using System.Collections.Immutable;
 namespace PartPick.Selection;
 
 /// <summary>
-/// Finds the pairs of preferred values nearest to a load: CL = (C1 + Cs)(C2 + Cs)/(C1 + C2 + 2 Cs) + Cacross, with Cs at each pin.
+/// Finds the pairs of preferred values nearest to a load: CL = (C1 + Cp)(C2 + Cp)/(C1 + C2 + 2 Cp) + Cs,
+/// with the stray Cs as one figure and Cp at each pin, where the pins are counted apart.
 /// </summary>
 public static class LoadCapacitorPairs
 {
@@ -15,7 +16,7 @@ public static class LoadCapacitorPairs
     public static ImmutableArray<LoadPair> Find(LoadPairRequest request)
     {
         ArgumentNullException.ThrowIfNull(request);
-        double needed = request.LoadFarads - request.AcrossFarads;
+        double needed = request.LoadFarads - request.StrayFarads;
         if (!(needed > 0) || !double.IsFinite(needed))
         {
             return [];
@@ -65,7 +66,7 @@ public static class LoadCapacitorPairs
     private static void AddPartners(LoadPairRequest request, LoadSide[] sides, int index, List<LoadPair> found)
     {
         LoadSide own = sides[index];
-        double needed = request.LoadFarads - request.AcrossFarads;
+        double needed = request.LoadFarads - request.StrayFarads;
         double mine = own.Farads + request.PinStrayFarads;
         double exact = mine > needed ? mine * needed / (mine - needed) - request.PinStrayFarads : double.PositiveInfinity;
         int middle = FirstAtLeast(sides, exact);
@@ -105,7 +106,7 @@ public static class LoadCapacitorPairs
     {
         double first = c1.Farads + request.PinStrayFarads;
         double second = c2.Farads + request.PinStrayFarads;
-        double load = first * second / (first + second) + request.AcrossFarads;
+        double load = first * second / (first + second) + request.StrayFarads;
         double? shift = request.Crystal is { } crystal
             ? (crystal.FrequencyAtLoadHz(load) - crystal.NominalHz) / crystal.NominalHz
             : null;

@@ -9,11 +9,11 @@ public sealed record LoadPairRequest
     /// <summary>Wanted load capacitance in farads, above zero.</summary>
     public required double LoadFarads { get; init; }
 
+    /// <summary>Stray capacitance as one figure, in farads: it adds to the load as a whole (ST AN2867, section 3.3).</summary>
+    public double StrayFarads { get; init; }
+
     /// <summary>Stray capacitance at each of the two pins to ground, in farads: it adds to each capacitor.</summary>
     public double PinStrayFarads { get; init; }
-
-    /// <summary>Stray capacitance across the crystal in farads: it adds to the load as a whole.</summary>
-    public double AcrossFarads { get; init; }
 
     /// <summary>Series of the capacitors' values.</summary>
     public required PreferredSeries Series { get; init; }
@@ -31,5 +31,5 @@ public sealed record LoadPairRequest
     public Crystal? Crystal { get; init; }
 
     /// <summary>The value of each of two equal capacitors that would give the load exactly, in farads; zero or less: none can.</summary>
-    public double ExactFarads => 2 * (LoadFarads - AcrossFarads) - PinStrayFarads;
+    public double ExactFarads => 2 * (LoadFarads - StrayFarads) - PinStrayFarads;
 }

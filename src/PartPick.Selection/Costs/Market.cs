@@ -44,7 +44,10 @@ public sealed class Market
     public bool IsListed(Part part)
     {
         ArgumentNullException.ThrowIfNull(part);
-        return !part.Excluded && part.Offer.HasPrices && part.Offer.Currency == Currency && part.Offer.CheapestPurchase(_builds) is not null;
+        return !part.Excluded
+            && part.Offer.HasPrices
+            && part.Offer.Currency == Currency
+            && part.Offer.CheapestPurchase(_builds) is not null;
     }
 
     /// <summary>Whether the stock covers a number of the part on every board; an unknown stock does.</summary>

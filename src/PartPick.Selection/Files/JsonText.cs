@@ -22,6 +22,11 @@ internal static class JsonText
         try
         {
             using JsonDocument document = JsonDocument.Parse(json.TrimStart('\uFEFF'), Lenient);
+            if (!IsReadable(document.RootElement))
+            {
+                return Result.Fail<JsonElement>(fileName, "holds half a character in a text", $"{fits} as JSON");
+            }
+
             return document.RootElement.ValueKind == JsonValueKind.Object
                 ? Result.Ok(document.RootElement.Clone())
                 : Result.Fail<JsonElement>(fileName, $"holds {Kind(document.RootElement)}", $"{fits}: an object in braces");
@@ -32,6 +37,25 @@ internal static class JsonText
             long column = (error.BytePositionInLine ?? 0) + 1;
             return Result.Fail<JsonElement>(
                 FormattableString.Invariant($"{fileName}, line {line}, column {column}"), "is not valid JSON", $"{fits} as JSON");
+        }
+    }
+
+    /// <summary>Whether every text in a value is one: an escape may name half of a UTF-16 pair, which is no character.</summary>
+    public static bool IsReadable(JsonElement element)
+    {
+        try
+        {
+            return element.ValueKind switch
+            {
+                JsonValueKind.Object => element.EnumerateObject().All(property => property.Name.Length >= 0 && IsReadable(property.Value)),
+                JsonValueKind.Array => element.EnumerateArray().All(IsReadable),
+                JsonValueKind.String => element.GetString() is not null,
+                _ => true,
+            };
+        }
+        catch (InvalidOperationException)
+        {
+            return false;
         }
     }
 

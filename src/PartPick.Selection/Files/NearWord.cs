@@ -10,7 +10,10 @@ internal static class NearWord
     {
         int most = Math.Max(1, word.Length / 3);
         (string Word, int Distance)[] near =
-            [.. words.Select(known => (known, Distance(word.ToUpperInvariant(), known.ToUpperInvariant()))).Where(known => known.Item2 <= most)];
+        [
+            .. words.Select(known => (known, Distance(word.ToUpperInvariant(), known.ToUpperInvariant())))
+                .Where(known => known.Item2 <= most),
+        ];
         return near.Length == 0 ? null : near.MinBy(known => known.Distance).Word;
     }
 

@@ -18,4 +18,27 @@ internal sealed record AmplifierOption(
         BaseTop?.ValueOhms ?? double.PositiveInfinity,
         BaseBottom?.ValueOhms ?? double.PositiveInfinity,
         Emitter?.ValueOhms ?? double.PositiveInfinity);
+
+    /// <summary>What the option adds to the cost per unit of a circuit; equal parts are bought together.</summary>
+    /// <param name="feedback">The feedback resistor that the circuit has besides.</param>
+    /// <param name="market">What is on offer.</param>
+    public decimal Cost(ResistorPart? feedback, Market market)
+    {
+        if (Series is { } series)
+        {
+            return ReferenceEquals(series, feedback)
+                ? market.UnitCost(series, 2) - market.UnitCost(series, 1)
+                : market.UnitCost(series, 1);
+        }
+
+        if (BaseTop is not { } top || Emitter is not { } emitter)
+        {
+            return 0;
+        }
+
+        int tops = BaseBottom is null ? 1 : 2;
+        return ReferenceEquals(top, emitter)
+            ? market.UnitCost(top, tops + 1)
+            : market.UnitCost(top, tops) + market.UnitCost(emitter, 1);
+    }
 }

@@ -1,12 +1,18 @@
+using System.Collections.Concurrent;
 using System.Collections.Immutable;
 
 namespace PartPick.Selection.Search;
 
-/// <summary>Makes the answer of what a run has found: the listed candidates are analysed in full, from nothing.</summary>
+/// <summary>
+/// Makes the answers of what a run has found: the listed candidates are analysed in full, from nothing, each once for all answers
+/// of the run.
+/// </summary>
 internal sealed class AnswerBuilder(SearchRun run, RankingOptions options)
 {
     private const int BestSoFarListed = 12;
     private const int NearestListed = 10;
+    private readonly CandidateBuilder _builder = new(run.Space.Requirement, run.Space.Market);
+    private readonly ConcurrentDictionary<string, Candidate> _built = new(StringComparer.Ordinal);
 
     /// <summary>Builds the answer.</summary>
     public RankingResult Build(bool complete, double elapsedSeconds)
@@ -17,12 +23,11 @@ internal sealed class AnswerBuilder(SearchRun run, RankingOptions options)
         var onFront = front.Select(point => point.Id).ToHashSet(StringComparer.Ordinal);
         IEnumerable<FitPoint> listed = options.Front ? front : options.All ? run.Leaders.Order(Snapshot(), cheapest) : run.Leaders.Best();
         int most = complete ? options.Top ?? int.MaxValue : Math.Min(options.Top ?? BestSoFarListed, BestSoFarListed);
-        var builder = new CandidateBuilder(requirement, run.Space.Market);
         FitPoint[] points = [.. listed.Take(most)];
         Candidate[] candidates =
         [
             .. points.AsParallel().AsOrdered().WithDegreeOfParallelism(complete ? Environment.ProcessorCount : 1).Select(point =>
-                builder.Build(point.Choice)! with
+                _built.GetOrAdd(point.Id, _ => _builder.Build(point.Choice)!) with
                 {
                     Score = Score.Of(requirement, point.ErrorRatio, point.Margin, point.Cost, cheapest),
                     OnFront = onFront.Contains(point.Id),
@@ -30,7 +35,7 @@ internal sealed class AnswerBuilder(SearchRun run, RankingOptions options)
         ];
         ImmutableArray<Candidate> nearest = complete && points.Length == 0
             ? [.. run.NearMisses.Nearest(3 * NearestListed)
-                .Select(builder.Build).OfType<Candidate>()
+                .Select(_builder.Build).OfType<Candidate>()
                 .OrderBy(Distance).ThenBy(candidate => candidate.Id, StringComparer.Ordinal)
                 .Take(NearestListed)]
             : [];
@@ -40,6 +45,7 @@ internal sealed class AnswerBuilder(SearchRun run, RankingOptions options)
             Combinations = run.Space.Combinations,
             Covered = complete ? run.Space.Combinations : run.Tally.Covered,
             Fit = complete && options.All ? run.Tally.Fit : null,
+            Analysed = run.Tally.Analysed,
             Candidates = [.. candidates],
             Front = [.. front.Select(point => point.Id)],
             NearestMisses = nearest,

@@ -1,18 +1,21 @@
 using System.Collections.Immutable;
-using PartPick.Catalog;
 
 namespace PartPick.Selection.Search;
 
 /// <summary>Load capacitors of one value.</summary>
 /// <param name="Farads">The value.</param>
-/// <param name="Parts">The parts on offer, by id.</param>
-internal sealed record CapacitorValue(double Farads, ImmutableArray<CapacitorPart> Parts);
+/// <param name="Contenders">The parts that the search tries, by id.</param>
+/// <param name="Parts">Number of parts on offer, those included that a contender stands for.</param>
+internal sealed record CapacitorValue(double Farads, ImmutableArray<Contender> Contenders, int Parts);
 
 /// <summary>The load capacitors that a search tries: class 1 dielectrics of the wanted series.</summary>
 internal static class CapacitorChoice
 {
     /// <summary>By value, ascending.</summary>
-    public static ImmutableArray<CapacitorValue> Of(Requirement requirement, Market market)
+    /// <param name="requirement">What is needed.</param>
+    /// <param name="market">What is on offer.</param>
+    /// <param name="every">Whether every part is tried, also those that another one beats whatever the circuit.</param>
+    public static ImmutableArray<CapacitorValue> Of(Requirement requirement, Market market, bool every)
     {
         SeriesMembership membership = new(requirement.CapacitorSeries);
         return
@@ -21,7 +24,7 @@ internal static class CapacitorChoice
                 .Where(part => part.TemperatureCoefficientPerKelvin is not null && membership.Contains(part.ValueFarads))
                 .GroupBy(part => part.ValueFarads)
                 .OrderBy(group => group.Key)
-                .Select(group => new CapacitorValue(group.Key, [.. group])),
+                .Select(group => new CapacitorValue(group.Key, Contender.Of([.. group], market, every), group.Count())),
         ];
     }
 }

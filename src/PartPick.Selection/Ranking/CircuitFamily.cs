@@ -12,6 +12,9 @@ internal sealed class CircuitFamily
     /// <summary>The circuit.</summary>
     public required CircuitKind Kind { get; init; }
 
+    /// <summary>Whether a gate, counter or port: everything but a follower.</summary>
+    public bool IsGate => Kind != CircuitKind.Follower;
+
     /// <summary>The amplifier.</summary>
     public required Part Amplifier { get; init; }
 
@@ -20,6 +23,9 @@ internal sealed class CircuitFamily
 
     /// <summary>What may stand round the amplifier.</summary>
     public required ImmutableArray<AmplifierOption> Options { get; init; }
+
+    /// <summary>What each of them adds to the cost per unit; equal parts are bought together.</summary>
+    public required ImmutableArray<decimal> OptionCosts { get; init; }
 
     /// <summary>The groups.</summary>
     public required ImmutableArray<FamilyMember> Members { get; init; }

@@ -13,29 +13,6 @@ namespace PartPick.Selection.Search;
 internal sealed record Estimate(
     int Option, int C1, int C2, double Margin, double LoadFarads, SteadyEstimate Steady, RunningState State)
 {
-    // Share of an estimated shift that is sure, and what is taken off it.
-    private const double SureShare = 0.9;
-    private const double Slack = 0.5e-6;
-    private double? _amplifierRatio;
-
-    /// <summary>
-    /// A shift of the frequency over amplifier and supply that the full analysis will at least find, as a ratio: from
-    /// estimates at the two extreme corners. Computed once for all crystals of the family.
-    /// </summary>
-    public double LeastAmplifierRatio(CircuitTemplate template, in CircuitValues values) =>
-        _amplifierRatio ??= FindLeastAmplifierRatio(template, values);
-
-    private double FindLeastAmplifierRatio(CircuitTemplate template, in CircuitValues values)
-    {
-        double most = 0;
-        foreach (OperatingPoint point in new[] { template.AmplifierCorners[0], template.AmplifierCorners[^1] })
-        {
-            if (OscillatorAnalysis.EstimateSteadyState(template.At(values, point), State, out _) is { } there)
-            {
-                most = Math.Max(most, Math.Abs(there.FrequencyHz / Steady.FrequencyHz - 1));
-            }
-        }
-
-        return Math.Max(0, SureShare * most - Slack);
-    }
+    /// <summary>A shift of the frequency over amplifier and supply that the full analysis will at least find, as a ratio.</summary>
+    public double LeastAmplifierRatio { get; init; }
 }

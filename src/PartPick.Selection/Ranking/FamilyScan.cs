@@ -1,11 +1,10 @@
 using PartPick.Physics;
-using PartPick.Physics.Circuits;
 
 namespace PartPick.Selection.Search;
 
 /// <summary>
-/// The first look at a family: which combinations of values have the margin, and could bring a crystal near its target. Uses
-/// start-up figures and quick estimates; what it drops is off by more than an estimate can be.
+/// The first look at a family: which combinations of values have the margin, and could still change the answer for some crystal.
+/// Uses start-up figures and quick estimates; what it drops is off by more than an estimate can be.
 /// </summary>
 internal sealed class FamilyScan
 {
@@ -14,42 +13,30 @@ internal sealed class FamilyScan
 
     /// <summary>What else an estimate may be off, as a ratio.</summary>
     private const double EstimateFloor = 0.5e-6;
-
-    // Load seen over load of the capacitors in series: never outside these bounds in the model, and steady between neighbours.
-    private const double LowestLoadShare = 0.5;
-    private const double HighestLoadShare = 1.5;
-    private const double NeighbourShare = 0.07;
     private const double MarginSlack = 0.98;
+
+    // Between the wanted frequency and that of the natural mode the negative resistance changes by far less than this.
+    private const double ScreenSlack = 0.99;
+    private readonly SearchRun _run;
     private readonly SearchSpace _space;
     private readonly CircuitFamily _family;
-    private readonly CancellationToken _cancellation;
     private readonly CircuitTemplate _template;
-    private readonly double _lowestLoad;
-    private readonly double _highestLoad;
-    private readonly double[] _loadShares;
-    private readonly OperatingPoint _nominal;
-    private RunningState? _last;
+    private readonly EstimateGrid _grid;
+    private readonly Requirement _requirement;
+    private readonly double _wanted;
+    private readonly double _screenHz;
 
-    public FamilyScan(SearchSpace space, CircuitFamily family, CancellationToken cancellation)
+    public FamilyScan(SearchRun run, CircuitFamily family)
     {
-        _space = space;
+        _run = run;
+        _space = run.Space;
         _family = family;
-        _cancellation = cancellation;
         _template = family.Members[0].Template;
-        _nominal = OperatingPoint.Nominal(space.Requirement);
-        _loadShares = new double[family.Options.Length];
-        _lowestLoad = double.PositiveInfinity;
-        _highestLoad = 0;
-        foreach (FamilyMember member in family.Members)
-        {
-            (double low, double high) = LoadWindow(member);
-            _lowestLoad = Math.Min(_lowestLoad, low);
-            _highestLoad = Math.Max(_highestLoad, high);
-        }
+        _requirement = _space.Requirement;
+        _grid = new EstimateGrid(_space, family);
+        _wanted = _requirement.AllowDisturbance ? double.NegativeInfinity : _requirement.Margin * MarginSlack;
+        _screenHz = family.Members[0].Crystal.FrequencyHz;
     }
-
-    /// <summary>What may be fit for some crystal of the family.</summary>
-    public List<Estimate> Estimates { get; } = [];
 
     /// <summary>Combinations (of parts, for one crystal) that the margin removed.</summary>
     public double MarginRejections { get; private set; }
@@ -57,91 +44,164 @@ internal sealed class FamilyScan
     /// <summary>Combinations (of parts, for one crystal) that the frequency error removed for every crystal.</summary>
     public double ErrorRejections { get; private set; }
 
-    /// <summary>The combination of values with the largest margin among those that miss it, and that margin.</summary>
-    public (int Option, int C1, int C2, double Margin)? BestMarginMiss { get; private set; }
-
     /// <summary>Largest relative error of an estimated frequency.</summary>
     public static double EstimateError(Crystal crystal, double frequencyHz) =>
         EstimateShare * Math.Abs(frequencyHz / crystal.SeriesHz - 1) + EstimateFloor;
 
-    /// <summary>Runs the scan.</summary>
-    public void Run()
+    /// <summary>
+    /// Estimates of a few combinations spread over the whole, for good answers early: against them the rest can be left out sooner.
+    /// </summary>
+    public List<Estimate> Sparse()
     {
-        for (int i = 0; i < _space.Capacitors.Length; i++)
+        var found = new List<Estimate>();
+        foreach (int i in _grid.Values())
         {
-            Array.Clear(_loadShares);
-            for (int j = 0; j < _space.Capacitors.Length; j++)
+            foreach (int j in _grid.Values())
             {
-                _cancellation.ThrowIfCancellationRequested();
-                double weight = (double)_space.Capacitors[i].Parts.Length * _space.Capacitors[j].Parts.Length;
-                double load = StaticLoad(_space.Capacitors[i].Farads, _space.Capacitors[j].Farads);
-                if (load * HighestLoadShare < _lowestLoad || load * LowestLoadShare > _highestLoad)
+                _run.Cancellation.ThrowIfCancellationRequested();
+                foreach (int option in _grid.Options())
                 {
-                    ErrorRejections += weight * _family.Options.Length;
-                    continue;
+                    if (Screen(option, i, j) >= _wanted * ScreenSlack && WorstMargin(option, i, j) is var margin && margin >= _wanted
+                        && _grid.At(option, i, j, margin) is { } estimate)
+                    {
+                        found.Add(estimate);
+                    }
                 }
-
-                ScanPair(i, j, load, weight);
             }
         }
+
+        return found;
     }
 
-    private void ScanPair(int i, int j, double staticLoad, double weight)
+    /// <summary>Estimates of everything else that could still change the answer.</summary>
+    public List<Estimate> Rest()
     {
-        double c1 = _space.Capacitors[i].Farads;
-        double c2 = _space.Capacitors[j].Farads;
-        double wanted = _space.Requirement.AllowDisturbance ? double.NegativeInfinity : _space.Requirement.Margin * MarginSlack;
+        var found = new List<Estimate>();
+        for (int i = 0; i < _space.Capacitors.Length; i++)
+        {
+            for (int j = 0; j < _space.Capacitors.Length; j++)
+            {
+                _run.Cancellation.ThrowIfCancellationRequested();
+                ScanPair(i, j, found);
+            }
+        }
+
+        return found;
+    }
+
+    private void ScanPair(int i, int j, List<Estimate> found)
+    {
+        double weight = (double)_space.Capacitors[i].Parts * _space.Capacitors[j].Parts;
         double before = double.NegativeInfinity;
-        double share = 0;
         for (int option = 0; option < _family.Options.Length; option++)
         {
-            double known = share != 0 ? share : _loadShares[option];
-            double expected = staticLoad * known;
-            if (known != 0 && (expected * (1 + NeighbourShare) < _lowestLoad || expected * (1 - NeighbourShare) > _highestLoad))
+            double screened = Screen(option, i, j);
+            if (screened < _wanted * ScreenSlack)
             {
-                ErrorRejections += weight;
-                continue;
-            }
-
-            CircuitValues values = _family.Options[option].With(c1, c2);
-            double margin = WorstMargin(values, wanted, out double first);
-            if (margin < wanted)
-            {
-                NoteMarginMiss(option, i, j, margin);
-                if (_family.Kind != CircuitKind.Follower && first < wanted && first < before)
+                if (_family.IsGate && screened < before)
                 {
                     // At one corner the margin rises, if at all, and then falls along Rs: nothing beyond has it.
                     MarginRejections += weight * (_family.Options.Length - option);
                     return;
                 }
 
-                before = first;
+                before = screened;
                 MarginRejections += weight;
                 continue;
             }
 
-            before = first;
-            OscillatorCircuit circuit = _template.At(values, _nominal);
-            if (OscillatorAnalysis.EstimateSteadyState(circuit, _last, out RunningState? state) is not { } estimate || state is null)
+            before = screened;
+            if (_grid.IsNode(option, i, j))
             {
-                ErrorRejections += weight;
                 continue;
             }
 
-            _last = state;
-            double load = _template.Crystal.Crystal.LoadAtFrequencyFarads(estimate.FrequencyHz);
-            share = load / staticLoad;
-            _loadShares[option] = share;
-            Estimates.Add(new Estimate(option, i, j, margin, load, estimate, state.Slim()));
+            LoadRange range = _grid.Range(option, i, j);
+            if (!MayMatter(option, i, j, range, 0, screened / ScreenSlack, weight))
+            {
+                continue;
+            }
+
+            double amplifier = range == LoadRange.Any ? 0 : _grid.LeastAmplifierRatio(option, i, j);
+            if (!MayMatter(option, i, j, range, amplifier, screened / ScreenSlack, weight))
+            {
+                continue;
+            }
+
+            double margin = WorstMargin(option, i, j);
+            if (margin < _wanted)
+            {
+                MarginRejections += weight;
+            }
+            else if (MayMatter(option, i, j, range, amplifier, margin, weight))
+            {
+                if (_grid.At(option, i, j, margin) is { } estimate)
+                {
+                    found.Add(estimate with { LeastAmplifierRatio = amplifier });
+                }
+                else
+                {
+                    ErrorRejections += weight;
+                }
+            }
         }
     }
 
-    // The first corner is the weakest device at the lowest supply.
-    private double WorstMargin(in CircuitValues values, double wanted, out double first)
+    // The margin of the weakest device at the lowest supply at the crystal's nominal frequency: the worst one is no better.
+    private double Screen(int option, int i, int j) => _requirement.AllowDisturbance
+        ? double.PositiveInfinity
+        : OscillatorAnalysis.FindMarginAt(_template.At(Values(option, i, j), _template.AmplifierCorners[0]), _screenHz);
+
+    // Whether a combination could still change the answer for some crystal.
+    private bool MayMatter(int option, int i, int j, in LoadRange range, double amplifierRatio, double margin, double weight)
     {
-        first = OscillatorAnalysis.FindStartFigures(_template.At(values, _template.AmplifierCorners[0])).Margin;
-        double least = first;
-        for (int corner = 1; corner < _template.AmplifierCorners.Length && least >= wanted; corner++)
+        Crystal crystal = _template.Crystal.Crystal;
+        double least = amplifierRatio;
+        if (double.IsFinite(range.Highest))
+        {
+            LeastTerms terms = LeastTerms.OfValues(_requirement.Board, _family.IsGate, crystal, Values(option, i, j), range.Highest);
+            least += terms.Ratio(_run.Prices.LeastSpread(i), _run.Prices.LeastSpread(j));
+        }
+
+        decimal cost = _family.OptionCosts[option] + _run.Prices.CheapestPair(i, j);
+        double bound = _requirement.AllowDisturbance ? double.PositiveInfinity : margin * MemberSearch.MarginSlack;
+        bool within = false;
+        foreach (FamilyMember member in _family.Members)
+        {
+            double error = member.TermsRatio + least + LeastCentre(member, range);
+            if (error <= _requirement.BudgetRatio)
+            {
+                within = true;
+                if (_run.MayEnter(member, error, bound, member.BaseCost + cost))
+                {
+                    return true;
+                }
+            }
+        }
+
+        if (!within)
+        {
+            ErrorRejections += weight;
+        }
+
+        return false;
+    }
+
+    // Crystals of one family differ in rated load, and so in the frequency that a load gives.
+    private static double LeastCentre(FamilyMember member, in LoadRange range)
+    {
+        Crystal crystal = member.Model.Crystal;
+        double slowest = crystal.FrequencyAtLoadHz(range.Highest);
+        double fastest = crystal.FrequencyAtLoadHz(range.Lowest);
+        double off = Math.Max(slowest / member.TargetHz - 1, 1 - fastest / member.TargetHz);
+        return Math.Max(0, off - EstimateError(crystal, fastest));
+    }
+
+    private double WorstMargin(int option, int i, int j)
+    {
+        double least = double.PositiveInfinity;
+        CircuitValues values = Values(option, i, j);
+        for (int corner = 0; corner < _template.AmplifierCorners.Length && least >= _wanted; corner++)
         {
             least = Math.Min(least, OscillatorAnalysis.FindStartFigures(_template.At(values, _template.AmplifierCorners[corner])).Margin);
         }
@@ -149,44 +209,6 @@ internal sealed class FamilyScan
         return least;
     }
 
-    private void NoteMarginMiss(int option, int i, int j, double margin)
-    {
-        if (BestMarginMiss is not { } best || margin > best.Margin)
-        {
-            BestMarginMiss = (option, i, j, margin);
-        }
-    }
-
-    private double StaticLoad(double c1, double c2)
-    {
-        Strays strays = _space.Requirement.Board.Strays;
-        if (_template.At(new CircuitValues(c1, c2), _nominal) is GateCircuit gate)
-        {
-            double a = c1 + strays.InputFarads + gate.Inverter.InputFarads;
-            double b = c2 + strays.OutputFarads + gate.Inverter.OutputFarads / 2;
-            return a * b / (a + b) + strays.AcrossFarads + gate.Inverter.FeedbackFarads;
-        }
-
-        double emitter = c2 + strays.OutputFarads;
-        return c1 * emitter / (c1 + emitter) + strays.AcrossFarads;
-    }
-
-    private (double Low, double High) LoadWindow(FamilyMember member)
-    {
-        Crystal crystal = member.Model.Crystal;
-        double room = _space.Requirement.BudgetRatio - member.TermsRatio;
-        double high = Bound(member.TargetHz * (1 - room));
-        double low = Bound(member.TargetHz * (1 + room));
-        return (low, high);
-
-        double Bound(double frequencyHz)
-        {
-            if (frequencyHz <= crystal.SeriesHz)
-            {
-                return double.PositiveInfinity;
-            }
-
-            return Math.Max(0, crystal.LoadAtFrequencyFarads(frequencyHz));
-        }
-    }
+    private CircuitValues Values(int option, int i, int j) =>
+        _family.Options[option].With(_space.Capacitors[i].Farads, _space.Capacitors[j].Farads);
 }

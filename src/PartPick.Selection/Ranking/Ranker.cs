@@ -23,7 +23,8 @@ public static class Ranker
     {
         ArgumentNullException.ThrowIfNull(requirement);
         ArgumentNullException.ThrowIfNull(catalog);
-        var space = new SearchSpace(requirement, catalog);
-        return new SearchRun(space, options ?? new RankingOptions(), progress, cancellation).Run();
+        options ??= new RankingOptions();
+        var space = new SearchSpace(requirement, catalog, options.All);
+        return new SearchRun(space, options, progress, cancellation).Run();
     }
 }

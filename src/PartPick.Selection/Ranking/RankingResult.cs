@@ -18,6 +18,11 @@ public sealed record RankingResult
     public required long? Fit { get; init; }
 
     /// <summary>
+    /// Number of combinations of values whose steady state was solved; the others were decided by bounds and quick estimates.
+    /// </summary>
+    public long Analysed { get; init; }
+
+    /// <summary>
     /// Fit candidates in order, best first: the best of each circuit–crystal–amplifier group (with its tap), or every fit one
     /// where that was asked. Where nothing is fit, empty.
     /// </summary>

@@ -8,6 +8,7 @@ namespace PartPick.Selection.Search;
 internal sealed class SearchRun
 {
     private readonly RankingOptions _options;
+    private readonly AnswerBuilder _answers;
     private readonly IProgress<RankingResult>? _progress;
     private readonly Stopwatch _watch = Stopwatch.StartNew();
     private readonly Lock _reporting = new();
@@ -24,6 +25,7 @@ internal sealed class SearchRun
         decimal cheapest = space.Families.SelectMany(family => family.Members).Select(member => member.BaseCost).DefaultIfEmpty(0).Min();
         Floor = Math.Max(cheapest + Prices.CheapestOfAllPairs(), 1e-6m);
         Leaders = new Leaders(space.Requirement, options.Front ? 1 : options.Top, Floor);
+        _answers = new AnswerBuilder(this, options);
         foreach ((Limit limit, double count) in space.Rejections)
         {
             Tally.Reject(limit, count);
@@ -110,12 +112,12 @@ internal sealed class SearchRun
         var workers = new Task[threads - 1];
         for (int i = 0; i < workers.Length; i++)
         {
-            workers[i] = Task.Run(() => Work(order), CancellationToken.None);
+            workers[i] = Task.Run(() => WorkUntilCancelled(order), CancellationToken.None);
         }
 
         try
         {
-            Work(order);
+            WorkUntilCancelled(order);
         }
         finally
         {
@@ -123,7 +125,8 @@ internal sealed class SearchRun
             Task.WaitAll(workers, CancellationToken.None);
         }
 
-        return new AnswerBuilder(this, _options).Build(complete: true, _watch.Elapsed.TotalSeconds);
+        Cancellation.ThrowIfCancellationRequested();
+        return _answers.Build(complete: true, _watch.Elapsed.TotalSeconds);
     }
 
     /// <summary>Reports a best-so-far now and then.</summary>
@@ -136,12 +139,24 @@ internal sealed class SearchRun
 
         try
         {
-            _progress.Report(new AnswerBuilder(this, _options).Build(complete: false, _watch.Elapsed.TotalSeconds));
+            _progress.Report(_answers.Build(complete: false, _watch.Elapsed.TotalSeconds));
             Volatile.Write(ref _nextReport, _watch.Elapsed.TotalSeconds + 0.3);
         }
         finally
         {
             _reporting.Exit();
+        }
+    }
+
+    private void WorkUntilCancelled(ImmutableArray<CircuitFamily> families)
+    {
+        try
+        {
+            Work(families);
+        }
+        catch (OperationCanceledException) when (Cancellation.IsCancellationRequested)
+        {
+            // Every thread ends by itself; the run says so once.
         }
     }
 
@@ -162,22 +177,19 @@ internal sealed class SearchRun
 
     private void Search(CircuitFamily family)
     {
-        var scan = new FamilyScan(Space, family, Cancellation);
-        scan.Run();
+        var scan = new FamilyScan(this, family);
+        Look(scan.Sparse());
+        Look(scan.Rest());
         Tally.Reject(Limit.Margin, scan.MarginRejections * family.Members.Length);
         Tally.Reject(Limit.Error, scan.ErrorRejections * family.Members.Length);
-        foreach (FamilyMember member in family.Members)
-        {
-            if (scan.Estimates.Count == 0 && scan.BestMarginMiss is { } miss)
-            {
-                NearMisses.Offer(
-                    member,
-                    Space.Requirement.Margin / Math.Max(miss.Margin, 1e-3),
-                    () => Choice(family, member, miss.Option, Prices.Tightest(miss.C1), Prices.Tightest(miss.C2)));
-            }
+        Tally.Cover(Space.CapacitorPairs * family.Options.Length * family.Members.Length);
 
-            new MemberSearch(this, family, member).Run(scan.Estimates);
-            Tally.Cover(Space.CapacitorPairs * family.Options.Length);
+        void Look(List<Estimate> estimates)
+        {
+            foreach (FamilyMember member in family.Members)
+            {
+                new MemberSearch(this, family, member).Run(estimates);
+            }
         }
     }
 

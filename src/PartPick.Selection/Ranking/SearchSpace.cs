@@ -9,12 +9,15 @@ internal sealed class SearchSpace
     private readonly Dictionary<Limit, double> _rejections = [];
     private readonly AmplifierOptions _options;
 
-    public SearchSpace(Requirement requirement, PartsCatalog catalog)
+    /// <param name="requirement">What is needed.</param>
+    /// <param name="catalog">All parts.</param>
+    /// <param name="every">Whether every load capacitor is tried, also those that another one beats whatever the circuit.</param>
+    public SearchSpace(Requirement requirement, PartsCatalog catalog, bool every)
     {
         Requirement = requirement;
         Catalog = catalog;
         Market = new Market(catalog, requirement.Builds);
-        Capacitors = CapacitorChoice.Of(requirement, Market);
+        Capacitors = CapacitorChoice.Of(requirement, Market, every);
         _options = new AmplifierOptions(requirement, Market);
         Families = [.. Kinds().SelectMany(FamiliesOf)];
     }
@@ -45,7 +48,7 @@ internal sealed class SearchSpace
     {
         get
         {
-            double parts = Capacitors.Sum(value => value.Parts.Length);
+            double parts = Capacitors.Sum(value => value.Parts);
             return parts * parts;
         }
     }
@@ -110,6 +113,7 @@ internal sealed class SearchSpace
                     Amplifier = amplifier,
                     Support = family.Key.Support,
                     Options = options,
+                    OptionCosts = [.. options.Select(option => option.Cost(family.Key.Support.Feedback, Market))],
                     Members = [.. family.Select(pair => pair.Member)],
                 };
             }

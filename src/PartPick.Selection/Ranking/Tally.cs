@@ -9,6 +9,7 @@ internal sealed class Tally
     private readonly Dictionary<Limit, double> _rejections = [];
     private double _covered;
     private long _fit;
+    private long _analysed;
 
     /// <summary>Combinations covered so far.</summary>
     public double Covered
@@ -33,6 +34,9 @@ internal sealed class Tally
             }
         }
     }
+
+    /// <summary>Combinations of values whose steady state was solved so far.</summary>
+    public long Analysed => Interlocked.Read(ref _analysed);
 
     /// <summary>Adds combinations that a limit removed.</summary>
     public void Reject(Limit limit, double combinations)
@@ -60,6 +64,9 @@ internal sealed class Tally
             _fit++;
         }
     }
+
+    /// <summary>Adds one combination of values whose steady state is solved.</summary>
+    public void CountAnalysed() => Interlocked.Increment(ref _analysed);
 
     /// <summary>A copy of the rejections.</summary>
     public ImmutableDictionary<Limit, double> Rejections()

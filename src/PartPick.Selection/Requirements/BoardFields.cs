@@ -13,14 +13,16 @@ internal static class BoardFields
 
     private static readonly string[] Keys = ["input", "output", "across", "uncertainty"];
 
-    private static string Fits => string.Join(", ", Board.Presets.Select(board => board.Name)) + ", or an object with " + string.Join(", ", Keys);
+    private static string Fits =>
+        string.Join(", ", Board.Presets.Select(board => board.Name)) + ", or an object with " + string.Join(", ", Keys);
 
     /// <summary>Reads the board; null where it is absent or wrong.</summary>
     public static Board? Read(FieldReader fields)
     {
         if (fields.Raw("board") is not { Value.ValueKind: JsonValueKind.Object })
         {
-            return fields.Word("board", Board.Presets.ToDictionary(board => board.Name, board => new Choice(board), StringComparer.Ordinal), Fits)?.Board;
+            var presets = Board.Presets.ToDictionary(board => board.Name, board => new Choice(board), StringComparer.Ordinal);
+            return fields.Word("board", presets, Fits)?.Board;
         }
 
         FieldReader own = fields.Object("board", Fits)!;

@@ -51,7 +51,9 @@ public sealed record RequirementOption(RequirementKey Key, string? Text)
         try
         {
             using JsonDocument document = JsonDocument.Parse(text);
-            return Result.Ok(new Field(document.RootElement.Clone(), where));
+            return JsonText.IsReadable(document.RootElement)
+                ? Result.Ok(new Field(document.RootElement.Clone(), where))
+                : Result.Fail<Field>(where, "holds half a character in a text", Key.Fits);
         }
         catch (JsonException)
         {

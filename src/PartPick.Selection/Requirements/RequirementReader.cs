@@ -10,6 +10,8 @@ internal static class RequirementReader
     /// <summary>Largest budget that makes sense for a crystal: one per cent.</summary>
     private const double LargestBudgetRatio = 0.01;
 
+    private const double MostYears = 100;
+
     public static Requirement Read(FieldReader fields)
     {
         var defaults = new Requirement { OutputHz = fields.Needed("output", Dimension.Frequency) };
@@ -26,7 +28,7 @@ internal static class RequirementReader
             SupplyMaxVolts = supplyMax,
             TemperatureMinCelsius = coldest,
             TemperatureMaxCelsius = hottest,
-            Years = fields.Optional("years", Dimension.Number) ?? defaults.Years,
+            Years = Years(fields) ?? defaults.Years,
             Margin = fields.Optional("margin", Dimension.Number, positive: true) ?? defaults.Margin,
             AllowDisturbance = fields.Flag("allowDisturbance") ?? defaults.AllowDisturbance,
             StartUpTimeSeconds = fields.Optional("startUpTime", Dimension.Time, positive: true),
@@ -51,6 +53,17 @@ internal static class RequirementReader
         }
 
         return budget;
+    }
+
+    private static double? Years(FieldReader fields)
+    {
+        double? years = fields.Optional("years", Dimension.Number);
+        if (years > MostYears)
+        {
+            fields.Reject("years", "is beyond what an ageing figure tells", "at most 100, such as 5");
+        }
+
+        return years;
     }
 
     private static decimal? Cost(FieldReader fields)

@@ -50,7 +50,8 @@ internal static class DriveWarnings
         }
 
         return DampingCure.Find(gate, rated, StartWarnings.UsualMargin) is { } cure
-            ? $"Rs = {Say.Ohms(cure.Ohms)} would bring it to {Say.Watts(cure.DriveWatts)} with a start-up margin of {Say.Number(cure.Margin)}"
+            ? $"Rs = {Say.Ohms(cure.Ohms)} would bring it to {Say.Watts(cure.DriveWatts)} "
+                + $"with a start-up margin of {Say.Number(cure.Margin)}"
             : $"no damping resistor Rs of the E12 series brings it there with a start-up margin of {Say.Number(StartWarnings.UsualMargin)} "
                 + "left: take smaller capacitors, a lower supply or a crystal for more drive";
     }

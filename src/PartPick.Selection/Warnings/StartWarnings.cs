@@ -76,7 +76,8 @@ internal static class StartWarnings
     {
         < UnreliableMargin => $"The start-up margin of {Say.Number(margin)} is below {Say.Number(UnreliableMargin)}, which common "
             + $"practice calls unreliable; it asks for {Say.Number(UsualMargin)}.",
-        < UsualMargin => $"The start-up margin of {Say.Number(margin)} is below the {Say.Number(UsualMargin)} that common practice asks for.",
+        < UsualMargin =>
+            $"The start-up margin of {Say.Number(margin)} is below the {Say.Number(UsualMargin)} that common practice asks for.",
         _ => null,
     };
 }

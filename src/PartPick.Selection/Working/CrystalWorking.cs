@@ -17,7 +17,9 @@ internal static class CrystalWorking
         if (crystal.LoadFarads is { } load)
         {
             yield return new WorkingStep(Section, "series resonance fs", "fN / sqrt(1 + Cm/(C0 + CL))",
-                $"{nominal} / sqrt(1 + {motional}/({shunt} + {Numbers.Farads(load)}))", series, "series and parallel resonance of the equivalent circuit");
+                $"{nominal} / sqrt(1 + {motional}/({shunt} + {Numbers.Farads(load)}))",
+                series,
+                "series and parallel resonance of the equivalent circuit");
         }
         else
         {

@@ -21,18 +21,21 @@ internal static class FollowerWorking
             $"k ({Numbers.Of(follower.TemperatureCelsius)} + {Numbers.Of(PhysicalConstants.ZeroCelsiusKelvins)}) K / q",
             Numbers.Of(bias.ThermalVolts, Dimension.Voltage), "SI constants");
         yield return new WorkingStep(Device, "saturation current Is", "1 mA e^(-VBE/VT), VBE less 2 mV/K from 25 °C",
-            $"1 mA e^(-({Numbers.Of(follower.Transistor.BaseEmitterVolts)} V - 2 mV/K ({Numbers.Of(follower.TemperatureCelsius)} - 25) K)/VT)",
+            $"1 mA e^(-({Numbers.Of(follower.Transistor.BaseEmitterVolts)} V "
+                + $"- 2 mV/K ({Numbers.Of(follower.TemperatureCelsius)} - 25) K)/VT)",
             $"{Numbers.Of(bias.SaturationAmps)} A", ebers);
         yield return new WorkingStep(Device, "emitter current IE",
             follower.EmitterCurrentAmps is null ? "the bias network solved with the exponential law" : "given", "",
             Numbers.Of(bias.EmitterAmps, Dimension.Current), follower.EmitterCurrentAmps is null ? ebers : "");
         yield return new WorkingStep(Device, "transconductance gm", "IE beta/(beta + 1) / VT",
-            $"{Numbers.Of(bias.EmitterAmps, Dimension.Current)} {Numbers.Of(beta)}/({Numbers.Of(beta)} + 1) / {Numbers.Of(bias.ThermalVolts, Dimension.Voltage)}",
+            $"{Numbers.Of(bias.EmitterAmps, Dimension.Current)} {Numbers.Of(beta)}/({Numbers.Of(beta)} + 1) "
+                + $"/ {Numbers.Of(bias.ThermalVolts, Dimension.Voltage)}",
             Numbers.Siemens(gm), ebers);
         yield return new WorkingStep(Device, "input conductance g(pi)", "gm / beta", $"{Numbers.Siemens(gm)} / {Numbers.Of(beta)}",
             Numbers.Siemens(gm / beta), ebers);
         yield return new WorkingStep(Device, "input capacitance C(pi)", "Cje + gm tauF",
-            $"{Numbers.Farads(follower.Transistor.JunctionFarads)} + {Numbers.Siemens(gm)} {Numbers.Of(follower.Transistor.TransitSeconds, Dimension.Time)}",
+            $"{Numbers.Farads(follower.Transistor.JunctionFarads)} + {Numbers.Siemens(gm)} "
+                + Numbers.Of(follower.Transistor.TransitSeconds, Dimension.Time),
             Numbers.Farads(follower.Transistor.JunctionFarads + gm * follower.Transistor.TransitSeconds), "charge control");
         yield return Capacitance("B to ground (C3)", "C0 + Cs,across", follower.Crystal.ShuntFarads, follower.Strays.AcrossFarads);
         yield return Capacitance("B to E", "C1", follower.C1Farads);

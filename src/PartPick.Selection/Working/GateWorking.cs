@@ -20,7 +20,9 @@ internal static class GateWorking
         yield return Capacitance("D to ground", "Cout", inverter.OutputFarads);
         yield return new WorkingStep(Network, "resistors", "Rf from A to D, Rs from D to B, Ro from D to ground", "",
             $"Rf {Numbers.Ohms(gate.FeedbackOhms)}, Rs {Numbers.Ohms(gate.SeriesOhms)}, Ro {Numbers.Ohms(inverter.OutputOhms)}", "");
-        foreach (WorkingStep step in inverter is OneStageInverter one ? OneStage(one, gate.SupplyVolts) : Buffered(inverter, gate.SupplyVolts))
+        IEnumerable<WorkingStep> device =
+            inverter is OneStageInverter one ? OneStage(one, gate.SupplyVolts) : Buffered(inverter, gate.SupplyVolts);
+        foreach (WorkingStep step in device)
         {
             yield return step;
         }
@@ -54,7 +56,8 @@ internal static class GateWorking
         double k = one.Gm / (2 * v * (1 + lambda * swing / 2));
         double rest = 1 / one.Ro - k * v * v * lambda;
         rest = rest > 1e-12 / one.Ro ? rest : 0;
-        yield return new WorkingStep(Device, "q", "2 / (gm Ro v)", $"2 / ({Numbers.Siemens(one.Gm)} {Numbers.Ohms(one.Ro)} {Numbers.Of(v)} V)",
+        yield return new WorkingStep(Device, "q", "2 / (gm Ro v)",
+            $"2 / ({Numbers.Siemens(one.Gm)} {Numbers.Ohms(one.Ro)} {Numbers.Of(v)} V)",
             $"{Numbers.Of(q)} /V", source);
         yield return new WorkingStep(Device, "channel-length modulation lambda", "q / (1 - q VDD/2), at most 0.2 /V",
             $"{Numbers.Of(q)} / (1 - {Numbers.Of(q)} {Numbers.Of(swing / 2)})", $"{Numbers.Of(lambda)} /V", source);
@@ -69,8 +72,10 @@ internal static class GateWorking
     {
         var buffered = (BufferedInverter)inverter;
         yield return new WorkingStep(Device, "characteristic", "-(VDD/2) tanh(2 a v/VDD) behind Ron", "",
-            $"a = {Numbers.Of(buffered.Gain)}, VDD = {Numbers.Of(supply)} V, Ron = {Numbers.Ohms(buffered.Ron)}", "saturating chain of stages");
-        yield return new WorkingStep(Device, "transconductance gm", "a / Ron", $"{Numbers.Of(buffered.Gain)} / {Numbers.Ohms(buffered.Ron)}",
+            $"a = {Numbers.Of(buffered.Gain)}, VDD = {Numbers.Of(supply)} V, Ron = {Numbers.Ohms(buffered.Ron)}",
+            "saturating chain of stages");
+        yield return new WorkingStep(Device, "transconductance gm", "a / Ron",
+            $"{Numbers.Of(buffered.Gain)} / {Numbers.Ohms(buffered.Ron)}",
             Numbers.Siemens(buffered.TransconductanceSiemens), "slope at mid-supply");
     }
 }

@@ -21,7 +21,8 @@ internal static class SteadyWorking
         }
 
         Crystal crystal = description.Circuit.Crystal;
-        yield return new WorkingStep(Section, "Zc(I) = V1 / I at the running amplitude", "Re Zc(I) = -Rm, Im Zc(I) = -(w Lm - 1/(w Cm))", "",
+        yield return new WorkingStep(Section, "Zc(I) = V1 / I at the running amplitude",
+            "Re Zc(I) = -Rm, Im Zc(I) = -(w Lm - 1/(w Cm))", "",
             Numbers.Ohms(-crystal.ResistanceOhms, -StartWorking.Reactance(crystal, steady.FrequencyHz)), Balance);
         yield return new WorkingStep(Section, "frequency at the crystal f", "the frequency at which both hold", "",
             Numbers.Hertz(steady.FrequencyHz), Balance);

@@ -13,17 +13,18 @@ internal static class CapsCommand
     private const string Examples =
         """
         partpick caps --load 18p --stray 4p --series E24
-        partpick caps --load 12.5p --stray 3p --parallel --top 5
+        partpick caps --load 12.5p --pin-stray 3p --parallel --top 5
         partpick caps --crystal crystal.json --stray 4p --format csv
-        CL = (C1 + Cs)(C2 + Cs)/(C1 + C2 + 2 Cs) + Ca, with the stray Cs at each pin and Ca across the crystal.
+        CL = C1 C2/(C1 + C2) + Cs, with the stray Cs as one figure, 2 to 7 pF on most boards. Where the stray Cp at each
+        pin is known, --pin-stray adds it to each capacitor: CL = (C1 + Cp)(C2 + Cp)/(C1 + C2 + 2 Cp) + Cs.
         """;
 
     /// <summary>Builds the command.</summary>
     public static Command Build(CommandContext context)
     {
         var load = new Option<string?>("--load") { Description = "Wanted load capacitance; else the crystal's", HelpName = "VALUE" };
-        var stray = new Option<string?>("--stray") { Description = "Stray capacitance at each pin to ground (0)", HelpName = "VALUE" };
-        var across = new Option<string?>("--across") { Description = "Stray capacitance across the crystal (0)", HelpName = "VALUE" };
+        var stray = new Option<string?>("--stray") { Description = "Stray capacitance as one figure (0)", HelpName = "VALUE" };
+        var pin = new Option<string?>("--pin-stray") { Description = "Stray capacitance at each pin to ground (0)", HelpName = "VALUE" };
         var series = new Option<string>("--series")
         {
             Description = "Series of preferred values",
@@ -39,7 +40,7 @@ internal static class CapsCommand
         };
         var command = new Command("caps", "Finds the load capacitors of a series that come nearest to a load, with the strays.")
         {
-            load, stray, across, series, parallel, top, crystal, context.Format,
+            load, stray, pin, series, parallel, top, crystal, context.Format,
         };
         HelpFooter.AddTo(command, "Examples", Examples);
         command.SetAction(parsed =>
@@ -49,8 +50,8 @@ internal static class CapsCommand
             var request = new LoadPairRequest
             {
                 LoadFarads = given ?? known?.LoadFarads ?? throw Missing(load.Name, known),
-                PinStrayFarads = Capacitance(parsed.GetValue(stray), stray.Name) ?? 0,
-                AcrossFarads = Capacitance(parsed.GetValue(across), across.Name) ?? 0,
+                StrayFarads = Capacitance(parsed.GetValue(stray), stray.Name) ?? 0,
+                PinStrayFarads = Capacitance(parsed.GetValue(pin), pin.Name) ?? 0,
                 Series = CommandFailure.Unless(PreferredSeries.Named(parsed.GetValue(series), series.Name)),
                 Parallel = parsed.GetValue(parallel),
                 Top = Counts.Read(parsed.GetValue(top), top.Name) ?? 10,
@@ -66,14 +67,18 @@ internal static class CapsCommand
         if (request.LoadFarads == 0 || request.LoadFarads > 1e-6)
         {
             throw new CommandFailure(
-                new Problem("--load", "is no load of a crystal", "a capacitance above zero and up to 1 uF such as 18 pF"), ExitStatus.WrongInput);
+                new Problem("--load", "is no load of a crystal", "a capacitance above zero and up to 1 uF such as 18 pF"),
+                ExitStatus.WrongInput);
         }
 
         ImmutableArray<LoadPair> pairs = LoadCapacitorPairs.Find(request);
         if (pairs.IsEmpty || request.ExactFarads <= 0)
         {
             throw new CommandFailure(
-                new Problem("--stray", "the strays alone make the load or more", "strays that leave room for capacitors"),
+                new Problem(
+                    request.StrayFarads > 0 || request.PinStrayFarads == 0 ? "--stray" : "--pin-stray",
+                    "the strays alone make the load or more",
+                    "strays that leave room for capacitors"),
                 ExitStatus.WrongInput);
         }
 

@@ -27,7 +27,10 @@ internal static class RankCommand
             Arity = ArgumentArity.ZeroOrOne,
         };
         var top = new Option<string?>("--top") { Description = "Most candidates to list (50)", HelpName = "N" };
-        var front = new Option<bool>("--front") { Description = "The front alone: candidates that no other beats on error, margin and cost" };
+        var front = new Option<bool>("--front")
+        {
+            Description = "The front alone: candidates that no other beats on error, margin and cost",
+        };
         var all = new Option<bool>("--all") { Description = "Every fit candidate, not only the best of each group" };
         var quiet = new Option<bool>("--no-progress") { Description = "Show no progress" };
         var command = new Command("rank", "Ranks the combinations of parts that fit a requirement, best first.")

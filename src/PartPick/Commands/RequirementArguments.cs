@@ -55,7 +55,9 @@ internal static class RequirementArguments
         _ when argument.StartsWith("--", StringComparison.Ordinal) => false,
         _ when values.Count == 0 => true,
         _ when values[0].Contains("..", StringComparison.Ordinal) || values[0].StartsWith('[') || values[0].StartsWith('{') => false,
-        RequirementShape.Range => ValueText.Parse(argument, key.Name == "supply" ? Dimension.Voltage : Dimension.Temperature, key.Name).IsOk,
-        _ => CircuitWords.ByWord.ContainsKey(argument.TrimEnd(',')) || ValueText.Parse(argument.TrimEnd(','), Dimension.Number, key.Name).IsOk,
+        RequirementShape.Range =>
+            ValueText.Parse(argument, key.Name == "supply" ? Dimension.Voltage : Dimension.Temperature, key.Name).IsOk,
+        _ => CircuitWords.ByWord.ContainsKey(argument.TrimEnd(','))
+            || ValueText.Parse(argument.TrimEnd(','), Dimension.Number, key.Name).IsOk,
     };
 }

@@ -36,8 +36,8 @@ internal static class CapsOutput
     private static JsonObject ToJson(LoadPairRequest request, ImmutableArray<LoadPair> pairs) => new()
     {
         ["load"] = request.LoadFarads,
-        ["stray"] = request.PinStrayFarads,
-        ["across"] = request.AcrossFarads,
+        ["stray"] = request.StrayFarads,
+        ["pinStray"] = request.PinStrayFarads,
         ["series"] = request.Series.Name,
         ["exact"] = request.ExactFarads,
         ["pairs"] = new JsonArray([.. pairs.Select(pair => (JsonNode)new JsonObject
@@ -54,8 +54,9 @@ internal static class CapsOutput
 
     private static void WriteTable(TextWriter output, LoadPairRequest request, ImmutableArray<LoadPair> pairs)
     {
-        output.WriteLine($"A load of {Farads(request.LoadFarads)} with {Farads(request.PinStrayFarads)} at each pin and "
-            + $"{Farads(request.AcrossFarads)} across the crystal asks for two capacitors of {Farads(request.ExactFarads)}. "
+        string pins = request.PinStrayFarads > 0 ? $" and {Farads(request.PinStrayFarads)} at each pin" : "";
+        output.WriteLine($"A load of {Farads(request.LoadFarads)} with a stray of {Farads(request.StrayFarads)}{pins} "
+            + $"asks for two capacitors of {Farads(request.ExactFarads)}. "
             + $"Nearest of {request.Series.Name}, either way round:");
         output.WriteLine();
         bool shift = request.Crystal is not null;

@@ -46,7 +46,8 @@ internal static class CheckOutput
         output.WriteLine($"A {description.Kind.Word()} circuit with a crystal of "
             + $"{ValueText.Format(description.Circuit.Crystal.NominalHz, Dimension.Frequency, 9)} at "
             + $"{ValueText.Format(description.Circuit.SupplyVolts, Dimension.Voltage)} and "
-            + $"{ValueText.Format(description.Circuit.TemperatureCelsius, Dimension.Temperature)}: it {CircuitFigures.Start(result.Start)}.");
+            + $"{ValueText.Format(description.Circuit.TemperatureCelsius, Dimension.Temperature)}: "
+            + $"it {CircuitFigures.Start(result.Start)}.");
         output.WriteLine();
         TextTable.Write(
             output,

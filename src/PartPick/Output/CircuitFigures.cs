@@ -26,7 +26,9 @@ internal static class CircuitFigures
             new("outputFrequency", $"Output frequency (divided by 2^{description.Tap})", "Hz",
                 Value(steady?.FrequencyHz / Math.Pow(2, description.Tap), Dimension.Frequency, 10)),
             new("error", $"Error {reference}", "ppm",
-                steady is null ? Figures.None : Figures.Fixed(CircuitResults.ErrorRatio(description, steady.FrequencyHz), 1e-6, 2) + " ppm"),
+                steady is null
+                    ? Figures.None
+                    : Figures.Fixed(CircuitResults.ErrorRatio(description, steady.FrequencyHz), 1e-6, 2) + " ppm"),
             new("negativeResistance", "Negative resistance", "ohm", Value(start.NegativeResistanceOhms, Dimension.Resistance, 4)),
             new("startUpMargin", "Start-up margin", "", Figures.Short(start.Margin, 1)),
             new("gainMargin", "Gain margin", "", Figures.Short(start.GainMargin, 1)),

@@ -41,5 +41,7 @@ internal static class Figures
 
     /// <summary>A number of combinations, whole and with its thousands apart.</summary>
     public static string Count(double value) =>
-        value < 1e15 ? value.ToString("#,##0", CultureInfo.InvariantCulture).Replace(',', ' ') : value.ToString("0.###e0", CultureInfo.InvariantCulture);
+        value < 1e15
+            ? value.ToString("#,##0", CultureInfo.InvariantCulture).Replace(',', ' ')
+            : value.ToString("0.###e0", CultureInfo.InvariantCulture);
 }

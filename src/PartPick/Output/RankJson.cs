@@ -19,7 +19,8 @@ internal static class RankJson
             ["candidates"] = new JsonArray([.. view.Result.Candidates.Select(candidate => (JsonNode)Candidate(candidate, target))]),
             ["front"] = new JsonArray([.. result.Front.Select(id => (JsonNode)id)]),
             ["rejections"] = new JsonObject(
-                result.Rejections.OrderBy(limit => limit.Key).Select(limit => KeyValuePair.Create(LimitWords.Key(limit.Key), (JsonNode?)limit.Value))),
+                result.Rejections.OrderBy(limit => limit.Key)
+                    .Select(limit => KeyValuePair.Create(LimitWords.Key(limit.Key), (JsonNode?)limit.Value))),
             ["elapsed"] = result.ElapsedSeconds,
         };
         if (view.NothingFits)

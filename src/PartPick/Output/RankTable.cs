@@ -24,7 +24,8 @@ internal static class RankTable
 
         WriteCandidates(output, view, view.Result.Candidates);
         output.WriteLine();
-        output.WriteLine("* on the front: no fit candidate beats it on error, margin and cost together. Error is the worst case; margin, start-up");
+        output.WriteLine(
+            "* on the front: no fit candidate beats it on error, margin and cost together. Error is the worst case; margin, start-up");
         output.WriteLine("  time and drive level are those of the worst corner.");
         WriteWarnings(output, view.Result.Candidates);
         output.WriteLine();
@@ -57,7 +58,11 @@ internal static class RankTable
         Figures.Whole(candidate.Choice.Tap),
         Figures.Short(candidate.Choice.C1.ValueFarads, 1e-12),
         Figures.Short(candidate.Choice.C2.ValueFarads, 1e-12),
-        Figures.Short(candidate.Choice.Circuit == CircuitKind.Follower ? candidate.Choice.Emitter?.ValueOhms : candidate.Choice.Series?.ValueOhms ?? 0, 1),
+        Figures.Short(
+            candidate.Choice.Circuit == CircuitKind.Follower
+                ? candidate.Choice.Emitter?.ValueOhms
+                : candidate.Choice.Series?.ValueOhms ?? 0,
+            1),
         Figures.Fixed(candidate.Budget?.WorstRatio, 1e-6, 1),
         Figures.Fixed(candidate.Budget?.RssRatio, 1e-6, 1),
         Figures.Fixed(candidate.Margin.Value, 1, 2),

@@ -19,7 +19,9 @@ public static class KeysPage
         Key("?", "this page");
         Key("q", "quit; the wanted sentence is kept for the next time");
         Head("In the wanted sentence");
-        Key($"{glyphs.Left} {glyphs.Right} Tab", "the value before, the next one; " + glyphs.Up + " and " + glyphs.Down + " change the line");
+        Key(
+            $"{glyphs.Left} {glyphs.Right} Tab",
+            "the value before, the next one; " + glyphs.Up + " and " + glyphs.Down + " change the line");
         Key("type", "put in a new value; the list below answers while you type");
         Key("Enter", "change the value that is there; Enter again keeps it");
         Key("Space", "the next of a few choices; the first letter of a choice picks it");

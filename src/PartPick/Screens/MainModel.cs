@@ -248,14 +248,20 @@ public sealed class MainModel
         int right = width - left - 1;
         ImmutableArray<Line> list = [AnswerRule(left), List.Heading(_glyphs), .. Rows(room - 2)];
         ImmutableArray<Line> pane = List.Chosen is { } candidate
-            ? [Rule(CircuitPane.ShortTitle(candidate), "", right), .. CircuitPane.Beside(candidate, List.Result!.Requirement, right, _glyphs)]
+            ?
+            [
+                Rule(CircuitPane.ShortTitle(candidate), "", right),
+                .. CircuitPane.Beside(candidate, List.Result!.Requirement, right, _glyphs),
+            ]
             : [Rule("", "", right)];
         var bar = new Line([new Span(_glyphs.Vertical.ToString(), Tone.Quiet)]);
         var lines = ImmutableArray.CreateBuilder<Line>();
         for (int i = 0; i < room; i++)
         {
             Line middle = i == 0 ? new Line([new Span(_glyphs.TeeDown.ToString(), Tone.Quiet)]) : bar;
-            lines.Add((i < list.Length ? list[i] : Line.Empty).Beside(left, middle).Beside(left + 1, i < pane.Length ? pane[i] : Line.Empty));
+            lines.Add((i < list.Length ? list[i] : Line.Empty)
+                .Beside(left, middle)
+                .Beside(left + 1, i < pane.Length ? pane[i] : Line.Empty));
         }
 
         return lines.ToImmutable();
@@ -330,7 +336,9 @@ public sealed class MainModel
             Place.Circuit => Keys(
                 line, (_glyphs.Up + " " + _glyphs.Down, "scroll"), (_glyphs.Left + " " + _glyphs.Right, "other circuits"),
                 ("Esc", "list"), ("e", "edit"), ("?", "keys")),
-            _ => Keys(line, (_glyphs.Up + " " + _glyphs.Down, "choose"), ("Enter", "open"), ("e", "edit the wanted"), ("?", "keys"), ("q", "quit")),
+            _ => Keys(
+                line, (_glyphs.Up + " " + _glyphs.Down, "choose"), ("Enter", "open"), ("e", "edit the wanted"), ("?", "keys"),
+                ("q", "quit")),
         };
     }
 

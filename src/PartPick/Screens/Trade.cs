@@ -5,17 +5,6 @@ namespace PartPick.Screens;
 /// <summary>The trade's words for what the model names.</summary>
 public static class Trade
 {
-    /// <summary>The word for a circuit, as in files.</summary>
-    /// <param name="kind">The circuit.</param>
-    public static string Word(CircuitKind kind) => kind switch
-    {
-        CircuitKind.Gate => "gate",
-        CircuitKind.Counter => "counter",
-        CircuitKind.Port => "port",
-        CircuitKind.Follower => "follower",
-        _ => throw new ArgumentOutOfRangeException(nameof(kind), kind, "Not a circuit."),
-    };
-
     /// <summary>The words for a limit.</summary>
     /// <param name="limit">The limit.</param>
     public static string Words(Limit limit) => limit switch

@@ -19,7 +19,9 @@ public class CrystalFigureTests
     public void A_smaller_holder_has_no_less_resistance_and_less_motional_capacitance(string large, string small)
     {
         var pairs = At.Where(crystal => crystal.Holder == large)
-            .Join(At.Where(crystal => crystal.Holder == small), one => one.FrequencyHz, other => other.FrequencyHz, (one, other) => (one, other))
+            .Join(
+                At.Where(crystal => crystal.Holder == small), one => one.FrequencyHz, other => other.FrequencyHz,
+                (one, other) => (one, other))
             .ToArray();
         Assert.NotEmpty(pairs);
         Assert.All(pairs, pair => Assert.True(pair.other.ResistanceOhms >= pair.one.ResistanceOhms, pair.other.Id));
@@ -35,7 +37,8 @@ public class CrystalFigureTests
     [InlineData(40e6, 60e6, 50)]
     public void Resistance_of_the_smallest_holder_stays_within_a_published_table(double from, double to, double most)
     {
-        CrystalPart[] within = [.. At.Where(crystal => crystal.Holder == "3225" && crystal.FrequencyHz >= from && crystal.FrequencyHz < to)];
+        CrystalPart[] within =
+            [.. At.Where(crystal => crystal.Holder == "3225" && crystal.FrequencyHz >= from && crystal.FrequencyHz < to)];
         Assert.NotEmpty(within);
         Assert.All(within, crystal => Assert.InRange(crystal.ResistanceOhms!.Value, 10, most));
     }
@@ -135,5 +138,6 @@ public class CrystalFigureTests
     [Fact]
     public void Temperatures_are_one_of_the_two_usual_ranges() => Assert.All(
         BuiltInParts.Catalog.Crystals,
-        crystal => Assert.Contains((crystal.TemperatureMinCelsius, crystal.TemperatureMaxCelsius), new (double?, double?)[] { (-20, 70), (-40, 85) }));
+        crystal => Assert.Contains(
+            (crystal.TemperatureMinCelsius, crystal.TemperatureMaxCelsius), new (double?, double?)[] { (-20, 70), (-40, 85) }));
 }

@@ -44,7 +44,10 @@ public class TransistorTests
     public void The_300_MHz_class_keeps_the_registered_limits(string id)
     {
         TransistorPart part = Assert.Single(All, part => part.Id == id);
-        Assert.True(part is { TransitionFrequencyHz: >= 300e6, CmuFarads: <= 4.0001e-12, CjeFarads: <= 8.0001e-12, BetaMin: >= 70, BetaMax: <= 300 });
+        Assert.True(part is
+        {
+            TransitionFrequencyHz: >= 300e6, CmuFarads: <= 4.0001e-12, CjeFarads: <= 8.0001e-12, BetaMin: >= 70, BetaMax: <= 300,
+        });
         Assert.Equal(Basis.Minimum, part.BasisOf("transitionFrequency"));
     }
 

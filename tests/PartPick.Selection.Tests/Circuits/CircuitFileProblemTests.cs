@@ -29,7 +29,10 @@ public class CircuitFileProblemTests
         { "\"rf\": \"1M\"", "\"rf\": \"\"", "circuit.json: rf: " },
         { "\"rf\": \"1M\"", "\"rf\": 1e999", "circuit.json: rf: " },
         { "\"strays\": {", "\"strays\": { \"in\": 1,", "circuit.json: strays.in: is no key of the strays; fits" },
-        { "\"c1\": \"22 pF\", \"c2\": \"22 pF\", ", "\"c1\": \"22 pF\" \"c2\": \"22 pF\", ", "circuit.json, line 6, column 17: is not valid JSON" },
+        {
+            "\"c1\": \"22 pF\", \"c2\": \"22 pF\", ", "\"c1\": \"22 pF\" \"c2\": \"22 pF\", ",
+            "circuit.json, line 6, column 17: is not valid JSON"
+        },
     };
 
     [Theory]

@@ -48,7 +48,8 @@ public class CircuitFileReadTests
     [Fact]
     public void Buffered_inverter_has_gain_and_on_resistance()
     {
-        string json = CircuitTexts.GateWith("\"gm\": \"10 mS\", \"ro\": \"2k\", \"vt\": \"0.8 V\"", "\"gain\": 5000, \"ron\": 100, \"delay\": \"20 ns\"");
+        string json = CircuitTexts.GateWith(
+            "\"gm\": \"10 mS\", \"ro\": \"2k\", \"vt\": \"0.8 V\"", "\"gain\": 5000, \"ron\": 100, \"delay\": \"20 ns\"");
 
         var inverter = Assert.IsType<BufferedInverter>(((GateCircuit)CircuitTexts.Read(json).Circuit).Inverter);
 
@@ -58,7 +59,8 @@ public class CircuitFileReadTests
     [Fact]
     public void Port_may_state_its_swing()
     {
-        string json = CircuitTexts.GateWith("\"gate\"", "\"port\"").Replace("\"ro\": \"2k\"", "\"swing\": \"0.9 V\"", StringComparison.Ordinal);
+        string json = CircuitTexts.GateWith("\"gate\"", "\"port\"")
+            .Replace("\"ro\": \"2k\"", "\"swing\": \"0.9 V\"", StringComparison.Ordinal);
 
         Assert.Equal(0.9, ((OneStageInverter)((GateCircuit)CircuitTexts.Read(json).Circuit).Inverter).SwingVolts);
     }
@@ -84,7 +86,8 @@ public class CircuitFileReadTests
     [Fact]
     public void One_base_resistor_goes_from_base_to_supply()
     {
-        string json = CircuitTexts.Follower.Replace("\"rbTop\": \"47k\", \"rbBottom\": \"47k\"", "\"rb\": \"220k\"", StringComparison.Ordinal);
+        string json = CircuitTexts.Follower.Replace(
+            "\"rbTop\": \"47k\", \"rbBottom\": \"47k\"", "\"rb\": \"220k\"", StringComparison.Ordinal);
 
         var follower = (FollowerCircuit)CircuitTexts.Read(json).Circuit;
 

@@ -7,7 +7,8 @@ namespace PartPick.Selection.Tests.Circuits;
 
 public class CircuitFileRoundTripTests
 {
-    private static readonly Gen<double> Positive = Gen.Double[-15, 9].Select(Gen.Double[1, 10], (power, digits) => digits * Math.Pow(10, power));
+    private static readonly Gen<double> Positive =
+        Gen.Double[-15, 9].Select(Gen.Double[1, 10], (power, digits) => digits * Math.Pow(10, power));
 
     private static readonly Gen<Crystal> Crystals = Gen.Select(Positive, Positive.Nullable(), Positive, Positive, Positive)
         .Select((nominal, load, shunt, motional, resistance) => new Crystal

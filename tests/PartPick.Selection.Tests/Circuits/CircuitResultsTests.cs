@@ -19,7 +19,8 @@ public class CircuitResultsTests
     [Fact]
     public void Error_is_in_ppm_against_the_target_through_the_divider()
     {
-        CircuitDescription read = CircuitTexts.Read(CircuitTexts.GateWith("\"tap\": 0, \"target\": \"4 MHz\"", "\"tap\": 12, \"target\": 1000"));
+        CircuitDescription read = CircuitTexts.Read(
+            CircuitTexts.GateWith("\"tap\": 0, \"target\": \"4 MHz\"", "\"tap\": 12, \"target\": 1000"));
 
         JsonObject json = Json(read);
 

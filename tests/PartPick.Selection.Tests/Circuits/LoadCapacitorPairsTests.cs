@@ -9,12 +9,12 @@ public class LoadCapacitorPairsTests
     // ST AN2867, section 3.3: a load of 15 pF with 5 pF of stray beside the pair asks for 20 pF each.
     // NXP IMXRT500HDG, p. 19: 2·12.5 − 3 = 22 pF and 2·9 − 3 = 15 pF, with 3 pF at each pin.
     [Theory]
-    [InlineData(15e-12, 0, 5e-12, 20e-12)]
-    [InlineData(12.5e-12, 3e-12, 0, 22e-12)]
-    [InlineData(9e-12, 3e-12, 0, 15e-12)]
-    public void Published_pairs_are_found_first(double load, double pin, double across, double expected)
+    [InlineData(15e-12, 5e-12, 0, 20e-12)]
+    [InlineData(12.5e-12, 0, 3e-12, 22e-12)]
+    [InlineData(9e-12, 0, 3e-12, 15e-12)]
+    public void Published_pairs_are_found_first(double load, double stray, double pin, double expected)
     {
-        LoadPairRequest request = Request(load) with { PinStrayFarads = pin, AcrossFarads = across };
+        LoadPairRequest request = Request(load) with { StrayFarads = stray, PinStrayFarads = pin };
 
         LoadPair best = LoadCapacitorPairs.Find(request)[0];
 
@@ -31,7 +31,7 @@ public class LoadCapacitorPairsTests
     [InlineData(6e-12, "E12", true)]
     public void Nearest_pairs_are_the_same_as_trying_every_pair(double load, string series, bool parallel)
     {
-        LoadPairRequest request = Request(load, series) with { PinStrayFarads = 4e-12, AcrossFarads = 1e-12, Parallel = parallel, Top = 6 };
+        LoadPairRequest request = Request(load, series) with { PinStrayFarads = 4e-12, StrayFarads = 1e-12, Parallel = parallel, Top = 6 };
 
         double[] found = [.. LoadCapacitorPairs.Find(request).Select(pair => Math.Abs(pair.DeviationRatio))];
 
@@ -56,7 +56,10 @@ public class LoadCapacitorPairsTests
     [Fact]
     public void Frequency_comes_from_the_crystals_exact_formula()
     {
-        var crystal = new Crystal { NominalHz = 4e6, LoadFarads = 18e-12, ShuntFarads = 4e-12, MotionalFarads = 12e-15, ResistanceOhms = 50 };
+        var crystal = new Crystal
+        {
+            NominalHz = 4e6, LoadFarads = 18e-12, ShuntFarads = 4e-12, MotionalFarads = 12e-15, ResistanceOhms = 50,
+        };
 
         LoadPair pair = LoadCapacitorPairs.Find(Request(20e-12, "E6") with { PinStrayFarads = 7e-12, Crystal = crystal })
             .First(pair => pair is { IsEqual: true, C1.Farads: 33e-12 });
@@ -67,7 +70,7 @@ public class LoadCapacitorPairsTests
 
     [Fact]
     public void Strays_that_make_the_load_leave_no_pair() =>
-        Assert.Empty(LoadCapacitorPairs.Find(Request(5e-12) with { AcrossFarads = 5e-12 }));
+        Assert.Empty(LoadCapacitorPairs.Find(Request(5e-12) with { StrayFarads = 5e-12 }));
 
     private static LoadPairRequest Request(double load, string series = "E24") =>
         new() { LoadFarads = load, Series = PreferredSeries.Named(series).Value };
@@ -92,6 +95,6 @@ public class LoadCapacitorPairsTests
                where b >= a && b <= a * request.LargestRatio * (1 + 1e-9)
                let first = a + request.PinStrayFarads
                let second = b + request.PinStrayFarads
-               select Math.Abs((1 / (1 / first + 1 / second) + request.AcrossFarads) / request.LoadFarads - 1);
+               select Math.Abs((1 / (1 / first + 1 / second) + request.StrayFarads) / request.LoadFarads - 1);
     }
 }

@@ -12,7 +12,7 @@ internal sealed class EveryCombination
     public EveryCombination(Requirement requirement, PartsCatalog catalog)
     {
         _requirement = requirement;
-        var space = new SearchSpace(requirement, catalog);
+        var space = new SearchSpace(requirement, catalog, every: true);
         var builder = new CandidateBuilder(requirement, space.Market);
         foreach (CircuitFamily family in space.Families)
         {
@@ -50,9 +50,9 @@ internal sealed class EveryCombination
 
     private static IEnumerable<CandidateParts> Choices(SearchSpace space, CircuitFamily family, FamilyMember member) =>
         from option in Enumerable.Range(0, family.Options.Length)
-        from c1 in space.Capacitors.SelectMany(value => value.Parts)
-        from c2 in space.Capacitors.SelectMany(value => value.Parts)
-        select SearchRun.Choice(family, member, option, c1, c2);
+        from c1 in space.Capacitors.SelectMany(value => value.Contenders)
+        from c2 in space.Capacitors.SelectMany(value => value.Contenders)
+        select SearchRun.Choice(family, member, option, c1.Part, c2.Part);
 
     private static bool Dominates(Candidate one, Candidate other)
     {

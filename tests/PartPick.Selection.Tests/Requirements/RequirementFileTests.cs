@@ -21,7 +21,8 @@ public class RequirementFileTests
     {
         Requirement read = Read(Logger);
 
-        Assert.Equal(("river logger time base", 1000.0, Waveform.Square, 80e-6), (read.Name, read.OutputHz, read.Waveform, read.BudgetRatio));
+        Assert.Equal(
+            ("river logger time base", 1000.0, Waveform.Square, 80e-6), (read.Name, read.OutputHz, read.Waveform, read.BudgetRatio));
         Assert.Equal((4.5, 5.5, -10.0, 50.0),
             (read.SupplyMinVolts, read.SupplyMaxVolts, read.TemperatureMinCelsius, read.TemperatureMaxCelsius));
         Assert.Equal((5.0, 5.0, false, 50e-3, 200, 2.50m),

@@ -87,14 +87,20 @@ public class CircuitWarningsTests
         Assert.Contains(Of(CircuitTexts.Read(Fork("5 mS", "5k", "0"))),
             warning => warning.Contains("It does not start", StringComparison.Ordinal)
                 && warning.Contains("Rs = 270 kΩ would give it a start-up margin of 5", StringComparison.Ordinal));
-        Assert.DoesNotContain(Of(CircuitTexts.Read(Fork("5 mS", "5k", "330k"))), warning => warning.Contains("does not start", StringComparison.Ordinal));
+        Assert.DoesNotContain(
+            Of(CircuitTexts.Read(Fork("5 mS", "5k", "330k"))),
+            warning => warning.Contains("does not start", StringComparison.Ordinal));
     }
 
     [Fact]
     public void Unrated_tuning_fork_is_warned_of_above_a_microwatt()
     {
-        Assert.Contains(Of(CircuitTexts.Read(Fork("50 uS", "1M", "0"))), warning => warning.Contains("tuning fork", StringComparison.Ordinal));
-        Assert.DoesNotContain(Of(CircuitTexts.Read(Fork("5 mS", "5k", "100k"))), warning => warning.Contains("tuning fork", StringComparison.Ordinal));
+        Assert.Contains(
+            Of(CircuitTexts.Read(Fork("50 uS", "1M", "0"))),
+            warning => warning.Contains("tuning fork", StringComparison.Ordinal));
+        Assert.DoesNotContain(
+            Of(CircuitTexts.Read(Fork("5 mS", "5k", "100k"))),
+            warning => warning.Contains("tuning fork", StringComparison.Ordinal));
     }
 
     [Fact]
@@ -109,7 +115,9 @@ public class CircuitWarningsTests
         CircuitDescription counter = CounterAt12Volts(12e6);
 
         // Between 8 and 12 MHz at 10 and 15 V the guaranteed clock at 12 V is 9.6 MHz, and the typical one 19.2 MHz.
-        Assert.Contains(Of(counter), warning => warning.Contains("above the 9.6 MHz that CNT-14-BS guarantees at 12 V; only typical", StringComparison.Ordinal));
+        Assert.Contains(
+            Of(counter),
+            warning => warning.Contains("above the 9.6 MHz that CNT-14-BS guarantees at 12 V; only typical", StringComparison.Ordinal));
         Assert.DoesNotContain(Of(CounterAt12Volts(9e6)), warning => warning.Contains("guarantees", StringComparison.Ordinal));
     }
 
@@ -129,7 +137,9 @@ public class CircuitWarningsTests
         CrystalPart stated = crystal with { Basis = new Dictionary<string, Basis>() };
         CircuitDescription plain = CircuitTexts.Read(CircuitTexts.Gate);
 
-        Assert.Contains(Of(plain with { Crystal = crystal }), warning => warning.StartsWith($"Assumed, not stated, for {crystal.Id}: motional capacitance 12 fF", StringComparison.Ordinal));
+        Assert.Contains(
+            Of(plain with { Crystal = crystal }),
+            warning => warning.StartsWith($"Assumed, not stated, for {crystal.Id}: motional capacitance 12 fF", StringComparison.Ordinal));
         Assert.DoesNotContain(Of(plain with { Crystal = stated }), warning => warning.StartsWith("Assumed", StringComparison.Ordinal));
     }
 
@@ -156,8 +166,12 @@ public class CircuitWarningsTests
         OscillatorResult limited = result with { Steady = result.Steady! with { LimitedBySupply = true } };
         OscillatorResult free = result with { Steady = result.Steady! with { LimitedBySupply = false } };
 
-        Assert.Contains(CircuitWarnings.Of(read, limited), warning => warning.Contains("The supply of 5 V limits the amplitude", StringComparison.Ordinal));
-        Assert.DoesNotContain(CircuitWarnings.Of(read, free), warning => warning.Contains("limits the amplitude", StringComparison.Ordinal));
+        Assert.Contains(
+            CircuitWarnings.Of(read, limited),
+            warning => warning.Contains("The supply of 5 V limits the amplitude", StringComparison.Ordinal));
+        Assert.DoesNotContain(
+            CircuitWarnings.Of(read, free),
+            warning => warning.Contains("limits the amplitude", StringComparison.Ordinal));
     }
 
     // ST AN2867, Table 3.

@@ -97,15 +97,18 @@ public class CircuitTests
     {
         foreach (Candidate candidate in SampleRanking.All)
         {
-            Assert.All(Bars.Draw(LimitUses.Of(candidate, SampleRanking.Wanted), width, Glyphs.Ascii), line => Assert.True(line.Text.TrimEnd().Length <= width, line.Text));
-            Assert.All(CircuitPane.Below(candidate, SampleRanking.Wanted, width, Glyphs.Drawn), line => Assert.True(line.Text.TrimEnd().Length <= width, line.Text));
+            Assert.All(
+                Bars.Draw(LimitUses.Of(candidate, SampleRanking.Wanted), width, Glyphs.Ascii)
+                    .Concat(CircuitPane.Below(candidate, SampleRanking.Wanted, width, Glyphs.Drawn)),
+                line => Assert.True(line.Text.TrimEnd().Length <= width, line.Text));
         }
     }
 
     [Fact]
     public void The_reasons_name_the_nearest_limit_and_the_parts_of_the_score()
     {
-        ImmutableArray<string> reasons = Reasons.Of(SampleRanking.Counter, SampleRanking.Answer(SampleRanking.Wanted, SampleRanking.Counter));
+        ImmutableArray<string> reasons =
+            Reasons.Of(SampleRanking.Counter, SampleRanking.Answer(SampleRanking.Wanted, SampleRanking.Counter));
         Assert.Contains("nearest limit is the error", reasons[0], StringComparison.Ordinal);
         Assert.Contains("Score 1.900", reasons[1], StringComparison.Ordinal);
         Assert.Contains("No other fit circuit", reasons[2], StringComparison.Ordinal);

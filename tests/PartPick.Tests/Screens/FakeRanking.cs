@@ -6,7 +6,7 @@ namespace PartPick.Tests.Screens;
 /// <summary>Answers at once with what a test has laid ready, or when the test says so.</summary>
 internal sealed class FakeRanking : IRankingService
 {
-    private readonly List<(Requirement Requirement, IProgress<RankingResult> Progress, TaskCompletionSource<RankingResult> Answer, CancellationToken Cancellation)> _asked = [];
+    private readonly List<Question> _asked = [];
 
     public Func<Requirement, RankingResult> Answer { get; set; } =
         requirement => SampleRanking.Answer(requirement, [.. SampleRanking.All]);
@@ -22,7 +22,7 @@ internal sealed class FakeRanking : IRankingService
         Requirement requirement, IProgress<RankingResult> progress, CancellationToken cancellation)
     {
         var answer = new TaskCompletionSource<RankingResult>();
-        _asked.Add((requirement, progress, answer, cancellation));
+        _asked.Add(new Question(requirement, progress, answer, cancellation));
         return Holds ? answer.Task : Task.FromResult(Answer(requirement));
     }
 
@@ -36,4 +36,10 @@ internal sealed class FakeRanking : IRankingService
     }
 
     public void Report(int number, RankingResult result) => _asked[number].Progress.Report(result);
+
+    private sealed record Question(
+        Requirement Requirement,
+        IProgress<RankingResult> Progress,
+        TaskCompletionSource<RankingResult> Answer,
+        CancellationToken Cancellation);
 }

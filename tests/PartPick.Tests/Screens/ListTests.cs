@@ -8,7 +8,10 @@ public class ListTests
     public void Figures_stand_in_line_on_their_points()
     {
         CandidateColumns columns = CandidateColumns.Of(SampleRanking.All, SampleRanking.Wanted);
-        Assert.Single(columns.Rows.Select(row => row.FrequencyMegaHertz.PadRight(20).IndexOf('.', StringComparison.Ordinal)).Where(at => at >= 0).Distinct());
+        Assert.Single(columns.Rows
+            .Select(row => row.FrequencyMegaHertz.PadRight(20).IndexOf('.', StringComparison.Ordinal))
+            .Where(at => at >= 0)
+            .Distinct());
         Assert.Single(columns.Rows.Select(row => row.FrequencyMegaHertz.Length).Distinct());
         Assert.Single(columns.Rows.Select(row => row.Margin.IndexOf('.', StringComparison.Ordinal)).Distinct());
     }
@@ -46,7 +49,8 @@ public class ListTests
         var list = new CandidateList();
         list.Show(SampleRanking.Answer(SampleRanking.Wanted, SampleRanking.Counter, SampleRanking.Undamped));
         list.Move(1);
-        list.Show(SampleRanking.Answer(SampleRanking.Wanted, SampleRanking.Counter, SampleRanking.Port, SampleRanking.Undamped with { Id = "other" }));
+        list.Show(SampleRanking.Answer(
+            SampleRanking.Wanted, SampleRanking.Counter, SampleRanking.Port, SampleRanking.Undamped with { Id = "other" }));
         Assert.Equal(2, list.At);
     }
 

@@ -111,7 +111,8 @@ public class MainScreenTests
     {
         using var bench = new Bench(ranking: new FakeRanking { Holds = true });
         Assert.Contains("computing", bench.Text, StringComparison.Ordinal);
-        bench.Ranking.Report(0, SampleRanking.Answer(SampleRanking.Wanted, SampleRanking.Counter) with { IsComplete = false, Covered = 1_400_000 });
+        bench.Ranking.Report(
+            0, SampleRanking.Answer(SampleRanking.Wanted, SampleRanking.Counter) with { IsComplete = false, Covered = 1_400_000 });
         bench.Press(Key.CursorDown);
         Assert.Contains("computing 33 %, best so far", bench.Text, StringComparison.Ordinal);
         Assert.Contains("CNT-14-HC", bench.Text, StringComparison.Ordinal);
@@ -172,7 +173,9 @@ public class MainScreenTests
     public void At_120_columns_the_drawing_stands_beside_the_list()
     {
         using var bench = new Bench(120, 40);
-        Assert.Contains(bench.Rows, row => row.Contains("CNT-14-HC", StringComparison.Ordinal) && row.Contains('┤', StringComparison.Ordinal));
+        Assert.Contains(
+            bench.Rows,
+            row => row.Contains("CNT-14-HC", StringComparison.Ordinal) && row.Contains('┤', StringComparison.Ordinal));
         Assert.Contains("÷4096", bench.Text, StringComparison.Ordinal);
         bench.Resize(80, 24);
         Assert.DoesNotContain("÷4096 ", bench.Text, StringComparison.Ordinal);

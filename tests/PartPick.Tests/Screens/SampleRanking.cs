@@ -83,7 +83,8 @@ internal static class SampleRanking
         [
             new("C1", "load capacitor", choice.C1, Value(choice.C1)), new("C2", "load capacitor", choice.C2, Value(choice.C2)),
             new("C3", "decoupling", Capacitor("C-100n"), "100 nF"), .. resistors,
-            new("U1", "amplifier", amplifier, ""), new("Y1", "crystal", crystal, Values.ValueText.FormatExact(hertz, Values.Dimension.Frequency)),
+            new("U1", "amplifier", amplifier, ""),
+            new("Y1", "crystal", crystal, Values.ValueText.FormatExact(hertz, Values.Dimension.Frequency)),
         ]);
     }
 
@@ -129,11 +130,16 @@ internal static class SampleRanking
             [
                 new BudgetTerm("crystal tolerance", tolerance), new BudgetTerm("crystal over temperature", 1.1 * tolerance),
                 new BudgetTerm("ageing over 5 years", 7e-6), new BudgetTerm("C1 tolerance", 2.1e-6), new BudgetTerm("C2 tolerance", 1.4e-6),
-                new BudgetTerm("strays", 4.4e-6), new BudgetTerm("motional capacitance", 1.2e-6, "assumed"), new BudgetTerm("amplifier and supply", 0.6e-6, "typical"),
+                new BudgetTerm("strays", 4.4e-6), new BudgetTerm("motional capacitance", 1.2e-6, "assumed"),
+                new BudgetTerm("amplifier and supply", 0.6e-6, "typical"),
             ]),
             Margin = new AtCorner(result.StartUp.Margin * 0.7, "4.5 V, 50 °C, weakest device, capacitances high"),
-            Drive = result.Steady is { } state ? new AtCorner(state.DriveWatts * 1.3, "5.5 V, -10 °C, strongest device, capacitances low") : null,
-            StartUpTime = result.StartUpTimeSeconds is { } time ? new AtCorner(time * 1.6, "4.5 V, 50 °C, weakest device, capacitances high") : null,
+            Drive = result.Steady is { } state
+                ? new AtCorner(state.DriveWatts * 1.3, "5.5 V, -10 °C, strongest device, capacitances low")
+                : null,
+            StartUpTime = result.StartUpTimeSeconds is { } time
+                ? new AtCorner(time * 1.6, "4.5 V, 50 °C, weakest device, capacitances high")
+                : null,
             RatedDriveWatts = choice.Crystal.DriveLevelWatts,
             Cost = 0.83m,
             Currency = "EUR",

@@ -23,8 +23,13 @@ public class TerminalTests
     [InlineData("de_AT.UTF-8", null, "C", false)]
     [InlineData("C", null, null, false)]
     [InlineData(null, null, null, false)]
-    public void Signs_follow_the_first_locale_that_is_set(string? lang, string? type, string? all, bool expected) =>
-        Assert.Equal(expected, TerminalTraits.Of(name => name switch { "LANG" => lang, "LC_CTYPE" => type, "LC_ALL" => all, _ => null }).IsUtf8);
+    public void Signs_follow_the_first_locale_that_is_set(string? lang, string? type, string? all, bool expected)
+    {
+        TerminalTraits traits =
+            TerminalTraits.Of(name => name switch { "LANG" => lang, "LC_CTYPE" => type, "LC_ALL" => all, _ => null });
+
+        Assert.Equal(expected, traits.IsUtf8);
+    }
 
     [Fact]
     public void The_requirement_is_kept_and_recalled()

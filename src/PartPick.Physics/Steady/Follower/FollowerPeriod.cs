@@ -117,6 +117,18 @@ internal sealed partial class FollowerPeriod : ForcedState
         Solve(resistanceOhms, Math.Sqrt(tolerance), MeshSlack);
 
     /// <inheritdoc/>
+    public override bool StepTowardsRunning(double resistanceOhms)
+    {
+        bool stepped = _shooting.StepOnce(resistanceOhms);
+        if (stepped)
+        {
+            Note(resistanceOhms);
+        }
+
+        return stepped;
+    }
+
+    /// <inheritdoc/>
     public override double OutputSwingVolts() => _shooting.Now.Extremes().Swing * _units.Volts;
 
     private Complex LinearControl() =>

@@ -104,6 +104,20 @@ internal sealed class FollowerShooting
         return false;
     }
 
+    /// <summary>Makes one pass and takes the whole of one step; false where the pass did not come to its end.</summary>
+    /// <param name="resistanceOhms">Rm in ohms.</param>
+    public bool StepOnce(double resistanceOhms)
+    {
+        if (!_pass.Run(Now, Values, Math.Exp(Values[LogAmps])) || !_equations.Solve(_pass, Values, resistanceOhms))
+        {
+            return false;
+        }
+
+        Accept();
+        Take(1);
+        return true;
+    }
+
     /// <summary>Goes along the last derivatives to another amplitude.</summary>
     public void Foresee(double logAmps)
     {

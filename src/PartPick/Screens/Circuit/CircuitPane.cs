@@ -12,7 +12,7 @@ public static class CircuitPane
     {
         ArgumentNullException.ThrowIfNull(candidate);
         string stage = Trade.Stage(candidate.Choice.Tap);
-        return $"{Trade.Word(candidate.Choice.Circuit)} {candidate.Choice.Amplifier.Id}, {candidate.Choice.Crystal.Id}"
+        return $"{candidate.Choice.Circuit.Word()} {candidate.Choice.Amplifier.Id}, {candidate.Choice.Crystal.Id}"
             + (stage.Length == 0 ? "" : ", " + stage);
     }
 
@@ -22,7 +22,7 @@ public static class CircuitPane
     {
         ArgumentNullException.ThrowIfNull(candidate);
         string stage = Trade.Stage(candidate.Choice.Tap);
-        return $"{Trade.Word(candidate.Choice.Circuit)} {candidate.Choice.Amplifier.Id}" + (stage.Length == 0 ? "" : ", " + stage);
+        return $"{candidate.Choice.Circuit.Word()} {candidate.Choice.Amplifier.Id}" + (stage.Length == 0 ? "" : ", " + stage);
     }
 
     /// <summary>The pane below the list.</summary>

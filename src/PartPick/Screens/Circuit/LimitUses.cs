@@ -119,6 +119,8 @@ public static class LimitUses
     // The unit goes with the words, so that the numbers of all limits stand in one column.
     private static LimitUse Unlimited(LimitName name, string word, string value, string against, string because) => new()
     {
-        Name = name, Word = word, Figure = value.Split(' ')[0], Against = string.Join(' ', value.Split(' ').Skip(1)) + ", " + against, Because = because, Used = null,
+        Name = name, Word = word, Figure = value.Split(' ')[0],
+        Against = string.Join(' ', value.Split(' ').Skip(1)) + ", " + against,
+        Because = because, Used = null,
     };
 }

@@ -52,7 +52,9 @@ public static class Reasons
         double cost = candidate.Score - error - margin;
         return FormattableString.Invariant(
             $"Score {candidate.Score:F3}, lower is better: error {error:F3}, margin {margin:F3}, cost {cost:F3} (weights ") +
-            string.Join(", ", new[] { weights.Error, weights.Margin, weights.Cost }.Select(w => ValueText.Format(w, Dimension.Number))) + ").";
+            string.Join(
+                ", ",
+                new[] { weights.Error, weights.Margin, weights.Cost }.Select(w => ValueText.Format(w, Dimension.Number))) + ").";
     }
 
     private static string Percent(double share) => Figures.Fixed(share * 100, 0) + " %";

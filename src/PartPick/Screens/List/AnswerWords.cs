@@ -19,9 +19,10 @@ public static class AnswerWords
 
         if (running)
         {
+            double share = Math.Min(1, result.Covered / result.Combinations);
             string far = stale || !(result.Combinations > 0)
                 ? ""
-                : string.Create(CultureInfo.InvariantCulture, $" {Math.Floor(100 * Math.Min(1, result.Covered / result.Combinations)):F0} %");
+                : string.Create(CultureInfo.InvariantCulture, $" {Math.Floor(100 * share):F0} %");
             return "computing" + far + (stale ? "; the list is still the one before" : ", best so far");
         }
 

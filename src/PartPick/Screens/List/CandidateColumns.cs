@@ -31,7 +31,7 @@ public sealed class CandidateColumns
         string[] cost = Figures.LineUp([.. candidates.Select(c => Figures.Money(c.Cost))]);
         return new CandidateColumns([.. candidates.Select((c, i) => new CandidateCells
         {
-            Circuit = Trade.Word(c.Choice.Circuit),
+            Circuit = c.Choice.Circuit.Word(),
             FrequencyMegaHertz = frequency[i],
             LoadPicofarads = load[i],
             Amplifier = c.Choice.Amplifier.Id,

@@ -55,7 +55,9 @@ public sealed class CandidateList
         string currency = Chosen?.Currency ?? "";
         return new LineBuilder(glyphs).Add("  circuit  crystal MHz CL pF amplifier    ", Tone.Quiet)
             .Column(glyphs.IsAscii ? "div" : "÷", 5, Tone.Quiet, true)
-            .Add("  error ppm  margin    ", Tone.Quiet).Column(currency.Length > 3 ? "cost" : "cost " + currency, 8, Tone.Quiet, true).Build();
+            .Add("  error ppm  margin    ", Tone.Quiet)
+            .Column(currency.Length > 3 ? "cost" : "cost " + currency, 8, Tone.Quiet, true)
+            .Build();
     }
 
     /// <summary>The rows that fit a height, with the chosen one among them.</summary>

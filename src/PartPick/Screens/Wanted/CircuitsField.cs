@@ -19,7 +19,7 @@ public sealed class CircuitsField() : SentenceField("circuits")
         CircuitKind[] chosen = [.. Every.Where(kind => requirement.Circuits.Contains(kind))];
         return chosen.Length == Every.Length
             ? "any circuit"
-            : string.Join(" or ", chosen.Select(Trade.Word)) + (chosen.Length == 1 ? " alone" : "");
+            : string.Join(" or ", chosen.Select(kind => kind.Word())) + (chosen.Length == 1 ? " alone" : "");
     }
 
     /// <summary>Puts a circuit in or takes it out.</summary>
@@ -31,7 +31,7 @@ public sealed class CircuitsField() : SentenceField("circuits")
         ArgumentNullException.ThrowIfNull(requirement);
         foreach (CircuitKind kind in Every)
         {
-            if (Trade.Word(kind)[0] == char.ToLowerInvariant(letter))
+            if (kind.Word()[0] == char.ToLowerInvariant(letter))
             {
                 ImmutableArray<CircuitKind> circuits =
                     [.. Every.Where(other => requirement.Circuits.Contains(other) != (other == kind))];

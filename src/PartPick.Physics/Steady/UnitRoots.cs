@@ -1,0 +1,17 @@
+using System.Collections.Immutable;
+using System.Numerics;
+
+namespace PartPick.Physics.Steady;
+
+/// <summary>Tables of e^(−jπ k/N), k = 0 … N − 1, for sums over half a period.</summary>
+internal static class UnitRoots
+{
+    private const int Quantum = 16;
+    private const int MostQuanta = 28;
+    private static readonly ImmutableArray<Complex[]> Tables = [.. Enumerable.Range(1, MostQuanta).Select(quanta => Table(quanta * Quantum))];
+
+    /// <summary>The shortest table of at least so many points, or the longest there is. Not to be written to.</summary>
+    public static Complex[] Of(double points) => Tables[(int)Math.Clamp(Math.Ceiling(points / Quantum), 1, MostQuanta) - 1];
+
+    private static Complex[] Table(int points) => [.. Enumerable.Range(0, points).Select(k => Complex.FromPolarCoordinates(1, -Math.PI * k / points))];
+}

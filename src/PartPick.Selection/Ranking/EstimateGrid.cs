@@ -1,0 +1,210 @@
+using PartPick.Physics;
+using PartPick.Physics.Circuits;
+
+namespace PartPick.Selection.Search;
+
+/// <summary>
+/// Estimates of a family at every third value of C1, C2 and Rs, made when first asked for, and what they say of the values between:
+/// the load seen by the crystal, over that of the capacitors in series, is smooth along the logarithms of all three. A bias network
+/// has no such order, so a follower has a grid of its own for each.
+/// </summary>
+internal sealed class EstimateGrid
+{
+    private const int Step = 3;
+
+    // What is left between the nodes after interpolation: a share of the load, and a share of the range over the nodes round it.
+    private const double LoadSlack = 0.015;
+    private const double RangeSlack = 0.25;
+    private const double AmplifierShare = 0.8;
+    private readonly CircuitFamily _family;
+    private readonly CircuitTemplate _template;
+    private readonly OperatingPoint _nominal;
+    private readonly SearchSpace _space;
+    private readonly double[] _values;
+    private readonly double[] _options;
+    private readonly Dictionary<(int Option, int C1, int C2), Node> _nodes = [];
+    private RunningState? _last;
+
+    public EstimateGrid(SearchSpace space, CircuitFamily family)
+    {
+        _space = space;
+        _family = family;
+        _template = family.Members[0].Template;
+        _nominal = OperatingPoint.Nominal(space.Requirement);
+        _values = [.. space.Capacitors.Select(value => Math.Log(value.Farads))];
+        _options = family.IsGate ? Logarithms(family) : [];
+    }
+
+    /// <summary>Whether a combination of values is a node of the grid.</summary>
+    public bool IsNode(int option, int c1, int c2) => _nodes.ContainsKey((option, c1, c2));
+
+    /// <summary>The places of the nodes along the capacitors.</summary>
+    public IEnumerable<int> Values() => Places(_values.Length, Step);
+
+    /// <summary>The places of the nodes along the options.</summary>
+    public IEnumerable<int> Options() => Places(_family.Options.Length, _family.IsGate ? Step : 1);
+
+    /// <summary>The estimate of one combination of values; null where there is no steady state.</summary>
+    public Estimate? At(int option, int c1, int c2, double margin) => Find(option, c1, c2) is { Estimate: { } estimate }
+        ? estimate with { Margin = margin }
+        : null;
+
+    /// <summary>The bounds between which the load of a combination lies, from the nodes round it.</summary>
+    public LoadRange Range(int option, int c1, int c2)
+    {
+        double share = 0;
+        double least = double.PositiveInfinity;
+        double most = 0;
+        foreach ((Node? node, double weight) in Around(option, c1, c2))
+        {
+            if (node is null)
+            {
+                return LoadRange.Any;
+            }
+
+            share += weight * node.Share;
+            least = Math.Min(least, node.Share);
+            most = Math.Max(most, node.Share);
+        }
+
+        double load = StaticLoad(c1, c2);
+        double slack = LoadSlack * share + RangeSlack * (most - least);
+        return new LoadRange(load * Math.Max(0, share - slack), load * (share + slack));
+    }
+
+    /// <summary>The least shift of the frequency over amplifier and supply, as a ratio, from the nodes round a combination.</summary>
+    public double LeastAmplifierRatio(int option, int c1, int c2)
+    {
+        double least = double.PositiveInfinity;
+        foreach ((Node? node, _) in Around(option, c1, c2))
+        {
+            if (node is null)
+            {
+                return 0;
+            }
+
+            least = Math.Min(least, node.AmplifierRatio ??= FindAmplifierRatio(node.Estimate!));
+        }
+
+        return AmplifierShare * least;
+    }
+
+    // The nodes round a combination with their weights; null for one without a steady state.
+    private IEnumerable<(Node? Node, double Weight)> Around(int option, int c1, int c2)
+    {
+        (int, int, double) third = _family.IsGate ? Bracket(_options, option, Step) : (option, option, 0);
+        foreach ((int i, double byC1) in Ends(Bracket(_values, c1, Step)))
+        {
+            foreach ((int j, double byC2) in Ends(Bracket(_values, c2, Step)))
+            {
+                foreach ((int o, double byOption) in Ends(third))
+                {
+                    Node node = Find(o, i, j);
+                    yield return (node.Estimate is null ? null : node, byC1 * byC2 * byOption);
+                }
+            }
+        }
+    }
+
+    private static IEnumerable<int> Places(int count, int step)
+    {
+        for (int i = 0; i < count; i += step)
+        {
+            yield return i;
+        }
+
+        if (count > 0 && (count - 1) % step != 0)
+        {
+            yield return count - 1;
+        }
+    }
+
+    private static (int Low, int High, double Weight) Bracket(double[] along, int place, int step)
+    {
+        int low = place / step * step;
+        int high = low == place ? place : Math.Min(low + step, along.Length - 1);
+        return (low, high, high == low ? 0 : (along[place] - along[low]) / (along[high] - along[low]));
+    }
+
+    private static IEnumerable<(int Place, double Weight)> Ends((int Low, int High, double Weight) bracket)
+    {
+        yield return (bracket.Low, 1 - bracket.Weight);
+        if (bracket.High != bracket.Low)
+        {
+            yield return (bracket.High, bracket.Weight);
+        }
+    }
+
+    // A direct connection stands one step below the smallest resistor.
+    private static double[] Logarithms(CircuitFamily family)
+    {
+        double[] along = [.. family.Options.Select(option => Math.Log(option.Series?.ValueOhms ?? 1))];
+        if (along.Length > 2)
+        {
+            along[0] = 2 * along[1] - along[2];
+        }
+
+        return along;
+    }
+
+    private Node Find(int option, int c1, int c2)
+    {
+        if (!_nodes.TryGetValue((option, c1, c2), out Node? node))
+        {
+            CircuitValues values = _family.Options[option].With(_space.Capacitors[c1].Farads, _space.Capacitors[c2].Farads);
+            node = new Node();
+            if (OscillatorAnalysis.EstimateSteadyState(_template.At(values, _nominal), _last, out RunningState? state) is { } estimate && state is not null)
+            {
+                _last = state;
+                double load = _template.Crystal.Crystal.LoadAtFrequencyFarads(estimate.FrequencyHz);
+                node.Share = load / StaticLoad(c1, c2);
+                node.Estimate = new Estimate(option, c1, c2, 0, load, estimate, state.Slim());
+            }
+
+            _nodes.Add((option, c1, c2), node);
+        }
+
+        return node;
+    }
+
+    private double FindAmplifierRatio(Estimate estimate)
+    {
+        CircuitValues values = _family.Options[estimate.Option].With(_space.Capacitors[estimate.C1].Farads, _space.Capacitors[estimate.C2].Farads);
+        double most = 0;
+        foreach (OperatingPoint point in new[] { _template.AmplifierCorners[0], _template.AmplifierCorners[^1] })
+        {
+            if (OscillatorAnalysis.EstimateSteadyState(_template.At(values, point), estimate.State, out _) is { } there)
+            {
+                most = Math.Max(most, Math.Abs(there.FrequencyHz / estimate.Steady.FrequencyHz - 1));
+            }
+        }
+
+        return most;
+    }
+
+    // The capacitors with their strays in series, beside what stands across.
+    private double StaticLoad(int c1, int c2)
+    {
+        Strays strays = _space.Requirement.Board.Strays;
+        double a = _space.Capacitors[c1].Farads;
+        double b = _space.Capacitors[c2].Farads + strays.OutputFarads;
+        double across = strays.AcrossFarads;
+        if (_template.At(new CircuitValues(a, b), _nominal) is GateCircuit { Inverter: { } inverter })
+        {
+            a += strays.InputFarads + inverter.InputFarads;
+            b += inverter.OutputFarads / 2;
+            across += inverter.FeedbackFarads;
+        }
+
+        return a * b / (a + b) + across;
+    }
+
+    private sealed class Node
+    {
+        public Estimate? Estimate { get; set; }
+
+        public double Share { get; set; }
+
+        public double? AmplifierRatio { get; set; }
+    }
+}

@@ -1,0 +1,185 @@
+using PartPick.Physics;
+
+namespace PartPick.Selection.Search;
+
+/// <summary>
+/// The full analysis of one prospect, the cheapest figures first: after each it leaves out the choices of parts that break a limit
+/// or can enter neither the front nor the list.
+/// </summary>
+internal sealed class ProspectAnalysis
+{
+    // By how much the steady state at the fineness of the corners may differ from the converged one.
+    private const double BaseSlack = 1e-6;
+    private const double BaseDriveSlack = 0.01;
+    private readonly SearchRun _run;
+    private readonly CircuitFamily _family;
+    private readonly FamilyMember _member;
+    private readonly Estimate _estimate;
+    private readonly List<CapacitorPair> _pairs;
+    private readonly Misses _misses;
+    private readonly Requirement _requirement;
+    private readonly CircuitValues _values;
+    private readonly double _reach;
+    private readonly Dictionary<(double, double), CornerAnalysis> _corners = [];
+
+    public ProspectAnalysis(SearchRun run, CircuitFamily family, FamilyMember member, Prospect prospect, Misses misses)
+    {
+        _run = run;
+        _family = family;
+        _member = member;
+        _estimate = prospect.Estimate;
+        _pairs = prospect.Pairs;
+        _misses = misses;
+        _requirement = run.Space.Requirement;
+        _reach = BudgetBuilder.TemperatureReach(_requirement);
+        _values = family.Options[_estimate.Option].With(
+            run.Space.Capacitors[_estimate.C1].Farads, run.Space.Capacitors[_estimate.C2].Farads);
+    }
+
+    /// <summary>Analyses, and adds what is fit to the run.</summary>
+    public void Run()
+    {
+        // With a disturbance allowed a margin may take a full analysis at every corner, so it comes last.
+        if (!_requirement.AllowDisturbance && !Left(Margins))
+        {
+            return;
+        }
+
+        if (!Left(Stock))
+        {
+            return;
+        }
+
+        _run.Tally.CountAnalysed();
+        var analysis = new ValueAnalysis(_member.Template, _requirement, _values, _estimate.State);
+        if (analysis.Base is not { } nominal)
+        {
+            Reject(Limit.Error);
+        }
+        else if (nominal.DriveWatts * (1 - BaseDriveSlack) > _member.Crystal.DriveLevelWatts)
+        {
+            Reject(Limit.Drive);
+        }
+        else if (MayReach(nominal, analysis)
+            && Left(pair => Budget(pair, nominal, analysis, BaseSlack))
+            && Left(pair => Budget(pair, analysis.Steady, analysis, 0))
+            && Left(Margins))
+        {
+            _pairs.RemoveAll(pair => !Runs(pair, analysis));
+            Add();
+        }
+    }
+
+    // Ever more of the error budget, from what costs least to find.
+    private bool MayReach(RunningFigures nominal, ValueAnalysis analysis)
+    {
+        Board board = _requirement.Board;
+        LeastTerms terms = LeastTerms.OfValues(board, _family.IsGate, _member.Model.Crystal, _values, nominal.LoadFarads);
+        if (!Left(pair => MayReach(pair, nominal, terms, 0)))
+        {
+            return false;
+        }
+
+        (double C1, double C2, double Across) slopes = analysis.FirstOrderSlopesPerFarad;
+        if (double.IsFinite(slopes.C1 + slopes.C2 + slopes.Across))
+        {
+            terms = LeastTerms.OfSlopes(board, _family.IsGate, _values, slopes);
+        }
+
+        return Left(pair => MayReach(pair, nominal, terms, 0))
+            && Left(pair => MayReach(pair, nominal, terms, analysis.AmplifierRatio));
+    }
+
+    private bool Left(Predicate<CapacitorPair> stays)
+    {
+        _pairs.RemoveAll(pair => !stays(pair));
+        return _pairs.Count > 0;
+    }
+
+    private bool Stock(CapacitorPair pair) => Holds(
+        pair, BillOfParts.FirstShortage(_misses.Choice(_estimate, pair), _family.Support, _run.Space.Market) is null, Limit.Stock);
+
+    private bool Margins(CapacitorPair pair)
+    {
+        CornerAnalysis corners = Corners(pair);
+        pair.Margin = corners.Margin.Value;
+        return Holds(pair, corners.Starts, Limit.Start)
+            && Holds(pair, pair.Margin >= _requirement.Margin, Limit.Margin)
+            && MayEnter(pair);
+    }
+
+    private bool MayReach(CapacitorPair pair, RunningFigures nominal, in LeastTerms terms, double amplifierRatio)
+    {
+        double least = _member.TermsRatio
+            + Math.Max(0, Math.Abs(nominal.FrequencyHz / _member.TargetHz - 1) - BaseSlack)
+            + MemberSearch.AssumedShift(_member, nominal.FrequencyHz)
+            + terms.Ratio(pair.C1.Spread(_reach), pair.C2.Spread(_reach))
+            + amplifierRatio;
+        pair.ErrorRatio = Math.Max(pair.ErrorRatio, least);
+        return WithinBudget(pair) && MayEnter(pair);
+    }
+
+    private bool Budget(CapacitorPair pair, RunningFigures? steady, ValueAnalysis analysis, double slack)
+    {
+        if (steady is null)
+        {
+            return Holds(pair, false, Limit.Error);
+        }
+
+        CandidateParts choice = _misses.Choice(_estimate, pair);
+        pair.ErrorRatio = BudgetBuilder.Build(choice, _requirement, _member.Model, _member.Terms, analysis, steady).WorstRatio - slack;
+        return WithinBudget(pair) && MayEnter(pair);
+    }
+
+    private bool WithinBudget(CapacitorPair pair) => Holds(pair, pair.ErrorRatio <= _requirement.BudgetRatio, Limit.Error);
+
+    private bool Runs(CapacitorPair pair, ValueAnalysis analysis)
+    {
+        CornerAnalysis corners = Corners(pair);
+        return Holds(pair, corners.RunsWithin(analysis, _member.Crystal.DriveLevelWatts), Limit.Drive)
+            && Holds(
+                pair,
+                _requirement.StartUpTimeSeconds is not { } wanted || corners.StartUpTime(analysis)?.Value <= wanted,
+                Limit.StartUpTime);
+    }
+
+    private CornerAnalysis Corners(CapacitorPair pair)
+    {
+        (double, double) tolerances = (pair.C1.Tolerance, pair.C2.Tolerance);
+        if (!_corners.TryGetValue(tolerances, out CornerAnalysis? corners))
+        {
+            corners = new CornerAnalysis(_member.Template, _requirement, _values, pair.C1.Tolerance, pair.C2.Tolerance);
+            _corners.Add(tolerances, corners);
+        }
+
+        return corners;
+    }
+
+    private void Add()
+    {
+        foreach (CapacitorPair pair in _pairs)
+        {
+            _run.Add(_member, new FitPoint(pair.ErrorRatio, pair.Margin, pair.Cost, _misses.Choice(_estimate, pair)));
+        }
+    }
+
+    private bool MayEnter(CapacitorPair pair) => _run.MayEnter(_member, pair.ErrorRatio, pair.Margin, pair.Cost);
+
+    private bool Holds(CapacitorPair pair, bool holds, Limit limit)
+    {
+        if (!holds)
+        {
+            _misses.Reject(_estimate, pair, limit);
+        }
+
+        return holds;
+    }
+
+    private void Reject(Limit limit)
+    {
+        foreach (CapacitorPair pair in _pairs)
+        {
+            _misses.Reject(_estimate, pair, limit);
+        }
+    }
+}
