@@ -24,6 +24,7 @@ internal sealed class FollowerElements
     private const int B = 0;
     private const int I = 1;
     private const int E = 2;
+    private const double SmallestSpreading = 1e-9;
     private const int Order = 9;
     private const int Vectors = 5;
     private readonly double[] _capacitance = new double[9];
@@ -39,7 +40,7 @@ internal sealed class FollowerElements
         double unit = units.Ohms;
 
         // Without a spreading resistor I's charges and currents are B's, and I's own row says that both are one node.
-        _merged = units.Spreading == 0;
+        _merged = units.Spreading < SmallestSpreading;
         int inner = _merged ? B : I;
         double link = _merged ? 1 : 1 / units.Spreading;
         Add(_conductance, B, B, units.BaseLoad);
@@ -85,7 +86,7 @@ internal sealed class FollowerElements
     /// </summary>
     /// <param name="radians">Angular frequency in rad/s.</param>
     /// <param name="length">Length of the step in radians of the period.</param>
-    /// <param name="map">Receives the rows.</param>
+    /// <param name="map">Receives the rows; not numbers where the elements are too far apart to solve for.</param>
     public void Step(double radians, double length, Span<double> map)
     {
         Array.Clear(_work);
@@ -99,7 +100,8 @@ internal sealed class FollowerElements
 
         if (!GaussJordan.Reduce(_work, Order, Vectors))
         {
-            throw new InvalidOperationException("A follower without capacitance and conductance.");
+            map.Fill(double.NaN);
+            return;
         }
 
         map.Clear();
