@@ -8,6 +8,7 @@ namespace PartPick.Selection.Search;
 internal sealed class SearchRun
 {
     private readonly RankingOptions _options;
+    private readonly bool _leadersOnly;
     private readonly AnswerBuilder _answers;
     private readonly IProgress<RankingResult>? _progress;
     private readonly Stopwatch _watch = Stopwatch.StartNew();
@@ -15,8 +16,19 @@ internal sealed class SearchRun
     private double _nextReport = 0.1;
     private int _next;
 
-    public SearchRun(SearchSpace space, RankingOptions options, IProgress<RankingResult>? progress, CancellationToken cancellation)
+    /// <param name="space">What is searched.</param>
+    /// <param name="options">How much of the answer is wanted.</param>
+    /// <param name="progress">Takes a best-so-far now and then; may be null.</param>
+    /// <param name="cancellation">Ends the search.</param>
+    /// <param name="leadersOnly">Whether the front does not matter.</param>
+    public SearchRun(
+        SearchSpace space,
+        RankingOptions options,
+        IProgress<RankingResult>? progress,
+        CancellationToken cancellation,
+        bool leadersOnly = false)
     {
+        _leadersOnly = leadersOnly;
         Space = space;
         _options = options;
         _progress = progress;
@@ -62,7 +74,7 @@ internal sealed class SearchRun
 
     /// <summary>Whether figures no better than these could still change the answer.</summary>
     public bool MayEnter(FamilyMember member, double errorRatio, double margin, decimal cost) =>
-        _options.All || Leaders.MayLead(member, errorRatio, margin, cost) || !Front.Beats(errorRatio, margin, cost);
+        _options.All || Leaders.MayLead(member, errorRatio, margin, cost) || (!_leadersOnly && !Front.Beats(errorRatio, margin, cost));
 
     /// <summary>Adds a fit combination.</summary>
     public void Add(FamilyMember member, FitPoint point)
@@ -101,6 +113,13 @@ internal sealed class SearchRun
     /// <summary>Searches all families, the most promising first, on several threads.</summary>
     public RankingResult Run()
     {
+        Search();
+        return _answers.Build(complete: true, _watch.Elapsed.TotalSeconds);
+    }
+
+    /// <summary>Searches, and leaves what it finds in the leaders and the front.</summary>
+    public void Search()
+    {
         ImmutableArray<CircuitFamily> order =
         [
             .. Space.Families
@@ -126,7 +145,6 @@ internal sealed class SearchRun
         }
 
         Cancellation.ThrowIfCancellationRequested();
-        return _answers.Build(complete: true, _watch.Elapsed.TotalSeconds);
     }
 
     /// <summary>Reports a best-so-far now and then.</summary>

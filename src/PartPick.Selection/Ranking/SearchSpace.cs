@@ -53,6 +53,11 @@ internal sealed class SearchSpace
         }
     }
 
+    /// <summary>
+    /// Least sum of the spreads of a crystal alone, as a ratio, among those that the other limits leave; null where none is left.
+    /// </summary>
+    public double? LeastCrystalRatio { get; private set; }
+
     private IEnumerable<CircuitKind> Kinds() => Requirement.Circuits.Distinct().Order().Where(kind => Requirement.Waveform switch
     {
         Waveform.Sine => kind == CircuitKind.Follower,
@@ -158,6 +163,7 @@ internal sealed class SearchSpace
         double ratio = terms.Sum(term => term.Ratio);
         decimal cost = Market.UnitCost(crystal, 1) + Market.UnitCost(amplifier, 1)
             + Cost(support.Feedback) + Cost(support.Decoupling) + Cost(support.Coupling);
+        LeastCrystalRatio = Math.Min(ratio, LeastCrystalRatio ?? ratio);
         if (cost > Requirement.CostLimit)
         {
             return (null, Limit.Cost);
