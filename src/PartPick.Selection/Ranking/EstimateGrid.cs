@@ -16,17 +16,26 @@ internal sealed class EstimateGrid
     private const double LoadSlack = 0.015;
     private const double RangeSlack = 0.25;
     private const double AmplifierShare = 0.8;
+
+    // By how much a load outside the window must lie outside for its neighbours to be taken for outside.
+    private const double SideReserve = 1.06;
     private readonly CircuitFamily _family;
     private readonly CircuitTemplate _template;
     private readonly OperatingPoint _nominal;
     private readonly SearchSpace _space;
+    private readonly LoadRange _window;
+    private readonly Dictionary<(int Option, int C1, int C2), int> _sides = [];
     private readonly double[] _values;
     private readonly double[] _options;
     private readonly Dictionary<(int Option, int C1, int C2), Node> _nodes = [];
     private RunningState? _last;
 
-    public EstimateGrid(SearchSpace space, CircuitFamily family)
+    /// <param name="space">What is searched.</param>
+    /// <param name="family">The family.</param>
+    /// <param name="window">Loads at which some crystal of the family may be within the budget.</param>
+    public EstimateGrid(SearchSpace space, CircuitFamily family, LoadRange window)
     {
+        _window = window;
         _space = space;
         _family = family;
         _template = family.Members[0].Template;
@@ -35,14 +44,41 @@ internal sealed class EstimateGrid
         _options = family.IsGate ? Logarithms(family) : [];
     }
 
-    /// <summary>Whether a combination of values is a node of the grid.</summary>
-    public bool IsNode(int option, int c1, int c2) => _nodes.ContainsKey((option, c1, c2));
+    /// <summary>Whether a combination of values has been estimated.</summary>
+    public bool IsEstimated(int option, int c1, int c2) => _nodes.ContainsKey((option, c1, c2));
 
     /// <summary>The places of the nodes along the capacitors.</summary>
     public IEnumerable<int> Values() => Places(_values.Length, Step);
 
     /// <summary>The places of the nodes along the options.</summary>
     public IEnumerable<int> Options() => Places(_family.Options.Length, _family.IsGate ? Step : 1);
+
+    /// <summary>
+    /// Whether the load of a node is known to be outside the window, from its neighbours: the load grows with C1 and with C2. Nodes
+    /// are asked for with C1 rising and C2 falling.
+    /// </summary>
+    public bool IsOutside(int option, int c1, int c2)
+    {
+        int side = Side(option, Before(c1), c2) > 0 ? 1
+            : Side(option, c1, After(c2)) < 0 ? -1
+            : 0;
+        if (side != 0)
+        {
+            _sides[(option, c1, c2)] = side;
+        }
+
+        return side != 0;
+    }
+
+    /// <summary>Whether the load of any combination is outside the window, from the nodes round it.</summary>
+    public bool LiesOutside(int option, int c1, int c2)
+    {
+        (int lowC1, int highC1, _) = Bracket(_values, c1, Step);
+        (int lowC2, int highC2, _) = Bracket(_values, c2, Step);
+        (int low, int high, _) = _family.IsGate ? Bracket(_options, option, Step) : (option, option, 0);
+        return (Side(low, lowC1, lowC2) > 0 && Side(high, lowC1, lowC2) > 0)
+            || (Side(low, highC1, highC2) < 0 && Side(high, highC1, highC2) < 0);
+    }
 
     /// <summary>The estimate of one combination of values; null where there is no steady state.</summary>
     public Estimate? At(int option, int c1, int c2, double margin) => Find(option, c1, c2) is { Estimate: { } estimate }
@@ -106,6 +142,12 @@ internal sealed class EstimateGrid
         }
     }
 
+    private int Side(int option, int c1, int c2) => _sides.GetValueOrDefault((option, c1, c2));
+
+    private static int Before(int place) => (place - 1) / Step * Step - (place == 0 ? Step : 0);
+
+    private int After(int place) => Math.Min(place + Step, _values.Length - 1) is var next && next > place ? next : int.MaxValue;
+
     private static IEnumerable<int> Places(int count, int step)
     {
         for (int i = 0; i < count; i += step)
@@ -163,6 +205,10 @@ internal sealed class EstimateGrid
             }
 
             _nodes.Add((option, c1, c2), node);
+            if (node.Estimate is { LoadFarads: var farads })
+            {
+                _sides[(option, c1, c2)] = farads > _window.Highest * SideReserve ? 1 : farads < _window.Lowest / SideReserve ? -1 : 0;
+            }
         }
 
         return node;

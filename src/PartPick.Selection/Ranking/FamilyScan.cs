@@ -33,7 +33,7 @@ internal sealed class FamilyScan
         _family = family;
         _template = family.Members[0].Template;
         _requirement = _space.Requirement;
-        _grid = new EstimateGrid(_space, family);
+        _grid = new EstimateGrid(_space, family, Window());
         _wanted = _requirement.AllowDisturbance ? double.NegativeInfinity : _requirement.Margin * MarginSlack;
         _screenHz = family.Members[0].Crystal.FrequencyHz;
     }
@@ -56,12 +56,12 @@ internal sealed class FamilyScan
         var found = new List<Estimate>();
         foreach (int i in _grid.Values())
         {
-            foreach (int j in _grid.Values())
+            foreach (int j in _grid.Values().Reverse())
             {
                 _run.Cancellation.ThrowIfCancellationRequested();
                 foreach (int option in _grid.Options())
                 {
-                    if (Screen(option, i, j) >= _wanted * ScreenSlack && WorstMargin(option, i, j) is var margin && margin >= _wanted
+                    if (!_grid.IsOutside(option, i, j) && Screen(option, i, j) >= _wanted * ScreenSlack && WorstMargin(option, i, j) is var margin && margin >= _wanted
                         && _grid.At(option, i, j, margin) is { } estimate)
                     {
                         found.Add(estimate);
@@ -111,8 +111,14 @@ internal sealed class FamilyScan
             }
 
             before = screened;
-            if (_grid.IsNode(option, i, j))
+            if (_grid.IsEstimated(option, i, j))
             {
+                continue;
+            }
+
+            if (_grid.LiesOutside(option, i, j))
+            {
+                ErrorRejections += weight;
                 continue;
             }
 
@@ -185,6 +191,25 @@ internal sealed class FamilyScan
         }
 
         return false;
+    }
+
+    // Loads at which some crystal of the family is within the budget.
+    private LoadRange Window()
+    {
+        double lowest = double.PositiveInfinity;
+        double highest = 0;
+        foreach (FamilyMember member in _family.Members)
+        {
+            double room = _requirement.BudgetRatio - member.TermsRatio;
+            lowest = Math.Min(lowest, Load(member, member.TargetHz * (1 + room)));
+            highest = Math.Max(highest, Load(member, member.TargetHz * (1 - room)));
+        }
+
+        return new LoadRange(lowest, highest);
+
+        static double Load(FamilyMember member, double hertz) => hertz <= member.Model.Crystal.SeriesHz
+            ? double.PositiveInfinity
+            : Math.Max(0, member.Model.Crystal.LoadAtFrequencyFarads(hertz));
     }
 
     // Crystals of one family differ in rated load, and so in the frequency that a load gives.
