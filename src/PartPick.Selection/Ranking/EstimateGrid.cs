@@ -81,9 +81,7 @@ internal sealed class EstimateGrid
     }
 
     /// <summary>The estimate of one combination of values; null where there is no steady state.</summary>
-    public Estimate? At(int option, int c1, int c2, double margin) => Find(option, c1, c2) is { Estimate: { } estimate }
-        ? estimate with { Margin = margin }
-        : null;
+    public Estimate? At(int option, int c1, int c2) => Find(option, c1, c2).Estimate;
 
     /// <summary>The bounds between which the load of a combination lies, from the nodes round it.</summary>
     public LoadRange Range(int option, int c1, int c2)
@@ -119,7 +117,7 @@ internal sealed class EstimateGrid
                 return 0;
             }
 
-            least = Math.Min(least, node.AmplifierRatio ??= FindAmplifierRatio(node.Estimate!));
+            least = Math.Min(least, node.AmplifierRatio ??= FindAmplifierRatio(node));
         }
 
         return AmplifierShare * least;
@@ -194,14 +192,14 @@ internal sealed class EstimateGrid
         if (!_nodes.TryGetValue((option, c1, c2), out Node? node))
         {
             CircuitValues values = _family.Options[option].With(_space.Capacitors[c1].Farads, _space.Capacitors[c2].Farads);
-            node = new Node();
+            node = new Node(values);
             RunningState? near = Near(option, c1, c2) ?? _last;
             if (OscillatorAnalysis.EstimateSteadyState(_template.At(values, _nominal), near, out RunningState? state) is { } estimate && state is not null)
             {
                 _last = state;
                 double load = _template.Crystal.Crystal.LoadAtFrequencyFarads(estimate.FrequencyHz);
                 node.Share = load / StaticLoad(c1, c2);
-                node.Estimate = new Estimate(option, c1, c2, 0, load, estimate, state.Slim());
+                node.Estimate = new Estimate(load, estimate.DriveWatts, state.Slim());
             }
 
             _nodes.Add((option, c1, c2), node);
@@ -226,15 +224,16 @@ internal sealed class EstimateGrid
             _nodes.TryGetValue((atOption, atC1, atC2), out Node? node) ? node.Estimate?.State : null;
     }
 
-    private double FindAmplifierRatio(Estimate estimate)
+    private double FindAmplifierRatio(Node node)
     {
-        CircuitValues values = _family.Options[estimate.Option].With(_space.Capacitors[estimate.C1].Farads, _space.Capacitors[estimate.C2].Farads);
+        Estimate estimate = node.Estimate!;
+        double hertz = _template.Crystal.Crystal.FrequencyAtLoadHz(estimate.LoadFarads);
         double most = 0;
         foreach (OperatingPoint point in new[] { _template.AmplifierCorners[0], _template.AmplifierCorners[^1] })
         {
-            if (OscillatorAnalysis.EstimateSteadyState(_template.At(values, point), estimate.State, out _) is { } there)
+            if (OscillatorAnalysis.EstimateSteadyState(_template.At(node.Values, point), estimate.State, out _) is { } there)
             {
-                most = Math.Max(most, Math.Abs(there.FrequencyHz / estimate.Steady.FrequencyHz - 1));
+                most = Math.Max(most, Math.Abs(there.FrequencyHz / hertz - 1));
             }
         }
 
@@ -258,8 +257,10 @@ internal sealed class EstimateGrid
         return a * b / (a + b) + across;
     }
 
-    private sealed class Node
+    private sealed class Node(CircuitValues values)
     {
+        public CircuitValues Values => values;
+
         public Estimate? Estimate { get; set; }
 
         public double Share { get; set; }
