@@ -31,9 +31,7 @@ internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits
         using var screen = new MainScreen(model, palette);
         using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, Leave);
         using PosixSignalRegistration interrupt = PosixSignalRegistration.Create(PosixSignal.SIGINT, Leave);
-
-        // After a hang-up there is no terminal to give back: keep the requirement, and let the process end.
-        using PosixSignalRegistration hangUp = PosixSignalRegistration.Create(PosixSignal.SIGHUP, _ => keep(model.Wanted.Accepted));
+        using PosixSignalRegistration hangUp = PosixSignalRegistration.Create(PosixSignal.SIGHUP, HangUp);
         app.Run(screen);
         return model.Wanted.Accepted;
 
@@ -41,6 +39,29 @@ internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits
         {
             context.Cancel = true;
             Post(app, app.RequestStop);
+        }
+
+        // After a real hang-up there is no terminal to give back: keep the requirement, and let the process end.
+        void HangUp(PosixSignalContext context)
+        {
+            keep(model.Wanted.Accepted);
+            if (HasTerminal())
+            {
+                Leave(context);
+            }
+        }
+    }
+
+    private static bool HasTerminal()
+    {
+        try
+        {
+            using FileStream terminal = File.OpenWrite("/dev/tty");
+            return true;
+        }
+        catch (Exception error) when (error is IOException or UnauthorizedAccessException)
+        {
+            return false;
         }
     }
 
