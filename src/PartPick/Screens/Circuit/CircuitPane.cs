@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using PartPick.Catalog;
 using PartPick.Selection;
 
 namespace PartPick.Screens;
@@ -47,15 +48,15 @@ public static class CircuitPane
     [
         .. Schematic.Draw(candidate, glyphs),
         new LineBuilder(glyphs).Add(" Y1 is ", Tone.Quiet).Column(candidate.Choice.Crystal.Id, width - 7, Tone.Quiet).Build(),
-        .. Bars.Draw(LimitUses.Of(candidate, requirement), width, glyphs),
+        .. Bars.DrawTall(LimitUses.Of(candidate, requirement), width, glyphs),
         .. Watched(candidate, glyphs).SelectMany(text => Paragraph.Of(text, width, glyphs, " ! ", 3, Tone.Warning)),
     ];
 
-    // One line: a label stays whole, and what does not fit is marked.
+    // Capacitors and resistors on one line: a label stays whole, and what does not fit is marked.
     private static Line Values(Candidate candidate, int width, Glyphs glyphs)
     {
         string[] labels =
-            [.. candidate.Parts.Where(use => use.Value.Length > 0).Select(use => glyphs.Show(CircuitParts.Label(use)))];
+            [.. candidate.Parts.Where(use => use.Part is CapacitorPart or ResistorPart).Select(use => glyphs.Show(CircuitParts.Label(use)))];
         LineBuilder line = new(glyphs);
         for (int i = 0; i < labels.Length; i++)
         {

@@ -117,10 +117,9 @@ public static class LimitUses
     };
 
     // The unit goes with the words, so that the numbers of all limits stand in one column.
-    private static LimitUse Unlimited(LimitName name, string word, string value, string against, string because) => new()
+    private static LimitUse Unlimited(LimitName name, string word, string value, string unlimited, string because) => new()
     {
         Name = name, Word = word, Figure = value.Split(' ')[0],
-        Against = string.Join(' ', value.Split(' ').Skip(1)) + ", " + against,
-        Because = because, Used = null,
+        Against = string.Join(' ', value.Split(' ').Skip(1)), Unlimited = unlimited, Because = because, Used = null,
     };
 }

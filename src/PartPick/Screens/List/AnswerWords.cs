@@ -39,6 +39,11 @@ public static class AnswerWords
 
     private static string MostRemoved(RankingResult result)
     {
+        if (!(result.Combinations > 0))
+        {
+            return "nothing fits; no crystal gives this frequency";
+        }
+
         if (result.Rejections.IsEmpty)
         {
             return $"nothing fits, of {Figures.Count(result.Combinations)} combinations";

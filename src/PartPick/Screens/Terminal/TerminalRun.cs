@@ -9,7 +9,8 @@ namespace PartPick.Screens;
 /// <param name="ranking">What ranks.</param>
 /// <param name="traits">What the terminal can show.</param>
 /// <param name="keep">Keeps a requirement; called from any thread.</param>
-internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits, Action<Requirement> keep)
+/// <param name="currency">The currency of the costs; empty where it is not known.</param>
+internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits, Action<Requirement> keep, string currency)
 {
     private const string MouseReportsOff = "\x1b[?1003l\x1b[?1015l\x1b[?1006l";
 
@@ -26,7 +27,7 @@ internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits
         using IApplication app = Application.Create().Init(DriverRegistry.Names.ANSI);
         app.Driver!.WriteRaw(MouseReportsOff);
         using var live = new LiveRanking(ranking, action => Post(app, action), TimeProvider.System);
-        var model = new MainModel(start, live, glyphs, notice);
+        var model = new MainModel(start, live, glyphs, notice, currency);
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
         using var screen = new MainScreen(model, palette);
         using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, Leave);

@@ -20,22 +20,22 @@ public enum SentenceAnswer
 /// <summary>The wanted sentence: moving through its values and changing them in place.</summary>
 public sealed class SentenceModel
 {
-    private const int LongestText = 60;
-
     private readonly ImmutableArray<SentencePiece> _pieces;
     private readonly ImmutableArray<SentenceField> _fields;
     private readonly Glyphs _glyphs;
+    private TypedText? _typed;
     private int _width = 80;
 
     /// <summary>Makes the sentence of a requirement.</summary>
     /// <param name="requirement">The requirement.</param>
     /// <param name="glyphs">The signs.</param>
-    public SentenceModel(Requirement requirement, Glyphs glyphs)
+    /// <param name="currency">The currency of the cost limit; empty where it is not known.</param>
+    public SentenceModel(Requirement requirement, Glyphs glyphs, string currency = "")
     {
         Accepted = requirement;
         Current = requirement;
         _glyphs = glyphs;
-        _pieces = Sentence.Pieces(requirement);
+        _pieces = Sentence.Pieces(requirement, currency);
         _fields = [.. _pieces.Select(piece => piece.Field).OfType<SentenceField>()];
         At = 1;
     }
@@ -59,10 +59,10 @@ public sealed class SentenceModel
     public int Count => _fields.Length;
 
     /// <summary>What is being typed; null while nothing is.</summary>
-    public string? Typed { get; private set; }
+    public string? Typed => _typed?.Text;
 
     /// <summary>Where the next letter goes in <see cref="Typed"/>.</summary>
-    public int Caret { get; private set; }
+    public int Caret => _typed?.Caret ?? 0;
 
     /// <summary>What is wrong with what was typed; null where nothing is known to be.</summary>
     public Problem? Problem { get; private set; }
@@ -71,24 +71,40 @@ public sealed class SentenceModel
     /// <param name="key">The key.</param>
     public SentenceAnswer Press(KeyPress key)
     {
+        if (_typed is { } typed)
+        {
+            return Type(typed, key);
+        }
+
         Problem = null;
-        return Typed is null ? Move(key) : Type(key);
+        return Move(key);
     }
 
     /// <summary>Leaves what is being typed as it was before.</summary>
     public void Drop()
     {
-        Typed = null;
+        _typed = null;
+        Problem = null;
         Become(Accepted, false);
     }
 
     /// <summary>The sentence on the screen.</summary>
     /// <param name="width">Width in cells.</param>
     /// <param name="chosen">Whether the keys go to the sentence.</param>
-    public ImmutableArray<Line> Draw(int width, bool chosen)
+    /// <param name="rows">The most rows it may take: those about the chosen value are shown, or the first ones.</param>
+    public ImmutableArray<Line> Draw(int width, bool chosen, int rows = int.MaxValue)
     {
         _width = width;
-        return Layout(chosen).Lines;
+        SentenceLayout layout = Layout(chosen);
+        if (layout.Lines.Length <= rows)
+        {
+            return layout.Lines;
+        }
+
+        int top = chosen ? Math.Clamp(layout.Places[At].Row - rows / 2, 0, layout.Lines.Length - rows) : 0;
+        ImmutableArray<Line> shown = layout.Lines.Slice(top, rows);
+        return top + rows == layout.Lines.Length ? shown
+            : shown.SetItem(rows - 1, new LineBuilder(_glyphs).Add(shown[^1], width - _glyphs.Show(" …").Length).Add(" …").Build());
     }
 
     private SentenceAnswer Move(KeyPress key)
@@ -137,26 +153,14 @@ public sealed class SentenceModel
 
     private SentenceAnswer Change(KeyPress key)
     {
-        bool next = key.Name == KeyName.Enter || key is { Name: KeyName.Letter, Letter: ' ' };
-        switch (Field)
+        if (Field.Begin(Accepted, key) is { } text)
         {
-            case TypedField typed:
-                return Begin(typed, key);
-            case ChoiceField choice:
-                return Choose(next ? choice.Next(Accepted) : key.Name == KeyName.Letter ? choice.Pick(Accepted, key.Letter) : null);
-            case CircuitsField:
-                return Choose(
-                    next ? CircuitsField.Next(Accepted)
-                    : key.Name == KeyName.Letter ? CircuitsField.Toggle(Accepted, key.Letter)
-                    : null);
-            default:
-                return SentenceAnswer.NotMine;
+            _typed = new TypedText(text);
+            Preview();
+            return SentenceAnswer.Done;
         }
-    }
 
-    private SentenceAnswer Choose(Requirement? requirement)
-    {
-        if (requirement is null)
+        if (Field.Change(Accepted, key) is not { } requirement)
         {
             return SentenceAnswer.NotMine;
         }
@@ -171,32 +175,8 @@ public sealed class SentenceModel
         return SentenceAnswer.Done;
     }
 
-    private SentenceAnswer Begin(TypedField field, KeyPress key)
+    private SentenceAnswer Type(TypedText typed, KeyPress key)
     {
-        string text = field.EditText(Accepted);
-        string? begun = key.Name switch
-        {
-            KeyName.Enter => text,
-            KeyName.Backspace => text.Length > 0 ? text[..^1] : text,
-            KeyName.Delete => "",
-            KeyName.Letter when key.Letter == ' ' => text,
-            KeyName.Letter when field.BeginsWith(key.Letter) => key.Letter.ToString(),
-            _ => null,
-        };
-        if (begun is null)
-        {
-            return SentenceAnswer.NotMine;
-        }
-
-        Typed = begun;
-        Caret = begun.Length;
-        Preview();
-        return SentenceAnswer.Done;
-    }
-
-    private SentenceAnswer Type(KeyPress key)
-    {
-        string typed = Typed!;
         switch (key.Name)
         {
             case KeyName.Escape:
@@ -207,30 +187,11 @@ public sealed class SentenceModel
                 return SentenceAnswer.Done;
             case KeyName.Tab or KeyName.BackTab or KeyName.Up or KeyName.Down:
                 return Keep() ? Move(key) : SentenceAnswer.Done;
-            case KeyName.Left:
-                Caret = Math.Max(0, Caret - 1);
-                break;
-            case KeyName.Right:
-                Caret = Math.Min(typed.Length, Caret + 1);
-                break;
-            case KeyName.Home:
-                Caret = 0;
-                break;
-            case KeyName.End:
-                Caret = typed.Length;
-                break;
-            case KeyName.Backspace when Caret > 0:
-                Typed = typed.Remove(--Caret, 1);
-                Preview();
-                break;
-            case KeyName.Delete when Caret < typed.Length:
-                Typed = typed.Remove(Caret, 1);
-                Preview();
-                break;
-            case KeyName.Letter when !char.IsControl(key.Letter) && typed.Length < LongestText:
-                Typed = typed.Insert(Caret++, key.Letter.ToString());
-                Preview();
-                break;
+        }
+
+        if (typed.Press(key))
+        {
+            Preview();
         }
 
         return SentenceAnswer.Done;
@@ -245,15 +206,18 @@ public sealed class SentenceModel
             return false;
         }
 
-        Typed = null;
+        _typed = null;
+        Problem = null;
         Accepted = taken.Value;
         Become(taken.Value, false);
         return true;
     }
 
+    // What was refused stays named until the text fits.
     private void Preview()
     {
         Result<Requirement> taken = ((TypedField)Field).Take(Accepted, Typed!);
+        Problem = Problem is null || taken.IsOk ? null : taken.Problem;
         Become(taken.ValueOr(Accepted), true);
     }
 
@@ -267,33 +231,5 @@ public sealed class SentenceModel
         }
     }
 
-    private SentenceLayout Layout(bool chosen)
-    {
-        var texts = new List<SentenceText>();
-        int number = 0;
-        foreach (SentencePiece piece in _pieces)
-        {
-            if (piece.Field is null)
-            {
-                texts.Add(new SentenceText(_glyphs.Show(piece.Words), Tone.Normal, -1));
-                continue;
-            }
-
-            bool here = chosen && number == At;
-            if (here && Typed is not null)
-            {
-                texts.Add(new SentenceText(_glyphs.Show(Typed[..Caret]), Tone.Accent, number));
-                texts.Add(new SentenceText(_glyphs.Show(Caret < Typed.Length ? Typed[Caret..(Caret + 1)] : " "), Tone.Caret, number));
-                texts.Add(new SentenceText(_glyphs.Show(Caret < Typed.Length ? Typed[(Caret + 1)..] : ""), Tone.Accent, number));
-            }
-            else
-            {
-                texts.Add(new SentenceText(_glyphs.Show(piece.Field.Show(Accepted)), here ? Tone.Chosen : Tone.Strong, number));
-            }
-
-            number++;
-        }
-
-        return SentenceLayout.Of(texts, _width, 2);
-    }
+    private SentenceLayout Layout(bool chosen) => SentenceDrawing.Of(this, _pieces, _width, chosen, _glyphs);
 }
