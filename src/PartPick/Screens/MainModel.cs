@@ -3,19 +3,6 @@ using PartPick.Selection;
 
 namespace PartPick.Screens;
 
-/// <summary>Where the keys go.</summary>
-public enum Place
-{
-    /// <summary>The ranked list.</summary>
-    List,
-
-    /// <summary>The wanted sentence.</summary>
-    Sentence,
-
-    /// <summary>The page of one circuit.</summary>
-    Circuit,
-}
-
 /// <summary>The screen: sentence, list and circuit, and what the keys do. Knows nothing of the terminal.</summary>
 public sealed class MainModel
 {
@@ -25,7 +12,7 @@ public sealed class MainModel
     private readonly LiveRanking _ranking;
     private readonly Glyphs _glyphs;
     private readonly bool _waits;
-    private Candidate? _read;
+    private readonly Reading _reading;
 
     /// <summary>Makes the screen of a requirement and starts ranking.</summary>
     /// <param name="requirement">The requirement.</param>
@@ -42,6 +29,7 @@ public sealed class MainModel
         _glyphs = glyphs;
         Notice = notice;
         _waits = waits;
+        _reading = new Reading(List);
         Wanted = new SentenceModel(requirement, glyphs, currency);
         Wanted.Changed += Rank;
         _ranking.Answered += Take;
@@ -70,7 +58,7 @@ public sealed class MainModel
     public string? Notice { get; private set; }
 
     /// <summary>Whether a circuit is open, though its page may be away while the sentence is edited.</summary>
-    public bool IsReading => _read is not null;
+    public bool IsReading => _reading.IsOpen;
 
     /// <summary>Whether the list answers an older requirement.</summary>
     public bool IsStale { get; private set; }
@@ -151,12 +139,12 @@ public sealed class MainModel
         switch (key.Name)
         {
             case KeyName.Escape or KeyName.Enter or KeyName.Backspace:
-                _read = null;
+                _reading.Close();
                 Place = Place.List;
                 break;
             case KeyName.Left or KeyName.Right:
                 List.Move(key.Name == KeyName.Left ? -1 : 1);
-                Read();
+                _reading.Open();
                 break;
             default:
                 PressAnywhere(key);
@@ -164,28 +152,19 @@ public sealed class MainModel
         }
     }
 
-    // The circuit that is being read stays, whatever better ones are found meanwhile.
-    private void Read()
-    {
-        List.Hold();
-        _read = List.Chosen;
-    }
-
     private void LeaveSentence()
     {
-        Place = _read is not null && IsThere(_read) ? Place.Circuit : Place.List;
-        if (_read is not null && Place == Place.List)
-        {
-            SayGone();
-        }
+        Place = _reading.IsThere ? Place.Circuit : Place.List;
+        SayWhereItIsGone();
     }
 
-    private bool IsThere(Candidate read) => List.Chosen is { } chosen && CandidateList.SameGroup(chosen, read);
-
-    private void SayGone()
+    private void SayWhereItIsGone()
     {
-        Notice = $"{CircuitPane.ShortTitle(_read!)} is not in the list any more.";
-        _read = null;
+        if (_reading is { IsOpen: true, IsThere: false })
+        {
+            Notice = $"{_reading.Name} is not in the list any more.";
+            _reading.Close();
+        }
     }
 
     private void PressInList(KeyPress key)
@@ -196,25 +175,20 @@ public sealed class MainModel
             case KeyName.Tab or KeyName.BackTab:
                 Place = Place.Sentence;
                 break;
-            case KeyName.Up or KeyName.Down:
-                List.Move(key.Name == KeyName.Up ? -1 : 1);
-                break;
-            case KeyName.PageUp or KeyName.PageDown:
-                List.Move(key.Name == KeyName.PageUp ? -8 : 8);
-                break;
-            case KeyName.Home or KeyName.End:
-                List.Move(key.Name == KeyName.Home ? -List.Candidates.Length : List.Candidates.Length);
-                break;
             case KeyName.Enter when List.Chosen is not null:
                 CircuitScroll.Reset();
-                Read();
+                _reading.Open();
                 Place = Place.Circuit;
                 break;
             case KeyName.Escape:
                 Notice = "q quits; the wanted sentence is kept.";
                 break;
             default:
-                PressAnywhere(key);
+                if (!List.Press(key))
+                {
+                    PressAnywhere(key);
+                }
+
                 break;
         }
     }
@@ -249,10 +223,10 @@ public sealed class MainModel
     {
         IsStale = false;
         List.Show(result);
-        if (Place == Place.Circuit && !IsThere(_read!))
+        if (Place == Place.Circuit && !_reading.IsThere)
         {
             Place = Place.List;
-            SayGone();
+            SayWhereItIsGone();
         }
 
         if (result.IsComplete)

@@ -29,7 +29,7 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
         int room = height - sentence.Length - foot.Length;
         ImmutableArray<Line> body = model.ShowsKeys ? KeysBody(room)
             : model.Place == Place.Circuit && model.List.Chosen is { } candidate ? CircuitBody(candidate, room)
-            : width >= ListShape.Full + 1 + Schematic.Width ? WideBody(room)
+            : width >= ListShape.Full + 2 + Schematic.Width ? WideBody(room)
             : NarrowBody(room);
         return [.. Filled([.. sentence, .. body], height - foot.Length), .. foot.Select(line => line.Fit(width))];
     }
@@ -59,7 +59,7 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
 
     private ImmutableArray<Line> WideBody(int room)
     {
-        const int left = ListShape.Full;
+        const int left = ListShape.Full + 1;
         int right = width - left - 1;
         ImmutableArray<Line> list = ListBody(left, room);
         ImmutableArray<Line> pane = model.List.Chosen is { } candidate
@@ -92,8 +92,9 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
             return [AnswerRule(listWidth), .. why];
         }
 
-        ImmutableArray<Line> rows = list.Draw(room - 2, model.Place == Place.List, model.IsStale, glyphs, listWidth);
-        ImmutableArray<Line> below = why.Length > 0 && rows.Length + 3 + why.Length <= room ? [Line.Empty, .. why] : [];
+        ImmutableArray<Line> below = why.Length > 0 && room - 2 >= LeastRows + 1 + why.Length ? [Line.Empty, .. why] : [];
+        ImmutableArray<Line> rows =
+            list.Draw(room - 2 - below.Length, model.Place == Place.List, model.IsStale, glyphs, listWidth);
         return [AnswerRule(listWidth), list.Heading(glyphs, listWidth), .. rows, .. below];
     }
 
@@ -113,7 +114,8 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
         ImmutableArray<Line> shown = model.CircuitScroll.Cut(page, room - 1);
         string number = FormattableString.Invariant($"{model.List.At + 1} of {model.List.Candidates.Length}");
         string more = model.CircuitScroll.HasMore ? number + ", more below" : number;
-        return [Rules.Draw(CircuitPane.ShortTitle(candidate), more, width, glyphs), .. shown];
+        string age = model.IsStale ? "for the wanted before, " : model.IsRanking ? "computing, " : "";
+        return [Rules.Draw(CircuitPane.ShortTitle(candidate), age + more, width, glyphs), .. shown];
     }
 
     private ImmutableArray<Line> KeysBody(int room)

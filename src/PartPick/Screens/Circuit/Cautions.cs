@@ -29,7 +29,7 @@ public static class Cautions
         if (requirement.Margin >= SafetyMargin)
         {
             string margin = ValueText.Format(requirement.Margin, Dimension.Number);
-            cautions.Add($"A start-up margin of {margin} is asked for where safety rests on the timing: have a qualified person review it.");
+            cautions.Add($"A start-up margin of {margin} is for timing on which safety rests: have a qualified person review it.");
         }
 
         return cautions.ToImmutable();

@@ -56,7 +56,10 @@ public static class CircuitPane
     private static Line Values(Candidate candidate, int width, Glyphs glyphs)
     {
         string[] labels =
-            [.. candidate.Parts.Where(use => use.Part is CapacitorPart or ResistorPart).Select(use => glyphs.Show(CircuitParts.Label(use)))];
+        [
+            .. candidate.Parts.Where(use => use.Part is CapacitorPart or ResistorPart)
+                .Select(use => glyphs.Show(CircuitParts.Label(use))),
+        ];
         LineBuilder line = new(glyphs);
         for (int i = 0; i < labels.Length; i++)
         {

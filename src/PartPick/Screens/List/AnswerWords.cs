@@ -50,6 +50,8 @@ public static class AnswerWords
         }
 
         (Limit limit, double count) = result.Rejections.OrderByDescending(pair => pair.Value).ThenBy(pair => pair.Key).First();
-        return $"nothing fits; {Trade.Words(limit)} removed {Figures.Count(count)} of {Figures.Count(result.Combinations)}";
+        double share = 100 * count / result.Combinations;
+        string percent = share < 1 ? "less than 1" : string.Create(CultureInfo.InvariantCulture, $"{Math.Floor(share):F0}");
+        return $"nothing fits; {Trade.Words(limit)} removed {percent} %";
     }
 }

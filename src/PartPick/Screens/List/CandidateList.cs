@@ -6,6 +6,8 @@ namespace PartPick.Screens;
 /// <summary>The ranked candidates and which of them is chosen.</summary>
 public sealed class CandidateList
 {
+    private const int Page = 8;
+
     private Candidate? _picked;
     private int _top;
 
@@ -44,6 +46,29 @@ public sealed class CandidateList
     {
         At = Candidates.IsEmpty ? 0 : Math.Clamp(At + step, 0, Candidates.Length - 1);
         _picked = At > 0 ? Chosen : null;
+    }
+
+    /// <summary>Moves the choice with the keys that everywhere do so.</summary>
+    /// <param name="key">The key.</param>
+    /// <returns>Whether it was one of them.</returns>
+    public bool Press(KeyPress key)
+    {
+        int? step = key.Name switch
+        {
+            KeyName.Up => -1,
+            KeyName.Down => 1,
+            KeyName.PageUp => -Page,
+            KeyName.PageDown => Page,
+            KeyName.Home => -Candidates.Length,
+            KeyName.End => Candidates.Length,
+            _ => null,
+        };
+        if (step is { } rows)
+        {
+            Move(rows);
+        }
+
+        return step is not null;
     }
 
     /// <summary>Keeps the chosen one chosen, as long as it or its group is there.</summary>

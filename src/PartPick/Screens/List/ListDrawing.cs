@@ -21,7 +21,7 @@ internal static class ListDrawing
         Column(shape.HasDivider, "", 1, false);
         Column(true, shape.HasErrorBar ? "error ppm" : "ppm", shape.HasErrorBar ? 11 : 6, true);
         Column(true, "", 1, false);
-        Column(true, "margin", shape.HasMarginBar ? 9 : 7, false);
+        Column(true, "margin", shape.HasMarginBar ? 8 : 6, false);
         return shape.HasMarginBar && currency.Length is > 0 and <= 3
             ? line.Column("cost " + currency, 8, Tone.Quiet, true).Build()
             : line.Column("cost", shape.HasMarginBar ? 8 : 5, Tone.Quiet, true).Build();
@@ -52,7 +52,7 @@ internal static class ListDrawing
         Column(shape.HasDivider, cells.Divider, 5, true);
         Figure(cells.ErrorPpm, 6, LimitName.Error, shape.HasErrorBar);
         Figure(cells.Margin, 5, LimitName.Margin, shape.HasMarginBar);
-        return line.Column(cells.Cost, 6, ToneOf(LimitName.Cost), true).Build();
+        return line.Column(cells.Cost, 5, ToneOf(LimitName.Cost), true).Build();
 
         void Column(bool there, string text, int width, bool right = false)
         {

@@ -4,7 +4,7 @@ namespace PartPick.Screens;
 public sealed class ListShape
 {
     /// <summary>Width with all columns.</summary>
-    public const int Full = 79;
+    public const int Full = 78;
 
     /// <summary>Width of a bar in cells.</summary>
     public const int BarCells = 4;

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using System.Globalization;
 using PartPick.Selection;
 using PartPick.Values;
 
@@ -33,16 +34,21 @@ internal static class NothingFits
         }
 
         var lines = ImmutableArray.CreateBuilder<Line>();
-        lines.Add(new LineBuilder(glyphs).Add("  ").Words("What removed the combinations, each at the first limit it breaks:", width - 2, Tone.Quiet)
-            .Build());
-        string[] counts = Figures.LineUp([.. removed.Select(one => Figures.Count(one.Count))]);
+        lines.Add(new LineBuilder(glyphs).Add("  ")
+            .Words("What removed the combinations, each at the first limit it breaks:", width - 2, Tone.Quiet).Build());
+        string[] counts = [.. removed.Select(one => Grouped(one.Count))];
+        int widest = counts.Max(count => count.Length);
         for (int i = 0; i < removed.Length; i++)
         {
-            lines.Add(new LineBuilder(glyphs).Add("  ").Column(Trade.Words(removed[i].Limit), Words, i == 0 ? Tone.Strong : Tone.Normal)
-                .Add("[", Tone.Quiet).Add(Bars.Bar(Math.Min(1, removed[i].Count / result.Combinations), Cells, glyphs)).Add("] ", Tone.Quiet)
-                .Add(counts[i]).Build());
+            lines.Add(new LineBuilder(glyphs).Add("  ")
+                .Column(Trade.Words(removed[i].Limit), Words, i == 0 ? Tone.Strong : Tone.Normal).Add("[", Tone.Quiet)
+                .Add(Bars.Bar(Math.Min(1, removed[i].Count / result.Combinations), Cells, glyphs)).Add("] ", Tone.Quiet)
+                .Add(counts[i].PadLeft(widest)).Build());
         }
 
         return lines.ToImmutable();
     }
+
+    private static string Grouped(double count) =>
+        count.ToString("N0", CultureInfo.InvariantCulture).Replace(',', ' ');
 }

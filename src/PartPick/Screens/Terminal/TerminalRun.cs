@@ -14,6 +14,8 @@ internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits
 {
     private const string MouseReportsOff = "\x1b[?1003l\x1b[?1015l\x1b[?1006l";
 
+    private static readonly TimeSpan LastMoment = TimeSpan.FromSeconds(3);
+
     /// <summary>Shows the screen until it is left.</summary>
     /// <param name="start">The requirement to begin with.</param>
     /// <param name="notice">A line to show until the first key; null for none.</param>
@@ -49,6 +51,9 @@ internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits
             if (HasTerminal())
             {
                 Leave(context);
+
+                // Should it be gone a moment later, waiting for it would last for ever.
+                _ = Task.Delay(LastMoment).ContinueWith(_ => Environment.Exit(ExitStatus.Fault), TaskScheduler.Default);
             }
         }
     }

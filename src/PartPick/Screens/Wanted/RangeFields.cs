@@ -33,10 +33,10 @@ internal static class RangeFields
         (r, v) => r with { TemperatureMaxCelsius = v, TemperatureMinCelsius = Math.Min(v, r.TemperatureMinCelsius) },
         InCelsius);
 
-    private static string? InVolts(double volts) => volts is > 0 and <= MostVolts ? null : "is not above 0 and up to 100 V";
+    private static string? InVolts(double volts) => volts is > 0 and <= MostVolts ? null : "is out of range";
 
     private static string? InCelsius(double celsius) =>
-        celsius is >= LeastCelsius and <= MostCelsius ? null : "is not from -273.15 to 300 °C";
+        celsius is >= LeastCelsius and <= MostCelsius ? null : "is out of range";
 
     // The lower end leaves out the unit that the upper one, right behind it, has too.
     private static TypedField End(

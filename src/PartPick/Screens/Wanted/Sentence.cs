@@ -27,11 +27,11 @@ public static class Sentence
             Value(RangeFields.TemperatureMin()), Words("~to~"), Value(RangeFields.TemperatureMax()),
             Words(", start-up margin~"), Value(Margin()), Words(", "), Value(Start()), Words(" "), Value(StartUpTime()),
             Words(", "), Value(Builds()), Words("~boards at "), Value(Cost(currency)),
-            Words(", "), Value(BoardOf(start)), Words(" board, C1,~C2~from~"), Value(Series(start)), Words(", "),
+            Words(", "), Value(BoardOf(start)), Words(" board, C1,~C2~of~"), Value(Series(start)), Words(", "),
             Value(new CircuitsField()),
-            Words("; error counts~"), Value(Weight("weight of the error", w => w.Error, (w, v) => w with { Error = v })),
-            Words(", margin~"), Value(Weight("weight of the margin", w => w.Margin, (w, v) => w with { Margin = v })),
-            Words(", cost~"), Value(Weight("weight of the cost", w => w.Cost, (w, v) => w with { Cost = v })), Words("."),
+            Words("; error ×"), Value(Weight("weight of the error", w => w.Error, (w, v) => w with { Error = v })),
+            Words(", margin ×"), Value(Weight("weight of the margin", w => w.Margin, (w, v) => w with { Margin = v })),
+            Words(", cost ×"), Value(Weight("weight of the cost", w => w.Cost, (w, v) => w with { Cost = v })), Words("."),
         ];
     }
 
@@ -93,7 +93,7 @@ public static class Sentence
         .Select(board => new SentenceChoice(
             board.Name.ToLowerInvariant()[0], board.Name, r => r.Board == board, r => r with { Board = board })));
 
-    private static ChoiceField Series(Requirement start) => new("series of the load capacitors",
+    private static ChoiceField Series(Requirement start) => new("capacitor series",
         PreferredSeries.All.Where(series => series.Name is "E3" or "E6" or "E12" or "E24" || series.Name == start.CapacitorSeries)
             .Select(series => new SentenceChoice(
                 series.Name[1], series.Name, r => r.CapacitorSeries == series.Name, r => r with { CapacitorSeries = series.Name })));

@@ -4,24 +4,12 @@ using PartPick.Values;
 
 namespace PartPick.Screens;
 
-/// <summary>What became of a key in the sentence.</summary>
-public enum SentenceAnswer
-{
-    /// <summary>The sentence has no use for it.</summary>
-    NotMine,
-
-    /// <summary>It is done.</summary>
-    Done,
-
-    /// <summary>The way leads out of the sentence, to the list.</summary>
-    Leave,
-}
-
 /// <summary>The wanted sentence: moving through its values and changing them in place.</summary>
 public sealed class SentenceModel
 {
     private readonly ImmutableArray<SentencePiece> _pieces;
     private readonly ImmutableArray<SentenceField> _fields;
+    private readonly SentenceWalk _walk;
     private readonly Glyphs _glyphs;
     private TypedText? _typed;
     private int _width = 80;
@@ -37,7 +25,7 @@ public sealed class SentenceModel
         _glyphs = glyphs;
         _pieces = Sentence.Pieces(requirement, currency);
         _fields = [.. _pieces.Select(piece => piece.Field).OfType<SentenceField>()];
-        At = 1;
+        _walk = new SentenceWalk(1);
     }
 
     /// <summary>Raised when <see cref="Current"/> is another requirement; true while it is still being typed.</summary>
@@ -50,13 +38,10 @@ public sealed class SentenceModel
     public Requirement Current { get; private set; }
 
     /// <summary>Number of the value that is chosen, from zero.</summary>
-    public int At { get; private set; }
+    public int At => _walk.At;
 
     /// <summary>The value that is chosen.</summary>
     public SentenceField Field => _fields[At];
-
-    /// <summary>Number of values.</summary>
-    public int Count => _fields.Length;
 
     /// <summary>What is being typed; null while nothing is.</summary>
     public string? Typed => _typed?.Text;
@@ -107,49 +92,7 @@ public sealed class SentenceModel
             : shown.SetItem(rows - 1, new LineBuilder(_glyphs).Add(shown[^1], width - _glyphs.Show(" …").Length).Add(" …").Build());
     }
 
-    private SentenceAnswer Move(KeyPress key)
-    {
-        switch (key.Name)
-        {
-            case KeyName.Tab when At == Count - 1:
-            case KeyName.BackTab when At == 0:
-            case KeyName.Escape:
-                return SentenceAnswer.Leave;
-            case KeyName.Tab or KeyName.Right:
-                At = Math.Min(At + 1, Count - 1);
-                return SentenceAnswer.Done;
-            case KeyName.BackTab or KeyName.Left:
-                At = Math.Max(At - 1, 0);
-                return SentenceAnswer.Done;
-            case KeyName.Home:
-                At = 0;
-                return SentenceAnswer.Done;
-            case KeyName.End:
-                At = Count - 1;
-                return SentenceAnswer.Done;
-            case KeyName.Up:
-                MoveRow(-1);
-                return SentenceAnswer.Done;
-            case KeyName.Down:
-                return MoveRow(1) ? SentenceAnswer.Done : SentenceAnswer.Leave;
-            default:
-                return Change(key);
-        }
-    }
-
-    private bool MoveRow(int step)
-    {
-        ImmutableArray<(int Row, int Column)> places = Layout(true).Places;
-        (int row, int column) = places[At];
-        var there = Enumerable.Range(0, Count).Where(i => places[i].Row == row + step).ToList();
-        if (there.Count == 0)
-        {
-            return false;
-        }
-
-        At = there.MinBy(i => Math.Abs(places[i].Column - column));
-        return true;
-    }
+    private SentenceAnswer Move(KeyPress key) => _walk.Press(key, Layout(true).Places) ?? Change(key);
 
     private SentenceAnswer Change(KeyPress key)
     {
