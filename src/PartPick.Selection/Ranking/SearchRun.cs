@@ -202,11 +202,11 @@ internal sealed class SearchRun
         Tally.Reject(Limit.Error, scan.ErrorRejections * family.Members.Length);
         Tally.Cover(Space.CapacitorPairs * family.Options.Length * family.Members.Length);
 
-        void Look(List<Estimate> estimates)
+        void Look(List<Spot> spots)
         {
             foreach (FamilyMember member in family.Members)
             {
-                new MemberSearch(this, family, member).Run(estimates);
+                new MemberSearch(this, family, member).Run(spots, scan.Grid);
             }
         }
     }
