@@ -37,8 +37,10 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
     private Line Value(params (string Key, string Does)[] keys)
     {
         int tail = keys.Sum(pair => pair.Key.Length + pair.Does.Length + 4);
+        SentenceModel wanted = model.Wanted;
+        string name = wanted.Field.Name + (wanted.IsFit ? ": " : ", not yet: ");
         LineBuilder line = new LineBuilder(glyphs).Add(" ")
-            .Column($"{model.Wanted.Field.Name}: {model.Wanted.Field.Help(model.Wanted.Accepted)}", Math.Max(10, width - tail - 1));
+            .Column(name + wanted.Field.Help(wanted.Accepted), Math.Max(10, width - tail - 1));
         foreach ((string key, string does) in keys)
         {
             line.Add("   ").Add(key, Tone.Strong).Add(" " + does);

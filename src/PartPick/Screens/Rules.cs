@@ -21,7 +21,7 @@ internal static class Rules
         if (left.Length > 0)
         {
             string shown = glyphs.Show(left);
-            line.Add(" ").Column(shown, Math.Clamp(shown.Length, 0, Math.Max(0, end - 4)), tone).Add(" ");
+            line.Add(" ").Column(shown, Math.Clamp(shown.Length, 0, Math.Max(0, end - (right.Length == 0 ? 2 : 3))), tone).Add(" ");
         }
 
         line.RuleTo(end);

@@ -314,4 +314,44 @@ public class MainScreenTests
         Assert.DoesNotContain("?", string.Concat(bench.Rows[..^1]), StringComparison.Ordinal);
         Assert.Contains("C1 15 pF  C2 18 pF", bench.Text, StringComparison.Ordinal);
     }
+
+    [Fact]
+    public void A_text_that_is_no_value_yet_says_so_and_changes_no_ranking()
+    {
+        using var bench = new Bench();
+        bench.Press(new Key('e'));
+        int asked = bench.Ranking.Asked.Count;
+        bench.Type("-");
+        Assert.StartsWith(" output frequency, not yet: such as", bench.Rows[^1], StringComparison.Ordinal);
+        Assert.Equal(asked, bench.Ranking.Asked.Count);
+        bench.Press(Key.Backspace);
+        bench.Type("4k");
+        Assert.StartsWith(" output frequency: such as", bench.Rows[^1], StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_value_is_changed_with_the_arrows_and_digits_alone_while_a_ranking_runs()
+    {
+        using var bench = new Bench(ranking: new FakeRanking { Holds = true });
+        bench.Press(new Key('e'), Key.CursorRight, Key.CursorRight);
+        bench.Type("50");
+        bench.Press(Key.Enter, Key.CursorRight);
+        bench.Type("10");
+        bench.Press(Key.Enter);
+        Assert.Equal((50e-6, 10), (bench.Model.Wanted.Accepted.BudgetRatio, bench.Model.Wanted.Accepted.Years));
+        int last = bench.Ranking.Asked.Count - 1;
+        Assert.All(Enumerable.Range(0, last), number => Assert.True(bench.Ranking.IsCancelled(number)));
+        Assert.False(bench.Ranking.IsCancelled(last));
+        bench.Ranking.Finish(last);
+        Assert.Contains("5 circuits fit", bench.Model.Draw(80, 24).Select(line => line.Text).First(
+            text => text.Contains("fit", StringComparison.Ordinal)), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void The_title_of_a_circuit_is_whole_at_120_columns()
+    {
+        using var bench = new Bench(120, 40);
+        Assert.Contains("counter CNT-14-HC, stage 12 (÷4096) ─", bench.Text, StringComparison.Ordinal);
+        Assert.Equal(" abc ", Rules.Draw("abc", "", 6, Glyphs.Drawn).Text[1..]);
+    }
 }

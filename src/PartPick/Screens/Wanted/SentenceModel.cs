@@ -49,6 +49,9 @@ public sealed class SentenceModel
     /// <summary>Where the next letter goes in <see cref="Typed"/>.</summary>
     public int Caret => _typed?.Caret ?? 0;
 
+    /// <summary>Whether what is being typed is a value already; true while nothing is.</summary>
+    public bool IsFit => _typed is null || ((TypedField)Field).Take(Accepted, Typed!).IsOk;
+
     /// <summary>What is wrong with what was typed; null where nothing is known to be.</summary>
     public Problem? Problem { get; private set; }
 
