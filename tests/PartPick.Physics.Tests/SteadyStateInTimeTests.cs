@@ -54,11 +54,20 @@ public sealed class SteadyStateInTimeTests
         ["one base resistor"] = OneResistor,
         ["one base resistor, free of the supply"] = OneResistor with
         {
-            BaseTopOhms = 470e3, EmitterOhms = 4.7e3, SupplyVolts = 12, C1Farads = 220 * Pico, C2Farads = 220 * Pico,
+            BaseTopOhms = 470e3,
+            EmitterOhms = 4.7e3,
+            SupplyVolts = 12,
+            C1Farads = 220 * Pico,
+            C2Farads = 220 * Pico,
         },
         ["divider, free of the supply"] = OneResistor with
         {
-            BaseTopOhms = 100e3, BaseBottomOhms = 68e3, EmitterOhms = 3.3e3, SupplyVolts = 12, C1Farads = 220 * Pico, LoadOhms = 10e3,
+            BaseTopOhms = 100e3,
+            BaseBottomOhms = 68e3,
+            EmitterOhms = 3.3e3,
+            SupplyVolts = 12,
+            C1Farads = 220 * Pico,
+            LoadOhms = 10e3,
         },
         ["one base resistor, hot"] = OneResistor with { TemperatureCelsius = 70 },
         ["divider with load"] = OneResistor with { BaseTopOhms = 47e3, BaseBottomOhms = 47e3, LoadOhms = 3.3e3, SupplyVolts = 9 },
@@ -67,7 +76,10 @@ public sealed class SteadyStateInTimeTests
 
     private static FollowerCircuit OneResistor => Samples.FullFollower(82 * Pico) with
     {
-        EmitterCurrentAmps = null, BaseTopOhms = 220e3, EmitterOhms = 2.2e3, SupplyVolts = 9,
+        EmitterCurrentAmps = null,
+        BaseTopOhms = 220e3,
+        EmitterOhms = 2.2e3,
+        SupplyVolts = 9,
     };
 
     [Theory]

@@ -194,7 +194,8 @@ internal sealed class EstimateGrid
             CircuitValues values = _family.Options[option].With(_space.Capacitors[c1].Farads, _space.Capacitors[c2].Farads);
             node = new Node(values);
             RunningState? near = Near(option, c1, c2) ?? _last;
-            if (OscillatorAnalysis.EstimateSteadyState(_template.At(values, _nominal), near, out RunningState? state) is { } estimate && state is not null)
+            OscillatorCircuit circuit = _template.At(values, _nominal);
+            if (OscillatorAnalysis.EstimateSteadyState(circuit, near, out RunningState? state) is { } estimate && state is not null)
             {
                 _last = state;
                 double load = _template.Crystal.Crystal.LoadAtFrequencyFarads(estimate.FrequencyHz);

@@ -12,6 +12,9 @@ internal sealed class FamilyScan
 
     // Between the wanted frequency and that of the natural mode the negative resistance changes by far less than this.
     private const double ScreenSlack = 0.99;
+
+    // A margin just below one at nominal capacitances may be above it at others.
+    private const double DisturbedBelow = 1.05;
     private readonly SearchRun _run;
     private readonly SearchSpace _space;
     private readonly CircuitFamily _family;
@@ -28,7 +31,7 @@ internal sealed class FamilyScan
         _template = family.Members[0].Template;
         _requirement = _space.Requirement;
         Grid = new EstimateGrid(_space, family, Window());
-        _wanted = _requirement.AllowDisturbance ? double.NegativeInfinity : _requirement.Margin * MarginSlack;
+        _wanted = _requirement.Margin * MarginSlack;
         _screenHz = family.Members[0].Crystal.FrequencyHz;
     }
 
@@ -52,14 +55,7 @@ internal sealed class FamilyScan
             foreach (int j in Grid.Values().Reverse())
             {
                 _run.Cancellation.ThrowIfCancellationRequested();
-                foreach (int option in Grid.Options())
-                {
-                    if (!Grid.IsOutside(option, i, j) && Screen(option, i, j) >= _wanted * ScreenSlack && WorstMargin(option, i, j) is var margin && margin >= _wanted
-                        && Grid.At(option, i, j) is { } estimate)
-                    {
-                        found.Add(new Spot(option, i, j, margin, new LoadRange(estimate.LoadFarads, estimate.LoadFarads), 0));
-                    }
-                }
+                found.AddRange(Grid.Options().Select(option => AtNode(option, i, j)).OfType<Spot>());
             }
         }
 
@@ -82,6 +78,19 @@ internal sealed class FamilyScan
         return found;
     }
 
+    private Spot? AtNode(int option, int i, int j)
+    {
+        if (Grid.IsOutside(option, i, j) || Screen(option, i, j) < _wanted * ScreenSlack)
+        {
+            return null;
+        }
+
+        double margin = WorstMargin(option, i, j);
+        return margin >= _wanted && Grid.At(option, i, j) is { } estimate
+            ? new Spot(option, i, j, margin, new LoadRange(estimate.LoadFarads, estimate.LoadFarads), 0)
+            : null;
+    }
+
     private void ScanPair(int i, int j, List<Spot> found)
     {
         double weight = (double)_space.Capacitors[i].Parts * _space.Capacitors[j].Parts;
@@ -91,7 +100,7 @@ internal sealed class FamilyScan
             double screened = Screen(option, i, j);
             if (screened < _wanted * ScreenSlack)
             {
-                if (_family.IsGate && screened < before)
+                if (_family.IsGate && !_requirement.AllowDisturbance && screened < before)
                 {
                     // At one corner the margin rises, if at all, and then falls along Rs: nothing beyond has it.
                     MarginRejections += weight * (_family.Options.Length - option);
@@ -140,9 +149,12 @@ internal sealed class FamilyScan
     }
 
     // The margin of the weakest device at the lowest supply at the crystal's nominal frequency: the worst one is no better.
-    private double Screen(int option, int i, int j) => _requirement.AllowDisturbance
-        ? double.PositiveInfinity
-        : OscillatorAnalysis.FindMarginAt(_template.At(Values(option, i, j), _template.AmplifierCorners[0]), _screenHz);
+    private double Screen(int option, int i, int j) =>
+        Bound(OscillatorAnalysis.FindMarginAt(_template.At(Values(option, i, j), _template.AmplifierCorners[0]), _screenHz));
+
+    // Where a disturbance may start it, a corner that does not build up counts with its running margin, which nothing bounds yet.
+    private double Bound(double margin) =>
+        _requirement.AllowDisturbance && margin < DisturbedBelow ? double.PositiveInfinity : margin;
 
     // Whether a combination could still change the answer for some crystal.
     private bool MayMatter(int option, int i, int j, in LoadRange range, double amplifierRatio, double margin, double weight)
@@ -150,7 +162,7 @@ internal sealed class FamilyScan
         LeastTerms terms = LeastTerms.OfLoad(_requirement.Board, _family, _template.Crystal.Crystal, Values(option, i, j), range);
         double least = amplifierRatio + terms.Ratio(_run.Prices.LeastSpread(i), _run.Prices.LeastSpread(j));
         decimal cost = _family.OptionCosts[option] + _run.Prices.CheapestPair(i, j);
-        double bound = _requirement.AllowDisturbance ? double.PositiveInfinity : margin * MemberSearch.MarginSlack;
+        double bound = margin * MemberSearch.MarginSlack;
         bool within = false;
         foreach (FamilyMember member in _family.Members)
         {
@@ -211,7 +223,8 @@ internal sealed class FamilyScan
         CircuitValues values = Values(option, i, j);
         for (int corner = 0; corner < _template.AmplifierCorners.Length && least >= _wanted; corner++)
         {
-            least = Math.Min(least, OscillatorAnalysis.FindStartFigures(_template.At(values, _template.AmplifierCorners[corner])).Margin);
+            double margin = OscillatorAnalysis.FindStartFigures(_template.At(values, _template.AmplifierCorners[corner])).Margin;
+            least = Math.Min(least, Bound(margin));
         }
 
         return least;

@@ -37,7 +37,8 @@ internal sealed class MemberSearch
         {
             if (Prospective(spot) is { } prospect)
             {
-                prospects.Add((prospect.Pairs.Min(pair => Score.Of(_requirement, pair.ErrorRatio, pair.Margin, pair.Cost, scale)), prospect));
+                double score = prospect.Pairs.Min(pair => Score.Of(_requirement, pair.ErrorRatio, pair.Margin, pair.Cost, scale));
+                prospects.Add((score, prospect));
             }
         }
 
@@ -85,7 +86,7 @@ internal sealed class MemberSearch
     // even that breaks a limit, or can no longer change the answer.
     private Prospect? Prospective(Spot spot)
     {
-        double margin = _requirement.AllowDisturbance ? double.PositiveInfinity : spot.Margin * MarginSlack;
+        double margin = spot.Margin * MarginSlack;
         LeastTerms terms = LeastTerms.OfLoad(_requirement.Board, _family, _member.Model.Crystal, Values(spot), spot.Load);
         double common = LeastRatio(_member, spot.Load) + spot.AmplifierRatio;
         double error = common + terms.Ratio(_run.Prices.LeastSpread(spot.C1), _run.Prices.LeastSpread(spot.C2));

@@ -77,7 +77,8 @@ internal sealed class SearchSpace
     {
         foreach (Part amplifier in Amplifiers(kind).Where(Market.IsListed))
         {
-            ImmutableArray<AmplifierOption> options = amplifier is TransistorPart transistor ? _options.BiasFor(transistor) : _options.Series;
+            ImmutableArray<AmplifierOption> options =
+                amplifier is TransistorPart transistor ? _options.BiasFor(transistor) : _options.Series;
             double size = CapacitorPairs * options.Length;
             var members = new List<(FamilyMember Member, SupportParts Support)>();
             foreach (CrystalPart crystal in Catalog.Crystals.Where(part => part.Overtone == 1 && Market.IsListed(part)))
