@@ -13,14 +13,14 @@ internal sealed class SaturatedSine
     private const double StraightWidth = 0.02;
 
     // The tanh's nearest pole is (π/2)·width off the real axis, so N equal steps in half a period leave an error of e^(−π N width):
-    // 1e-11 at 8/width, and 3e-6 at 4/width, enough for the few harmonics of an estimate.
+    // 1e-11 at 8/width, and 3e-10 at 7/width, enough for the few harmonics of an estimate.
     private const double StepsPerWidth = 8;
-    private const double CoarseStepsPerWidth = 4;
+    private const double CoarseStepsPerWidth = 7;
     private const int CoarseHarmonics = 4;
 
     // Where 1 − tanh x is as small as what the steps leave, and by how much the way there may be longer than along a sine.
     private const double Saturation = 13;
-    private const double CoarseSaturation = 7;
+    private const double CoarseSaturation = 11;
     private const double EdgeReserve = 1.3;
     private readonly double _steepness;
     private readonly Complex[] _moments;

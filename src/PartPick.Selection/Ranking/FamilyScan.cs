@@ -8,11 +8,6 @@ namespace PartPick.Selection.Search;
 /// </summary>
 internal sealed class FamilyScan
 {
-    /// <summary>Share of the pull from series resonance by which an estimate may be off.</summary>
-    private const double EstimateShare = 0.02;
-
-    /// <summary>What else an estimate may be off, as a ratio.</summary>
-    private const double EstimateFloor = 0.5e-6;
     private const double MarginSlack = 0.98;
 
     // Between the wanted frequency and that of the natural mode the negative resistance changes by far less than this.
@@ -45,10 +40,6 @@ internal sealed class FamilyScan
 
     /// <summary>Combinations (of parts, for one crystal) that the frequency error removed for every crystal.</summary>
     public double ErrorRejections { get; private set; }
-
-    /// <summary>Largest relative error of an estimated frequency.</summary>
-    public static double EstimateError(Crystal crystal, double frequencyHz) =>
-        EstimateShare * Math.Abs(frequencyHz / crystal.SeriesHz - 1) + EstimateFloor;
 
     /// <summary>
     /// A few combinations spread over the whole, for good answers early: against them the rest can be left out sooner.
@@ -211,7 +202,7 @@ internal sealed class FamilyScan
         double slowest = crystal.FrequencyAtLoadHz(range.Highest);
         double fastest = crystal.FrequencyAtLoadHz(range.Lowest);
         double off = Math.Max(slowest / member.TargetHz - 1, 1 - fastest / member.TargetHz);
-        return Math.Max(0, off - EstimateError(crystal, fastest));
+        return Math.Max(0, off - member.Quality.ErrorRatio(crystal, fastest));
     }
 
     private double WorstMargin(int option, int i, int j)

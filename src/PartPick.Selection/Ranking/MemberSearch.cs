@@ -77,7 +77,7 @@ internal sealed class MemberSearch
         }
 
         double shift = Math.Abs(frequencyHz / member.Crystal.FrequencyHz - 1);
-        double slack = FamilyScan.EstimateError(member.Model.Crystal, frequencyHz);
+        double slack = member.Quality.ErrorRatio(member.Model.Crystal, frequencyHz);
         return 0.9 * CrystalModel.MotionalUncertainty * Math.Max(0, shift - slack);
     }
 

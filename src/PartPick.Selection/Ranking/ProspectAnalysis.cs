@@ -11,9 +11,6 @@ internal sealed class ProspectAnalysis
     // By how much the steady state at the fineness of the corners may differ from the converged one.
     private const double BaseSlack = 1e-6;
     private const double BaseDriveSlack = 0.01;
-
-    // By how much an estimated drive level may be too high.
-    private const double EstimateDriveSlack = 0.05;
     private readonly SearchRun _run;
     private readonly CircuitFamily _family;
     private readonly FamilyMember _member;
@@ -48,7 +45,7 @@ internal sealed class ProspectAnalysis
             return;
         }
 
-        if (estimate.DriveWatts * (1 - EstimateDriveSlack) > _member.Crystal.DriveLevelWatts)
+        if (estimate.DriveWatts * (1 - _member.Quality.DriveShare) > _member.Crystal.DriveLevelWatts)
         {
             Reject(Limit.Drive);
             return;

@@ -14,7 +14,6 @@ internal sealed class SearchRun
     private readonly Stopwatch _watch = Stopwatch.StartNew();
     private readonly Lock _reporting = new();
     private double _nextReport = 0.1;
-    private int _next;
 
     /// <param name="space">What is searched.</param>
     /// <param name="options">How much of the answer is wanted.</param>
@@ -127,23 +126,19 @@ internal sealed class SearchRun
                 .ThenBy(family => family.Amplifier.Id, StringComparer.Ordinal)
                 .ThenBy(family => family.Members[0].Crystal.Id, StringComparer.Ordinal),
         ];
-        int threads = Math.Clamp(_options.Threads ?? Environment.ProcessorCount, 1, Math.Max(1, order.Length));
-        var workers = new Task[threads - 1];
-        for (int i = 0; i < workers.Length; i++)
+        // A few combinations of every family first: against the best of them the rest of each can be left out sooner.
+        var scans = new FamilyScan[order.Length];
+        InParallel(order.Length, place =>
         {
-            workers[i] = Task.Run(() => WorkUntilCancelled(order), CancellationToken.None);
-        }
-
-        try
+            scans[place] = new FamilyScan(this, order[place]);
+            Look(order[place], scans[place].Sparse(), scans[place].Grid);
+        });
+        Cancellation.ThrowIfCancellationRequested();
+        InParallel(order.Length, place =>
         {
-            WorkUntilCancelled(order);
-        }
-        finally
-        {
-            Interlocked.Exchange(ref _next, order.Length);
-            Task.WaitAll(workers, CancellationToken.None);
-        }
-
+            SearchRest(order[place], scans[place]);
+            scans[place] = null!;
+        });
         Cancellation.ThrowIfCancellationRequested();
     }
 
@@ -166,48 +161,58 @@ internal sealed class SearchRun
         }
     }
 
-    private void WorkUntilCancelled(ImmutableArray<CircuitFamily> families)
+    private void InParallel(int count, Action<int> work)
     {
+        int next = 0;
+        int threads = Math.Clamp(_options.Threads ?? Environment.ProcessorCount, 1, Math.Max(1, count));
+        var workers = new Task[threads - 1];
+        for (int i = 0; i < workers.Length; i++)
+        {
+            workers[i] = Task.Run(WorkUntilCancelled, CancellationToken.None);
+        }
+
         try
         {
-            Work(families);
+            WorkUntilCancelled();
         }
-        catch (OperationCanceledException) when (Cancellation.IsCancellationRequested)
+        finally
         {
-            // Every thread ends by itself; the run says so once.
+            Interlocked.Exchange(ref next, count);
+            Task.WaitAll(workers, CancellationToken.None);
         }
-    }
 
-    private void Work(ImmutableArray<CircuitFamily> families)
-    {
-        while (true)
+        void WorkUntilCancelled()
         {
-            int place = Interlocked.Increment(ref _next) - 1;
-            if (place >= families.Length)
+            try
             {
-                return;
+                for (int place = Take(); place < count; place = Take())
+                {
+                    work(place);
+                    Report();
+                }
             }
-
-            Search(families[place]);
-            Report();
+            catch (OperationCanceledException) when (Cancellation.IsCancellationRequested)
+            {
+                // Every thread ends by itself; the run says so once.
+            }
         }
+
+        int Take() => Interlocked.Increment(ref next) - 1;
     }
 
-    private void Search(CircuitFamily family)
+    private void SearchRest(CircuitFamily family, FamilyScan scan)
     {
-        var scan = new FamilyScan(this, family);
-        Look(scan.Sparse());
-        Look(scan.Rest());
+        Look(family, scan.Rest(), scan.Grid);
         Tally.Reject(Limit.Margin, scan.MarginRejections * family.Members.Length);
         Tally.Reject(Limit.Error, scan.ErrorRejections * family.Members.Length);
         Tally.Cover(Space.CapacitorPairs * family.Options.Length * family.Members.Length);
+    }
 
-        void Look(List<Spot> spots)
+    private void Look(CircuitFamily family, List<Spot> spots, EstimateGrid grid)
+    {
+        foreach (FamilyMember member in family.Members)
         {
-            foreach (FamilyMember member in family.Members)
-            {
-                new MemberSearch(this, family, member).Run(spots, scan.Grid);
-            }
+            new MemberSearch(this, family, member).Run(spots, grid);
         }
     }
 

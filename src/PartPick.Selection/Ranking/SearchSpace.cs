@@ -179,6 +179,7 @@ internal sealed class SearchSpace
             Crystal = crystal,
             Model = model,
             Template = template,
+            Quality = EstimateQuality.Of(amplifier),
             Tap = tap,
             Terms = terms,
             TermsRatio = ratio,
