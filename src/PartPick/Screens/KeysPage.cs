@@ -31,8 +31,8 @@ public static class KeysPage
         Key($"{glyphs.Left} {glyphs.Right}", "the circuit before, the next one, at the same place of the page");
         Key("Esc", "back to the list");
         Head("The pictures");
-        Text($"[{Bars.Bar(0.5, 8, glyphs)}] is a limit and the part of it that is used up: half of it here. " +
-            $"[{Bars.Bar(2, 8, glyphs)}] is beyond it, [{Bars.Bar(0.01, 8, glyphs)}] hardly used. " +
+        Text($"{Bars.Bar(0.5, 8, glyphs)} is a limit and the part of it that is used up: half of it here. " +
+            $"{Bars.Bar(2, 8, glyphs)} is beyond it, {Bars.Bar(0.01, 8, glyphs)} hardly used. " +
             "The margin's bar is the wanted margin over the one there is. The limit that is nearest has the accent, and the " +
             "circuit's page names it.");
         Text("Error is the worst case over tolerance, temperature, ageing, capacitors, strays and amplifier. Margin, drive and " +

@@ -66,7 +66,7 @@ public class CircuitTests
         Assert.Equal(["ms", "EUR"], uses[3..].Select(use => use.Against));
         Assert.All(Bars.Draw(uses, 80, Glyphs.Drawn)[2..], line =>
         {
-            Assert.DoesNotContain("[", line.Text, StringComparison.Ordinal);
+            Assert.DoesNotContain("■", line.Text, StringComparison.Ordinal);
             Assert.Matches("not rated|no limit", line.Text);
         });
     }

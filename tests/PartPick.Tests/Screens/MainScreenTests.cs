@@ -125,7 +125,7 @@ public class MainScreenTests
         using var bench = new Bench(ranking: new FakeRanking { Answer = SampleRanking.Nothing });
         Assert.Contains("nothing fits; the frequency error removed 82 %", bench.Text, StringComparison.Ordinal);
         Assert.Contains("1 of 2, nearest first", bench.Text, StringComparison.Ordinal);
-        Assert.Contains("[■■■■■■■■■■■■■■■■····] 3 400 000", bench.Text, StringComparison.Ordinal);
+        Assert.Contains(" ■■■■■■■■■■■■■■■■···· 3 400 000", bench.Text, StringComparison.Ordinal);
         Assert.Contains("The frequency error is 74.9 ppm, the budget 20 ppm.", bench.Text, StringComparison.Ordinal);
     }
 
@@ -277,7 +277,7 @@ public class MainScreenTests
     {
         using var bench = new Bench(ranking: new FakeRanking { Answer = r => SampleRanking.Nothing(r) with { NearestMisses = [] } });
         Assert.Contains(bench.Rows, row => row.Contains("the frequency error", StringComparison.Ordinal)
-            && row.Contains("3 400 000", StringComparison.Ordinal) && row.Contains('[', StringComparison.Ordinal));
+            && row.Contains("3 400 000", StringComparison.Ordinal) && row.Contains('■', StringComparison.Ordinal));
         Assert.Contains(bench.Rows, row => row.Contains("the cost", StringComparison.Ordinal)
             && row.Contains("1 200", StringComparison.Ordinal));
         Assert.DoesNotContain("Enter open", bench.Rows[^1], StringComparison.Ordinal);

@@ -6,7 +6,7 @@ namespace PartPick.Screens;
 public static class Bars
 {
     private const int Names = 9;
-    private const int LeastCells = 6;
+    private const int LeastCells = 8;
     private const int MostCells = 14;
     private const int LeastReason = 16;
 
@@ -45,7 +45,7 @@ public static class Bars
         bool whole = room >= MostCells + 2 + uses.Max(use => glyphs.Show(use.Because).Length);
         string[] reasons = [.. uses.Select(use => glyphs.Show(whole ? use.Because : CornerWords.Shorten(use.Because)))];
         bool reasoned = room >= LeastCells + 2 + LeastReason;
-        int cells = !reasoned ? Math.Clamp(room, 4, MostCells)
+        int cells = !reasoned ? Math.Clamp(room, 5, MostCells)
             : whole ? Math.Clamp(room - 2 - reasons.Max(text => text.Length), MostCells, 2 * MostCells)
             : Math.Clamp(room - 2 - reasons.Max(text => text.Length), LeastCells, MostCells);
         var lines = ImmutableArray.CreateBuilder<Line>();
@@ -76,7 +76,7 @@ public static class Bars
     }
 
     private static int Width(ImmutableArray<LimitUse> uses, int cells, Glyphs glyphs) =>
-        1 + Names + 1 + cells + 2 + Figures.LineUp([.. uses.Select(use => use.Figure)])[0].Length + 1
+        1 + Names + cells + 1 + Figures.LineUp([.. uses.Select(use => use.Figure)])[0].Length + 1
         + uses.Max(use => glyphs.Show(use.Against).Length);
 
     private static IEnumerable<LineBuilder> Pictures(ImmutableArray<LimitUse> uses, int cells, Glyphs glyphs)
@@ -90,8 +90,8 @@ public static class Bars
             Tone tone = use.IsBroken ? Tone.Warning : ReferenceEquals(use, nearest) ? Tone.Accent : Tone.Normal;
             LineBuilder line = new LineBuilder(glyphs).Add(" ").Column(use.Word, Names, tone);
             line = use.Used is null
-                ? line.Column(use.Unlimited, cells + 3, Tone.Quiet)
-                : line.Add("[", Tone.Quiet).Add(Bar(use.Used, cells, glyphs), tone).Add("] ", Tone.Quiet);
+                ? line.Column(use.Unlimited, cells + 1, Tone.Quiet)
+                : line.Add(Bar(use.Used, cells, glyphs), tone).Add(" ");
             yield return line.Add(figures[i], tone).Add(" ").Column(use.Against, against);
         }
     }

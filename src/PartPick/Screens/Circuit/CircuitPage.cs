@@ -99,8 +99,8 @@ public static class CircuitPage
 
         Line Row(string figure, double ratio, string words)
         {
-            LineBuilder line = new LineBuilder(glyphs).Add(" ").Add(figure).Add(" [", Tone.Quiet)
-                .Add(Bars.Bar(ratio / requirement.BudgetRatio, Share, glyphs)).Add("] ", Tone.Quiet);
+            LineBuilder line = new LineBuilder(glyphs).Add(" ").Add(figure).Add(" ")
+                .Add(Bars.Bar(ratio / requirement.BudgetRatio, Share, glyphs)).Add(" ");
             return line.Words(words, width - line.Width).Build();
         }
     }

@@ -41,8 +41,8 @@ internal static class NothingFits
         for (int i = 0; i < removed.Length; i++)
         {
             lines.Add(new LineBuilder(glyphs).Add("  ")
-                .Column(Trade.Words(removed[i].Limit), Words, i == 0 ? Tone.Strong : Tone.Normal).Add("[", Tone.Quiet)
-                .Add(Bars.Bar(Math.Min(1, removed[i].Count / result.Combinations), Cells, glyphs)).Add("] ", Tone.Quiet)
+                .Column(Trade.Words(removed[i].Limit), Words, i == 0 ? Tone.Strong : Tone.Normal)
+                .Add(Bars.Bar(Math.Min(1, removed[i].Count / result.Combinations), Cells, glyphs)).Add(" ")
                 .Add(counts[i].PadLeft(widest)).Build());
         }
 
