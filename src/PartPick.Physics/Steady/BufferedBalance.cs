@@ -46,6 +46,10 @@ internal sealed class BufferedBalance : AmplitudeBalance
         }
     }
 
+    /// <inheritdoc/>
+    public override double HarmonicShare => Count < 4 ? 0 : Math.Sqrt(
+        (State[2] * State[2] + State[3] * State[3]) / (State[0] * State[0] + State[1] * State[1]));
+
     private double SourceAmps => -_halfVolts / _outputOhms;
 
     /// <summary>The same circuit with twice the harmonics, starting from this state.</summary>

@@ -29,6 +29,9 @@ internal abstract class ForcedState
     /// <summary>Amplitude in amperes beyond which no steady state need be looked for.</summary>
     public virtual double LargestPeakAmps => double.PositiveInfinity;
 
+    /// <summary>Third harmonic over the first of what drives a saturating device; zero where it does not matter.</summary>
+    public virtual double HarmonicShare => 0;
+
     /// <summary>True where the supply limits the last solved state (collector junction conducting).</summary>
     public virtual bool LimitedBySupply => false;
 

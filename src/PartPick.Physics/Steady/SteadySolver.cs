@@ -133,7 +133,7 @@ internal static class SteadySolver
         double radians = FrequencyOf(branch, balance);
         double rms = balance.PeakAmps / Math.Sqrt(2);
         state = balance.Keep();
-        return new SteadyEstimate(radians / (2 * Math.PI), crystal.ResistanceOhms * rms * rms);
+        return new SteadyEstimate(radians / (2 * Math.PI), crystal.ResistanceOhms * rms * rms, balance.HarmonicShare);
     }
 
     /// <summary>

@@ -89,6 +89,7 @@ internal sealed class EstimateGrid
         double share = 0;
         double least = double.PositiveInfinity;
         double most = 0;
+        double harmonics = 0;
         foreach ((Node? node, double weight) in Around(option, c1, c2))
         {
             if (node is null)
@@ -99,11 +100,12 @@ internal sealed class EstimateGrid
             share += weight * node.Share;
             least = Math.Min(least, node.Share);
             most = Math.Max(most, node.Share);
+            harmonics = Math.Max(harmonics, node.Estimate!.HarmonicShare);
         }
 
         double load = StaticLoad(c1, c2);
         double slack = LoadSlack * share + RangeSlack * (most - least);
-        return new LoadRange(load * Math.Max(0, share - slack), load * (share + slack));
+        return new LoadRange(load * Math.Max(0, share - slack), load * (share + slack), harmonics);
     }
 
     /// <summary>The least shift of the frequency over amplifier and supply, as a ratio, from the nodes round a combination.</summary>
@@ -200,7 +202,7 @@ internal sealed class EstimateGrid
                 _last = state;
                 double load = _template.Crystal.Crystal.LoadAtFrequencyFarads(estimate.FrequencyHz);
                 node.Share = load / StaticLoad(c1, c2);
-                node.Estimate = new Estimate(load, estimate.DriveWatts, state.Slim());
+                node.Estimate = new Estimate(load, estimate.DriveWatts, estimate.HarmonicShare, state.Slim());
             }
 
             _nodes.Add((option, c1, c2), node);

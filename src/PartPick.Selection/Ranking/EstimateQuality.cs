@@ -8,13 +8,14 @@ namespace PartPick.Selection.Search;
 /// built-in catalogue.
 /// </summary>
 /// <param name="PullShare">Share of the pull from series resonance.</param>
+/// <param name="PerHarmonic">Share of the pull by the third harmonic of a buffered inverter's input over its first.</param>
 /// <param name="Ratio">What else the frequency may be off, as a ratio.</param>
 /// <param name="DriveShare">Share by which the drive level may be too high.</param>
-internal readonly record struct EstimateQuality(double PullShare, double Ratio, double DriveShare)
+internal readonly record struct EstimateQuality(double PullShare, double PerHarmonic, double Ratio, double DriveShare)
 {
-    private static readonly EstimateQuality Follower = new(0.002, 0.5e-6, 0.02);
-    private static readonly EstimateQuality OneStage = new(0.012, 0.3e-6, 0.08);
-    private static readonly EstimateQuality Buffered = new(0.06, 1e-6, 0.3);
+    private static readonly EstimateQuality Follower = new(0.002, 0, 0.5e-6, 0.02);
+    private static readonly EstimateQuality OneStage = new(0.012, 0, 0.3e-6, 0.08);
+    private static readonly EstimateQuality Buffered = new(0.01, 0.8, 1e-6, 0.3);
 
     /// <summary>The quality of an amplifier's estimates.</summary>
     public static EstimateQuality Of(Part amplifier) => amplifier switch
@@ -27,5 +28,7 @@ internal readonly record struct EstimateQuality(double PullShare, double Ratio, 
     /// <summary>Largest error of an estimated frequency, as a ratio.</summary>
     /// <param name="crystal">The crystal.</param>
     /// <param name="hertz">The estimate.</param>
-    public double ErrorRatio(Crystal crystal, double hertz) => PullShare * Math.Abs(hertz / crystal.SeriesHz - 1) + Ratio;
+    /// <param name="harmonicShare">The estimate's harmonics.</param>
+    public double ErrorRatio(Crystal crystal, double hertz, double harmonicShare) =>
+        (PullShare + PerHarmonic * harmonicShare) * Math.Abs(hertz / crystal.SeriesHz - 1) + Ratio;
 }

@@ -87,7 +87,7 @@ internal sealed class FamilyScan
 
         double margin = WorstMargin(option, i, j);
         return margin >= _wanted && Grid.At(option, i, j) is { } estimate
-            ? new Spot(option, i, j, margin, new LoadRange(estimate.LoadFarads, estimate.LoadFarads), 0)
+            ? new Spot(option, i, j, margin, LoadRange.Of(estimate), 0)
             : null;
     }
 
@@ -197,7 +197,7 @@ internal sealed class FamilyScan
             highest = Math.Max(highest, Load(member, member.TargetHz * (1 - room)));
         }
 
-        return new LoadRange(lowest, highest);
+        return new LoadRange(lowest, highest, 0);
 
         static double Load(FamilyMember member, double hertz) => hertz <= member.Model.Crystal.SeriesHz
             ? double.PositiveInfinity
@@ -214,7 +214,7 @@ internal sealed class FamilyScan
         double slowest = crystal.FrequencyAtLoadHz(range.Highest);
         double fastest = crystal.FrequencyAtLoadHz(range.Lowest);
         double off = Math.Max(slowest / member.TargetHz - 1, 1 - fastest / member.TargetHz);
-        return Math.Max(0, off - member.Quality.ErrorRatio(crystal, fastest));
+        return Math.Max(0, off - member.Quality.ErrorRatio(crystal, fastest, range.HarmonicShare));
     }
 
     private double WorstMargin(int option, int i, int j)

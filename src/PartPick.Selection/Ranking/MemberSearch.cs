@@ -66,11 +66,11 @@ internal sealed class MemberSearch
         double slowest = crystal.FrequencyAtLoadHz(load.Highest);
         double fastest = crystal.FrequencyAtLoadHz(load.Lowest);
         double nearest = Math.Clamp(member.Crystal.FrequencyHz, slowest, fastest);
-        return member.TermsRatio + FamilyScan.LeastCentre(member, load) + AssumedShift(member, nearest);
+        return member.TermsRatio + FamilyScan.LeastCentre(member, load) + AssumedShift(member, nearest, load.HarmonicShare);
     }
 
     /// <summary>A shift of the frequency that an assumed motional capacitance at least makes, as a ratio.</summary>
-    public static double AssumedShift(FamilyMember member, double frequencyHz)
+    public static double AssumedShift(FamilyMember member, double frequencyHz, double harmonicShare)
     {
         if (!member.Model.MotionalAssumed)
         {
@@ -78,7 +78,7 @@ internal sealed class MemberSearch
         }
 
         double shift = Math.Abs(frequencyHz / member.Crystal.FrequencyHz - 1);
-        double slack = member.Quality.ErrorRatio(member.Model.Crystal, frequencyHz);
+        double slack = member.Quality.ErrorRatio(member.Model.Crystal, frequencyHz, harmonicShare);
         return 0.9 * CrystalModel.MotionalUncertainty * Math.Max(0, shift - slack);
     }
 

@@ -52,7 +52,7 @@ internal sealed class ProspectAnalysis
         }
 
         // With a disturbance allowed a margin may take a full analysis at every corner, so it comes last.
-        var load = new LoadRange(estimate.LoadFarads, estimate.LoadFarads);
+        LoadRange load = LoadRange.Of(estimate);
         LeastTerms terms = LeastTerms.OfLoad(_requirement.Board, _family, _member.Model.Crystal, _values, load);
         double least = MemberSearch.LeastRatio(_member, load) + _spot.AmplifierRatio;
         if (!Left(pair => MayReach(pair, least + terms.Ratio(pair.C1.Spread(_reach), pair.C2.Spread(_reach))))
@@ -124,7 +124,7 @@ internal sealed class ProspectAnalysis
     {
         double least = _member.TermsRatio
             + Math.Max(0, Math.Abs(nominal.FrequencyHz / _member.TargetHz - 1) - BaseSlack)
-            + MemberSearch.AssumedShift(_member, nominal.FrequencyHz)
+            + MemberSearch.AssumedShift(_member, nominal.FrequencyHz, 0)
             + terms.Ratio(pair.C1.Spread(_reach), pair.C2.Spread(_reach))
             + amplifierRatio;
         return MayReach(pair, least);
