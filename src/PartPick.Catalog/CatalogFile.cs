@@ -1,5 +1,6 @@
 using System.Collections.Concurrent;
 using LiteDB;
+using PartPick.Catalog.Fields;
 using PartPick.Catalog.Mapping;
 
 namespace PartPick.Catalog;
@@ -43,6 +44,10 @@ internal sealed class CatalogFile : IDisposable
 
     private ILiteCollection<BsonDocument> About => _database.GetCollection(TextDocument.AboutCollection);
 
+    private ILiteCollection<BsonDocument> ImportNotes => _database.GetCollection(ImportDocument.Collection);
+
+    private ILiteCollection<BsonDocument> Maps => _database.GetCollection(TextDocument.MapsCollection);
+
     private ILiteCollection<BsonDocument> Settings => _database.GetCollection(TextDocument.SettingsCollection);
 
     /// <summary>Opens a file that is there.</summary>
@@ -84,13 +89,36 @@ internal sealed class CatalogFile : IDisposable
     /// <summary>All parts; null where a document holds none.</summary>
     public List<Part?> ReadParts() => [.. Parts.FindAll().Select(PartDocument.Read)];
 
+    /// <summary>All stored parts one by one, in the order of their ids; null where a document holds none.</summary>
+    public IEnumerable<StoredPart?> ReadStored() => Parts.FindAll().Select(PartDocument.ReadStored);
+
+    /// <summary>A stored part; null where there is none, or none can be read.</summary>
+    public StoredPart? FindStored(string id) => Parts.FindById(id) is { } document ? PartDocument.ReadStored(document) : null;
+
+    /// <summary>Puts a stored part in the place of the one with its id.</summary>
+    public void Put(StoredPart part) => Parts.Upsert(PartDocument.Write(part));
+
+    /// <summary>What is kept about the imports, by their numbers.</summary>
+    public Dictionary<int, ImportNote> ReadImports() =>
+        ImportNotes.FindAll().Select(ImportDocument.Read).OfType<ImportNote>().ToDictionary(note => note.Number);
+
+    /// <summary>The names of the column maps.</summary>
+    public List<string> MapNames() => [.. Maps.FindAll().Select(document => document["_id"].AsString)];
+
+    public string? ReadMap(string name) => TextDocument.Read(Maps.FindById(name));
+
+    public void WriteMap(string name, string text) => Maps.Upsert(TextDocument.Write(name, text));
+
     /// <summary>Puts the built-in parts in the place of the earlier ones, in one transaction; a part of the user's own stays.</summary>
     public void ReplaceBuiltIn(BuiltInFiles builtIn)
     {
         _database.BeginTrans();
+        Dictionary<string, StoredPart> handwork = Parts.Find(BsonExpression.Create($"$.{PartDocument.BuiltIn} = @0", true))
+            .Where(document => document[PartDocument.ByHand].IsDocument)
+            .Select(PartDocument.ReadStored).OfType<StoredPart>().ToDictionary(part => part.Id, StringComparer.Ordinal);
         Parts.DeleteMany(BsonExpression.Create($"$.{PartDocument.BuiltIn} = @0", true));
-        HashSet<string> own = [.. Parts.FindAll().Select(document => document["_id"].AsString)];
-        Parts.Insert(builtIn.ReadCatalog().All.Where(part => !own.Contains(part.Id)).Select(part => PartDocument.Write(part, true)));
+        Parts.Insert(builtIn.ReadCatalog().All.Where(part => Parts.FindById(part.Id) is null)
+            .Select(part => PartDocument.Write(WithHandwork(part, handwork.GetValueOrDefault(part.Id)))).ToList());
         BuiltInFingerprint = builtIn.Fingerprint();
         _database.Commit();
     }
@@ -126,6 +154,16 @@ internal sealed class CatalogFile : IDisposable
     }
 
     public void Dispose() => _database.Dispose();
+
+    private static StoredPart WithHandwork(Part part, StoredPart? earlier) => new()
+    {
+        Kind = part.Kind,
+        BuiltIn = true,
+        Supplied = PartShape.Of(part.Kind).DraftOf(part),
+        ByHand = earlier?.ByHand ?? new PartDraft(),
+        Cleared = earlier?.Cleared ?? [],
+        HandDate = earlier?.HandDate,
+    };
 
     // A file of whole pages that carries the mark of the file format: anything else would be taken for a new, empty file.
     private static bool LooksWhole(string path)
