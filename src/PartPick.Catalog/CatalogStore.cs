@@ -107,6 +107,21 @@ public static class CatalogStore
         }
     }
 
+    /// <summary>Does something with the files of a catalogue while no one has it open.</summary>
+    internal static Result<T> Locked<T>(string path, TimeSpan patience, Func<T> work)
+    {
+        Result<IDisposable> taken = CatalogLock.Take(path, patience);
+        if (!taken.IsOk)
+        {
+            return Result.Fail<T>(taken.Problem);
+        }
+
+        using (taken.Value)
+        {
+            return Result.Ok(work());
+        }
+    }
+
     private static Result<T> WorkOn<T>(string path, Func<CatalogFile, T> work)
     {
         CatalogFile? file = null;

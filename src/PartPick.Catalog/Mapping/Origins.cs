@@ -20,6 +20,15 @@ internal sealed class Origins(IReadOnlyDictionary<int, ImportNote> imports)
                 : PlaceOf(stored, key);
         }
 
+        foreach (string mark in (stored.Supplied.Text("basis") ?? "").Split(';').Where(mark => mark.EndsWith("=assumed", StringComparison.Ordinal)))
+        {
+            string key = mark.Split('=')[0];
+            if (stored.Place.Import > 0 && origins.TryGetValue(key, out string? place) && !stored.ByHand.Has(key))
+            {
+                origins[key] = $"assumed, not stated in {place}";
+            }
+        }
+
         foreach (string key in stored.Cleared)
         {
             origins.TryAdd(key, "cleared by hand, " + stored.HandDate);

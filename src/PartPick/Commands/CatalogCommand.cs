@@ -12,5 +12,7 @@ internal static class CatalogCommand
         CatalogShowCommand.Build(context),
         CatalogExportCommand.Build(context),
         CatalogInfoCommand.Build(context),
+        CatalogImportCommand.Build(context),
+        CatalogUndoCommand.Build(context),
     };
 }

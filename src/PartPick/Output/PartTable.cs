@@ -27,7 +27,7 @@ internal static class PartTable
         {
             figure.Key,
             figure.ToString(),
-            figure.Dimension is null or Dimension.Count ? "" : BasisWord(figure.Basis),
+            figure is { Dimension: null or Dimension.Count, Basis: Basis.Stated } ? "" : BasisWord(figure.Basis),
             entry.Origin.GetValueOrDefault(figure.Key, ""),
         }).ToList();
         rows.AddRange(assumed.Where(key => !rows.Exists(row => row[0].Split(' ')[0] == key))
