@@ -14,7 +14,7 @@ internal static class CellNumber
     /// <param name="allowNegative">Whether a negative number makes sense.</param>
     public static Result<double> Read(string cell, Dimension dimension, int power, NumberNotation notation, bool allowNegative)
     {
-        string text = CellText.Bare(cell);
+        string text = CellText.Bare(dimension == Dimension.Count ? cell.TrimStart('>', ' ').TrimEnd('+', ' ') : cell);
         (int start, int end) = WrittenNumber.Locate(text);
         string front = text[..start].Trim();
         string tail = text[end..];

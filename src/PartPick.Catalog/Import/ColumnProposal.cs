@@ -111,14 +111,16 @@ internal sealed class ColumnProposal(PartKind kind, IReadOnlyList<string[]> rows
         }
 
         string[] cells = Cells(match.Column);
+        // A whole name is believed where any cell fits, a part of one where most do.
+        double least = match.Score >= 85 ? double.Epsilon : MostUnfit;
         return cells.Length == 0 || match.Field switch
         {
-            "temperature" => Share(cells, cell => TemperatureRange.Read(cell) is not null) >= MostUnfit,
-            "price" => Share(cells, cell => PriceCells.Price(cell, NumberNotation.Point) is not null || PriceCells.Price(cell, NumberNotation.Comma) is not null) >= MostUnfit,
-            "prices" => Share(cells, cell => PriceCells.List(cell, NumberNotation.Point) is not null || PriceCells.List(cell, NumberNotation.Comma) is not null) >= MostUnfit,
-            "toleranceAny" => Share(cells, cell => cell.Any(char.IsAsciiDigit) || cell.Length == 1) >= MostUnfit,
+            "temperature" => Share(cells, cell => TemperatureRange.Read(cell) is not null) >= least,
+            "price" => Share(cells, cell => PriceCells.Price(cell, NumberNotation.Point) is not null || PriceCells.Price(cell, NumberNotation.Comma) is not null) >= least,
+            "prices" => Share(cells, cell => PriceCells.List(cell, NumberNotation.Point) is not null || PriceCells.List(cell, NumberNotation.Comma) is not null) >= least,
+            "toleranceAny" => Share(cells, cell => cell.Any(char.IsAsciiDigit) || cell.Length == 1) >= least,
             "overtone" or "cut" => true,
-            _ when dimension is { } measured => Share(cells, cell => Readable(match.Field, cell, measured)) >= MostUnfit,
+            _ when dimension is { } measured => Share(cells, cell => Readable(match.Field, cell, measured)) >= least,
             _ => true,
         };
     }

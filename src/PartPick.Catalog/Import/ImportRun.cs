@@ -264,7 +264,8 @@ internal sealed class ImportRun : IDisposable
             return (part, null);
         }
 
-        Problem problem = figures.Problems[0];
+        Problem problem = figures.Problems.Find(each => Header(each.Where) is not null)
+            ?? figures.Problems.Find(each => each.Where is "frequency" or "value" or "beta") ?? figures.Problems[0];
         return (null, new RowRejection(line, Header(problem.Where), draft.Text(problem.Where), $"{problem.Where} {problem.What}; fits {problem.Fits}"));
     }
 

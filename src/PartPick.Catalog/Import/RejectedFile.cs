@@ -28,7 +28,8 @@ internal sealed class RejectedFile : IDisposable
     {
         _writer ??= Begin();
         string[] own = [rejection.Line.ToString(CultureInfo.InvariantCulture), rejection.Column ?? "", rejection.Reason];
-        _writer.WriteRecord([.. own, .. Kept(cells).Select(FormulaGuard.Guard)]);
+        IEnumerable<string> padded = cells.Concat(Enumerable.Repeat("", Math.Max(0, _header.Count - cells.Count)));
+        _writer.WriteRecord([.. own, .. Kept([.. padded]).Select(FormulaGuard.Guard)]);
     }
 
     /// <summary>Puts the file under its name; gives its path, or null where no row was rejected.</summary>
@@ -58,7 +59,7 @@ internal sealed class RejectedFile : IDisposable
     private CsvWriter Begin()
     {
         var text = new StreamWriter(_path + ".new", append: false, new UTF8Encoding(encoderShouldEmitUTF8Identifier: false));
-        CsvWriterOptions options = CsvWriterOptions.Default with { NewLine = "\n", Separator = _delimiter, WriteByteOrderMark = false };
+        CsvWriterOptions options = CsvWriterOptions.Default with { NewLine = "\n", Separator = _delimiter, WriteByteOrderMark = false, ValidateFieldCount = false };
         CsvWriter writer = CsvWriter.Create(text, options, false);
         writer.WriteRecord([.. OwnColumns, .. Kept(_header)]);
         return writer;

@@ -169,8 +169,8 @@ internal sealed class RowReader
             return known;
         }
 
-        Result<double> value = CellNumber.Read(dimension == Dimension.Count ? cell.TrimStart('>').TrimEnd('+') : cell, dimension, _uses[i].Power, _uses[i].Notation, field.AllowNegative);
-        if (value.IsOk && Plausible.Of(_kind, field.Key) is { } range && (value.Value < range.Least - (Math.Abs(range.Least) * 0.9) || value.Value > range.Greatest * 10) && value.Value != 0)
+        Result<double> value = CellNumber.Read(cell, dimension, _uses[i].Power, _uses[i].Notation, field.AllowNegative);
+        if (value.IsOk && Plausible.Of(_kind, field.Key) is { } range && (value.Value < range.Least - (Math.Abs(range.Least) * 0.5) || value.Value > range.Greatest * 2) && value.Value != 0)
         {
             value = Result.Fail<double>(
                 "", $"{Problem.Quote(cell)} is no {field.Key} that {_kind.Word()} have",

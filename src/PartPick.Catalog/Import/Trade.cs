@@ -86,8 +86,9 @@ internal static class Trade
     {
         var words = new StringBuilder();
         char last = ' ';
-        foreach (char letter in text)
+        for (int i = 0; i < text.Length; i++)
         {
+            char letter = text[i];
             if (CharUnicodeInfo.GetUnicodeCategory(letter) == UnicodeCategory.NonSpacingMark)
             {
                 continue;
@@ -99,7 +100,7 @@ internal static class Trade
             }
             else
             {
-                if (char.IsUpper(letter) && char.IsLower(last))
+                if (char.IsUpper(letter) && char.IsLower(last) && i + 1 < text.Length && char.IsLower(text[i + 1]))
                 {
                     AddSpace(words);
                 }
