@@ -117,15 +117,33 @@ internal sealed class CatalogFile : IDisposable
             }
         }
 
+        Publish(copy, path);
+        return true;
+    }
+
+    /// <summary>Forces a closed file to the disk and puts it in the place of another.</summary>
+    public static void Publish(string copy, string path)
+    {
         using (var stream = new FileStream(copy, FileMode.Open, FileAccess.ReadWrite))
         {
             stream.Flush(flushToDisk: true);
         }
 
+        // What a damaged file of this name left in its log must not be applied to the new one.
         File.Delete(LogOf(path));
         File.Move(copy, path, overwrite: true);
-        return true;
     }
+
+    /// <summary>All stored parts, each with the id under which it is found.</summary>
+    public IEnumerable<(string Id, StoredPart? Part)> ReadNamed() =>
+        Parts.FindAll().Select(document => (document["_id"].AsString, PartDocument.ReadStored(document)));
+
+    /// <summary>The parts as they were before the last import; null where one cannot be read.</summary>
+    public IEnumerable<StoredPart?> ReadEarlier() =>
+        Earlier.FindAll().Select(document => document["part"].IsDocument ? PartDocument.ReadStored(document["part"].AsDocument) : null);
+
+    /// <summary>How many parts the index counts.</summary>
+    public int CountParts() => Parts.Count();
 
     /// <summary>All parts; null where a document holds none.</summary>
     public List<Part?> ReadParts() => [.. Parts.FindAll().Select(PartDocument.Read)];

@@ -122,7 +122,8 @@ public static class CatalogStore
         }
     }
 
-    private static Result<T> WorkOn<T>(string path, Func<CatalogFile, T> work)
+    /// <summary>Opens a file, does something with it, and turns damage into a problem.</summary>
+    internal static Result<T> WorkOn<T>(string path, Func<CatalogFile, T> work)
     {
         CatalogFile? file = null;
         try

@@ -14,5 +14,8 @@ internal static class CatalogCommand
         CatalogInfoCommand.Build(context),
         CatalogImportCommand.Build(context),
         CatalogUndoCommand.Build(context),
+        CatalogVerifyCommand.Build(context),
+        CatalogBackupCommand.Build(context),
+        CatalogRestoreCommand.Build(context),
     };
 }
