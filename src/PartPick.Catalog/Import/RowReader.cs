@@ -13,6 +13,8 @@ internal sealed class RowReader
     private readonly ColumnUse[] _uses;
     private readonly Dictionary<string, PartField> _fields;
     private readonly Dictionary<string, Result<double>>[] _remembered;
+    private readonly Dictionary<(int Use, string Cell), (decimal? Price, string? Currency)> _prices = [];
+    private readonly Dictionary<string, (double Lowest, double Highest)?> _ranges = new(StringComparer.Ordinal);
 
     public RowReader(PartKind kind, ColumnUse[] columns)
     {
@@ -102,13 +104,22 @@ internal sealed class RowReader
         switch (use.Field)
         {
             case "price":
-                if (PriceCells.Price(cell, use.Notation) is not { } price)
+                if (!_prices.TryGetValue((i, cell), out (decimal? Price, string? Currency) known))
+                {
+                    known = (PriceCells.Price(cell, use.Notation), PriceCells.CurrencyIn(cell) ?? use.Currency);
+                    if (_prices.Count < MostRemembered * 4)
+                    {
+                        _prices[(i, cell)] = known;
+                    }
+                }
+
+                if (known.Price is not { } price)
                 {
                     return $"{Problem.Quote(cell)} is no price that can be read with certainty; fits a number such as 0.42";
                 }
 
                 prices[use.Quantity] = price;
-                return Agree(ref currency, PriceCells.CurrencyIn(cell) ?? use.Currency);
+                return Agree(ref currency, known.Currency);
             case "prices":
                 if (PriceCells.List(cell, use.Notation) is not { } list)
                 {
@@ -122,7 +133,16 @@ internal sealed class RowReader
 
                 return Agree(ref currency, PriceCells.CurrencyIn(cell) ?? use.Currency);
             case "temperature":
-                if (TemperatureRange.Read(cell) is not { } range)
+                if (!_ranges.TryGetValue(cell, out (double Lowest, double Highest)? extent))
+                {
+                    extent = TemperatureRange.Read(cell);
+                    if (_ranges.Count < MostRemembered)
+                    {
+                        _ranges[cell] = extent;
+                    }
+                }
+
+                if (extent is not { } range)
                 {
                     return $"{Problem.Quote(cell)} is no temperature range; fits two temperatures such as -20 to 70 °C";
                 }
