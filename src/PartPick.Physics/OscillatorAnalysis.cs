@@ -192,7 +192,9 @@ public static class OscillatorAnalysis
             StartUp = startUp,
             Start = start,
             RunningMargin = Math.Max(startUp.Margin, largestNegativeOhms / circuit.Crystal.ResistanceOhms),
-            StartUpTimeSeconds = start == StartKind.BuildsUp && steady is not null ? StartUpTimeSeconds(circuit, startUp.GrowthRatePerSecond, steady.CurrentRmsAmps) : null,
+            StartUpTimeSeconds = start == StartKind.BuildsUp && steady is not null
+                ? StartUpTimeSeconds(circuit, startUp.GrowthRatePerSecond, steady.CurrentRmsAmps)
+                : null,
             Steady = steady,
             EmitterCurrentAmps = emitterAmps,
         };

@@ -12,21 +12,25 @@ public sealed class RunningState
     private readonly double[] _state;
     private readonly DenseSolver? _factors;
 
-    internal RunningState(
-        Type kind, int points, bool reverse, bool holdsCurrent, double radians, double peakAmps, double[] state, DenseSolver? factors)
+    internal RunningState(Type kind, int points, double radians, double peakAmps, double[] state, DenseSolver? factors)
     {
         Kind = kind;
         Points = points;
-        Reverse = reverse;
-        HoldsCurrent = holdsCurrent;
         Radians = radians;
         PeakAmps = peakAmps;
         _state = state;
         _factors = factors;
     }
 
+    internal RunningState(double radians, double peakAmps, double[] state, PeriodMesh mesh, bool holdsCurrent)
+        : this(typeof(FollowerPeriod), mesh.Count, radians, peakAmps, state, null)
+    {
+        Mesh = mesh;
+        HoldsCurrent = holdsCurrent;
+    }
+
     /// <summary>The same starting point without what makes a solution quicker from it: much smaller, to keep many.</summary>
-    public RunningState Slim() => new(Kind, Points, Reverse, HoldsCurrent, Radians, PeakAmps, _state, null);
+    public RunningState Slim() => Mesh is null ? new(Kind, Points, Radians, PeakAmps, _state, null) : this;
 
     internal Type Kind { get; }
 
@@ -34,9 +38,11 @@ public sealed class RunningState
 
     internal int Unknowns => _state.Length;
 
-    internal bool Reverse { get; }
-
     internal bool HoldsCurrent { get; }
+
+    internal PeriodMesh? Mesh { get; }
+
+    internal ReadOnlySpan<double> State => _state;
 
     internal double Radians { get; }
 

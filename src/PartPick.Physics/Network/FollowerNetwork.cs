@@ -13,7 +13,6 @@ internal readonly struct FollowerNetwork : ILinearNetwork
     private readonly double _groundB;
     private readonly double _groundI;
     private readonly double _emitterSiemens;
-    private readonly double _loadSiemens;
     private readonly double _baseSiemens;
     private readonly double _c1;
     private readonly double _junction;
@@ -26,8 +25,7 @@ internal readonly struct FollowerNetwork : ILinearNetwork
         _groundE = circuit.C2Farads + circuit.Strays.OutputFarads;
         _groundB = circuit.Crystal.ShuntFarads + circuit.Strays.AcrossFarads;
         _groundI = circuit.Transistor.CollectorFarads;
-        _emitterSiemens = 1 / circuit.EmitterOhms;
-        _loadSiemens = 1 / circuit.LoadOhms;
+        _emitterSiemens = 1 / circuit.EmitterOhms + 1 / circuit.LoadOhms;
         _baseSiemens = 1 / circuit.BaseTopOhms + 1 / circuit.BaseBottomOhms;
         _c1 = circuit.C1Farads;
         _junction = circuit.Transistor.JunctionFarads;
@@ -39,10 +37,8 @@ internal readonly struct FollowerNetwork : ILinearNetwork
     /// <summary>Transfer impedances of the ports that the transistor and the crystal see.</summary>
     public FollowerPorts Ports(Complex s)
     {
-        // The load stands behind a large capacitor: it answers to the signal, not to DC.
-        double emitterSiemens = s == Complex.Zero ? _emitterSiemens : _emitterSiemens + _loadSiemens;
         var network = new ThreeNodeNetwork(
-            s * _groundE + emitterSiemens,
+            s * _groundE + _emitterSiemens,
             s * _groundB + _baseSiemens,
             s * _groundI,
             s * _c1,
@@ -55,15 +51,9 @@ internal readonly struct FollowerNetwork : ILinearNetwork
             Own: zBB,
             Junction: zBI - zEB,
             Internal: zBI,
-            Emitter: zEB,
             OwnPerForward: intoEmitter * zEB - fromBase * zBI,
             JunctionPerForward: intoEmitter * (zEI - zEE) - fromBase * (zII - zEI),
-            InternalPerForward: intoEmitter * zEI - fromBase * zII,
-            EmitterPerForward: intoEmitter * zEE - fromBase * zEI,
-            OwnPerReverse: -zEB - zBI,
-            JunctionPerReverse: -(zEI - zEE) - (zII - zEI),
-            InternalPerReverse: -zEI - zII,
-            EmitterPerReverse: -zEE - zEI);
+            OwnPerReverse: -zEB - zBI);
     }
 
     /// <inheritdoc/>
@@ -75,20 +65,14 @@ internal readonly struct FollowerNetwork : ILinearNetwork
 }
 
 /// <summary>
-/// Transfer impedances of a follower's passive network in ohms: of the crystal (own), the base–emitter junction I–E,
-/// the internal base I and the emitter E, per crystal current, per forward transport current F and per reverse current R
-/// (R flows out of both E and I into the collector).
+/// Transfer impedances of a follower's passive network in ohms: of the crystal (own), the base–emitter junction I–E and the
+/// internal base I, per crystal current, per forward transport current F and per reverse current R (R flows out of both E and
+/// I into the collector).
 /// </summary>
 internal readonly record struct FollowerPorts(
     Complex Own,
     Complex Junction,
     Complex Internal,
-    Complex Emitter,
     Complex OwnPerForward,
     Complex JunctionPerForward,
-    Complex InternalPerForward,
-    Complex EmitterPerForward,
-    Complex OwnPerReverse,
-    Complex JunctionPerReverse,
-    Complex InternalPerReverse,
-    Complex EmitterPerReverse);
+    Complex OwnPerReverse);

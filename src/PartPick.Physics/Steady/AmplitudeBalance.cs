@@ -4,15 +4,13 @@ using PartPick.Physics.Numerics;
 namespace PartPick.Physics.Steady;
 
 /// <summary>
-/// The periodic state of a circuit whose motional branch is replaced by a sine current of given amplitude, with all
-/// harmonics: a harmonic balance solved by Newton's method. The derived classes hold the devices.
+/// The forced state of a gate as a harmonic balance solved by Newton's method. The derived classes hold the devices.
 /// </summary>
-internal abstract class AmplitudeBalance
+internal abstract class AmplitudeBalance : ForcedState
 {
     private const int MostSteps = 60;
     private const int MostHalvings = 11;
     private const double LargestLogStep = 0.7;
-    private const double Tolerance = 1e-11;
     private const double RoundingFloor = 1e-9;
     private const double KeepRatio = 0.15;
     private DenseSolver _solver = new();
@@ -22,27 +20,16 @@ internal abstract class AmplitudeBalance
     private double[] _gradient = [];
     private double[] _byLog = [];
     private double[] _trial = [];
-
-    /// <summary>Peak motional current in amperes at which the state was last solved.</summary>
-    public double PeakAmps { get; protected set; }
-
-    /// <summary>Zc(I) = V₁/I in ohms of the last solved state.</summary>
-    public Complex Impedance { get; private set; }
-
-    /// <summary>d Re Zc / d ln I in ohms at the last state solved for a given amplitude.</summary>
-    public double ResistanceSlope { get; private set; }
+    private double[] _remembered = [];
 
     /// <summary>The unknowns of the balance: the state itself, kept between calls as the next starting point.</summary>
     public double[] State { get; protected set; } = [];
 
-    /// <summary>Angular frequency in rad/s.</summary>
-    public double Radians { get; private set; }
-
     /// <summary>Number of unknowns.</summary>
     protected int Count => State.Length;
 
-    /// <summary>Sets the frequency of the crystal's current; the state stays as the next starting point.</summary>
-    public void SetFrequency(double radians)
+    /// <inheritdoc/>
+    public override void SetFrequency(double radians)
     {
         Radians = radians;
         PrepareHarmonics(radians);
@@ -71,41 +58,29 @@ internal abstract class AmplitudeBalance
         return _solver;
     }
 
-    /// <summary>The state as a starting point for a circuit like this one.</summary>
-    public abstract RunningState Keep();
-
-    /// <summary>Puts the state of small signals at an amplitude as the starting point.</summary>
-    public abstract void StartLinear(double peakAmps);
-
-    /// <summary>Largest amplitude in amperes at which the circuit still acts as linear, about.</summary>
-    public abstract double LinearPeakAmps { get; }
-
-    /// <summary>
-    /// Puts a fully limited state as the starting point of a search from large amplitudes down, and returns its amplitude in
-    /// amperes; null where the search goes up from small signals.
-    /// </summary>
-    public virtual double? StartSaturated(double resistanceOhms) => null;
-
-    /// <summary>Notes the frequency that the state gives, too near the one it was solved at to solve it again.</summary>
-    public void CorrectFrequency(double radians) => Radians = radians;
-
-    /// <summary>Solves the periodic state at a given peak current, from the last state.</summary>
-    public bool SolveAt(double peakAmps)
+    /// <inheritdoc/>
+    public override void Remember()
     {
-        PeakAmps = peakAmps;
-        return Newton(null, Tolerance);
+        if (_remembered.Length < Count)
+        {
+            _remembered = new double[Count];
+        }
+
+        State.CopyTo(_remembered, 0);
     }
 
-    /// <summary>Solves state and amplitude together for Re Zc(I) = −Rm, from the last state.</summary>
-    /// <param name="resistanceOhms">Rm in ohms.</param>
-    /// <param name="tolerance">Largest relative residual that is left.</param>
-    public bool SolveRunning(double resistanceOhms, double tolerance = Tolerance) => Newton(resistanceOhms, tolerance);
+    /// <inheritdoc/>
+    public override void Recall() => _remembered.AsSpan(0, Count).CopyTo(State);
 
-    /// <summary>
-    /// Takes one Newton step towards the running state of a circuit that differs little from the one the state was solved for, and
-    /// finds the impedance there; right to the first order of the difference.
-    /// </summary>
-    public bool StepTowardsRunning(double resistanceOhms)
+    /// <inheritdoc/>
+    public override bool SolveAt(double peakAmps)
+    {
+        PeakAmps = peakAmps;
+        return Newton(null, FineTolerance);
+    }
+
+    /// <inheritdoc/>
+    public override bool StepTowardsRunning(double resistanceOhms)
     {
         int n = Count;
         Size(n + 1);
@@ -138,11 +113,11 @@ internal abstract class AmplitudeBalance
         return double.IsFinite(Impedance.Imaginary);
     }
 
-    /// <summary>Output swing in volts peak to peak of the last solved state.</summary>
-    public abstract double OutputSwingVolts();
+    /// <inheritdoc/>
+    public override bool SolveRunning(double resistanceOhms, double tolerance = FineTolerance) => Newton(resistanceOhms, tolerance);
 
-    /// <summary>True where the supply limits the last solved state (collector junction conducting).</summary>
-    public virtual bool LimitedBySupply => false;
+    /// <inheritdoc/>
+    public override bool IsCoarserThan(RunningState near) => Count < near.Unknowns;
 
     /// <summary>Computes what depends on the frequency alone.</summary>
     protected abstract void PrepareHarmonics(double radians);

@@ -1,5 +1,3 @@
-using System.Numerics;
-
 namespace PartPick.Physics.Steady;
 
 /// <summary>
@@ -10,14 +8,21 @@ internal sealed class AmplitudeScan
 {
     private const double LargestRatio = 1.35;
     private const double SmallestRatio = 1.03;
+    private const double RunningTolerance = 1e-5;
+    private const double JumpAgain = 0.7;
+    private const double NearlyRunning = 0.9;
+    private const double SmallerBy = 4;
+    private const double SmallestShare = 1e-4;
+    private const double SmallestLogStep = 1e-3;
+    private const double CrestAccuracy = 1.005;
     private const int MostSteps = 400;
     private const int MostFiner = 3;
     private readonly Refinement _refinement;
     private readonly double _resistance;
     private readonly double _radians;
     private readonly bool _runningOnly;
-    private AmplitudeBalance _balance;
-    private double[] _before = [];
+    private ForcedState _balance;
+    private double _jumpedAt = double.PositiveInfinity;
     private int _finer;
 
     /// <param name="refinement">The circuit's balances.</param>
@@ -35,7 +40,7 @@ internal sealed class AmplitudeScan
     }
 
     /// <summary>The balance solved at the running amplitude; null where there is none.</summary>
-    public AmplitudeBalance? Running { get; private set; }
+    public ForcedState? Running { get; private set; }
 
     /// <summary>Largest −Re Zc in ohms found on the way, between steps by the cubic through values and slopes.</summary>
     public double LargestNegativeOhms { get; private set; } = double.NegativeInfinity;
@@ -62,7 +67,7 @@ internal sealed class AmplitudeScan
         double slope = -_balance.ResistanceSlope;
         while (peak > linear)
         {
-            _before = [.. _balance.State];
+            _balance.Remember();
             if (!_balance.SolveAt(peak / ratio))
             {
                 ratio = Math.Sqrt(ratio);
@@ -71,18 +76,18 @@ internal sealed class AmplitudeScan
                     return true;
                 }
 
-                _before.CopyTo(_balance.State, 0);
+                _balance.Recall();
 
                 continue;
             }
 
             double next = Note();
             double nextSlope = -_balance.ResistanceSlope;
-            (double top, double place) = HermitePeak(next, nextSlope, negative, slope, Math.Log(ratio));
-            LargestNegativeOhms = Math.Max(LargestNegativeOhms, top);
-            if (Running is null && negative <= _resistance && Math.Max(next, top) > _resistance)
+            CubicCrest crest = CubicCrest.Between(next, nextSlope, negative, slope, Math.Log(ratio));
+            Note(crest);
+            if (Running is null && negative <= _resistance && Math.Max(next, crest.Height) > _resistance)
             {
-                AmplitudeBalance scanning = _balance;
+                ForcedState scanning = _balance;
                 _balance = _refinement.From(scanning.Keep())!;
                 if (next > _resistance)
                 {
@@ -90,7 +95,7 @@ internal sealed class AmplitudeScan
                 }
                 else
                 {
-                    FindRunningBeyond(peak / ratio * Math.Pow(ratio, place), peak);
+                    FindRunningBeyond(peak / ratio * Math.Exp(crest.Place), peak);
                 }
 
                 _balance = scanning;
@@ -113,9 +118,9 @@ internal sealed class AmplitudeScan
         return true;
     }
 
-    private AmplitudeBalance Fresh()
+    private ForcedState Fresh()
     {
-        AmplitudeBalance balance = _refinement.Coarse();
+        ForcedState balance = _refinement.Coarse();
         balance.SetFrequency(_radians);
         return balance;
     }
@@ -134,9 +139,19 @@ internal sealed class AmplitudeScan
         double ratio = LargestRatio;
         double negative = Note();
         double slope = -_balance.ResistanceSlope;
-        for (int step = 0; step < MostSteps; step++)
+        if (slope < 0 && negative <= _resistance && negative > NearlyRunning * _resistance && RunSmall(peak))
         {
-            _before = [.. _balance.State];
+            return;
+        }
+
+        for (int step = 0; step < MostSteps && peak < _balance.LargestPeakAmps; step++)
+        {
+            _balance.Remember();
+            if (_balance.FallsForGood && slope < 0 && negative > _resistance && negative < JumpAgain * _jumpedAt && Jump(peak))
+            {
+                return;
+            }
+
             if (!_balance.SolveAt(peak * ratio))
             {
                 if (!StepBack(peak, ref ratio))
@@ -147,45 +162,25 @@ internal sealed class AmplitudeScan
                 continue;
             }
 
-            if (_refinement.IsIncomplete(_balance))
+            double next = -_balance.Impedance.Real;
+            double nextSlope = -_balance.ResistanceSlope;
+            CubicCrest crest = CubicCrest.Between(negative, slope, next, nextSlope, Math.Log(ratio));
+            double higher = Math.Max(negative, next);
+            bool runsBetween = higher <= _resistance && crest.Height > _resistance;
+            if ((runsBetween || crest.Height > CrestAccuracy * higher) && crest.Place > SmallestLogStep)
             {
-                // Back to the last amplitude, where the missing current is still small, and on from there with it.
-                _before.CopyTo(_balance.State, 0);
-                if (!_balance.SolveAt(peak))
-                {
-                    return;
-                }
-
-                _balance = _refinement.Complete(_balance);
-                if (!_balance.SolveAt(peak))
-                {
-                    return;
-                }
-
+                // A sharp crest, or one that alone is above Rm: on to where it should be.
+                _balance.Recall();
+                ratio = Math.Exp(crest.Place);
                 continue;
             }
 
-            double next = -_balance.Impedance.Real;
-            double nextSlope = -_balance.ResistanceSlope;
-            (double top, double place) = HermitePeak(negative, slope, next, nextSlope, Math.Log(ratio));
-            LargestNegativeOhms = Math.Max(LargestNegativeOhms, top);
+            Note(crest);
             Note();
             if (negative > _resistance && next <= _resistance)
             {
                 FindRunning(peak, peak * ratio);
                 return;
-            }
-
-            if (Math.Max(negative, next) <= _resistance && top > _resistance)
-            {
-                double[] above = [.. _balance.State];
-                FindRunningBeyond(peak * Math.Pow(ratio, place), peak * ratio);
-                if (Running is not null)
-                {
-                    return;
-                }
-
-                above.CopyTo(_balance.State, 0);
             }
 
             if (next < 0.5 * LargestNegativeOhms && next < 0.5 * _resistance && nextSlope < 0)
@@ -204,10 +199,42 @@ internal sealed class AmplitudeScan
         }
     }
 
+    // A circuit that only just builds up runs at an amplitude at which it still acts as linear, about.
+    private bool RunSmall(double peak)
+    {
+        _balance.Remember();
+        for (double small = peak / SmallerBy; small > SmallestShare * peak; small /= SmallerBy)
+        {
+            _balance.StartLinear(small);
+            if (_balance.SolveAt(small) && Note() > _resistance)
+            {
+                FindRunning(small, small * SmallerBy);
+                return true;
+            }
+        }
+
+        _balance.Recall();
+        return false;
+    }
+
+    // Straight to the running amplitude from one below it, where −Re Zc falls already.
+    private bool Jump(double peak)
+    {
+        _jumpedAt = -_balance.Impedance.Real;
+        if (_balance.SolveRunning(_resistance, RunningTolerance) && _balance.PeakAmps > peak && _balance.Stays)
+        {
+            Running = _balance;
+            return true;
+        }
+
+        _balance.Recall();
+        return false;
+    }
+
     // Back to the last amplitude for a smaller step; where steps become too small, on with twice the harmonics.
     private bool StepBack(double peak, ref double ratio)
     {
-        _before.CopyTo(_balance.State, 0);
+        _balance.Recall();
         ratio = Math.Sqrt(ratio);
         if (ratio >= SmallestRatio)
         {
@@ -232,6 +259,8 @@ internal sealed class AmplitudeScan
         return negative;
     }
 
+    private void Note(in CubicCrest crest) => LargestNegativeOhms = Math.Max(LargestNegativeOhms, crest.Height);
+
     // The curve rises above Rm only between two steps: from its top on, where it does.
     private void FindRunningBeyond(double top, double above)
     {
@@ -243,14 +272,14 @@ internal sealed class AmplitudeScan
 
     private void FindRunning(double below, double above)
     {
-        double[] upper = [.. _balance.State];
+        _balance.Remember();
         if (_balance.SolveRunning(_resistance) && _balance.PeakAmps > below * 0.999 && _balance.PeakAmps < above * 1.001)
         {
             Running = _balance;
             return;
         }
 
-        upper.CopyTo(_balance.State, 0);
+        _balance.Recall();
         for (int step = 0; step < 60; step++)
         {
             double middle = Math.Sqrt(below * above);
@@ -274,30 +303,5 @@ internal sealed class AmplitudeScan
                 return;
             }
         }
-    }
-
-    // The top of the cubic through both ends, and where it lies between them on 0 … 1; none where it has none inside.
-    private static (double Value, double Place) HermitePeak(double y0, double m0, double y1, double m1, double width)
-    {
-        if (!(m0 > 0 && m1 < 0))
-        {
-            return (double.NegativeInfinity, double.NaN);
-        }
-
-        // Derivative of the cubic on t in 0 … 1: a t² + b t + c = 0.
-        double c = m0 * width;
-        double b = 6 * (y1 - y0) - 4 * m0 * width - 2 * m1 * width;
-        double a = 3 * (m0 + m1) * width - 6 * (y1 - y0);
-        Complex root = Math.Abs(a) < 1e-12 * Math.Abs(b) ? -c / b : (-b - Complex.Sqrt(b * b - 4 * a * c)) / (2 * a);
-        double t = root.Real;
-        if (!(t > 0 && t < 1))
-        {
-            t = m0 / (m0 - m1);
-        }
-
-        double t2 = t * t;
-        double t3 = t2 * t;
-        double value = (2 * t3 - 3 * t2 + 1) * y0 + (t3 - 2 * t2 + t) * width * m0 + (3 * t2 - 2 * t3) * y1 + (t3 - t2) * width * m1;
-        return (value, t);
     }
 }

@@ -59,7 +59,7 @@ internal sealed class BufferedBalance : AmplitudeBalance
 
     /// <inheritdoc/>
     public override RunningState Keep() =>
-        new(typeof(BufferedBalance), Count / 2, false, false, Radians, PeakAmps, [.. State], LendFactors());
+        new(typeof(BufferedBalance), Count / 2, Radians, PeakAmps, [.. State], LendFactors());
 
     /// <inheritdoc/>
     public override void StartLinear(double peakAmps)

@@ -60,7 +60,7 @@ internal sealed class OneStageBalance : AmplitudeBalance
 
     /// <inheritdoc/>
     public override RunningState Keep() =>
-        new(typeof(OneStageBalance), Count, false, false, Radians, PeakAmps, [.. State], LendFactors());
+        new(typeof(OneStageBalance), Count, Radians, PeakAmps, [.. State], LendFactors());
 
     /// <inheritdoc/>
     public override void StartLinear(double peakAmps)

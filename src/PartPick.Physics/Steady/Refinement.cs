@@ -4,17 +4,14 @@ namespace PartPick.Physics.Steady;
 internal abstract class Refinement
 {
     /// <summary>The balance with the fewest harmonics, for the search over amplitude.</summary>
-    public abstract AmplitudeBalance Coarse();
+    public abstract ForcedState Coarse();
 
     /// <summary>The same state with twice the harmonics; null at the finest.</summary>
-    public abstract AmplitudeBalance? Finer(AmplitudeBalance balance);
+    public abstract ForcedState? Finer(ForcedState balance);
 
     /// <summary>A balance of the fineness of a kept state, in that state; null where the state is of another kind of circuit.</summary>
-    public abstract AmplitudeBalance? From(RunningState state);
+    public abstract ForcedState? From(RunningState state);
 
-    /// <summary>Whether the last solution shows a current that the balance leaves out.</summary>
-    public virtual bool IsIncomplete(AmplitudeBalance balance) => false;
-
-    /// <summary>The same state at the same fineness with nothing left out.</summary>
-    public virtual AmplitudeBalance Complete(AmplitudeBalance balance) => balance;
+    /// <summary>Whether the coarsest state is fine enough for figures of circuits alike to be compared.</summary>
+    public virtual bool CoarseIsFollowed => false;
 }

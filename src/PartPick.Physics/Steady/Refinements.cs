@@ -11,12 +11,12 @@ internal sealed class OneStageRefinement(GateNetwork network, SquareLaw law) : R
     private const int FewestPoints = 16;
     private const int MostPoints = 512;
 
-    public override AmplitudeBalance Coarse() => new OneStageBalance(network, law, FewestPoints);
+    public override ForcedState Coarse() => new OneStageBalance(network, law, FewestPoints);
 
-    public override AmplitudeBalance? Finer(AmplitudeBalance balance) =>
-        balance.State.Length < MostPoints ? ((OneStageBalance)balance).Refined() : null;
+    public override ForcedState? Finer(ForcedState balance) =>
+        balance is OneStageBalance { State.Length: < MostPoints } coarse ? coarse.Refined() : null;
 
-    public override AmplitudeBalance? From(RunningState state) =>
+    public override ForcedState? From(RunningState state) =>
         state.Kind == typeof(OneStageBalance) ? state.PutInto(new OneStageBalance(network, law, state.Points)) : null;
 }
 
@@ -26,41 +26,38 @@ internal sealed class BufferedRefinement(GateNetwork network, BufferedInverter i
     private const int FewestHarmonics = 4;
     private const int MostHarmonics = 32;
 
-    public override AmplitudeBalance Coarse() =>
+    public override ForcedState Coarse() =>
         new BufferedBalance(network, inverter.Gain, inverter.Ron, supplyVolts, FewestHarmonics);
 
-    public override AmplitudeBalance? Finer(AmplitudeBalance balance) =>
-        balance.State.Length < 2 * MostHarmonics ? ((BufferedBalance)balance).Refined() : null;
+    public override ForcedState? Finer(ForcedState balance) =>
+        balance is BufferedBalance { State.Length: < 2 * MostHarmonics } coarse ? coarse.Refined() : null;
 
-    public override AmplitudeBalance? From(RunningState state) => state.Kind == typeof(BufferedBalance)
+    public override ForcedState? From(RunningState state) => state.Kind == typeof(BufferedBalance)
         ? state.PutInto(new BufferedBalance(network, inverter.Gain, inverter.Ron, supplyVolts, state.Points))
         : null;
 }
 
-/// <summary>Finenesses of the follower: 32 to 512 points per period, with the collector junction where it conducts.</summary>
+/// <summary>Finenesses of the follower: steps that follow the currents, halved from one fineness to the next.</summary>
 internal sealed class FollowerRefinement(FollowerCircuit circuit, FollowerBias bias) : Refinement
 {
-    private const int FewestPoints = 32;
-    private const int MostPoints = 512;
+    private const int MostSteps = 1000;
 
-    public override AmplitudeBalance Coarse() => new FollowerBalance(circuit, bias, reverse: false, FewestPoints);
+    public override bool CoarseIsFollowed => true;
 
-    public override AmplitudeBalance? Finer(AmplitudeBalance balance)
+    public override ForcedState Coarse() => new FollowerPeriod(circuit, bias);
+
+    public override ForcedState? Finer(ForcedState state) =>
+        state is FollowerPeriod { Steps: < MostSteps } coarse ? coarse.Refined() : null;
+
+    public override ForcedState? From(RunningState state)
     {
-        var follower = (FollowerBalance)balance;
-        return follower.Points < MostPoints ? follower.Refined(follower.Reverse, 2 * follower.Points) : null;
-    }
+        if (state.Mesh is not { } mesh || state.HoldsCurrent != circuit.EmitterCurrentAmps is not null)
+        {
+            return null;
+        }
 
-    public override AmplitudeBalance? From(RunningState state) =>
-        state.Kind == typeof(FollowerBalance) && state.HoldsCurrent == circuit.EmitterCurrentAmps is not null
-            ? state.PutInto(new FollowerBalance(circuit, bias, state.Reverse, state.Points))
-            : null;
-
-    public override bool IsIncomplete(AmplitudeBalance balance) => ((FollowerBalance)balance).NeedsReverse;
-
-    public override AmplitudeBalance Complete(AmplitudeBalance balance)
-    {
-        var follower = (FollowerBalance)balance;
-        return follower.Refined(reverse: true, follower.Points);
+        var period = new FollowerPeriod(circuit, bias);
+        period.TakeState(state, mesh);
+        return period;
     }
 }

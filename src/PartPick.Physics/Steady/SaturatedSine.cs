@@ -13,15 +13,22 @@ internal sealed class SaturatedSine
     private const double StraightWidth = 0.02;
 
     // The tanh's nearest pole is (π/2)·width off the real axis, so N equal steps in half a period leave an error of e^(−π N width):
-    // 1e-11 at 8/width, and 3e-6 at 4/width, enough for the few harmonics of an estimate.
+    // 1e-11 at 8/width, and 3e-10 at 7/width, enough for the few harmonics of an estimate.
     private const double StepsPerWidth = 8;
-    private const double CoarseStepsPerWidth = 4;
+    private const double CoarseStepsPerWidth = 7;
     private const int CoarseHarmonics = 4;
+
+    // Where 1 − tanh x is as small as what the steps leave, and by how much the way there may be longer than along a sine.
+    private const double Saturation = 13;
+    private const double CoarseSaturation = 11;
+    private const double EdgeReserve = 1.3;
     private readonly double _steepness;
     private readonly Complex[] _moments;
     private readonly Complex[] _harmonics;
     private double[] _values = [];
     private Complex[] _roots = [];
+    private int _first;
+    private int _edge;
     private double _crossing;
     private double _width;
     private double _sign;
@@ -155,27 +162,33 @@ internal sealed class SaturatedSine
     private static double Rounding(double x, double exponential) =>
         x < 1e-3 ? 1 - x * x / 6 : 2 * x / (exponential - 1 / exponential);
 
+    // Equal steps over the half period that begins where the edge does: only the edge itself is summed, the flat rest is a
+    // geometric series.
     private void PrepareSteps()
     {
-        double perWidth = Input.Length <= CoarseHarmonics ? CoarseStepsPerWidth : StepsPerWidth;
-        double wanted = Math.Max(perWidth / _width, 4 * Input.Length);
+        bool coarse = Input.Length <= CoarseHarmonics;
+        double wanted = Math.Max((coarse ? CoarseStepsPerWidth : StepsPerWidth) / _width, 4 * Input.Length);
         _roots = UnitRoots.Of(wanted);
         int count = _roots.Length;
-        if (_values.Length < count)
+        int half = Math.Min(count / 2, EdgeSteps(coarse ? CoarseSaturation : Saturation, count));
+        _first = (int)Math.Round(_crossing * count / Math.PI) - half;
+        _edge = 2 * half;
+        if (_values.Length < _edge)
         {
-            _values = new double[count];
+            _values = new double[_edge];
         }
 
         Array.Clear(_moments);
         Array.Clear(_harmonics);
-        for (int j = 0; j < count; j++)
+        double scale = 2.0 / count;
+        for (int j = 0; j < _edge; j++)
         {
-            Complex root = _roots[j];
+            Complex root = UnitRoots.Power(_roots, _first + j);
             double value = Math.Tanh(_steepness * Evaluate(Input, Complex.Conjugate(root), out _));
             _values[j] = value;
             double slope = _steepness * (1 - value * value);
             Complex turn = root * root;
-            Complex power = 2.0 / count;
+            Complex power = scale;
             for (int k = 0; k < _moments.Length; k++)
             {
                 _moments[k] += slope * power;
@@ -187,6 +200,40 @@ internal sealed class SaturatedSine
                 power *= turn;
             }
         }
+
+        for (int k = 0; k < _harmonics.Length; k++)
+        {
+            _harmonics[k] += scale * Flat(2 * k + 1);
+        }
+    }
+
+    // Steps from the crossing to where the tanh is flat: along a sine of this width, and everywhere where the input is none.
+    private int EdgeSteps(double saturation, int count)
+    {
+        double others = 0;
+        for (int h = 1; h < Input.Length; h++)
+        {
+            others += Complex.Abs(Input[h]);
+        }
+
+        double height = saturation * _width;
+        return height > 0.9 || others > 0.2 * Complex.Abs(Input[0])
+            ? count
+            : (int)Math.Ceiling(EdgeReserve * Math.Asin(height) * count / Math.PI) + 1;
+    }
+
+    // The sum of the flat part, ±Σ e^(−jπ n j/N) from the end of the edge to the beginning of the next.
+    private Complex Flat(int n)
+    {
+        int count = _roots.Length;
+        if (_edge == count)
+        {
+            return Complex.Zero;
+        }
+
+        Complex from = UnitRoots.Power(_roots, (long)n * (_first + _edge));
+        Complex to = UnitRoots.Power(_roots, (long)n * (_first + count));
+        return _sign * (from - to) / (1 - UnitRoots.Power(_roots, n));
     }
 
     private Complex Sum(int n)
@@ -199,10 +246,10 @@ internal sealed class SaturatedSine
             return Complex.Zero;
         }
 
-        Complex sum = Complex.Zero;
-        for (int j = 0; j < count; j++)
+        Complex sum = Flat(n);
+        for (int j = 0; j < _edge; j++)
         {
-            sum += _values[j] * Complex.FromPolarCoordinates(1, -n * j * Math.PI / count);
+            sum += _values[j] * UnitRoots.Power(_roots, (long)n * (_first + j));
         }
 
         return sum * (2.0 / count);

@@ -12,10 +12,12 @@ internal static class SteadySolver
     private const double FrequencyAgreement = 3e-8;
     private const double CurrentAgreement = 1e-3;
     private const int FollowedLevel = 1;
-    private const double EstimateTolerance = 1e-7;
+    private const int MostScans = 3;
+    private const int MostSettlings = 12;
+    private const double EstimateTolerance = 1e-5;
     private const double RoughTolerance = 1e-9;
     private const double RoughStep = 1e-7;
-    private const double FineStep = 1e-11;
+    private const double FineStep = 1e-10;
 
     /// <summary>Scans the amplitude and refines the running state.</summary>
     /// <param name="crystal">The crystal.</param>
@@ -26,16 +28,36 @@ internal static class SteadySolver
     /// <param name="state">The state, as a starting point for circuits like this one.</param>
     /// <returns>The steady state, or null where there is none.</returns>
     public static SteadyState? Solve<TNetwork>(
-        Crystal crystal, in TNetwork network, double siemens, Refinement refinement, out double largestNegativeOhms, out RunningState? state)
+        Crystal crystal,
+        in TNetwork network,
+        double siemens,
+        Refinement refinement,
+        out double largestNegativeOhms,
+        out RunningState? state)
         where TNetwork : struct, ILinearNetwork
     {
         var branch = new CrystalBranch(crystal);
-        var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms);
-        largestNegativeOhms = scan.LargestNegativeOhms;
+        double radians = FirstGuess(branch, network, siemens);
         state = null;
-        return scan.Running is { } running && Refine(branch, refinement, running, out state) is { } refined
-            ? Describe(crystal, refined)
-            : null;
+        largestNegativeOhms = double.NegativeInfinity;
+        for (int scans = 0; scans < MostScans; scans++)
+        {
+            var scan = new AmplitudeScan(refinement, radians, crystal.ResistanceOhms);
+            largestNegativeOhms = scan.LargestNegativeOhms;
+            if (scan.Running is not { } running)
+            {
+                return null;
+            }
+
+            // Where −Re Zc turns back near Rm, the amplitude found at one frequency may be none at the next.
+            radians = FrequencyOf(branch, running);
+            if (Refine(branch, refinement, running, out state) is { } refined)
+            {
+                return Describe(crystal, refined);
+            }
+        }
+
+        return null;
     }
 
     /// <summary>
@@ -51,23 +73,30 @@ internal static class SteadySolver
             return null;
         }
 
-        return Follow(crystal, branch, refinement, balance, fineness, out state);
+        RunningFigures? figures = Follow(crystal, branch, refinement, ref balance, fineness, out state);
+        return balance.Stays ? figures : null;
     }
 
     /// <summary>
     /// The same state, sought from nothing and taken to the fineness that following would have had.
     /// </summary>
     public static RunningFigures? Seek<TNetwork>(
-        Crystal crystal, in TNetwork network, double siemens, Refinement refinement, RunningState near, Fineness fineness, out RunningState? state)
+        Crystal crystal,
+        in TNetwork network,
+        double siemens,
+        Refinement refinement,
+        RunningState near,
+        Fineness fineness,
+        out RunningState? state)
         where TNetwork : struct, ILinearNetwork
     {
         state = null;
         var branch = new CrystalBranch(crystal);
         var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms, runningOnly: true);
-        AmplitudeBalance? balance = scan.Running;
-        while (balance is not null && balance.State.Length < near.Unknowns)
+        ForcedState? balance = scan.Running;
+        while (balance is not null && balance.IsCoarserThan(near))
         {
-            AmplitudeBalance? finer = Settle(branch, balance, roughly: true) ? refinement.Finer(balance) : null;
+            ForcedState? finer = Settle(branch, balance, roughly: true) ? refinement.Finer(balance) : null;
             if (finer is null)
             {
                 return null;
@@ -76,7 +105,7 @@ internal static class SteadySolver
             balance = finer;
         }
 
-        return balance is null ? null : Follow(crystal, branch, refinement, balance, fineness, out state);
+        return balance is null ? null : Follow(crystal, branch, refinement, ref balance, fineness, out state);
     }
 
     /// <summary>
@@ -89,8 +118,8 @@ internal static class SteadySolver
     {
         state = null;
         var branch = new CrystalBranch(crystal);
-        AmplitudeBalance? balance = near is null ? null : refinement.From(near);
-        if (balance is null || !balance.SolveRunning(crystal.ResistanceOhms, EstimateTolerance) || refinement.IsIncomplete(balance))
+        ForcedState? balance = near is null ? null : refinement.From(near);
+        if (balance is null || !balance.SolveRunning(crystal.ResistanceOhms, EstimateTolerance) || !balance.Stays)
         {
             var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms, runningOnly: true);
             balance = scan.Running;
@@ -101,7 +130,7 @@ internal static class SteadySolver
             return null;
         }
 
-        double radians = branch.SeriesRadians * (1 + branch.OffsetForReactance(balance.Impedance.Imaginary));
+        double radians = FrequencyOf(branch, balance);
         double rms = balance.PeakAmps / Math.Sqrt(2);
         state = balance.Keep();
         return new SteadyEstimate(radians / (2 * Math.PI), crystal.ResistanceOhms * rms * rms);
@@ -115,12 +144,17 @@ internal static class SteadySolver
     {
         var branch = new CrystalBranch(crystal);
         return refinement.From(near) is { } balance && balance.StepTowardsRunning(crystal.ResistanceOhms)
-            ? branch.SeriesRadians * (1 + branch.OffsetForReactance(balance.Impedance.Imaginary)) / (2 * Math.PI)
+            ? FrequencyOf(branch, balance) / (2 * Math.PI)
             : null;
     }
 
     private static RunningFigures? Follow(
-        Crystal crystal, in CrystalBranch branch, Refinement refinement, AmplitudeBalance balance, Fineness fineness, out RunningState? state)
+        Crystal crystal,
+        in CrystalBranch branch,
+        Refinement refinement,
+        ref ForcedState balance,
+        Fineness fineness,
+        out RunningState? state)
     {
         state = null;
         if (fineness == Fineness.Converged)
@@ -128,15 +162,15 @@ internal static class SteadySolver
             return Refine(branch, refinement, balance, out state) is { } refined ? FiguresOf(crystal, refined) : null;
         }
 
-        if (!Settle(branch, balance, roughly: true) || refinement.IsIncomplete(balance))
+        if (!Settle(branch, balance, roughly: true))
         {
             return null;
         }
 
-        if (fineness == Fineness.OneFiner)
+        if (fineness == Fineness.OneFiner && !refinement.CoarseIsFollowed)
         {
             balance = refinement.Finer(balance) ?? balance;
-            if (!Settle(branch, balance, roughly: true) || refinement.IsIncomplete(balance))
+            if (!Settle(branch, balance, roughly: true))
             {
                 return null;
             }
@@ -146,13 +180,13 @@ internal static class SteadySolver
         return FiguresOf(crystal, balance);
     }
 
-    private static AmplitudeBalance? Refine(
-        in CrystalBranch branch, Refinement refinement, AmplitudeBalance balance, out RunningState? state)
+    private static ForcedState? Refine(
+        in CrystalBranch branch, Refinement refinement, ForcedState balance, out RunningState? state)
     {
         state = null;
         double frequency = double.NaN;
         double current = double.NaN;
-        AmplitudeBalance? coarser = null;
+        ForcedState? coarser = null;
         for (int level = 0; ; level++)
         {
             if (!Settle(branch, balance))
@@ -160,14 +194,7 @@ internal static class SteadySolver
                 return coarser;
             }
 
-            if (refinement.IsIncomplete(balance))
-            {
-                balance = refinement.Complete(balance);
-                level--;
-                continue;
-            }
-
-            if (state is null || (level == FollowedLevel && !state.Reverse))
+            if (state is null || (level == FollowedLevel && !refinement.CoarseIsFollowed))
             {
                 state = balance.Keep();
             }
@@ -175,7 +202,7 @@ internal static class SteadySolver
             bool agrees = Math.Abs(balance.Radians - frequency) < FrequencyAgreement * frequency
                 && Math.Abs(balance.PeakAmps - current) < CurrentAgreement * current;
             (frequency, current) = (balance.Radians, balance.PeakAmps);
-            AmplitudeBalance? finer = agrees ? null : refinement.Finer(balance);
+            ForcedState? finer = agrees ? null : refinement.Finer(balance);
             if (finer is null)
             {
                 return balance;
@@ -202,22 +229,20 @@ internal static class SteadySolver
         return radians;
     }
 
-    // Repeats the running state at the frequency it gives until the frequency stands. The state changes with ω only as fast as
-    // the network does, so what is left is C/Cm times smaller than the last step.
-    private static bool Settle(in CrystalBranch branch, AmplitudeBalance balance, bool roughly = false)
+    // Repeats the running state at the frequency it gives until the frequency stands: loosely first, for the frequency moves it
+    // yet. The state changes with ω only as fast as the network does, so what is left is C/Cm times smaller than the last step.
+    private static bool Settle(in CrystalBranch branch, ForcedState balance, bool roughly = false)
     {
-        for (int step = 0; step < 12; step++)
+        for (int step = 0; step < MostSettlings; step++)
         {
-            bool solved = roughly
-                ? balance.SolveRunning(branch.ResistanceOhms, RoughTolerance)
-                : balance.SolveRunning(branch.ResistanceOhms);
-            if (!solved)
+            double tolerance = step == 0 ? EstimateTolerance : roughly ? RoughTolerance : ForcedState.FineTolerance;
+            if (!balance.SolveRunning(branch.ResistanceOhms, tolerance))
             {
                 return false;
             }
 
-            double radians = branch.SeriesRadians * (1 + branch.OffsetForReactance(balance.Impedance.Imaginary));
-            if (Math.Abs(radians - balance.Radians) < (roughly ? RoughStep : FineStep) * radians)
+            double radians = FrequencyOf(branch, balance);
+            if (step > 0 && Math.Abs(radians - balance.Radians) < (roughly ? RoughStep : FineStep) * radians)
             {
                 balance.CorrectFrequency(radians);
                 return true;
@@ -229,14 +254,17 @@ internal static class SteadySolver
         return true;
     }
 
-    private static RunningFigures FiguresOf(Crystal crystal, AmplitudeBalance balance)
+    private static double FrequencyOf(in CrystalBranch branch, ForcedState state) =>
+        branch.SeriesRadians * (1 + branch.OffsetForReactance(state.Impedance.Imaginary));
+
+    private static RunningFigures FiguresOf(Crystal crystal, ForcedState balance)
     {
         double hertz = balance.Radians / (2 * Math.PI);
         double rms = balance.PeakAmps / Math.Sqrt(2);
         return new RunningFigures(hertz, crystal.LoadAtFrequencyFarads(hertz), rms, crystal.ResistanceOhms * rms * rms);
     }
 
-    private static SteadyState Describe(Crystal crystal, AmplitudeBalance balance)
+    private static SteadyState Describe(Crystal crystal, ForcedState balance)
     {
         RunningFigures figures = FiguresOf(crystal, balance);
         return new SteadyState

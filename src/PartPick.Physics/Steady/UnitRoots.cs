@@ -8,10 +8,24 @@ internal static class UnitRoots
 {
     private const int Quantum = 16;
     private const int MostQuanta = 28;
-    private static readonly ImmutableArray<Complex[]> Tables = [.. Enumerable.Range(1, MostQuanta).Select(quanta => Table(quanta * Quantum))];
+    private static readonly ImmutableArray<Complex[]> Tables =
+        [.. Enumerable.Range(1, MostQuanta).Select(quanta => Table(quanta * Quantum))];
 
     /// <summary>The shortest table of at least so many points, or the longest there is. Not to be written to.</summary>
     public static Complex[] Of(double points) => Tables[(int)Math.Clamp(Math.Ceiling(points / Quantum), 1, MostQuanta) - 1];
 
-    private static Complex[] Table(int points) => [.. Enumerable.Range(0, points).Select(k => Complex.FromPolarCoordinates(1, -Math.PI * k / points))];
+    /// <summary>The k-th power of a table's second entry, for any k.</summary>
+    public static Complex Power(Complex[] table, long k)
+    {
+        long turns = Math.DivRem(k, table.Length, out long place);
+        if (place < 0)
+        {
+            (turns, place) = (turns - 1, place + table.Length);
+        }
+
+        return (turns & 1) == 0 ? table[place] : -table[place];
+    }
+
+    private static Complex[] Table(int points) =>
+        [.. Enumerable.Range(0, points).Select(k => Complex.FromPolarCoordinates(1, -Math.PI * k / points))];
 }

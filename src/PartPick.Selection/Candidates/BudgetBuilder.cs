@@ -50,12 +50,14 @@ public static class BudgetBuilder
         terms.Add(new BudgetTerm("strays", strays, "assumed"));
         if (crystal.MotionalAssumed)
         {
-            terms.Add(new BudgetTerm("motional capacitance", ShiftOf(crystal.Crystal, steady, 1 + CrystalModel.MotionalUncertainty, 1), "assumed"));
+            double shift = ShiftOf(crystal.Crystal, steady, 1 + CrystalModel.MotionalUncertainty, 1);
+            terms.Add(new BudgetTerm("motional capacitance", shift, "assumed"));
         }
 
         if (crystal.ShuntUncertain)
         {
-            terms.Add(new BudgetTerm("shunt capacitance", ShiftOf(crystal.Crystal, steady, 1, 1 - CrystalModel.ShuntUncertainty), "assumed"));
+            double shift = ShiftOf(crystal.Crystal, steady, 1, 1 - CrystalModel.ShuntUncertainty);
+            terms.Add(new BudgetTerm("shunt capacitance", shift, "assumed"));
         }
 
         terms.Add(new BudgetTerm("amplifier and supply", analysis.AmplifierRatio, AmplifierRestsOn(choice.Amplifier)));

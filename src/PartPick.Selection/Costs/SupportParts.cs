@@ -47,8 +47,12 @@ public sealed record SupportParts(ResistorPart? Feedback, CapacitorPart? Decoupl
         return best is not null && Math.Abs(Math.Log(best.ValueOhms / ohms)) <= Math.Log(FeedbackReach) ? best : null;
     }
 
+    // EIA-198: the third letters T, U and V stand for a loss of a third to four fifths over temperature.
+    private static bool HoldsItsValue(CapacitorPart part) => part.Dielectric is not [.., 'T' or 'U' or 'V'];
+
     private static CapacitorPart? Cheapest(Market market, double leastFarads, double mostFarads) => market.Capacitors
         .Where(part => part.ValueFarads >= leastFarads * 0.999 && part.ValueFarads <= mostFarads * 1.001)
+        .Where(HoldsItsValue)
         .OrderBy(part => market.UnitCost(part, 1))
         .ThenBy(part => part.ValueFarads)
         .ThenBy(part => part.Id, StringComparer.Ordinal)

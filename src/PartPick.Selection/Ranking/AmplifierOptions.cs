@@ -28,7 +28,8 @@ internal sealed class AmplifierOptions
 
     /// <summary>
     /// Bias networks of a follower: one base resistor, or a divider of two equal ones, with an emitter resistor; those that put
-    /// the typical transistor's emitter between a tenth and three quarters of the supply at 0.05 to 10 mA.
+    /// the typical transistor's emitter between a tenth and three quarters of the supply at 0.05 to 10 mA. A divider that takes more
+    /// current than the emitter wastes supply and shunts the crystal (common practice).
     /// </summary>
     public ImmutableArray<AmplifierOption> BiasFor(TransistorPart transistor)
     {
@@ -41,6 +42,7 @@ internal sealed class AmplifierOptions
                let amps = EmitterAmps(transistor, emitter, top, bottom)
                let share = amps * emitter.ValueOhms / _requirement.NominalSupplyVolts
                where amps >= SmallestEmitterAmps && amps <= most && share >= LowestEmitterShare && share <= HighestEmitterShare
+               where bottom is null || _requirement.NominalSupplyVolts / (top.ValueOhms + bottom.ValueOhms) <= amps
                select new AmplifierOption(null, top, bottom, emitter),
         ];
     }

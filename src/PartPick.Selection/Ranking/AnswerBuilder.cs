@@ -33,12 +33,7 @@ internal sealed class AnswerBuilder(SearchRun run, RankingOptions options)
                     OnFront = onFront.Contains(point.Id),
                 }),
         ];
-        ImmutableArray<Candidate> nearest = complete && points.Length == 0
-            ? [.. run.NearMisses.Nearest(3 * NearestListed)
-                .Select(_builder.Build).OfType<Candidate>()
-                .OrderBy(Distance).ThenBy(candidate => candidate.Id, StringComparer.Ordinal)
-                .Take(NearestListed)]
-            : [];
+        ImmutableArray<Candidate> nearest = complete && points.Length == 0 ? Nearest() : [];
         return new RankingResult
         {
             Requirement = requirement,
@@ -54,6 +49,16 @@ internal sealed class AnswerBuilder(SearchRun run, RankingOptions options)
             ElapsedSeconds = elapsedSeconds,
         };
     }
+
+    private ImmutableArray<Candidate> Nearest() =>
+    [
+        .. run.NearMisses.Nearest(NearestListed)
+            .Concat(RelaxedSearch.Find(run.Space, NearestListed, run.Cancellation))
+            .DistinctBy(CandidateId.Of)
+            .Select(_builder.Build).OfType<Candidate>()
+            .OrderBy(Distance).ThenBy(candidate => candidate.Id, StringComparer.Ordinal)
+            .Take(NearestListed),
+    ];
 
     private static double Distance(Candidate candidate) => candidate.Misses.Sum(miss => Math.Log(Math.Max(miss.Ratio, 1)));
 

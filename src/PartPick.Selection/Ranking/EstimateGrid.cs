@@ -16,17 +16,26 @@ internal sealed class EstimateGrid
     private const double LoadSlack = 0.015;
     private const double RangeSlack = 0.25;
     private const double AmplifierShare = 0.8;
+
+    // By how much a load outside the window must lie outside for its neighbours to be taken for outside.
+    private const double SideReserve = 1.06;
     private readonly CircuitFamily _family;
     private readonly CircuitTemplate _template;
     private readonly OperatingPoint _nominal;
     private readonly SearchSpace _space;
+    private readonly LoadRange _window;
+    private readonly Dictionary<(int Option, int C1, int C2), int> _sides = [];
     private readonly double[] _values;
     private readonly double[] _options;
     private readonly Dictionary<(int Option, int C1, int C2), Node> _nodes = [];
     private RunningState? _last;
 
-    public EstimateGrid(SearchSpace space, CircuitFamily family)
+    /// <param name="space">What is searched.</param>
+    /// <param name="family">The family.</param>
+    /// <param name="window">Loads at which some crystal of the family may be within the budget.</param>
+    public EstimateGrid(SearchSpace space, CircuitFamily family, LoadRange window)
     {
+        _window = window;
         _space = space;
         _family = family;
         _template = family.Members[0].Template;
@@ -35,8 +44,8 @@ internal sealed class EstimateGrid
         _options = family.IsGate ? Logarithms(family) : [];
     }
 
-    /// <summary>Whether a combination of values is a node of the grid.</summary>
-    public bool IsNode(int option, int c1, int c2) => _nodes.ContainsKey((option, c1, c2));
+    /// <summary>Whether a combination of values has been estimated.</summary>
+    public bool IsEstimated(int option, int c1, int c2) => _nodes.ContainsKey((option, c1, c2));
 
     /// <summary>The places of the nodes along the capacitors.</summary>
     public IEnumerable<int> Values() => Places(_values.Length, Step);
@@ -44,10 +53,35 @@ internal sealed class EstimateGrid
     /// <summary>The places of the nodes along the options.</summary>
     public IEnumerable<int> Options() => Places(_family.Options.Length, _family.IsGate ? Step : 1);
 
+    /// <summary>
+    /// Whether the load of a node is known to be outside the window, from its neighbours: the load grows with C1 and with C2. Nodes
+    /// are asked for with C1 rising and C2 falling.
+    /// </summary>
+    public bool IsOutside(int option, int c1, int c2)
+    {
+        int side = Side(option, Before(c1), c2) > 0 ? 1
+            : Side(option, c1, After(c2)) < 0 ? -1
+            : 0;
+        if (side != 0)
+        {
+            _sides[(option, c1, c2)] = side;
+        }
+
+        return side != 0;
+    }
+
+    /// <summary>Whether the load of any combination is outside the window, from the nodes round it.</summary>
+    public bool LiesOutside(int option, int c1, int c2)
+    {
+        (int lowC1, int highC1, _) = Bracket(_values, c1, Step);
+        (int lowC2, int highC2, _) = Bracket(_values, c2, Step);
+        (int low, int high, _) = _family.IsGate ? Bracket(_options, option, Step) : (option, option, 0);
+        return (Side(low, lowC1, lowC2) > 0 && Side(high, lowC1, lowC2) > 0)
+            || (Side(low, highC1, highC2) < 0 && Side(high, highC1, highC2) < 0);
+    }
+
     /// <summary>The estimate of one combination of values; null where there is no steady state.</summary>
-    public Estimate? At(int option, int c1, int c2, double margin) => Find(option, c1, c2) is { Estimate: { } estimate }
-        ? estimate with { Margin = margin }
-        : null;
+    public Estimate? At(int option, int c1, int c2) => Find(option, c1, c2).Estimate;
 
     /// <summary>The bounds between which the load of a combination lies, from the nodes round it.</summary>
     public LoadRange Range(int option, int c1, int c2)
@@ -83,7 +117,7 @@ internal sealed class EstimateGrid
                 return 0;
             }
 
-            least = Math.Min(least, node.AmplifierRatio ??= FindAmplifierRatio(node.Estimate!));
+            least = Math.Min(least, node.AmplifierRatio ??= FindAmplifierRatio(node));
         }
 
         return AmplifierShare * least;
@@ -105,6 +139,12 @@ internal sealed class EstimateGrid
             }
         }
     }
+
+    private int Side(int option, int c1, int c2) => _sides.GetValueOrDefault((option, c1, c2));
+
+    private static int Before(int place) => (place - 1) / Step * Step - (place == 0 ? Step : 0);
+
+    private int After(int place) => Math.Min(place + Step, _values.Length - 1) is var next && next > place ? next : int.MaxValue;
 
     private static IEnumerable<int> Places(int count, int step)
     {
@@ -152,30 +192,49 @@ internal sealed class EstimateGrid
         if (!_nodes.TryGetValue((option, c1, c2), out Node? node))
         {
             CircuitValues values = _family.Options[option].With(_space.Capacitors[c1].Farads, _space.Capacitors[c2].Farads);
-            node = new Node();
-            if (OscillatorAnalysis.EstimateSteadyState(_template.At(values, _nominal), _last, out RunningState? state) is { } estimate && state is not null)
+            node = new Node(values);
+            RunningState? near = Near(option, c1, c2) ?? _last;
+            OscillatorCircuit circuit = _template.At(values, _nominal);
+            if (OscillatorAnalysis.EstimateSteadyState(circuit, near, out RunningState? state) is { } estimate && state is not null)
             {
                 _last = state;
                 double load = _template.Crystal.Crystal.LoadAtFrequencyFarads(estimate.FrequencyHz);
                 node.Share = load / StaticLoad(c1, c2);
-                node.Estimate = new Estimate(option, c1, c2, 0, load, estimate, state.Slim());
+                node.Estimate = new Estimate(load, estimate.DriveWatts, state.Slim());
             }
 
             _nodes.Add((option, c1, c2), node);
+            if (node.Estimate is { LoadFarads: var farads })
+            {
+                _sides[(option, c1, c2)] = farads > _window.Highest * SideReserve ? 1 : farads < _window.Lowest / SideReserve ? -1 : 0;
+            }
         }
 
         return node;
     }
 
-    private double FindAmplifierRatio(Estimate estimate)
+    // The state of the nearest node that is known.
+    private RunningState? Near(int option, int c1, int c2)
     {
-        CircuitValues values = _family.Options[estimate.Option].With(_space.Capacitors[estimate.C1].Farads, _space.Capacitors[estimate.C2].Farads);
+        int o = _family.IsGate ? option / Step * Step : option;
+        int i = c1 / Step * Step;
+        int j = c2 / Step * Step;
+        return Known(o, i, j) ?? Known(o, i, j - Step) ?? Known(o, i - Step, j) ?? Known(o - Step, i, j);
+
+        RunningState? Known(int atOption, int atC1, int atC2) =>
+            _nodes.TryGetValue((atOption, atC1, atC2), out Node? node) ? node.Estimate?.State : null;
+    }
+
+    private double FindAmplifierRatio(Node node)
+    {
+        Estimate estimate = node.Estimate!;
+        double hertz = _template.Crystal.Crystal.FrequencyAtLoadHz(estimate.LoadFarads);
         double most = 0;
         foreach (OperatingPoint point in new[] { _template.AmplifierCorners[0], _template.AmplifierCorners[^1] })
         {
-            if (OscillatorAnalysis.EstimateSteadyState(_template.At(values, point), estimate.State, out _) is { } there)
+            if (OscillatorAnalysis.EstimateSteadyState(_template.At(node.Values, point), estimate.State, out _) is { } there)
             {
-                most = Math.Max(most, Math.Abs(there.FrequencyHz / estimate.Steady.FrequencyHz - 1));
+                most = Math.Max(most, Math.Abs(there.FrequencyHz / hertz - 1));
             }
         }
 
@@ -199,8 +258,10 @@ internal sealed class EstimateGrid
         return a * b / (a + b) + across;
     }
 
-    private sealed class Node
+    private sealed class Node(CircuitValues values)
     {
+        public CircuitValues Values => values;
+
         public Estimate? Estimate { get; set; }
 
         public double Share { get; set; }

@@ -15,6 +15,9 @@ internal sealed class FamilyMember
     /// <summary>Circuit, crystal and amplifier on the board.</summary>
     public required CircuitTemplate Template { get; init; }
 
+    /// <summary>By how much estimates of its circuits may be off.</summary>
+    public required EstimateQuality Quality { get; init; }
+
     /// <summary>Divider stage.</summary>
     public required int Tap { get; init; }
 

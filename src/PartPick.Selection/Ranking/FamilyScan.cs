@@ -8,20 +8,17 @@ namespace PartPick.Selection.Search;
 /// </summary>
 internal sealed class FamilyScan
 {
-    /// <summary>Share of the pull from series resonance by which an estimate may be off.</summary>
-    private const double EstimateShare = 0.02;
-
-    /// <summary>What else an estimate may be off, as a ratio.</summary>
-    private const double EstimateFloor = 0.5e-6;
     private const double MarginSlack = 0.98;
 
     // Between the wanted frequency and that of the natural mode the negative resistance changes by far less than this.
     private const double ScreenSlack = 0.99;
+
+    // A margin just below one at nominal capacitances may be above it at others.
+    private const double DisturbedBelow = 1.05;
     private readonly SearchRun _run;
     private readonly SearchSpace _space;
     private readonly CircuitFamily _family;
     private readonly CircuitTemplate _template;
-    private readonly EstimateGrid _grid;
     private readonly Requirement _requirement;
     private readonly double _wanted;
     private readonly double _screenHz;
@@ -33,10 +30,13 @@ internal sealed class FamilyScan
         _family = family;
         _template = family.Members[0].Template;
         _requirement = _space.Requirement;
-        _grid = new EstimateGrid(_space, family);
-        _wanted = _requirement.AllowDisturbance ? double.NegativeInfinity : _requirement.Margin * MarginSlack;
+        Grid = new EstimateGrid(_space, family, Window());
+        _wanted = _requirement.Margin * MarginSlack;
         _screenHz = family.Members[0].Crystal.FrequencyHz;
     }
+
+    /// <summary>The estimates made so far.</summary>
+    public EstimateGrid Grid { get; }
 
     /// <summary>Combinations (of parts, for one crystal) that the margin removed.</summary>
     public double MarginRejections { get; private set; }
@@ -44,39 +44,28 @@ internal sealed class FamilyScan
     /// <summary>Combinations (of parts, for one crystal) that the frequency error removed for every crystal.</summary>
     public double ErrorRejections { get; private set; }
 
-    /// <summary>Largest relative error of an estimated frequency.</summary>
-    public static double EstimateError(Crystal crystal, double frequencyHz) =>
-        EstimateShare * Math.Abs(frequencyHz / crystal.SeriesHz - 1) + EstimateFloor;
-
     /// <summary>
-    /// Estimates of a few combinations spread over the whole, for good answers early: against them the rest can be left out sooner.
+    /// A few combinations spread over the whole, for good answers early: against them the rest can be left out sooner.
     /// </summary>
-    public List<Estimate> Sparse()
+    public List<Spot> Sparse()
     {
-        var found = new List<Estimate>();
-        foreach (int i in _grid.Values())
+        var found = new List<Spot>();
+        foreach (int i in Grid.Values())
         {
-            foreach (int j in _grid.Values())
+            foreach (int j in Grid.Values().Reverse())
             {
                 _run.Cancellation.ThrowIfCancellationRequested();
-                foreach (int option in _grid.Options())
-                {
-                    if (Screen(option, i, j) >= _wanted * ScreenSlack && WorstMargin(option, i, j) is var margin && margin >= _wanted
-                        && _grid.At(option, i, j, margin) is { } estimate)
-                    {
-                        found.Add(estimate);
-                    }
-                }
+                found.AddRange(Grid.Options().Select(option => AtNode(option, i, j)).OfType<Spot>());
             }
         }
 
         return found;
     }
 
-    /// <summary>Estimates of everything else that could still change the answer.</summary>
-    public List<Estimate> Rest()
+    /// <summary>Everything else that could still change the answer.</summary>
+    public List<Spot> Rest()
     {
-        var found = new List<Estimate>();
+        var found = new List<Spot>();
         for (int i = 0; i < _space.Capacitors.Length; i++)
         {
             for (int j = 0; j < _space.Capacitors.Length; j++)
@@ -89,7 +78,20 @@ internal sealed class FamilyScan
         return found;
     }
 
-    private void ScanPair(int i, int j, List<Estimate> found)
+    private Spot? AtNode(int option, int i, int j)
+    {
+        if (Grid.IsOutside(option, i, j) || Screen(option, i, j) < _wanted * ScreenSlack)
+        {
+            return null;
+        }
+
+        double margin = WorstMargin(option, i, j);
+        return margin >= _wanted && Grid.At(option, i, j) is { } estimate
+            ? new Spot(option, i, j, margin, new LoadRange(estimate.LoadFarads, estimate.LoadFarads), 0)
+            : null;
+    }
+
+    private void ScanPair(int i, int j, List<Spot> found)
     {
         double weight = (double)_space.Capacitors[i].Parts * _space.Capacitors[j].Parts;
         double before = double.NegativeInfinity;
@@ -98,7 +100,7 @@ internal sealed class FamilyScan
             double screened = Screen(option, i, j);
             if (screened < _wanted * ScreenSlack)
             {
-                if (_family.IsGate && screened < before)
+                if (_family.IsGate && !_requirement.AllowDisturbance && screened < before)
                 {
                     // At one corner the margin rises, if at all, and then falls along Rs: nothing beyond has it.
                     MarginRejections += weight * (_family.Options.Length - option);
@@ -111,18 +113,24 @@ internal sealed class FamilyScan
             }
 
             before = screened;
-            if (_grid.IsNode(option, i, j))
+            if (Grid.IsEstimated(option, i, j))
             {
                 continue;
             }
 
-            LoadRange range = _grid.Range(option, i, j);
+            if (Grid.LiesOutside(option, i, j))
+            {
+                ErrorRejections += weight;
+                continue;
+            }
+
+            LoadRange range = Grid.Range(option, i, j);
             if (!MayMatter(option, i, j, range, 0, screened / ScreenSlack, weight))
             {
                 continue;
             }
 
-            double amplifier = range == LoadRange.Any ? 0 : _grid.LeastAmplifierRatio(option, i, j);
+            double amplifier = range == LoadRange.Any ? 0 : Grid.LeastAmplifierRatio(option, i, j);
             if (!MayMatter(option, i, j, range, amplifier, screened / ScreenSlack, weight))
             {
                 continue;
@@ -135,36 +143,26 @@ internal sealed class FamilyScan
             }
             else if (MayMatter(option, i, j, range, amplifier, margin, weight))
             {
-                if (_grid.At(option, i, j, margin) is { } estimate)
-                {
-                    found.Add(estimate with { LeastAmplifierRatio = amplifier });
-                }
-                else
-                {
-                    ErrorRejections += weight;
-                }
+                found.Add(new Spot(option, i, j, margin, range, amplifier));
             }
         }
     }
 
     // The margin of the weakest device at the lowest supply at the crystal's nominal frequency: the worst one is no better.
-    private double Screen(int option, int i, int j) => _requirement.AllowDisturbance
-        ? double.PositiveInfinity
-        : OscillatorAnalysis.FindMarginAt(_template.At(Values(option, i, j), _template.AmplifierCorners[0]), _screenHz);
+    private double Screen(int option, int i, int j) =>
+        Bound(OscillatorAnalysis.FindMarginAt(_template.At(Values(option, i, j), _template.AmplifierCorners[0]), _screenHz));
+
+    // Where a disturbance may start it, a corner that does not build up counts with its running margin, which nothing bounds yet.
+    private double Bound(double margin) =>
+        _requirement.AllowDisturbance && margin < DisturbedBelow ? double.PositiveInfinity : margin;
 
     // Whether a combination could still change the answer for some crystal.
     private bool MayMatter(int option, int i, int j, in LoadRange range, double amplifierRatio, double margin, double weight)
     {
-        Crystal crystal = _template.Crystal.Crystal;
-        double least = amplifierRatio;
-        if (double.IsFinite(range.Highest))
-        {
-            LeastTerms terms = LeastTerms.OfValues(_requirement.Board, _family.IsGate, crystal, Values(option, i, j), range.Highest);
-            least += terms.Ratio(_run.Prices.LeastSpread(i), _run.Prices.LeastSpread(j));
-        }
-
+        LeastTerms terms = LeastTerms.OfLoad(_requirement.Board, _family, _template.Crystal.Crystal, Values(option, i, j), range);
+        double least = amplifierRatio + terms.Ratio(_run.Prices.LeastSpread(i), _run.Prices.LeastSpread(j));
         decimal cost = _family.OptionCosts[option] + _run.Prices.CheapestPair(i, j);
-        double bound = _requirement.AllowDisturbance ? double.PositiveInfinity : margin * MemberSearch.MarginSlack;
+        double bound = margin * MemberSearch.MarginSlack;
         bool within = false;
         foreach (FamilyMember member in _family.Members)
         {
@@ -187,14 +185,36 @@ internal sealed class FamilyScan
         return false;
     }
 
-    // Crystals of one family differ in rated load, and so in the frequency that a load gives.
-    private static double LeastCentre(FamilyMember member, in LoadRange range)
+    // Loads at which some crystal of the family is within the budget.
+    private LoadRange Window()
+    {
+        double lowest = double.PositiveInfinity;
+        double highest = 0;
+        foreach (FamilyMember member in _family.Members)
+        {
+            double room = _requirement.BudgetRatio - member.TermsRatio;
+            lowest = Math.Min(lowest, Load(member, member.TargetHz * (1 + room)));
+            highest = Math.Max(highest, Load(member, member.TargetHz * (1 - room)));
+        }
+
+        return new LoadRange(lowest, highest);
+
+        static double Load(FamilyMember member, double hertz) => hertz <= member.Model.Crystal.SeriesHz
+            ? double.PositiveInfinity
+            : Math.Max(0, member.Model.Crystal.LoadAtFrequencyFarads(hertz));
+    }
+
+    /// <summary>
+    /// Least distance from the target, as a ratio, of a crystal's frequency at a load between bounds. Crystals of one family differ
+    /// in rated load, and so in the frequency that a load gives.
+    /// </summary>
+    public static double LeastCentre(FamilyMember member, in LoadRange range)
     {
         Crystal crystal = member.Model.Crystal;
         double slowest = crystal.FrequencyAtLoadHz(range.Highest);
         double fastest = crystal.FrequencyAtLoadHz(range.Lowest);
         double off = Math.Max(slowest / member.TargetHz - 1, 1 - fastest / member.TargetHz);
-        return Math.Max(0, off - EstimateError(crystal, fastest));
+        return Math.Max(0, off - member.Quality.ErrorRatio(crystal, fastest));
     }
 
     private double WorstMargin(int option, int i, int j)
@@ -203,7 +223,8 @@ internal sealed class FamilyScan
         CircuitValues values = Values(option, i, j);
         for (int corner = 0; corner < _template.AmplifierCorners.Length && least >= _wanted; corner++)
         {
-            least = Math.Min(least, OscillatorAnalysis.FindStartFigures(_template.At(values, _template.AmplifierCorners[corner])).Margin);
+            double margin = OscillatorAnalysis.FindStartFigures(_template.At(values, _template.AmplifierCorners[corner])).Margin;
+            least = Math.Min(least, Bound(margin));
         }
 
         return least;

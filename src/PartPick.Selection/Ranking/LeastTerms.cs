@@ -37,6 +37,15 @@ internal readonly struct LeastTerms
         return Of(board, gate, values, perFarad * firstShare, perFarad * secondShare, perFarad);
     }
 
+    /// <summary>From the values alone, for a load between bounds; nothing where it is not bounded.</summary>
+    /// <param name="board">The board's strays.</param>
+    /// <param name="family">The family.</param>
+    /// <param name="crystal">The crystal.</param>
+    /// <param name="values">Nominal values.</param>
+    /// <param name="load">The bounds.</param>
+    public static LeastTerms OfLoad(Board board, CircuitFamily family, Crystal crystal, in CircuitValues values, in LoadRange load) =>
+        double.IsFinite(load.Highest) ? OfValues(board, family.IsGate, crystal, values, load.Highest) : default;
+
     /// <summary>From slopes of the frequency that are right to the first order.</summary>
     /// <param name="board">The board's strays.</param>
     /// <param name="gate">Whether a stray stands beside C1, as in all circuits but a follower.</param>

@@ -28,34 +28,45 @@ internal sealed class MemberSearch
         _misses = new Misses(run, family, member);
     }
 
-    /// <summary>Looks into every estimate of the family's first look.</summary>
-    public void Run(IReadOnlyList<Estimate> estimates)
+    /// <summary>Looks into what the family's first look left.</summary>
+    public void Run(IReadOnlyList<Spot> spots, EstimateGrid grid)
     {
         var prospects = new List<(double Score, Prospect Prospect)>();
         decimal scale = _run.Leaders.Cheapest ?? _run.Floor;
-        foreach (Estimate estimate in estimates)
+        foreach (Spot spot in spots)
         {
-            if (Prospective(estimate) is { } prospect)
+            if (Prospective(spot) is { } prospect)
             {
-                prospects.Add((prospect.Pairs.Min(pair => Score.Of(_requirement, pair.ErrorRatio, pair.Margin, pair.Cost, scale)), prospect));
+                double score = prospect.Pairs.Min(pair => Score.Of(_requirement, pair.ErrorRatio, pair.Margin, pair.Cost, scale));
+                prospects.Add((score, prospect));
             }
         }
 
         foreach ((_, Prospect prospect) in prospects
             .OrderBy(entry => entry.Score)
-            .ThenBy(entry => entry.Prospect.Estimate.Option)
-            .ThenBy(entry => entry.Prospect.Estimate.C1)
-            .ThenBy(entry => entry.Prospect.Estimate.C2))
+            .ThenBy(entry => entry.Prospect.Spot.Option)
+            .ThenBy(entry => entry.Prospect.Spot.C1)
+            .ThenBy(entry => entry.Prospect.Spot.C2))
         {
             _run.Cancellation.ThrowIfCancellationRequested();
             prospect.Pairs.RemoveAll(pair => !_run.MayEnter(_member, pair.ErrorRatio, pair.Margin, pair.Cost));
             if (prospect.Pairs.Count > 0)
             {
-                new ProspectAnalysis(_run, _family, _member, prospect, _misses).Run();
+                new ProspectAnalysis(_run, _family, _member, prospect, _misses).Run(grid);
             }
 
             _run.Report();
         }
+    }
+
+    /// <summary>What crystal and load at least make of the error, as a ratio.</summary>
+    public static double LeastRatio(FamilyMember member, in LoadRange load)
+    {
+        Crystal crystal = member.Model.Crystal;
+        double slowest = crystal.FrequencyAtLoadHz(load.Highest);
+        double fastest = crystal.FrequencyAtLoadHz(load.Lowest);
+        double nearest = Math.Clamp(member.Crystal.FrequencyHz, slowest, fastest);
+        return member.TermsRatio + FamilyScan.LeastCentre(member, load) + AssumedShift(member, nearest);
     }
 
     /// <summary>A shift of the frequency that an assumed motional capacitance at least makes, as a ratio.</summary>
@@ -67,42 +78,38 @@ internal sealed class MemberSearch
         }
 
         double shift = Math.Abs(frequencyHz / member.Crystal.FrequencyHz - 1);
-        double slack = FamilyScan.EstimateError(member.Model.Crystal, frequencyHz);
+        double slack = member.Quality.ErrorRatio(member.Model.Crystal, frequencyHz);
         return 0.9 * CrystalModel.MotionalUncertainty * Math.Max(0, shift - slack);
     }
 
     // What a combination could reach at best: an error, a margin and a cost that the full analysis can only worsen. Null where
     // even that breaks a limit, or can no longer change the answer.
-    private Prospect? Prospective(Estimate estimate)
+    private Prospect? Prospective(Spot spot)
     {
-        Crystal crystal = _member.Model.Crystal;
-        CapacitorValue c1 = _run.Space.Capacitors[estimate.C1];
-        CapacitorValue c2 = _run.Space.Capacitors[estimate.C2];
-        double frequency = crystal.FrequencyAtLoadHz(estimate.LoadFarads);
-        double slack = FamilyScan.EstimateError(crystal, frequency);
-        double centre = Math.Max(0, Math.Abs(frequency / _member.TargetHz - 1) - slack);
-        CircuitValues values = _family.Options[estimate.Option].With(c1.Farads, c2.Farads);
-        LeastTerms terms = LeastTerms.OfValues(_requirement.Board, _family.IsGate, crystal, values, estimate.LoadFarads);
-        double common = _member.TermsRatio + centre + AssumedShift(_member, frequency) + estimate.LeastAmplifierRatio;
-        double error = common + terms.Ratio(_run.Prices.LeastSpread(estimate.C1), _run.Prices.LeastSpread(estimate.C2));
-        double margin = _requirement.AllowDisturbance ? double.PositiveInfinity : estimate.Margin * MarginSlack;
-        decimal option = _member.BaseCost + _family.OptionCosts[estimate.Option];
-        decimal cost = option + _run.Prices.CheapestPair(estimate.C1, estimate.C2);
-        if (_misses.Breaks(estimate, error, cost) || !_run.MayEnter(_member, error, margin, cost))
+        double margin = spot.Margin * MarginSlack;
+        LeastTerms terms = LeastTerms.OfLoad(_requirement.Board, _family, _member.Model.Crystal, Values(spot), spot.Load);
+        double common = LeastRatio(_member, spot.Load) + spot.AmplifierRatio;
+        double error = common + terms.Ratio(_run.Prices.LeastSpread(spot.C1), _run.Prices.LeastSpread(spot.C2));
+        decimal option = _member.BaseCost + _family.OptionCosts[spot.Option];
+        decimal cost = option + _run.Prices.CheapestPair(spot.C1, spot.C2);
+        if (_misses.Breaks(spot, error, cost) || !_run.MayEnter(_member, error, margin, cost))
         {
             return null;
         }
 
-        List<CapacitorPair> pairs = Pairs(estimate, common, margin, option, terms);
-        return pairs.Count > 0 ? new Prospect(estimate, pairs) : null;
+        List<CapacitorPair> pairs = Pairs(spot, common, margin, option, terms);
+        return pairs.Count > 0 ? new Prospect(spot, pairs) : null;
     }
 
-    private List<CapacitorPair> Pairs(Estimate estimate, double commonRatio, double margin, decimal optionCost, in LeastTerms terms)
+    private CircuitValues Values(Spot spot) =>
+        _family.Options[spot.Option].With(_run.Space.Capacitors[spot.C1].Farads, _run.Space.Capacitors[spot.C2].Farads);
+
+    private List<CapacitorPair> Pairs(Spot spot, double commonRatio, double margin, decimal optionCost, in LeastTerms terms)
     {
         var pairs = new List<CapacitorPair>();
-        foreach (Contender first in _run.Space.Capacitors[estimate.C1].Contenders)
+        foreach (Contender first in _run.Space.Capacitors[spot.C1].Contenders)
         {
-            foreach (Contender second in _run.Space.Capacitors[estimate.C2].Contenders)
+            foreach (Contender second in _run.Space.Capacitors[spot.C2].Contenders)
             {
                 var pair = new CapacitorPair
                 {
@@ -112,7 +119,7 @@ internal sealed class MemberSearch
                     ErrorRatio = commonRatio + terms.Ratio(first.Spread(_reach), second.Spread(_reach)),
                     Margin = margin,
                 };
-                if (!_misses.Breaks(estimate, pair) && _run.MayEnter(_member, pair.ErrorRatio, margin, pair.Cost))
+                if (!_misses.Breaks(spot, pair) && _run.MayEnter(_member, pair.ErrorRatio, margin, pair.Cost))
                 {
                     pairs.Add(pair);
                 }

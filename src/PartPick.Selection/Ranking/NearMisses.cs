@@ -23,7 +23,14 @@ internal sealed class NearMisses
     {
         lock (_gate)
         {
-            return [.. _best.Values.OrderBy(entry => entry.Penalty).ThenBy(entry => CandidateId.Of(entry.Choice), StringComparer.Ordinal).Take(count).Select(entry => entry.Choice)];
+            return
+            [
+                .. _best.Values
+                    .OrderBy(entry => entry.Penalty)
+                    .ThenBy(entry => CandidateId.Of(entry.Choice), StringComparer.Ordinal)
+                    .Take(count)
+                    .Select(entry => entry.Choice),
+            ];
         }
     }
 }

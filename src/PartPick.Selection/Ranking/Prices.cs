@@ -20,7 +20,8 @@ internal sealed class Prices
         {
             for (int j = 0; j < count; j++)
             {
-                _cheapestPair[i, j] = space.Capacitors[i].Contenders.Min(first => space.Capacitors[j].Contenders.Min(second => Pair(first, second)));
+                CapacitorValue others = space.Capacitors[j];
+                _cheapestPair[i, j] = space.Capacitors[i].Contenders.Min(first => others.Contenders.Min(second => Pair(first, second)));
             }
         }
     }

@@ -1,9 +1,9 @@
 namespace PartPick.Selection.Search;
 
 /// <summary>A combination of values that may still change the answer, and the choices of parts in it that may.</summary>
-/// <param name="Estimate">What the first look found.</param>
+/// <param name="Spot">What the first look knows of it.</param>
 /// <param name="Pairs">The choices of its load capacitors.</param>
-internal sealed record Prospect(Estimate Estimate, List<CapacitorPair> Pairs);
+internal sealed record Prospect(Spot Spot, List<CapacitorPair> Pairs);
 
 /// <summary>A choice of two load capacitors and what is known of it so far: each figure is exact, or the best it could be.</summary>
 internal sealed class CapacitorPair

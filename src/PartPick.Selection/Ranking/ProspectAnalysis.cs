@@ -14,7 +14,7 @@ internal sealed class ProspectAnalysis
     private readonly SearchRun _run;
     private readonly CircuitFamily _family;
     private readonly FamilyMember _member;
-    private readonly Estimate _estimate;
+    private readonly Spot _spot;
     private readonly List<CapacitorPair> _pairs;
     private readonly Misses _misses;
     private readonly Requirement _requirement;
@@ -27,31 +27,43 @@ internal sealed class ProspectAnalysis
         _run = run;
         _family = family;
         _member = member;
-        _estimate = prospect.Estimate;
+        _spot = prospect.Spot;
         _pairs = prospect.Pairs;
         _misses = misses;
         _requirement = run.Space.Requirement;
         _reach = BudgetBuilder.TemperatureReach(_requirement);
-        _values = family.Options[_estimate.Option].With(
-            run.Space.Capacitors[_estimate.C1].Farads, run.Space.Capacitors[_estimate.C2].Farads);
+        _values = family.Options[_spot.Option].With(
+            run.Space.Capacitors[_spot.C1].Farads, run.Space.Capacitors[_spot.C2].Farads);
     }
 
     /// <summary>Analyses, and adds what is fit to the run.</summary>
-    public void Run()
+    public void Run(EstimateGrid grid)
     {
-        // With a disturbance allowed a margin may take a full analysis at every corner, so it comes last.
-        if (!_requirement.AllowDisturbance && !Left(Margins))
+        if (grid.At(_spot.Option, _spot.C1, _spot.C2) is not { } estimate)
         {
+            Reject(Limit.Error);
             return;
         }
 
-        if (!Left(Stock))
+        if (estimate.DriveWatts * (1 - _member.Quality.DriveShare) > _member.Crystal.DriveLevelWatts)
+        {
+            Reject(Limit.Drive);
+            return;
+        }
+
+        // With a disturbance allowed a margin may take a full analysis at every corner, so it comes last.
+        var load = new LoadRange(estimate.LoadFarads, estimate.LoadFarads);
+        LeastTerms terms = LeastTerms.OfLoad(_requirement.Board, _family, _member.Model.Crystal, _values, load);
+        double least = MemberSearch.LeastRatio(_member, load) + _spot.AmplifierRatio;
+        if (!Left(pair => MayReach(pair, least + terms.Ratio(pair.C1.Spread(_reach), pair.C2.Spread(_reach))))
+            || (!_requirement.AllowDisturbance && !Left(Margins))
+            || !Left(Stock))
         {
             return;
         }
 
         _run.Tally.CountAnalysed();
-        var analysis = new ValueAnalysis(_member.Template, _requirement, _values, _estimate.State);
+        var analysis = new ValueAnalysis(_member.Template, _requirement, _values, estimate.State);
         if (analysis.Base is not { } nominal)
         {
             Reject(Limit.Error);
@@ -97,7 +109,7 @@ internal sealed class ProspectAnalysis
     }
 
     private bool Stock(CapacitorPair pair) => Holds(
-        pair, BillOfParts.FirstShortage(_misses.Choice(_estimate, pair), _family.Support, _run.Space.Market) is null, Limit.Stock);
+        pair, BillOfParts.FirstShortage(_misses.Choice(_spot, pair), _family.Support, _run.Space.Market) is null, Limit.Stock);
 
     private bool Margins(CapacitorPair pair)
     {
@@ -115,7 +127,12 @@ internal sealed class ProspectAnalysis
             + MemberSearch.AssumedShift(_member, nominal.FrequencyHz)
             + terms.Ratio(pair.C1.Spread(_reach), pair.C2.Spread(_reach))
             + amplifierRatio;
-        pair.ErrorRatio = Math.Max(pair.ErrorRatio, least);
+        return MayReach(pair, least);
+    }
+
+    private bool MayReach(CapacitorPair pair, double leastRatio)
+    {
+        pair.ErrorRatio = Math.Max(pair.ErrorRatio, leastRatio);
         return WithinBudget(pair) && MayEnter(pair);
     }
 
@@ -126,7 +143,7 @@ internal sealed class ProspectAnalysis
             return Holds(pair, false, Limit.Error);
         }
 
-        CandidateParts choice = _misses.Choice(_estimate, pair);
+        CandidateParts choice = _misses.Choice(_spot, pair);
         pair.ErrorRatio = BudgetBuilder.Build(choice, _requirement, _member.Model, _member.Terms, analysis, steady).WorstRatio - slack;
         return WithinBudget(pair) && MayEnter(pair);
     }
@@ -159,7 +176,7 @@ internal sealed class ProspectAnalysis
     {
         foreach (CapacitorPair pair in _pairs)
         {
-            _run.Add(_member, new FitPoint(pair.ErrorRatio, pair.Margin, pair.Cost, _misses.Choice(_estimate, pair)));
+            _run.Add(_member, new FitPoint(pair.ErrorRatio, pair.Margin, pair.Cost, _misses.Choice(_spot, pair)));
         }
     }
 
@@ -169,7 +186,7 @@ internal sealed class ProspectAnalysis
     {
         if (!holds)
         {
-            _misses.Reject(_estimate, pair, limit);
+            _misses.Reject(_spot, pair, limit);
         }
 
         return holds;
@@ -179,7 +196,7 @@ internal sealed class ProspectAnalysis
     {
         foreach (CapacitorPair pair in _pairs)
         {
-            _misses.Reject(_estimate, pair, limit);
+            _misses.Reject(_spot, pair, limit);
         }
     }
 }

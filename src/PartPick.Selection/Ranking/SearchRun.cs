@@ -8,15 +8,26 @@ namespace PartPick.Selection.Search;
 internal sealed class SearchRun
 {
     private readonly RankingOptions _options;
+    private readonly bool _leadersOnly;
     private readonly AnswerBuilder _answers;
     private readonly IProgress<RankingResult>? _progress;
     private readonly Stopwatch _watch = Stopwatch.StartNew();
     private readonly Lock _reporting = new();
     private double _nextReport = 0.1;
-    private int _next;
 
-    public SearchRun(SearchSpace space, RankingOptions options, IProgress<RankingResult>? progress, CancellationToken cancellation)
+    /// <param name="space">What is searched.</param>
+    /// <param name="options">How much of the answer is wanted.</param>
+    /// <param name="progress">Takes a best-so-far now and then; may be null.</param>
+    /// <param name="cancellation">Ends the search.</param>
+    /// <param name="leadersOnly">Whether the front does not matter.</param>
+    public SearchRun(
+        SearchSpace space,
+        RankingOptions options,
+        IProgress<RankingResult>? progress,
+        CancellationToken cancellation,
+        bool leadersOnly = false)
     {
+        _leadersOnly = leadersOnly;
         Space = space;
         _options = options;
         _progress = progress;
@@ -62,7 +73,7 @@ internal sealed class SearchRun
 
     /// <summary>Whether figures no better than these could still change the answer.</summary>
     public bool MayEnter(FamilyMember member, double errorRatio, double margin, decimal cost) =>
-        _options.All || Leaders.MayLead(member, errorRatio, margin, cost) || !Front.Beats(errorRatio, margin, cost);
+        _options.All || Leaders.MayLead(member, errorRatio, margin, cost) || (!_leadersOnly && !Front.Beats(errorRatio, margin, cost));
 
     /// <summary>Adds a fit combination.</summary>
     public void Add(FamilyMember member, FitPoint point)
@@ -101,6 +112,13 @@ internal sealed class SearchRun
     /// <summary>Searches all families, the most promising first, on several threads.</summary>
     public RankingResult Run()
     {
+        Search();
+        return _answers.Build(complete: true, _watch.Elapsed.TotalSeconds);
+    }
+
+    /// <summary>Searches, and leaves what it finds in the leaders and the front.</summary>
+    public void Search()
+    {
         ImmutableArray<CircuitFamily> order =
         [
             .. Space.Families
@@ -108,25 +126,20 @@ internal sealed class SearchRun
                 .ThenBy(family => family.Amplifier.Id, StringComparer.Ordinal)
                 .ThenBy(family => family.Members[0].Crystal.Id, StringComparer.Ordinal),
         ];
-        int threads = Math.Clamp(_options.Threads ?? Environment.ProcessorCount, 1, Math.Max(1, order.Length));
-        var workers = new Task[threads - 1];
-        for (int i = 0; i < workers.Length; i++)
+        // A few combinations of every family first: against the best of them the rest of each can be left out sooner.
+        var scans = new FamilyScan[order.Length];
+        InParallel(order.Length, place =>
         {
-            workers[i] = Task.Run(() => WorkUntilCancelled(order), CancellationToken.None);
-        }
-
-        try
-        {
-            WorkUntilCancelled(order);
-        }
-        finally
-        {
-            Interlocked.Exchange(ref _next, order.Length);
-            Task.WaitAll(workers, CancellationToken.None);
-        }
-
+            scans[place] = new FamilyScan(this, order[place]);
+            Look(order[place], scans[place].Sparse(), scans[place].Grid);
+        });
         Cancellation.ThrowIfCancellationRequested();
-        return _answers.Build(complete: true, _watch.Elapsed.TotalSeconds);
+        InParallel(order.Length, place =>
+        {
+            SearchRest(order[place], scans[place]);
+            scans[place] = null!;
+        });
+        Cancellation.ThrowIfCancellationRequested();
     }
 
     /// <summary>Reports a best-so-far now and then.</summary>
@@ -148,48 +161,58 @@ internal sealed class SearchRun
         }
     }
 
-    private void WorkUntilCancelled(ImmutableArray<CircuitFamily> families)
+    private void InParallel(int count, Action<int> work)
     {
+        int next = 0;
+        int threads = Math.Clamp(_options.Threads ?? Environment.ProcessorCount, 1, Math.Max(1, count));
+        var workers = new Task[threads - 1];
+        for (int i = 0; i < workers.Length; i++)
+        {
+            workers[i] = Task.Run(WorkUntilCancelled, CancellationToken.None);
+        }
+
         try
         {
-            Work(families);
+            WorkUntilCancelled();
         }
-        catch (OperationCanceledException) when (Cancellation.IsCancellationRequested)
+        finally
         {
-            // Every thread ends by itself; the run says so once.
+            Interlocked.Exchange(ref next, count);
+            Task.WaitAll(workers, CancellationToken.None);
         }
-    }
 
-    private void Work(ImmutableArray<CircuitFamily> families)
-    {
-        while (true)
+        void WorkUntilCancelled()
         {
-            int place = Interlocked.Increment(ref _next) - 1;
-            if (place >= families.Length)
+            try
             {
-                return;
+                for (int place = Take(); place < count; place = Take())
+                {
+                    work(place);
+                    Report();
+                }
             }
-
-            Search(families[place]);
-            Report();
+            catch (OperationCanceledException) when (Cancellation.IsCancellationRequested)
+            {
+                // Every thread ends by itself; the run says so once.
+            }
         }
+
+        int Take() => Interlocked.Increment(ref next) - 1;
     }
 
-    private void Search(CircuitFamily family)
+    private void SearchRest(CircuitFamily family, FamilyScan scan)
     {
-        var scan = new FamilyScan(this, family);
-        Look(scan.Sparse());
-        Look(scan.Rest());
+        Look(family, scan.Rest(), scan.Grid);
         Tally.Reject(Limit.Margin, scan.MarginRejections * family.Members.Length);
         Tally.Reject(Limit.Error, scan.ErrorRejections * family.Members.Length);
         Tally.Cover(Space.CapacitorPairs * family.Options.Length * family.Members.Length);
+    }
 
-        void Look(List<Estimate> estimates)
+    private void Look(CircuitFamily family, List<Spot> spots, EstimateGrid grid)
+    {
+        foreach (FamilyMember member in family.Members)
         {
-            foreach (FamilyMember member in family.Members)
-            {
-                new MemberSearch(this, family, member).Run(estimates);
-            }
+            new MemberSearch(this, family, member).Run(spots, grid);
         }
     }
 

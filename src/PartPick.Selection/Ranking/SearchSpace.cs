@@ -53,6 +53,11 @@ internal sealed class SearchSpace
         }
     }
 
+    /// <summary>
+    /// Least sum of the spreads of a crystal alone, as a ratio, among those that the other limits leave; null where none is left.
+    /// </summary>
+    public double? LeastCrystalRatio { get; private set; }
+
     private IEnumerable<CircuitKind> Kinds() => Requirement.Circuits.Distinct().Order().Where(kind => Requirement.Waveform switch
     {
         Waveform.Sine => kind == CircuitKind.Follower,
@@ -72,7 +77,8 @@ internal sealed class SearchSpace
     {
         foreach (Part amplifier in Amplifiers(kind).Where(Market.IsListed))
         {
-            ImmutableArray<AmplifierOption> options = amplifier is TransistorPart transistor ? _options.BiasFor(transistor) : _options.Series;
+            ImmutableArray<AmplifierOption> options =
+                amplifier is TransistorPart transistor ? _options.BiasFor(transistor) : _options.Series;
             double size = CapacitorPairs * options.Length;
             var members = new List<(FamilyMember Member, SupportParts Support)>();
             foreach (CrystalPart crystal in Catalog.Crystals.Where(part => part.Overtone == 1 && Market.IsListed(part)))
@@ -158,6 +164,7 @@ internal sealed class SearchSpace
         double ratio = terms.Sum(term => term.Ratio);
         decimal cost = Market.UnitCost(crystal, 1) + Market.UnitCost(amplifier, 1)
             + Cost(support.Feedback) + Cost(support.Decoupling) + Cost(support.Coupling);
+        LeastCrystalRatio = Math.Min(ratio, LeastCrystalRatio ?? ratio);
         if (cost > Requirement.CostLimit)
         {
             return (null, Limit.Cost);
@@ -173,6 +180,7 @@ internal sealed class SearchSpace
             Crystal = crystal,
             Model = model,
             Template = template,
+            Quality = EstimateQuality.Of(amplifier),
             Tap = tap,
             Terms = terms,
             TermsRatio = ratio,

@@ -18,7 +18,7 @@ public static class Specification
         return Covers(crystal.TemperatureMinCelsius, crystal.TemperatureMaxCelsius, requirement) && Covers(low, high, requirement);
     }
 
-    /// <summary>Whether the amplifier is guaranteed to clock at a crystal frequency, at the lowest supply and in its stated range.</summary>
+    /// <summary>Whether the amplifier is guaranteed to clock at a crystal frequency, at the lowest supply and in range.</summary>
     public static bool CoversClock(Part amplifier, double crystalHz, Requirement requirement)
     {
         ArgumentNullException.ThrowIfNull(requirement);

@@ -13,8 +13,8 @@ public static class KeysPage
         ArgumentNullException.ThrowIfNull(glyphs);
         var lines = ImmutableArray.CreateBuilder<Line>();
         Head("In the list");
-        Key($"{glyphs.Up} {glyphs.Down}", "the circuit before, the next one; PgUp, PgDn, Home and End go further");
-        Key("Enter", "open the whole circuit: drawing, parts, error budget, figures, warnings, reasons");
+        Key($"{glyphs.Up} {glyphs.Down}", "the circuit before, the next one; also PgUp, PgDn, Home, End");
+        Key("Enter", "open the circuit: drawing, parts, error, figures, reasons");
         Key("e or Tab", "edit the wanted sentence; so does " + glyphs.Up + " on the first circuit");
         Key("?", "this page");
         Key("q", "quit; the wanted sentence is kept for the next time");
@@ -24,16 +24,17 @@ public static class KeysPage
             "the value before, the next one; " + glyphs.Up + " and " + glyphs.Down + " change the line");
         Key("type", "put in a new value; the list below answers while you type");
         Key("Enter", "change the value that is there; Enter again keeps it");
-        Key("Space", "the next of a few choices; the first letter of a choice picks it");
-        Key("Esc", "leave the value as it was; once more, back to the list");
+        Key("Space", "the next choice; the first letter of a choice picks it");
+        Key("Esc", "leave the value as it was; once more, back to the list or circuit");
         Head("In a circuit");
-        Key($"{glyphs.Up} {glyphs.Down}", "scroll; PgUp, PgDn, Home and End go further");
-        Key($"{glyphs.Left} {glyphs.Right}", "the circuit before, the next one");
+        Key($"{glyphs.Up} {glyphs.Down}", "scroll; also PgUp, PgDn, Home, End");
+        Key($"{glyphs.Left} {glyphs.Right}", "the circuit before, the next one, at the same place of the page");
         Key("Esc", "back to the list");
         Head("The pictures");
-        Text($"[{Bars.Bar(0.5, 8, glyphs)}] is a limit and the part of it that is used up: half of it here. " +
-            $"[{Bars.Bar(2, 8, glyphs)}] is beyond it. The margin's bar is the wanted margin over the one there is. " +
-            "The limit that is nearest has the accent, and the circuit's page names it.");
+        Text($"{Bars.Bar(0.5, 8, glyphs)} is a limit and the part of it that is used up: half of it here. " +
+            $"{Bars.Bar(2, 8, glyphs)} is beyond it, {Bars.Bar(0.01, 8, glyphs)} hardly used. " +
+            "The margin's bar is the wanted margin over the one there is. The limit that is nearest has the accent, and the " +
+            "circuit's page names it.");
         Text("Error is the worst case over tolerance, temperature, ageing, capacitors, strays and amplifier. Margin, drive and " +
             "start-up are taken at their worst corners of supply, temperature, device and capacitance. Cost is for one board, " +
             "with prices at the quantity built.");

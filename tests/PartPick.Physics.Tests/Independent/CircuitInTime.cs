@@ -6,8 +6,8 @@ namespace PartPick.Physics.Tests.Independent;
 /// </summary>
 internal abstract class CircuitInTime(int nodes, int crystalPlus, int crystalMinus)
 {
-    private readonly List<(int A, int B, double Value)> _capacitors = [];
-    private readonly List<(int A, int B, double Value)> _conductances = [];
+    private readonly double[] _capacitance = new double[nodes * nodes];
+    private readonly double[] _conductance = new double[nodes * nodes];
 
     public int Nodes { get; } = nodes;
 
@@ -41,39 +41,26 @@ internal abstract class CircuitInTime(int nodes, int crystalPlus, int crystalMin
     /// <param name="state">Receives f, q and their Jacobians.</param>
     public void Evaluate(double[] v, double delayed, double weight, NodalState state)
     {
-        state.Clear();
-        foreach ((int a, int b, double farads) in _capacitors)
-        {
-            state.AddCharge(a, b, a, b, farads * Between(v, a, b), farads);
-        }
-
-        foreach ((int a, int b, double siemens) in _conductances)
-        {
-            state.AddCurrent(a, b, a, b, siemens * Between(v, a, b), siemens);
-        }
-
+        state.Start(v, _conductance, _capacitance);
         Device(v, delayed, weight, state);
     }
 
     protected abstract void Device(double[] v, double delayed, double weight, NodalState state);
 
-    protected void Capacitor(int a, int b, double farads)
+    protected void Capacitor(int a, int b, double farads) => Stamp(_capacitance, a, b, Math.Max(0, farads));
+
+    protected void Resistor(int a, int b, double ohms) => Stamp(_conductance, a, b, double.IsFinite(ohms) ? 1 / ohms : 0);
+
+    private void Stamp(double[] matrix, int a, int b, double value)
     {
-        if (farads > 0)
+        foreach ((int row, int column, double sign) in (ReadOnlySpan<(int, int, double)>)[(a, a, 1), (b, b, 1), (a, b, -1), (b, a, -1)])
         {
-            _capacitors.Add((a, b, farads));
+            if (row >= 0 && column >= 0)
+            {
+                matrix[row * Nodes + column] += sign * value;
+            }
         }
     }
-
-    protected void Resistor(int a, int b, double ohms)
-    {
-        if (double.IsFinite(ohms))
-        {
-            _conductances.Add((a, b, 1 / ohms));
-        }
-    }
-
-    protected static double Between(double[] v, int a, int b) => (a >= 0 ? v[a] : 0) - (b >= 0 ? v[b] : 0);
 }
 
 /// <summary>Currents, charges and Jacobians of a circuit at one set of voltages.</summary>
@@ -87,12 +74,24 @@ internal sealed class NodalState(int nodes)
 
     public double[] ChargeSlope { get; } = new double[nodes * nodes];
 
-    public void Clear()
+    /// <summary>Begins with resistors and capacitors alone.</summary>
+    public void Start(double[] v, double[] conductance, double[] capacitance)
     {
-        Array.Clear(Current);
-        Array.Clear(Charge);
-        Array.Clear(CurrentSlope);
-        Array.Clear(ChargeSlope);
+        for (int row = 0; row < v.Length; row++)
+        {
+            double current = 0, charge = 0;
+            for (int column = 0; column < v.Length; column++)
+            {
+                int at = row * v.Length + column;
+                current += conductance[at] * v[column];
+                charge += capacitance[at] * v[column];
+                CurrentSlope[at] = conductance[at];
+                ChargeSlope[at] = capacitance[at];
+            }
+
+            Current[row] = current;
+            Charge[row] = charge;
+        }
     }
 
     /// <summary>A current from one node to another and its derivative by the voltage between two nodes.</summary>

@@ -89,7 +89,12 @@ internal sealed class Integrator
 
             StampCrystal(current + Current, branch);
             Dense.Solve(_jacobian, _residual, n);
-            double largest = _residual.Max(Math.Abs);
+            double largest = 0;
+            foreach (double step in _residual)
+            {
+                largest = Math.Max(largest, Math.Abs(step));
+            }
+
             double scale = Math.Min(1, _circuit.StepLimitVolts / largest);
             for (int k = 0; k < n; k++)
             {

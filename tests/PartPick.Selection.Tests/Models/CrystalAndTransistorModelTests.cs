@@ -24,7 +24,12 @@ public class CrystalAndTransistorModelTests
     {
         CrystalModel model = CrystalModel.From(Sample.Crystal with
         {
-            Cut = cut, FrequencyHz = hertz, Package = package, MotionalFarads = null, ShuntFarads = null, ResistanceOhms = null,
+            Cut = cut,
+            FrequencyHz = hertz,
+            Package = package,
+            MotionalFarads = null,
+            ShuntFarads = null,
+            ResistanceOhms = null,
         });
 
         Assert.True(model.MotionalAssumed && model.ShuntUncertain);

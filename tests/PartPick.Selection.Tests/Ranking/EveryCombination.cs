@@ -7,31 +7,26 @@ namespace PartPick.Selection.Tests.Ranking;
 internal sealed class EveryCombination
 {
     private readonly Requirement _requirement;
-    private readonly List<Candidate> _fit = [];
+    private readonly List<Candidate> _fit;
 
     public EveryCombination(Requirement requirement, PartsCatalog catalog)
     {
         _requirement = requirement;
         var space = new SearchSpace(requirement, catalog, every: true);
         var builder = new CandidateBuilder(requirement, space.Market);
-        foreach (CircuitFamily family in space.Families)
-        {
-            foreach (FamilyMember member in family.Members)
-            {
-                foreach (CandidateParts choice in Choices(space, family, member))
-                {
-                    Tried++;
-                    if (builder.Build(choice) is { IsFit: true } candidate)
-                    {
-                        _fit.Add(candidate);
-                    }
-                }
-            }
-        }
+        CandidateParts[] choices =
+        [
+            .. from family in space.Families
+               from member in family.Members
+               from choice in Choices(space, family, member)
+               select choice,
+        ];
+        Tried = choices.Length;
+        _fit = [.. choices.AsParallel().AsOrdered().Select(builder.Build).OfType<Candidate>().Where(candidate => candidate.IsFit)];
     }
 
     /// <summary>Number of combinations analysed.</summary>
-    public int Tried { get; private set; }
+    public int Tried { get; }
 
     /// <summary>Number of fit ones.</summary>
     public int Fit => _fit.Count;

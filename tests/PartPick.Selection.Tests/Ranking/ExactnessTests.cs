@@ -3,6 +3,8 @@ namespace PartPick.Selection.Tests.Ranking;
 /// <summary>The front and the order equal what trying every combination gives (arithmetic: both by the same definitions).</summary>
 public class ExactnessTests
 {
+    private static CancellationToken Cancellation => TestContext.Current.CancellationToken;
+
     public static TheoryData<int> Seeds => [.. Enumerable.Range(0, 24)];
 
     [Theory]
@@ -12,8 +14,9 @@ public class ExactnessTests
         SmallWorld world = SmallWorld.Draw(seed);
         var every = new EveryCombination(world.Requirement, world.Catalog);
 
-        RankingResult best = Ranker.Rank(world.Requirement, world.Catalog, cancellation: TestContext.Current.CancellationToken);
-        RankingResult all = Ranker.Rank(world.Requirement, world.Catalog, new RankingOptions { All = true, Top = null }, cancellation: TestContext.Current.CancellationToken);
+        RankingResult best = Ranker.Rank(world.Requirement, world.Catalog, cancellation: Cancellation);
+        var everything = new RankingOptions { All = true, Top = null };
+        RankingResult all = Ranker.Rank(world.Requirement, world.Catalog, everything, cancellation: Cancellation);
 
         Assert.Equal(every.Front(), best.Front);
         Assert.Equal(every.BestOfGroups(), best.Candidates.Select(candidate => candidate.Id));
@@ -32,7 +35,7 @@ public class ExactnessTests
             get
             {
                 SmallWorld world = SmallWorld.Draw(Seed);
-                return Ranker.Rank(world.Requirement, world.Catalog, cancellation: TestContext.Current.CancellationToken).Candidates.Length > 0;
+                return Ranker.Rank(world.Requirement, world.Catalog, cancellation: Cancellation).Candidates.Length > 0;
             }
         }
     }
@@ -41,8 +44,8 @@ public class ExactnessTests
     public void The_number_of_threads_does_not_change_the_answer()
     {
         SmallWorld world = SmallWorld.Draw(3);
-        RankingResult one = Ranker.Rank(world.Requirement, world.Catalog, new RankingOptions { Threads = 1 }, cancellation: TestContext.Current.CancellationToken);
-        RankingResult four = Ranker.Rank(world.Requirement, world.Catalog, new RankingOptions { Threads = 4 }, cancellation: TestContext.Current.CancellationToken);
+        RankingResult one = Ranker.Rank(world.Requirement, world.Catalog, new RankingOptions { Threads = 1 }, cancellation: Cancellation);
+        RankingResult four = Ranker.Rank(world.Requirement, world.Catalog, new RankingOptions { Threads = 4 }, cancellation: Cancellation);
         Assert.Equal(one.Front, four.Front);
         Assert.Equal(one.Candidates.Select(c => (c.Id, c.Score)), four.Candidates.Select(c => (c.Id, c.Score)));
     }

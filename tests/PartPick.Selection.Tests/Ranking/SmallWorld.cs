@@ -40,7 +40,8 @@ internal sealed record SmallWorld(Requirement Requirement, PartsCatalog Catalog)
             .. Amplifiers(random, all, kind),
             .. Sample(random, 3, all.Capacitors.Where(part => part.Dielectric == "C0G" && Usual(part, clock, kind))),
             .. Sample(random, 2, all.Resistors.Where(part => Damping(part, clock, kind))),
-            .. all.Resistors.Where(part => part.ValueOhms is 1e6 or 4.7e6 or 1e7 || (kind == CircuitKind.Follower && part.ValueOhms is 2200 or 100e3)),
+            .. all.Resistors.Where(part => part.ValueOhms is 1e6 or 4.7e6 or 1e7),
+            .. all.Resistors.Where(part => kind == CircuitKind.Follower && part.ValueOhms is 2200 or 100e3),
             .. Sample(random, 1, all.Capacitors.Where(part => part.ValueFarads is > 90e-9 and < 110e-9)),
             .. Sample(random, 1, all.Capacitors.Where(part => part.ValueFarads is > 9e-9 and < 11e-9)),
         ];

@@ -7,7 +7,10 @@ public class CrystalSpreadTests
 {
     private static readonly CrystalPart Stated = Sample.Crystal with
     {
-        ToleranceRatio = 30e-6, StabilityRatio = 50e-6, AgeingRatio = 3e-6, AgeingYearlyRatio = 1e-6,
+        ToleranceRatio = 30e-6,
+        StabilityRatio = 50e-6,
+        AgeingRatio = 3e-6,
+        AgeingYearlyRatio = 1e-6,
     };
 
     private static readonly Dictionary<string, Basis> Typical = new() { ["tolerance"] = Basis.Typical };

@@ -62,10 +62,13 @@ public class CircuitTests
         Requirement free = SampleRanking.Wanted with { StartUpTimeSeconds = null, CostLimit = null };
         ImmutableArray<LimitUse> uses = LimitUses.Of(SampleRanking.Counter with { RatedDriveWatts = null }, free);
         Assert.All(uses[2..], use => Assert.Null(use.Used));
-        Assert.EndsWith("W, not rated", uses[2].Against, StringComparison.Ordinal);
-        Assert.Equal("ms, no limit", uses[3].Against);
-        Assert.Equal("EUR, no limit", uses[4].Against);
-        Assert.All(Bars.Draw(uses, 80, Glyphs.Drawn)[2..], line => Assert.DoesNotContain("[", line.Text, StringComparison.Ordinal));
+        Assert.Equal(["not rated", "no limit", "no limit"], uses[2..].Select(use => use.Unlimited));
+        Assert.Equal(["ms", "EUR"], uses[3..].Select(use => use.Against));
+        Assert.All(Bars.Draw(uses, 80, Glyphs.Drawn)[2..], line =>
+        {
+            Assert.DoesNotContain("■", line.Text, StringComparison.Ordinal);
+            Assert.Matches("not rated|no limit", line.Text);
+        });
     }
 
     [Fact]
@@ -80,7 +83,8 @@ public class CircuitTests
 
     [Theory]
     [InlineData(0.0, "··········")]
-    [InlineData(0.01, "■·········")]
+    [InlineData(0.01, "-·········")]
+    [InlineData(0.06, "■·········")]
     [InlineData(0.5, "■■■■■·····")]
     [InlineData(1.0, "■■■■■■■■■■")]
     [InlineData(1.001, "■■■■■■■■■!")]
@@ -99,6 +103,7 @@ public class CircuitTests
         {
             Assert.All(
                 Bars.Draw(LimitUses.Of(candidate, SampleRanking.Wanted), width, Glyphs.Ascii)
+                    .Concat(Bars.DrawTall(LimitUses.Of(candidate, SampleRanking.Wanted), width, Glyphs.Ascii))
                     .Concat(CircuitPane.Below(candidate, SampleRanking.Wanted, width, Glyphs.Drawn)),
                 line => Assert.True(line.Text.TrimEnd().Length <= width, line.Text));
         }
@@ -112,5 +117,42 @@ public class CircuitTests
         Assert.Contains("nearest limit is the error", reasons[0], StringComparison.Ordinal);
         Assert.Contains("Score 1.900", reasons[1], StringComparison.Ordinal);
         Assert.Contains("No other fit circuit", reasons[2], StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void At_80_columns_no_reason_of_a_counter_is_cut()
+    {
+        ImmutableArray<LimitUse> uses = [.. LimitUses.Of(SampleRanking.Counter, SampleRanking.Wanted)
+            .Select(use => use with { Because = use.Because.Replace(", 50 °C", "", StringComparison.Ordinal) })];
+        ImmutableArray<Line> lines = Bars.Draw(uses, 80, Glyphs.Drawn);
+        Assert.All(lines, line => Assert.DoesNotContain("…", line.Text, StringComparison.Ordinal));
+        Assert.EndsWith("least: 4.5 V, weak device, high C", lines[1].Text.TrimEnd(), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Where_there_is_room_reasons_are_whole()
+    {
+        ImmutableArray<LimitUse> uses = LimitUses.Of(SampleRanking.Follower, SampleRanking.Wanted);
+        Assert.EndsWith(uses[1].Because, Bars.Draw(uses, 120, Glyphs.Drawn)[1].Text.TrimEnd(), StringComparison.Ordinal);
+        string tall = string.Join(' ', Bars.DrawTall(uses, 40, Glyphs.Drawn).Select(line => line.Text.Trim()));
+        Assert.All(uses, use => Assert.Contains(use.Because, tall, StringComparison.Ordinal));
+    }
+
+    [Fact]
+    public void At_80_columns_the_limits_stand_beside_the_drawing()
+    {
+        ImmutableArray<Line> page = CircuitPage.Draw(
+            SampleRanking.Counter, SampleRanking.Answer(SampleRanking.Wanted, SampleRanking.Counter), 80, Glyphs.Drawn);
+        Assert.Contains(page, line => line.Text.Contains("R1 1 MΩ", StringComparison.Ordinal)
+            && line.Text[Schematic.Width..].Trim().Length > 0);
+        Assert.All(page, line => Assert.True(line.ToString().Length <= 80, line.Text));
+    }
+
+    [Fact]
+    public void A_carrier_and_a_margin_for_safety_have_their_cautions_and_a_time_base_has_not()
+    {
+        Assert.Single(Cautions.Of(SampleRanking.Wanted));
+        Assert.Contains("licence", Cautions.Of(SampleRanking.Wanted with { OutputHz = 4e6 })[1], StringComparison.Ordinal);
+        Assert.Contains("qualified", Cautions.Of(SampleRanking.Wanted with { Margin = 10 })[1], StringComparison.Ordinal);
     }
 }

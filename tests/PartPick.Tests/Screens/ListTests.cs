@@ -79,4 +79,35 @@ public class ListTests
             Assert.Single(list.Draw(4, true, false, Glyphs.Drawn), line => line.Text.StartsWith('►'));
         }
     }
+
+    [Theory]
+    [InlineData(40)]
+    [InlineData(50)]
+    [InlineData(60)]
+    [InlineData(70)]
+    [InlineData(78)]
+    [InlineData(79)]
+    public void However_narrow_the_list_error_margin_and_cost_stay_under_their_headings(int width)
+    {
+        var list = new CandidateList();
+        list.Show(SampleRanking.Answer(SampleRanking.Wanted, [.. SampleRanking.All]));
+        string heading = list.Heading(Glyphs.Drawn, width).Text;
+        string row = list.Draw(5, true, false, Glyphs.Drawn, width)[0].Text;
+        Assert.True(row.Length <= width && heading.Length <= width, $"{row.Length} {heading.Length}");
+        Assert.Equal(heading.Length, row.Length);
+        Assert.EndsWith("0.83", row, StringComparison.Ordinal);
+        CandidateCells cells = CandidateColumns.Of(SampleRanking.All, SampleRanking.Wanted).Rows[0];
+        Assert.Contains(cells.ErrorPpm.Trim(), row, StringComparison.Ordinal);
+        Assert.Contains(cells.Margin.Trim(), row, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void The_chosen_row_keeps_its_accent_within_the_reverse()
+    {
+        var list = new CandidateList();
+        list.Show(SampleRanking.Answer(SampleRanking.Wanted, SampleRanking.Counter));
+        Line row = list.Draw(1, true, false, Glyphs.Drawn)[0];
+        Assert.All(row.Spans, span => Assert.True(span.Tone is Tone.Chosen or Tone.ChosenAccent));
+        Assert.Contains(row.Spans, span => span.Tone == Tone.ChosenAccent);
+    }
 }

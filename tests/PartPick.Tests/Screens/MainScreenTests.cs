@@ -14,7 +14,7 @@ public class MainScreenTests
         Assert.Contains("Wanted: 1 kHz square, within ±80 ppm for 5 years", text, StringComparison.Ordinal);
         Assert.Contains("5 circuits fit, of 4.1 million combinations", text, StringComparison.Ordinal);
         Assert.Contains("most: crystal over temperature", text, StringComparison.Ordinal);
-        Assert.Contains("least at 4.5 V, 50 °C", text, StringComparison.Ordinal);
+        Assert.Contains("least: 4.5 V, 50 °C", text, StringComparison.Ordinal);
         Assert.Contains("of 2.50 EUR", text, StringComparison.Ordinal);
         Assert.Contains("Enter open", text, StringComparison.Ordinal);
         Assert.All(bench.Rows, row => Assert.True(row.Length <= 80));
@@ -44,14 +44,15 @@ public class MainScreenTests
     }
 
     [Fact]
-    public void Wrong_text_says_what_fits_in_one_line_and_keeps_the_old_value()
+    public void Wrong_text_says_what_is_wrong_and_what_fits_and_keeps_the_old_value()
     {
         using var bench = new Bench();
         bench.Press(new Key('e'));
         bench.Type("5 Ohm");
         bench.Press(Key.Enter);
-        Assert.Contains("! output frequency:", bench.Rows[^1], StringComparison.Ordinal);
-        Assert.Contains("fits a frequency", bench.Rows[^1], StringComparison.Ordinal);
+        string foot = bench.Rows[^2] + " " + bench.Rows[^1].Trim();
+        Assert.Contains("! output frequency: '5 Ohm'", foot, StringComparison.Ordinal);
+        Assert.Contains("fits a frequency", foot, StringComparison.Ordinal);
         Assert.Equal(1000, bench.Model.Wanted.Accepted.OutputHz);
         bench.Press(Key.Esc);
         Assert.Contains("Wanted: 1 kHz square", bench.Text, StringComparison.Ordinal);
@@ -122,7 +123,9 @@ public class MainScreenTests
     public void When_nothing_fits_the_nearest_misses_and_the_limit_are_named()
     {
         using var bench = new Bench(ranking: new FakeRanking { Answer = SampleRanking.Nothing });
-        Assert.Contains("nothing fits; the frequency error removed 3.4 million of 4.1 million", bench.Text, StringComparison.Ordinal);
+        Assert.Contains("nothing fits; the frequency error removed 82 %", bench.Text, StringComparison.Ordinal);
+        Assert.Contains("1 of 2, nearest first", bench.Text, StringComparison.Ordinal);
+        Assert.Contains(" ■■■■■■■■■■■■■■■■···· 3 400 000", bench.Text, StringComparison.Ordinal);
         Assert.Contains("The frequency error is 74.9 ppm, the budget 20 ppm.", bench.Text, StringComparison.Ordinal);
     }
 
@@ -144,7 +147,7 @@ public class MainScreenTests
     }
 
     [Fact]
-    public void The_circuit_page_scrolls_and_right_goes_to_the_next_circuit()
+    public void The_circuit_page_scrolls_and_right_goes_to_the_same_place_of_the_next_circuit()
     {
         using var bench = new Bench();
         bench.Press(Key.Enter);
@@ -153,7 +156,7 @@ public class MainScreenTests
         Assert.Contains("Score 1.900", bench.Text, StringComparison.Ordinal);
         bench.Press(Key.CursorRight);
         Assert.Contains("2 of 5", bench.Text, StringComparison.Ordinal);
-        Assert.Contains("The motional capacitance", bench.Rows[5], StringComparison.Ordinal);
+        Assert.Contains("Score 1.900", bench.Text, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -218,5 +221,137 @@ public class MainScreenTests
         Assert.Contains("q quits", bench.Rows[^1], StringComparison.Ordinal);
         bench.Press(new Key('q'));
         Assert.True(bench.Model.IsDone);
+    }
+
+    [Fact]
+    public void Escape_and_a_letter_that_arrive_together_are_both_taken()
+    {
+        using var bench = new Bench();
+        bench.Press(Key.Enter);
+        Assert.Equal(Place.Circuit, bench.Model.Place);
+        bench.Press(new Key('q').WithAlt);
+        Assert.Equal(Place.List, bench.Model.Place);
+        Assert.True(bench.Model.IsDone);
+    }
+
+    [Fact]
+    public void Escape_leads_from_the_sentence_back_to_the_circuit_it_was_entered_from()
+    {
+        using var bench = new Bench();
+        bench.Press(Key.CursorDown, Key.Enter, new Key('e'));
+        Assert.Contains("Esc circuit", bench.Rows[^1], StringComparison.Ordinal);
+        bench.Press(Key.Esc);
+        Assert.Equal(Place.Circuit, bench.Model.Place);
+        Assert.Equal(1, bench.Model.List.At);
+        bench.Press(Key.Esc, new Key('e'), Key.Esc);
+        Assert.Equal(Place.List, bench.Model.Place);
+    }
+
+    [Fact]
+    public void A_circuit_that_no_longer_fits_leads_to_the_list_and_is_said()
+    {
+        using var bench = new Bench();
+        bench.Press(Key.Enter, new Key('e'));
+        bench.Ranking.Answer = requirement => SampleRanking.Answer(requirement, SampleRanking.Port);
+        bench.Type("32768");
+        bench.Press(Key.Enter, Key.Esc);
+        Assert.Equal(Place.List, bench.Model.Place);
+        Assert.Contains("counter CNT-14-HC, stage 12 (÷4096) is not in the list any more", bench.Rows[^1], StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void The_circuit_that_is_read_stays_when_a_better_one_is_found()
+    {
+        using var bench = new Bench(ranking: new FakeRanking { Holds = true });
+        bench.Ranking.Report(0, SampleRanking.Answer(SampleRanking.Wanted, SampleRanking.Counter) with { IsComplete = false });
+        bench.Press(Key.Enter);
+        bench.Ranking.Report(
+            0, SampleRanking.Answer(SampleRanking.Wanted, SampleRanking.Follower, SampleRanking.Counter) with { IsComplete = false });
+        bench.Press(Key.Home);
+        Assert.Contains("counter CNT-14-HC", bench.Text, StringComparison.Ordinal);
+        Assert.Contains("2 of 2", bench.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void When_nothing_fits_every_limit_says_how_many_it_removed()
+    {
+        using var bench = new Bench(ranking: new FakeRanking { Answer = r => SampleRanking.Nothing(r) with { NearestMisses = [] } });
+        Assert.Contains(bench.Rows, row => row.Contains("the frequency error", StringComparison.Ordinal)
+            && row.Contains("3 400 000", StringComparison.Ordinal) && row.Contains('■', StringComparison.Ordinal));
+        Assert.Contains(bench.Rows, row => row.Contains("the cost", StringComparison.Ordinal)
+            && row.Contains("1 200", StringComparison.Ordinal));
+        Assert.DoesNotContain("Enter open", bench.Rows[^1], StringComparison.Ordinal);
+        bench.Press(Key.Enter);
+        Assert.Equal(Place.List, bench.Model.Place);
+    }
+
+    [Fact]
+    public void A_frequency_that_no_crystal_gives_is_said_in_words()
+    {
+        using var bench = new Bench(ranking: new FakeRanking
+        {
+            Answer = r => SampleRanking.Answer(r) with { Combinations = 0, Covered = 0 },
+        });
+        Assert.Contains("No crystal of the catalogue gives 1 kHz", bench.Text, StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData(60, 20)]
+    [InlineData(50, 16)]
+    [InlineData(40, 12)]
+    public void On_a_small_screen_the_list_keeps_some_rows_with_their_costs(int width, int height)
+    {
+        using var bench = new Bench(width, height);
+        Assert.True(bench.Rows.Count(row => row.EndsWith("0.83", StringComparison.Ordinal)) >= 4, bench.Text);
+        Assert.Contains("q quit", bench.Rows[^1], StringComparison.Ordinal);
+        Assert.Contains("Wanted:", bench.Rows[0], StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void In_ascii_labels_keep_their_spaces()
+    {
+        using var bench = new Bench(glyphs: Glyphs.Ascii);
+        Assert.DoesNotContain("?", string.Concat(bench.Rows[..^1]), StringComparison.Ordinal);
+        Assert.Contains("C1 15 pF  C2 18 pF", bench.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_text_that_is_no_value_yet_says_so_and_changes_no_ranking()
+    {
+        using var bench = new Bench();
+        bench.Press(new Key('e'));
+        int asked = bench.Ranking.Asked.Count;
+        bench.Type("-");
+        Assert.StartsWith(" output frequency, not yet: such as", bench.Rows[^1], StringComparison.Ordinal);
+        Assert.Equal(asked, bench.Ranking.Asked.Count);
+        bench.Press(Key.Backspace);
+        bench.Type("4k");
+        Assert.StartsWith(" output frequency: such as", bench.Rows[^1], StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_value_is_changed_with_the_arrows_and_digits_alone_while_a_ranking_runs()
+    {
+        using var bench = new Bench(ranking: new FakeRanking { Holds = true });
+        bench.Press(new Key('e'), Key.CursorRight, Key.CursorRight);
+        bench.Type("50");
+        bench.Press(Key.Enter, Key.CursorRight);
+        bench.Type("10");
+        bench.Press(Key.Enter);
+        Assert.Equal((50e-6, 10), (bench.Model.Wanted.Accepted.BudgetRatio, bench.Model.Wanted.Accepted.Years));
+        int last = bench.Ranking.Asked.Count - 1;
+        Assert.All(Enumerable.Range(0, last), number => Assert.True(bench.Ranking.IsCancelled(number)));
+        Assert.False(bench.Ranking.IsCancelled(last));
+        bench.Ranking.Finish(last);
+        Assert.Contains("5 circuits fit", bench.Model.Draw(80, 24).Select(line => line.Text).First(
+            text => text.Contains("fit", StringComparison.Ordinal)), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void The_title_of_a_circuit_is_whole_at_120_columns()
+    {
+        using var bench = new Bench(120, 40);
+        Assert.Contains("counter CNT-14-HC, stage 12 (÷4096) ─", bench.Text, StringComparison.Ordinal);
+        Assert.Equal(" abc ", Rules.Draw("abc", "", 6, Glyphs.Drawn).Text[1..]);
     }
 }

@@ -11,9 +11,9 @@ public class SentenceTests
         var model = new SentenceModel(SampleRanking.Wanted, Glyphs.Drawn);
         string text = string.Join(' ', model.Draw(79, false).Select(line => line.Text.Trim()));
         Assert.Equal(
-            "Wanted: 1 kHz square, within ±80 ppm for 5 years, 4.5 V to 5.5 V, -10 °C to 50 °C, start-up margin 5, " +
-            "starting by itself within 50 ms, 200 boards at 2.50 each at most, two-layer board, E12 load capacitors, any circuit; " +
-            "error counts 1, margin 1, cost 1.", text);
+            "Wanted: 1 kHz square, within ±80 ppm for 5 years, 4.5 to 5.5 V, -10 to 50 °C, start-up margin 5, " +
+            "self-starting within 50 ms, 200 boards at 2.50 each at most, two-layer board, C1, C2 of E12, any circuit; " +
+            "error ×1, margin ×1, cost ×1.", text);
     }
 
     [Theory]
@@ -26,7 +26,7 @@ public class SentenceTests
         var model = new SentenceModel(SampleRanking.Wanted, Glyphs.Drawn);
         System.Collections.Immutable.ImmutableArray<Line> lines = model.Draw(width, true);
         Assert.All(lines, line => Assert.True(line.Text.TrimEnd().Length <= width, line.Text));
-        Assert.Single(lines, line => line.Text.Contains("-10 °C", StringComparison.Ordinal));
+        Assert.Single(lines, line => line.Text.Contains("-10 to 50 °C", StringComparison.Ordinal));
     }
 
     [Theory]
@@ -74,10 +74,10 @@ public class SentenceTests
     [InlineData("output frequency", "4 V")]
     [InlineData("frequency error", "0")]
     [InlineData("frequency error", "200 %")]
-    [InlineData("lowest supply", "6 V")]
-    [InlineData("highest supply", "4 V")]
-    [InlineData("lowest temperature", "51")]
-    [InlineData("highest temperature", "-11")]
+    [InlineData("lowest supply", "0 V")]
+    [InlineData("highest supply", "101 V")]
+    [InlineData("lowest temperature", "-300")]
+    [InlineData("highest temperature", "301")]
     [InlineData("start-up margin", "0.5")]
     [InlineData("start-up time", "0")]
     [InlineData("boards", "0")]
@@ -99,6 +99,70 @@ public class SentenceTests
         Assert.NotEmpty(model.Problem.Fits);
         Assert.Equal(SampleRanking.Wanted, model.Accepted);
         Assert.NotNull(model.Typed);
+    }
+
+    [Theory]
+    [InlineData("lowest supply", "12", 12, 12, -10, 50)]
+    [InlineData("highest supply", "3.6", 3.6, 3.6, -10, 50)]
+    [InlineData("lowest temperature", "60", 4.5, 5.5, 60, 60)]
+    [InlineData("highest temperature", "-20", 4.5, 5.5, -20, -20)]
+    public void An_end_of_a_range_takes_the_other_one_along(
+        string field, string text, double lowVolts, double highVolts, double lowCelsius, double highCelsius)
+    {
+        Requirement requirement = Taken(field, text);
+        Assert.Equal((lowVolts, highVolts), (requirement.SupplyMinVolts, requirement.SupplyMaxVolts));
+        Assert.Equal((lowCelsius, highCelsius), (requirement.TemperatureMinCelsius, requirement.TemperatureMaxCelsius));
+    }
+
+    [Fact]
+    public void A_half_typed_end_of_a_range_moves_nothing_until_it_is_kept()
+    {
+        SentenceModel model = At("highest supply");
+        model.Press(KeyPress.Of('1'));
+        Assert.Equal(1, model.Current.SupplyMinVolts);
+        model.Press(KeyPress.Of('2'));
+        Assert.Equal(4.5, model.Current.SupplyMinVolts);
+        model.Press(new KeyPress(KeyName.Enter));
+        Assert.Equal((4.5, 12), (model.Accepted.SupplyMinVolts, model.Accepted.SupplyMaxVolts));
+    }
+
+    [Fact]
+    public void What_was_refused_stays_named_until_the_text_fits()
+    {
+        SentenceModel model = At("boards");
+        model.Press(KeyPress.Of('0'));
+        Assert.Null(model.Problem);
+        model.Press(new KeyPress(KeyName.Tab));
+        Assert.NotNull(model.Problem);
+        Assert.Equal("boards", model.Field.Name);
+        model.Press(KeyPress.Of('0'));
+        Assert.Contains("'00'", model.Problem.What, StringComparison.Ordinal);
+        model.Press(new KeyPress(KeyName.Home));
+        Assert.NotNull(model.Problem);
+        model.Press(KeyPress.Of('3'));
+        Assert.Null(model.Problem);
+    }
+
+    [Fact]
+    public void A_short_sentence_shows_the_rows_about_the_chosen_value()
+    {
+        SentenceModel model = At("weight of the cost");
+        Assert.Equal(3, model.Draw(40, true, 3).Length);
+        Assert.Contains("cost ×1.", model.Draw(40, true, 3)[^1].Text, StringComparison.Ordinal);
+        System.Collections.Immutable.ImmutableArray<Line> first = model.Draw(40, false, 3);
+        Assert.StartsWith(" Wanted: 1 kHz", first[0].Text, StringComparison.Ordinal);
+        Assert.EndsWith("…", first[^1].Text, StringComparison.Ordinal);
+        Assert.All(first, line => Assert.True(line.Width <= 40));
+    }
+
+    [Fact]
+    public void Every_help_fits_beside_the_keys_at_80_columns()
+    {
+        foreach (SentenceField field in Sentence.Pieces(SampleRanking.Wanted).Select(piece => piece.Field).OfType<SentenceField>())
+        {
+            string help = $"{field.Name}: {field.Help(SampleRanking.Wanted)}";
+            Assert.True(help.Length <= 50, help);
+        }
     }
 
     [Fact]

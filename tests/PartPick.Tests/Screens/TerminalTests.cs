@@ -64,4 +64,11 @@ public class TerminalTests
     [Fact]
     public void Ascii_spells_what_it_cannot_show() =>
         Assert.Equal("+/-4.7 kohm at 25 degC, 3 uW ?", Glyphs.Ascii.Show("±4.7 kΩ at 25 °C, 3 µW 水"));
+
+    [Fact]
+    public void A_number_and_its_unit_stay_on_one_line()
+    {
+        string[] lines = [.. Paragraph.Of("The margin is least at 4.5 V, 50 °C and so on.", 26, Glyphs.Drawn).Select(line => line.Text)];
+        Assert.Equal(["The margin is least at", "4.5 V, 50 °C and so on."], lines);
+    }
 }

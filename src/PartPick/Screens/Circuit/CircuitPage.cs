@@ -25,8 +25,7 @@ public static class CircuitPage
             lines.AddRange(Paragraph.Of(text, width, glyphs, " ! ", 3, Tone.Warning));
         }
 
-        lines.AddRange(Bars.Draw(LimitUses.Of(candidate, requirement), width, glyphs));
-        lines.AddRange(DrawingAndParts(candidate, width, glyphs));
+        lines.AddRange(DrawingLimitsAndParts(candidate, requirement, width, glyphs));
         lines.AddRange(Budget(candidate, requirement, width, glyphs));
         lines.AddRange(Corners(candidate, width, glyphs));
         lines.AddRange(CircuitFigures.Draw(candidate, glyphs));
@@ -36,53 +35,40 @@ public static class CircuitPage
             lines.AddRange(Paragraph.Of(reason, width, glyphs, " ", 1));
         }
 
+        lines.Add(Line.Empty);
+        lines.Add(Heading("Before it is built", glyphs));
+        foreach (string caution in Cautions.Of(requirement))
+        {
+            lines.AddRange(Paragraph.Of(caution, width, glyphs, " ", 1));
+        }
+
         return lines.ToImmutable();
     }
 
     internal static Line Heading(string text, Glyphs glyphs) => new LineBuilder(glyphs).Add(" " + text, Tone.Strong).Build();
 
-    private static IEnumerable<Line> DrawingAndParts(Candidate candidate, int width, Glyphs glyphs)
+    // The limits stand beside the drawing, or above it with the parts beside it, or all follow each other.
+    private static IEnumerable<Line> DrawingLimitsAndParts(Candidate candidate, Requirement requirement, int width, Glyphs glyphs)
     {
+        ImmutableArray<LimitUse> uses = LimitUses.Of(candidate, requirement);
         ImmutableArray<Line> drawing = Schematic.Draw(candidate, glyphs);
-        ImmutableArray<Line> parts = Parts(candidate, glyphs);
-        yield return Line.Empty;
-        if (width < Schematic.Width + 64)
+        ImmutableArray<Line> parts = PartsTable.Draw(candidate, glyphs);
+        if (width >= Schematic.Width + 64)
         {
-            foreach (Line line in drawing)
-            {
-                yield return new LineBuilder(glyphs).Add("  ").Build().Beside(2, line);
-            }
-
-            yield return Line.Empty;
-            foreach (Line line in parts)
-            {
-                yield return line;
-            }
-
-            yield break;
+            return [.. Bars.Draw(uses, width, glyphs), Line.Empty, .. SideBySide(drawing, Schematic.Width + 3, parts)];
         }
 
-        for (int i = 0; i < Math.Max(drawing.Length, parts.Length); i++)
-        {
-            Line left = i < drawing.Length ? drawing[i] : Line.Empty;
-            yield return left.Beside(Schematic.Width + 3, i < parts.Length ? parts[i] : Line.Empty);
-        }
+        return width >= Schematic.Width + 36
+            ? [.. SideBySide(drawing, Schematic.Width, Bars.DrawTall(uses, width - Schematic.Width, glyphs)), Line.Empty, .. parts]
+            : [.. Bars.DrawTall(uses, width, glyphs), Line.Empty, .. drawing, Line.Empty, .. parts];
     }
 
-    private static ImmutableArray<Line> Parts(Candidate candidate, Glyphs glyphs)
+    private static IEnumerable<Line> SideBySide(ImmutableArray<Line> left, int width, ImmutableArray<Line> right)
     {
-        var lines = ImmutableArray.CreateBuilder<Line>();
-        int value = Math.Max(5, candidate.Parts.Max(use => glyphs.Show(use.Value).Length));
-        int id = candidate.Parts.Max(use => use.Part.Id.Length);
-        lines.Add(new LineBuilder(glyphs).Add(" ").Column("part", 6, Tone.Quiet).Column("value", value + 2, Tone.Quiet)
-            .Column("id", id + 2, Tone.Quiet).Add("place", Tone.Quiet).Build());
-        foreach (PartUse use in candidate.Parts)
+        for (int i = 0; i < Math.Max(left.Length, right.Length); i++)
         {
-            lines.Add(new LineBuilder(glyphs).Add(" ").Column(use.Designator, 6, Tone.Strong).Column(use.Value, value + 2)
-                .Column(use.Part.Id, id + 2).Add(use.Role, Tone.Quiet).Build());
+            yield return (i < left.Length ? left[i] : Line.Empty).Beside(width, i < right.Length ? right[i] : Line.Empty);
         }
-
-        return lines.ToImmutable();
     }
 
     private static IEnumerable<Line> Budget(Candidate candidate, Requirement requirement, int width, Glyphs glyphs)
@@ -113,8 +99,8 @@ public static class CircuitPage
 
         Line Row(string figure, double ratio, string words)
         {
-            LineBuilder line = new LineBuilder(glyphs).Add(" ").Add(figure).Add(" [", Tone.Quiet)
-                .Add(Bars.Bar(ratio / requirement.BudgetRatio, Share, glyphs)).Add("] ", Tone.Quiet);
+            LineBuilder line = new LineBuilder(glyphs).Add(" ").Add(figure).Add(" ")
+                .Add(Bars.Bar(ratio / requirement.BudgetRatio, Share, glyphs)).Add(" ");
             return line.Words(words, width - line.Width).Build();
         }
     }

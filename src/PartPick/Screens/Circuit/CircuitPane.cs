@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using PartPick.Catalog;
 using PartPick.Selection;
 
 namespace PartPick.Screens;
@@ -32,7 +33,7 @@ public static class CircuitPane
     /// <param name="glyphs">The signs.</param>
     public static ImmutableArray<Line> Below(Candidate candidate, Requirement requirement, int width, Glyphs glyphs) =>
     [
-        Passives(candidate, width, glyphs)[0],
+        Values(candidate, width, glyphs),
         .. Bars.Draw(LimitUses.Of(candidate, requirement), width, glyphs),
         .. Watched(candidate, glyphs).Take(1).Select(text =>
             new LineBuilder(glyphs).Add(" ! ", Tone.Warning).Words(text, width - 3, Tone.Warning).Build()),
@@ -47,16 +48,33 @@ public static class CircuitPane
     [
         .. Schematic.Draw(candidate, glyphs),
         new LineBuilder(glyphs).Add(" Y1 is ", Tone.Quiet).Column(candidate.Choice.Crystal.Id, width - 7, Tone.Quiet).Build(),
-        .. Bars.Draw(LimitUses.Of(candidate, requirement), width, glyphs),
+        .. Bars.DrawTall(LimitUses.Of(candidate, requirement), width, glyphs),
         .. Watched(candidate, glyphs).SelectMany(text => Paragraph.Of(text, width, glyphs, " ! ", 3, Tone.Warning)),
     ];
 
-    private static ImmutableArray<Line> Passives(Candidate candidate, int width, Glyphs glyphs) =>
-        Paragraph.Of(
-            string.Join("  ", candidate.Parts.Where(use => use.Value.Length > 0)
-                .Select(use => CircuitParts.Label(use).Replace(' ', '\u00a0'))).Replace("  ", " \u00a0", StringComparison.Ordinal),
-            width, glyphs, " ", 1)
-            .Select(line => new Line([new Span(line.Text.Replace('\u00a0', ' '), Tone.Strong)])).ToImmutableArray();
+    // Capacitors and resistors on one line: a label stays whole, and what does not fit is marked.
+    private static Line Values(Candidate candidate, int width, Glyphs glyphs)
+    {
+        string[] labels =
+        [
+            .. candidate.Parts.Where(use => use.Part is CapacitorPart or ResistorPart)
+                .Select(use => glyphs.Show(CircuitParts.Label(use))),
+        ];
+        LineBuilder line = new(glyphs);
+        for (int i = 0; i < labels.Length; i++)
+        {
+            string text = (i == 0 ? " " : "  ") + labels[i];
+            int mark = i == labels.Length - 1 ? 0 : glyphs.Show(" …").Length;
+            if (line.Width + text.Length + mark > width)
+            {
+                return line.Add(" …", Tone.Quiet).Build().Fit(Math.Max(0, width));
+            }
+
+            line.Add(text, Tone.Strong);
+        }
+
+        return line.Build();
+    }
 
     private static IEnumerable<string> Watched(Candidate candidate, Glyphs glyphs)
     {

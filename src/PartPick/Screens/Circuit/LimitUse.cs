@@ -31,8 +31,11 @@ public sealed record LimitUse
     /// <summary>The figure, without its unit where the limit has it.</summary>
     public required string Figure { get; init; }
 
-    /// <summary>The limit in words: "of 80 ppm", "wanted 5".</summary>
+    /// <summary>The limit in words: "of 80 ppm", "wanted 5"; the unit alone where there is none.</summary>
     public required string Against { get; init; }
+
+    /// <summary>What stands in the place of the bar where there is no limit: "no limit", "not rated".</summary>
+    public string Unlimited { get; init; } = "";
 
     /// <summary>What makes the figure what it is: "most: crystal over temperature".</summary>
     public required string Because { get; init; }

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using System.Globalization;
 using PartPick.Selection;
 using PartPick.Values;
 
@@ -117,10 +118,9 @@ public static class LimitUses
     };
 
     // The unit goes with the words, so that the numbers of all limits stand in one column.
-    private static LimitUse Unlimited(LimitName name, string word, string value, string against, string because) => new()
+    private static LimitUse Unlimited(LimitName name, string word, string value, string unlimited, string because) => new()
     {
-        Name = name, Word = word, Figure = value.Split(' ')[0],
-        Against = string.Join(' ', value.Split(' ').Skip(1)) + ", " + against,
-        Because = because, Used = null,
+        Name = name, Word = word, Figure = Figures.Three(double.Parse(value.Split(' ')[0], CultureInfo.InvariantCulture)),
+        Against = string.Join(' ', value.Split(' ').Skip(1)), Unlimited = unlimited, Because = because, Used = null,
     };
 }

@@ -39,12 +39,19 @@ public static class AnswerWords
 
     private static string MostRemoved(RankingResult result)
     {
+        if (!(result.Combinations > 0))
+        {
+            return "nothing fits; no crystal gives this frequency";
+        }
+
         if (result.Rejections.IsEmpty)
         {
             return $"nothing fits, of {Figures.Count(result.Combinations)} combinations";
         }
 
         (Limit limit, double count) = result.Rejections.OrderByDescending(pair => pair.Value).ThenBy(pair => pair.Key).First();
-        return $"nothing fits; {Trade.Words(limit)} removed {Figures.Count(count)} of {Figures.Count(result.Combinations)}";
+        double share = 100 * count / result.Combinations;
+        string percent = share < 1 ? "less than 1" : string.Create(CultureInfo.InvariantCulture, $"{Math.Floor(share):F0}");
+        return $"nothing fits; {Trade.Words(limit)} removed {percent} %";
     }
 }

@@ -14,6 +14,9 @@ public sealed record CandidateCells
     /// <summary>Load capacitance of the crystal in pF; a dash for a series part.</summary>
     public required string LoadPicofarads { get; init; }
 
+    /// <summary>The crystal's case in at most four signs; empty where it is not known.</summary>
+    public required string Case { get; init; }
+
     /// <summary>Id of the amplifier.</summary>
     public required string Amplifier { get; init; }
 

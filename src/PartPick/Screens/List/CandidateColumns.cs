@@ -35,7 +35,8 @@ public sealed class CandidateColumns
             FrequencyMegaHertz = frequency[i],
             LoadPicofarads = load[i],
             Amplifier = c.Choice.Amplifier.Id,
-            Divider = c.Choice.Tap == 0 ? "" : (1L << c.Choice.Tap).ToString(CultureInfo.InvariantCulture),
+            Case = ShortCase(c.Choice.Crystal.Holder ?? ""),
+            Divider = Divider(c.Choice.Tap),
             ErrorPpm = error[i],
             Margin = margin[i],
             Cost = cost[i],
@@ -47,4 +48,15 @@ public sealed class CandidateColumns
 
     private static string Picofarads(double? farads) =>
         farads is { } load ? (load * 1e12).ToString("0.##", CultureInfo.InvariantCulture) : "-";
+
+    // "HC-49/U" is known as 49U; a cylinder by its size.
+    private static string ShortCase(string holder) => holder.Replace("HC-", "", StringComparison.OrdinalIgnoreCase)
+        .Replace("cylinder ", "", StringComparison.OrdinalIgnoreCase).Replace("/", "", StringComparison.Ordinal);
+
+    private static string Divider(int tap) => tap switch
+    {
+        0 => "",
+        < 17 => (1L << tap).ToString(CultureInfo.InvariantCulture),
+        _ => string.Create(CultureInfo.InvariantCulture, $"2^{tap}"),
+    };
 }

@@ -6,7 +6,7 @@ namespace PartPick.Screens;
 /// <summary>The ranked candidates and which of them is chosen.</summary>
 public sealed class CandidateList
 {
-    private const int BarCells = 4;
+    private const int Page = 8;
 
     private Candidate? _picked;
     private int _top;
@@ -48,24 +48,45 @@ public sealed class CandidateList
         _picked = At > 0 ? Chosen : null;
     }
 
+    /// <summary>Moves the choice with the keys that everywhere do so.</summary>
+    /// <param name="key">The key.</param>
+    /// <returns>Whether it was one of them.</returns>
+    public bool Press(KeyPress key)
+    {
+        int? step = key.Name switch
+        {
+            KeyName.Up => -1,
+            KeyName.Down => 1,
+            KeyName.PageUp => -Page,
+            KeyName.PageDown => Page,
+            KeyName.Home => -Candidates.Length,
+            KeyName.End => Candidates.Length,
+            _ => null,
+        };
+        if (step is { } rows)
+        {
+            Move(rows);
+        }
+
+        return step is not null;
+    }
+
+    /// <summary>Keeps the chosen one chosen, as long as it or its group is there.</summary>
+    public void Hold() => _picked = Chosen;
+
     /// <summary>The heading.</summary>
     /// <param name="glyphs">The signs.</param>
-    public Line Heading(Glyphs glyphs)
-    {
-        string currency = Chosen?.Currency ?? "";
-        return new LineBuilder(glyphs).Add("  circuit  crystal MHz CL pF amplifier    ", Tone.Quiet)
-            .Column(glyphs.IsAscii ? "div" : "÷", 5, Tone.Quiet, true)
-            .Add("  error ppm  margin    ", Tone.Quiet)
-            .Column(currency.Length > 3 ? "cost" : "cost " + currency, 8, Tone.Quiet, true)
-            .Build();
-    }
+    /// <param name="width">Width in cells.</param>
+    public Line Heading(Glyphs glyphs, int width = ListShape.Full) =>
+        ListDrawing.Heading(Chosen?.Currency ?? "", new ListShape(width), glyphs);
 
     /// <summary>The rows that fit a height, with the chosen one among them.</summary>
     /// <param name="height">Number of rows.</param>
     /// <param name="chosen">Whether the keys go to the list.</param>
     /// <param name="stale">Whether the answer is one to an older requirement.</param>
     /// <param name="glyphs">The signs.</param>
-    public ImmutableArray<Line> Draw(int height, bool chosen, bool stale, Glyphs glyphs)
+    /// <param name="width">Width in cells.</param>
+    public ImmutableArray<Line> Draw(int height, bool chosen, bool stale, Glyphs glyphs, int width = ListShape.Full)
     {
         ArgumentNullException.ThrowIfNull(glyphs);
         if (Result is null || height < 1)
@@ -76,40 +97,16 @@ public sealed class CandidateList
         _top = Math.Clamp(_top, Math.Max(0, At - height + 1), At);
         _top = Math.Clamp(_top, 0, Math.Max(0, Candidates.Length - height));
         CandidateColumns columns = CandidateColumns.Of(Candidates, Result.Requirement);
+        var shape = new ListShape(width);
         var lines = ImmutableArray.CreateBuilder<Line>();
         for (int i = _top; i < Math.Min(Candidates.Length, _top + height); i++)
         {
             bool here = i == At;
-            Line line = Row(columns.Rows[i], here, glyphs);
-            lines.Add(here && chosen ? line.In(Tone.Chosen) : here ? line.In(Tone.Strong) : stale ? line.In(Tone.Quiet) : line);
+            Line line = ListDrawing.Row(columns.Rows[i], here, shape, glyphs);
+            lines.Add(here && chosen ? line.Chosen() : here ? line.In(Tone.Strong) : stale ? line.In(Tone.Quiet) : line);
         }
 
         return lines.ToImmutable();
-    }
-
-    private static Line Row(CandidateCells cells, bool here, Glyphs glyphs)
-    {
-        LimitUse? nearest = LimitUses.Nearest(cells.Uses);
-        LineBuilder line = new LineBuilder(glyphs).Column(here ? glyphs.Chosen : "", 2)
-            .Column(cells.Circuit, 9)
-            .Column(cells.FrequencyMegaHertz, 11, right: true).Add(" ")
-            .Column(cells.LoadPicofarads, 5, right: true).Add(" ")
-            .Column(cells.Amplifier, 12).Add(" ")
-            .Column(cells.Divider, 5, right: true).Add(" ");
-        Figure(line, cells.ErrorPpm, 6, LimitName.Error);
-        Figure(line, cells.Margin, 5, LimitName.Margin);
-        LimitUse cost = cells.Uses.First(use => use.Name == LimitName.Cost);
-        return line.Column(cells.Cost, 7, ToneOf(cost), right: true).Build();
-
-        void Figure(LineBuilder target, string text, int width, LimitName name)
-        {
-            LimitUse use = cells.Uses.First(other => other.Name == name);
-            target.Column(text, width, ToneOf(use), right: true).Add(" ")
-                .Add(Bars.Bar(use.Used, BarCells, glyphs), ToneOf(use)).Add(" ");
-        }
-
-        Tone ToneOf(LimitUse use) =>
-            use.IsBroken ? Tone.Warning : ReferenceEquals(use, nearest) ? Tone.Accent : Tone.Normal;
     }
 
     private int IndexOf(Func<Candidate, bool> wanted)
@@ -125,7 +122,10 @@ public sealed class CandidateList
         return -1;
     }
 
-    private static bool SameGroup(Candidate one, Candidate other) =>
+    /// <summary>Whether two candidates are of one group: circuit, crystal, amplifier and stage.</summary>
+    /// <param name="one">One of them.</param>
+    /// <param name="other">The other one.</param>
+    public static bool SameGroup(Candidate one, Candidate other) =>
         one.Choice.Circuit == other.Choice.Circuit
         && one.Choice.Crystal.Id == other.Choice.Crystal.Id
         && one.Choice.Amplifier.Id == other.Choice.Amplifier.Id

@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using Terminal.Gui.Input;
 
 namespace PartPick.Screens;
@@ -23,16 +24,22 @@ internal static class Keys
         [Key.Delete] = KeyName.Delete,
     };
 
-    /// <summary>The key; null where the screens have no use for it.</summary>
-    public static KeyPress? Of(Key key)
+    /// <summary>The keys; none where the screens have no use for it.</summary>
+    /// <remarks>
+    /// Esc and a key that follow each other fast, as they do on a slow line, arrive as that key with Alt: they are taken apart.
+    /// </remarks>
+    public static ImmutableArray<KeyPress> Of(Key key)
     {
-        if (Named.TryGetValue(key, out KeyName name))
+        if (key.IsAlt)
         {
-            return new KeyPress(name);
+            return [new KeyPress(KeyName.Escape), .. Of(key.NoAlt)];
         }
 
-        return key.IsCtrl || key.IsAlt || key.AsRune is not { Value: >= ' ' and <= 0xffff } rune
-            ? null
-            : KeyPress.Of((char)rune.Value);
+        if (Named.TryGetValue(key, out KeyName name))
+        {
+            return [new KeyPress(name)];
+        }
+
+        return key.IsCtrl || key.AsRune is not { Value: >= ' ' and <= 0xffff } rune ? [] : [KeyPress.Of((char)rune.Value)];
     }
 }

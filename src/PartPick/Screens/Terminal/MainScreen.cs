@@ -55,12 +55,17 @@ internal sealed class MainScreen : Runnable
             return true;
         }
 
-        if (Keys.Of(key) is not { } press)
+        ImmutableArray<KeyPress> presses = Keys.Of(key);
+        if (presses.IsEmpty)
         {
             return base.OnKeyDown(key);
         }
 
-        _model.Press(press);
+        foreach (KeyPress press in presses)
+        {
+            _model.Press(press);
+        }
+
         if (_model.IsDone)
         {
             App?.RequestStop();

@@ -17,6 +17,7 @@ internal sealed class Palette
             [Tone.Strong] = new(Color.None, Color.None, TextStyle.Bold),
             [Tone.Accent] = new(accent, Color.None, TextStyle.Bold),
             [Tone.Chosen] = new(Color.None, Color.None, TextStyle.Reverse),
+            [Tone.ChosenAccent] = new(accent, Color.None, TextStyle.Reverse | TextStyle.Bold),
             [Tone.Caret] = new(accent, Color.None, TextStyle.Reverse | TextStyle.Underline),
             [Tone.Warning] = new(warning, Color.None, TextStyle.Bold),
         };

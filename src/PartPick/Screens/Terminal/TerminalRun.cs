@@ -9,9 +9,12 @@ namespace PartPick.Screens;
 /// <param name="ranking">What ranks.</param>
 /// <param name="traits">What the terminal can show.</param>
 /// <param name="keep">Keeps a requirement; called from any thread.</param>
-internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits, Action<Requirement> keep)
+/// <param name="currency">The currency of the costs; empty where it is not known.</param>
+internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits, Action<Requirement> keep, string currency)
 {
     private const string MouseReportsOff = "\x1b[?1003l\x1b[?1015l\x1b[?1006l";
+
+    private static readonly TimeSpan LastMoment = TimeSpan.FromSeconds(3);
 
     /// <summary>Shows the screen until it is left.</summary>
     /// <param name="start">The requirement to begin with.</param>
@@ -26,14 +29,12 @@ internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits
         using IApplication app = Application.Create().Init(DriverRegistry.Names.ANSI);
         app.Driver!.WriteRaw(MouseReportsOff);
         using var live = new LiveRanking(ranking, action => Post(app, action), TimeProvider.System);
-        var model = new MainModel(start, live, glyphs, notice);
+        var model = new MainModel(start, live, glyphs, notice, currency);
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
         using var screen = new MainScreen(model, palette);
         using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, Leave);
         using PosixSignalRegistration interrupt = PosixSignalRegistration.Create(PosixSignal.SIGINT, Leave);
-
-        // After a hang-up there is no terminal to give back: keep the requirement, and let the process end.
-        using PosixSignalRegistration hangUp = PosixSignalRegistration.Create(PosixSignal.SIGHUP, _ => keep(model.Wanted.Accepted));
+        using PosixSignalRegistration hangUp = PosixSignalRegistration.Create(PosixSignal.SIGHUP, HangUp);
         app.Run(screen);
         return model.Wanted.Accepted;
 
@@ -41,6 +42,32 @@ internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits
         {
             context.Cancel = true;
             Post(app, app.RequestStop);
+        }
+
+        // After a real hang-up there is no terminal to give back: keep the requirement, and let the process end.
+        void HangUp(PosixSignalContext context)
+        {
+            keep(model.Wanted.Accepted);
+            if (HasTerminal())
+            {
+                Leave(context);
+
+                // Should it be gone a moment later, waiting for it would last for ever.
+                _ = Task.Delay(LastMoment).ContinueWith(_ => Environment.Exit(ExitStatus.Fault), TaskScheduler.Default);
+            }
+        }
+    }
+
+    private static bool HasTerminal()
+    {
+        try
+        {
+            using FileStream terminal = File.OpenWrite("/dev/tty");
+            return true;
+        }
+        catch (Exception error) when (error is IOException or UnauthorizedAccessException)
+        {
+            return false;
         }
     }
 

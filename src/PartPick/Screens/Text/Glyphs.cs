@@ -21,7 +21,7 @@ public sealed record Glyphs
     {
         IsAscii = false,
         Horizontal = '─', Vertical = '│', DownRight = '┌', DownLeft = '┐', UpRight = '└', UpLeft = '┘',
-        TeeRight = '├', TeeLeft = '┤', TeeDown = '┬', TeeUp = '┴', Cross = '┼', Ground = "═╧═", Full = '■', Free = '·',
+        TeeRight = '├', TeeLeft = '┤', TeeDown = '┬', TeeUp = '┴', Cross = '┼', Ground = "═╧═", Full = '■', Free = '·', Trace = '-',
         Chosen = "►", Up = "↑", Down = "↓", Left = "←", Right = "→",
     };
 
@@ -30,7 +30,7 @@ public sealed record Glyphs
     {
         IsAscii = true,
         Horizontal = '-', Vertical = '|', DownRight = '+', DownLeft = '+', UpRight = '+', UpLeft = '+',
-        TeeRight = '+', TeeLeft = '+', TeeDown = '+', TeeUp = '+', Cross = '+', Ground = "===", Full = '#', Free = '.',
+        TeeRight = '+', TeeLeft = '+', TeeDown = '+', TeeUp = '+', Cross = '+', Ground = "===", Full = '#', Free = '.', Trace = '-',
         Chosen = ">", Up = "Up", Down = "Down", Left = "Left", Right = "Right",
     };
 
@@ -78,6 +78,9 @@ public sealed record Glyphs
 
     /// <summary>A free cell of a bar.</summary>
     public required char Free { get; init; }
+
+    /// <summary>A cell of a bar of which less than half is used.</summary>
+    public required char Trace { get; init; }
 
     /// <summary>Mark of the chosen row.</summary>
     public required string Chosen { get; init; }

@@ -61,6 +61,12 @@ public sealed class Line : IEquatable<Line>
     /// <param name="tone">The tone.</param>
     public Line In(Tone tone) => new([new Span(Text, tone)]);
 
+    /// <summary>The line as the chosen one: what has the accent or a warning keeps standing out.</summary>
+    public Line Chosen() => new(Spans.Select(span => span with
+    {
+        Tone = span.Tone is Tone.Accent or Tone.Warning ? Tone.ChosenAccent : Tone.Chosen,
+    }));
+
     /// <inheritdoc/>
     public bool Equals(Line? other) => other is not null && Spans.SequenceEqual(other.Spans);
 

@@ -20,6 +20,22 @@ public sealed class LineBuilder(Glyphs glyphs)
         return this;
     }
 
+    /// <summary>Adds a line that is there already, cut after a whole word where it is too long.</summary>
+    /// <param name="line">The line.</param>
+    /// <param name="width">The most cells it may take.</param>
+    public LineBuilder Add(Line line, int width)
+    {
+        ArgumentNullException.ThrowIfNull(line);
+        int end = line.Width <= width ? line.Width : Math.Max(0, line.Text.LastIndexOf(' ', Math.Max(0, width)));
+        foreach (Span span in line.Fit(end).Spans)
+        {
+            _spans.Add(span);
+            Width += span.Text.Length;
+        }
+
+        return this;
+    }
+
     /// <summary>Adds text in a column: filled with spaces, or cut with a mark where it is too long.</summary>
     /// <param name="text">The text.</param>
     /// <param name="width">Width of the column in cells.</param>

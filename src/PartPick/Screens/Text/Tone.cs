@@ -18,6 +18,9 @@ public enum Tone
     /// <summary>What is chosen.</summary>
     Chosen,
 
+    /// <summary>What has the accent or is to be watched, within what is chosen.</summary>
+    ChosenAccent,
+
     /// <summary>The place where typing goes.</summary>
     Caret,
 

@@ -27,10 +27,14 @@ public sealed class ChoiceField : SentenceField
 
     /// <inheritdoc/>
     public override string Help(Requirement requirement) =>
-        "Space for the next of: " + string.Join(", ", _choices.Select(choice => choice.Words));
+        "Space: " + string.Join(", ", _choices.Select(choice => choice.Words));
 
     /// <inheritdoc/>
     public override string Show(Requirement requirement) => _choices[IndexOf(requirement)].Words;
+
+    /// <inheritdoc/>
+    public override Requirement? Change(Requirement requirement, KeyPress key) =>
+        IsNext(key) ? Next(requirement) : key.Name == KeyName.Letter ? Pick(requirement, key.Letter) : null;
 
     /// <summary>The requirement with the next choice.</summary>
     /// <param name="requirement">The requirement.</param>

@@ -10,7 +10,7 @@ public sealed class CircuitsField() : SentenceField("circuits")
 
     /// <inheritdoc/>
     public override string Help(Requirement requirement) =>
-        "g gate, c counter, p port, f follower in or out; Space for the next";
+        "g c p f: gate, counter, port, follower";
 
     /// <inheritdoc/>
     public override string Show(Requirement requirement)
@@ -21,6 +21,10 @@ public sealed class CircuitsField() : SentenceField("circuits")
             ? "any circuit"
             : string.Join(" or ", chosen.Select(kind => kind.Word())) + (chosen.Length == 1 ? " alone" : "");
     }
+
+    /// <inheritdoc/>
+    public override Requirement? Change(Requirement requirement, KeyPress key) =>
+        IsNext(key) ? Next(requirement) : key.Name == KeyName.Letter ? Toggle(requirement, key.Letter) : null;
 
     /// <summary>Puts a circuit in or takes it out.</summary>
     /// <param name="requirement">The requirement.</param>

@@ -6,7 +6,7 @@ using PartPick.Values;
 namespace PartPick.Screens;
 
 /// <summary>A piece of the sentence: words, or a value that can be changed.</summary>
-/// <param name="Words">The words; empty for a value.</param>
+/// <param name="Words">The words, with ~ for a space at which no line ends; empty for a value.</param>
 /// <param name="Field">The value; null for words.</param>
 public sealed record SentencePiece(string Words, SentenceField? Field);
 
@@ -15,22 +15,23 @@ public static class Sentence
 {
     /// <summary>The pieces, in the order of the sentence; the first value is the name, the second the output frequency.</summary>
     /// <param name="start">The requirement at the beginning: a board of its own stays among the choices.</param>
-    public static ImmutableArray<SentencePiece> Pieces(Requirement start)
+    /// <param name="currency">The currency of the cost limit; empty where it is not known.</param>
+    public static ImmutableArray<SentencePiece> Pieces(Requirement start, string currency = "")
     {
         ArgumentNullException.ThrowIfNull(start);
         return
         [
             Value(Name()), Words(": "), Value(Output()), Words(" "), Value(Wave()),
-            Words(", within ±"), Value(Budget()), Words(" for "), Value(Years()),
-            Words(" years, "), Value(SupplyMin()), Words(" to "), Value(SupplyMax()),
-            Words(", "), Value(TemperatureMin()), Words(" to "), Value(TemperatureMax()),
-            Words(", start-up margin "), Value(Margin()), Words(", "), Value(Start()), Words(" "), Value(StartUpTime()),
-            Words(", "), Value(Builds()), Words(" boards at "), Value(Cost()),
-            Words(", "), Value(BoardOf(start)), Words(" board, "), Value(Series(start)), Words(" load capacitors, "),
+            Words(", within ±"), Value(Budget()), Words(" for "), Value(Years()), Words("~years, "),
+            Value(RangeFields.SupplyMin()), Words("~to~"), Value(RangeFields.SupplyMax()), Words(", "),
+            Value(RangeFields.TemperatureMin()), Words("~to~"), Value(RangeFields.TemperatureMax()),
+            Words(", start-up margin~"), Value(Margin()), Words(", "), Value(Start()), Words(" "), Value(StartUpTime()),
+            Words(", "), Value(Builds()), Words("~boards at "), Value(Cost(currency)),
+            Words(", "), Value(BoardOf(start)), Words(" board, C1,~C2~of~"), Value(Series(start)), Words(", "),
             Value(new CircuitsField()),
-            Words("; error counts "), Value(Weight("weight of the error", w => w.Error, (w, v) => w with { Error = v })),
-            Words(", margin "), Value(Weight("weight of the margin", w => w.Margin, (w, v) => w with { Margin = v })),
-            Words(", cost "), Value(Weight("weight of the cost", w => w.Cost, (w, v) => w with { Cost = v })), Words("."),
+            Words("; error ×"), Value(Weight("weight of the error", w => w.Error, (w, v) => w with { Error = v })),
+            Words(", margin ×"), Value(Weight("weight of the margin", w => w.Margin, (w, v) => w with { Margin = v })),
+            Words(", cost ×"), Value(Weight("weight of the cost", w => w.Cost, (w, v) => w with { Cost = v })), Words("."),
         ];
     }
 
@@ -39,11 +40,11 @@ public static class Sentence
     private static SentencePiece Value(SentenceField field) => new("", field);
 
     private static TypedField Name() => new(
-        "name", "a few words that say what it is for", r => r.Name.Length == 0 ? "Wanted" : r.Name, r => r.Name,
+        "name", "a few words: what it is for", r => r.Name.Length == 0 ? "Wanted" : r.Name, r => r.Name,
         (r, text) => Result.Ok(r with { Name = text.Trim() }), letter => char.IsLetterOrDigit(letter));
 
     private static TypedField Output() => TypedFields.Value(
-        "output frequency", "a frequency such as 1 kHz, 32768 or 4.096 MHz", Dimension.Frequency,
+        "output frequency", "such as 1 kHz or 4.096 MHz", Dimension.Frequency,
         r => r.OutputHz, (r, v) => r with { OutputHz = v }, (_, v) => v is > 0 and <= 1e9 ? null : "is not above 0 and up to 1 GHz");
 
     private static ChoiceField Wave() => new("waveform",
@@ -54,45 +55,25 @@ public static class Sentence
     ]);
 
     private static TypedField Budget() => TypedFields.Value(
-        "frequency error", "a relative figure such as 80 ppm or 0.01 %; a bare number is in ppm", Dimension.Relative,
+        "frequency error", "ppm, or such as 0.01 %", Dimension.Relative,
         r => r.BudgetRatio, (r, v) => r with { BudgetRatio = v }, (_, v) => v is > 0 and < 1 ? null : "is not above 0 and below 100 %");
 
     private static TypedField Years() => TypedFields.Value(
-        "years of service", "a number from 0 to 100", Dimension.Number,
+        "years of service", "0 to 100", Dimension.Number,
         r => r.Years, (r, v) => r with { Years = v }, (_, v) => v <= 100 ? null : "is more than 100");
 
-    private static TypedField SupplyMin() => TypedFields.Value(
-        "lowest supply", "a voltage such as 4.5 V, at most the highest supply", Dimension.Voltage,
-        r => r.SupplyMinVolts, (r, v) => r with { SupplyMinVolts = v },
-        (r, v) => v > 0 && v <= r.SupplyMaxVolts ? null : "is not above 0 and up to " + Volts(r.SupplyMaxVolts));
-
-    private static TypedField SupplyMax() => TypedFields.Value(
-        "highest supply", "a voltage such as 5.5 V, at least the lowest supply", Dimension.Voltage,
-        r => r.SupplyMaxVolts, (r, v) => r with { SupplyMaxVolts = v },
-        (r, v) => v >= r.SupplyMinVolts && v <= 100 ? null : $"is not from {Volts(r.SupplyMinVolts)} to 100 V");
-
-    private static TypedField TemperatureMin() => TypedFields.Value(
-        "lowest temperature", "degrees Celsius such as -10, at most the highest temperature", Dimension.Temperature,
-        r => r.TemperatureMinCelsius, (r, v) => r with { TemperatureMinCelsius = v },
-        (r, v) => v <= r.TemperatureMaxCelsius ? null : "is above the highest temperature");
-
-    private static TypedField TemperatureMax() => TypedFields.Value(
-        "highest temperature", "degrees Celsius such as 50, at least the lowest temperature", Dimension.Temperature,
-        r => r.TemperatureMaxCelsius, (r, v) => r with { TemperatureMaxCelsius = v },
-        (r, v) => v < r.TemperatureMinCelsius ? "is below the lowest temperature" : v > 300 ? "is above 300 °C" : null);
-
     private static TypedField Margin() => TypedFields.Value(
-        "start-up margin", "a number from 1; 5 is common practice, 10 for safety-related work", Dimension.Number,
+        "start-up margin", "5 is usual, 10 for safety", Dimension.Number,
         r => r.Margin, (r, v) => r with { Margin = v }, (_, v) => v is >= 1 and <= 1000 ? null : "is not from 1 to 1000");
 
     private static ChoiceField Start() => new("start",
     [
-        new('s', "starting by itself", r => !r.AllowDisturbance, r => r with { AllowDisturbance = false }),
+        new('s', "self-starting", r => !r.AllowDisturbance, r => r with { AllowDisturbance = false }),
         new('d', "a disturbance allowed", r => r.AllowDisturbance, r => r with { AllowDisturbance = true }),
     ]);
 
     private static TypedField StartUpTime() => TypedFields.Optional(
-        "start-up time", "a time such as 50 ms, or any", Dimension.Time,
+        "start-up time", "such as 50 ms, or any", Dimension.Time,
         r => r.StartUpTimeSeconds is { } time ? "within " + ValueText.FormatExact(time, Dimension.Time) : "in any time",
         r => r.StartUpTimeSeconds is { } time ? ValueText.FormatExact(time, Dimension.Time) : "any",
         (r, v) => r with { StartUpTimeSeconds = v });
@@ -101,9 +82,9 @@ public static class Sentence
         "boards", "a whole number from 1", Dimension.Count,
         r => r.Builds, (r, v) => r with { Builds = (int)v }, (_, v) => v >= 1 ? null : "is below 1");
 
-    private static TypedField Cost() => TypedFields.Optional(
-        "cost limit", "an amount for one board such as 2.50, or any", Dimension.Number,
-        r => r.CostLimit is { } cost ? Figures.Money(cost) + " each at most" : "any cost",
+    private static TypedField Cost(string currency) => TypedFields.Optional(
+        "cost limit", "for one board, such as 2.50, or any", Dimension.Number,
+        r => r.CostLimit is { } cost ? $"{Figures.Money(cost)} {(currency.Length == 0 ? "each" : currency)} at most" : "any cost",
         r => r.CostLimit is { } cost ? cost.ToString(CultureInfo.InvariantCulture) : "any",
         (r, v) => r with { CostLimit = v is { } cost ? (decimal)Math.Min(cost, 1e9) : null });
 
@@ -112,15 +93,13 @@ public static class Sentence
         .Select(board => new SentenceChoice(
             board.Name.ToLowerInvariant()[0], board.Name, r => r.Board == board, r => r with { Board = board })));
 
-    private static ChoiceField Series(Requirement start) => new("series of the load capacitors",
+    private static ChoiceField Series(Requirement start) => new("capacitor series",
         PreferredSeries.All.Where(series => series.Name is "E3" or "E6" or "E12" or "E24" || series.Name == start.CapacitorSeries)
             .Select(series => new SentenceChoice(
                 series.Name[1], series.Name, r => r.CapacitorSeries == series.Name, r => r with { CapacitorSeries = series.Name })));
 
     private static TypedField Weight(string name, Func<Weights, double> get, Func<Weights, double, Weights> set) =>
         TypedFields.Value(
-            name, "a number from 0 to 100; 0 leaves it out of the score", Dimension.Number,
+            name, "0 to 100; 0 leaves it out", Dimension.Number,
             r => get(r.Weights), (r, v) => r with { Weights = set(r.Weights, v) }, (_, v) => v <= 100 ? null : "is more than 100");
-
-    private static string Volts(double volts) => ValueText.FormatExact(volts, Dimension.Voltage);
 }

@@ -22,4 +22,18 @@ public abstract class SentenceField
     /// <summary>Its words in the sentence.</summary>
     /// <param name="requirement">The requirement.</param>
     public abstract string Show(Requirement requirement);
+
+    /// <summary>The text with which a key begins typing; null where it begins none.</summary>
+    /// <param name="requirement">The requirement.</param>
+    /// <param name="key">The key.</param>
+    public virtual string? Begin(Requirement requirement, KeyPress key) => null;
+
+    /// <summary>The requirement after a key that changes the value at once; null where the key does not.</summary>
+    /// <param name="requirement">The requirement.</param>
+    /// <param name="key">The key.</param>
+    public virtual Requirement? Change(Requirement requirement, KeyPress key) => null;
+
+    /// <summary>Whether a key asks for the next of a few choices.</summary>
+    /// <param name="key">The key.</param>
+    protected static bool IsNext(KeyPress key) => key is { Name: KeyName.Enter } or { Name: KeyName.Letter, Letter: ' ' };
 }

@@ -97,7 +97,7 @@ internal sealed class SentenceLayout
             {
                 if (part.Length > 0)
                 {
-                    words[^1].Add(text with { Text = part });
+                    words[^1].Add(text with { Text = part.Replace('~', ' ') });
                 }
             }
         }

@@ -4,40 +4,28 @@ using PartPick.Values;
 
 namespace PartPick.Screens;
 
-/// <summary>What became of a key in the sentence.</summary>
-public enum SentenceAnswer
-{
-    /// <summary>The sentence has no use for it.</summary>
-    NotMine,
-
-    /// <summary>It is done.</summary>
-    Done,
-
-    /// <summary>The way leads out of the sentence, to the list.</summary>
-    Leave,
-}
-
 /// <summary>The wanted sentence: moving through its values and changing them in place.</summary>
 public sealed class SentenceModel
 {
-    private const int LongestText = 60;
-
     private readonly ImmutableArray<SentencePiece> _pieces;
     private readonly ImmutableArray<SentenceField> _fields;
+    private readonly SentenceWalk _walk;
     private readonly Glyphs _glyphs;
+    private TypedText? _typed;
     private int _width = 80;
 
     /// <summary>Makes the sentence of a requirement.</summary>
     /// <param name="requirement">The requirement.</param>
     /// <param name="glyphs">The signs.</param>
-    public SentenceModel(Requirement requirement, Glyphs glyphs)
+    /// <param name="currency">The currency of the cost limit; empty where it is not known.</param>
+    public SentenceModel(Requirement requirement, Glyphs glyphs, string currency = "")
     {
         Accepted = requirement;
         Current = requirement;
         _glyphs = glyphs;
-        _pieces = Sentence.Pieces(requirement);
+        _pieces = Sentence.Pieces(requirement, currency);
         _fields = [.. _pieces.Select(piece => piece.Field).OfType<SentenceField>()];
-        At = 1;
+        _walk = new SentenceWalk(1);
     }
 
     /// <summary>Raised when <see cref="Current"/> is another requirement; true while it is still being typed.</summary>
@@ -50,19 +38,19 @@ public sealed class SentenceModel
     public Requirement Current { get; private set; }
 
     /// <summary>Number of the value that is chosen, from zero.</summary>
-    public int At { get; private set; }
+    public int At => _walk.At;
 
     /// <summary>The value that is chosen.</summary>
     public SentenceField Field => _fields[At];
 
-    /// <summary>Number of values.</summary>
-    public int Count => _fields.Length;
-
     /// <summary>What is being typed; null while nothing is.</summary>
-    public string? Typed { get; private set; }
+    public string? Typed => _typed?.Text;
 
     /// <summary>Where the next letter goes in <see cref="Typed"/>.</summary>
-    public int Caret { get; private set; }
+    public int Caret => _typed?.Caret ?? 0;
+
+    /// <summary>Whether what is being typed is a value already; true while nothing is.</summary>
+    public bool IsFit => _typed is null || ((TypedField)Field).Take(Accepted, Typed!).IsOk;
 
     /// <summary>What is wrong with what was typed; null where nothing is known to be.</summary>
     public Problem? Problem { get; private set; }
@@ -71,92 +59,54 @@ public sealed class SentenceModel
     /// <param name="key">The key.</param>
     public SentenceAnswer Press(KeyPress key)
     {
+        if (_typed is { } typed)
+        {
+            return Type(typed, key);
+        }
+
         Problem = null;
-        return Typed is null ? Move(key) : Type(key);
+        return Move(key);
     }
 
     /// <summary>Leaves what is being typed as it was before.</summary>
     public void Drop()
     {
-        Typed = null;
+        _typed = null;
+        Problem = null;
         Become(Accepted, false);
     }
 
     /// <summary>The sentence on the screen.</summary>
     /// <param name="width">Width in cells.</param>
     /// <param name="chosen">Whether the keys go to the sentence.</param>
-    public ImmutableArray<Line> Draw(int width, bool chosen)
+    /// <param name="rows">The most rows it may take: those about the chosen value are shown, or the first ones.</param>
+    public ImmutableArray<Line> Draw(int width, bool chosen, int rows = int.MaxValue)
     {
         _width = width;
-        return Layout(chosen).Lines;
-    }
-
-    private SentenceAnswer Move(KeyPress key)
-    {
-        switch (key.Name)
+        SentenceLayout layout = Layout(chosen);
+        if (layout.Lines.Length <= rows)
         {
-            case KeyName.Tab when At == Count - 1:
-            case KeyName.BackTab when At == 0:
-            case KeyName.Escape:
-                return SentenceAnswer.Leave;
-            case KeyName.Tab or KeyName.Right:
-                At = Math.Min(At + 1, Count - 1);
-                return SentenceAnswer.Done;
-            case KeyName.BackTab or KeyName.Left:
-                At = Math.Max(At - 1, 0);
-                return SentenceAnswer.Done;
-            case KeyName.Home:
-                At = 0;
-                return SentenceAnswer.Done;
-            case KeyName.End:
-                At = Count - 1;
-                return SentenceAnswer.Done;
-            case KeyName.Up:
-                MoveRow(-1);
-                return SentenceAnswer.Done;
-            case KeyName.Down:
-                return MoveRow(1) ? SentenceAnswer.Done : SentenceAnswer.Leave;
-            default:
-                return Change(key);
-        }
-    }
-
-    private bool MoveRow(int step)
-    {
-        ImmutableArray<(int Row, int Column)> places = Layout(true).Places;
-        (int row, int column) = places[At];
-        var there = Enumerable.Range(0, Count).Where(i => places[i].Row == row + step).ToList();
-        if (there.Count == 0)
-        {
-            return false;
+            return layout.Lines;
         }
 
-        At = there.MinBy(i => Math.Abs(places[i].Column - column));
-        return true;
+        int top = chosen ? Math.Clamp(layout.Places[At].Row - rows / 2, 0, layout.Lines.Length - rows) : 0;
+        ImmutableArray<Line> shown = layout.Lines.Slice(top, rows);
+        return top + rows == layout.Lines.Length ? shown
+            : shown.SetItem(rows - 1, new LineBuilder(_glyphs).Add(shown[^1], width - _glyphs.Show(" …").Length).Add(" …").Build());
     }
+
+    private SentenceAnswer Move(KeyPress key) => _walk.Press(key, Layout(true).Places) ?? Change(key);
 
     private SentenceAnswer Change(KeyPress key)
     {
-        bool next = key.Name == KeyName.Enter || key is { Name: KeyName.Letter, Letter: ' ' };
-        switch (Field)
+        if (Field.Begin(Accepted, key) is { } text)
         {
-            case TypedField typed:
-                return Begin(typed, key);
-            case ChoiceField choice:
-                return Choose(next ? choice.Next(Accepted) : key.Name == KeyName.Letter ? choice.Pick(Accepted, key.Letter) : null);
-            case CircuitsField:
-                return Choose(
-                    next ? CircuitsField.Next(Accepted)
-                    : key.Name == KeyName.Letter ? CircuitsField.Toggle(Accepted, key.Letter)
-                    : null);
-            default:
-                return SentenceAnswer.NotMine;
+            _typed = new TypedText(text);
+            Preview();
+            return SentenceAnswer.Done;
         }
-    }
 
-    private SentenceAnswer Choose(Requirement? requirement)
-    {
-        if (requirement is null)
+        if (Field.Change(Accepted, key) is not { } requirement)
         {
             return SentenceAnswer.NotMine;
         }
@@ -171,32 +121,8 @@ public sealed class SentenceModel
         return SentenceAnswer.Done;
     }
 
-    private SentenceAnswer Begin(TypedField field, KeyPress key)
+    private SentenceAnswer Type(TypedText typed, KeyPress key)
     {
-        string text = field.EditText(Accepted);
-        string? begun = key.Name switch
-        {
-            KeyName.Enter => text,
-            KeyName.Backspace => text.Length > 0 ? text[..^1] : text,
-            KeyName.Delete => "",
-            KeyName.Letter when key.Letter == ' ' => text,
-            KeyName.Letter when field.BeginsWith(key.Letter) => key.Letter.ToString(),
-            _ => null,
-        };
-        if (begun is null)
-        {
-            return SentenceAnswer.NotMine;
-        }
-
-        Typed = begun;
-        Caret = begun.Length;
-        Preview();
-        return SentenceAnswer.Done;
-    }
-
-    private SentenceAnswer Type(KeyPress key)
-    {
-        string typed = Typed!;
         switch (key.Name)
         {
             case KeyName.Escape:
@@ -207,30 +133,11 @@ public sealed class SentenceModel
                 return SentenceAnswer.Done;
             case KeyName.Tab or KeyName.BackTab or KeyName.Up or KeyName.Down:
                 return Keep() ? Move(key) : SentenceAnswer.Done;
-            case KeyName.Left:
-                Caret = Math.Max(0, Caret - 1);
-                break;
-            case KeyName.Right:
-                Caret = Math.Min(typed.Length, Caret + 1);
-                break;
-            case KeyName.Home:
-                Caret = 0;
-                break;
-            case KeyName.End:
-                Caret = typed.Length;
-                break;
-            case KeyName.Backspace when Caret > 0:
-                Typed = typed.Remove(--Caret, 1);
-                Preview();
-                break;
-            case KeyName.Delete when Caret < typed.Length:
-                Typed = typed.Remove(Caret, 1);
-                Preview();
-                break;
-            case KeyName.Letter when !char.IsControl(key.Letter) && typed.Length < LongestText:
-                Typed = typed.Insert(Caret++, key.Letter.ToString());
-                Preview();
-                break;
+        }
+
+        if (typed.Press(key))
+        {
+            Preview();
         }
 
         return SentenceAnswer.Done;
@@ -245,15 +152,18 @@ public sealed class SentenceModel
             return false;
         }
 
-        Typed = null;
+        _typed = null;
+        Problem = null;
         Accepted = taken.Value;
         Become(taken.Value, false);
         return true;
     }
 
+    // What was refused stays named until the text fits.
     private void Preview()
     {
         Result<Requirement> taken = ((TypedField)Field).Take(Accepted, Typed!);
+        Problem = Problem is null || taken.IsOk ? null : taken.Problem;
         Become(taken.ValueOr(Accepted), true);
     }
 
@@ -267,33 +177,5 @@ public sealed class SentenceModel
         }
     }
 
-    private SentenceLayout Layout(bool chosen)
-    {
-        var texts = new List<SentenceText>();
-        int number = 0;
-        foreach (SentencePiece piece in _pieces)
-        {
-            if (piece.Field is null)
-            {
-                texts.Add(new SentenceText(_glyphs.Show(piece.Words), Tone.Normal, -1));
-                continue;
-            }
-
-            bool here = chosen && number == At;
-            if (here && Typed is not null)
-            {
-                texts.Add(new SentenceText(_glyphs.Show(Typed[..Caret]), Tone.Accent, number));
-                texts.Add(new SentenceText(_glyphs.Show(Caret < Typed.Length ? Typed[Caret..(Caret + 1)] : " "), Tone.Caret, number));
-                texts.Add(new SentenceText(_glyphs.Show(Caret < Typed.Length ? Typed[(Caret + 1)..] : ""), Tone.Accent, number));
-            }
-            else
-            {
-                texts.Add(new SentenceText(_glyphs.Show(piece.Field.Show(Accepted)), here ? Tone.Chosen : Tone.Strong, number));
-            }
-
-            number++;
-        }
-
-        return SentenceLayout.Of(texts, _width, 2);
-    }
+    private SentenceLayout Layout(bool chosen) => SentenceDrawing.Of(this, _pieces, _width, chosen, _glyphs);
 }

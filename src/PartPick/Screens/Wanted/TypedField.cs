@@ -45,9 +45,19 @@ public sealed class TypedField : SentenceField
     /// <param name="requirement">The requirement.</param>
     public string EditText(Requirement requirement) => _text(requirement);
 
-    /// <summary>Whether typing can begin with a letter, digit or sign.</summary>
-    /// <param name="letter">The letter.</param>
-    public bool BeginsWith(char letter) => _begins(letter);
+    /// <inheritdoc/>
+    public override string? Begin(Requirement requirement, KeyPress key)
+    {
+        string text = EditText(requirement);
+        return key switch
+        {
+            { Name: KeyName.Enter } or { Name: KeyName.Letter, Letter: ' ' } => text,
+            { Name: KeyName.Backspace } => text.Length > 0 ? text[..^1] : text,
+            { Name: KeyName.Delete } => "",
+            { Name: KeyName.Letter } when _begins(key.Letter) => key.Letter.ToString(),
+            _ => null,
+        };
+    }
 
     /// <summary>The requirement with this value, or what is wrong with it.</summary>
     /// <param name="requirement">The requirement so far.</param>

@@ -13,10 +13,11 @@ internal static class TypedFields
         Dimension dimension,
         Func<Requirement, double> get,
         Func<Requirement, double, Requirement> set,
-        Func<Requirement, double, string?> check)
+        Func<Requirement, double, string?> check,
+        Func<Requirement, string>? show = null)
     {
         string Text(Requirement requirement) => ValueText.FormatExact(get(requirement), dimension);
-        return new TypedField(name, fits, Text, Text, Take, BeginsNumber);
+        return new TypedField(name, fits, show ?? Text, Text, Take, BeginsNumber);
 
         Result<Requirement> Take(Requirement requirement, string text) =>
             Read(text, dimension, name).Then(value => check(requirement, value) is { } unfit

@@ -1,0 +1,69 @@
+using System.Collections.Immutable;
+
+namespace PartPick.Screens;
+
+/// <summary>The foot of the screen: what is wrong, what there is to say, or the keys that work here.</summary>
+/// <param name="model">The screen.</param>
+/// <param name="glyphs">The signs.</param>
+/// <param name="width">Width in cells.</param>
+internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
+{
+    private const int MostRows = 2;
+
+    /// <summary>One line, or two where a problem needs them.</summary>
+    public ImmutableArray<Line> Draw()
+    {
+        if (model is { Place: Place.Sentence, ShowsKeys: false, Wanted.Problem: { } problem })
+        {
+            return [.. Paragraph.Of(problem.ToString(), width - 1, glyphs, " ! ", 3, Tone.Warning).Take(MostRows)];
+        }
+
+        return model switch
+        {
+            { Notice: { } notice } => [new LineBuilder(glyphs).Add(" ").Column(notice, width - 1, Tone.Accent).Build()],
+            { ShowsKeys: true } => [Keys((UpDown, "scroll"), ("Esc", "back"))],
+            { Place: Place.Sentence, Wanted.Typed: not null } => [Value(("Enter", "keep"), ("Esc", "as it was"))],
+            { Place: Place.Sentence } => [Value(("Tab", "next"), ("Esc", model.IsReading ? "circuit" : "list"))],
+            { Place: Place.Circuit } => [Keys(
+                (UpDown, "scroll"), (glyphs.Left + " " + glyphs.Right, "other circuits"), ("Esc", "list"), ("e", "edit"), ("?", "keys"))],
+            { List.Chosen: null } => [Keys(("e", "edit the wanted"), ("?", "keys"), ("q", "quit"))],
+            _ => [Keys((UpDown, "choose"), ("Enter", "open"), ("e", "edit the wanted"), ("?", "keys"), ("q", "quit"))],
+        };
+    }
+
+    private string UpDown => glyphs.Up + " " + glyphs.Down;
+
+    // What the value is stands at the left, the keys at the right.
+    private Line Value(params (string Key, string Does)[] keys)
+    {
+        int tail = keys.Sum(pair => pair.Key.Length + pair.Does.Length + 4);
+        SentenceModel wanted = model.Wanted;
+        string name = wanted.Field.Name + (wanted.IsFit ? ": " : ", not yet: ");
+        LineBuilder line = new LineBuilder(glyphs).Add(" ")
+            .Column(name + wanted.Field.Help(wanted.Accepted), Math.Max(10, width - tail - 1));
+        foreach ((string key, string does) in keys)
+        {
+            line.Add("   ").Add(key, Tone.Strong).Add(" " + does);
+        }
+
+        return line.Build();
+    }
+
+    // Where they do not all fit, the last ones stay: they lead on and out.
+    private Line Keys(params (string Key, string Does)[] keys)
+    {
+        int first = 0;
+        while (first < keys.Length - 2 && keys[first..].Sum(pair => pair.Key.Length + pair.Does.Length + 4) - 2 > width)
+        {
+            first++;
+        }
+
+        LineBuilder line = new LineBuilder(glyphs).Add(" ");
+        foreach ((string key, string does) in keys[first..])
+        {
+            line.Add(key, Tone.Strong).Add(" " + does + "   ");
+        }
+
+        return line.Build();
+    }
+}
