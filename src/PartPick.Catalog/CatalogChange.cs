@@ -48,6 +48,29 @@ internal static class CatalogChange
         }
     }
 
+    /// <summary>Makes a small change in the catalogue itself, while no one makes a large one.</summary>
+    public static Result<T> Hold<T>(string path, Func<Result<T>> work)
+    {
+        ArgumentException.ThrowIfNullOrEmpty(path);
+        Result<bool> ready = CatalogStore.UseCurrent(path, _ => true);
+        if (!ready.IsOk)
+        {
+            return Result.Fail<T>(ready.Problem);
+        }
+
+        path = Path.GetFullPath(path);
+        Result<IDisposable> changing = CatalogLock.Take(path + ".change", Patience);
+        if (!changing.IsOk)
+        {
+            return Result.Fail<T>(changing.Problem with { Where = path, What = "is in use by another process, which is changing it" });
+        }
+
+        using (changing.Value)
+        {
+            return work();
+        }
+    }
+
     private static Result<T> WorkOn<T>(string path, string copy, Func<CatalogFile, (Result<T> Result, bool Keep)> work)
     {
         Result<T> result;

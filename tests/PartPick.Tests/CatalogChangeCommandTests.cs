@@ -85,6 +85,37 @@ public class CatalogChangeCommandTests
         Assert.Equal(0, Of("list", "ports").Status);
     }
 
+    [Fact]
+    public void What_is_set_by_hand_outlives_imports_and_undo()
+    {
+        Assert.Equal(0, Of("import", Run.File(List, "list.csv"), "--kind", "crystals").Status);
+        Assert.Equal(0, Of("set", "A1", "resistance=45", "note=measured", "excluded=yes", "load=20 pF").Status);
+        Assert.Equal(0, Of("import", Run.File(List.Replace("0.42", "0.50", StringComparison.Ordinal), "list.csv"), "--kind", "crystals").Status);
+        JsonElement part = Of("show", "A1", "--format", "json").Json;
+        Assert.Equal((45, 20e-12, true), (part.GetProperty("resistance").GetDouble(), part.GetProperty("load").GetDouble(), part.GetProperty("excluded").GetBoolean()));
+        Assert.Equal(0.50m, part.GetProperty("prices")[0].GetProperty("price").GetDecimal());
+        Assert.StartsWith("set by hand", part.GetProperty("origin").GetProperty("load").GetString(), StringComparison.Ordinal);
+        Assert.Equal(0, Of("undo").Status);
+        part = Of("show", "A1", "--format", "json").Json;
+        Assert.Equal((0.42m, 45), (part.GetProperty("prices")[0].GetProperty("price").GetDecimal(), part.GetProperty("resistance").GetDouble()));
+
+        Assert.Equal(0, Of("set", "A1", "--back", "load").Status);
+        Assert.Equal(18e-12, Of("show", "A1", "--format", "json").Json.GetProperty("load").GetDouble());
+    }
+
+    [Fact]
+    public void Wrong_figures_by_hand_are_one_line_and_change_nothing()
+    {
+        Assert.Equal(0, Of("import", Run.File(List, "list.csv"), "--kind", "crystals").Status);
+        string before = Of("show", "A1").Output;
+        Assert.Contains("does not fit", Of("set", "A1", "note=x", "load=18 V").WrongLine(), StringComparison.Ordinal);
+        Assert.Contains("is no figure", Of("set", "A1", "colour=red").WrongLine(), StringComparison.Ordinal);
+        Assert.Contains("frequency", Of("set", "A1", "frequency=").WrongLine(), StringComparison.Ordinal);
+        Assert.Contains("no part of the catalogue", Of("set", "no-such", "note=x").WrongLine(), StringComparison.Ordinal);
+        Assert.Contains("KEY=VALUE", Of("set", "A1", "note").WrongLine(), StringComparison.Ordinal);
+        Assert.Equal(before, Of("show", "A1").Output);
+    }
+
     private Run Of(params string[] arguments) => Run.Of(["catalog", .. arguments, "--catalog", _db]);
 
     private static int Count(JsonElement report, string key) => report.GetProperty(key).GetInt32();

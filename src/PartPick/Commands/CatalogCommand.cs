@@ -13,6 +13,7 @@ internal static class CatalogCommand
         CatalogExportCommand.Build(context),
         CatalogInfoCommand.Build(context),
         CatalogImportCommand.Build(context),
+        CatalogSetCommand.Build(context),
         CatalogUndoCommand.Build(context),
         CatalogVerifyCommand.Build(context),
         CatalogBackupCommand.Build(context),
