@@ -19,7 +19,7 @@ internal static class Trade
             "bestell nr", "artikelnummer", "artikel nr", "artnr", "art nr", "reference fournisseur", "code article", "reference",
             "ref", "part number", "part no", "part nr", "partnumber", "pn", "p n", "product code", "product number", "mpn",
             "manufacturer part number", "manufacturer part no", "manufacturer part", "mfr part number", "mfr part no", "mfr part",
-            "mfr no", "mfg part number", "mfg pn", "internal pn", "stock item", "part",
+            "mfr no", "mfg part number", "mfg pn", "internal pn", "stock item", "part", "item", "code", "number", "no", "nr",
         ]),
         ("description", ["description", "desc", "product description", "part description", "item description", "bezeichnung", "beschreibung", "designation", "details", "text", "name", "part name"]),
         ("supplier", ["supplier", "distributor", "vendor", "source", "lieferant", "fournisseur", "seller"]),
