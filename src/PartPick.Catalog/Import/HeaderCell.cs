@@ -64,9 +64,9 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
     public int? PriceQuantity()
     {
         Match quantity = WholeNumber().Match(Text);
-        string[] words = Name.Split(' ');
+        string[] words = Trade.Words(Text).Split(' ');
         bool isPrice = Text.Contains('+', StringComparison.Ordinal)
-            || words.Any(word => word is "price" or "preis" or "prix" or "cost" or "pcs" or "each" or "ab" or "vk" or "ea" or "stk" or "stuck");
+            || words.Any(word => word is "price" or "preis" or "prix" or "cost" or "pc" or "pcs" or "each" or "ab" or "vk" or "ea" or "stk" or "stuck");
         bool several = WholeNumber().Count(Text) is 1 or 2;
         return quantity.Success && isPrice && several
             && int.TryParse(quantity.Value.Replace(",", "", StringComparison.Ordinal).Replace(".", "", StringComparison.Ordinal),
