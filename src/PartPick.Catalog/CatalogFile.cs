@@ -1,5 +1,7 @@
 using System.Collections.Concurrent;
 using LiteDB;
+using PartPick.Catalog.Fields;
+using PartPick.Catalog.Import;
 using PartPick.Catalog.Mapping;
 
 namespace PartPick.Catalog;
@@ -11,6 +13,9 @@ internal sealed class CatalogFile : IDisposable
     public const int Schema = 1;
 
     private const string FingerprintKey = "builtInFingerprint";
+    private const string ImportCountKey = "importCount";
+    private const string UndoableKey = "undoable";
+    private const string EarlierCollection = "earlier";
     private const int PageBytes = 8192;
     private const int MarkOffset = 32;
 
@@ -18,6 +23,7 @@ internal sealed class CatalogFile : IDisposable
     private static readonly ConcurrentBag<LiteDatabase> Abandoned = [];
 
     private readonly LiteDatabase _database;
+    private int _earlierOf;
 
     private CatalogFile(string path)
     {
@@ -42,6 +48,12 @@ internal sealed class CatalogFile : IDisposable
     private ILiteCollection<BsonDocument> Parts => _database.GetCollection(PartDocument.Collection);
 
     private ILiteCollection<BsonDocument> About => _database.GetCollection(TextDocument.AboutCollection);
+
+    private ILiteCollection<BsonDocument> ImportNotes => _database.GetCollection(ImportDocument.Collection);
+
+    private ILiteCollection<BsonDocument> Earlier => _database.GetCollection(EarlierCollection);
+
+    private ILiteCollection<BsonDocument> Maps => _database.GetCollection(TextDocument.MapsCollection);
 
     private ILiteCollection<BsonDocument> Settings => _database.GetCollection(TextDocument.SettingsCollection);
 
@@ -81,16 +93,91 @@ internal sealed class CatalogFile : IDisposable
         Delete(unfinished);
     }
 
+    /// <summary>Copies a catalogue that no one else has open, whole.</summary>
+    public static bool Copy(string path, string copy)
+    {
+        // Opening and closing applies what a process that died left in the log beside the file.
+        using (Open(path))
+        {
+        }
+
+        Delete(copy);
+        File.Copy(path, copy);
+        return true;
+    }
+
+    /// <summary>Puts a changed copy in the place of the catalogue; the settings that were kept meanwhile come along.</summary>
+    public static bool TakePlace(string copy, string path)
+    {
+        using (CatalogFile changed = Open(copy), current = Open(path))
+        {
+            foreach (BsonDocument setting in current.Settings.FindAll())
+            {
+                changed.Settings.Upsert(setting);
+            }
+        }
+
+        Publish(copy, path);
+        return true;
+    }
+
+    /// <summary>Forces a closed file to the disk and puts it in the place of another.</summary>
+    public static void Publish(string copy, string path)
+    {
+        using (var stream = new FileStream(copy, FileMode.Open, FileAccess.ReadWrite))
+        {
+            stream.Flush(flushToDisk: true);
+        }
+
+        // What a damaged file of this name left in its log must not be applied to the new one.
+        File.Delete(LogOf(path));
+        File.Move(copy, path, overwrite: true);
+    }
+
+    /// <summary>All stored parts, each with the id under which it is found.</summary>
+    public IEnumerable<(string Id, StoredPart? Part)> ReadNamed() =>
+        Parts.FindAll().Select(document => (document["_id"].AsString, PartDocument.ReadStored(document)));
+
+    /// <summary>The parts as they were before the last import; null where one cannot be read.</summary>
+    public IEnumerable<StoredPart?> ReadEarlier() =>
+        Earlier.FindAll().Select(document => document["part"].IsDocument ? PartDocument.ReadStored(document["part"].AsDocument) : null);
+
+    /// <summary>How many parts the index counts.</summary>
+    public int CountParts() => Parts.Count();
+
     /// <summary>All parts; null where a document holds none.</summary>
     public List<Part?> ReadParts() => [.. Parts.FindAll().Select(PartDocument.Read)];
+
+    /// <summary>All stored parts one by one, in the order of their ids; null where a document holds none.</summary>
+    public IEnumerable<StoredPart?> ReadStored() => Parts.FindAll().Select(PartDocument.ReadStored);
+
+    /// <summary>A stored part; null where there is none, or none can be read.</summary>
+    public StoredPart? FindStored(string id) => Parts.FindById(id) is { } document ? PartDocument.ReadStored(document) : null;
+
+    /// <summary>Puts a stored part in the place of the one with its id.</summary>
+    public void Put(StoredPart part) => Parts.Upsert(PartDocument.Write(part));
+
+    /// <summary>What is kept about the imports, by their numbers.</summary>
+    public Dictionary<int, ImportNote> ReadImports() =>
+        ImportNotes.FindAll().Select(ImportDocument.Read).OfType<ImportNote>().ToDictionary(note => note.Number);
+
+    /// <summary>The names of the column maps.</summary>
+    public List<string> MapNames() => [.. Maps.FindAll().Select(document => document["_id"].AsString)];
+
+    public string? ReadMap(string name) => TextDocument.Read(Maps.FindById(name));
+
+    public void WriteMap(string name, string text) => Maps.Upsert(TextDocument.Write(name, text));
 
     /// <summary>Puts the built-in parts in the place of the earlier ones, in one transaction; a part of the user's own stays.</summary>
     public void ReplaceBuiltIn(BuiltInFiles builtIn)
     {
         _database.BeginTrans();
+        Dictionary<string, StoredPart> handwork = Parts.Find(BsonExpression.Create($"$.{PartDocument.BuiltIn} = @0", true))
+            .Where(document => document[PartDocument.ByHand].IsDocument)
+            .Select(PartDocument.ReadStored).OfType<StoredPart>().ToDictionary(part => part.Id, StringComparer.Ordinal);
         Parts.DeleteMany(BsonExpression.Create($"$.{PartDocument.BuiltIn} = @0", true));
-        HashSet<string> own = [.. Parts.FindAll().Select(document => document["_id"].AsString)];
-        Parts.Insert(builtIn.ReadCatalog().All.Where(part => !own.Contains(part.Id)).Select(part => PartDocument.Write(part, true)));
+        Parts.Insert(builtIn.ReadCatalog().All.Where(part => Parts.FindById(part.Id) is null)
+            .Select(part => PartDocument.Write(WithHandwork(part, handwork.GetValueOrDefault(part.Id)))).ToList());
         BuiltInFingerprint = builtIn.Fingerprint();
         _database.Commit();
     }
@@ -105,6 +192,98 @@ internal sealed class CatalogFile : IDisposable
         }
 
         _database.Commit();
+    }
+
+    /// <summary>The parts as an import needs to know them.</summary>
+    public IEnumerable<KnownPart> ReadKnown() => Parts.FindAll().Select(document =>
+    {
+        BsonDocument figures = document[PartDocument.Figures].AsDocument;
+        var kind = PartKinds.Named(document[PartDocument.Kind].AsString);
+        return new KnownPart(
+            document["_id"].AsString, kind.IsOk ? kind.Value : throw new InvalidDataException("A part in it cannot be read."),
+            figures["supplier"].IsString ? figures["supplier"].AsString : null,
+            figures["supplierPart"].IsString ? figures["supplierPart"].AsString : null,
+            document[PartDocument.Digest].IsBinary ? RowDigest.Of(document[PartDocument.Digest].AsBinary) : 0);
+    });
+
+    /// <summary>The number of the next import.</summary>
+    public int NextImport() => 1 + int.Parse(
+        TextDocument.Read(About.FindById(ImportCountKey)) ?? "0", System.Globalization.CultureInfo.InvariantCulture);
+
+    /// <summary>Puts in parts whose ids are new.</summary>
+    public void InsertNew(List<BsonDocument> parts) => Parts.InsertBulk(parts, parts.Count);
+
+    /// <summary>Keeps a part as it was before an import changes it.</summary>
+    public void KeepEarlier(string id, int import)
+    {
+        if (_earlierOf != import)
+        {
+            _database.DropCollection(EarlierCollection);
+            _earlierOf = import;
+        }
+
+        Earlier.Insert(new BsonDocument { ["_id"] = id, ["part"] = Parts.FindById(id) });
+    }
+
+    /// <summary>Keeps the note of an import; what an earlier one kept for undoing goes.</summary>
+    public void WriteImport(ImportNote note)
+    {
+        if (_earlierOf != note.Number)
+        {
+            _database.DropCollection(EarlierCollection);
+        }
+
+        ImportNotes.Insert(ImportDocument.Write(note));
+        string count = note.Number.ToString(System.Globalization.CultureInfo.InvariantCulture);
+        About.Upsert(TextDocument.Write(ImportCountKey, count));
+        About.Upsert(TextDocument.Write(UndoableKey, count));
+    }
+
+    /// <summary>Takes back the last import, as far as it was not taken back before; null where there is none.</summary>
+    public ImportNote? UndoLastImport()
+    {
+        if (!int.TryParse(TextDocument.Read(About.FindById(UndoableKey)), out int number)
+            || ImportNotes.FindById(number) is not { } document || ImportDocument.Read(document) is not { } note)
+        {
+            return null;
+        }
+
+        foreach (BsonDocument earlier in Earlier.FindAll().ToList())
+        {
+            StoredPart? now = FindStored(earlier["_id"].AsString);
+            StoredPart before = PartDocument.ReadStored(earlier["part"].AsDocument)
+                ?? throw new InvalidDataException("A part in it cannot be read.");
+            Put(now is null ? before : new StoredPart
+            {
+                Kind = before.Kind,
+                BuiltIn = before.BuiltIn,
+                Supplied = before.Supplied,
+                Place = before.Place,
+                Elsewhere = before.Elsewhere,
+                Digest = before.Digest,
+                ByHand = now.ByHand,
+                Cleared = now.Cleared,
+                HandDate = now.HandDate,
+            });
+        }
+
+        // In pieces: what one transaction changes is held in memory.
+        string[] added = [.. Parts.Find(BsonExpression.Create($"$.{PartDocument.Import} = @0", number)).Select(part => part["_id"].AsString)];
+        foreach (string[] ids in added.Chunk(2000))
+        {
+            _database.BeginTrans();
+            foreach (string id in ids)
+            {
+                Parts.Delete(id);
+            }
+
+            _database.Commit();
+        }
+
+        ImportNotes.Delete(number);
+        About.Delete(UndoableKey);
+        _database.DropCollection(EarlierCollection);
+        return note;
     }
 
     public string? ReadSetting(string key) => TextDocument.Read(Settings.FindById(key));
@@ -127,6 +306,16 @@ internal sealed class CatalogFile : IDisposable
 
     public void Dispose() => _database.Dispose();
 
+    private static StoredPart WithHandwork(Part part, StoredPart? earlier) => new()
+    {
+        Kind = part.Kind,
+        BuiltIn = true,
+        Supplied = PartShape.Of(part.Kind).DraftOf(part),
+        ByHand = earlier?.ByHand ?? new PartDraft(),
+        Cleared = earlier?.Cleared ?? [],
+        HandDate = earlier?.HandDate,
+    };
+
     // A file of whole pages that carries the mark of the file format: anything else would be taken for a new, empty file.
     private static bool LooksWhole(string path)
     {
@@ -142,7 +331,8 @@ internal sealed class CatalogFile : IDisposable
         return start[MarkOffset..].SequenceEqual(mark);
     }
 
-    private static void Delete(string path)
+    /// <summary>Removes a file with its log, where they are there.</summary>
+    public static void Delete(string path)
     {
         File.Delete(path);
         File.Delete(LogOf(path));

@@ -48,7 +48,11 @@ public static class CatalogStore
         }).Problem;
     }
 
-    internal static Result<PartsCatalog> Load(string path, BuiltInFiles builtIn, TimeSpan patience) =>
+    internal static Result<T> UseCurrent<T>(string path, Func<CatalogFile, T> work) =>
+        UseCurrent(path, BuiltInFiles.Embedded(), Patience, work);
+
+    /// <summary>Does something with the open file after the built-in parts in it were brought up to date.</summary>
+    internal static Result<T> UseCurrent<T>(string path, BuiltInFiles builtIn, TimeSpan patience, Func<CatalogFile, T> work) =>
         Use(path, builtIn, patience, file =>
         {
             if (file.BuiltInFingerprint != builtIn.Fingerprint())
@@ -56,6 +60,12 @@ public static class CatalogStore
                 file.ReplaceBuiltIn(builtIn);
             }
 
+            return work(file);
+        });
+
+    internal static Result<PartsCatalog> Load(string path, BuiltInFiles builtIn, TimeSpan patience) =>
+        UseCurrent(path, builtIn, patience, file =>
+        {
             List<Part?> parts = file.ReadParts();
             return parts.Contains(null)
                 ? throw new InvalidDataException("A part in it cannot be read.")
@@ -97,7 +107,23 @@ public static class CatalogStore
         }
     }
 
-    private static Result<T> WorkOn<T>(string path, Func<CatalogFile, T> work)
+    /// <summary>Does something with the files of a catalogue while no one has it open.</summary>
+    internal static Result<T> Locked<T>(string path, TimeSpan patience, Func<T> work)
+    {
+        Result<IDisposable> taken = CatalogLock.Take(path, patience);
+        if (!taken.IsOk)
+        {
+            return Result.Fail<T>(taken.Problem);
+        }
+
+        using (taken.Value)
+        {
+            return Result.Ok(work());
+        }
+    }
+
+    /// <summary>Opens a file, does something with it, and turns damage into a problem.</summary>
+    internal static Result<T> WorkOn<T>(string path, Func<CatalogFile, T> work)
     {
         CatalogFile? file = null;
         try

@@ -14,6 +14,7 @@ internal static class CommandLine
         RankCommand.Build,
         CheckCommand.Build,
         CapsCommand.Build,
+        CatalogCommand.Build,
     ];
 
     /// <summary>Runs the program.</summary>
@@ -55,7 +56,7 @@ internal static class CommandLine
         ParseResult parsed = root.Parse(RequirementArguments.Gather(arguments));
         if (parsed.Errors.Count > 0)
         {
-            string path = parsed.CommandResult.Command == root ? "partpick" : $"partpick {parsed.CommandResult.Command.Name}";
+            string path = PathOf(parsed.CommandResult.Command, root);
             return Say(surroundings, $"{OneLine(parsed.Errors[0].Message)} (see {path} --help)", ExitStatus.WrongInput);
         }
 
@@ -83,6 +84,10 @@ internal static class CommandLine
         HelpFooter.AddTo(root, "Cautions", HelpFooter.Cautions);
         return root;
     }
+
+    private static string PathOf(Command command, RootCommand root) => command == root
+        ? "partpick"
+        : $"{PathOf(command.Parents.OfType<Command>().FirstOrDefault() ?? root, root)} {command.Name}";
 
     private static int Say(Surroundings surroundings, string line, int status)
     {

@@ -7,6 +7,11 @@ if (args is ["--rankings", .. var rest])
     return RankingTable.Print(rest, Console.Out, Console.Error);
 }
 
+if (args is ["--import", .. var size])
+{
+    return ImportTable.Print(size, Console.Out);
+}
+
 // Reports go beside what the build makes, whatever folder this is started in.
 string reports = Path.GetFullPath(Path.Combine(AppContext.BaseDirectory, "..", "..", "..", "benchmarks"));
 ManualConfig config = DefaultConfig.Instance.WithArtifactsPath(reports).HideColumns("Error", "StdDev", "RatioSD");

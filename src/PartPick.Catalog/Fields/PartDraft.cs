@@ -6,9 +6,14 @@ internal sealed class PartDraft
     private readonly Dictionary<string, double> _numbers = new(StringComparer.Ordinal);
     private readonly Dictionary<string, string> _texts = new(StringComparer.Ordinal);
 
+    /// <summary>The keys of the figures and texts that are there.</summary>
+    public IEnumerable<string> Keys => _numbers.Keys.Concat(_texts.Keys);
+
     public double? Number(string key) => _numbers.TryGetValue(key, out double value) ? value : null;
 
     public string? Text(string key) => _texts.GetValueOrDefault(key);
+
+    public bool Has(string key) => _numbers.ContainsKey(key) || _texts.ContainsKey(key);
 
     public void Set(string key, double? value)
     {
@@ -25,4 +30,33 @@ internal sealed class PartDraft
             _texts[key] = value;
         }
     }
+
+    public void Remove(string key)
+    {
+        _numbers.Remove(key);
+        _texts.Remove(key);
+    }
+
+    /// <summary>Takes one figure from another draft: its value, or its absence.</summary>
+    public void Take(string key, PartDraft other)
+    {
+        Remove(key);
+        Set(key, other.Number(key));
+        Set(key, other.Text(key));
+    }
+
+    public PartDraft Copy()
+    {
+        var copy = new PartDraft();
+        foreach (string key in Keys)
+        {
+            copy.Take(key, this);
+        }
+
+        return copy;
+    }
+
+    /// <summary>Whether another draft holds the same figure or also holds none.</summary>
+    public bool Agrees(string key, PartDraft other) =>
+        Number(key).Equals(other.Number(key)) && string.Equals(Text(key), other.Text(key), StringComparison.Ordinal);
 }

@@ -33,7 +33,7 @@ internal sealed record PartField(string Key, Dimension? Dimension, string Unit =
                 return new Problem(where(), $"{Problem.Quote(text)} has a control character", "one line of text");
             }
 
-            draft.Set(Key, text);
+            draft.Set(Key, FormulaGuard.Unguard(text));
             return null;
         }
 
@@ -48,6 +48,6 @@ internal sealed record PartField(string Key, Dimension? Dimension, string Unit =
 
     /// <summary>Writes the cell of a draft.</summary>
     public string Write(PartDraft draft) => Dimension is null
-        ? draft.Text(Key) ?? ""
+        ? FormulaGuard.Guard(draft.Text(Key) ?? "")
         : draft.Number(Key) is { } number ? ValueText.FormatIn(number, Power) : "";
 }

@@ -11,37 +11,75 @@ internal static class PartDocument
     /// <summary>The field that says whether the part travels in the program.</summary>
     public const string BuiltIn = "builtIn";
 
-    private const string Kind = "kind";
-    private const string Figures = "figures";
+    /// <summary>The field with the number of the import that last changed the part.</summary>
+    public const string Import = "import";
 
-    public static BsonDocument Write(Part part, bool builtIn)
+    /// <summary>The field with the digest of the row.</summary>
+    public const string Digest = "digest";
+
+    /// <summary>The field of the kind's word.</summary>
+    public const string Kind = "kind";
+
+    /// <summary>The field of the supplied figures.</summary>
+    public const string Figures = "figures";
+
+    /// <summary>The field of what was set by hand.</summary>
+    public const string ByHand = "byHand";
+
+    private const string Cleared = "cleared";
+    private const string HandDate = "handDate";
+    private const string Line = "line";
+    private const string Elsewhere = "elsewhere";
+
+    public static BsonDocument Write(Part part, bool builtIn) => Write(new StoredPart
+    {
+        Kind = part.Kind,
+        BuiltIn = builtIn,
+        Supplied = PartShape.Of(part.Kind).DraftOf(part),
+    });
+
+    public static BsonDocument Write(StoredPart part)
     {
         PartShape shape = PartShape.Of(part.Kind);
-        PartDraft draft = shape.DraftOf(part);
-        var figures = new BsonDocument();
-        foreach (PartField column in shape.Fields)
-        {
-            if (draft.Number(column.Key) is { } number)
-            {
-                figures[column.Key] = number;
-            }
-            else if (draft.Text(column.Key) is { } text)
-            {
-                figures[column.Key] = text;
-            }
-        }
-
-        return new BsonDocument
+        var document = new BsonDocument
         {
             ["_id"] = part.Id,
             [Kind] = part.Kind.Word(),
-            [BuiltIn] = builtIn,
-            [Figures] = figures,
+            [BuiltIn] = part.BuiltIn,
+            [Figures] = DraftDocument.Write(shape, part.Supplied),
         };
+        if (part.Place.Import > 0)
+        {
+            document[Import] = part.Place.Import;
+            document[Line] = part.Place.Line;
+        }
+
+        if (part.Digest is not null)
+        {
+            document[Digest] = part.Digest;
+        }
+
+        if (part.Elsewhere.Count > 0)
+        {
+            document[Elsewhere] = new BsonDocument(part.Elsewhere.ToDictionary(
+                pair => pair.Key, pair => (BsonValue)new BsonArray(new BsonValue[] { pair.Value.Import, pair.Value.Line })));
+        }
+
+        if (part.HandDate is not null)
+        {
+            document[ByHand] = DraftDocument.Write(shape, part.ByHand);
+            document[Cleared] = new BsonArray(part.Cleared.Select(key => new BsonValue(key)));
+            document[HandDate] = part.HandDate;
+        }
+
+        return document;
     }
 
     /// <summary>Reads a part; null where the document holds none.</summary>
-    public static Part? Read(BsonDocument document)
+    public static Part? Read(BsonDocument document) => ReadStored(document)?.Build();
+
+    /// <summary>Reads a part as it is stored; null where the document holds none.</summary>
+    public static StoredPart? ReadStored(BsonDocument document)
     {
         var kind = PartKinds.Named(document[Kind].IsString ? document[Kind].AsString : null);
         if (!kind.IsOk || !document[Figures].IsDocument)
@@ -50,21 +88,37 @@ internal static class PartDocument
         }
 
         PartShape shape = PartShape.Of(kind.Value);
-        BsonDocument figures = document[Figures].AsDocument;
-        var draft = new PartDraft();
-        foreach (PartField column in shape.Fields)
+        bool handwork = document[HandDate].IsString;
+        return new StoredPart
         {
-            BsonValue value = figures[column.Key];
-            if (column.Dimension is null && value.IsString)
+            Kind = kind.Value,
+            BuiltIn = document[BuiltIn].IsBoolean && document[BuiltIn].AsBoolean,
+            Supplied = DraftDocument.Read(shape, document[Figures].AsDocument),
+            Place = document[Import].IsInt32 ? new RowPlace(document[Import].AsInt32, document[Line].AsInt64) : default,
+            Digest = document[Digest].IsBinary ? document[Digest].AsBinary : null,
+            Elsewhere = ReadElsewhere(document[Elsewhere]),
+            ByHand = handwork && document[ByHand].IsDocument ? DraftDocument.Read(shape, document[ByHand].AsDocument) : new PartDraft(),
+            Cleared = document[Cleared].IsArray
+                ? document[Cleared].AsArray.Where(key => key.IsString).Select(key => key.AsString).ToHashSet(StringComparer.Ordinal)
+                : [],
+            HandDate = handwork ? document[HandDate].AsString : null,
+        };
+    }
+
+    private static Dictionary<string, RowPlace> ReadElsewhere(BsonValue value)
+    {
+        var places = new Dictionary<string, RowPlace>(StringComparer.Ordinal);
+        if (value.IsDocument)
+        {
+            foreach ((string key, BsonValue place) in value.AsDocument)
             {
-                draft.Set(column.Key, value.AsString);
-            }
-            else if (column.Dimension is not null && value.IsDouble && double.IsFinite(value.AsDouble))
-            {
-                draft.Set(column.Key, value.AsDouble);
+                if (place.IsArray && place.AsArray.Count == 2)
+                {
+                    places[key] = new RowPlace(place.AsArray[0].AsInt32, place.AsArray[1].AsInt64);
+                }
             }
         }
 
-        return shape.Build(new DraftReader(draft, key => key));
+        return places;
     }
 }

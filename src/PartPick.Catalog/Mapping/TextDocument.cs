@@ -11,6 +11,9 @@ internal static class TextDocument
     /// <summary>The texts that the program keeps from one run to the next.</summary>
     public const string SettingsCollection = "settings";
 
+    /// <summary>The column maps, each a text under its name.</summary>
+    public const string MapsCollection = "maps";
+
     private const string Text = "text";
 
     public static BsonDocument Write(string key, string text) => new() { ["_id"] = key, [Text] = text };

@@ -1,0 +1,74 @@
+using PartPick.Catalog.Mapping;
+using PartPick.Values;
+
+namespace PartPick.Catalog;
+
+/// <summary>Reads parts of a catalogue with their origins, one kind or one part at a time.</summary>
+public static class CatalogReading
+{
+    /// <summary>Reads the parts of a kind, one by one in the order of their ids, while the catalogue is held.</summary>
+    /// <param name="path">The path of the file; made as in <see cref="CatalogStore.Load(string)"/> where it is not there.</param>
+    /// <param name="kind">The kind.</param>
+    /// <param name="take">What is done with each part.</param>
+    /// <returns>How many there were, or the problem.</returns>
+    public static Result<int> Each(string path, PartKind kind, Action<CatalogEntry> take)
+    {
+        ArgumentNullException.ThrowIfNull(take);
+        return CatalogStore.UseCurrent(path, file =>
+        {
+            var origins = new Origins(file.ReadImports());
+            int count = 0;
+            foreach (StoredPart? stored in file.ReadStored())
+            {
+                if (stored is null)
+                {
+                    throw Unreadable();
+                }
+
+                if (stored.Kind == kind)
+                {
+                    take(EntryOf(stored, origins));
+                    count++;
+                }
+            }
+
+            return count;
+        });
+    }
+
+    /// <summary>Reads one part.</summary>
+    /// <param name="path">The path of the file.</param>
+    /// <param name="id">The id of the part.</param>
+    /// <returns>The part, null where there is none; or the problem.</returns>
+    public static Result<CatalogEntry?> Find(string path, string id)
+    {
+        ArgumentNullException.ThrowIfNull(id);
+        return CatalogStore.UseCurrent(
+            path, file => file.FindStored(id) is { } stored ? EntryOf(stored, new Origins(file.ReadImports())) : null);
+    }
+
+    /// <summary>Counts what a catalogue holds.</summary>
+    /// <param name="path">The path of the file.</param>
+    /// <returns>The counts, or the problem.</returns>
+    public static Result<CatalogInfo> Info(string path) => CatalogStore.UseCurrent(path, file =>
+    {
+        var counts = PartKinds.All.ToDictionary(kind => kind, _ => 0);
+        (int own, int byHand) = (0, 0);
+        foreach (StoredPart? stored in file.ReadStored())
+        {
+            counts[stored?.Kind ?? throw Unreadable()]++;
+            own += stored.BuiltIn ? 0 : 1;
+            byHand += stored.HasHandwork ? 1 : 0;
+        }
+
+        string full = System.IO.Path.GetFullPath(path);
+        return new CatalogInfo(
+            full, new FileInfo(full).Length, [.. PartKinds.All.Select(kind => (kind, counts[kind]))], own, byHand,
+            [.. file.ReadImports().Values.OrderByDescending(note => note.Number)], [.. file.MapNames().Order(StringComparer.Ordinal)]);
+    });
+
+    private static CatalogEntry EntryOf(StoredPart stored, Origins origins) =>
+        new(stored.Build() ?? throw Unreadable(), origins.Of(stored));
+
+    private static InvalidDataException Unreadable() => new("A part in it cannot be read.");
+}

@@ -1,0 +1,41 @@
+namespace PartPick.Catalog.Import;
+
+/// <summary>What becomes of one column of a file.</summary>
+internal sealed record ColumnUse
+{
+    /// <summary>The power that says: a number without a unit is refused.</summary>
+    public const int NoPlainNumbers = int.MinValue;
+
+    /// <summary>The place of the column, counted from 0.</summary>
+    public required int Index { get; init; }
+
+    /// <summary>The cell of the header.</summary>
+    public required string Header { get; init; }
+
+    /// <summary>The key of the figure, or temperature, toleranceAny, price or prices; null where the column is not used.</summary>
+    public string? Field { get; init; }
+
+    /// <summary>The unit of numbers that have none; empty for the SI unit.</summary>
+    public string Unit { get; init; } = "";
+
+    /// <summary>The power of ten of <see cref="Unit"/>.</summary>
+    public int Power { get; init; }
+
+    /// <summary>How numbers are written.</summary>
+    public NumberNotation Notation { get; init; }
+
+    /// <summary>What the figures rest on.</summary>
+    public Basis Basis { get; init; }
+
+    /// <summary>The quantity from which on a price holds.</summary>
+    public int Quantity { get; init; } = 1;
+
+    /// <summary>The currency of prices that name none.</summary>
+    public string? Currency { get; init; }
+
+    /// <summary>Whether the header is the program's own, so that cells are read exactly as they were written.</summary>
+    public bool Exact { get; init; }
+
+    /// <summary>Why the column is used so, or why it is not.</summary>
+    public string Why { get; init; } = "";
+}

@@ -1,0 +1,14 @@
+namespace PartPick.Catalog.Import;
+
+/// <summary>What the user stated about an import.</summary>
+internal sealed record ImportOptions
+{
+    /// <summary>The decimal sign; unknown to find it.</summary>
+    public NumberNotation Notation { get; init; }
+
+    /// <summary>The currency of prices that name none.</summary>
+    public string? Currency { get; init; }
+
+    /// <summary>The supplier of rows that name none.</summary>
+    public string? Supplier { get; init; }
+}

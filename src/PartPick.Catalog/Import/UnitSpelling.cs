@@ -1,0 +1,48 @@
+using PartPick.Values;
+
+namespace PartPick.Catalog.Import;
+
+/// <summary>Units as lists of parts spell them, in any case and form, as the units that <see cref="ValueText"/> reads.</summary>
+internal static class UnitSpelling
+{
+    private static readonly Dictionary<string, string> Any = new(StringComparer.OrdinalIgnoreCase)
+    {
+        ["pf"] = "pF", ["nf"] = "nF", ["uf"] = "uF", ["mfd"] = "uF", ["ff"] = "fF", ["pfd"] = "pF", ["picofarad"] = "pF",
+        ["hz"] = "Hz", ["khz"] = "kHz", ["mhz"] = "MHz", ["ghz"] = "GHz", ["cps"] = "Hz",
+        ["ohm"] = "ohm", ["ohms"] = "ohm", ["ω"] = "ohm", ["kohm"] = "kohm", ["kohms"] = "kohm", ["k ohm"] = "kohm", ["k ohms"] = "kohm",
+        ["uw"] = "uW", ["nw"] = "nW", ["ppm"] = "ppm", ["ppb"] = "ppb", ["percent"] = "%", ["pct"] = "%", ["per cent"] = "%",
+        ["ppm/year"] = "ppm", ["ppm/yr"] = "ppm", ["ppm/y"] = "ppm", ["ppm/a"] = "ppm", ["ppm per year"] = "ppm", ["ppm/year max"] = "ppm",
+        ["ppm first year"] = "ppm", ["ppm / year"] = "ppm", ["ppm 1st year"] = "ppm", ["ppm/jahr"] = "ppm",
+        ["v"] = "V", ["vdc"] = "V", ["v dc"] = "V", ["volt"] = "V", ["volts"] = "V", ["vac"] = "V?",
+        ["c"] = "°C", ["degc"] = "°C", ["deg c"] = "°C", ["° c"] = "°C", ["ºc"] = "°C", ["º c"] = "°C", ["deg. c"] = "°C", ["°c"] = "°C",
+        ["pcs"] = "", ["pcs."] = "", ["pc"] = "", ["stk"] = "", ["st"] = "", ["stück"] = "", ["ea"] = "", ["units"] = "", ["pieces"] = "",
+        ["in stock"] = "",
+    };
+
+    private static readonly Dictionary<string, string> CaseCounts = new(StringComparer.Ordinal)
+    {
+        // Milli and mega differ in ohms and volts; a drive level in megawatts there is none.
+        ["MW"] = "mW", ["mW"] = "mW", ["mw"] = "mW", ["MOHM"] = "Mohm", ["MOhm"] = "Mohm", ["MOhms"] = "Mohm", ["Mohms"] = "Mohm",
+        ["µF"] = "uF", ["μF"] = "uF", ["µW"] = "uW", ["μW"] = "uW", ["kΩ"] = "kohm", ["KΩ"] = "kohm", ["MΩ"] = "Mohm", ["mΩ"] = "mohm",
+        ["Ω"] = "ohm", ["\u2126"] = "ohm",
+    };
+
+    /// <summary>The unit as it is read; the same text where the spelling is not known.</summary>
+    public static string Of(string unit)
+    {
+        string trimmed = unit.Trim().TrimEnd('.');
+        return CaseCounts.TryGetValue(trimmed, out string? exact) ? exact : Any.GetValueOrDefault(trimmed, trimmed);
+    }
+
+    /// <summary>The power of ten of a unit of a dimension; null where it is none of that dimension.</summary>
+    public static int? PowerOf(string unit, Dimension dimension)
+    {
+        if (unit.Length == 0)
+        {
+            return 0;
+        }
+
+        Result<double> one = ValueText.Parse("1 " + Of(unit), dimension, "unit", allowNegative: true);
+        return one.IsOk && one.Value > 0 ? (int)Math.Round(Math.Log10(one.Value)) : null;
+    }
+}

@@ -1,0 +1,70 @@
+using System.CommandLine;
+using System.Text.Json.Nodes;
+using PartPick.Catalog;
+using PartPick.Output;
+
+namespace PartPick.Commands;
+
+/// <summary><c>partpick catalog list</c>: the parts of a kind.</summary>
+internal static class CatalogListCommand
+{
+    private const string Examples =
+        """
+        partpick catalog list crystals
+        partpick catalog list crystals --filter "4 MHz" --top 20 --format json
+        """;
+
+    /// <summary>Builds the command.</summary>
+    public static Command Build(CommandContext context)
+    {
+        var kind = new Argument<string>("KIND") { Description = string.Join(", ", PartKinds.All.Select(each => each.Word())) };
+        var filter = new Option<string?>("--filter")
+        {
+            Description = "Only parts with this text in id, description, package, supplier or number",
+            HelpName = "TEXT",
+        };
+        var top = new Option<string?>("--top") { Description = "Most parts to list (all)", HelpName = "N" };
+        var command = new Command("list", "Lists the parts of a kind.") { kind, filter, top, context.Format };
+        HelpFooter.AddTo(command, "Examples", Examples);
+        command.SetAction(parsed =>
+        {
+            PartKind wanted = CommandFailure.Unless(PartKinds.Named(parsed.GetRequiredValue(kind), kind.Name));
+            int most = Counts.Read(parsed.GetValue(top), top.Name) ?? int.MaxValue;
+            string text = parsed.GetValue(filter) ?? "";
+            var entries = new List<CatalogEntry>();
+            CommandFailure.Unless(
+                CatalogReading.Each(context.CatalogPath(parsed), wanted, entry =>
+                {
+                    context.Surroundings.Cancellation.ThrowIfCancellationRequested();
+                    if (entries.Count < most && Holds(entry.Part, text))
+                    {
+                        entries.Add(entry);
+                    }
+                }),
+                ExitStatus.NoCatalog);
+            Write(context.Output, context.FormatOf(parsed), wanted, entries);
+            return ExitStatus.Done;
+        });
+        return command;
+    }
+
+    private static void Write(TextWriter output, OutputFormat format, PartKind kind, List<CatalogEntry> entries)
+    {
+        switch (format)
+        {
+            case OutputFormat.Json:
+                JsonOutput.Write(output, new JsonArray([.. entries.Select(entry => (JsonNode)PartJson.Of(entry))]));
+                break;
+            case OutputFormat.Csv:
+                PartCsv.Write(kind, entries.Select(entry => entry.Part), output);
+                break;
+            default:
+                PartTable.WriteList(output, kind, entries);
+                break;
+        }
+    }
+
+    private static bool Holds(Part part, string text) => text.Length == 0
+        || new[] { part.Id, part.Description, part.Package, part.Supplier, part.SupplierPart, part.Note }
+            .Any(each => each?.Contains(text, StringComparison.OrdinalIgnoreCase) == true);
+}

@@ -1,0 +1,38 @@
+using System.Globalization;
+using PartPick.Catalog.Import;
+
+namespace PartPick.Output;
+
+/// <summary>Shows on one line how far an import is: rows, rate, time left.</summary>
+internal sealed class ImportProgressLine(TextWriter error) : IProgress<ImportProgress>
+{
+    private static readonly TimeSpan Pause = TimeSpan.FromMilliseconds(200);
+    private TimeSpan _last = -Pause;
+    private int _shown;
+
+    public void Report(ImportProgress value)
+    {
+        if (value.Elapsed - _last < Pause)
+        {
+            return;
+        }
+
+        _last = value.Elapsed;
+        double rate = value.Rows / Math.Max(value.Elapsed.TotalSeconds, 1e-3);
+        string left = value.Share is > 0 and { } share
+            ? string.Create(CultureInfo.InvariantCulture, $", {value.Elapsed.TotalSeconds * (1 - share) / share:F0} s left")
+            : "";
+        string line = string.Create(CultureInfo.InvariantCulture, $"{value.Rows} rows, {rate:F0} rows/s{left}");
+        error.Write("\r" + line.PadRight(_shown));
+        _shown = line.Length;
+    }
+
+    /// <summary>Removes the line.</summary>
+    public void Clear()
+    {
+        if (_shown > 0)
+        {
+            error.Write("\r" + new string(' ', _shown) + "\r");
+        }
+    }
+}
