@@ -9,10 +9,10 @@ namespace PartPick.Selection.Search;
 internal sealed class AmplifierOptions
 {
     // The emitter stands between these shares of the supply, so that it can swing, with a current that a small transistor bears.
-    private const double LowestEmitterShare = 0.1;
-    private const double HighestEmitterShare = 0.75;
-    private const double SmallestEmitterAmps = 50e-6;
-    private const double LargestEmitterAmps = 10e-3;
+    private const double LowestEmitterShare = 0.2;
+    private const double HighestEmitterShare = 0.7;
+    private const double SmallestEmitterAmps = 100e-6;
+    private const double LargestEmitterAmps = 5e-3;
     private readonly Requirement _requirement;
     private readonly ImmutableArray<ResistorPart> _bias;
 
@@ -28,7 +28,7 @@ internal sealed class AmplifierOptions
 
     /// <summary>
     /// Bias networks of a follower: one base resistor, or a divider of two equal ones, with an emitter resistor; those that put
-    /// the typical transistor's emitter between a tenth and three quarters of the supply at 0.05 to 10 mA. A divider that takes more
+    /// the typical transistor's emitter between 0.2 and 0.7 of the supply at 0.1 to 5 mA. A divider that takes more
     /// current than the emitter wastes supply and shunts the crystal (common practice).
     /// </summary>
     public ImmutableArray<AmplifierOption> BiasFor(TransistorPart transistor)

@@ -8,7 +8,10 @@ namespace PartPick.Selection.Search;
 /// <param name="Parts">Number of parts on offer, those included that a contender stands for.</param>
 internal sealed record CapacitorValue(double Farads, ImmutableArray<Contender> Contenders, int Parts);
 
-/// <summary>The load capacitors that a search tries: class 1 dielectrics of the wanted series.</summary>
+/// <summary>
+/// The load capacitors that a search tries: class 1 dielectrics of the wanted series, none smaller than the stray beside it, which
+/// would set the frequency in its place (common practice).
+/// </summary>
 internal static class CapacitorChoice
 {
     /// <summary>By value, ascending.</summary>
@@ -18,10 +21,12 @@ internal static class CapacitorChoice
     public static ImmutableArray<CapacitorValue> Of(Requirement requirement, Market market, bool every)
     {
         SeriesMembership membership = new(requirement.CapacitorSeries);
+        double least = Math.Max(requirement.Board.Strays.InputFarads, requirement.Board.Strays.OutputFarads);
         return
         [
             .. market.Capacitors
-                .Where(part => part.TemperatureCoefficientPerKelvin is not null && membership.Contains(part.ValueFarads))
+                .Where(part => part.TemperatureCoefficientPerKelvin is not null && part.ValueFarads >= least)
+                .Where(part => membership.Contains(part.ValueFarads))
                 .GroupBy(part => part.ValueFarads)
                 .OrderBy(group => group.Key)
                 .Select(group => new CapacitorValue(group.Key, Contender.Of([.. group], market, every), group.Count())),

@@ -55,20 +55,9 @@ internal sealed class EstimateGrid
 
     /// <summary>
     /// Whether the load of a node is known to be outside the window, from its neighbours: the load grows with C1 and with C2. Nodes
-    /// are asked for with C1 rising and C2 falling.
+    /// and combinations are asked for with C1 rising and C2 falling.
     /// </summary>
-    public bool IsOutside(int option, int c1, int c2)
-    {
-        int side = Side(option, Before(c1), c2) > 0 ? 1
-            : Side(option, c1, After(c2)) < 0 ? -1
-            : 0;
-        if (side != 0)
-        {
-            _sides[(option, c1, c2)] = side;
-        }
-
-        return side != 0;
-    }
+    public bool IsOutside(int option, int c1, int c2) => KnownSide(option, c1, c2) != 0;
 
     /// <summary>Whether the load of any combination is outside the window, from the nodes round it.</summary>
     public bool LiesOutside(int option, int c1, int c2)
@@ -76,8 +65,26 @@ internal sealed class EstimateGrid
         (int lowC1, int highC1, _) = Bracket(_values, c1, Step);
         (int lowC2, int highC2, _) = Bracket(_values, c2, Step);
         (int low, int high, _) = _family.IsGate ? Bracket(_options, option, Step) : (option, option, 0);
-        return (Side(low, lowC1, lowC2) > 0 && Side(high, lowC1, lowC2) > 0)
-            || (Side(low, highC1, highC2) < 0 && Side(high, highC1, highC2) < 0);
+        return (KnownSide(low, lowC1, lowC2) > 0 && KnownSide(high, lowC1, lowC2) > 0)
+            || (KnownSide(low, highC1, highC2) < 0 && KnownSide(high, highC1, highC2) < 0);
+    }
+
+    // Which side of the window a node lies on, where it or its neighbours tell: above is 1, below is −1.
+    private int KnownSide(int option, int c1, int c2)
+    {
+        int side = Side(option, c1, c2);
+        if (side == 0)
+        {
+            side = Side(option, Before(c1), c2) > 0 ? 1
+                : Side(option, c1, After(c2)) < 0 ? -1
+                : 0;
+            if (side != 0)
+            {
+                _sides[(option, c1, c2)] = side;
+            }
+        }
+
+        return side;
     }
 
     /// <summary>The estimate of one combination of values; null where there is no steady state.</summary>
