@@ -39,7 +39,10 @@ internal static class CatalogChange
             }
             catch (Exception error) when (error is IOException or UnauthorizedAccessException)
             {
-                return Result.Fail<T>(path, $"cannot be changed, and is as it was: {error.Message}", "a disk with room, and a directory that can be written to");
+                return Result.Fail<T>(
+                    path,
+                    $"cannot be changed, and is as it was: {error.Message}",
+                    "a disk with room, and a directory that can be written to");
             }
             finally
             {

@@ -11,14 +11,17 @@ public static class CatalogEdit
     /// <summary>Sets figures, all of them or, where one is wrong, none.</summary>
     /// <param name="path">The path of the catalogue.</param>
     /// <param name="id">The id of the part.</param>
-    /// <param name="changes">Keys with their values as they are typed; an empty value takes the figure away, null brings the supplied one back.</param>
+    /// <param name="changes">
+    /// Keys with their values as they are typed; an empty value takes the figure away, null brings the supplied one back.
+    /// </param>
     /// <param name="date">The day.</param>
     /// <returns>The part as it now is, or the problem.</returns>
     public static Result<Part> Set(string path, string id, IReadOnlyList<(string Key, string? Value)> changes, DateOnly date)
     {
         ArgumentNullException.ThrowIfNull(id);
         ArgumentNullException.ThrowIfNull(changes);
-        return CatalogChange.Hold(path, () => CatalogStore.UseCurrent(path, file => Change(file, id, changes, date)).Then(result => result));
+        return CatalogChange.Hold(
+            path, () => CatalogStore.UseCurrent(path, file => Change(file, id, changes, date)).Then(result => result));
     }
 
     private static Result<Part> Change(CatalogFile file, string id, IReadOnlyList<(string Key, string? Value)> changes, DateOnly date)
@@ -36,7 +39,9 @@ public static class CatalogEdit
             {
                 return Result.Fail<Part>(
                     key, $"is no figure of {stored.Kind.Word()} that can be set",
-                    "one of " + string.Join(", ", shape.Fields.Select(each => each.Key).Where(each => each is not ("id" or "basis") && !each.Contains(' ', StringComparison.Ordinal))));
+                    "one of " + string.Join(", ", shape.Fields
+                        .Select(each => each.Key)
+                        .Where(each => each is not ("id" or "basis") && !each.Contains(' ', StringComparison.Ordinal))));
             }
 
             stored.ByHand.Remove(key);
@@ -52,7 +57,9 @@ public static class CatalogEdit
             }
         }
 
-        stored.HandDate = stored.ByHand.Keys.Any() || stored.Cleared.Count > 0 ? date.ToString("yyyy-MM-dd", CultureInfo.InvariantCulture) : null;
+        stored.HandDate = stored.ByHand.Keys.Any() || stored.Cleared.Count > 0
+            ? date.ToString("yyyy-MM-dd", CultureInfo.InvariantCulture)
+            : null;
         var figures = new DraftReader(stored.Figures(), key => key);
         if (shape.Build(figures) is not { } part)
         {

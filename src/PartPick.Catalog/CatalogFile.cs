@@ -268,7 +268,10 @@ internal sealed class CatalogFile : IDisposable
         }
 
         // In pieces: what one transaction changes is held in memory.
-        string[] added = [.. Parts.Find(BsonExpression.Create($"$.{PartDocument.Import} = @0", number)).Select(part => part["_id"].AsString)];
+        string[] added =
+        [
+            .. Parts.Find(BsonExpression.Create($"$.{PartDocument.Import} = @0", number)).Select(part => part["_id"].AsString),
+        ];
         foreach (string[] ids in added.Chunk(2000))
         {
             _database.BeginTrans();

@@ -53,7 +53,10 @@ public static class CatalogSafety
         (path, source) = (Path.GetFullPath(path), Path.GetFullPath(source));
         if (!File.Exists(source) || path == source)
         {
-            return Result.Fail<CatalogCheck>(source, path == source ? "is the catalogue itself" : "is not there", "a file made by partpick catalog backup");
+            return Result.Fail<CatalogCheck>(
+                source,
+                path == source ? "is the catalogue itself" : "is not there",
+                "a file made by partpick catalog backup");
         }
 
         return Guarded(path, () =>
@@ -137,6 +140,7 @@ public static class CatalogSafety
             faults.Add("a part that is kept for taking the last import back cannot be read");
         }
 
-        return new CatalogCheck(parts, origins, notes.Count, earlier, file.MapNames().Count(name => file.ReadMap(name) is not null), faults);
+        int maps = file.MapNames().Count(name => file.ReadMap(name) is not null);
+        return new CatalogCheck(parts, origins, notes.Count, earlier, maps, faults);
     }
 }

@@ -59,7 +59,9 @@ internal static class ImportTable
         ImportReport report = CatalogImport.Run(db, File.OpenRead(list), request, null, CancellationToken.None).Value;
         return report.Added == added && report.Unchanged == unchanged
             ? Stopwatch.GetElapsedTime(start)
-            : throw new InvalidOperationException($"{report.Added} added, {report.Unchanged} unchanged, {report.Rejected} rejected: {report.Rejections.FirstOrDefault()}");
+            : throw new InvalidOperationException(
+                $"{report.Added} added, {report.Unchanged} unchanged, {report.Rejected} rejected: "
+                + $"{report.Rejections.FirstOrDefault()}");
     }
 
     private static long PeakBytes()
@@ -111,11 +113,18 @@ internal static class ImportTable
     {
         var random = new Random(1);
         using var text = new StreamWriter(path) { NewLine = "\n" };
-        text.WriteLine("Part Number,Description,Frequency (MHz),Load Cap.,ESR max,Freq Tol,Freq Stab,Operating Temp,Drive Level (uW),Package,Stock,MOQ,Price,Qty 100 price,Currency");
+        text.WriteLine(
+            "Part Number,Description,Frequency (MHz),Load Cap.,ESR max,Freq Tol,Freq Stab,Operating Temp,"
+            + "Drive Level (uW),Package,Stock,MOQ,Price,Qty 100 price,Currency");
         for (int i = 0; i < rows; i++)
         {
             double price = random.Next(10, 300) / 100.0;
-            text.WriteLine(string.Create(CultureInfo.InvariantCulture, $"XT-{i:D7},crystal number {i},{random.Next(3, 50)}.{random.Next(10, 999999):D6},{random.Next(6, 33)}pF,{random.Next(2, 20) * 10} Ohm,±{random.Next(1, 6) * 10}ppm,±{random.Next(1, 10) * 10}ppm,-{random.Next(1, 5) * 10}°C ~ {random.Next(6, 10) * 10}°C,{random.Next(1, 6) * 100},SMD {random.Next(16, 80)}25,{random.Next(0, 50000)},{random.Next(1, 11)},{price:F2},{price * 0.7:F3},EUR"));
+            text.WriteLine(string.Create(
+                CultureInfo.InvariantCulture,
+                $"XT-{i:D7},crystal number {i},{random.Next(3, 50)}.{random.Next(10, 999999):D6},{random.Next(6, 33)}pF,"
+                + $"{random.Next(2, 20) * 10} Ohm,±{random.Next(1, 6) * 10}ppm,±{random.Next(1, 10) * 10}ppm,"
+                + $"-{random.Next(1, 5) * 10}°C ~ {random.Next(6, 10) * 10}°C,{random.Next(1, 6) * 100},"
+                + $"SMD {random.Next(16, 80)}25,{random.Next(0, 50000)},{random.Next(1, 11)},{price:F2},{price * 0.7:F3},EUR"));
         }
     }
 }

@@ -45,7 +45,13 @@ internal static class Sample
     public static CapacitorPart Capacitor(double farads, string id, string prices = "1:0.01", int? stock = null) =>
         new()
         {
-            Id = id, Description = "", Offer = Price(prices), ValueFarads = farads, ToleranceRatio = 0.05, Dielectric = "C0G", Stock = stock,
+            Id = id,
+            Description = "",
+            Offer = Price(prices),
+            ValueFarads = farads,
+            ToleranceRatio = 0.05,
+            Dielectric = "C0G",
+            Stock = stock,
         };
 
     public static ResistorPart Resistor(double ohms, string id, string prices = "1:0.01", int? stock = null) =>

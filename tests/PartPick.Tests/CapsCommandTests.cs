@@ -39,12 +39,16 @@ public class CapsCommandTests
         Run own = Run.Of("caps", "--crystal", crystal, "--format", "csv", "--top", "1");
 
         Assert.Matches(@"33 +33 +20\.000 +0\.00 +-22\.71|33 +33 +20\.000 +0\.00 +-22\.72", moved.Output);
-        Assert.StartsWith("c1 (F),c2 (F),load (F),deviation (%),error (ppm)\n3.6E-11,3.6E-11,1.8E-11,", own.Output, StringComparison.Ordinal);
+        Assert.StartsWith(
+            "c1 (F),c2 (F),load (F),deviation (%),error (ppm)\n3.6E-11,3.6E-11,1.8E-11,", own.Output, StringComparison.Ordinal);
     }
 
     [Fact]
     public void Two_in_parallel_are_shown_as_a_sum() =>
-        Assert.Contains(" + ", Run.Of("caps", "--load", "17.3p", "--stray", "4p", "--series", "E6", "--parallel").Output, StringComparison.Ordinal);
+        Assert.Contains(
+            " + ",
+            Run.Of("caps", "--load", "17.3p", "--stray", "4p", "--series", "E6", "--parallel").Output,
+            StringComparison.Ordinal);
 
     [Theory]
     [InlineData("--load: is missing", "caps")]

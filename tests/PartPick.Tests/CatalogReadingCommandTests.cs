@@ -48,7 +48,9 @@ public class CatalogReadingCommandTests
     [Fact]
     public void The_table_of_one_part_names_unit_basis_and_origin_of_a_figure()
     {
-        string line = Run.Of("catalog", "show", "X-04M0-18-H49-30").Output.Split('\n').Single(row => row.StartsWith("resistance ", StringComparison.Ordinal));
+        string line = Run.Of("catalog", "show", "X-04M0-18-H49-30").Output
+            .Split('\n')
+            .Single(row => row.StartsWith("resistance ", StringComparison.Ordinal));
         Assert.Contains("Ω", line, StringComparison.Ordinal);
         Assert.Contains("maximum", line, StringComparison.Ordinal);
         Assert.Contains("built-in", line, StringComparison.Ordinal);
@@ -59,7 +61,10 @@ public class CatalogReadingCommandTests
     public void Export_is_the_file_of_the_built_in_parts_byte_for_byte(string kind)
     {
         using var text = new StringWriter();
-        PartCsv.Write(PartKinds.All.Single(each => each.Word() == kind), PartsCatalog.BuiltIn().All.Where(part => part.Kind.Word() == kind), text);
+        PartCsv.Write(
+            PartKinds.All.Single(each => each.Word() == kind),
+            PartsCatalog.BuiltIn().All.Where(part => part.Kind.Word() == kind),
+            text);
         string expected = text.ToString();
         Assert.Equal(expected, Run.Of("catalog", "export", kind).Output);
 
@@ -79,7 +84,8 @@ public class CatalogReadingCommandTests
     [Fact]
     public void Filter_and_top_shorten_the_list()
     {
-        Assert.Equal(3, Run.Of("catalog", "list", "crystals", "--filter", "32.768 kHz", "--top", "3", "--format", "json").Json.GetArrayLength());
+        Assert.Equal(
+            3, Run.Of("catalog", "list", "crystals", "--filter", "32.768 kHz", "--top", "3", "--format", "json").Json.GetArrayLength());
         Assert.Equal(0, Run.Of("catalog", "list", "crystals", "--filter", "no such text", "--format", "json").Json.GetArrayLength());
     }
 
@@ -89,6 +95,9 @@ public class CatalogReadingCommandTests
         Assert.Contains("is no part of the catalogue", Run.Of("catalog", "show", "no-such").WrongLine(), StringComparison.Ordinal);
         Assert.Contains("crystals", Run.Of("catalog", "list", "crystal").WrongLine(), StringComparison.Ordinal);
         Assert.Contains("partpick catalog list --help", Run.Of("catalog", "list").WrongLine(), StringComparison.Ordinal);
-        Assert.Contains("cannot be written", Run.Of("catalog", "export", "ports", "--to", "/nowhere/at/all.csv").WrongLine(), StringComparison.Ordinal);
+        Assert.Contains(
+            "cannot be written",
+            Run.Of("catalog", "export", "ports", "--to", "/nowhere/at/all.csv").WrongLine(),
+            StringComparison.Ordinal);
     }
 }

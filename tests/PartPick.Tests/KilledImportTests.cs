@@ -52,7 +52,9 @@ public sealed class KilledImportTests : IDisposable
                 import.WaitForExit();
             }
 
-            string told = string.Create(CultureInfo.InvariantCulture, $"seed {seed}, round {round}, killed after {moment:F0} of {length:F0} ms");
+            string told = string.Create(
+                CultureInfo.InvariantCulture,
+                $"seed {seed}, round {round}, killed after {moment:F0} of {length:F0} ms");
             Run verify = Run.Of("catalog", "verify", "--catalog", db);
             Assert.True(verify.Status == 0, $"{told}: {verify.Output}{verify.Error}");
             string after = Run.Of("catalog", "export", "crystals", "--catalog", db).Output;
@@ -68,7 +70,10 @@ public sealed class KilledImportTests : IDisposable
     private static Process Import(string list, string db)
     {
         string program = Path.Combine(AppContext.BaseDirectory, "partpick.dll");
-        var start = new ProcessStartInfo(Environment.ProcessPath is { } host && Path.GetFileNameWithoutExtension(host) == "dotnet" ? host : "dotnet")
+        string host = Environment.ProcessPath is { } running && Path.GetFileNameWithoutExtension(running) == "dotnet"
+            ? running
+            : "dotnet";
+        var start = new ProcessStartInfo(host)
         {
             RedirectStandardOutput = true,
             RedirectStandardError = true,

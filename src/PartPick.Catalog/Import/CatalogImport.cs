@@ -46,7 +46,12 @@ public static class CatalogImport
     });
 
     private static Result<ImportReport> Run(
-        string path, SourceText text, Func<double?> share, ImportRequest request, IProgress<ImportProgress>? progress, CancellationToken stop)
+        string path,
+        SourceText text,
+        Func<double?> share,
+        ImportRequest request,
+        IProgress<ImportProgress>? progress,
+        CancellationToken stop)
     {
         long start = TimeProvider.System.GetTimestamp();
         Result<List<ColumnWish>> wishes = Wishes(path, request);
@@ -64,7 +69,12 @@ public static class CatalogImport
         FileLayout layout = found.Value;
         var options = new ImportOptions
         {
-            Notation = request.DecimalSign switch { "comma" => NumberNotation.Comma, "point" => NumberNotation.Point, _ => NumberNotation.Unknown },
+            Notation = request.DecimalSign switch
+            {
+                "comma" => NumberNotation.Comma,
+                "point" => NumberNotation.Point,
+                _ => NumberNotation.Unknown,
+            },
             Currency = request.Currency,
             Supplier = request.Supplier,
         };
@@ -125,6 +135,9 @@ public static class CatalogImport
 
         return map.Value is null ? stated
             : ColumnMapText.Read(map.Value, request.Kind) is { } kept ? Result.Ok<List<ColumnWish>>([.. stated.Value, .. kept])
-            : Result.Fail<List<ColumnWish>>("--map", $"{Problem.Quote(name)} is a map of another kind of part", "the name of a map of " + request.Kind.Word());
+            : Result.Fail<List<ColumnWish>>(
+                "--map",
+                $"{Problem.Quote(name)} is a map of another kind of part",
+                "the name of a map of " + request.Kind.Word());
     }
 }

@@ -28,14 +28,16 @@ internal static class CellNumber
             return Result.Fail<double>("", $"{Problem.Quote(cell)} does not begin with a number", "a number with its unit");
         }
 
-        if (WrittenNumber.Plain(text[start..end], dimension == Dimension.Count ? Whole(text[start..end], notation) : notation) is not { } plain)
+        NumberNotation used = dimension == Dimension.Count ? Whole(text[start..end], notation) : notation;
+        if (WrittenNumber.Plain(text[start..end], used) is not { } plain)
         {
             string number = text[start..end];
             return Result.Fail<double>(
                 "", WrittenNumber.Weigh(number) switch
                 {
                     NumberEvidence.Wrong => $"{Problem.Quote(cell)} is no number in any notation",
-                    _ when notation == NumberNotation.Unknown => $"{Problem.Quote(cell)} can be read in two ways, with a decimal sign or with thousands",
+                    _ when notation == NumberNotation.Unknown =>
+                        $"{Problem.Quote(cell)} can be read in two ways, with a decimal sign or with thousands",
                     _ => $"{Problem.Quote(cell)} has another decimal sign than the rest of its column",
                 },
                 "a number with one decimal sign, or --decimal point or comma");
@@ -55,7 +57,8 @@ internal static class CellNumber
     // A count has no decimals: 4,000 of them are four thousand, but 4.5 stays wrong.
     private static NumberNotation Whole(string number, NumberNotation notation) => WrittenNumber.Weigh(number) switch
     {
-        NumberEvidence.CommaOrThousands when notation != NumberNotation.Comma || !number.EndsWith("000", StringComparison.Ordinal) => NumberNotation.Point,
+        NumberEvidence.CommaOrThousands when notation != NumberNotation.Comma || !number.EndsWith("000", StringComparison.Ordinal) =>
+            NumberNotation.Point,
         NumberEvidence.PointOrThousands when !number.EndsWith("000", StringComparison.Ordinal) => NumberNotation.Comma,
         _ => notation,
     };

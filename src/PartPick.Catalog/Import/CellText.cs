@@ -8,11 +8,15 @@ internal static class CellText
 {
     private static readonly HashSet<string> Missing = new(StringComparer.OrdinalIgnoreCase)
     {
-        "", "-", "--", "---", "n/a", "na", "n.a.", "none", "null", "nil", "tbd", "tba", "?", "*", "\u2013", "\u2014", "not specified", "unspecified",
-        "not applicable", "not available", "unknown", "k.a.", "k. a.", "keine angabe", "n/d", "nd", "#n/a", "nan", ".",
+        "", "-", "--", "---", "n/a", "na", "n.a.", "none", "null", "nil", "tbd", "tba", "?", "*", "\u2013", "\u2014",
+        "not specified", "unspecified", "not applicable", "not available", "unknown", "k.a.", "k. a.", "keine angabe",
+        "n/d", "nd", "#n/a", "nan", ".",
     };
 
-    private static readonly string[] Leading = ["<=", ">=", "≤", "<", "±", "+/-", "+-", "~", "max.", "max", "typ.", "typ", "approx.", "ca."];
+    private static readonly string[] Leading =
+    [
+        "<=", ">=", "≤", "<", "±", "+/-", "+-", "~", "max.", "max", "typ.", "typ", "approx.", "ca.",
+    ];
 
     private static readonly string[] Trailing = ["max.", "max", "maximum", "typ.", "typ", "typical", "min.", "nom.", "nominal"];
 
@@ -66,7 +70,9 @@ internal static class CellText
 
         foreach (string mark in Trailing)
         {
-            if (bare.Length > mark.Length && bare.EndsWith(mark, StringComparison.OrdinalIgnoreCase) && !char.IsLetter(bare[^(mark.Length + 1)]))
+            if (bare.Length > mark.Length
+                && bare.EndsWith(mark, StringComparison.OrdinalIgnoreCase)
+                && !char.IsLetter(bare[^(mark.Length + 1)]))
             {
                 bare = bare[..^mark.Length].TrimEnd(' ', ',', '(');
             }
@@ -76,5 +82,8 @@ internal static class CellText
     }
 
     private static bool IsHarmful(char letter) => char.IsControl(letter)
-        || letter is '\u2028' or '\u2029' or (>= '\u202A' and <= '\u202E') or (>= '\u2066' and <= '\u2069') or '\u200E' or '\u200F' or '\u061C';
+        || letter is '\u2028' or '\u2029'
+            or (>= '\u202A' and <= '\u202E')
+            or (>= '\u2066' and <= '\u2069')
+            or '\u200E' or '\u200F' or '\u061C';
 }

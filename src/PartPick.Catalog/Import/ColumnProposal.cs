@@ -40,7 +40,9 @@ internal sealed class ColumnProposal(PartKind kind, IReadOnlyList<string[]> rows
                 && (shape.Fields.Any(field => field.Header == cell.Trim())
                     || wishes.Any(wish => Same(wish.Header, cell))
                     || FieldMatch.Of(kind, 0, HeaderCell.Of(cell)).Any()))
-            + row.Count(cell => cell.Length is > 0 and < 80 && char.IsAsciiDigit(cell[0]) && HeaderCell.Of(cell).PriceQuantity() is not null);
+            + row.Count(cell => cell.Length is > 0 and < 80
+                && char.IsAsciiDigit(cell[0])
+                && HeaderCell.Of(cell).PriceQuantity() is not null);
     }
 
     private static bool Same(string one, string other) => string.Equals(one.Trim(), other.Trim(), StringComparison.OrdinalIgnoreCase);
@@ -61,7 +63,13 @@ internal sealed class ColumnProposal(PartKind kind, IReadOnlyList<string[]> rows
         var taken = new HashSet<string>(StringComparer.Ordinal);
         for (int i = 0; i < cells.Length; i++)
         {
-            uses[i] = new ColumnUse { Index = i, Header = cells[i].Text, Basis = cells[i].Basis, Why = "its header names no figure of " + kind.Word() };
+            uses[i] = new ColumnUse
+            {
+                Index = i,
+                Header = cells[i].Text,
+                Basis = cells[i].Basis,
+                Why = "its header names no figure of " + kind.Word(),
+            };
             if (RejectedFile.IsOwnColumn(cells[i].Text))
             {
                 uses[i] = uses[i] with { Why = "added by an earlier import, not read" };
@@ -74,14 +82,17 @@ internal sealed class ColumnProposal(PartKind kind, IReadOnlyList<string[]> rows
                     taken.Add(field);
                 }
             }
-            else if (cells[i].PriceQuantity() is { } quantity && !FieldMatch.Of(kind, i, cells[i]).Any(match => match.Score >= 85 && match.Field != "price"))
+            else if (cells[i].PriceQuantity() is { } quantity
+                && !FieldMatch.Of(kind, i, cells[i]).Any(match => match.Score >= 85 && match.Field != "price"))
             {
                 uses[i] = uses[i] with { Field = "price", Quantity = quantity, Why = $"header: price from {quantity}" };
             }
         }
 
         IEnumerable<FieldMatch> matches = cells
-            .SelectMany((cell, i) => uses[i].Field is null && uses[i].Why.StartsWith("its header", StringComparison.Ordinal) ? FieldMatch.Of(kind, i, cell) : [])
+            .SelectMany((cell, i) => uses[i].Field is null && uses[i].Why.StartsWith("its header", StringComparison.Ordinal)
+                ? FieldMatch.Of(kind, i, cell)
+                : [])
             .OrderByDescending(match => match.Score).ThenBy(match => match.Column);
         foreach (FieldMatch match in matches)
         {
@@ -116,8 +127,10 @@ internal sealed class ColumnProposal(PartKind kind, IReadOnlyList<string[]> rows
         return cells.Length == 0 || match.Field switch
         {
             "temperature" => Share(cells, cell => TemperatureRange.Read(cell) is not null) >= least,
-            "price" => Share(cells, cell => PriceCells.Price(cell, NumberNotation.Point) is not null || PriceCells.Price(cell, NumberNotation.Comma) is not null) >= least,
-            "prices" => Share(cells, cell => PriceCells.List(cell, NumberNotation.Point) is not null || PriceCells.List(cell, NumberNotation.Comma) is not null) >= least,
+            "price" => Share(cells, cell => PriceCells.Price(cell, NumberNotation.Point) is not null
+                || PriceCells.Price(cell, NumberNotation.Comma) is not null) >= least,
+            "prices" => Share(cells, cell => PriceCells.List(cell, NumberNotation.Point) is not null
+                || PriceCells.List(cell, NumberNotation.Comma) is not null) >= least,
             "toleranceAny" => Share(cells, cell => cell.Any(char.IsAsciiDigit) || cell.Length == 1) >= least,
             "overtone" or "cut" => true,
             _ when dimension is { } measured => Share(cells, cell => Readable(match.Field, cell, measured)) >= least,
@@ -126,7 +139,8 @@ internal sealed class ColumnProposal(PartKind kind, IReadOnlyList<string[]> rows
     }
 
     private static bool Readable(string field, string cell, Dimension dimension) =>
-        CellNumber.Read(cell, dimension, 0, NumberNotation.Point, field.StartsWith("temp", StringComparison.Ordinal) || field == "parabola").IsOk
+        CellNumber.Read(
+            cell, dimension, 0, NumberNotation.Point, field.StartsWith("temp", StringComparison.Ordinal) || field == "parabola").IsOk
         || CellNumber.Read(cell, dimension, 0, NumberNotation.Comma, field == "parabola").IsOk;
 
     private NumberNotation FileNotation(ColumnUse[] uses)
@@ -169,7 +183,8 @@ internal sealed class ColumnProposal(PartKind kind, IReadOnlyList<string[]> rows
         return use with { Unit = name, Power = found, Why = use.Why + why };
     }
 
-    private (NumberNotation Notation, string How) Notation(ColumnUse use, string field, Dimension? dimension, int? power, NumberNotation file)
+    private (NumberNotation Notation, string How) Notation(
+        ColumnUse use, string field, Dimension? dimension, int? power, NumberNotation file)
     {
         if (options.Notation != NumberNotation.Unknown)
         {
@@ -189,7 +204,9 @@ internal sealed class ColumnProposal(PartKind kind, IReadOnlyList<string[]> rows
             return (file == NumberNotation.Unknown ? NumberNotation.Point : file, "");
         }
 
-        NumberNotation plausible = dimension is { } measured ? NotationChoice.Plausibly(kind, field, measured, power, numbers) : NumberNotation.Unknown;
+        NumberNotation plausible = dimension is { } measured
+            ? NotationChoice.Plausibly(kind, field, measured, power, numbers)
+            : NumberNotation.Unknown;
         if (plausible != NumberNotation.Unknown)
         {
             return (plausible, $"; decimal {Word(plausible)}, since the other reading is no figure of a part");
@@ -208,7 +225,8 @@ internal sealed class ColumnProposal(PartKind kind, IReadOnlyList<string[]> rows
     // Prices of which nothing says the currency are left out rather than taken in a wrong one.
     private ColumnUse[] WithoutUnknownMoney(ColumnUse[] uses) => uses.Any(use => use.Field == "currency")
         ? uses
-        : [.. uses.Select(use => use is { Field: "price" or "prices", Currency: null } && !Cells(use.Index).Any(cell => PriceCells.CurrencyIn(cell) is not null)
+        : [.. uses.Select(use => use is { Field: "price" or "prices", Currency: null }
+            && !Cells(use.Index).Any(cell => PriceCells.CurrencyIn(cell) is not null)
             ? use with { Field = null, Why = "prices without a currency are left out: state --currency" }
             : use)];
 
@@ -225,11 +243,20 @@ internal sealed class ColumnProposal(PartKind kind, IReadOnlyList<string[]> rows
             ColumnUse[] fitting = [.. uses.Where(use => use.Field is null && use.Why.StartsWith("its header", StringComparison.Ordinal)
                 && Cells(use.Index) is { Length: > 0 } cells
                 && cells.All(cell => !CellNumber.HasNoUnit(cell)
-                    && CellNumber.Read(cell, dimension, 0, file, false) is { IsOk: true } read && Plausible.Holds(kind, field, read.Value)))];
-            if (fitting.Length == 1 && !(field == "load" && Cells(fitting[0].Index).All(cell => CellNumber.Read(cell, dimension, 0, file, false).Value <= 7e-12)))
+                    && CellNumber.Read(cell, dimension, 0, file, false) is { IsOk: true } read
+                    && Plausible.Holds(kind, field, read.Value)))];
+            if (fitting.Length == 1
+                && !(field == "load"
+                    && Cells(fitting[0].Index).All(cell => CellNumber.Read(cell, dimension, 0, file, false).Value <= 7e-12)))
             {
                 int at = fitting[0].Index;
-                uses[at] = uses[at] with { Field = field, Power = ColumnUse.NoPlainNumbers, Notation = file, Why = "the unit of its cells" };
+                uses[at] = uses[at] with
+                {
+                    Field = field,
+                    Power = ColumnUse.NoPlainNumbers,
+                    Notation = file,
+                    Why = "the unit of its cells",
+                };
             }
         }
 
@@ -240,7 +267,10 @@ internal sealed class ColumnProposal(PartKind kind, IReadOnlyList<string[]> rows
     {
         PartKind.Crystal =>
         [
-            ("frequency", Dimension.Frequency), ("load", Dimension.Capacitance), ("resistance", Dimension.Resistance), ("driveLevel", Dimension.Power),
+            ("frequency", Dimension.Frequency),
+            ("load", Dimension.Capacitance),
+            ("resistance", Dimension.Resistance),
+            ("driveLevel", Dimension.Power),
         ],
         PartKind.Capacitor => [("value", Dimension.Capacitance), ("voltage", Dimension.Voltage)],
         PartKind.Resistor => [("value", Dimension.Resistance), ("tolerance", Dimension.Relative)],

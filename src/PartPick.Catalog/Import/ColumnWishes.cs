@@ -22,12 +22,16 @@ internal static class ColumnWishes
             {
                 return Result.Fail<List<ColumnWish>>(
                     "--column", $"{Problem.Quote(text)} names no figure of {kind.Word()}",
-                    "HEADER=FIELD or HEADER=FIELD:UNIT with one of " + string.Join(", ", PartShape.Of(kind).Fields.Select(each => each.Key).Concat(Several)));
+                    "HEADER=FIELD or HEADER=FIELD:UNIT with one of "
+                        + string.Join(", ", PartShape.Of(kind).Fields.Select(each => each.Key).Concat(Several)));
             }
 
             if (unit.Length > 0 && field?.Dimension is { } dimension && UnitSpelling.PowerOf(unit, dimension) is null)
             {
-                return Result.Fail<List<ColumnWish>>("--column", $"{Problem.Quote(unit)} is no unit of {field.Key}", field.Unit.Length > 0 ? "a unit such as " + field.Unit : "no unit");
+                return Result.Fail<List<ColumnWish>>(
+                    "--column",
+                    $"{Problem.Quote(unit)} is no unit of {field.Key}",
+                    field.Unit.Length > 0 ? "a unit such as " + field.Unit : "no unit");
             }
 
             wishes.Add(new ColumnWish(header.Trim(), rest[0].Length > 0 ? rest[0] : null, unit));

@@ -24,7 +24,8 @@ internal static class CrystalWords
 
         double? overtone = words switch
         {
-            "1" or "1st" or "fund" or "fundamental" or "fundamental mode" or "at fundamental" or "grundton" or "fondamental" or "f" or "at fund" => 1,
+            "1" or "1st" or "fund" or "fundamental" or "fundamental mode" or "at fundamental" or "grundton" or "fondamental"
+                or "f" or "at fund" => 1,
             "3" or "3rd" or "third" or "3rd overtone" or "third overtone" or "3 ot" or "3rd ot" or "3ot" or "3o t" => 3,
             "5" or "5th" or "fifth" or "5th overtone" or "fifth overtone" or "5 ot" or "5th ot" or "5ot" => 5,
             _ => null,

@@ -15,7 +15,8 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
         {
             if (Trade.Words(field.Key) == header.Name)
             {
-                yield return new FieldMatch(column, (kind, field.Key) is (PartKind.Capacitor, "tolerance") ? "toleranceAny" : field.Key, 110);
+                string named = (kind, field.Key) is (PartKind.Capacitor, "tolerance") ? "toleranceAny" : field.Key;
+                yield return new FieldMatch(column, named, 110);
             }
         }
 

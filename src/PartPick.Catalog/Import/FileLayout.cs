@@ -59,7 +59,9 @@ internal sealed record FileLayout
         if (known == 0)
         {
             return Result.Fail<FileLayout>(
-                name, "has no header that names a figure of " + kind.Word(), "a row of column names such as frequency, load, ESR; or --column");
+                name,
+                "has no header that names a figure of " + kind.Word(),
+                "a row of column names such as frequency, load, ESR; or --column");
         }
 
         return Result.Ok(new FileLayout
@@ -111,7 +113,9 @@ internal sealed record FileLayout
             return 0;
         }
 
-        IGrouping<int, (string[] Cells, long Line)> mode = rows.GroupBy(row => row.Cells.Length).MaxBy(group => group.Count() * (group.Key > 1 ? 2 : 1))!;
+        IGrouping<int, (string[] Cells, long Line)> mode = rows
+            .GroupBy(row => row.Cells.Length)
+            .MaxBy(group => group.Count() * (group.Key > 1 ? 2 : 1))!;
         return mode.Key <= 1 ? 0 : ((double)mode.Count() / rows.Count) + (Math.Min(mode.Key, 40) * 0.002);
     }
 }

@@ -13,14 +13,16 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
     private static readonly string[] Units =
     [
         "pF", "nF", "uF", "µF", "μF", "fF", "aF", "F", "Hz", "kHz", "KHz", "khz", "MHz", "mhz", "MHZ", "KHZ", "GHz", "Ohm", "Ohms", "ohm",
-        "ohms", "OHM", "Ω", "kOhm", "kΩ", "k", "MOhm", "MΩ", "mΩ", "ppm", "PPM", "ppb", "%", "µW", "uW", "μW", "mW", "W", "V", "VDC", "Volts", "mV",
-        "A", "mA", "°C", "C", "degC", "pf", "PF", "nf", "uf", "UF", "NF", "ppm/K", "ppm/°C", "uw", "mw", "UW", "MW", "ppm/K2", "in ppm",
+        "ohms", "OHM", "Ω", "kOhm", "kΩ", "k", "MOhm", "MΩ", "mΩ", "ppm", "PPM", "ppb", "%", "µW", "uW", "μW", "mW", "W",
+        "V", "VDC", "Volts", "mV", "A", "mA", "°C", "C", "degC", "pf", "PF", "nf", "uf", "UF", "NF", "ppm/K", "ppm/°C",
+        "uw", "mw", "UW", "MW", "ppm/K2", "in ppm",
         "ppm/year", "pcs", "EUR", "USD", "GBP", "CHF", "SEK", "JPY", "CNY", "€", "$", "£",
     ];
 
     private static readonly HashSet<string> Noise = new(StringComparer.Ordinal)
     {
-        "max", "maximum", "min", "minimum", "typ", "typical", "nominal", "nom", "rated", "at", "25c", "25", "in", "the", "of", "value", "all",
+        "max", "maximum", "min", "minimum", "typ", "typical", "nominal", "nom", "rated", "at", "25c", "25", "in", "the", "of",
+        "value", "all",
     };
 
     /// <summary>The words of the name without those that only qualify it.</summary>
@@ -66,7 +68,8 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
         Match quantity = WholeNumber().Match(Text);
         string[] words = Trade.Words(Text).Split(' ');
         bool isPrice = Text.Contains('+', StringComparison.Ordinal)
-            || words.Any(word => word is "price" or "preis" or "prix" or "cost" or "pc" or "pcs" or "each" or "ab" or "vk" or "ea" or "stk" or "stuck");
+            || words.Any(word => word is "price" or "preis" or "prix" or "cost" or "pc" or "pcs" or "each" or "ab" or "vk"
+                or "ea" or "stk" or "stuck");
         bool several = WholeNumber().Count(Text) is 1 or 2;
         return quantity.Success && isPrice && several
             && int.TryParse(quantity.Value.Replace(",", "", StringComparison.Ordinal).Replace(".", "", StringComparison.Ordinal),

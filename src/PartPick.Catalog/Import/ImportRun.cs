@@ -32,11 +32,15 @@ internal sealed class ImportRun : IDisposable
         (_file, _request, _uses) = (file, request, uses);
         _shape = PartShape.Of(request.Kind);
         _reader = new RowReader(request.Kind, uses);
-        _digest = new RowDigest(
-            $"{request.Kind.Word()}\n{request.Supplier}\n{string.Join('\n', uses.Select(use => $"{use.Index}\t{use.Field}\t{use.Power}\t{use.Notation}\t{use.Quantity}\t{use.Currency}\t{use.Basis}\t{use.Exact}"))}");
+        string columns = string.Join('\n', uses.Select(use =>
+            $"{use.Index}\t{use.Field}\t{use.Power}\t{use.Notation}\t"
+            + $"{use.Quantity}\t{use.Currency}\t{use.Basis}\t{use.Exact}"));
+        _digest = new RowDigest($"{request.Kind.Word()}\n{request.Supplier}\n{columns}");
         _known = KnownParts.Of(file);
         _number = file.NextImport();
-        _rejectedFile = request.RejectedPath is { } path && !request.DryRun ? new RejectedFile(path, layout.Header, layout.Delimiter) : null;
+        _rejectedFile = request.RejectedPath is { } path && !request.DryRun
+            ? new RejectedFile(path, layout.Header, layout.Delimiter)
+            : null;
         (_idColumn, _numberColumn, _supplierColumn) = (IndexOf("id"), IndexOf("supplierPart"), IndexOf("supplier"));
     }
 
@@ -72,7 +76,9 @@ internal sealed class ImportRun : IDisposable
             if ((rows.Fault is { } fault ? new RowRejection(rows.Line, null, null, fault) : Reject(rows, headerCells)) is { } rejection)
             {
                 Rejected++;
-                _rejectedFile?.Add(rejection, rows.Fault is null ? [.. rows.Cells] : [new string(rows.Raw[..Math.Min(1000, rows.Raw.Length)])]);
+                _rejectedFile?.Add(
+                    rejection,
+                    rows.Fault is null ? [.. rows.Cells] : [new string(rows.Raw[..Math.Min(1000, rows.Raw.Length)])]);
                 if (_listed.Count < ImportReport.MostListed)
                 {
                     _listed.Add(rejection);
@@ -91,8 +97,12 @@ internal sealed class ImportRun : IDisposable
         if (Added + Updated > 0)
         {
             _file.WriteImport(new ImportNote(
-                _number, CellText.Harmless(_request.Name), _request.Date.ToString("yyyy-MM-dd", System.Globalization.CultureInfo.InvariantCulture),
-                _request.Kind, Added, Updated));
+                _number,
+                CellText.Harmless(_request.Name),
+                _request.Date.ToString("yyyy-MM-dd", System.Globalization.CultureInfo.InvariantCulture),
+                _request.Kind,
+                Added,
+                Updated));
         }
     }
 
@@ -110,14 +120,14 @@ internal sealed class ImportRun : IDisposable
     {
         long line = rows.Line;
         IReadOnlyList<string> cells = rows.Cells;
-        if (cells.Count > headerCells && cells.Skip(headerCells).Any(cell => !string.IsNullOrWhiteSpace(cell)))
+        bool tooMany = cells.Count > headerCells && cells.Skip(headerCells).Any(cell => !string.IsNullOrWhiteSpace(cell));
+        if (tooMany || (_uses[0].Exact && cells.Count != headerCells))
         {
-            return new RowRejection(line, null, null, $"has {CellNumber.Text(cells.Count)} cells, the header {CellNumber.Text(headerCells)}; fits one cell for each column");
-        }
-
-        if (_uses[0].Exact && cells.Count != headerCells)
-        {
-            return new RowRejection(line, null, null, $"has {CellNumber.Text(cells.Count)} cells, the header {CellNumber.Text(headerCells)}; fits one cell for each column");
+            return new RowRejection(
+                line,
+                null,
+                null,
+                $"has {CellNumber.Text(cells.Count)} cells, the header {CellNumber.Text(headerCells)}; fits one cell for each column");
         }
 
         string? id = Cell(cells, _idColumn);
@@ -134,8 +144,10 @@ internal sealed class ImportRun : IDisposable
         {
             if (known.Digest != digest)
             {
-                return new RowRejection(line, Header(id is not null ? "id" : "supplierPart"), id ?? number, string.Create(
-                    System.Globalization.CultureInfo.InvariantCulture, $"is the part of line {known.MetOn} with other figures; fits one row for each part"));
+                string what = string.Create(
+                    System.Globalization.CultureInfo.InvariantCulture,
+                    $"is the part of line {known.MetOn} with other figures; fits one row for each part");
+                return new RowRejection(line, Header(id is not null ? "id" : "supplierPart"), id ?? number, what);
             }
 
             Unchanged++;
@@ -182,7 +194,8 @@ internal sealed class ImportRun : IDisposable
             return wrong;
         }
 
-        _known.Add(new KnownPart(part.Id, _request.Kind, part.Supplier, number is null ? null : CellText.Harmless(number), digest) { MetOn = line });
+        string? kept = number is null ? null : CellText.Harmless(number);
+        _known.Add(new KnownPart(part.Id, _request.Kind, part.Supplier, kept, digest) { MetOn = line });
         Added++;
         _batch.Add(PartDocument.Write(new StoredPart
         {
@@ -266,7 +279,8 @@ internal sealed class ImportRun : IDisposable
 
         Problem problem = figures.Problems.Find(each => Header(each.Where) is not null)
             ?? figures.Problems.Find(each => each.Where is "frequency" or "value" or "beta") ?? figures.Problems[0];
-        return (null, new RowRejection(line, Header(problem.Where), draft.Text(problem.Where), $"{problem.Where} {problem.What}; fits {problem.Fits}"));
+        string what = $"{problem.Where} {problem.What}; fits {problem.Fits}";
+        return (null, new RowRejection(line, Header(problem.Where), draft.Text(problem.Where), what));
     }
 
     private void Flush()

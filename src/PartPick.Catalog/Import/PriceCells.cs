@@ -16,7 +16,9 @@ internal static partial class PriceCells
     /// <summary>The currency that a text names; null for none.</summary>
     public static string? CurrencyIn(string text) =>
         Signs.FirstOrDefault(pair => text.Contains(pair.Sign, StringComparison.Ordinal)).Currency
-        ?? Signs.Where(pair => pair.Sign.Length == 3).FirstOrDefault(pair => text.Contains(pair.Sign, StringComparison.OrdinalIgnoreCase)).Currency;
+        ?? Signs
+            .Where(pair => pair.Sign.Length == 3)
+            .FirstOrDefault(pair => text.Contains(pair.Sign, StringComparison.OrdinalIgnoreCase)).Currency;
 
     /// <summary>One price; null where the cell is none, or can be read in two ways.</summary>
     public static decimal? Price(string cell, NumberNotation notation)

@@ -18,7 +18,8 @@ internal sealed class RejectedFile : IDisposable
     private readonly char _delimiter;
     private CsvWriter? _writer;
 
-    public RejectedFile(string path, IReadOnlyList<string> header, char delimiter) => (_path, _header, _delimiter) = (path, header, delimiter);
+    public RejectedFile(string path, IReadOnlyList<string> header, char delimiter) =>
+        (_path, _header, _delimiter) = (path, header, delimiter);
 
     /// <summary>Whether a header is one of those that this file adds.</summary>
     public static bool IsOwnColumn(string header) => OwnColumns.Contains(header.Trim(), StringComparer.OrdinalIgnoreCase);
@@ -59,7 +60,13 @@ internal sealed class RejectedFile : IDisposable
     private CsvWriter Begin()
     {
         var text = new StreamWriter(_path + ".new", append: false, new UTF8Encoding(encoderShouldEmitUTF8Identifier: false));
-        CsvWriterOptions options = CsvWriterOptions.Default with { NewLine = "\n", Separator = _delimiter, WriteByteOrderMark = false, ValidateFieldCount = false };
+        CsvWriterOptions options = CsvWriterOptions.Default with
+        {
+            NewLine = "\n",
+            Separator = _delimiter,
+            WriteByteOrderMark = false,
+            ValidateFieldCount = false,
+        };
         CsvWriter writer = CsvWriter.Create(text, options, false);
         writer.WriteRecord([.. OwnColumns, .. Kept(_header)]);
         return writer;

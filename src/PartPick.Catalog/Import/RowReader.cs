@@ -61,7 +61,9 @@ internal sealed class RowReader
                     "names no currency; fits a sign beside the price, a column of currencies, or --currency EUR"));
             }
 
-            draft.Set("prices", string.Join(';', prices.Select(pair => string.Create(CultureInfo.InvariantCulture, $"{pair.Key}:{pair.Value}"))));
+            IEnumerable<string> steps = prices.Select(
+                pair => string.Create(CultureInfo.InvariantCulture, $"{pair.Key}:{pair.Value}"));
+            draft.Set("prices", string.Join(';', steps));
             if (!draft.Has("currency"))
             {
                 draft.Set("currency", currency);
@@ -92,7 +94,12 @@ internal sealed class RowReader
     }
 
     private string? ReadCell(
-        int i, string raw, PartDraft draft, SortedDictionary<int, decimal> prices, SortedDictionary<string, string> marks, ref string? currency)
+        int i,
+        string raw,
+        PartDraft draft,
+        SortedDictionary<int, decimal> prices,
+        SortedDictionary<string, string> marks,
+        ref string? currency)
     {
         ColumnUse use = _uses[i];
         string cell = CellText.Plain(raw);
@@ -173,7 +180,8 @@ internal sealed class RowReader
         }
 
         draft.Set(field.Key, value.Value);
-        if (use.Basis != Basis.Stated && field.BasisKey is not ("stock" or "temperatureMin" or "temperatureMax" or "minimumOrder" or "multiple"))
+        if (use.Basis != Basis.Stated
+            && field.BasisKey is not ("stock" or "temperatureMin" or "temperatureMax" or "minimumOrder" or "multiple"))
         {
             marks[field.BasisKey] = use.Basis switch { Basis.Minimum => "minimum", Basis.Typical => "typical", _ => "maximum" };
         }
@@ -190,7 +198,10 @@ internal sealed class RowReader
         }
 
         Result<double> value = CellNumber.Read(cell, dimension, _uses[i].Power, _uses[i].Notation, field.AllowNegative);
-        if (value.IsOk && Plausible.Of(_kind, field.Key) is { } range && (value.Value < range.Least - (Math.Abs(range.Least) * 0.5) || value.Value > range.Greatest * 2) && value.Value != 0)
+        if (value.IsOk
+            && Plausible.Of(_kind, field.Key) is { } range
+            && (value.Value < range.Least - (Math.Abs(range.Least) * 0.5) || value.Value > range.Greatest * 2)
+            && value.Value != 0)
         {
             value = Result.Fail<double>(
                 "", $"{Problem.Quote(cell)} is no {field.Key} that {_kind.Word()} have",

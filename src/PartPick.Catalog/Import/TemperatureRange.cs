@@ -24,7 +24,9 @@ internal static partial class TemperatureRange
         double.Parse(text.Replace(',', '.').Replace(" ", "", StringComparison.Ordinal), NumberStyles.Float, CultureInfo.InvariantCulture);
 
     [GeneratedRegex(
-        @"^([+-]?\s?\d{1,3}(?:[.,]\d)?)\s*(?:[°º]?\s*C|deg\.?\s*C)?\s*(?:~|to|bis|à|a|up to|\.{2,3}|…|/|÷|-|;|,|to)\s*([+-]?\s?\d{1,3}(?:[.,]\d)?)\s*(?:[°º℃]?\s*C?|deg\.?\s*C)?$",
+        @"^([+-]?\s?\d{1,3}(?:[.,]\d)?)\s*(?:[°º]?\s*C|deg\.?\s*C)?"
+            + @"\s*(?:~|to|bis|à|a|up to|\.{2,3}|…|/|÷|-|;|,|to)\s*"
+            + @"([+-]?\s?\d{1,3}(?:[.,]\d)?)\s*(?:[°º℃]?\s*C?|deg\.?\s*C)?$",
         RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex Form();
 }

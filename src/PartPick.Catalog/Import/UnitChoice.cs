@@ -2,10 +2,15 @@ using PartPick.Values;
 
 namespace PartPick.Catalog.Import;
 
-/// <summary>Finds the unit of numbers that have none, where the header names none either: the only one with which they are figures of a part.</summary>
+/// <summary>
+/// Finds the unit of numbers that have none, where the header names none either: the only one with which they are figures
+/// of a part.
+/// </summary>
 internal static class UnitChoice
 {
-    /// <summary>The power of ten and its unit, and why; <see cref="ColumnUse.NoPlainNumbers"/> where none or more than one is possible.</summary>
+    /// <summary>
+    /// The power of ten and its unit, and why; <see cref="ColumnUse.NoPlainNumbers"/> where none or more than one is possible.
+    /// </summary>
     public static (int Power, string Unit, string Why) For(
         PartKind kind, string field, Dimension dimension, NumberNotation notation, IReadOnlyList<string> cells)
     {
@@ -34,8 +39,9 @@ internal static class UnitChoice
 
         return possible.Length == 1
             ? (possible[0].Power, possible[0].Unit, $"; no unit stated, taken as {possible[0].Unit}, the only one that fits its numbers")
-            : (ColumnUse.NoPlainNumbers, "",
-                possible.Length == 0 ? "; no unit stated, and none fits its numbers" : $"; no unit stated, {string.Join(" or ", possible.Select(each => each.Unit))} possible: state it");
+            : (ColumnUse.NoPlainNumbers, "", possible.Length == 0
+                ? "; no unit stated, and none fits its numbers"
+                : $"; no unit stated, {string.Join(" or ", possible.Select(each => each.Unit))} possible: state it");
     }
 
     private static (int Power, string Unit)[] Units(Dimension dimension) => dimension switch

@@ -13,7 +13,8 @@ internal static class WrittenNumber
         }
 
         int end = start;
-        while (end < text.Length && (char.IsAsciiDigit(text[end]) || (text[end] is '.' or ',' && Digit(text, end + 1)) || Groups(text, end)))
+        while (end < text.Length
+            && (char.IsAsciiDigit(text[end]) || (text[end] is '.' or ',' && Digit(text, end + 1)) || Groups(text, end)))
         {
             end++;
         }

@@ -20,7 +20,10 @@ internal sealed class Origins(IReadOnlyDictionary<int, ImportNote> imports)
                 : PlaceOf(stored, key);
         }
 
-        foreach (string mark in (stored.Supplied.Text("basis") ?? "").Split(';').Where(mark => mark.EndsWith("=assumed", StringComparison.Ordinal)))
+        IEnumerable<string> assumed = (stored.Supplied.Text("basis") ?? "")
+            .Split(';')
+            .Where(mark => mark.EndsWith("=assumed", StringComparison.Ordinal));
+        foreach (string mark in assumed)
         {
             string key = mark.Split('=')[0];
             if (stored.Place.Import > 0 && origins.TryGetValue(key, out string? place) && !stored.ByHand.Has(key))

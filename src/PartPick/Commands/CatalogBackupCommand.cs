@@ -26,7 +26,9 @@ internal static class CatalogBackupCommand
     }
 
     /// <summary>A path that says something.</summary>
-    public static string Filled(string path, string where) => !string.IsNullOrWhiteSpace(path) && !path.Contains('\0', StringComparison.Ordinal)
-        ? path
-        : throw new CommandFailure(new Problem(where, $"{Problem.Quote(path)} is no path", "the path of a file"), ExitStatus.WrongInput);
+    public static string Filled(string path, string where) =>
+        !string.IsNullOrWhiteSpace(path) && !path.Contains('\0', StringComparison.Ordinal)
+            ? path
+            : throw new CommandFailure(
+                new Problem(where, $"{Problem.Quote(path)} is no path", "the path of a file"), ExitStatus.WrongInput);
 }

@@ -82,7 +82,10 @@ internal static class CatalogExportCommand
         catch (Exception error) when (error is IOException or UnauthorizedAccessException or ArgumentException or NotSupportedException)
         {
             throw new CommandFailure(
-                new Problem("--to", $"{Problem.Quote(path)} cannot be written: {error.Message}", "a file in a directory that can be written to"),
+                new Problem(
+                    "--to",
+                    $"{Problem.Quote(path)} cannot be written: {error.Message}",
+                    "a file in a directory that can be written to"),
                 ExitStatus.WrongInput);
         }
     }

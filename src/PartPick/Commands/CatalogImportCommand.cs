@@ -29,7 +29,11 @@ internal static class CatalogImportCommand
             HelpName = "KIND",
             Required = true,
         };
-        var map = new Option<string?>("--map") { Description = "The name of a column map: used, or kept where there is none", HelpName = "NAME" };
+        var map = new Option<string?>("--map")
+        {
+            Description = "The name of a column map: used, or kept where there is none",
+            HelpName = "NAME",
+        };
         var dryRun = new Option<bool>("--dry-run") { Description = "Only say what would happen" };
         var column = new Option<string[]>("--column")
         {
@@ -41,7 +45,11 @@ internal static class CatalogImportCommand
         sign.AcceptOnlyFromAmong("point", "comma");
         var currency = new Option<string?>("--currency") { Description = "The currency of prices that name none", HelpName = "CODE" };
         var supplier = new Option<string?>("--supplier") { Description = "The supplier of rows that name none", HelpName = "NAME" };
-        var rejected = new Option<string?>("--rejected") { Description = "Where rejected rows go; else FILE.rejected.csv", HelpName = "FILE" };
+        var rejected = new Option<string?>("--rejected")
+        {
+            Description = "Where rejected rows go; else FILE.rejected.csv",
+            HelpName = "FILE",
+        };
         var quiet = new Option<bool>("--no-progress") { Description = "Show no progress" };
         var command = new Command("import", "Imports parts from a CSV file: all of it, or none.")
         {
@@ -55,7 +63,8 @@ internal static class CatalogImportCommand
             {
                 Kind = CommandFailure.Unless(PartKinds.Named(parsed.GetRequiredValue(kind), kind.Name)),
                 Name = path == "-" ? "standard input" : Path.GetFileName(path),
-                RejectedPath = parsed.GetValue(rejected) ?? (path == "-" ? "standard-input.rejected.csv" : Path.ChangeExtension(path, ".rejected.csv")),
+                RejectedPath = parsed.GetValue(rejected)
+                    ?? (path == "-" ? "standard-input.rejected.csv" : Path.ChangeExtension(path, ".rejected.csv")),
                 DryRun = parsed.GetValue(dryRun),
                 Map = parsed.GetValue(map) is { Length: > 0 } name ? name : null,
                 Columns = [.. parsed.GetValue(column) ?? []],

@@ -22,7 +22,9 @@ internal static class CatalogSetCommand
         var changes = new Argument<string[]>("KEY=VALUE") { Description = "Figures with their units", Arity = ArgumentArity.ZeroOrMore };
         var back = new Option<string[]>("--back")
         {
-            Description = "A figure whose supplied value is to count again; may be repeated", HelpName = "KEY", DefaultValueFactory = _ => [],
+            Description = "A figure whose supplied value is to count again; may be repeated",
+            HelpName = "KEY",
+            DefaultValueFactory = _ => [],
         };
         var command = new Command("set", "Sets figures of a part by hand; no import changes them.") { id, changes, back };
         HelpFooter.AddTo(command, "Examples", Examples);

@@ -16,7 +16,8 @@ internal static class CatalogUndoCommand
         {
             ImportNote note = CommandFailure.Unless(CatalogImport.Undo(context.CatalogPath(parsed)), ExitStatus.NoCatalog)
                 ?? throw new CommandFailure(
-                    new Problem("undo", "there is no import to take back", "an undo after an import, once for each"), ExitStatus.WrongInput);
+                    new Problem("undo", "there is no import to take back", "an undo after an import, once for each"),
+                    ExitStatus.WrongInput);
             context.Surroundings.Error.WriteLine(
                 $"taken back: import {note.Number} of {note.File}, {note.Date}: {note.Added} added and {note.Updated} updated parts");
             return ExitStatus.Done;

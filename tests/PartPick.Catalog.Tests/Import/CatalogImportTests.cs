@@ -4,7 +4,9 @@ namespace PartPick.Catalog.Tests.Import;
 
 public sealed class CatalogImportTests : IDisposable
 {
-    private const string List = "Part Number,Frequency,Load Cap.,ESR max,Freq Tol,Stock,Price (EUR)\nA1,4.000MHz,18pF,100 Ohm,±30ppm,\"1,200\",0.42\nA2,8 MHz,N/A,60 Ohms,±20ppm,-,€0.55\n";
+    private const string List = "Part Number,Frequency,Load Cap.,ESR max,Freq Tol,Stock,Price (EUR)\n"
+        + "A1,4.000MHz,18pF,100 Ohm,±30ppm,\"1,200\",0.42\n"
+        + "A2,8 MHz,N/A,60 Ohms,±20ppm,-,€0.55\n";
 
     private readonly ImportBench _bench = new();
 
@@ -16,7 +18,9 @@ public sealed class CatalogImportTests : IDisposable
         ImportReport report = _bench.Run(List);
         Assert.Equal((2, 2), (report.Read, report.Added));
         CrystalPart part = _bench.Crystal("A1");
-        Assert.Equal((4e6, 18e-12, 100, 30e-6, 1200), (part.FrequencyHz, part.LoadFarads, part.ResistanceOhms, part.ToleranceRatio, part.Stock));
+        Assert.Equal(
+            (4e6, 18e-12, 100, 30e-6, 1200),
+            (part.FrequencyHz, part.LoadFarads, part.ResistanceOhms, part.ToleranceRatio, part.Stock));
         Assert.Equal(Basis.Maximum, part.BasisOf("resistance"));
         Assert.Equal("list.csv line 2, 2026-03-01", _bench.Entry("A1").Origin["load"]);
         Assert.Equal((Basis.Assumed, Basis.Assumed), (part.BasisOf("cut"), part.BasisOf("overtone")));
@@ -38,7 +42,8 @@ public sealed class CatalogImportTests : IDisposable
     public void The_same_number_with_another_price_updates_the_part_and_keeps_what_the_file_does_not_state()
     {
         _bench.Run(List);
-        ImportReport report = _bench.Run(_bench.Request(name: "prices.csv"), "SKU,Unit Price,Currency,Qty Available\nA1,0.39,EUR,7\nA2,0.55,EUR,\n");
+        ImportReport report = _bench.Run(
+            _bench.Request(name: "prices.csv"), "SKU,Unit Price,Currency,Qty Available\nA1,0.39,EUR,7\nA2,0.55,EUR,\n");
         Assert.Equal((2, 1, 1), (report.Read, report.Updated, report.Unchanged));
         CrystalPart part = _bench.Crystal("A1");
         Assert.Equal((0.39m, 7, 18e-12), (part.Offer.Prices[0].UnitPrice, part.Stock, part.LoadFarads));
@@ -80,7 +85,11 @@ public sealed class CatalogImportTests : IDisposable
         var rows = string.Concat(Enumerable.Range(0, 20000).Select(i => $"P{i},4 MHz,18 pF\n"));
         var stopping = new StopAt(6000, stop);
         Assert.Throws<OperationCanceledException>(() => CatalogImport.Run(
-            _bench.Db, new MemoryStream(System.Text.Encoding.UTF8.GetBytes("Part Number,Frequency,Load\n" + rows)), _bench.Request(), stopping, stop.Token));
+            _bench.Db,
+            new MemoryStream(System.Text.Encoding.UTF8.GetBytes("Part Number,Frequency,Load\n" + rows)),
+            _bench.Request(),
+            stopping,
+            stop.Token));
         Assert.Equal(before, File.ReadAllBytes(_bench.Db));
         Assert.Empty(Directory.GetFiles(_bench.Folder, "*.copy*"));
         Assert.Null(CatalogReading.Find(_bench.Db, "P1").Value);
@@ -104,7 +113,11 @@ public sealed class CatalogImportTests : IDisposable
     [Fact]
     public void A_map_is_kept_under_its_name_and_used_again()
     {
-        ImportRequest request = _bench.Request() with { Map = "shop", Columns = ["Zahl=supplierPart", "Eins=frequency:MHz", "Zwei=load:pF"] };
+        ImportRequest request = _bench.Request() with
+        {
+            Map = "shop",
+            Columns = ["Zahl=supplierPart", "Eins=frequency:MHz", "Zwei=load:pF"],
+        };
         Assert.Equal(1, _bench.Run(request, "Zahl,Eins,Zwei\nM1,4,18\n").Added);
         ImportReport second = _bench.Run(_bench.Request() with { Map = "shop" }, "Zahl,Eins,Zwei\nM2,8,20\n");
         Assert.Equal((1, 20e-12), (second.Added, _bench.Crystal("M2").LoadFarads));
@@ -128,7 +141,10 @@ public sealed class CatalogImportTests : IDisposable
         var keeping = new KeepSetting(_bench.Db);
         string rows = string.Concat(Enumerable.Range(0, 3000).Select(i => $"P{i},4 MHz,18 pF\n"));
         Assert.True(CatalogImport.Run(
-            _bench.Db, new MemoryStream(System.Text.Encoding.UTF8.GetBytes("Part Number,Frequency,Load\n" + rows)), _bench.Request(), keeping,
+            _bench.Db,
+            new MemoryStream(System.Text.Encoding.UTF8.GetBytes("Part Number,Frequency,Load\n" + rows)),
+            _bench.Request(),
+            keeping,
             TestContext.Current.CancellationToken).IsOk);
         Assert.Equal("kept", CatalogStore.ReadSetting(_bench.Db, "during").Value);
         Assert.Equal(4e6, _bench.Crystal("P2999").FrequencyHz);
@@ -138,7 +154,12 @@ public sealed class CatalogImportTests : IDisposable
     [MemberData(nameof(Kinds))]
     public void Every_kind_goes_out_and_comes_back_byte_for_byte(PartKind kind)
     {
-        Part[] own = [.. Samples.All.Where(part => part.Kind == kind).Select(part => part with { Note = "'=1+1", Supplier = "-2+3|x", Package = "@sum" })];
+        Part[] own =
+        [
+            .. Samples.All
+                .Where(part => part.Kind == kind)
+                .Select(part => part with { Note = "'=1+1", Supplier = "-2+3|x", Package = "@sum" }),
+        ];
         string csv = Samples.Csv(kind, own);
         ImportReport report = _bench.Run(_bench.Request(kind), csv);
         Assert.Equal((own.Length, 0), (report.Added, report.Rejected));

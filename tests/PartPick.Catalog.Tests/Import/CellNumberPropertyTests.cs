@@ -9,9 +9,10 @@ public class CellNumberPropertyTests
 {
     private static readonly (Dimension Dimension, string Unit, int Power)[] Units =
     [
-        (Dimension.Frequency, "MHz", 6), (Dimension.Frequency, "kHz", 3), (Dimension.Frequency, "Hz", 0), (Dimension.Capacitance, "pF", -12),
-        (Dimension.Capacitance, "nF", -9), (Dimension.Capacitance, "uF", -6), (Dimension.Capacitance, "fF", -15), (Dimension.Resistance, "Ohm", 0),
-        (Dimension.Resistance, "kOhm", 3), (Dimension.Resistance, "MOhm", 6), (Dimension.Power, "uW", -6), (Dimension.Power, "mW", -3),
+        (Dimension.Frequency, "MHz", 6), (Dimension.Frequency, "kHz", 3), (Dimension.Frequency, "Hz", 0),
+        (Dimension.Capacitance, "pF", -12), (Dimension.Capacitance, "nF", -9), (Dimension.Capacitance, "uF", -6),
+        (Dimension.Capacitance, "fF", -15), (Dimension.Resistance, "Ohm", 0), (Dimension.Resistance, "kOhm", 3),
+        (Dimension.Resistance, "MOhm", 6), (Dimension.Power, "uW", -6), (Dimension.Power, "mW", -3),
         (Dimension.Relative, "ppm", -6), (Dimension.Relative, "%", -2), (Dimension.Voltage, "VDC", 0), (Dimension.Current, "mA", -3),
     ];
 

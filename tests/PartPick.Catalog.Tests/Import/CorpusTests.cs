@@ -9,7 +9,10 @@ public class CorpusTests
 {
     private static readonly string Folder = Path.Combine(AppContext.BaseDirectory, "Corpus");
 
-    public static TheoryData<string> Files => [.. Directory.GetFiles(Folder, "*.csv").Select(file => Path.GetFileNameWithoutExtension(file)).Order(StringComparer.Ordinal)];
+    public static TheoryData<string> Files =>
+    [
+        .. Directory.GetFiles(Folder, "*.csv").Select(file => Path.GetFileNameWithoutExtension(file)).Order(StringComparer.Ordinal),
+    ];
 
     [Fact]
     public void There_are_at_least_forty_files() => Assert.InRange(Files.Count, 40, 1000);
@@ -52,10 +55,12 @@ public class CorpusTests
                     Assert.Equal(After(line[1]), report.Columns.Single(column => column.Header == Before(line[1])).Field ?? "");
                     break;
                 case "why":
-                    Assert.Contains(After(line[1]), report.Columns.Single(column => column.Header == Before(line[1])).Why, StringComparison.Ordinal);
+                    ImportColumn explained = report.Columns.Single(column => column.Header == Before(line[1]));
+                    Assert.Contains(After(line[1]), explained.Why, StringComparison.Ordinal);
                     break;
                 case "reject":
-                    RowRejection rejection = Assert.Single(report.Rejections, row => row.Line.ToString(CultureInfo.InvariantCulture) == words[0]);
+                    RowRejection rejection = Assert.Single(
+                        report.Rejections, row => row.Line.ToString(CultureInfo.InvariantCulture) == words[0]);
                     Assert.Equal(words[1], rejection.Column?.Replace(' ', '_') ?? "-");
                     Assert.Contains(words[2].Replace('_', ' '), rejection.Reason, StringComparison.Ordinal);
                     break;
@@ -71,7 +76,8 @@ public class CorpusTests
         var figures = PartFigures.Of(part).ToDictionary(figure => figure.Key);
         foreach (string each in expected)
         {
-            (string key, string value) = (each[..each.IndexOf('=', StringComparison.Ordinal)], each[(each.IndexOf('=', StringComparison.Ordinal) + 1)..].Replace('_', ' '));
+            int sign = each.IndexOf('=', StringComparison.Ordinal);
+            (string key, string value) = (each[..sign], each[(sign + 1)..].Replace('_', ' '));
             switch (key)
             {
                 case "price":
