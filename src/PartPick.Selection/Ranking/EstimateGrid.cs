@@ -44,9 +44,6 @@ internal sealed class EstimateGrid
         _options = family.IsGate ? Logarithms(family) : [];
     }
 
-    /// <summary>Whether a combination of values has been estimated.</summary>
-    public bool IsEstimated(int option, int c1, int c2) => _nodes.ContainsKey((option, c1, c2));
-
     /// <summary>The places of the nodes along the capacitors.</summary>
     public IEnumerable<int> Values() => Places(_values.Length, Step);
 

@@ -20,6 +20,7 @@ internal sealed class FamilyScan
     private readonly CircuitFamily _family;
     private readonly CircuitTemplate _template;
     private readonly Requirement _requirement;
+    private readonly HashSet<(int Option, int C1, int C2)> _sparse = [];
     private readonly double _wanted;
     private readonly double _screenHz;
 
@@ -89,9 +90,13 @@ internal sealed class FamilyScan
         }
 
         double margin = WorstMargin(option, i, j);
-        return margin >= _wanted && Grid.At(option, i, j) is { } estimate
-            ? new Spot(option, i, j, margin, LoadRange.Of(estimate), 0)
-            : null;
+        if (margin < _wanted || Grid.At(option, i, j) is not { } estimate)
+        {
+            return null;
+        }
+
+        _sparse.Add((option, i, j));
+        return new Spot(option, i, j, margin, LoadRange.Of(estimate), 0);
     }
 
     private void ScanPair(int i, int j, List<Spot> found)
@@ -116,7 +121,7 @@ internal sealed class FamilyScan
             }
 
             before = screened;
-            if (Grid.IsEstimated(option, i, j))
+            if (_sparse.Contains((option, i, j)))
             {
                 continue;
             }
