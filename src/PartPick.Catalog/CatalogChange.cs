@@ -13,46 +13,32 @@ internal static class CatalogChange
     /// <summary>Makes a change.</summary>
     /// <param name="path">The path of the catalogue.</param>
     /// <param name="work">Makes the change in the copy; gives its result, and whether it is to be kept.</param>
-    public static Result<T> Make<T>(string path, Func<CatalogFile, (Result<T> Result, bool Keep)> work)
+    public static Result<T> Make<T>(string path, Func<CatalogFile, (Result<T> Result, bool Keep)> work) => WhileChanging(path, full =>
     {
-        ArgumentException.ThrowIfNullOrEmpty(path);
-        Result<bool> ready = CatalogStore.UseCurrent(path, _ => true);
-        if (!ready.IsOk)
+        string copy = full + ".copy";
+        try
         {
-            return Result.Fail<T>(ready.Problem);
+            Result<bool> copied = CatalogStore.Locked(full, Patience, () => CatalogFile.Copy(full, copy));
+            return copied.IsOk ? WorkOn(full, copy, work) : Result.Fail<T>(copied.Problem);
         }
-
-        path = Path.GetFullPath(path);
-        Result<IDisposable> changing = CatalogLock.Take(path + ".change", Patience);
-        if (!changing.IsOk)
+        catch (Exception error) when (error is IOException or UnauthorizedAccessException)
         {
-            return Result.Fail<T>(changing.Problem with { Where = path, What = "is in use by another process, which is changing it" });
+            return Result.Fail<T>(
+                full,
+                $"cannot be changed, and is as it was: {error.Message}",
+                "a disk with room, and a directory that can be written to");
         }
-
-        using (changing.Value)
+        finally
         {
-            string copy = path + ".copy";
-            try
-            {
-                Result<bool> copied = CatalogStore.Locked(path, Patience, () => CatalogFile.Copy(path, copy));
-                return copied.IsOk ? WorkOn(path, copy, work) : Result.Fail<T>(copied.Problem);
-            }
-            catch (Exception error) when (error is IOException or UnauthorizedAccessException)
-            {
-                return Result.Fail<T>(
-                    path,
-                    $"cannot be changed, and is as it was: {error.Message}",
-                    "a disk with room, and a directory that can be written to");
-            }
-            finally
-            {
-                CatalogFile.Delete(copy);
-            }
+            CatalogFile.Delete(copy);
         }
-    }
+    });
 
     /// <summary>Makes a small change in the catalogue itself, while no one makes a large one.</summary>
-    public static Result<T> Hold<T>(string path, Func<Result<T>> work)
+    public static Result<T> Hold<T>(string path, Func<Result<T>> work) => WhileChanging(path, _ => work());
+
+    // Works on the full path with the lock that keeps every other change away.
+    private static Result<T> WhileChanging<T>(string path, Func<string, Result<T>> work)
     {
         ArgumentException.ThrowIfNullOrEmpty(path);
         Result<bool> ready = CatalogStore.UseCurrent(path, _ => true);
@@ -70,7 +56,7 @@ internal static class CatalogChange
 
         using (changing.Value)
         {
-            return work();
+            return work(path);
         }
     }
 

@@ -4,8 +4,8 @@ using PartPick.Physics;
 namespace PartPick.Selection.Search;
 
 /// <summary>
-/// By how much an estimate may be off from the full analysis, by the device: about twice what was ever seen over the rankings of the
-/// built-in catalogue.
+/// By how much an estimate may be off from the full analysis, by the device: chosen above what was seen over rankings of the built-in
+/// catalogue, not proved.
 /// </summary>
 /// <param name="PullShare">Share of the pull from series resonance.</param>
 /// <param name="PerHarmonic">Share of the pull by the third harmonic of a buffered inverter's input over its first.</param>
