@@ -143,6 +143,26 @@ public static class OscillatorAnalysis
         return -impedance.Real / circuit.Crystal.ResistanceOhms;
     }
 
+    /// <summary>
+    /// The load capacitance in farads that the crystal would see with the critical transconductance, to which limiting brings the
+    /// device down: near that of the steady state, at a fraction of the work. Null where no transconductance starts it.
+    /// </summary>
+    /// <param name="circuit">The circuit.</param>
+    /// <param name="hertz">Frequency in hertz, near the crystal's.</param>
+    public static double? FindCriticalLoadFarads(OscillatorCircuit circuit, double hertz)
+    {
+        ArgumentNullException.ThrowIfNull(circuit);
+        double radians = 2 * Math.PI * hertz;
+        double ohms = circuit.Crystal.ResistanceOhms;
+        double? reactance = circuit switch
+        {
+            GateCircuit gate => GrowthWindow.CriticalReactance(SmallSignals(gate), radians, ohms),
+            FollowerCircuit follower => GrowthWindow.CriticalReactance(new FollowerNetwork(follower), radians, ohms),
+            _ => throw new ArgumentException("Unknown kind of circuit.", nameof(circuit)),
+        };
+        return -1 / (radians * reactance);
+    }
+
     /// <summary>ln(Î/Î0)/σ with the thermal current Î0 = √(kT/Lm) of the motional branch, in seconds.</summary>
     /// <param name="circuit">The circuit.</param>
     /// <param name="growthRatePerSecond">Growth rate σ in 1/s, above zero.</param>

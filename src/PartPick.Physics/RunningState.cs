@@ -22,11 +22,12 @@ public sealed class RunningState
         _factors = factors;
     }
 
-    internal RunningState(double radians, double peakAmps, double[] state, PeriodMesh mesh, bool holdsCurrent)
+    internal RunningState(double radians, double peakAmps, double[] state, PeriodMesh mesh, bool holdsCurrent, FollowerFundamentals fundamentals)
         : this(typeof(FollowerPeriod), mesh.Count, radians, peakAmps, state, null)
     {
         Mesh = mesh;
         HoldsCurrent = holdsCurrent;
+        Fundamentals = fundamentals;
     }
 
     /// <summary>The same starting point without what makes a solution quicker from it: much smaller, to keep many.</summary>
@@ -39,6 +40,8 @@ public sealed class RunningState
     internal int Unknowns => _state.Length;
 
     internal bool HoldsCurrent { get; }
+
+    internal FollowerFundamentals Fundamentals { get; }
 
     internal PeriodMesh? Mesh { get; }
 

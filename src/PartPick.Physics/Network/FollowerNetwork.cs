@@ -53,15 +53,12 @@ internal readonly struct FollowerNetwork : ILinearNetwork
             Internal: zBI,
             OwnPerForward: intoEmitter * zEB - fromBase * zBI,
             JunctionPerForward: intoEmitter * (zEI - zEE) - fromBase * (zII - zEI),
+            InternalPerForward: intoEmitter * zEI - fromBase * zII,
             OwnPerReverse: -zEB - zBI);
     }
 
     /// <inheritdoc/>
-    public Transfer At(Complex s)
-    {
-        FollowerPorts ports = Ports(s);
-        return new Transfer(ports.Own, ports.Junction, ports.OwnPerForward, ports.JunctionPerForward);
-    }
+    public Transfer At(Complex s) => Ports(s).Forward;
 }
 
 /// <summary>
@@ -75,4 +72,9 @@ internal readonly record struct FollowerPorts(
     Complex Internal,
     Complex OwnPerForward,
     Complex JunctionPerForward,
-    Complex OwnPerReverse);
+    Complex InternalPerForward,
+    Complex OwnPerReverse)
+{
+    /// <summary>The network as its forward current sees it.</summary>
+    public Transfer Forward => new(Own, Junction, OwnPerForward, JunctionPerForward);
+}

@@ -40,6 +40,17 @@ internal readonly record struct GrowthWindow(double? CriticalSiemens, double? Up
         return siemens;
     }
 
+    /// <summary>Im Zc(jω) in ohms at the critical transconductance of a given frequency; null where nothing starts there.</summary>
+    public static double? CriticalReactance<TNetwork>(in TNetwork network, double radians, double resistanceOhms)
+        where TNetwork : struct, ILinearNetwork
+    {
+        Transfer transfer = network.At(new Complex(0, radians));
+        return Root(transfer, resistanceOhms, upper: false) is { } siemens ? transfer.Impedance(siemens).Imaginary : null;
+    }
+
+    /// <summary>The critical transconductance in siemens at a given frequency; null where nothing starts there.</summary>
+    public static double? Critical(in Transfer transfer, double resistanceOhms) => Root(transfer, resistanceOhms, upper: false);
+
     // Zc = (p + q g)/(1 + h g); Re Zc + R = 0 times |1 + h g|² is c0 + c1 g + c2 g² = 0.
     private static double? Root(in Transfer transfer, double resistanceOhms, bool upper)
     {

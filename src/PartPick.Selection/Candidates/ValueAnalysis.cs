@@ -11,13 +11,12 @@ namespace PartPick.Selection;
 public sealed class ValueAnalysis
 {
     private const double Step = 0.02;
-    private const double FirstOrderStep = 0.002;
     private readonly CircuitTemplate _template;
     private readonly CircuitValues _values;
     private readonly OperatingPoint _nominal;
     private readonly RunningState? _state;
     private RunningFigures? _steady;
-    private double? _amplifier;
+    private (double Ratio, double Watts)? _amplifier;
     private (double C1, double C2, double Across)? _slopes;
     private (double C1, double C2, double Across)? _firstOrderSlopes;
 
@@ -72,15 +71,20 @@ public sealed class ValueAnalysis
     public RunningFigures? Base { get; }
 
     /// <summary>Largest relative |f(corner) − f| over amplifier, supply and ambient; infinite where a corner has no steady state.</summary>
-    public double AmplifierRatio => _amplifier ??= FindAmplifierRatio();
+    public double AmplifierRatio => (_amplifier ??= FindOverAmplifier()).Ratio;
+
+    /// <summary>Highest drive level in watts over amplifier, supply and ambient, at nominal capacitances.</summary>
+    public double AmplifierDriveWatts => (_amplifier ??= FindOverAmplifier()).Watts;
 
     /// <summary>∂f/f by C1 (and the stray beside it), C2 (and the stray beside it) and the stray across, per farad.</summary>
-    public (double C1, double C2, double Across) SlopesPerFarad => _slopes ??= Slopes(Step, Slope);
+    public (double C1, double C2, double Across) SlopesPerFarad => _slopes ??= Slopes();
 
     /// <summary>
     /// The same slopes from one Newton step each, many times cheaper and within a few per cent; not a number where not found.
     /// </summary>
-    public (double C1, double C2, double Across) FirstOrderSlopesPerFarad => _firstOrderSlopes ??= Slopes(FirstOrderStep, FirstOrderSlope);
+    public (double C1, double C2, double Across) FirstOrderSlopesPerFarad => _firstOrderSlopes ??= _state is null
+        ? (double.NaN, double.NaN, double.NaN)
+        : FirstOrderSlopes.PerFarad(Circuit, _state, BaseHz());
 
     /// <summary>The steady state at a corner; null where there is none.</summary>
     public RunningFigures? SteadyAt(OperatingPoint point, double c1Tolerance, double c2Tolerance) =>
@@ -91,27 +95,28 @@ public sealed class ValueAnalysis
 
     private double BaseHz() => Base?.FrequencyHz ?? double.NaN;
 
-    private double FindAmplifierRatio()
+    private (double Ratio, double Watts) FindOverAmplifier()
     {
         double most = 0;
+        double watts = 0;
         foreach (OperatingPoint point in _template.AmplifierCorners)
         {
-            double shift = Follow(_template.At(_values, point)) is { } state
-                ? Math.Abs(state.FrequencyHz / BaseHz() - 1)
-                : double.PositiveInfinity;
+            RunningFigures? state = Follow(_template.At(_values, point));
+            double shift = state is null ? double.NaN : Math.Abs(state.FrequencyHz / BaseHz() - 1);
             most = Math.Max(most, double.IsNaN(shift) ? double.PositiveInfinity : shift);
+            watts = Math.Max(watts, state?.DriveWatts ?? double.PositiveInfinity);
         }
 
-        return most;
+        return (most, watts);
     }
 
-    private (double C1, double C2, double Across) Slopes(double share, Func<double, Func<double, OscillatorCircuit>, double> slope)
+    private (double C1, double C2, double Across) Slopes()
     {
-        double total = Circuit.Crystal.ShuntFarads + Circuit.Strays.AcrossFarads + 1e-12;
+        double across = Circuit.Crystal.ShuntFarads + Circuit.Strays.AcrossFarads + 1e-12;
         return (
-            slope(share * _values.C1Farads, d => Circuit with { C1Farads = _values.C1Farads + d }),
-            slope(share * _values.C2Farads, d => Circuit with { C2Farads = _values.C2Farads + d }),
-            slope(share * total, d => Circuit with { Strays = Circuit.Strays with { AcrossFarads = Circuit.Strays.AcrossFarads + d } }));
+            Slope(Step * _values.C1Farads, d => Circuit with { C1Farads = _values.C1Farads + d }),
+            Slope(Step * _values.C2Farads, d => Circuit with { C2Farads = _values.C2Farads + d }),
+            Slope(Step * across, d => Circuit with { Strays = Circuit.Strays with { AcrossFarads = Circuit.Strays.AcrossFarads + d } }));
     }
 
     private double Slope(double step, Func<double, OscillatorCircuit> shifted)
@@ -121,11 +126,5 @@ public sealed class ValueAnalysis
         return above is null || below is null
             ? double.NaN
             : (above.FrequencyHz - below.FrequencyHz) / (2 * step * BaseHz());
-    }
-
-    private double FirstOrderSlope(double step, Func<double, OscillatorCircuit> shifted)
-    {
-        double? above = _state is null ? null : OscillatorAnalysis.FindFirstOrderFrequencyHz(shifted(step), _state);
-        return above is { } hertz ? (hertz - BaseHz()) / (step * BaseHz()) : double.NaN;
     }
 }

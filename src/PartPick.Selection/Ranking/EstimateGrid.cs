@@ -5,16 +5,12 @@ namespace PartPick.Selection.Search;
 
 /// <summary>
 /// Estimates of a family at every third value of C1, C2 and Rs, made when first asked for, and what they say of the values between:
-/// the load seen by the crystal, over that of the capacitors in series, is smooth along the logarithms of all three. A bias network
-/// has no such order, so a follower has a grid of its own for each.
+/// limiting brings the device down to about the critical transconductance, so the capacitance seen by the crystal over that at the
+/// critical transconductance is near one, and smooth along the logarithms of all three. A follower, whose estimates cost most, has
+/// every sixth value of the capacitors, and every third of its base resistor.
 /// </summary>
 internal sealed class EstimateGrid
 {
-    private const int Step = 3;
-
-    // What is left between the nodes after interpolation: a share of the load, and a share of the range over the nodes round it.
-    private const double LoadSlack = 0.015;
-    private const double RangeSlack = 0.25;
     private const double AmplifierShare = 0.8;
 
     // By how much a load outside the window must lie outside for its neighbours to be taken for outside.
@@ -23,10 +19,13 @@ internal sealed class EstimateGrid
     private readonly CircuitTemplate _template;
     private readonly OperatingPoint _nominal;
     private readonly SearchSpace _space;
+    private readonly GridFineness _fineness;
+    private readonly CriticalLoad _critical;
+    private readonly double _shunt;
     private readonly LoadRange _window;
     private readonly Dictionary<(int Option, int C1, int C2), int> _sides = [];
     private readonly double[] _values;
-    private readonly double[] _options;
+    private readonly OptionBracket[] _options;
     private readonly Dictionary<(int Option, int C1, int C2), Node> _nodes = [];
     private RunningState? _last;
 
@@ -39,16 +38,19 @@ internal sealed class EstimateGrid
         _space = space;
         _family = family;
         _template = family.Members[0].Template;
+        _fineness = GridFineness.Of(family.Amplifier);
+        _shunt = _template.Crystal.Crystal.ShuntFarads;
         _nominal = OperatingPoint.Nominal(space.Requirement);
+        _critical = new CriticalLoad(_template, _nominal, family.Members[0].Crystal.FrequencyHz);
         _values = [.. space.Capacitors.Select(value => Math.Log(value.Farads))];
-        _options = family.IsGate ? Logarithms(family) : [];
+        _options = OptionBracket.Of(family);
     }
 
     /// <summary>The places of the nodes along the capacitors.</summary>
     public IEnumerable<int> Values() => Places(_values.Length, Step);
 
     /// <summary>The places of the nodes along the options.</summary>
-    public IEnumerable<int> Options() => Places(_family.Options.Length, _family.IsGate ? Step : 1);
+    public IEnumerable<int> Options() => Enumerable.Range(0, _options.Length).Where(option => _options[option].IsNode);
 
     /// <summary>
     /// Whether the load of a node is known to be outside the window, from its neighbours: the load grows with C1 and with C2. Nodes
@@ -61,7 +63,7 @@ internal sealed class EstimateGrid
     {
         (int lowC1, int highC1, _) = Bracket(_values, c1, Step);
         (int lowC2, int highC2, _) = Bracket(_values, c2, Step);
-        (int low, int high, _) = _family.IsGate ? Bracket(_options, option, Step) : (option, option, 0);
+        (int low, int high, _) = _options[option];
         return (KnownSide(low, lowC1, lowC2) > 0 && KnownSide(high, lowC1, lowC2) > 0)
             || (KnownSide(low, highC1, highC2) < 0 && KnownSide(high, highC1, highC2) < 0);
     }
@@ -87,18 +89,47 @@ internal sealed class EstimateGrid
     /// <summary>The estimate of one combination of values; null where there is no steady state.</summary>
     public Estimate? At(int option, int c1, int c2) => Find(option, c1, c2).Estimate;
 
+    /// <summary>
+    /// ∂f/f by C1, C2 and what stands across, per farad, to the first order at a combination's estimate; not a number where not found.
+    /// </summary>
+    public (double C1, double C2, double Across) FirstOrder(int option, int c1, int c2)
+    {
+        Node node = Find(option, c1, c2);
+        return node.Slopes ??= node.Estimate is { } estimate
+            ? FirstOrderSlopes.PerFarad(_template.At(node.Values, _nominal), estimate.State, estimate.FrequencyHz)
+            : (double.NaN, double.NaN, double.NaN);
+    }
+
+    /// <summary>Wide bounds of the load of a combination, without any estimate.</summary>
+    public LoadRange WideRange(int option, int c1, int c2) => _critical.Farads(Values(option, c1, c2)) is { } critical
+        ? Load(critical * _fineness.Least, critical * _fineness.Most, _fineness.MostHarmonics)
+        : LoadRange.Any;
+
     /// <summary>The bounds between which the load of a combination lies, from the nodes round it.</summary>
     public LoadRange Range(int option, int c1, int c2)
+    {
+        if (_critical.Farads(Values(option, c1, c2)) is not { } critical)
+        {
+            return LoadRange.Any;
+        }
+
+        // At the far ends of a resistor a circuit may not run at all: then it is left alone.
+        return Range(c1, c2, _options[option].Ends, critical)
+            ?? (_options[option].IsNode ? null : Range(c1, c2, (option, option, 0), critical))
+            ?? Load(critical * _fineness.Least, critical * _fineness.Most, _fineness.MostHarmonics);
+    }
+
+    private LoadRange? Range(int c1, int c2, (int Low, int High, double Weight) options, double critical)
     {
         double share = 0;
         double least = double.PositiveInfinity;
         double most = 0;
         double harmonics = 0;
-        foreach ((Node? node, double weight) in Around(option, c1, c2))
+        foreach ((Node? node, double weight) in Around(options, c1, c2))
         {
-            if (node is null)
+            if (node is null || node.Share == 0)
             {
-                return LoadRange.Any;
+                return null;
             }
 
             share += weight * node.Share;
@@ -107,16 +138,26 @@ internal sealed class EstimateGrid
             harmonics = Math.Max(harmonics, node.Estimate!.HarmonicShare);
         }
 
-        double load = StaticLoad(c1, c2);
-        double slack = LoadSlack * share + RangeSlack * (most - least);
-        return new LoadRange(load * Math.Max(0, share - slack), load * (share + slack), harmonics);
+        double slack = _fineness.LoadSlack + _fineness.RangeSlack * (most - least);
+        return Load(critical * (share - slack), critical * (share + slack), harmonics);
+    }
+
+    private LoadRange Load(double lowest, double highest, double harmonics) =>
+        new(Math.Max(0, lowest - _shunt), Math.Max(0, highest - _shunt), harmonics);
+
+    /// <summary>How much the load of a combination at least grows with its capacitances.</summary>
+    public LoadSlopes Slopes(int option, int c1, int c2, in LoadRange load)
+    {
+        CircuitValues values = Values(option, c1, c2);
+        return _critical.Slopes(values, load.Lowest + _shunt, _fineness)
+            ?? LoadSlopes.OfCapacitors(_space.Requirement.Board, _family.IsGate, values);
     }
 
     /// <summary>The least shift of the frequency over amplifier and supply, as a ratio, from the nodes round a combination.</summary>
     public double LeastAmplifierRatio(int option, int c1, int c2)
     {
         double least = double.PositiveInfinity;
-        foreach ((Node? node, _) in Around(option, c1, c2))
+        foreach ((Node? node, _) in Around(_options[option].Ends, c1, c2))
         {
             if (node is null)
             {
@@ -130,14 +171,13 @@ internal sealed class EstimateGrid
     }
 
     // The nodes round a combination with their weights; null for one without a steady state.
-    private IEnumerable<(Node? Node, double Weight)> Around(int option, int c1, int c2)
+    private IEnumerable<(Node? Node, double Weight)> Around((int Low, int High, double Weight) options, int c1, int c2)
     {
-        (int, int, double) third = _family.IsGate ? Bracket(_options, option, Step) : (option, option, 0);
         foreach ((int i, double byC1) in Ends(Bracket(_values, c1, Step)))
         {
             foreach ((int j, double byC2) in Ends(Bracket(_values, c2, Step)))
             {
-                foreach ((int o, double byOption) in Ends(third))
+                foreach ((int o, double byOption) in Ends(options))
                 {
                     Node node = Find(o, i, j);
                     yield return (node.Estimate is null ? null : node, byC1 * byC2 * byOption);
@@ -146,9 +186,11 @@ internal sealed class EstimateGrid
         }
     }
 
+    private int Step => _fineness.Step;
+
     private int Side(int option, int c1, int c2) => _sides.GetValueOrDefault((option, c1, c2));
 
-    private static int Before(int place) => (place - 1) / Step * Step - (place == 0 ? Step : 0);
+    private int Before(int place) => (place - 1) / Step * Step - (place == 0 ? Step : 0);
 
     private int After(int place) => Math.Min(place + Step, _values.Length - 1) is var next && next > place ? next : int.MaxValue;
 
@@ -181,23 +223,11 @@ internal sealed class EstimateGrid
         }
     }
 
-    // A direct connection stands one step below the smallest resistor.
-    private static double[] Logarithms(CircuitFamily family)
-    {
-        double[] along = [.. family.Options.Select(option => Math.Log(option.Series?.ValueOhms ?? 1))];
-        if (along.Length > 2)
-        {
-            along[0] = 2 * along[1] - along[2];
-        }
-
-        return along;
-    }
-
     private Node Find(int option, int c1, int c2)
     {
         if (!_nodes.TryGetValue((option, c1, c2), out Node? node))
         {
-            CircuitValues values = _family.Options[option].With(_space.Capacitors[c1].Farads, _space.Capacitors[c2].Farads);
+            CircuitValues values = Values(option, c1, c2);
             node = new Node(values);
             RunningState? near = Near(option, c1, c2) ?? _last;
             OscillatorCircuit circuit = _template.At(values, _nominal);
@@ -205,8 +235,8 @@ internal sealed class EstimateGrid
             {
                 _last = state;
                 double load = _template.Crystal.Crystal.LoadAtFrequencyFarads(estimate.FrequencyHz);
-                node.Share = load / StaticLoad(c1, c2);
-                node.Estimate = new Estimate(load, estimate.DriveWatts, estimate.HarmonicShare, state.Slim());
+                node.Share = (load + _shunt) / _critical.Farads(values) ?? 0;
+                node.Estimate = new Estimate(estimate.FrequencyHz, load, estimate.DriveWatts, estimate.HarmonicShare, state.Slim());
             }
 
             _nodes.Add((option, c1, c2), node);
@@ -222,10 +252,14 @@ internal sealed class EstimateGrid
     // The state of the nearest node that is known.
     private RunningState? Near(int option, int c1, int c2)
     {
-        int o = _family.IsGate ? option / Step * Step : option;
+        int o = _options[option].Low;
         int i = c1 / Step * Step;
         int j = c2 / Step * Step;
-        return Known(o, i, j) ?? Known(o, i, j - Step) ?? Known(o, i - Step, j) ?? Known(o - Step, i, j);
+        return Known(o, i, j)
+            ?? Known(o, i, j - Step)
+            ?? Known(o, i - Step, j)
+            ?? Known(_options[option].High, i, j)
+            ?? (option > 0 ? Known(_options[option - 1].Low, i, j) : null);
 
         RunningState? Known(int atOption, int atC1, int atC2) =>
             _nodes.TryGetValue((atOption, atC1, atC2), out Node? node) ? node.Estimate?.State : null;
@@ -247,22 +281,8 @@ internal sealed class EstimateGrid
         return most;
     }
 
-    // The capacitors with their strays in series, beside what stands across.
-    private double StaticLoad(int c1, int c2)
-    {
-        Strays strays = _space.Requirement.Board.Strays;
-        double a = _space.Capacitors[c1].Farads;
-        double b = _space.Capacitors[c2].Farads + strays.OutputFarads;
-        double across = strays.AcrossFarads;
-        if (_template.At(new CircuitValues(a, b), _nominal) is GateCircuit { Inverter: { } inverter })
-        {
-            a += strays.InputFarads + inverter.InputFarads;
-            b += inverter.OutputFarads / 2;
-            across += inverter.FeedbackFarads;
-        }
-
-        return a * b / (a + b) + across;
-    }
+    private CircuitValues Values(int option, int c1, int c2) =>
+        _family.Options[option].With(_space.Capacitors[c1].Farads, _space.Capacitors[c2].Farads);
 
     private sealed class Node(CircuitValues values)
     {
@@ -270,7 +290,10 @@ internal sealed class EstimateGrid
 
         public Estimate? Estimate { get; set; }
 
+        /// <summary>Capacitance seen by the crystal over that at the critical transconductance; zero where not known.</summary>
         public double Share { get; set; }
+
+        public (double C1, double C2, double Across)? Slopes { get; set; }
 
         public double? AmplifierRatio { get; set; }
     }

@@ -11,11 +11,12 @@ namespace PartPick.Selection.Search;
 /// <param name="PerHarmonic">Share of the pull by the third harmonic of a buffered inverter's input over its first.</param>
 /// <param name="Ratio">What else the frequency may be off, as a ratio.</param>
 /// <param name="DriveShare">Share by which the drive level may be too high.</param>
-internal readonly record struct EstimateQuality(double PullShare, double PerHarmonic, double Ratio, double DriveShare)
+/// <param name="SlopeShare">Least slopes of the frequency by the capacitances, over those of the first order.</param>
+internal readonly record struct EstimateQuality(double PullShare, double PerHarmonic, double Ratio, double DriveShare, double SlopeShare)
 {
-    private static readonly EstimateQuality Follower = new(0.002, 0, 0.5e-6, 0.02);
-    private static readonly EstimateQuality OneStage = new(0.012, 0, 0.3e-6, 0.08);
-    private static readonly EstimateQuality Buffered = new(0.01, 0.8, 1e-6, 0.3);
+    private static readonly EstimateQuality Follower = new(0.002, 0, 0.5e-6, 0.02, 0.95);
+    private static readonly EstimateQuality OneStage = new(0.012, 0, 0.3e-6, 0.08, 0.86);
+    private static readonly EstimateQuality Buffered = new(0.01, 0.8, 1e-6, 0.3, 0.75);
 
     /// <summary>The quality of an amplifier's estimates.</summary>
     public static EstimateQuality Of(Part amplifier) => amplifier switch

@@ -80,7 +80,7 @@ internal sealed class FamilyScan
     }
 
     // Bias networks differ little from one to the next, so every fourth serves for a beginning.
-    private IEnumerable<int> SparseOptions() => _family.IsGate ? Grid.Options() : Grid.Options().Where(option => option % 4 == 0);
+    private IEnumerable<int> SparseOptions() => _family.IsGate ? Grid.Options() : Grid.Options().Where((_, place) => place % 2 == 0);
 
     private Spot? AtNode(int option, int i, int j)
     {
@@ -96,7 +96,8 @@ internal sealed class FamilyScan
         }
 
         _sparse.Add((option, i, j));
-        return new Spot(option, i, j, margin, LoadRange.Of(estimate), 0);
+        LoadRange load = LoadRange.Of(estimate);
+        return new Spot(option, i, j, margin, load, Grid.Slopes(option, i, j, load), 0);
     }
 
     private void ScanPair(int i, int j, List<Spot> found)
@@ -132,14 +133,26 @@ internal sealed class FamilyScan
                 continue;
             }
 
-            LoadRange range = Grid.Range(option, i, j);
-            if (!MayMatter(option, i, j, range, 0, screened / ScreenSlack, weight))
+            LoadSlopes slopes = LoadSlopes.OfCapacitors(_requirement.Board, _family.IsGate, Values(option, i, j));
+            if (!MayMatter(option, i, j, Grid.WideRange(option, i, j), slopes, 0, screened / ScreenSlack, weight))
             {
                 continue;
             }
 
-            double amplifier = range == LoadRange.Any ? 0 : Grid.LeastAmplifierRatio(option, i, j);
-            if (!MayMatter(option, i, j, range, amplifier, screened / ScreenSlack, weight))
+            LoadRange range = Grid.Range(option, i, j);
+            if (!MayMatter(option, i, j, range, slopes, 0, screened / ScreenSlack, weight))
+            {
+                continue;
+            }
+
+            double amplifier = 0;
+            if (range != LoadRange.Any)
+            {
+                slopes = Grid.Slopes(option, i, j, range);
+                amplifier = _family.IsGate ? Grid.LeastAmplifierRatio(option, i, j) : 0;
+            }
+
+            if (!MayMatter(option, i, j, range, slopes, amplifier, screened / ScreenSlack, weight))
             {
                 continue;
             }
@@ -149,9 +162,9 @@ internal sealed class FamilyScan
             {
                 MarginRejections += weight;
             }
-            else if (MayMatter(option, i, j, range, amplifier, margin, weight))
+            else if (MayMatter(option, i, j, range, slopes, amplifier, margin, weight))
             {
-                found.Add(new Spot(option, i, j, margin, range, amplifier));
+                found.Add(new Spot(option, i, j, margin, range, slopes, amplifier));
             }
         }
     }
@@ -165,9 +178,11 @@ internal sealed class FamilyScan
         _requirement.AllowDisturbance && margin < DisturbedBelow ? double.PositiveInfinity : margin;
 
     // Whether a combination could still change the answer for some crystal.
-    private bool MayMatter(int option, int i, int j, in LoadRange range, double amplifierRatio, double margin, double weight)
+    private bool MayMatter(
+        int option, int i, int j, in LoadRange range, LoadSlopes slopes, double amplifierRatio, double margin, double weight)
     {
-        LeastTerms terms = LeastTerms.OfLoad(_requirement.Board, _family, _template.Crystal.Crystal, Values(option, i, j), range);
+        LeastTerms terms = LeastTerms.OfLoad(
+            _requirement.Board, _family.IsGate, _template.Crystal.Crystal, Values(option, i, j), slopes, range.Highest);
         double least = amplifierRatio + terms.Ratio(_run.Prices.LeastSpread(i), _run.Prices.LeastSpread(j));
         decimal cost = _family.OptionCosts[option] + _run.Prices.CheapestPair(i, j);
         double bound = margin * MemberSearch.MarginSlack;

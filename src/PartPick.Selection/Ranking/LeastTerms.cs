@@ -5,8 +5,6 @@ namespace PartPick.Selection.Search;
 /// <summary>What load capacitors and strays at least add to the error budget of a combination of values.</summary>
 internal readonly struct LeastTerms
 {
-    private const double SeriesShare = 0.6;
-    private const double FirstOrderShare = 0.93;
     private readonly double _byC1;
     private readonly double _byC2;
     private readonly double _strays;
@@ -18,46 +16,38 @@ internal readonly struct LeastTerms
         _strays = strays;
     }
 
-    /// <summary>
-    /// From the values alone: the slopes of the load by C1, C2 and the strays are those of two capacitors in series beside a third,
-    /// within a factor that the device does not undercut.
-    /// </summary>
+    /// <summary>From the least slopes of the load, for a load between bounds; nothing where it is not bounded.</summary>
     /// <param name="board">The board's strays.</param>
     /// <param name="gate">Whether a stray stands beside C1, as in all circuits but a follower.</param>
     /// <param name="crystal">The crystal.</param>
     /// <param name="values">Nominal values.</param>
-    /// <param name="loadFarads">Load capacitance seen by the crystal.</param>
-    public static LeastTerms OfValues(Board board, bool gate, Crystal crystal, in CircuitValues values, double loadFarads)
+    /// <param name="slopes">The slopes.</param>
+    /// <param name="highestFarads">Largest load capacitance seen by the crystal.</param>
+    public static LeastTerms OfLoad(
+        Board board, bool gate, Crystal crystal, in CircuitValues values, LoadSlopes slopes, double highestFarads)
     {
-        double first = values.C1Farads + (gate ? board.Strays.InputFarads : 0);
-        double second = values.C2Farads + board.Strays.OutputFarads;
-        double firstShare = second / (first + second) * (second / (first + second));
-        double secondShare = first / (first + second) * (first / (first + second));
-        double perFarad = SeriesShare * Math.Abs(crystal.TrimSensitivityPerFarad(loadFarads));
-        return Of(board, gate, values, perFarad * firstShare, perFarad * secondShare, perFarad);
-    }
+        if (!double.IsFinite(highestFarads))
+        {
+            return default;
+        }
 
-    /// <summary>From the values alone, for a load between bounds; nothing where it is not bounded.</summary>
-    /// <param name="board">The board's strays.</param>
-    /// <param name="family">The family.</param>
-    /// <param name="crystal">The crystal.</param>
-    /// <param name="values">Nominal values.</param>
-    /// <param name="load">The bounds.</param>
-    public static LeastTerms OfLoad(Board board, CircuitFamily family, Crystal crystal, in CircuitValues values, in LoadRange load) =>
-        double.IsFinite(load.Highest) ? OfValues(board, family.IsGate, crystal, values, load.Highest) : default;
+        double perFarad = Math.Abs(crystal.TrimSensitivityPerFarad(highestFarads));
+        return Of(board, gate, values, perFarad * slopes.C1, perFarad * slopes.C2, perFarad * slopes.Across);
+    }
 
     /// <summary>From slopes of the frequency that are right to the first order.</summary>
     /// <param name="board">The board's strays.</param>
     /// <param name="gate">Whether a stray stands beside C1, as in all circuits but a follower.</param>
     /// <param name="values">Nominal values.</param>
     /// <param name="slopes">∂f/f by C1, C2 and the stray across, per farad.</param>
-    public static LeastTerms OfSlopes(Board board, bool gate, in CircuitValues values, (double C1, double C2, double Across) slopes) => Of(
+    /// <param name="share">Least true slopes over these.</param>
+    public static LeastTerms OfSlopes(Board board, bool gate, in CircuitValues values, (double C1, double C2, double Across) slopes, double share) => Of(
         board,
         gate,
         values,
-        FirstOrderShare * Math.Abs(slopes.C1),
-        FirstOrderShare * Math.Abs(slopes.C2),
-        FirstOrderShare * Math.Abs(slopes.Across));
+        share * Math.Abs(slopes.C1),
+        share * Math.Abs(slopes.C2),
+        share * Math.Abs(slopes.Across));
 
     /// <summary>The least sum of the terms for capacitors with these spreads, all as ratios.</summary>
     public double Ratio(double c1Spread, double c2Spread) => _byC1 * c1Spread + _byC2 * c2Spread + _strays;

@@ -87,7 +87,8 @@ internal sealed class MemberSearch
     private Prospect? Prospective(Spot spot)
     {
         double margin = spot.Margin * MarginSlack;
-        LeastTerms terms = LeastTerms.OfLoad(_requirement.Board, _family, _member.Model.Crystal, Values(spot), spot.Load);
+        LeastTerms terms = LeastTerms.OfLoad(
+            _requirement.Board, _family.IsGate, _member.Model.Crystal, Values(spot), spot.Slopes, spot.Load.Highest);
         double common = LeastRatio(_member, spot.Load) + spot.AmplifierRatio;
         double error = common + terms.Ratio(_run.Prices.LeastSpread(spot.C1), _run.Prices.LeastSpread(spot.C2));
         decimal option = _member.BaseCost + _family.OptionCosts[spot.Option];

@@ -1,3 +1,4 @@
+using PartPick.Catalog;
 using PartPick.Physics;
 
 namespace PartPick.Selection.Search;
@@ -11,12 +12,18 @@ internal sealed class ProspectAnalysis
     // By how much the steady state at the fineness of the corners may differ from the converged one.
     private const double BaseSlack = 1e-6;
     private const double BaseDriveSlack = 0.01;
+    private const double FirstOrderShare = 0.93;
+
+    // By how much the highest drive level over all corners may differ from that over those at nominal capacitances.
+    private const double LeastCornerDrive = 0.85;
+    private const double MostCornerDrive = 1.7;
     private readonly SearchRun _run;
     private readonly CircuitFamily _family;
     private readonly FamilyMember _member;
     private readonly Spot _spot;
     private readonly List<CapacitorPair> _pairs;
     private readonly Misses _misses;
+    private LeastTerms? _first;
     private readonly Requirement _requirement;
     private readonly CircuitValues _values;
     private readonly double _reach;
@@ -53,9 +60,11 @@ internal sealed class ProspectAnalysis
 
         // With a disturbance allowed a margin may take a full analysis at every corner, so it comes last.
         LoadRange load = LoadRange.Of(estimate);
-        LeastTerms terms = LeastTerms.OfLoad(_requirement.Board, _family, _member.Model.Crystal, _values, load);
+        LeastTerms terms = LeastTerms.OfLoad(
+            _requirement.Board, _family.IsGate, _member.Model.Crystal, _values, _spot.Slopes, load.Highest);
         double least = MemberSearch.LeastRatio(_member, load) + _spot.AmplifierRatio;
         if (!Left(pair => MayReach(pair, least + terms.Ratio(pair.C1.Spread(_reach), pair.C2.Spread(_reach))))
+            || !Left(pair => MayReachFirst(pair, least, grid))
             || (!_requirement.AllowDisturbance && !Left(Margins))
             || !Left(Stock))
         {
@@ -82,11 +91,21 @@ internal sealed class ProspectAnalysis
         }
     }
 
+    // With slopes of the first order, from the estimate's state.
+    private bool MayReachFirst(CapacitorPair pair, double least, EstimateGrid grid)
+    {
+        _first ??= LeastTerms.OfSlopes(
+            _requirement.Board, _family.IsGate, _values, grid.FirstOrder(_spot.Option, _spot.C1, _spot.C2), _member.Quality.SlopeShare);
+        double terms = _first.Value.Ratio(pair.C1.Spread(_reach), pair.C2.Spread(_reach));
+        return !double.IsFinite(terms) || MayReach(pair, least + terms);
+    }
+
     // Ever more of the error budget, from what costs least to find.
     private bool MayReach(RunningFigures nominal, ValueAnalysis analysis)
     {
         Board board = _requirement.Board;
-        LeastTerms terms = LeastTerms.OfValues(board, _family.IsGate, _member.Model.Crystal, _values, nominal.LoadFarads);
+        LeastTerms terms = LeastTerms.OfLoad(
+            board, _family.IsGate, _member.Model.Crystal, _values, _spot.Slopes, nominal.LoadFarads);
         if (!Left(pair => MayReach(pair, nominal, terms, 0)))
         {
             return false;
@@ -95,7 +114,7 @@ internal sealed class ProspectAnalysis
         (double C1, double C2, double Across) slopes = analysis.FirstOrderSlopesPerFarad;
         if (double.IsFinite(slopes.C1 + slopes.C2 + slopes.Across))
         {
-            terms = LeastTerms.OfSlopes(board, _family.IsGate, _values, slopes);
+            terms = LeastTerms.OfSlopes(board, _family.IsGate, _values, slopes, FirstOrderShare);
         }
 
         return Left(pair => MayReach(pair, nominal, terms, 0))
@@ -153,7 +172,21 @@ internal sealed class ProspectAnalysis
     private bool Runs(CapacitorPair pair, ValueAnalysis analysis)
     {
         CornerAnalysis corners = Corners(pair);
-        return Holds(pair, corners.RunsWithin(analysis, _member.Crystal.DriveLevelWatts), Limit.Drive)
+        double? rated = _member.Crystal.DriveLevelWatts;
+        if (analysis.AmplifierDriveWatts * LeastCornerDrive > rated)
+        {
+            return Holds(pair, false, Limit.Drive);
+        }
+
+        // A buffered inverter may build up and yet find no steady state at a corner; the others always do.
+        if (_family.Amplifier is not AmplifierPart { Stages: > 1 }
+            && _requirement.StartUpTimeSeconds is null
+            && !(analysis.AmplifierDriveWatts * MostCornerDrive > rated))
+        {
+            return true;
+        }
+
+        return Holds(pair, corners.RunsWithin(analysis, rated), Limit.Drive)
             && Holds(
                 pair,
                 _requirement.StartUpTimeSeconds is not { } wanted || corners.StartUpTime(analysis)?.Value <= wanted,

@@ -6,5 +6,6 @@ namespace PartPick.Selection.Search;
 /// <param name="C2">Place of C2's value.</param>
 /// <param name="Margin">Start-up margin at the worst corner of supply, ambient and device, nominal capacitances.</param>
 /// <param name="Load">Bounds of the load seen by the crystal.</param>
+/// <param name="Slopes">How much the load grows with the capacitances.</param>
 /// <param name="AmplifierRatio">A shift of the frequency over amplifier and supply that the full analysis will at least find.</param>
-internal sealed record Spot(int Option, int C1, int C2, double Margin, LoadRange Load, double AmplifierRatio);
+internal sealed record Spot(int Option, int C1, int C2, double Margin, LoadRange Load, LoadSlopes Slopes, double AmplifierRatio);

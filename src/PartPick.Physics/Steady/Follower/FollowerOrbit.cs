@@ -89,6 +89,21 @@ internal sealed class FollowerOrbit
         }
     }
 
+    /// <summary>Adds a sine to the voltage of each junction.</summary>
+    public void Turn(double shift, Complex forward, Complex reverse)
+    {
+        Span<double> volts = Volts;
+        for (int step = 0; step < Mesh.Count; step++)
+        {
+            ReadOnlySpan<Complex> turns = Mesh.Turns(step);
+            for (int k = 0; k < Stages; k++)
+            {
+                volts[step * Voltages + k] += shift + (forward * turns[k]).Real;
+                volts[step * Voltages + Stages + k] += (reverse * turns[k]).Real;
+            }
+        }
+    }
+
     /// <summary>Means over the period of the voltages, and of the base current for a current gain.</summary>
     public (double Forward, double Reverse, double Base) Means(double beta)
     {

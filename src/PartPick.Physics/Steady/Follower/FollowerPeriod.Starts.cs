@@ -1,3 +1,5 @@
+using System.Numerics;
+
 namespace PartPick.Physics.Steady;
 
 /// <summary>Where the shooting starts from: small signals, or the state of a circuit like this one.</summary>
@@ -30,7 +32,7 @@ internal sealed partial class FollowerPeriod
         double terminal = ownDrive + _elements.BaseVolts(Radians, Values, still, still - junction + junctionDrive);
         kept[0] = (terminal - _units.Base) * _units.Volts;
         kept[1] = (terminal - inner) * _units.Volts;
-        return new RunningState(Radians, PeakAmps, kept, orbit.Mesh, _units.GivenCurrent);
+        return new RunningState(Radians, PeakAmps, kept, orbit.Mesh, _units.GivenCurrent, Fundamentals());
     }
 
     /// <summary>Takes the state of a circuit like this one.</summary>
@@ -40,16 +42,33 @@ internal sealed partial class FollowerPeriod
         orbit.Use(mesh);
         state.State[2..].CopyTo(orbit.Volts);
         SetFrequency(state.Radians);
-        PutAmplitude(state.PeakAmps);
+        FollowerFundamentals from = state.Fundamentals;
+        FollowerFundamentals to = Fundamentals();
+        PutAmplitude(state.PeakAmps * (LimitedBySupply
+            ? Complex.Abs(from.Internal) / Complex.Abs(to.Internal)
+            : Complex.Abs(from.Forward) / Complex.Abs(to.Forward)));
+        Complex junctionTurn = (to.Junction * PeakAmps - from.Junction * state.PeakAmps) / _units.Volts;
+        Complex innerTurn = (to.Internal * PeakAmps - from.Internal * state.PeakAmps) / _units.Volts;
+        Complex terminalTurn = (to.Terminal * PeakAmps - from.Terminal * state.PeakAmps) / _units.Volts;
+        double before = Complex.Abs(from.Junction) * state.PeakAmps / _units.Volts;
+        double after = Complex.Abs(to.Junction) * PeakAmps / _units.Volts;
+        orbit.Turn(LogMean(before) - LogMean(after), junctionTurn, innerTurn);
         (double ownDrive, double innerDrive, double junctionDrive) = Drives();
-        double terminal = _units.Base + state.State[0] / _units.Volts;
-        double inner = terminal - state.State[1] / _units.Volts - innerDrive;
+        double terminal = _units.Base + state.State[0] / _units.Volts + terminalTurn.Real;
+        double inner = terminal - state.State[1] / _units.Volts - (terminalTurn - innerTurn).Real - innerDrive;
         double emitter = inner - (orbit.Volts[^4] - _units.JunctionShift - junctionDrive);
         _elements.Charges(Radians, terminal - ownDrive, inner, emitter, Math.Exp(orbit.Volts[^4]), Values);
         (double meanJunction, double meanInner, double meanBase) = orbit.Means(_circuit.Transistor.Beta);
         double mean = meanInner - _units.InnerShift;
         PutSources(mean + meanBase * _units.Spreading, mean - meanJunction + _units.JunctionShift, meanBase);
     }
+
+    // ln I0(x): by how much the mean of a current that is exponential in a sine exceeds that at its middle.
+    private static double LogMean(double x) =>
+        x < 20 ? Math.Log(MathNet.Numerics.SpecialFunctions.BesselI0(x)) : x - 0.5 * Math.Log(2 * Math.PI * x);
+
+    private FollowerFundamentals Fundamentals() =>
+        FollowerFundamentals.Of(_ports, _circuit.Crystal.ResistanceOhms, _bias.TransconductanceSiemens);
 
     private void PutAmplitude(double peakAmps)
     {
