@@ -9,6 +9,9 @@ internal sealed class PartDraft
     /// <summary>The keys of the figures and texts that are there.</summary>
     public IEnumerable<string> Keys => _numbers.Keys.Concat(_texts.Keys);
 
+    /// <summary>Whether a crystal without a load is stated to be one for series resonance, not only left without a load.</summary>
+    public bool IsSeries { get; set; }
+
     public double? Number(string key) => _numbers.TryGetValue(key, out double value) ? value : null;
 
     public string? Text(string key) => _texts.GetValueOrDefault(key);
@@ -47,7 +50,7 @@ internal sealed class PartDraft
 
     public PartDraft Copy()
     {
-        var copy = new PartDraft();
+        var copy = new PartDraft { IsSeries = IsSeries };
         foreach (string key in Keys)
         {
             copy.Take(key, this);

@@ -34,7 +34,7 @@ internal sealed class ImportRun : IDisposable
         _reader = new RowReader(request.Kind, uses);
         string columns = string.Join('\n', uses.Select(use =>
             $"{use.Index}\t{use.Field}\t{use.Power}\t{use.Notation}\t"
-            + $"{use.Quantity}\t{use.Currency}\t{use.Basis}\t{use.Exact}"));
+            + $"{use.Quantity}\t{use.QuantityColumn}\t{use.Per}\t{use.PerColumn}\t{use.Currency}\t{use.Basis}\t{use.Exact}"));
         _digest = new RowDigest($"{request.Kind.Word()}\n{request.Supplier}\n{columns}");
         _known = KnownParts.Of(file);
         _number = file.NextImport();
@@ -232,6 +232,8 @@ internal sealed class ImportRun : IDisposable
 
         merged.Remove("basis");
         merged.Set("basis", BasisMarks.Join(old.Supplied.Text("basis"), draft.Text("basis"), _reader.Keys));
+        merged.IsSeries = draft.IsSeries
+            || (!_reader.Keys.Contains("load") && old.Supplied.Text("basis")?.Contains("load=assumed", StringComparison.Ordinal) != true);
         RowCompletion.Complete(_request.Kind, merged);
         (Part? part, RowRejection? wrong) = Build(merged, line);
         if (part is null)

@@ -1,0 +1,69 @@
+using System.Collections.Frozen;
+using PartPick.Catalog.Fields;
+
+namespace PartPick.Catalog.Import;
+
+/// <summary>The phrases by which lists of parts name a field, and the words with which a header means something else.</summary>
+/// <param name="Field">The field.</param>
+/// <param name="Phrases">The phrases, each with its place in its language's list: the surest are first.</param>
+/// <param name="Against">Words that make a header another one.</param>
+internal sealed record TradeWords(string Field, IReadOnlyList<(TradePhrase Phrase, int Place)> Phrases, FrozenSet<string> Against)
+{
+    private static readonly Dictionary<PartKind, TradeWords[]> Kinds =
+        PartKinds.All.ToDictionary(kind => kind, kind => Gather(kind, Lines()).ToArray());
+
+    /// <summary>The words of the fields of a kind.</summary>
+    public static IReadOnlyList<TradeWords> Of(PartKind kind) => Kinds[kind];
+
+    private static IEnumerable<TradeWords> Gather(PartKind kind, List<(string Section, string Field, string[] Phrases)> lines)
+    {
+        string family = kind is PartKind.Inverter or PartKind.Counter or PartKind.Port ? "amplifiers" : kind.Word();
+        HashSet<string> fields =
+        [
+            .. PartShape.Of(kind).Fields.Select(field => field.Key), "price", "prices", "priceQuantity", "priceFor", "toleranceAny",
+        ];
+        if (fields.Contains("temperatureMin"))
+        {
+            fields.Add("temperature");
+        }
+
+        foreach (var field in lines
+            .Where(line => line.Section == "all" || line.Section == kind.Word() || line.Section == family)
+            .GroupBy(line => line.Field.TrimEnd('!')).Where(field => fields.Contains(field.Key)))
+        {
+            yield return new TradeWords(
+                field.Key,
+                [
+                    .. field.Where(line => !line.Field.EndsWith('!'))
+                        .SelectMany(line => line.Phrases.Select((phrase, place) => (TradePhrase.Of(phrase), place))),
+                ],
+                field.Where(line => line.Field.EndsWith('!')).SelectMany(line => line.Phrases)
+                    .SelectMany(words => TradePhrase.Of(words).Words).ToFrozenSet());
+        }
+    }
+
+    private static List<(string Section, string Field, string[] Phrases)> Lines()
+    {
+        var lines = new List<(string, string, string[])>();
+        foreach (string name in typeof(TradeWords).Assembly.GetManifestResourceNames().Order(StringComparer.Ordinal)
+            .Where(name => name.StartsWith("words/", StringComparison.Ordinal)))
+        {
+            string section = "";
+            using var reader = new StreamReader(typeof(TradeWords).Assembly.GetManifestResourceStream(name)!);
+            while (reader.ReadLine() is { } line)
+            {
+                int colon = line.IndexOf(':', StringComparison.Ordinal);
+                if (line.StartsWith('['))
+                {
+                    section = line.Trim('[', ']');
+                }
+                else if (!line.StartsWith('#') && colon > 0)
+                {
+                    lines.Add((section, line[..colon], line[(colon + 1)..].Split(';', StringSplitOptions.TrimEntries)));
+                }
+            }
+        }
+
+        return lines;
+    }
+}
