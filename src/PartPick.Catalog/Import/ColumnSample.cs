@@ -1,3 +1,5 @@
+using PartPick.Values;
+
 namespace PartPick.Catalog.Import;
 
 /// <summary>The first rows of a file, column by column.</summary>
@@ -30,6 +32,28 @@ internal sealed class ColumnSample(IReadOnlyList<string[]> rows)
             && cells.Distinct(StringComparer.Ordinal).Count() == cells.Length
             && cells.All(cell => cell.Length is >= 3 and <= 40 && cell.Any(char.IsAsciiDigit) && cell.Count(letter => letter == ' ') <= 1)
             && (cells.Any(cell => cell.Any(char.IsLetter)) || cells.All(cell => cell.All(char.IsAsciiDigit) && cell.Length >= 5));
+    }
+
+    /// <summary>Whether whole numbers stand in some columns, in each row in ascending order as far as they are there.</summary>
+    public bool Ascend(int[] columns)
+    {
+        bool any = false;
+        foreach (string[] row in rows)
+        {
+            double last = 0;
+            foreach (string cell in columns.Select(column => column < row.Length ? CellText.Plain(row[column]) : "").Where(cell => cell.Length > 0))
+            {
+                Result<double> read = CellNumber.Read(cell, Dimension.Count, 0, NumberNotation.Unknown, false);
+                if (!read.IsOk || read.Value <= last)
+                {
+                    return false;
+                }
+
+                (last, any) = (read.Value, true);
+            }
+        }
+
+        return any;
     }
 
     /// <summary>The share of cells with which something is so; 1 of none.</summary>

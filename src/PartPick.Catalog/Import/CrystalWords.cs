@@ -22,34 +22,42 @@ internal static class CrystalWords
         or "em serie" or "series resonance" or "series resonant" or "serienresonanz" or "sr" or "resonance serie" or "szeregowy" or "串联" or "直列"
         or "serieresonantie" or "serieresonans" or "serieresonanz" or "последовательный";
 
+    /// <summary>The cut that a cell names; null for none.</summary>
+    public static string? CutOf(string cell) => Trade.Words(cell) switch
+    {
+        "at" or "at cut" or "at schnitt" or "at切" => "AT",
+        "bt" or "bt cut" => "BT",
+        "fork" or "tuning fork" or "xy" or "xy cut" or "x cut" or "diapason" or "stimmgabel" or "stemvork" or "stamgaffel"
+            or "stemmegaffel" or "diapazon" or "kamerton" or "aanirauta" or "音叉" or "камертон" => "fork",
+        _ => null,
+    };
+
+    /// <summary>The overtone that a cell names, 1 for the fundamental; null for none.</summary>
+    public static int? OvertoneOf(string cell)
+    {
+        string words = Trade.Words(cell);
+        string[] told = [.. words.Split(' ').Where(word => !Orders.Contains(word))];
+        return words is "f" || (told.Length > 0 && told.All(IsFundamental)) ? 1
+            : told.Length > 0 && told.All(Third.Contains) ? 3
+            : told.Length > 0 && told.All(Fifth.Contains) ? 5
+            : null;
+    }
+
     /// <summary>Reads one of the two into a draft; gives what is wrong, or null.</summary>
     public static string? Read(string field, string cell, PartDraft draft)
     {
-        string words = Trade.Words(cell);
         if (field == "cut")
         {
-            draft.Set("cut", words switch
-            {
-                "at" or "at cut" or "at schnitt" or "at切" => "AT",
-                "bt" or "bt cut" => "BT",
-                "fork" or "tuning fork" or "xy" or "xy cut" or "x cut" or "diapason" or "stimmgabel" or "stemvork" or "stamgaffel"
-                    or "stemmegaffel" or "diapazon" or "kamerton" or "aanirauta" or "音叉" or "камертон" => "fork",
-                _ => null,
-            });
+            draft.Set("cut", CutOf(cell));
             return draft.Has("cut") ? null : $"{Problem.Quote(cell)} is no cut; fits AT, BT or fork";
         }
 
-        string[] all = words.Split(' ');
-        double? overtone =
-            all.All(word => Orders.Contains(word) || word is "1" or "1st" || Fundamental.Any(start => word.StartsWith(start, StringComparison.Ordinal)))
-                && all.Any(word => !Orders.Contains(word)) ? 1
-            : all.All(word => Orders.Contains(word) || Third.Contains(word)) && all.Any(Third.Contains) ? 3
-            : all.All(word => Orders.Contains(word) || Fifth.Contains(word)) && all.Any(Fifth.Contains) ? 5
-            : null;
-        overtone = words is "f" ? 1 : overtone;
-        draft.Set("overtone", overtone);
-        return overtone is null ? $"{Problem.Quote(cell)} is no overtone; fits fundamental, 3rd or 5th" : null;
+        draft.Set("overtone", (double?)OvertoneOf(cell));
+        return draft.Has("overtone") ? null : $"{Problem.Quote(cell)} is no overtone; fits fundamental, 3rd or 5th";
     }
+
+    private static bool IsFundamental(string word) =>
+        word is "1" or "1st" || Fundamental.Any(start => word.StartsWith(start, StringComparison.Ordinal));
 
     private static HashSet<string> Set(string words) => new(words.Split(' '), StringComparer.Ordinal);
 }

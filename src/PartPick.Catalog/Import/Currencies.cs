@@ -25,6 +25,8 @@ internal static class Currencies
         "KRW", "BRL", "MXN", "TRY", "RUB", "ZAR", "NZD", "ILS", "UAH", "BGN", "ISK", "THB", "MYR", "IDR", "PHP", "VND",
     };
 
+    private static readonly HashSet<string> Shared = new(StringComparer.OrdinalIgnoreCase) { "kr", "kr.", "Rs", "Rs.", "¥", "￥" };
+
     /// <summary>The currency that a text names; null for none.</summary>
     public static string? In(string text)
     {
@@ -55,8 +57,8 @@ internal static class Currencies
         return null;
     }
 
-    /// <summary>Whether a text is the name or sign of a currency and nothing else.</summary>
-    public static bool IsName(string text) => Named(text) is not null || Array.Exists(Signs, pair => pair.Sign == text);
+    /// <summary>Whether a text is the name or sign of a currency, also of a shared one, and nothing else.</summary>
+    public static bool IsName(string text) => Named(text) is not null || Shared.Contains(text) || Array.Exists(Signs, pair => pair.Sign == text);
 
     /// <summary>A text without the names and signs of currencies, also those that say nothing certain.</summary>
     public static string Without(string text)
@@ -68,7 +70,7 @@ internal static class Currencies
 
         string[] words = text.Split(' ', StringSplitOptions.RemoveEmptyEntries);
         return string.Join(' ', words.Where(word => Named(word.Trim('.', '-')) is null
-            && word.Trim('.').ToUpperInvariant() is not ("KR" or "RS" or "¥" or "￥" or "$")));
+            && !Shared.Contains(word)).Select(word => word.TrimStart('¥', '￥').TrimEnd('¥', '￥')));
     }
 
     private static string? Named(string word) => Names.TryGetValue(word, out string? code) ? code

@@ -23,13 +23,14 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
             }
         }
 
+        IReadOnlySet<string> known = TradeWords.Known(kind);
         HeaderCell[] alternatives = [.. header.Alternatives()];
         foreach (TradeWords words in TradeWords.Of(kind))
         {
-            double best = Rate(header, words);
+            double best = Rate(header, words, known);
             foreach (HeaderCell alternative in alternatives)
             {
-                best = Math.Max(best, Rate(alternative, words) - 2);
+                best = Math.Max(best, Rate(alternative, words, known) - 2);
             }
 
             if (best > 40)
@@ -39,20 +40,20 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
         }
     }
 
-    private static double Rate(HeaderCell header, TradeWords words)
+    private static double Rate(HeaderCell header, TradeWords words, IReadOnlySet<string> known)
     {
         bool other = header.Plain.Split(' ').Any(word => words.Against.Contains(word));
         double best = 0;
         foreach ((TradePhrase phrase, int place) in words.Phrases)
         {
-            double rate = Rate(header, phrase, other);
+            double rate = Rate(header, phrase, other, known);
             best = rate > 0 ? Math.Max(best, rate - Math.Min(place * 0.1, 5)) : best;
         }
 
         return best;
     }
 
-    private static double Rate(HeaderCell header, TradePhrase phrase, bool other)
+    private static double Rate(HeaderCell header, TradePhrase phrase, bool other, IReadOnlySet<string> known)
     {
         if (header.Plain == phrase.Text)
         {
@@ -69,11 +70,11 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
             return 93;
         }
 
-        return phrase.IsWhole ? 0 : Partly(header.Telling, phrase.Words);
+        return phrase.IsWhole ? 0 : Partly(header.Telling, phrase.Words, known);
     }
 
     // Every word of the phrase has to be found; words of the header that are left over make it less sure.
-    private static double Partly(string[] header, string[] phrase)
+    private static double Partly(string[] header, string[] phrase, IReadOnlySet<string> known)
     {
         if (header.Length < phrase.Length || phrase.Sum(word => word.Length) < 3)
         {
@@ -87,7 +88,7 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
             (double best, int at) = (0, -1);
             for (int i = 0; i < header.Length; i++)
             {
-                double like = used[i] ? 0 : Likeness(header[i], word, header.Length > 1);
+                double like = used[i] ? 0 : Likeness(header[i], word, header.Length > 1, known.Contains(header[i]));
                 (best, at) = like > best ? (like, i) : (best, at);
             }
 
@@ -106,7 +107,7 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
     }
 
     // The same word, one cut short, or one compound with it: "freq" and "frequency", "nennfrequenz" and "frequenz".
-    private static double Likeness(string header, string word, bool several)
+    private static double Likeness(string header, string word, bool several, bool isKnown)
     {
         if (header == word)
         {
@@ -118,9 +119,10 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
             return several && word.Length >= 6 && word[0] == header[0] ? 0.5 : 0;
         }
 
-        if (header.Length is 2 or > 2 && word.StartsWith(header, StringComparison.Ordinal))
+        // A word that means something by itself is not cut short: a part is no partial.
+        if (word.StartsWith(header, StringComparison.Ordinal))
         {
-            return header.Length == 2 ? (several && word.Length >= 6 ? 0.4 : 0) : 0.9;
+            return isKnown ? 0 : header.Length > 2 ? 0.9 : several && word.Length >= 6 ? 0.4 : 0;
         }
 
         return word.Length >= 6 && (header.EndsWith(word, StringComparison.Ordinal) || header.StartsWith(word, StringComparison.Ordinal))

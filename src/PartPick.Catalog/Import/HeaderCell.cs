@@ -54,7 +54,7 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
     {
         string trimmed = text.Trim().Trim('\uFEFF');
         string unit = "";
-        string rest = Condition().Replace(trimmed, " ");
+        string rest = Condition().Replace(trimmed.StartsWith('@') ? "at " + trimmed[1..] : trimmed, " ");
         rest = Brackets().Replace(rest, match =>
         {
             string inner = match.Groups[1].Value.Trim();
@@ -85,9 +85,9 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
     [GeneratedRegex(@"[\(\[\{（]([^\)\]\}）]*)[\)\]\}）]")]
     private static partial Regex Brackets();
 
-    // "at 25 °C", "à 25°C", "@ 25C", "bei +25 °C", "(25 °C)": under which condition the figures hold.
+    // "at 25 °C", "à 25°C", "@ IC", "bei +25 °C", "(25 °C)", "(IC=2mA)": under which condition the figures hold.
     [GeneratedRegex(
-        @"(?:@|\b(?:at|à|a|bei|bij|ved|vid|w|przy|pri|при|la))\s*\+?\s*25\s*(?:[°º]\s*C?|deg\.?\s*C|C\b|℃)|\(\s*\+?25\s*(?:[°º]\s*C|C|℃)\s*\)",
+        @"(?<=.)@.*$|\([^)]*=[^)]*\)|(?:\b(?:at|à|a|bei|bij|ved|vid|w|przy|pri|при|la))\s*\+?\s*25\s*(?:[°º]\s*C?|deg\.?\s*C|C\b|℃)|\(\s*\+?25\s*(?:[°º]\s*C|C|℃)\s*\)",
         RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex Condition();
 

@@ -1,10 +1,10 @@
 using System.Globalization;
-using PartPick.Values;
+using System.Text.RegularExpressions;
 
 namespace PartPick.Catalog.Import;
 
 /// <summary>Columns of prices: from which quantity on each holds, for how many pieces it is, and in which currency.</summary>
-internal static class PriceColumns
+internal static partial class PriceColumns
 {
     /// <summary>A column that is stated to be a price, "price:100" from 100 on, "price:1/1000" for a thousand together.</summary>
     public static ColumnUse Stated(ColumnUse use, ColumnWish wish)
@@ -46,10 +46,15 @@ internal static class PriceColumns
         found.RemoveAll(each => each.Header is { IsBare: true, IsMarked: false } && found.Count < 2);
         bool counted = found.Count > 1 && found.Select(each => each.Header.Quantity).SequenceEqual(Enumerable.Range(1, found.Count))
             && !found.Any(each => each.Header.IsMarked);
+        foreach ((int column, _) in found)
+        {
+            uses[column] = uses[column] with { IsUnnamed = false };
+        }
+
+        int[]? partners = counted ? Partners(cells, sample, uses, found.Count) : null;
         foreach ((int column, PriceHeader header) in found)
         {
-            int partner = counted ? Partner(cells, sample, header.Quantity) : -1;
-            uses[column] = uses[column] with { IsUnnamed = false };
+            int partner = partners is null ? -1 : partners[header.Quantity - 1];
             if (!counted || partner >= 0)
             {
                 uses[column] = uses[column] with
@@ -99,6 +104,18 @@ internal static class PriceColumns
             }
         }
 
+        // What one column says of the currency holds for those that say nothing, where no other says otherwise.
+        string[] currencies = [.. uses.Select(use => use.Field is "price" or "prices" ? use.Currency : null).OfType<string>().Distinct()];
+        if (currencies.Length == 1)
+        {
+            uses =
+            [
+                .. uses.Select(use => use is { Field: "price" or "prices", Currency: null } && sample.Cells(use.Index).All(cell => Currencies.In(cell) is null)
+                    ? use with { Currency = currencies[0], Why = $"{use.Why}; {currencies[0]}, as the other prices" }
+                    : use),
+            ];
+        }
+
         // Prices of which nothing says the currency are left out rather than taken in a wrong one.
         return uses.Any(use => use.Field == "currency")
             ? uses
@@ -145,10 +162,22 @@ internal static class PriceColumns
         || ColumnSample.Share(cells, cell => PriceCells.Price(cell, NumberNotation.Point) is not null
             || PriceCells.Price(cell, NumberNotation.Comma) is not null) >= 0.5;
 
-    // The column of quantities with the same place: "Qty 2" beside "Price 2".
-    private static int Partner(HeaderCell[] cells, ColumnSample sample, int place) => Array.FindIndex(
-        cells,
-        cell => PriceHeader.Of(cell.Text) is { IsBare: true, IsMarked: true } other && other.Quantity == place
-            && ColumnSample.Share(sample.Cells(Array.IndexOf(cells, cell)), text =>
-                CellNumber.Read(text, Dimension.Count, 0, NumberNotation.Point, false).IsOk) > 0.9);
+    // The columns of quantities beside prices that are only numbered, "Qty 2" beside "Price 2": whole numbers that ascend in each row.
+    private static int[]? Partners(HeaderCell[] cells, ColumnSample sample, ColumnUse[] uses, int count)
+    {
+        IEnumerable<int[]> groups = Enumerable.Range(0, cells.Length)
+            .Where(i => uses[i] is { Field: null, IsUnnamed: true })
+            .Select(i => (Column: i, Match: Place().Match(cells[i].Text)))
+            .Where(each => each.Match.Success)
+            .GroupBy(each => each.Match.Groups[1].Value + "#" + each.Match.Groups[3].Value)
+            .Where(group => group.Select(each => each.Match.Groups[2].Value)
+                .SequenceEqual(Enumerable.Range(1, count).Select(CellNumber.Text)))
+            .Select(group => group.Select(each => each.Column).ToArray())
+            .Where(columns => sample.Ascend(columns));
+        int[][] fitting = [.. groups];
+        return fitting.Length == 1 ? fitting[0] : null;
+    }
+
+    [GeneratedRegex(@"^(\D*)(\d{1,2})(\D*)$")]
+    private static partial Regex Place();
 }

@@ -40,7 +40,7 @@ internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsP
             return null;
         }
 
-        string rest = Currencies.Without(Number().Replace(header, " "));
+        string rest = Currencies.Without(Brackets().Replace(Number().Replace(header, " "), " "));
         string[] words = TradePhrase.Folded(Trade.Words(rest)).Split(' ', StringSplitOptions.RemoveEmptyEntries);
         if (!words.All(word => Prices.Contains(word) || Quantities.Contains(word) || From.Contains(word) || Per.Contains(word)))
         {
@@ -69,6 +69,9 @@ internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsP
 
     [GeneratedRegex(@"\d[kK]?\s*(?:\+|＋|以上|~\s*$|-\s*$)|(?:>=?|≥|⩾)\s*\d")]
     private static partial Regex Plus();
+
+    [GeneratedRegex(@"[\(\)\[\]\{\}/]")]
+    private static partial Regex Brackets();
 
     [GeneratedRegex(@"/\s*\d")]
     private static partial Regex Slash();

@@ -12,8 +12,14 @@ internal sealed record TradeWords(string Field, IReadOnlyList<(TradePhrase Phras
     private static readonly Dictionary<PartKind, TradeWords[]> Kinds =
         PartKinds.All.ToDictionary(kind => kind, kind => Gather(kind, Lines()).ToArray());
 
+    private static readonly Dictionary<PartKind, FrozenSet<string>> AllWords = Kinds.ToDictionary(
+        kind => kind.Key, kind => kind.Value.SelectMany(words => words.Phrases).SelectMany(each => each.Phrase.Words).ToFrozenSet());
+
     /// <summary>The words of the fields of a kind.</summary>
     public static IReadOnlyList<TradeWords> Of(PartKind kind) => Kinds[kind];
+
+    /// <summary>All words of the phrases of a kind.</summary>
+    public static IReadOnlySet<string> Known(PartKind kind) => AllWords[kind];
 
     private static IEnumerable<TradeWords> Gather(PartKind kind, List<(string Section, string Field, string[] Phrases)> lines)
     {
