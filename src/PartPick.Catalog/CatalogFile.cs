@@ -195,11 +195,11 @@ internal sealed class CatalogFile : IDisposable
     }
 
     /// <summary>The parts as an import needs to know them.</summary>
-    public IEnumerable<KnownPart> ReadKnown() => Parts.FindAll().Select(document =>
+    public IEnumerable<(string Id, PartKind Kind, string? Supplier, string? Number, UInt128 Row)> ReadKnown() => Parts.FindAll().Select(document =>
     {
         BsonDocument figures = document[PartDocument.Figures].AsDocument;
         var kind = PartKinds.Named(document[PartDocument.Kind].AsString);
-        return new KnownPart(
+        return (
             document["_id"].AsString, kind.IsOk ? kind.Value : throw new InvalidDataException("A part in it cannot be read."),
             figures["supplier"].IsString ? figures["supplier"].AsString : null,
             figures["supplierPart"].IsString ? figures["supplierPart"].AsString : null,
