@@ -8,21 +8,23 @@ namespace PartPick.Catalog.Mapping;
 /// </summary>
 internal static class PartPages
 {
-    private const int Piece = 5000;
+    private const int Piece = 2000;
 
-    /// <summary>All documents of a collection that does not change meanwhile.</summary>
+    /// <summary>All documents of a collection that is not changed meanwhile.</summary>
     public static IEnumerable<BsonDocument> All(ILiteCollection<BsonDocument> parts)
     {
-        List<BsonDocument> piece = parts.Query().OrderBy(Id).Limit(Piece).ToList();
-        while (piece.Count > 0)
+        ILiteQueryable<BsonDocument> from = parts.Query();
+        int count = Piece;
+        while (count == Piece)
         {
-            foreach (BsonDocument document in piece)
+            (count, BsonValue last) = (0, BsonValue.Null);
+            foreach (BsonDocument document in from.OrderBy(Id).Limit(Piece).ToEnumerable())
             {
                 yield return document;
+                (count, last) = (count + 1, document["_id"]);
             }
 
-            BsonValue last = piece[^1]["_id"];
-            piece = piece.Count < Piece ? [] : parts.Query().Where(BsonExpression.Create("$._id > @0", last)).OrderBy(Id).Limit(Piece).ToList();
+            from = parts.Query().Where(BsonExpression.Create("$._id > @0", last));
         }
     }
 
