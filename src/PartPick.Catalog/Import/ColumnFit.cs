@@ -47,6 +47,7 @@ internal sealed class ColumnFit(PartKind kind, ColumnSample sample)
         "cut" => CrystalWords.CutOf(cell) is not null,
         "dielectric" => cell.Length < 40 && cell.Any(char.IsLetter) && !cell.Contains("ppm", StringComparison.OrdinalIgnoreCase),
         "load" when CrystalWords.IsSeries(cell) => true,
+        "currency" => Currencies.IsName(cell) || Currencies.In(cell) is not null,
         "package" => cell.Length < 60,
         "supplierPart" => cell.Length < 80,
         _ when dimension is { } measured => Either(notation => Plausibly(field, measured, header, cell, notation)),

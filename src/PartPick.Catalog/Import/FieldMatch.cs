@@ -11,6 +11,8 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
     /// <summary>From here on a header is the whole name of a field.</summary>
     public const double Whole = 85;
 
+    private const double Compound = 0.8;
+
     /// <summary>All fields that a header may name.</summary>
     public static IEnumerable<FieldMatch> Of(PartKind kind, int column, HeaderCell header)
     {
@@ -42,18 +44,18 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
 
     private static double Rate(HeaderCell header, TradeWords words, IReadOnlySet<string> known)
     {
-        bool other = header.Plain.Split(' ').Any(word => words.Against.Contains(word));
+        bool other = words.IsOther(header);
         double best = 0;
         foreach ((TradePhrase phrase, int place) in words.Phrases)
         {
-            double rate = Rate(header, phrase, other, known);
+            double rate = Rate(header, phrase, other, words.IsText, known);
             best = rate > 0 ? Math.Max(best, rate - Math.Min(place * 0.1, 5)) : best;
         }
 
         return best;
     }
 
-    private static double Rate(HeaderCell header, TradePhrase phrase, bool other, IReadOnlySet<string> known)
+    private static double Rate(HeaderCell header, TradePhrase phrase, bool other, bool texts, IReadOnlySet<string> known)
     {
         if (header.Plain == phrase.Text)
         {
@@ -70,11 +72,12 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
             return 93;
         }
 
-        return phrase.IsWhole ? 0 : Partly(header.Telling, phrase.Words, known);
+        return phrase.IsWhole ? 0 : Partly(header.Telling, phrase.Words, texts, known);
     }
 
-    // Every word of the phrase has to be found; words of the header that are left over make it less sure.
-    private static double Partly(string[] header, string[] phrase, IReadOnlySet<string> known)
+    // Every word of the phrase has to be found, uncut where the cells are texts, which prove nothing; words of the header that are left
+    // over make it less sure.
+    private static double Partly(string[] header, string[] phrase, bool texts, IReadOnlySet<string> known)
     {
         if (header.Length < phrase.Length || phrase.Sum(word => word.Length) < 3)
         {
@@ -82,6 +85,7 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
         }
 
         double likeness = 1;
+        bool sure = false;
         var used = new bool[header.Length];
         foreach (string word in phrase)
         {
@@ -92,13 +96,21 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
                 (best, at) = like > best ? (like, i) : (best, at);
             }
 
-            if (at < 0)
+            if (at < 0 || (texts && best is < 1 and not Compound))
             {
                 return 0;
             }
 
+            sure |= best >= Compound && header[at].Length > 2;
+
             used[at] = true;
             likeness *= best;
+        }
+
+        // One or two letters say something only beside a word that does.
+        if (!sure && header.Length > 1)
+        {
+            return 0;
         }
 
         int found = header.Where((_, i) => used[i]).Sum(word => word.Length);
@@ -126,7 +138,7 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
         }
 
         return word.Length >= 6 && (header.EndsWith(word, StringComparison.Ordinal) || header.StartsWith(word, StringComparison.Ordinal))
-            ? 0.8
+            ? Compound
             : 0;
     }
 }

@@ -26,7 +26,7 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
 
     private static readonly HashSet<string> Noise =
     [
-        .. Highest, .. Lowest, .. Middle, "nominal", "nom", "rated", "value", "all", "25c", "25", "25degc",
+        .. Highest, .. Lowest, .. Middle, "nominal", "nom", "rated", "value", "valu", "all", "25c", "25", "25degc",
     ];
 
     /// <summary>The words of the name, vowels with dots as they are without.</summary>

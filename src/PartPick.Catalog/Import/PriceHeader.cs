@@ -24,7 +24,7 @@ internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsP
     private static readonly HashSet<string> From = Set(
         "ab from od desde des dessa dès da vanaf fran fra partir from at alkaen tol a");
 
-    private static readonly HashSet<string> Per = Set("per pro je par por cada za");
+    private static readonly HashSet<string> Per = Set("per pro je par por cada za p");
 
     /// <summary>Takes a header apart; null where it is none of a price with a quantity.</summary>
     public static PriceHeader? Of(string header)
@@ -49,7 +49,7 @@ internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsP
 
         bool marked = numbers.Count == 2 || Plus().IsMatch(header) || words.Any(From.Contains) || words.Any(Quantities.Contains);
         bool per = !Plus().IsMatch(header) && numbers.Count == 1
-            && (words.Any(Per.Contains) || Slash().IsMatch(header)) && quantity > 1;
+            && (words.Any(Per.Contains) || Slash().IsMatch(header)) && !words.Any(From.Contains) && quantity > 1;
         return new PriceHeader(quantity, marked, per, !words.Any(Prices.Contains) && Currencies.In(header) is null && !Plus().IsMatch(header));
     }
 

@@ -9,11 +9,22 @@ namespace PartPick.Catalog.Import;
 /// <param name="Against">Words that make a header another one.</param>
 internal sealed record TradeWords(string Field, IReadOnlyList<(TradePhrase Phrase, int Place)> Phrases, FrozenSet<string> Against)
 {
+    private static readonly HashSet<string> Texts = new(StringComparer.Ordinal)
+    {
+        "supplierPart", "description", "supplier", "package", "currency", "note", "holder", "dielectric", "excluded",
+    };
+
     private static readonly Dictionary<PartKind, TradeWords[]> Kinds =
         PartKinds.All.ToDictionary(kind => kind, kind => Gather(kind, Lines()).ToArray());
 
     private static readonly Dictionary<PartKind, FrozenSet<string>> AllWords = Kinds.ToDictionary(
         kind => kind.Key, kind => kind.Value.SelectMany(words => words.Phrases).SelectMany(each => each.Phrase.Words).ToFrozenSet());
+
+    /// <summary>Whether the cells are texts, which fit whatever the header means.</summary>
+    public bool IsText => Texts.Contains(Field);
+
+    /// <summary>Whether a header has a word with which it means something else.</summary>
+    public bool IsOther(HeaderCell header) => header.Plain.Split(' ').Any(Against.Contains);
 
     /// <summary>The words of the fields of a kind.</summary>
     public static IReadOnlyList<TradeWords> Of(PartKind kind) => Kinds[kind];

@@ -47,7 +47,8 @@ internal sealed class ValueMatching(PartKind kind, ColumnSample sample, NumberNo
             return;
         }
 
-        ColumnUse[] fitting = [.. uses.Where(use => IsOpen(use) && sample.Cells(use.Index).Length > 0 && fits(use))];
+        TradeWords? words = TradeWords.Of(kind).FirstOrDefault(each => each.Field == field);
+        ColumnUse[] fitting = [.. uses.Where(use => IsOpen(use) && words?.IsOther(HeaderCell.Of(use.Header)) != true && sample.Cells(use.Index).Length > 0 && fits(use))];
         if (fitting.Length == 1)
         {
             int at = fitting[0].Index;

@@ -75,7 +75,7 @@ public sealed class FormulaGuardTests : IDisposable
         ImportReport again = other.Run(exported.Split('\n')[0] + "\n" + row + "\n");
         Assert.Equal((1, 0), (again.Read, again.Rejected));
         Part part = other.Entry("=A1+1").Part;
-        Assert.Equal(("=cmd|' /C calc'!A0", "-1-1", "@SUM(A1)"), (part.Description, part.Note, part.Offer.Package));
+        Assert.Equal(("=cmd|' /C calc'!A0", "-1-1", "@SUM(A1)"), (part.Description, part.Note, part.Package));
         Assert.Contains(row, other.Export(PartKind.Crystal), StringComparison.Ordinal);
     }
 }
