@@ -14,6 +14,8 @@ internal sealed class KnownParts
     private readonly Dictionary<int, string> _ids = [];
     private int[] _byId = Empty(1 << 12);
     private int[] _byNumber = Empty(1 << 12);
+    private string? _lastText;
+    private UInt128 _lastDigest;
 
     /// <summary>Reads them from a catalogue.</summary>
     public static KnownParts Of(CatalogFile file)
@@ -119,11 +121,18 @@ internal sealed class KnownParts
         return free;
     }
 
-    private static UInt128 Digest(string text)
+    private UInt128 Digest(string text)
     {
+        // Mostly the same text is asked for several times in a row: the number that also is the id.
+        if (text == _lastText)
+        {
+            return _lastDigest;
+        }
+
         Span<byte> digest = stackalloc byte[32];
         SHA256.HashData(MemoryMarshal.AsBytes(text.AsSpan()), digest);
-        return BinaryPrimitives.ReadUInt128LittleEndian(digest) | 1;
+        (_lastText, _lastDigest) = (text, BinaryPrimitives.ReadUInt128LittleEndian(digest) | 1);
+        return _lastDigest;
     }
 
     private static int[] Empty(int length)

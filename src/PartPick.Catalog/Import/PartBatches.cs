@@ -6,7 +6,7 @@ namespace PartPick.Catalog.Import;
 /// <param name="file">The catalogue.</param>
 internal sealed class PartBatches(CatalogFile file)
 {
-    private const int BatchRows = 2000;
+    private const int BatchRows = 500;
 
     private List<BsonDocument> _batch = new(BatchRows);
     private Task _writing = Task.CompletedTask;
