@@ -201,7 +201,8 @@ internal sealed class CatalogFile : IDisposable
     }
 
     /// <summary>The parts as an import needs to know them.</summary>
-    public IEnumerable<(string Id, PartKind Kind, string? Supplier, string? Number, UInt128 Row)> ReadKnown() => PartPages.All(Parts).Select(document =>
+    public IEnumerable<(string Id, PartKind Kind, string? Supplier, string? Number, UInt128 Row)> ReadKnown() =>
+        PartPages.All(Parts).Select(document =>
     {
         BsonDocument figures = document[PartDocument.Figures].AsDocument;
         var kind = PartKinds.Named(document[PartDocument.Kind].AsString);

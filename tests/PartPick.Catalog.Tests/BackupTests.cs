@@ -32,7 +32,8 @@ public sealed class BackupTests : IDisposable
         var during = new During(_bench.Db, Copy);
         string list = "Part No,Frequency\n" + string.Concat(Enumerable.Range(0, 1500).Select(i => $"A{i},8 MHz\n"));
         Result<ImportReport> report = CatalogImport.Run(
-            _bench.Db, new MemoryStream(System.Text.Encoding.UTF8.GetBytes(list)), _bench.Request(), during, TestContext.Current.CancellationToken);
+            _bench.Db, new MemoryStream(System.Text.Encoding.UTF8.GetBytes(list)), _bench.Request(), during,
+            TestContext.Current.CancellationToken);
         Assert.Equal(1500, report.Value.Added);
         Assert.True(during.Copied?.IsOk, during.Copied?.Problem?.ToString());
         foreach (Problem problem in new[] { during.Restored!.Problem!, during.Imported!.Problem! })

@@ -40,7 +40,8 @@ internal sealed class ColumnNotation(PartKind kind, ColumnSample sample, NumberN
 
         if (NotationChoice.IsMixed(numbers))
         {
-            return (NumberNotation.Unknown, "; its cells show both a decimal point and a decimal comma: what can be read in two ways is rejected");
+            return (
+                NumberNotation.Unknown, "; its cells show both a decimal point and a decimal comma: what can be read in two ways is rejected");
         }
 
         if (!comma && !point)

@@ -15,7 +15,8 @@ internal sealed class ColumnProposal(PartKind kind, IReadOnlyList<string[]> rows
     public ColumnUse[] For(IReadOnlyList<string> header, IReadOnlyList<ColumnWish> wishes)
     {
         HeaderCell[] cells = [.. header.Select(HeaderCell.Of)];
-        if (wishes.Count == 0 && cells.Where(cell => !RejectedFile.IsOwnColumn(cell.Text)).All(cell => FieldOf(kind, cell.Text) is not null))
+        if (wishes.Count == 0
+            && cells.Where(cell => !RejectedFile.IsOwnColumn(cell.Text)).All(cell => FieldOf(kind, cell.Text) is not null))
         {
             return [.. cells.Select((cell, i) => Exactly(i, cell.Text))];
         }

@@ -13,7 +13,8 @@ internal sealed class ColumnSample(IReadOnlyList<string[]> rows)
         ? known
         : _cells[column] =
         [
-            .. rows.Where(row => row.Length > column).Select(row => CellText.Plain(row[column])).Where(cell => cell.Length is > 0 and < 200),
+            .. rows.Where(row => row.Length > column).Select(row => CellText.Plain(row[column]))
+                .Where(cell => cell.Length is > 0 and < 200),
         ];
 
     /// <summary>The numbers of a column, those inside lists of prices one by one.</summary>
@@ -41,7 +42,8 @@ internal sealed class ColumnSample(IReadOnlyList<string[]> rows)
         foreach (string[] row in rows)
         {
             double last = 0;
-            foreach (string cell in columns.Select(column => column < row.Length ? CellText.Plain(row[column]) : "").Where(cell => cell.Length > 0))
+            IEnumerable<string> cells = columns.Select(column => column < row.Length ? CellText.Plain(row[column]) : "");
+            foreach (string cell in cells.Where(cell => cell.Length > 0))
             {
                 Result<double> read = CellNumber.Read(cell, Dimension.Count, 0, NumberNotation.Unknown, false);
                 if (!read.IsOk || read.Value <= last)

@@ -9,17 +9,20 @@ internal static class CrystalWords
     private static readonly string[] Fundamental =
         ["fund", "grund", "fonda", "podst", "zaklad", "alap", "perus", "основн", "基频", "基本波", "基波", "temel", "基頻"];
 
-    private static readonly HashSet<string> Third = Set("3 3rd third 3ot 3o 3e 3er 3er 3a 3eme 3th 三 三次 3次 tercer tercero terzo terza troisieme dritter");
+    private static readonly HashSet<string> Third = Set(
+        "3 3rd third 3ot 3o 3e 3er 3a 3eme 3th 三 三次 3次 tercer tercero terzo terza troisieme dritter");
 
     private static readonly HashSet<string> Fifth = Set("5 5th fifth 5ot 5o 5e 5eme 五次 5次 quinto quinta cinquieme funfter");
 
     private static readonly HashSet<string> Orders = Set(
-        "overtone ot t mode at cut oberton partiel harmonique overton boventoon owerton ton armonico armonica sobretono sobretom yliaalto ylasavel "
-        + "harm harmonic modo modus tone wave of vibration gt");
+        "overtone ot t mode at cut oberton partiel harmonique overton boventoon owerton ton armonico armonica sobretono sobretom "
+        + "yliaalto ylasavel harm harmonic modo modus tone wave of vibration gt");
 
     /// <summary>Whether a cell in the place of a load says series resonance.</summary>
-    public static bool IsSeries(string cell) => Trade.Words(cell) is "s" or "series" or "ser" or "serie" or "serien" or "en serie" or "in serie"
-        or "em serie" or "series resonance" or "series resonant" or "serienresonanz" or "sr" or "resonance serie" or "szeregowy" or "串联" or "直列"
+    public static bool IsSeries(string cell) => Trade.Words(cell)
+        is "s" or "series" or "ser" or "serie" or "serien" or "en serie" or "in serie"
+        or "em serie" or "series resonance" or "series resonant" or "serienresonanz" or "sr" or "resonance serie" or "szeregowy"
+        or "串联" or "直列"
         or "serieresonantie" or "serieresonans" or "serieresonanz" or "последовательный";
 
     /// <summary>The cut that a cell names; null for none.</summary>

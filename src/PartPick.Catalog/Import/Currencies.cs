@@ -15,7 +15,8 @@ internal static class Currencies
 
     private static readonly Dictionary<string, string> Names = new(StringComparer.OrdinalIgnoreCase)
     {
-        ["euro"] = "EUR", ["euros"] = "EUR", ["RMB"] = "CNY", ["Fr"] = "CHF", ["SFr"] = "CHF", ["zl"] = "PLN", ["Kc"] = "CZK", ["Ft"] = "HUF",
+        ["euro"] = "EUR", ["euros"] = "EUR", ["RMB"] = "CNY", ["Fr"] = "CHF", ["SFr"] = "CHF", ["zl"] = "PLN", ["Kc"] = "CZK",
+        ["Ft"] = "HUF",
         ["lei"] = "RON", ["TL"] = "TRY", ["dollar"] = "USD", ["dollars"] = "USD", ["yen"] = "JPY", ["pound"] = "GBP",
     };
 
@@ -58,7 +59,8 @@ internal static class Currencies
     }
 
     /// <summary>Whether a text is the name or sign of a currency, also of a shared one, and nothing else.</summary>
-    public static bool IsName(string text) => Named(text) is not null || Shared.Contains(text) || Array.Exists(Signs, pair => pair.Sign == text);
+    public static bool IsName(string text) => Named(text) is not null || Shared.Contains(text)
+        || Array.Exists(Signs, pair => pair.Sign == text);
 
     /// <summary>A text without the names and signs of currencies, also those that say nothing certain.</summary>
     public static string Without(string text)

@@ -87,7 +87,8 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
 
     // "at 25 °C", "à 25°C", "@ IC", "bei +25 °C", "(25 °C)", "(IC=2mA)": under which condition the figures hold.
     [GeneratedRegex(
-        @"(?<=.)@.*$|\([^)]*=[^)]*\)|(?:\b(?:at|à|a|bei|bij|ved|vid|w|przy|pri|при|la))\s*\+?\s*25\s*(?:[°º]\s*C?|deg\.?\s*C|C\b|℃)|\(\s*\+?25\s*(?:[°º]\s*C|C|℃)\s*\)",
+        @"(?<=.)@.*$|\([^)]*=[^)]*\)|(?:\b(?:at|à|a|bei|bij|ved|vid|w|przy|pri|при|la))"
+            + @"\s*\+?\s*25\s*(?:[°º]\s*C?|deg\.?\s*C|C\b|℃)|\(\s*\+?25\s*(?:[°º]\s*C|C|℃)\s*\)",
         RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex Condition();
 

@@ -35,7 +35,10 @@ internal sealed class HeaderMatching(PartKind kind, ColumnSample sample)
             if (match.Field == "price" && uses.Any(use => use.Field == "price" && use.Quantity > 1)
                 && uses.Any(use => use.Field == "price" && use.Quantity == 1))
             {
-                uses[match.Column] = uses[match.Column] with { IsUnnamed = false, Why = "the prices for each quantity are in other columns" };
+                uses[match.Column] = uses[match.Column] with
+                {
+                    IsUnnamed = false, Why = "the prices for each quantity are in other columns",
+                };
             }
             else if (taken.Add(match.Field))
             {

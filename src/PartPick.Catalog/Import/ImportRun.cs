@@ -69,7 +69,8 @@ internal sealed class ImportRun : IDisposable
             {
                 return new RowRejection(
                     line, Header(id is not null ? "id" : "supplierPart"), id ?? number,
-                    string.Create(CultureInfo.InvariantCulture, $"is the part of line {part.MetOn} with other figures; fits one row for each part"));
+                    string.Create(
+                        CultureInfo.InvariantCulture, $"is the part of line {part.MetOn} with other figures; fits one row for each part"));
             }
 
             if (part.Row == digest)

@@ -38,7 +38,7 @@ internal sealed class PartMerge(PartShape shape, IReadOnlyList<string> keys)
     public bool IsSame(StoredPart old, PartDraft supplied) =>
         shape.Fields.All(field => supplied.Agrees(field.Key, old.Supplied));
 
-    /// <summary>The part as it is stored with new figures: what was set by hand stays, and the place of what the file does not state.</summary>
+    /// <summary>The part as it is stored with new figures: what was set by hand stays, and so does the origin of the rest.</summary>
     public StoredPart Changed(StoredPart old, PartDraft supplied, RowPlace place, byte[] digest)
     {
         var changed = new StoredPart

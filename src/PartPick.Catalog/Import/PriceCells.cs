@@ -8,7 +8,8 @@ internal static partial class PriceCells
 {
     private static readonly HashSet<string> Pieces = new(StringComparer.OrdinalIgnoreCase)
     {
-        "", "ea", "each", "pc", "pcs", "Stk", "St", "Stück", "unit", "szt", "ks", "kpl", "db", "шт", "pz", "ud", "per pc", "per unit", "pièce", "p",
+        "", "ea", "each", "pc", "pcs", "Stk", "St", "Stück", "unit", "szt", "ks", "kpl", "db", "шт", "pz", "ud", "per pc", "per unit",
+        "pièce", "p",
     };
 
     /// <summary>One price; null where the cell is none, or can be read in two ways.</summary>
@@ -69,7 +70,8 @@ internal static partial class PriceCells
 
     [GeneratedRegex(
         @"^(?:ab|from|od|desde|dès|da|vanaf|från|fra|à partir de|a partir de|qty|≥|>=?)?\s*(\d{1,3}(?:[., ']\d{3})+|\d{1,9})(k)?"
-            + @"\s*(?:(?:-|–|\.\.|to|bis|à)\s*\d[\d.,]*)?\s*(?:\+|pcs\.?|pc\.?|x|ab|Stk\.?|Stück|St\.?|szt\.?|ks|kpl|db|шт\.?|pz\.?|uds?\.?|u)?"
+            + @"\s*(?:(?:-|–|\.\.|to|bis|à)\s*\d[\d.,]*)?"
+            + @"\s*(?:\+|pcs\.?|pc\.?|x|ab|Stk\.?|Stück|St\.?|szt\.?|ks|kpl|db|шт\.?|pz\.?|uds?\.?|u)?"
             + @"\s*(?:[:=@>]|-(?=\s)|->|→|à|\s)\s*(.+)$",
         RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex Entry();

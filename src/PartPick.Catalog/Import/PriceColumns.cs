@@ -79,7 +79,8 @@ internal static partial class PriceColumns
             {
                 uses[column] = uses[column] with
                 {
-                    Why = $"{CellNumber.Text(header.Quantity)} may be a quantity or a place: state --column \"{cells[column].Text}=price:QUANTITY\"",
+                    Why = $"{CellNumber.Text(header.Quantity)} may be a quantity or a place: "
+                        + $"state --column \"{cells[column].Text}=price:QUANTITY\"",
                 };
             }
         }
@@ -89,7 +90,8 @@ internal static partial class PriceColumns
     public static ColumnUse[] Settle(ColumnUse[] uses, ColumnSample sample)
     {
         uses = [.. uses];
-        ColumnUse? quantity = Array.Find(uses, use => use.Field == "priceQuantity" && !uses.Any(other => other.QuantityColumn == use.Index));
+        ColumnUse? quantity = Array.Find(
+            uses, use => use.Field == "priceQuantity" && !uses.Any(other => other.QuantityColumn == use.Index));
         ColumnUse? together = Array.Find(uses, use => use.Field == "priceFor");
         for (int i = 0; i < uses.Length; i++)
         {
@@ -110,7 +112,8 @@ internal static partial class PriceColumns
         {
             uses =
             [
-                .. uses.Select(use => use is { Field: "price" or "prices", Currency: null } && sample.Cells(use.Index).All(cell => Currencies.In(cell) is null)
+                .. uses.Select(use => use is { Field: "price" or "prices", Currency: null }
+                    && sample.Cells(use.Index).All(cell => Currencies.In(cell) is null)
                     ? use with { Currency = currencies[0], Why = $"{use.Why}; {currencies[0]}, as the other prices" }
                     : use),
             ];
@@ -144,7 +147,8 @@ internal static partial class PriceColumns
             {
                 Field = null,
                 Why = $"may be the price of one or of {CellNumber.Text(use.Quantity)} together: state --column "
-                    + $"\"{use.Header}=price:{CellNumber.Text(use.Quantity)}\" or \"…=price:{CellNumber.Text(use.Quantity)}/{CellNumber.Text(use.Quantity)}\"",
+                    + $"\"{use.Header}=price:{CellNumber.Text(use.Quantity)}\" or "
+                    + $"\"…=price:{CellNumber.Text(use.Quantity)}/{CellNumber.Text(use.Quantity)}\"",
             },
         };
     }
@@ -153,7 +157,8 @@ internal static partial class PriceColumns
     {
         double[] prices =
         [
-            .. sample.Cells(use.Index).Select(cell => PriceCells.Price(cell, use.Notation)).OfType<decimal>().Select(price => (double)price).Order(),
+            .. sample.Cells(use.Index).Select(cell => PriceCells.Price(cell, use.Notation)).OfType<decimal>()
+                .Select(price => (double)price).Order(),
         ];
         return prices.Length > 0 ? prices[prices.Length / 2] : null;
     }

@@ -12,14 +12,14 @@ namespace PartPick.Catalog.Import;
 internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsPer, bool IsBare)
 {
     private static readonly HashSet<string> Prices = Set(
-        "price prices preis preise prix precio precios prezzo prezzi preco precos prijs pris hinta cena ceny ar pret fiyat cost costo coste "
-        + "custo cout unit each rate ek vk pu ea net netto net ht stuckpreis einzelpreis stuksprijs styckpris stykpris stykkpris pc unitario "
-        + "unitaire unitprice 单价 价格 単価 価格 цена kosten usd eur gbp chf sek nok dkk pln czk huf inr cny jpy kr k sales excl ex vat sin iva "
+        "price prices preis preise prix precio precios prezzo prezzi preco precos prijs pris hinta cena ceny ar pret fiyat cost "
+        + "costo coste custo cout unit each rate ek vk pu ea net netto net ht stuckpreis einzelpreis stuksprijs styckpris stykpris "
+        + "stykkpris pc unitario unitaire unitprice 单价 价格 単価 価格 цена kosten usd eur gbp chf sek nok dkk pln czk huf inr cny jpy kr k sales excl ex vat sin iva "
         + "bez dph hors taxe list tier break staffel scaglione palier tarif t egysegar egyseg birim jednostkowa unit unite unidad");
 
     private static readonly HashSet<string> Quantities = Set(
-        "qty quantity quantities menge antal antall aantal cantidad quantita qta quantite qte quantidade qtd ilosc mennyiseg adet miktar kpl "
-        + "pcs pieces piece pzs pz stk st stuck stueck stuks szt ks db шт 个 個 pieza piezas uds ud un units unites off q");
+        "qty quantity quantities menge antal antall aantal cantidad quantita qta quantite qte quantidade qtd ilosc mennyiseg adet "
+        + "miktar kpl pcs pieces piece pzs pz stk st stuck stueck stuks szt ks db шт 个 個 pieza piezas uds ud un units unites off q");
 
     private static readonly HashSet<string> From = Set(
         "ab from od desde des dessa dès da vanaf fran fra partir from at alkaen tol a");
@@ -50,7 +50,8 @@ internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsP
         bool marked = numbers.Count == 2 || Plus().IsMatch(header) || words.Any(From.Contains) || words.Any(Quantities.Contains);
         bool per = !Plus().IsMatch(header) && numbers.Count == 1
             && (words.Any(Per.Contains) || Slash().IsMatch(header)) && !words.Any(From.Contains) && quantity > 1;
-        return new PriceHeader(quantity, marked, per, !words.Any(Prices.Contains) && Currencies.In(header) is null && !Plus().IsMatch(header));
+        return new PriceHeader(
+            quantity, marked, per, !words.Any(Prices.Contains) && Currencies.In(header) is null && !Plus().IsMatch(header));
     }
 
     private static int? Read(Match number)

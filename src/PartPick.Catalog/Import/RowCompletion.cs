@@ -57,7 +57,9 @@ internal static class RowCompletion
     /// <summary>An id from the supplier's number: without spaces, and short.</summary>
     public static string IdOf(string supplierPart)
     {
-        string id = !supplierPart.Any(char.IsWhiteSpace) ? supplierPart : string.Join('-', supplierPart.Split(default(char[]), StringSplitOptions.RemoveEmptyEntries));
+        string id = !supplierPart.Any(char.IsWhiteSpace)
+            ? supplierPart
+            : string.Join('-', supplierPart.Split(default(char[]), StringSplitOptions.RemoveEmptyEntries));
         if (id.Length <= LongestId)
         {
             return id;

@@ -9,7 +9,8 @@ internal static partial class TemperatureRange
     /// <summary>The lowest and the highest temperature, °C; null where the cell is no range.</summary>
     public static (double Lowest, double Highest)? Read(string cell)
     {
-        string bare = CellText.Bare(cell).Replace('\u2013', '-').Replace('\u2014', '-').Replace("'C", "°C", StringComparison.OrdinalIgnoreCase)
+        string bare = CellText.Bare(cell).Replace('\u2013', '-').Replace('\u2014', '-')
+            .Replace("'C", "°C", StringComparison.OrdinalIgnoreCase)
             .Trim('(', ')', '[', ']', ' ');
         Match match = Form().Match(bare);
         if (!match.Success)

@@ -17,7 +17,8 @@ internal sealed class ValueMatching(PartKind kind, ColumnSample sample, NumberNo
                 && !(field == "load" && sample.Cells(use.Index).All(cell => Read(cell, Dimension.Capacitance).Value <= 7e-12)));
         }
 
-        if (ImportFields.DimensionOf(kind, "temperatureMin") is not null && !uses.Any(use => use.Field is "temperatureMin" or "temperatureMax"))
+        if (ImportFields.DimensionOf(kind, "temperatureMin") is not null
+            && !uses.Any(use => use.Field is "temperatureMin" or "temperatureMax"))
         {
             Take(uses, "temperature", use => sample.Cells(use.Index).All(cell =>
                 cell.Contains('C', StringComparison.Ordinal) && TemperatureRange.Read(cell) is not null));
@@ -48,7 +49,9 @@ internal sealed class ValueMatching(PartKind kind, ColumnSample sample, NumberNo
         }
 
         TradeWords? words = TradeWords.Of(kind).FirstOrDefault(each => each.Field == field);
-        ColumnUse[] fitting = [.. uses.Where(use => IsOpen(use) && words?.IsOther(HeaderCell.Of(use.Header)) != true && sample.Cells(use.Index).Length > 0 && fits(use))];
+        ColumnUse[] fitting = [.. uses.Where(use => IsOpen(use)
+            && words?.IsOther(HeaderCell.Of(use.Header)) != true
+            && sample.Cells(use.Index).Length > 0 && fits(use))];
         if (fitting.Length == 1)
         {
             int at = fitting[0].Index;

@@ -16,7 +16,9 @@ public sealed class DecimalSignTests : IDisposable
     {
         ImportReport report = _bench.Run(List("2.500", 3000, "0,75"));
         Assert.Equal((3001, 3001, 0), (report.Read, report.Added, report.Rejected));
-        Assert.Contains(report.Columns, column => column.Header == "Price EUR" && column.Why.Contains("decimal comma", StringComparison.Ordinal));
+        Assert.Contains(
+            report.Columns,
+            column => column.Header == "Price EUR" && column.Why.Contains("decimal comma", StringComparison.Ordinal));
         Assert.Equal(2500m, _bench.Entry("A1").Part.Offer.Prices[0].UnitPrice);
         Assert.Equal(0.75m, _bench.Entry("Z").Part.Offer.Prices[0].UnitPrice);
     }
