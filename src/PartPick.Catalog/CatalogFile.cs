@@ -200,7 +200,9 @@ internal sealed class CatalogFile : IDisposable
         _database.Commit();
     }
 
-    /// <summary>The parts as an import needs to know them.</summary>
+    /// <summary>
+    /// The parts as an import needs to know them. The numbers of the parts that travel in the program are made up, and no supplier's.
+    /// </summary>
     public IEnumerable<(string Id, PartKind Kind, string? Supplier, string? Number, UInt128 Row)> ReadKnown() =>
         PartPages.All(Parts).Select(document =>
     {
@@ -209,7 +211,7 @@ internal sealed class CatalogFile : IDisposable
         return (
             document["_id"].AsString, kind.IsOk ? kind.Value : throw new InvalidDataException("A part in it cannot be read."),
             figures["supplier"].IsString ? figures["supplier"].AsString : null,
-            figures["supplierPart"].IsString ? figures["supplierPart"].AsString : null,
+            figures["supplierPart"].IsString && document[PartDocument.BuiltIn] != true ? figures["supplierPart"].AsString : null,
             document[PartDocument.Digest].IsBinary ? RowDigest.Of(document[PartDocument.Digest].AsBinary) : 0);
     });
 

@@ -72,7 +72,8 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
             return 93;
         }
 
-        return phrase.IsWhole ? 0 : Partly(header.Telling, phrase.Words, texts, known);
+        return phrase.IsWhole ? 0 : Math.Max(
+            Partly(header.Telling, phrase.Words, texts, known), Partly(header.All, phrase.Words, texts, known));
     }
 
     // Every word of the phrase has to be found, uncut where the cells are texts, which prove nothing; words of the header that are left
@@ -96,7 +97,7 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
                 (best, at) = like > best ? (like, i) : (best, at);
             }
 
-            if (at < 0 || (texts && best is < 1 and not Compound))
+            if (at < 0 || (texts && best is < 1 and not Compound && header[at].Length < 5))
             {
                 return 0;
             }

@@ -40,6 +40,9 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
     public string[] Telling { get; } =
         TradePhrase.Telling(string.Join(' ', TradePhrase.Folded(Name).Split(' ').Where(word => !Noise.Contains(word))));
 
+    /// <summary>The same with those that only qualify it.</summary>
+    public string[] All { get; } = TradePhrase.Telling(TradePhrase.Folded(Name));
+
     /// <summary>The names that a header gives side by side, "Fréquence / Frequency"; none where it gives one.</summary>
     public IEnumerable<HeaderCell> Alternatives()
     {

@@ -6,8 +6,8 @@ namespace PartPick.Catalog.Import;
 /// <summary>The phrases by which lists of parts name a field, and the words with which a header means something else.</summary>
 /// <param name="Field">The field.</param>
 /// <param name="Phrases">The phrases, each with its place in its language's list: the surest are first.</param>
-/// <param name="Against">Words that make a header another one.</param>
-internal sealed record TradeWords(string Field, IReadOnlyList<(TradePhrase Phrase, int Place)> Phrases, FrozenSet<string> Against)
+/// <param name="Against">Words, or several together, that make a header another one.</param>
+internal sealed record TradeWords(string Field, IReadOnlyList<(TradePhrase Phrase, int Place)> Phrases, IReadOnlyList<string[]> Against)
 {
     private static readonly HashSet<string> Texts = new(StringComparer.Ordinal)
     {
@@ -24,7 +24,7 @@ internal sealed record TradeWords(string Field, IReadOnlyList<(TradePhrase Phras
     public bool IsText => Texts.Contains(Field);
 
     /// <summary>Whether a header has a word with which it means something else.</summary>
-    public bool IsOther(HeaderCell header) => header.Plain.Split(' ').Any(Against.Contains);
+    public bool IsOther(HeaderCell header) => Against.Any(words => words.All(header.Plain.Split(' ').Contains));
 
     /// <summary>The words of the fields of a kind.</summary>
     public static IReadOnlyList<TradeWords> Of(PartKind kind) => Kinds[kind];
@@ -54,8 +54,10 @@ internal sealed record TradeWords(string Field, IReadOnlyList<(TradePhrase Phras
                     .. field.Where(line => !line.Field.EndsWith('!'))
                         .SelectMany(line => line.Phrases.Select((phrase, place) => (TradePhrase.Of(phrase), place))),
                 ],
-                field.Where(line => line.Field.EndsWith('!')).SelectMany(line => line.Phrases)
-                    .SelectMany(words => TradePhrase.Of(words).Words).ToFrozenSet());
+                [
+                    .. field.Where(line => line.Field.EndsWith('!')).SelectMany(line => line.Phrases)
+                        .Select(words => TradePhrase.Of(words).Text.Split(' ')),
+                ]);
         }
     }
 
