@@ -76,21 +76,27 @@ internal sealed class CatalogFile : IDisposable
     {
         string unfinished = path + ".new";
         Delete(unfinished);
-        using (var file = new CatalogFile(unfinished))
+        try
         {
-            file._database.UserVersion = Schema;
-            file.ReplaceBuiltIn(builtIn);
-        }
+            var file = new CatalogFile(unfinished);
+            try
+            {
+                file._database.UserVersion = Schema;
+                file.ReplaceBuiltIn(builtIn);
+                file.Dispose();
+            }
+            catch
+            {
+                file.Abandon();
+                throw;
+            }
 
-        using (var stream = new FileStream(unfinished, FileMode.Open, FileAccess.ReadWrite))
+            Publish(unfinished, path);
+        }
+        finally
         {
-            stream.Flush(flushToDisk: true);
+            Delete(unfinished);
         }
-
-        // What an older file of this name left unfinished must not be applied to the new one.
-        File.Delete(LogOf(path));
-        File.Move(unfinished, path);
-        Delete(unfinished);
     }
 
     /// <summary>Copies a catalogue that no one else has open, whole.</summary>
@@ -136,7 +142,7 @@ internal sealed class CatalogFile : IDisposable
 
     /// <summary>All stored parts, each with the id under which it is found.</summary>
     public IEnumerable<(string Id, StoredPart? Part)> ReadNamed() =>
-        Parts.FindAll().Select(document => (document["_id"].AsString, PartDocument.ReadStored(document)));
+        PartPages.All(Parts).Select(document => (document["_id"].AsString, PartDocument.ReadStored(document)));
 
     /// <summary>The parts as they were before the last import; null where one cannot be read.</summary>
     public IEnumerable<StoredPart?> ReadEarlier() =>
@@ -146,10 +152,10 @@ internal sealed class CatalogFile : IDisposable
     public int CountParts() => Parts.Count();
 
     /// <summary>All parts; null where a document holds none.</summary>
-    public List<Part?> ReadParts() => [.. Parts.FindAll().Select(PartDocument.Read)];
+    public List<Part?> ReadParts() => [.. PartPages.All(Parts).Select(PartDocument.Read)];
 
     /// <summary>All stored parts one by one, in the order of their ids; null where a document holds none.</summary>
-    public IEnumerable<StoredPart?> ReadStored() => Parts.FindAll().Select(PartDocument.ReadStored);
+    public IEnumerable<StoredPart?> ReadStored() => PartPages.All(Parts).Select(PartDocument.ReadStored);
 
     /// <summary>A stored part; null where there is none, or none can be read.</summary>
     public StoredPart? FindStored(string id) => Parts.FindById(id) is { } document ? PartDocument.ReadStored(document) : null;
@@ -194,15 +200,18 @@ internal sealed class CatalogFile : IDisposable
         _database.Commit();
     }
 
-    /// <summary>The parts as an import needs to know them.</summary>
-    public IEnumerable<KnownPart> ReadKnown() => Parts.FindAll().Select(document =>
+    /// <summary>
+    /// The parts as an import needs to know them. The numbers of the parts that travel in the program are made up, and no supplier's.
+    /// </summary>
+    public IEnumerable<(string Id, PartKind Kind, string? Supplier, string? Number, UInt128 Row)> ReadKnown() =>
+        PartPages.All(Parts).Select(document =>
     {
         BsonDocument figures = document[PartDocument.Figures].AsDocument;
         var kind = PartKinds.Named(document[PartDocument.Kind].AsString);
-        return new KnownPart(
+        return (
             document["_id"].AsString, kind.IsOk ? kind.Value : throw new InvalidDataException("A part in it cannot be read."),
             figures["supplier"].IsString ? figures["supplier"].AsString : null,
-            figures["supplierPart"].IsString ? figures["supplierPart"].AsString : null,
+            figures["supplierPart"].IsString && document[PartDocument.BuiltIn] != true ? figures["supplierPart"].AsString : null,
             document[PartDocument.Digest].IsBinary ? RowDigest.Of(document[PartDocument.Digest].AsBinary) : 0);
     });
 
@@ -270,7 +279,7 @@ internal sealed class CatalogFile : IDisposable
         // In pieces: what one transaction changes is held in memory.
         string[] added =
         [
-            .. Parts.Find(BsonExpression.Create($"$.{PartDocument.Import} = @0", number)).Select(part => part["_id"].AsString),
+            .. PartPages.All(Parts).Where(part => part[PartDocument.Import] == number).Select(part => part["_id"].AsString),
         ];
         foreach (string[] ids in added.Chunk(2000))
         {

@@ -36,9 +36,16 @@ public static class CatalogSafety
 
         return Guarded(target, () => CatalogStore.Locked(path, Patience, () =>
         {
-            CatalogFile.Copy(path, target + ".new");
-            CatalogFile.Publish(target + ".new", target);
-            return target;
+            try
+            {
+                CatalogFile.Copy(path, target + ".new");
+                CatalogFile.Publish(target + ".new", target);
+                return target;
+            }
+            finally
+            {
+                CatalogFile.Delete(target + ".new");
+            }
         }));
     }
 

@@ -9,11 +9,13 @@ namespace PartPick.Benchmarks;
 
 /// <summary>
 /// The import of a large list, beside what it cannot do without: reading the same file to strings, and inserting the same documents
-/// with the same indexes. Times of one run; the ratios count.
+/// with the same indexes. Times and processor times of one run; the ratios count. On a busy machine the time of
+/// the import, which has two things to do at once, suffers more than that of the inserting; its processor time does not.
 /// </summary>
 internal static class ImportTable
 {
     private const int Chunk = 5000;
+    private const int WarmRows = 20_000;
 
     /// <summary>Measures and prints.</summary>
     /// <param name="arguments">The number of rows, 1000000 when left out.</param>
@@ -27,21 +29,24 @@ internal static class ImportTable
             string list = Path.Combine(folder, "list.csv");
             string db = Path.Combine(folder, "catalog.db");
             WriteList(list, rows);
+            WarmUp(folder);
             CatalogStore.Load(db);
-            TimeSpan first = Import(db, list, rows, 0);
+            (TimeSpan first, TimeSpan firstWork) = Timed(() => Import(db, list, rows, 0));
             long peak = PeakBytes();
-            TimeSpan second = Import(db, list, 0, rows);
+            (TimeSpan second, TimeSpan secondWork) = Timed(() => Import(db, list, 0, rows));
             long peakAfter = PeakBytes();
-            TimeSpan read = ReadStrings(list);
-            TimeSpan insert = InsertSame(db, Path.Combine(folder, "same.db"));
+            (TimeSpan read, TimeSpan readWork) = Timed(() => ReadStrings(list));
+            (TimeSpan insert, TimeSpan insertWork) = InsertSame(db, Path.Combine(folder, "same.db"));
             double sum = (read + insert).TotalSeconds;
+            double work = (readWork + insertWork).TotalSeconds;
             output.WriteLine(string.Create(CultureInfo.InvariantCulture, $"""
                 rows {rows}, columns 15, file {new FileInfo(list).Length / 1e6:F0} MB, catalogue {new FileInfo(db).Length / 1e6:F0} MB
-                reading to strings        {read.TotalSeconds,8:F2} s
-                inserting the documents   {insert.TotalSeconds,8:F2} s
-                sum                       {sum,8:F2} s   1.00
-                import                    {first.TotalSeconds,8:F2} s   {first.TotalSeconds / sum:F2}
-                the same again, unchanged {second.TotalSeconds,8:F2} s   {second / first:F2} of the first
+                                             time          processor
+                reading to strings        {read.TotalSeconds,8:F2} s        {readWork.TotalSeconds,8:F2} s
+                inserting the documents   {insert.TotalSeconds,8:F2} s        {insertWork.TotalSeconds,8:F2} s
+                sum                       {sum,8:F2} s  1.00  {work,8:F2} s  1.00
+                import                    {first.TotalSeconds,8:F2} s  {first.TotalSeconds / sum:F2}  {firstWork.TotalSeconds,8:F2} s  {firstWork.TotalSeconds / work:F2}
+                the same again, unchanged {second.TotalSeconds,8:F2} s  {second / first:F2}  {secondWork.TotalSeconds,8:F2} s  {secondWork / firstWork:F2}   of the first import
                 most memory in the first import {peak / 1e6:F0} MB, with the second {peakAfter / 1e6:F0} MB
                 """));
             return 0;
@@ -52,16 +57,36 @@ internal static class ImportTable
         }
     }
 
-    private static TimeSpan Import(string db, string list, int added, int unchanged)
+    // Compiles what is measured, so that a short list is not charged for it and the inserting is not spared it by coming last.
+    private static void WarmUp(string folder)
     {
-        long start = Stopwatch.GetTimestamp();
+        string list = Path.Combine(folder, "warm.csv");
+        string db = Path.Combine(folder, "warm.db");
+        WriteList(list, WarmRows);
+        CatalogStore.Load(db);
+        Import(db, list, WarmRows, 0);
+        Import(db, list, 0, WarmRows);
+        ReadStrings(list);
+        InsertSame(db, Path.Combine(folder, "warm-same.db"));
+    }
+
+    private static (TimeSpan Time, TimeSpan Work) Timed(Action action)
+    {
+        (long start, TimeSpan worked) = (Stopwatch.GetTimestamp(), Environment.CpuUsage.TotalTime);
+        action();
+        return (Stopwatch.GetElapsedTime(start), Environment.CpuUsage.TotalTime - worked);
+    }
+
+    private static void Import(string db, string list, int added, int unchanged)
+    {
         var request = new ImportRequest { Kind = PartKind.Crystal, Name = "list.csv", Date = new DateOnly(2026, 3, 1) };
         ImportReport report = CatalogImport.Run(db, File.OpenRead(list), request, null, CancellationToken.None).Value;
-        return report.Added == added && report.Unchanged == unchanged
-            ? Stopwatch.GetElapsedTime(start)
-            : throw new InvalidOperationException(
+        if (report.Added != added || report.Unchanged != unchanged)
+        {
+            throw new InvalidOperationException(
                 $"{report.Added} added, {report.Unchanged} unchanged, {report.Rejected} rejected: "
                 + $"{report.Rejections.FirstOrDefault()}");
+        }
     }
 
     private static long PeakBytes()
@@ -70,9 +95,8 @@ internal static class ImportTable
         return self.PeakWorkingSet64;
     }
 
-    private static TimeSpan ReadStrings(string list)
+    private static void ReadStrings(string list)
     {
-        long start = Stopwatch.GetTimestamp();
         long letters = 0;
         using (CsvReader reader = CsvReader.FromFile(list))
         {
@@ -85,26 +109,27 @@ internal static class ImportTable
             }
         }
 
-        return letters > 0 ? Stopwatch.GetElapsedTime(start) : throw new InvalidOperationException("Nothing was read.");
+        if (letters == 0)
+        {
+            throw new InvalidOperationException("Nothing was read.");
+        }
     }
 
     // Only the inserting is timed, not the reading of the documents that are inserted.
-    private static TimeSpan InsertSame(string db, string target)
+    private static (TimeSpan Time, TimeSpan Work) InsertSame(string db, string target)
     {
-        TimeSpan spent = TimeSpan.Zero;
+        (TimeSpan spent, TimeSpan worked) = (TimeSpan.Zero, TimeSpan.Zero);
+        void Add((TimeSpan Time, TimeSpan Work) piece) => (spent, worked) = (spent + piece.Time, worked + piece.Work);
         using var source = new LiteDatabase(Connection(db));
         var same = new LiteDatabase(Connection(target));
         ILiteCollection<BsonDocument> parts = same.GetCollection("parts");
         foreach (BsonDocument[] documents in source.GetCollection("parts").FindAll().Chunk(Chunk))
         {
-            long start = Stopwatch.GetTimestamp();
-            parts.InsertBulk(documents, documents.Length);
-            spent += Stopwatch.GetElapsedTime(start);
+            Add(Timed(() => parts.InsertBulk(documents, documents.Length)));
         }
 
-        long closing = Stopwatch.GetTimestamp();
-        same.Dispose();
-        return spent + Stopwatch.GetElapsedTime(closing);
+        Add(Timed(same.Dispose));
+        return (spent, worked);
     }
 
     private static ConnectionString Connection(string path) => new() { Filename = path, Collation = new Collation("/Ordinal") };

@@ -3,11 +3,15 @@ namespace PartPick.Catalog.Fields;
 /// <summary>The figures of one part by their keys, in SI units: the form between parts and files.</summary>
 internal sealed class PartDraft
 {
-    private readonly Dictionary<string, double> _numbers = new(StringComparer.Ordinal);
-    private readonly Dictionary<string, string> _texts = new(StringComparer.Ordinal);
+    // Room for the figures of most parts, so that reading a list does not make the tables grow row by row.
+    private readonly Dictionary<string, double> _numbers = new(17, StringComparer.Ordinal);
+    private readonly Dictionary<string, string> _texts = new(11, StringComparer.Ordinal);
 
     /// <summary>The keys of the figures and texts that are there.</summary>
     public IEnumerable<string> Keys => _numbers.Keys.Concat(_texts.Keys);
+
+    /// <summary>Whether a crystal without a load is stated to be one for series resonance, not only left without a load.</summary>
+    public bool IsSeries { get; set; }
 
     public double? Number(string key) => _numbers.TryGetValue(key, out double value) ? value : null;
 
@@ -47,7 +51,7 @@ internal sealed class PartDraft
 
     public PartDraft Copy()
     {
-        var copy = new PartDraft();
+        var copy = new PartDraft { IsSeries = IsSeries };
         foreach (string key in Keys)
         {
             copy.Take(key, this);

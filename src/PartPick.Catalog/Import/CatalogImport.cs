@@ -1,3 +1,4 @@
+using System.Globalization;
 using PartPick.Values;
 
 namespace PartPick.Catalog.Import;
@@ -17,9 +18,8 @@ public static class CatalogImport
     {
         ArgumentNullException.ThrowIfNull(source);
         ArgumentNullException.ThrowIfNull(request);
-        using var text = SourceText.Of(source);
-        Func<double?> share = () => source.CanSeek && source.Length > 0 ? (double)source.Position / source.Length : null;
-        return Run(path, text, share, request, progress, stop);
+        using var origin = new ImportSource(source);
+        return Run(path, origin, request, progress, stop);
     }
 
     /// <summary>Imports a text that is already decoded.</summary>
@@ -32,8 +32,8 @@ public static class CatalogImport
     {
         ArgumentNullException.ThrowIfNull(source);
         ArgumentNullException.ThrowIfNull(request);
-        using var text = SourceText.Of(source);
-        return Run(path, text, () => null, request, null, stop);
+        using var origin = new ImportSource(source);
+        return Run(path, origin, request, null, stop);
     }
 
     /// <summary>Takes the last import back: its parts go, what it changed is as before, what was set by hand stays.</summary>
@@ -46,77 +46,41 @@ public static class CatalogImport
     });
 
     private static Result<ImportReport> Run(
-        string path,
-        SourceText text,
-        Func<double?> share,
-        ImportRequest request,
-        IProgress<ImportProgress>? progress,
-        CancellationToken stop)
+        string path, ImportSource source, ImportRequest request, IProgress<ImportProgress>? progress, CancellationToken stop)
     {
-        long start = TimeProvider.System.GetTimestamp();
         Result<List<ColumnWish>> wishes = Wishes(path, request);
         if (!wishes.IsOk)
         {
             return Result.Fail<ImportReport>(wishes.Problem);
         }
 
-        Result<FileLayout> found = FileLayout.Find(text.Reader, request.Name, request.Kind, wishes.Value);
-        if (!found.IsOk)
+        IReadOnlyList<string[]>? rows = null;
+        while (true)
         {
-            return Result.Fail<ImportReport>(found.Problem);
-        }
-
-        FileLayout layout = found.Value;
-        var options = new ImportOptions
-        {
-            Notation = request.DecimalSign switch
+            Result<FileLayout> layout = FileLayout.Find(source.Text.Reader, request.Name, request.Kind, wishes.Value);
+            if (!layout.IsOk)
             {
-                "comma" => NumberNotation.Comma,
-                "point" => NumberNotation.Point,
-                _ => NumberNotation.Unknown,
-            },
-            Currency = request.Currency,
-            Supplier = request.Supplier,
-        };
-        ColumnUse[] uses = new ColumnProposal(request.Kind, layout.Sample, options).For(layout.Header, wishes.Value);
-        if (!uses.Any(use => use.Field is "id" or "supplierPart"))
-        {
-            return Result.Fail<ImportReport>(
-                request.Name, "has no column with a supplier's number or an id", "such a column, or --column HEADER=supplierPart");
-        }
-
-        return CatalogChange.Make(path, file =>
-        {
-            using var run = new ImportRun(file, request, layout, uses);
-            var rows = new CsvRows(text.Reader, layout.Delimiter, layout.Head);
-            run.Take(
-                rows, layout.HeaderLine, layout.Header.Length,
-                count => progress?.Report(new ImportProgress(count, share(), TimeProvider.System.GetElapsedTime(start))), stop);
-            run.Close();
-            if (request.Map is { } name && !request.DryRun && file.ReadMap(name) is null)
-            {
-                file.WriteMap(name, ColumnMapText.Write(request.Kind, uses));
+                return Result.Fail<ImportReport>(layout.Problem);
             }
 
-            var report = new ImportReport
+            var attempt = new ImportAttempt(request, layout.Value, wishes.Value, rows ?? layout.Value.Sample);
+            Result<ImportReport> result = attempt.Make(path, source, progress, stop);
+            if (attempt.Contradicted is not { } contradicted)
             {
-                Read = run.Read,
-                Added = run.Added,
-                Updated = run.Updated,
-                Unchanged = run.Unchanged,
-                Rejected = run.Rejected,
-                Columns = [.. uses.Select(use => new ImportColumn(
-                    CellText.Harmless(use.Header), use.Field, use.Power == ColumnUse.NoPlainNumbers ? "" : use.Unit, use.Why))],
-                Rejections = run.Listed,
-                RejectedFile = run.PublishRejected(),
-                Encoding = text.EncodingName,
-                Delimiter = layout.Delimiter,
-                HeaderLine = layout.HeaderLine,
-                DryRun = request.DryRun,
-                Elapsed = TimeProvider.System.GetElapsedTime(start),
-            };
-            return (Result.Ok(report), !request.DryRun && (run.Added + run.Updated > 0 || request.Map is not null));
-        });
+                return result;
+            }
+
+            // A number further down shows another decimal sign than was taken: all again, with what it shows.
+            if (!source.TryRewind())
+            {
+                return Result.Fail<ImportReport>(
+                    string.Create(CultureInfo.InvariantCulture, $"{request.Name} line {contradicted.Line}, column {contradicted.Column}"),
+                    "shows another decimal sign than the rows above it, and what is piped cannot be read again",
+                    "--decimal point or comma");
+            }
+
+            rows = attempt.Rows;
+        }
     }
 
     private static Result<List<ColumnWish>> Wishes(string path, ImportRequest request)

@@ -14,7 +14,9 @@ internal static class ColumnMapText
         ["kind"] = kind.Word(),
         ["columns"] = new JsonArray([.. uses.Select(use => (JsonNode)new JsonObject
         {
-            ["header"] = use.Header, ["field"] = use.Field, ["unit"] = use.Power == ColumnUse.NoPlainNumbers ? "" : use.Unit,
+            ["header"] = use.Header, ["field"] = use.Field,
+            ["unit"] = use.Field is "price" ? PriceColumns.Written(use)
+                : use.Power == ColumnUse.NoPlainNumbers ? "" : use.Unit,
         })]),
     }.ToJsonString(Plain);
 

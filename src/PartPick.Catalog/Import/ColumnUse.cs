@@ -30,6 +30,24 @@ internal sealed record ColumnUse
     /// <summary>The quantity from which on a price holds.</summary>
     public int Quantity { get; init; } = 1;
 
+    /// <summary>The column with the quantity from which on the price of a row holds; null where <see cref="Quantity"/> is it.</summary>
+    public int? QuantityColumn { get; init; }
+
+    /// <summary>Whether header or user say the quantity.</summary>
+    public bool IsQuantityStated { get; init; }
+
+    /// <summary>For how many pieces together the price is.</summary>
+    public int Per { get; init; } = 1;
+
+    /// <summary>The column that says for how many; null where <see cref="Per"/> does.</summary>
+    public int? PerColumn { get; init; }
+
+    /// <summary>Whether the price may be that of one piece or of <see cref="Quantity"/> together.</summary>
+    public bool IsPerOpen { get; init; }
+
+    /// <summary>Whether neither header nor user have said what the column is, so that its cells may.</summary>
+    public bool IsUnnamed { get; init; }
+
     /// <summary>The currency of prices that name none.</summary>
     public string? Currency { get; init; }
 

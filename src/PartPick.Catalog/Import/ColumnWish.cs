@@ -4,4 +4,8 @@ namespace PartPick.Catalog.Import;
 /// <param name="Header">The cell of the header.</param>
 /// <param name="Field">The field; null to leave the column out.</param>
 /// <param name="Unit">The unit of numbers without one; empty to find it from header and cells.</param>
-public sealed record ColumnWish(string Header, string? Field, string Unit);
+public sealed record ColumnWish(string Header, string? Field, string Unit)
+{
+    /// <summary>Whether it is of the column with a header.</summary>
+    internal bool IsOf(string header) => string.Equals(Header.Trim(), header.Trim(), StringComparison.OrdinalIgnoreCase);
+}

@@ -5,9 +5,14 @@ namespace PartPick.Catalog.Import;
 /// <summary>How surely a header names a field.</summary>
 /// <param name="Column">The place of the column.</param>
 /// <param name="Field">The field.</param>
-/// <param name="Score">Greater is surer: 90 and more for the whole name, 50 and more for a part of it.</param>
+/// <param name="Score">Greater is surer: 85 and more for the whole name, less for a part of it or for words cut short.</param>
 internal readonly record struct FieldMatch(int Column, string Field, double Score)
 {
+    /// <summary>From here on a header is the whole name of a field.</summary>
+    public const double Whole = 85;
+
+    private const double Compound = 0.8;
+
     /// <summary>All fields that a header may name.</summary>
     public static IEnumerable<FieldMatch> Of(PartKind kind, int column, HeaderCell header)
     {
@@ -20,34 +25,121 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
             }
         }
 
-        foreach ((string field, string[] phrases) in Trade.Of(kind))
+        IReadOnlySet<string> known = TradeWords.Known(kind);
+        HeaderCell[] alternatives = [.. header.Alternatives()];
+        foreach (TradeWords words in TradeWords.Of(kind))
         {
-            double best = 0;
-            for (int i = 0; i < phrases.Length; i++)
+            double best = Rate(header, words, known);
+            foreach (HeaderCell alternative in alternatives)
             {
-                best = Math.Max(best, Rate(header, phrases[i]) - (i * 0.1));
+                best = Math.Max(best, Rate(alternative, words, known) - 2);
             }
 
             if (best > 40)
             {
-                yield return new FieldMatch(column, field, best);
+                yield return new FieldMatch(column, words.Field, best);
             }
         }
     }
 
-    private static double Rate(HeaderCell header, string phrase)
+    private static double Rate(HeaderCell header, TradeWords words, IReadOnlySet<string> known)
     {
-        if (header.Name == phrase)
+        bool other = words.IsOther(header);
+        double best = 0;
+        foreach ((TradePhrase phrase, int place) in words.Phrases)
+        {
+            double rate = Rate(header, phrase, other, words.IsText, known);
+            best = rate > 0 ? Math.Max(best, rate - Math.Min(place * 0.1, 5)) : best;
+        }
+
+        return best;
+    }
+
+    private static double Rate(HeaderCell header, TradePhrase phrase, bool other, bool texts, IReadOnlySet<string> known)
+    {
+        if (header.Plain == phrase.Text)
         {
             return 100;
         }
 
-        if (header.BareName == phrase)
+        if (other)
         {
-            return 90;
+            return 0;
         }
 
-        bool inside = phrase.Length >= 4 && $" {header.Name} ".Contains($" {phrase} ", StringComparison.Ordinal);
-        return inside ? 50 + (phrase.Length * 0.5) : 0;
+        if (header.BareName == phrase.Text)
+        {
+            return 93;
+        }
+
+        return phrase.IsWhole ? 0 : Math.Max(
+            Partly(header.Telling, phrase.Words, texts, known), Partly(header.All, phrase.Words, texts, known));
+    }
+
+    // Every word of the phrase has to be found, uncut where the cells are texts, which prove nothing; words of the header that are left
+    // over make it less sure.
+    private static double Partly(string[] header, string[] phrase, bool texts, IReadOnlySet<string> known)
+    {
+        if (header.Length < phrase.Length || phrase.Sum(word => word.Length) < 3)
+        {
+            return 0;
+        }
+
+        double likeness = 1;
+        bool sure = false;
+        var used = new bool[header.Length];
+        foreach (string word in phrase)
+        {
+            (double best, int at) = (0, -1);
+            for (int i = 0; i < header.Length; i++)
+            {
+                double like = used[i] ? 0 : Likeness(header[i], word, header.Length > 1, known.Contains(header[i]));
+                (best, at) = like > best ? (like, i) : (best, at);
+            }
+
+            if (at < 0 || (texts && best is < 1 and not Compound && header[at].Length < 5))
+            {
+                return 0;
+            }
+
+            sure |= best >= Compound && header[at].Length > 2;
+
+            used[at] = true;
+            likeness *= best;
+        }
+
+        // One or two letters say something only beside a word that does.
+        if (!sure && header.Length > 1)
+        {
+            return 0;
+        }
+
+        int found = header.Where((_, i) => used[i]).Sum(word => word.Length);
+        int all = header.Sum(word => word.Length);
+        return found == all ? 60 + (25 * likeness) : 42 + (20 * likeness * found / all);
+    }
+
+    // The same word, one cut short, or one compound with it: "freq" and "frequency", "nennfrequenz" and "frequenz".
+    private static double Likeness(string header, string word, bool several, bool isKnown)
+    {
+        if (header == word)
+        {
+            return 1;
+        }
+
+        if (header.Length == 1)
+        {
+            return several && word.Length >= 6 && word[0] == header[0] ? 0.5 : 0;
+        }
+
+        // A word that means something by itself is not cut short: a part is no partial.
+        if (word.StartsWith(header, StringComparison.Ordinal))
+        {
+            return isKnown ? 0 : header.Length > 2 ? 0.9 : several && word.Length >= 6 ? 0.4 : 0;
+        }
+
+        return word.Length >= 6 && (header.EndsWith(word, StringComparison.Ordinal) || header.StartsWith(word, StringComparison.Ordinal))
+            ? Compound
+            : 0;
     }
 }

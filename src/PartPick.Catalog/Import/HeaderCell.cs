@@ -1,88 +1,109 @@
-using System.Globalization;
 using System.Text.RegularExpressions;
 
 namespace PartPick.Catalog.Import;
 
 /// <summary>The cell of a header taken apart: what it names, the unit it states, and minimum, typical or maximum.</summary>
 /// <param name="Text">The cell as it stands.</param>
-/// <param name="Name">Its words without the unit.</param>
+/// <param name="Name">Its words without the unit and without a condition such as "at 25 °C".</param>
 /// <param name="Unit">The unit in brackets or at the end; empty for none.</param>
 /// <param name="Basis">What its figures rest on; stated where it says nothing.</param>
 internal sealed partial record HeaderCell(string Text, string Name, string Unit, Basis Basis)
 {
-    private static readonly string[] Units =
-    [
-        "pF", "nF", "uF", "µF", "μF", "fF", "aF", "F", "Hz", "kHz", "KHz", "khz", "MHz", "mhz", "MHZ", "KHZ", "GHz", "Ohm", "Ohms", "ohm",
-        "ohms", "OHM", "Ω", "kOhm", "kΩ", "k", "MOhm", "MΩ", "mΩ", "ppm", "PPM", "ppb", "%", "µW", "uW", "μW", "mW", "W",
-        "V", "VDC", "Volts", "mV", "A", "mA", "°C", "C", "degC", "pf", "PF", "nf", "uf", "UF", "NF", "ppm/K", "ppm/°C",
-        "uw", "mw", "UW", "MW", "ppm/K2", "in ppm",
-        "ppm/year", "pcs", "EUR", "USD", "GBP", "CHF", "SEK", "JPY", "CNY", "€", "$", "£",
-    ];
-
-    private static readonly HashSet<string> Noise = new(StringComparer.Ordinal)
+    private static readonly HashSet<string> Highest = new(StringComparer.Ordinal)
     {
-        "max", "maximum", "min", "minimum", "typ", "typical", "nominal", "nom", "rated", "at", "25c", "25", "in", "the", "of",
-        "value", "all",
+        "max", "maximum", "maxi", "maks", "maximal", "maximale", "maximo", "maxima", "massimo", "massima", "maksimi", "最大", "макс",
     };
 
+    private static readonly HashSet<string> Lowest = new(StringComparer.Ordinal)
+    {
+        "min", "minimum", "mini", "minimal", "minimale", "minimo", "minima", "minimi", "最小", "мин",
+    };
+
+    private static readonly HashSet<string> Middle = new(StringComparer.Ordinal)
+    {
+        "typ", "typical", "typisch", "typique", "tipico", "tipica", "typisk", "typowe", "typowa", "典型", "тип",
+    };
+
+    private static readonly HashSet<string> Noise =
+    [
+        .. Highest, .. Lowest, .. Middle, "nominal", "nom", "rated", "value", "valu", "all", "25c", "25", "25degc",
+    ];
+
+    /// <summary>The words of the name, vowels with dots as they are without.</summary>
+    public string Plain { get; } = TradePhrase.Folded(Name);
+
     /// <summary>The words of the name without those that only qualify it.</summary>
-    public string BareName { get; } = string.Join(' ', Name.Split(' ').Where(word => !Noise.Contains(word)));
+    public string BareName { get; } =
+        string.Join(' ', TradePhrase.Folded(Name).Split(' ').Where(word => !Noise.Contains(word)));
+
+    /// <summary>The words that tell what the column is.</summary>
+    public string[] Telling { get; } =
+        TradePhrase.Telling(string.Join(' ', TradePhrase.Folded(Name).Split(' ').Where(word => !Noise.Contains(word))));
+
+    /// <summary>The same with those that only qualify it.</summary>
+    public string[] All { get; } = TradePhrase.Telling(TradePhrase.Folded(Name));
+
+    /// <summary>The names that a header gives side by side, "Fréquence / Frequency"; none where it gives one.</summary>
+    public IEnumerable<HeaderCell> Alternatives()
+    {
+        string[] pieces = Text.Split(['/', '|', '\n', '='], StringSplitOptions.TrimEntries | StringSplitOptions.RemoveEmptyEntries);
+        return pieces.Length < 2
+            ? []
+            : pieces.Select(Of).Where(cell => cell.Name.Length > 2).Select(cell => cell.Unit.Length > 0 ? cell : cell with { Unit = Unit });
+    }
 
     /// <summary>Takes a cell apart.</summary>
     public static HeaderCell Of(string text)
     {
         string trimmed = text.Trim().Trim('\uFEFF');
         string unit = "";
-        string rest = Brackets().Replace(trimmed, match =>
+        string rest = Condition().Replace(trimmed.StartsWith('@') ? "at " + trimmed[1..] : trimmed, " ");
+        rest = Brackets().Replace(rest, match =>
         {
-            string inner = match.Groups[1].Value.Trim().TrimStart('±').Trim();
-            if (unit.Length == 0 && IsUnit(inner))
+            string inner = match.Groups[1].Value.Trim();
+            string bare = Sign().Replace(inner, "").Trim();
+            if (unit.Length == 0 && HeaderUnit.IsUnit(bare))
             {
-                unit = inner;
+                unit = bare;
                 return " ";
             }
 
             return " " + inner + " ";
         });
-        if (unit.Length == 0)
+        if (unit.Length == 0 && Tail().Match(rest) is { Success: true } tail && HeaderUnit.IsUnit(tail.Groups[2].Value)
+            && (tail.Groups[2].Length > 1 || tail.Groups[1].Value.Trim() is not "" || tail.Groups[2].Value is "Ω" or "%"))
         {
-            string[] words = rest.Split([' ', '_', ',', '/', '-'], StringSplitOptions.RemoveEmptyEntries);
-            if (words.Length > 1 && IsUnit(words[^1]) && words[^1].Length > 1)
-            {
-                unit = words[^1];
-                rest = rest[..rest.LastIndexOf(unit, StringComparison.Ordinal)];
-            }
+            unit = tail.Groups[2].Value;
+            rest = rest[..tail.Index];
         }
 
-        string name = Trade.Words(rest);
+        string name = Trade.Words(Apostrophe().Replace(rest, ""));
         string[] all = name.Split(' ');
-        Basis basis = all.Contains("max") || all.Contains("maximum") ? Basis.Maximum
-            : all.Contains("typ") || all.Contains("typical") ? Basis.Typical
-            : all.Contains("min") || all.Contains("minimum") ? Basis.Minimum : Basis.Stated;
-        return new HeaderCell(trimmed, name, unit.StartsWith("in ", StringComparison.Ordinal) ? unit[3..] : unit, basis);
+        Basis basis = all.Any(Highest.Contains) ? Basis.Maximum
+            : all.Any(Middle.Contains) ? Basis.Typical
+            : all.Any(Lowest.Contains) ? Basis.Minimum : Basis.Stated;
+        return new HeaderCell(trimmed, name, unit, basis);
     }
 
-    /// <summary>The quantity of a price column: 100 of "Qty 100 price", "100+", "Price @ 100"; null where it is none.</summary>
-    public int? PriceQuantity()
-    {
-        Match quantity = WholeNumber().Match(Text);
-        string[] words = Trade.Words(Text).Split(' ');
-        bool isPrice = Text.Contains('+', StringComparison.Ordinal)
-            || words.Any(word => word is "price" or "preis" or "prix" or "cost" or "pc" or "pcs" or "each" or "ab" or "vk"
-                or "ea" or "stk" or "stuck");
-        bool several = WholeNumber().Count(Text) is 1 or 2;
-        return quantity.Success && isPrice && several
-            && int.TryParse(quantity.Value.Replace(",", "", StringComparison.Ordinal).Replace(".", "", StringComparison.Ordinal),
-                NumberStyles.None, CultureInfo.InvariantCulture, out int count) && count >= 1
-                ? count
-                : null;
-    }
-
-    private static bool IsUnit(string text) => Units.Contains(text, StringComparer.Ordinal);
-
-    [GeneratedRegex(@"[\(\[\{]([^\)\]\}]*)[\)\]\}]")]
+    [GeneratedRegex(@"[\(\[\{（]([^\)\]\}）]*)[\)\]\}）]")]
     private static partial Regex Brackets();
 
-    [GeneratedRegex(@"\d{1,3}(?:[.,]\d{3})+|\d+")]
-    private static partial Regex WholeNumber();
+    // "at 25 °C", "à 25°C", "@ IC", "bei +25 °C", "(25 °C)", "(IC=2mA)": under which condition the figures hold.
+    [GeneratedRegex(
+        @"(?<=.)@.*$|\([^)]*=[^)]*\)|(?:\b(?:at|à|a|bei|bij|ved|vid|w|przy|pri|при|la))"
+            + @"\s*\+?\s*25\s*(?:[°º]\s*C?|deg\.?\s*C|C\b|℃)|\(\s*\+?25\s*(?:[°º]\s*C|C|℃)\s*\)",
+        RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
+    private static partial Regex Condition();
+
+    [GeneratedRegex(@"^(?:±|\+/?-)|\bin\b|\ben\b|^\s*je\b", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
+    private static partial Regex Sign();
+
+    // The last word, where it stands alone: behind "/" or "in" also a unit of one letter.
+    [GeneratedRegex(
+        @"(?:[\s_,\-:;\.]|(?<=\w))(\s*(?:/|\bin\b|\ben\b|,)\s*)?(?<=[\s_,/\-:;\.±])±?([^\s_,\-:;±]+)\s*$",
+        RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
+    private static partial Regex Tail();
+
+    [GeneratedRegex(@"(?<=\w)['’´`](?=\w)")]
+    private static partial Regex Apostrophe();
 }

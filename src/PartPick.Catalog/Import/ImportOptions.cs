@@ -9,6 +9,15 @@ internal sealed record ImportOptions
     /// <summary>The currency of prices that name none.</summary>
     public string? Currency { get; init; }
 
-    /// <summary>The supplier of rows that name none.</summary>
-    public string? Supplier { get; init; }
+    /// <summary>What a request states.</summary>
+    public static ImportOptions Of(ImportRequest request) => new()
+    {
+        Notation = request.DecimalSign switch
+        {
+            "comma" => NumberNotation.Comma,
+            "point" => NumberNotation.Point,
+            _ => NumberNotation.Unknown,
+        },
+        Currency = request.Currency,
+    };
 }

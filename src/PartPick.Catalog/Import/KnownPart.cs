@@ -1,22 +1,31 @@
 namespace PartPick.Catalog.Import;
 
-/// <summary>What an import needs to know of a part that is already there.</summary>
-internal sealed class KnownPart(string id, PartKind kind, string? supplier, string? supplierPart, UInt128 digest)
+/// <summary>
+/// What an import needs to know of a part that is there, small enough for millions: id and supplier's number as digests only.
+/// </summary>
+internal struct KnownPart
 {
-    public string Id { get; } = id;
+    /// <summary>The digest of its id.</summary>
+    public UInt128 Id;
 
-    public PartKind Kind { get; } = kind;
-
-    public string? Supplier { get; } = supplier;
-
-    public string? SupplierPart { get; } = supplierPart;
+    /// <summary>The digest of its supplier's number; zero for none.</summary>
+    public UInt128 Number;
 
     /// <summary>The digest of its row; zero for none.</summary>
-    public UInt128 Digest { get; set; } = digest;
+    public UInt128 Row;
 
     /// <summary>The line of this import that it was met on; zero while it was not.</summary>
-    public long MetOn { get; set; }
+    public uint MetOn;
 
-    /// <summary>Another part with the same supplier's number.</summary>
-    public KnownPart? Next { get; set; }
+    /// <summary>The place of its supplier in the list of suppliers; -1 for none.</summary>
+    public int Supplier;
+
+    /// <summary>The next part in the same slot of the ids; -1 for none.</summary>
+    public int NextById;
+
+    /// <summary>The next part in the same slot of the numbers; -1 for none.</summary>
+    public int NextByNumber;
+
+    /// <summary>Its kind.</summary>
+    public PartKind Kind;
 }

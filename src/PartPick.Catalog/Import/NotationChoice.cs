@@ -20,6 +20,13 @@ internal static class NotationChoice
         return point == comma ? NumberNotation.Unknown : point ? NumberNotation.Point : NumberNotation.Comma;
     }
 
+    /// <summary>Whether some cells show a decimal point and others a decimal comma.</summary>
+    public static bool IsMixed(IEnumerable<string> numbers)
+    {
+        NumberEvidence[] all = [.. numbers.Select(CellNumber.Weigh)];
+        return all.Contains(NumberEvidence.Point) && all.Contains(NumberEvidence.Comma);
+    }
+
     /// <summary>Whether the cells have numbers that can be read in two ways, and with which sign.</summary>
     public static (bool Comma, bool Point) Open(IEnumerable<string> numbers)
     {

@@ -7,8 +7,9 @@ using PartPick.Values;
 namespace PartPick.Catalog.Import;
 
 /// <summary>
-/// Fills in what a part cannot be without and a list does not state, and marks it assumed (common practice, from memory): the cut
-/// and overtone of a crystal, the tolerance of a capacitor or resistor, a description.
+/// Fills in what a part cannot be without and a list does not state, and marks it assumed (common practice, from memory): the cut,
+/// overtone and series resonance of a crystal, the tolerance of a capacitor or resistor, the gain of a transistor between its limits,
+/// a description.
 /// </summary>
 internal static class RowCompletion
 {
@@ -26,12 +27,24 @@ internal static class RowCompletion
                     Assume(draft, "overtone", 1);
                 }
 
+                // A list that does not state the load may leave it out of a crystal that has one: taken as series, and said.
+                if (!draft.Has("load") && !draft.IsSeries)
+                {
+                    Mark(draft, "load");
+                }
+
                 break;
             case PartKind.Capacitor when !draft.Has("tolerance") && !draft.Has("toleranceAbsolute"):
                 Assume(draft, "tolerance", draft.Text("dielectric")?.ToUpperInvariant() is "C0G" or "NP0" or "NPO" or "COG" ? 0.05 : 0.2);
                 break;
             case PartKind.Resistor:
                 Assume(draft, "tolerance", 0.05);
+                break;
+            case PartKind.Transistor when draft.Number("betaMin") is { } least && draft.Number("betaMax") is { } most:
+                Assume(draft, "beta", Math.Round(Math.Sqrt(least * most)));
+                break;
+            case PartKind.Transistor when draft.Number("betaMin") is { } least:
+                Assume(draft, "beta", least * 2);
                 break;
         }
 
@@ -44,7 +57,9 @@ internal static class RowCompletion
     /// <summary>An id from the supplier's number: without spaces, and short.</summary>
     public static string IdOf(string supplierPart)
     {
-        string id = string.Join('-', supplierPart.Split(default(char[]), StringSplitOptions.RemoveEmptyEntries));
+        string id = !supplierPart.Any(char.IsWhiteSpace)
+            ? supplierPart
+            : string.Join('-', supplierPart.Split(default(char[]), StringSplitOptions.RemoveEmptyEntries));
         if (id.Length <= LongestId)
         {
             return id;
@@ -74,6 +89,11 @@ internal static class RowCompletion
     private static void Mark(PartDraft draft, string key)
     {
         string marks = draft.Text("basis") ?? "";
+        if (marks.Split(';').Any(mark => mark.StartsWith(key + "=", StringComparison.Ordinal)))
+        {
+            return;
+        }
+
         draft.Set("basis", $"{marks}{(marks.Length > 0 ? ";" : "")}{key}=assumed");
     }
 

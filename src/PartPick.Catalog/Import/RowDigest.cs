@@ -11,6 +11,15 @@ internal sealed class RowDigest(string reading) : IDisposable
     private readonly byte[] _seed = SHA256.HashData(Encoding.UTF8.GetBytes(reading));
     private readonly IncrementalHash _hash = IncrementalHash.CreateHash(HashAlgorithmName.SHA256);
 
+    /// <summary>The digests of rows of a file whose columns are used in a certain way.</summary>
+    public static RowDigest For(ImportRequest request, ColumnUse[] uses)
+    {
+        string columns = string.Join('\n', uses.Select(use =>
+            $"{use.Index}\t{use.Field}\t{use.Power}\t{use.Notation}\t"
+            + $"{use.Quantity}\t{use.QuantityColumn}\t{use.Per}\t{use.PerColumn}\t{use.Currency}\t{use.Basis}\t{use.Exact}"));
+        return new RowDigest($"{request.Kind.Word()}\n{request.Supplier}\n{columns}");
+    }
+
     public UInt128 Of(ReadOnlySpan<char> row)
     {
         Span<byte> digest = stackalloc byte[32];

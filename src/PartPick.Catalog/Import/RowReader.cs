@@ -1,4 +1,3 @@
-using System.Globalization;
 using PartPick.Catalog.Fields;
 using PartPick.Values;
 
@@ -13,8 +12,9 @@ internal sealed class RowReader
     private readonly ColumnUse[] _uses;
     private readonly Dictionary<string, PartField> _fields;
     private readonly Dictionary<string, Result<double>>[] _remembered;
-    private readonly Dictionary<(int Use, string Cell), (decimal? Price, string? Currency)> _prices = [];
+    private readonly RowPrices _prices;
     private readonly Dictionary<string, (double Lowest, double Highest)?> _ranges = new(StringComparer.Ordinal);
+    private readonly SortedDictionary<string, string> _marks = new(StringComparer.Ordinal);
 
     public RowReader(PartKind kind, ColumnUse[] columns)
     {
@@ -22,6 +22,7 @@ internal sealed class RowReader
         _uses = [.. columns.Where(use => use.Field is not null)];
         _fields = PartShape.Of(kind).Fields.ToDictionary(field => field.Key, StringComparer.Ordinal);
         _remembered = [.. _uses.Select(_ => new Dictionary<string, Result<double>>(StringComparer.Ordinal))];
+        _prices = new RowPrices(_uses);
         Keys = [.. _uses.SelectMany(KeysOf).Distinct()];
     }
 
@@ -32,55 +33,41 @@ internal sealed class RowReader
     public (PartDraft? Draft, RowRejection? Rejection) Read(IReadOnlyList<string> cells, long line)
     {
         var draft = new PartDraft();
-        var prices = new SortedDictionary<int, decimal>();
-        var marks = new SortedDictionary<string, string>(StringComparer.Ordinal);
-        string? currency = null;
+        _prices.Begin();
+        _marks.Clear();
         for (int i = 0; i < _uses.Length; i++)
         {
             ColumnUse use = _uses[i];
-            if (use.Index >= cells.Count)
+            if (use.Index < cells.Count
+                && (use.Exact ? ReadExact(use, cells[use.Index], draft) : ReadCell(i, cells, draft)) is { } wrong)
             {
-                continue;
-            }
-
-            string raw = cells[use.Index];
-            string? wrong = use.Exact ? ReadExact(use, raw, draft) : ReadCell(i, raw, draft, prices, marks, ref currency);
-            if (wrong is not null)
-            {
-                return (null, new RowRejection(line, use.Header, CellText.Harmless(raw.Length > 100 ? raw[..100] : raw), wrong));
+                return (null, Reject(line, use, cells, wrong));
             }
         }
 
-        if (prices.Count > 0)
+        if (_prices.Put(draft) is { } fault)
         {
-            if (currency is null && !draft.Has("currency"))
-            {
-                ColumnUse first = Array.Find(_uses, use => use.Field is "price" or "prices")!;
-                return (null, new RowRejection(
-                    line, first.Header, CellText.Harmless(cells[first.Index]),
-                    "names no currency; fits a sign beside the price, a column of currencies, or --currency EUR"));
-            }
-
-            IEnumerable<string> steps = prices.Select(
-                pair => string.Create(CultureInfo.InvariantCulture, $"{pair.Key}:{pair.Value}"));
-            draft.Set("prices", string.Join(';', steps));
-            if (!draft.Has("currency"))
-            {
-                draft.Set("currency", currency);
-            }
+            return (null, Reject(line, fault.Use, cells, fault.Wrong));
         }
 
-        if (marks.Count > 0 && !draft.Has("basis"))
+        if (_marks.Count > 0 && !draft.Has("basis"))
         {
-            draft.Set("basis", string.Join(';', marks.Select(mark => $"{mark.Key}={mark.Value}")));
+            draft.Set("basis", string.Join(';', _marks.Select(mark => $"{mark.Key}={mark.Value}")));
         }
 
         return (draft, null);
     }
 
+    private static RowRejection Reject(long line, ColumnUse use, IReadOnlyList<string> cells, string wrong)
+    {
+        string raw = use.Index < cells.Count ? cells[use.Index] : "";
+        return new RowRejection(line, use.Header, CellText.Harmless(raw.Length > 100 ? raw[..100] : raw), wrong);
+    }
+
     private static IEnumerable<string> KeysOf(ColumnUse use) => use.Field switch
     {
         "price" or "prices" => ["prices", "currency"],
+        "priceQuantity" or "priceFor" => [],
         "temperature" => ["temperatureMin", "temperatureMax"],
         "toleranceAny" => ["tolerance", "toleranceAbsolute"],
         { } field => use.Basis != Basis.Stated ? [field, "basis"] : [field],
@@ -90,19 +77,14 @@ internal sealed class RowReader
     private string? ReadExact(ColumnUse use, string raw, PartDraft draft)
     {
         PartField field = _fields[use.Field!];
+        draft.IsSeries |= use.Field == "load";
         return field.Read(field.Dimension is null ? CellText.Harmless(raw) : raw, draft, () => "") is { } problem ? Say(problem) : null;
     }
 
-    private string? ReadCell(
-        int i,
-        string raw,
-        PartDraft draft,
-        SortedDictionary<int, decimal> prices,
-        SortedDictionary<string, string> marks,
-        ref string? currency)
+    private string? ReadCell(int i, IReadOnlyList<string> row, PartDraft draft)
     {
         ColumnUse use = _uses[i];
-        string cell = CellText.Plain(raw);
+        string cell = CellText.Plain(row[use.Index]);
         if (cell.Length == 0)
         {
             return null;
@@ -111,56 +93,23 @@ internal sealed class RowReader
         switch (use.Field)
         {
             case "price":
-                if (!_prices.TryGetValue((i, cell), out (decimal? Price, string? Currency) known))
-                {
-                    known = (PriceCells.Price(cell, use.Notation), PriceCells.CurrencyIn(cell) ?? use.Currency);
-                    if (_prices.Count < MostRemembered * 4)
-                    {
-                        _prices[(i, cell)] = known;
-                    }
-                }
-
-                if (known.Price is not { } price)
-                {
-                    return $"{Problem.Quote(cell)} is no price that can be read with certainty; fits a number such as 0.42";
-                }
-
-                prices[use.Quantity] = price;
-                return Agree(ref currency, known.Currency);
+                return _prices.Take(use, cell, row);
             case "prices":
-                if (PriceCells.List(cell, use.Notation) is not { } list)
-                {
-                    return $"{Problem.Quote(cell)} is no list of prices; fits quantity:price such as 1:0.42;10:0.31";
-                }
-
-                foreach (PriceBreak each in list)
-                {
-                    prices[each.Quantity] = each.UnitPrice;
-                }
-
-                return Agree(ref currency, PriceCells.CurrencyIn(cell) ?? use.Currency);
-            case "temperature":
-                if (!_ranges.TryGetValue(cell, out (double Lowest, double Highest)? extent))
-                {
-                    extent = TemperatureRange.Read(cell);
-                    if (_ranges.Count < MostRemembered)
-                    {
-                        _ranges[cell] = extent;
-                    }
-                }
-
-                if (extent is not { } range)
-                {
-                    return $"{Problem.Quote(cell)} is no temperature range; fits two temperatures such as -20 to 70 °C";
-                }
-
-                draft.Set("temperatureMin", range.Lowest);
-                draft.Set("temperatureMax", range.Highest);
+                return _prices.TakeList(use, cell);
+            case "priceQuantity" or "priceFor":
                 return null;
+            case "temperature":
+                return ReadRange(cell, draft);
             case "toleranceAny":
                 return ReadTolerance(use, cell, draft);
             case "cut" or "overtone":
                 return CrystalWords.Read(use.Field, cell, draft);
+            case "load" when CrystalWords.IsSeries(cell):
+                draft.IsSeries = true;
+                return null;
+            case "stages":
+                draft.Set("stages", (double?)ImportFields.Stages(cell));
+                return draft.Has("stages") ? null : $"{Problem.Quote(cell)} is no number of stages; fits 1 or 3, unbuffered or buffered";
             case "excluded":
                 draft.Set("excluded", cell.ToUpperInvariant() is "YES" or "TRUE" or "1" or "X" ? "yes" : null);
                 return null;
@@ -183,9 +132,30 @@ internal sealed class RowReader
         if (use.Basis != Basis.Stated
             && field.BasisKey is not ("stock" or "temperatureMin" or "temperatureMax" or "minimumOrder" or "multiple"))
         {
-            marks[field.BasisKey] = use.Basis switch { Basis.Minimum => "minimum", Basis.Typical => "typical", _ => "maximum" };
+            _marks[field.BasisKey] = use.Basis switch { Basis.Minimum => "minimum", Basis.Typical => "typical", _ => "maximum" };
         }
 
+        return null;
+    }
+
+    private string? ReadRange(string cell, PartDraft draft)
+    {
+        if (!_ranges.TryGetValue(cell, out (double Lowest, double Highest)? extent))
+        {
+            extent = TemperatureRange.Read(cell);
+            if (_ranges.Count < MostRemembered)
+            {
+                _ranges[cell] = extent;
+            }
+        }
+
+        if (extent is not { } range)
+        {
+            return $"{Problem.Quote(cell)} is no temperature range; fits two temperatures such as -20 to 70 °C";
+        }
+
+        draft.Set("temperatureMin", range.Lowest);
+        draft.Set("temperatureMax", range.Highest);
         return null;
     }
 
@@ -224,22 +194,6 @@ internal sealed class RowReader
         }
 
         draft.Set(tolerance.Absolute ? "toleranceAbsolute" : "tolerance", tolerance.Value);
-        return null;
-    }
-
-    private static string? Agree(ref string? currency, string? further)
-    {
-        if (further is null)
-        {
-            return null;
-        }
-
-        if (currency is not null && currency != further)
-        {
-            return $"is in {further}, other prices of the row in {currency}; fits one currency";
-        }
-
-        currency = further;
         return null;
     }
 

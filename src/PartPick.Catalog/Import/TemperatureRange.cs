@@ -9,7 +9,10 @@ internal static partial class TemperatureRange
     /// <summary>The lowest and the highest temperature, °C; null where the cell is no range.</summary>
     public static (double Lowest, double Highest)? Read(string cell)
     {
-        Match match = Form().Match(CellText.Bare(cell).Replace('\u2013', '-').Replace('\u2014', '-'));
+        string bare = CellText.Bare(cell).Replace('\u2013', '-').Replace('\u2014', '-')
+            .Replace("'C", "°C", StringComparison.OrdinalIgnoreCase)
+            .Trim('(', ')', '[', ']', ' ');
+        Match match = Form().Match(bare);
         if (!match.Success)
         {
             return null;
@@ -24,9 +27,9 @@ internal static partial class TemperatureRange
         double.Parse(text.Replace(',', '.').Replace(" ", "", StringComparison.Ordinal), NumberStyles.Float, CultureInfo.InvariantCulture);
 
     [GeneratedRegex(
-        @"^([+-]?\s?\d{1,3}(?:[.,]\d)?)\s*(?:[°º]?\s*C|deg\.?\s*C)?"
-            + @"\s*(?:~|to|bis|à|a|up to|\.{2,3}|…|/|÷|-|;|,|to)\s*"
-            + @"([+-]?\s?\d{1,3}(?:[.,]\d)?)\s*(?:[°º℃]?\s*C?|deg\.?\s*C)?$",
+        @"^(?:von|from|de|da|fra|från|van|od|от)?\s*([+-]?\s?\d{1,3}(?:[.,]\d)?)\s*(?:[°º]\s*C?|C|deg\.?\s*C|℃)?"
+            + @"\s*(?:~|～|〜|to|bis|à|a|up to|tot|till|til|do|до|hasta|ate|até|\.{2,3}|…|/|÷|-|;|,)\s*"
+            + @"([+-]?\s?\d{1,3}(?:[.,]\d)?)\s*(?:[°º]\s*C?|C|deg\.?\s*C|℃)?$",
         RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex Form();
 }

@@ -91,10 +91,13 @@ internal static class WrittenNumber
         text[at] is ' ' or '\'' or '’' && at > 0 && char.IsAsciiDigit(text[at - 1])
         && Digit(text, at + 1) && Digit(text, at + 2) && Digit(text, at + 3) && !Digit(text, at + 4);
 
+    // Groups of three, or, as in India, of two before the last three.
     private static bool IsGrouped(string number)
     {
         string[] groups = number.Split(',', '.', ' ', '\'', '’');
         return groups.Length == 1
-            || (groups[0].Length is 1 or 2 or 3 && groups.Skip(1).All(group => group.Length == 3));
+            || (groups[0].Length is 1 or 2 or 3 && groups.Skip(1).All(group => group.Length == 3))
+            || (groups.Length > 2 && groups[0].Length is 1 or 2 && groups[^1].Length == 3
+                && groups.Skip(1).SkipLast(1).All(group => group.Length == 2) && !number.Contains('.', StringComparison.Ordinal));
     }
 }

@@ -78,7 +78,8 @@ public class CellNumberPropertyTests
             }
 
             _ = TemperatureRange.Read(text);
-            _ = HeaderCell.Of(text).PriceQuantity();
+            _ = HeaderCell.Of(text);
+            _ = PriceHeader.Of(text);
         }
     }
 }

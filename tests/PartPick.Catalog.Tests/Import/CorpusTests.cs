@@ -77,11 +77,16 @@ public class CorpusTests
         foreach (string each in expected)
         {
             int sign = each.IndexOf('=', StringComparison.Ordinal);
-            (string key, string value) = (each[..sign], each[(sign + 1)..].Replace('_', ' '));
+            (string key, string value) = (each[..sign].Replace('_', ' '), each[(sign + 1)..].Replace('_', ' '));
             switch (key)
             {
                 case "price":
                     Assert.Equal(decimal.Parse(value, CultureInfo.InvariantCulture), part.Offer.Prices[0].UnitPrice);
+                    break;
+                case var _ when key.StartsWith("price@", StringComparison.Ordinal):
+                    int quantity = int.Parse(key[6..], CultureInfo.InvariantCulture);
+                    PriceBreak found = Assert.Single(part.Offer.Prices, step => step.Quantity == quantity);
+                    Assert.Equal(decimal.Parse(value, CultureInfo.InvariantCulture), found.UnitPrice);
                     break;
                 case "assumed":
                     Assert.Equal(Basis.Assumed, part.BasisOf(value));

@@ -1,0 +1,77 @@
+namespace PartPick.Catalog.Import;
+
+/// <summary>Gives each column the field that its header names most surely, each field to one column.</summary>
+/// <param name="kind">The kind of the parts.</param>
+/// <param name="sample">The first rows.</param>
+internal sealed class HeaderMatching(PartKind kind, ColumnSample sample)
+{
+    private readonly ColumnFit _fit = new(kind, sample);
+
+    /// <summary>The columns of a header; what the user stated goes first.</summary>
+    public ColumnUse[] Assign(HeaderCell[] cells, IReadOnlyList<ColumnWish> wishes)
+    {
+        var uses = new ColumnUse[cells.Length];
+        var taken = new HashSet<string>(StringComparer.Ordinal);
+        for (int i = 0; i < cells.Length; i++)
+        {
+            uses[i] = Begin(i, cells[i], wishes.FirstOrDefault(wish => wish.IsOf(cells[i].Text)));
+            if (uses[i].Field is { } field && !ImportFields.IsRepeated(field))
+            {
+                taken.Add(field);
+            }
+        }
+
+        PriceColumns.Mark(kind, cells, sample, uses);
+        IEnumerable<FieldMatch> matches = cells
+            .SelectMany((cell, i) => uses[i] is { Field: null, IsUnnamed: true } ? FieldMatch.Of(kind, i, cell) : [])
+            .OrderByDescending(match => match.Score).ThenBy(match => match.Column);
+        foreach (FieldMatch match in matches)
+        {
+            if (uses[match.Column].Field is not null || !_fit.Holds(match, cells[match.Column]))
+            {
+                continue;
+            }
+
+            if (match.Field == "price" && uses.Any(use => use.Field == "price" && use.Quantity > 1)
+                && uses.Any(use => use.Field == "price" && use.Quantity == 1))
+            {
+                uses[match.Column] = uses[match.Column] with
+                {
+                    IsUnnamed = false, Why = "the prices for each quantity are in other columns",
+                };
+            }
+            else if (taken.Add(match.Field))
+            {
+                uses[match.Column] = uses[match.Column] with { Field = match.Field, Why = "header" };
+            }
+            else if (uses[match.Column].IsUnnamed)
+            {
+                uses[match.Column] = uses[match.Column] with
+                {
+                    IsUnnamed = false,
+                    Why = $"{uses.First(use => use.Field == match.Field || match.Field == "price").Header} is {match.Field} more surely",
+                };
+            }
+        }
+
+        return uses;
+    }
+
+    private ColumnUse Begin(int index, HeaderCell cell, ColumnWish? wish)
+    {
+        var use = new ColumnUse { Index = index, Header = cell.Text, Basis = cell.Basis };
+        if (RejectedFile.IsOwnColumn(cell.Text))
+        {
+            return use with { Why = "added by an earlier import, not read" };
+        }
+
+        if (wish is null)
+        {
+            return use with { IsUnnamed = true, Why = "its header names no figure of " + kind.Word() };
+        }
+
+        return wish.Field is not "price"
+            ? use with { Field = wish.Field, Why = wish.Field is null ? "left out as stated" : "stated" }
+            : PriceColumns.Stated(use, wish);
+    }
+}
