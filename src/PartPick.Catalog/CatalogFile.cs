@@ -151,6 +151,10 @@ internal sealed class CatalogFile : IDisposable
     /// <summary>All stored parts one by one, in the order of their ids; null where a document holds none.</summary>
     public IEnumerable<StoredPart?> ReadStored() => Parts.FindAll().Select(PartDocument.ReadStored);
 
+    /// <summary>The stored parts whose ids come after one, in the order of their ids; null where a document holds none.</summary>
+    public IEnumerable<StoredPart?> ReadStoredAfter(string id, int most) =>
+        Parts.Find(BsonExpression.Create("$._id > @0", id), 0, most).Select(PartDocument.ReadStored);
+
     /// <summary>A stored part; null where there is none, or none can be read.</summary>
     public StoredPart? FindStored(string id) => Parts.FindById(id) is { } document ? PartDocument.ReadStored(document) : null;
 
