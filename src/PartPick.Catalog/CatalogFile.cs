@@ -243,15 +243,21 @@ internal sealed class CatalogFile : IDisposable
         About.Upsert(TextDocument.Write(UndoableKey, count));
     }
 
+    /// <summary>The import that can be taken back; null where there is none.</summary>
+    public ImportNote? Undoable() =>
+        int.TryParse(TextDocument.Read(About.FindById(UndoableKey)), out int number) && ImportNotes.FindById(number) is { } document
+            ? ImportDocument.Read(document)
+            : null;
+
     /// <summary>Takes back the last import, as far as it was not taken back before; null where there is none.</summary>
     public ImportNote? UndoLastImport()
     {
-        if (!int.TryParse(TextDocument.Read(About.FindById(UndoableKey)), out int number)
-            || ImportNotes.FindById(number) is not { } document || ImportDocument.Read(document) is not { } note)
+        if (Undoable() is not { } note)
         {
             return null;
         }
 
+        int number = note.Number;
         foreach (BsonDocument earlier in Earlier.FindAll().ToList())
         {
             StoredPart? now = FindStored(earlier["_id"].AsString);

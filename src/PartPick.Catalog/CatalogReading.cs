@@ -47,6 +47,11 @@ public static class CatalogReading
             path, file => file.FindStored(id) is { } stored ? EntryOf(stored, new Origins(file.ReadImports())) : null);
     }
 
+    /// <summary>The import that can be taken back.</summary>
+    /// <param name="path">The path of the file.</param>
+    /// <returns>Its note, null where there is none; or the problem.</returns>
+    public static Result<ImportNote?> Undoable(string path) => CatalogStore.UseCurrent(path, file => file.Undoable());
+
     /// <summary>Counts what a catalogue holds.</summary>
     /// <param name="path">The path of the file.</param>
     /// <returns>The counts, or the problem.</returns>

@@ -12,7 +12,7 @@ public static class PartListing
 {
     private const int FirstPiece = 500;
 
-    /// <summary>Reads the rows of all kinds.</summary>
+    /// <summary>Reads the rows of all kinds; begins anew where an import or an undo comes between.</summary>
     /// <param name="path">The path of the file.</param>
     /// <param name="take">Is given the rows of each kind read so far, again and again; called on the reading thread.</param>
     /// <param name="cancellation">Ends it.</param>
@@ -22,27 +22,35 @@ public static class PartListing
     {
         ArgumentNullException.ThrowIfNull(take);
         var parts = PartKinds.All.ToDictionary(kind => kind, kind => new GrowingRows(kind));
-        string last = "";
+        (string last, (int, int)? state) = ("", null);
         for (int most = FirstPiece; ; most = PartBlock.Size)
         {
             cancellation.ThrowIfCancellationRequested();
             string after = last;
             int wanted = most;
-            Result<List<StoredPart>> piece = CatalogStore.UseCurrent(path, file => file.ReadStoredAfter(after, wanted)
-                .Select(stored => stored ?? throw new InvalidDataException("A part in it cannot be read.")).ToList());
+            Result<(List<StoredPart> Parts, (int, int) State)> piece = CatalogStore.UseCurrent(path, file =>
+                (file.ReadStoredAfter(after, wanted)
+                    .Select(stored => stored ?? throw new InvalidDataException("A part in it cannot be read.")).ToList(),
+                (file.NextImport(), file.ReadImports().Count)));
             if (!piece.IsOk)
             {
                 return Result.Fail<ImmutableDictionary<PartKind, PartRows>>(piece.Problem);
             }
 
-            foreach (StoredPart stored in piece.Value)
+            if (state is not null && state != piece.Value.State)
+            {
+                return Read(path, take, cancellation);
+            }
+
+            state = piece.Value.State;
+            foreach (StoredPart stored in piece.Value.Parts)
             {
                 parts[stored.Kind].Add(PartRow.Of(stored));
                 last = stored.Id;
             }
 
             var all = parts.ToImmutableDictionary(pair => pair.Key, pair => pair.Value.ToRows());
-            if (piece.Value.Count < most)
+            if (piece.Value.Parts.Count < most)
             {
                 return Result.Ok(all);
             }

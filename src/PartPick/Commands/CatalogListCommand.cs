@@ -1,6 +1,7 @@
 using System.CommandLine;
 using System.Text.Json.Nodes;
 using PartPick.Catalog;
+using PartPick.Catalog.Browsing;
 using PartPick.Output;
 
 namespace PartPick.Commands;
@@ -12,6 +13,7 @@ internal static class CatalogListCommand
         """
         partpick catalog list crystals
         partpick catalog list crystals --filter "4 MHz" --top 20 --format json
+        partpick catalog list crystals --filter "H49 frequency=4.096M load<=18p"
         """;
 
     /// <summary>Builds the command.</summary>
@@ -20,7 +22,7 @@ internal static class CatalogListCommand
         var kind = new Argument<string>("KIND") { Description = string.Join(", ", PartKinds.All.Select(each => each.Word())) };
         var filter = new Option<string?>("--filter")
         {
-            Description = "Only parts with this text in id, description, package, supplier or number",
+            Description = "Words that stand in the texts of a part, and conditions on its figures such as load<=18p",
             HelpName = "TEXT",
         };
         var top = new Option<string?>("--top") { Description = "Most parts to list (all)", HelpName = "N" };
@@ -30,13 +32,13 @@ internal static class CatalogListCommand
         {
             PartKind wanted = CommandFailure.Unless(PartKinds.Named(parsed.GetRequiredValue(kind), kind.Name));
             int most = Counts.Read(parsed.GetValue(top), top.Name) ?? int.MaxValue;
-            string text = parsed.GetValue(filter) ?? "";
+            PartFilter narrow = CommandFailure.Unless(PartFilter.Read(wanted, parsed.GetValue(filter) ?? "", filter.Name));
             var entries = new List<CatalogEntry>();
             CommandFailure.Unless(
                 CatalogReading.Each(context.CatalogPath(parsed), wanted, entry =>
                 {
                     context.Surroundings.Cancellation.ThrowIfCancellationRequested();
-                    if (entries.Count < most && Holds(entry.Part, text))
+                    if (entries.Count < most && narrow.Holds(PartRow.Of(entry.Part)))
                     {
                         entries.Add(entry);
                     }
@@ -63,8 +65,4 @@ internal static class CatalogListCommand
                 break;
         }
     }
-
-    private static bool Holds(Part part, string text) => text.Length == 0
-        || new[] { part.Id, part.Description, part.Package, part.Supplier, part.SupplierPart, part.Note }
-            .Any(each => each?.Contains(text, StringComparison.OrdinalIgnoreCase) == true);
 }
