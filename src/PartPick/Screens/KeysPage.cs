@@ -16,6 +16,7 @@ public static class KeysPage
         Key($"{glyphs.Up} {glyphs.Down}", "the circuit before, the next one; also PgUp, PgDn, Home, End");
         Key("Enter", "open the circuit: drawing, parts, error, figures, reasons");
         Key("e or Tab", "edit the wanted sentence; so does " + glyphs.Up + " on the first circuit");
+        Key("c", "the catalogue: its parts, and the import of a list");
         Key("?", "this page");
         Key("q", "quit; the wanted sentence is kept for the next time");
         Head("In the wanted sentence");
@@ -30,6 +31,24 @@ public static class KeysPage
         Key($"{glyphs.Up} {glyphs.Down}", "scroll; also PgUp, PgDn, Home, End");
         Key($"{glyphs.Left} {glyphs.Right}", "the circuit before, the next one, at the same place of the page");
         Key("Esc", "back to the list");
+        Head("In the catalogue");
+        Key($"{glyphs.Up} {glyphs.Down}", "the part before, the next one; also PgUp, PgDn, Home, End");
+        Key("f or Tab", "filter: words of a part's texts, and conditions such as load<=18p or frequency=4.096M; Esc takes it away");
+        Key($"{glyphs.Left} {glyphs.Right}", "mark a column; o puts the parts in its order, o again turns the order round");
+        Key("k", "the next kind of part");
+        Key("Enter", "open the part: each figure with what it rests on and where it came from");
+        Key("i", "import a list; u takes the last import back, when pressed twice");
+        Head("In a part of the catalogue");
+        Key("Enter", "change the figure; a digit begins a new one; no import changes what was set by hand");
+        Key("b", "back to the figure that was supplied; Delete takes a figure away");
+        Key("n x", "write a note; exclude the part from every search, or take it in again");
+        Key($"{glyphs.Left} {glyphs.Right}", "the part before, the next one");
+        Head("In an import");
+        Key("Enter", "change what the list or a column is: a figure's name, or its beginning, with a unit behind a colon");
+        Key($"{glyphs.Left} {glyphs.Right}", "the choice before, the next one; Delete leaves a column out, b finds it again");
+        Key("r", "the first rows as they are read, with what is wrong in them");
+        Key("k", "keep the columns under a name, for the next list of this kind");
+        Key("d i", "try it without writing; import it, all or nothing; Esc and Ctrl-C stop it");
         Head("The pictures");
         Text($"{Bars.Bar(0.5, 8, glyphs)} is a limit and the part of it that is used up: half of it here. " +
             $"{Bars.Bar(2, 8, glyphs)} is beyond it, {Bars.Bar(0.01, 8, glyphs)} hardly used. " +

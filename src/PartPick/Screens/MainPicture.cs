@@ -23,6 +23,11 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
             return Filled([Line.Empty, new LineBuilder(glyphs).Words(text, width).Build()], height);
         }
 
+        if (model is { Place: Place.Parts, ShowsKeys: false })
+        {
+            return model.Parts!.Draw(width, height);
+        }
+
         ImmutableArray<Line> sentence =
             model.Wanted.Draw(width - 1, model.Place == Place.Sentence && !model.ShowsKeys, Math.Max(3, height / 4));
         ImmutableArray<Line> foot = new Foot(model, glyphs, width).Draw();

@@ -48,7 +48,7 @@ public static class ScreenHost
             : start.Value is null ? "Press e and say what is wanted; ? shows all keys."
             : null;
         var run = new TerminalRun(
-            new CatalogRanking(catalog.Value), TerminalTraits.Of(Environment.GetEnvironmentVariable),
+            catalogPath, new CatalogRanking(catalog.Value), TerminalTraits.Of(Environment.GetEnvironmentVariable),
             requirement => keeper.Keep(requirement), new Market(catalog.Value, 1).Currency);
         Requirement end = run.Show(start.ValueOr(null) ?? First, notice);
         return keeper.Keep(end) is { } problem ? Fail(ExitStatus.NoCatalog, problem.ToString()) : ExitStatus.Done;
