@@ -13,6 +13,7 @@ public sealed class MainModel
     private readonly Glyphs _glyphs;
     private readonly bool _waits;
     private readonly Reading _reading;
+    private bool _putOff;
 
     /// <summary>Makes the screen of a requirement and starts ranking.</summary>
     /// <param name="requirement">The requirement.</param>
@@ -194,18 +195,38 @@ public sealed class MainModel
         switch (Parts!.Press(key))
         {
             case PartsAnswer.Leave:
-                Place = _reading.IsThere ? Place.Circuit : Place.List;
-                if (Parts.HasChanged)
-                {
-                    Parts.HasChanged = false;
-                    PartsChanged?.Invoke();
-                }
-
+                LeaveParts();
                 break;
             case PartsAnswer.NotMine when key.Letter is '?' or 'q':
                 PressAnywhere(key);
                 break;
         }
+    }
+
+    // A ranking takes all the machine there is; it waits while the catalogue is open.
+    private void EnterParts()
+    {
+        Place = Place.Parts;
+        _putOff = _ranking.IsRunning;
+        _ranking.Stop();
+        Parts!.Enter();
+    }
+
+    // The ranking that was put off goes on where the parts are the same; else it waits for the new ones.
+    private void LeaveParts()
+    {
+        Place = _reading.IsThere ? Place.Circuit : Place.List;
+        if (Parts!.HasChanged)
+        {
+            Parts.HasChanged = false;
+            PartsChanged?.Invoke();
+        }
+        else if (_putOff)
+        {
+            RankAgain();
+        }
+
+        _putOff = false;
     }
 
     private void LeaveSentence()
@@ -264,8 +285,7 @@ public sealed class MainModel
                 Place = Place.Sentence;
                 break;
             case { Name: KeyName.Letter, Letter: 'c' } when Parts is not null:
-                Place = Place.Parts;
-                Parts.Enter();
+                EnterParts();
                 break;
             case { Name: KeyName.Tab or KeyName.BackTab } when Place == Place.Circuit:
                 Place = Place.Sentence;

@@ -40,7 +40,7 @@ internal sealed class PartsFoot(PartsModel model, Glyphs glyphs, int width)
     private Line PartKeys() => model.Page.Typed is not null
         ? Keys(("Enter", "keep"), ("Esc", "as it was"))
         : Keys(
-            ("Enter", "change"), ("b", "back to what was supplied"), ("n", "note"), ("x", "exclude"), ("Esc", "list"), ("?", "keys"));
+            ("Enter", "change"), ("b", "as supplied"), ("n", "note"), ("x", "exclude"), ("Esc", "list"), ("?", "keys"));
 
     private Line ImportKeys()
     {
