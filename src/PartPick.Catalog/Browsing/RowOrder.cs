@@ -57,40 +57,62 @@ public static class RowOrder
         }
     }
 
+    // Many parts share a package or a supplier: the different texts are put in order, and the rows dealt out to them.
     private static void SortTexts(PartRows rows, int cell, int[] order, bool descending, CancellationToken cancellation)
     {
-        int compared = 0;
-        var texts = new (PartBlock Block, int Row)[order.Length];
+        var numbers = new Dictionary<string, int>(StringComparer.OrdinalIgnoreCase);
+        Dictionary<string, int>.AlternateLookup<ReadOnlySpan<char>> lookup = numbers.GetAlternateLookup<ReadOnlySpan<char>>();
+        int[] textOf = new int[order.Length];
         for (int i = 0; i < order.Length; i++)
         {
-            texts[i] = (rows.BlockOf(i), i % PartBlock.Size);
-        }
-
-        try
-        {
-            order.AsSpan().Sort(Compare);
-        }
-        catch (InvalidOperationException) when (cancellation.IsCancellationRequested)
-        {
-            cancellation.ThrowIfCancellationRequested();
-        }
-
-        int Compare(int one, int other)
-        {
-            if (++compared % 65536 == 0)
+            if (i % PartBlock.Size == 0)
             {
                 cancellation.ThrowIfCancellationRequested();
             }
 
-            ReadOnlySpan<char> left = texts[one].Block.CellOf(texts[one].Row, cell);
-            ReadOnlySpan<char> right = texts[other].Block.CellOf(texts[other].Row, cell);
-            if (left.IsEmpty || right.IsEmpty)
+            ReadOnlySpan<char> text = rows.BlockOf(i).CellOf(i % PartBlock.Size, cell);
+            if (!lookup.TryGetValue(text, out textOf[i]))
             {
-                return left.IsEmpty && right.IsEmpty ? one - other : left.IsEmpty ? 1 : -1;
+                textOf[i] = numbers.Count;
+                lookup[text] = textOf[i];
             }
+        }
 
-            int compare = left.CompareTo(right, StringComparison.OrdinalIgnoreCase);
-            return compare == 0 ? one - other : descending ? -compare : compare;
+        string[] texts = [.. numbers.Keys];
+        Array.Sort(texts, StringComparer.OrdinalIgnoreCase);
+        cancellation.ThrowIfCancellationRequested();
+        IEnumerable<string> wanted = descending ? texts.Reverse() : texts;
+        int[] placeOf = new int[texts.Length];
+        int place = 0;
+        foreach (string text in wanted.Where(text => text.Length > 0))
+        {
+            placeOf[numbers[text]] = place++;
+        }
+
+        if (numbers.TryGetValue("", out int nothing))
+        {
+            placeOf[nothing] = place;
+        }
+
+        Deal(textOf, placeOf, order);
+    }
+
+    private static void Deal(int[] textOf, int[] placeOf, int[] order)
+    {
+        int[] starts = new int[placeOf.Length + 1];
+        foreach (int text in textOf)
+        {
+            starts[placeOf[text] + 1]++;
+        }
+
+        for (int i = 1; i < starts.Length; i++)
+        {
+            starts[i] += starts[i - 1];
+        }
+
+        for (int row = 0; row < textOf.Length; row++)
+        {
+            order[starts[placeOf[textOf[row]]]++] = row;
         }
     }
 }

@@ -18,6 +18,9 @@ internal sealed class TerminalRun(
 {
     private const string MouseReportsOff = "\x1b[?1003l\x1b[?1015l\x1b[?1006l";
 
+    // A key is answered in the next iteration: 25 a second, as set at first, would let most keys wait.
+    private const ushort IterationsPerSecond = 60;
+
     private static readonly TimeSpan LastMoment = TimeSpan.FromSeconds(3);
 
     /// <summary>Shows the screen until it is left.</summary>
@@ -28,6 +31,7 @@ internal sealed class TerminalRun(
     {
         // The terminal's own sixteen colours: they fit its background, and few of them are sent.
         Driver.Force16Colors = true;
+        Application.MaximumIterationsPerSecond = IterationsPerSecond;
         Glyphs glyphs = traits.IsUtf8 ? Glyphs.Drawn : Glyphs.Ascii;
         Palette palette = traits.HasColour ? Palette.Coloured : Palette.Plain;
         using IApplication app = Application.Create().Init(DriverRegistry.Names.ANSI);
