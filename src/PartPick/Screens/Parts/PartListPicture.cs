@@ -81,9 +81,8 @@ internal sealed class PartListPicture(PartList list, Glyphs glyphs, int width)
         string Cell(string key) => row.Cells[Array.IndexOf(keys, key)];
         string[] pieces =
         [
-            Cell("supplier"), Cell("supplierPart"), Cell("package"),
             row.Marks.HasFlag(RowMarks.Excluded) ? "excluded" : "", row.Marks.HasFlag(RowMarks.SetByHand) ? "set by hand" : "",
-            Cell("note").Length > 0 ? "note: " + Cell("note") : "",
+            Cell("note").Length > 0 ? "note: " + Cell("note") : "", Cell("supplier"), Cell("supplierPart"), Cell("package"),
         ];
         return
         [
