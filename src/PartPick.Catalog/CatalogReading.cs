@@ -6,34 +6,34 @@ namespace PartPick.Catalog;
 /// <summary>Reads parts of a catalogue with their origins, one kind or one part at a time.</summary>
 public static class CatalogReading
 {
-    /// <summary>Reads the parts of a kind, one by one in the order of their ids, while the catalogue is held.</summary>
+    /// <summary>
+    /// Reads the parts of a kind, one by one in the order of their ids; what is done with them takes as long as it may, the catalogue
+    /// is not held meanwhile.
+    /// </summary>
     /// <param name="path">The path of the file; made as in <see cref="CatalogStore.Load(string)"/> where it is not there.</param>
     /// <param name="kind">The kind.</param>
     /// <param name="take">What is done with each part.</param>
-    /// <returns>How many there were, or the problem.</returns>
+    /// <returns>How many there were, or the problem; an import that comes between is one.</returns>
     public static Result<int> Each(string path, PartKind kind, Action<CatalogEntry> take)
     {
         ArgumentNullException.ThrowIfNull(take);
-        return CatalogStore.UseCurrent(path, file =>
-        {
-            var origins = new Origins(file.ReadImports());
-            int count = 0;
-            foreach (StoredPart? stored in file.ReadStored())
+        int count = 0;
+        Result<bool> whole = PartPieces.Read(
+            path,
+            PartPieces.Most,
+            (piece, imports) =>
             {
-                if (stored is null)
-                {
-                    throw Unreadable();
-                }
-
-                if (stored.Kind == kind)
+                var origins = new Origins(imports);
+                foreach (StoredPart stored in piece.Where(stored => stored.Kind == kind))
                 {
                     take(EntryOf(stored, origins));
                     count++;
                 }
-            }
-
-            return count;
-        });
+            },
+            CancellationToken.None);
+        return whole.Then(isWhole => isWhole
+            ? Result.Ok(count)
+            : Result.Fail<int>(path, "was changed by an import or an undo while it was read", "the same again"));
     }
 
     /// <summary>Reads one part.</summary>

@@ -21,41 +21,32 @@ public static class PartListing
         string path, Action<ImmutableDictionary<PartKind, PartRows>> take, CancellationToken cancellation)
     {
         ArgumentNullException.ThrowIfNull(take);
-        var parts = PartKinds.All.ToDictionary(kind => kind, kind => new GrowingRows(kind));
-        (string last, (int, int)? state) = ("", null);
-        for (int most = FirstPiece; ; most = PartBlock.Size)
+        while (true)
         {
-            cancellation.ThrowIfCancellationRequested();
-            string after = last;
-            int wanted = most;
-            Result<(List<StoredPart> Parts, (int, int) State)> piece = CatalogStore.UseCurrent(path, file =>
-                (file.ReadStoredAfter(after, wanted)
-                    .Select(stored => stored ?? throw new InvalidDataException("A part in it cannot be read.")).ToList(),
-                (file.NextImport(), file.ReadImports().Count)));
-            if (!piece.IsOk)
-            {
-                return Result.Fail<ImmutableDictionary<PartKind, PartRows>>(piece.Problem);
-            }
+            var parts = PartKinds.All.ToDictionary(kind => kind, kind => new GrowingRows(kind));
+            var all = ImmutableDictionary<PartKind, PartRows>.Empty;
+            Result<bool> read = PartPieces.Read(
+                path,
+                FirstPiece,
+                (piece, _) =>
+                {
+                    if (!all.IsEmpty)
+                    {
+                        take(all);
+                    }
 
-            if (state is not null && state != piece.Value.State)
-            {
-                return Read(path, take, cancellation);
-            }
+                    foreach (StoredPart stored in piece)
+                    {
+                        parts[stored.Kind].Add(PartRow.Of(stored));
+                    }
 
-            state = piece.Value.State;
-            foreach (StoredPart stored in piece.Value.Parts)
+                    all = parts.ToImmutableDictionary(pair => pair.Key, pair => pair.Value.ToRows());
+                },
+                cancellation);
+            if (!read.IsOk || read.Value)
             {
-                parts[stored.Kind].Add(PartRow.Of(stored));
-                last = stored.Id;
+                return read.Map(_ => all);
             }
-
-            var all = parts.ToImmutableDictionary(pair => pair.Key, pair => pair.Value.ToRows());
-            if (piece.Value.Parts.Count < most)
-            {
-                return Result.Ok(all);
-            }
-
-            take(all);
         }
     }
 

@@ -54,14 +54,32 @@ public static class CatalogImport
         CancellationToken stop)
     {
         long start = TimeProvider.System.GetTimestamp();
-        Result<ImportPlan> planned = ImportPlan.Make(path, text, request);
-        if (!planned.IsOk)
+        Result<List<ColumnWish>> wishes = Wishes(path, request);
+        if (!wishes.IsOk)
         {
-            return Result.Fail<ImportReport>(planned.Problem);
+            return Result.Fail<ImportReport>(wishes.Problem);
         }
 
-        (FileLayout layout, ColumnUse[] uses) = planned.Value;
-        if (!planned.Value.TellsPartsApart)
+        Result<FileLayout> found = FileLayout.Find(text.Reader, request.Name, request.Kind, wishes.Value);
+        if (!found.IsOk)
+        {
+            return Result.Fail<ImportReport>(found.Problem);
+        }
+
+        FileLayout layout = found.Value;
+        var options = new ImportOptions
+        {
+            Notation = request.DecimalSign switch
+            {
+                "comma" => NumberNotation.Comma,
+                "point" => NumberNotation.Point,
+                _ => NumberNotation.Unknown,
+            },
+            Currency = request.Currency,
+            Supplier = request.Supplier,
+        };
+        ColumnUse[] uses = new ColumnProposal(request.Kind, layout.Sample, options).For(layout.Header, wishes.Value);
+        if (!uses.Any(use => use.Field is "id" or "supplierPart"))
         {
             return Result.Fail<ImportReport>(
                 request.Name, "has no column with a supplier's number or an id", "such a column, or --column HEADER=supplierPart");
@@ -87,7 +105,8 @@ public static class CatalogImport
                 Updated = run.Updated,
                 Unchanged = run.Unchanged,
                 Rejected = run.Rejected,
-                Columns = planned.Value.Columns(),
+                Columns = [.. uses.Select(use => new ImportColumn(
+                    CellText.Harmless(use.Header), use.Field, use.Power == ColumnUse.NoPlainNumbers ? "" : use.Unit, use.Why))],
                 Rejections = run.Listed,
                 RejectedFile = run.PublishRejected(),
                 Encoding = text.EncodingName,
@@ -98,5 +117,27 @@ public static class CatalogImport
             };
             return (Result.Ok(report), !request.DryRun && (run.Added + run.Updated > 0 || request.Map is not null));
         });
+    }
+
+    internal static Result<List<ColumnWish>> Wishes(string path, ImportRequest request)
+    {
+        Result<List<ColumnWish>> stated = ColumnWishes.Read(request.Kind, request.Columns);
+        if (!stated.IsOk || request.Map is not { } name)
+        {
+            return stated;
+        }
+
+        Result<string?> map = CatalogStore.UseCurrent(path, file => file.ReadMap(name));
+        if (!map.IsOk)
+        {
+            return Result.Fail<List<ColumnWish>>(map.Problem);
+        }
+
+        return map.Value is null ? stated
+            : ColumnMapText.Read(map.Value, request.Kind) is { } kept ? Result.Ok<List<ColumnWish>>([.. stated.Value, .. kept])
+            : Result.Fail<List<ColumnWish>>(
+                "--map",
+                $"{Problem.Quote(name)} is a map of another kind of part",
+                "the name of a map of " + request.Kind.Word());
     }
 }

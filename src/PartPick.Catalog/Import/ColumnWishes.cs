@@ -1,4 +1,3 @@
-using System.Collections.Immutable;
 using PartPick.Catalog.Fields;
 using PartPick.Values;
 
@@ -8,9 +7,6 @@ namespace PartPick.Catalog.Import;
 internal static class ColumnWishes
 {
     private static readonly string[] Several = ["price", "prices", "temperature"];
-
-    /// <summary>The names that a column can be given.</summary>
-    public static ImmutableArray<string> Names(PartKind kind) => [.. PartShape.Of(kind).Fields.Select(each => each.Key), .. Several];
 
     public static Result<List<ColumnWish>> Read(PartKind kind, IEnumerable<string> texts)
     {
@@ -27,7 +23,7 @@ internal static class ColumnWishes
                 return Result.Fail<List<ColumnWish>>(
                     "--column", $"{Problem.Quote(text)} names no figure of {kind.Word()}",
                     "HEADER=FIELD or HEADER=FIELD:UNIT with one of "
-                        + string.Join(", ", Names(kind)));
+                        + string.Join(", ", PartShape.Of(kind).Fields.Select(each => each.Key).Concat(Several)));
             }
 
             if (unit.Length > 0 && field?.Dimension is { } dimension && UnitSpelling.PowerOf(unit, dimension) is null)

@@ -17,7 +17,7 @@ internal sealed record ImportPlan(FileLayout Layout, ColumnUse[] Uses)
     /// <param name="request">What is to be imported, and how.</param>
     public static Result<ImportPlan> Make(string path, SourceText text, ImportRequest request)
     {
-        Result<List<ColumnWish>> wishes = Wishes(path, request);
+        Result<List<ColumnWish>> wishes = CatalogImport.Wishes(path, request);
         if (!wishes.IsOk)
         {
             return Result.Fail<ImportPlan>(wishes.Problem);
@@ -44,28 +44,5 @@ internal sealed record ImportPlan(FileLayout Layout, ColumnUse[] Uses)
             _ => NumberNotation.Unknown,
         },
         Currency = request.Currency,
-        Supplier = request.Supplier,
     };
-
-    private static Result<List<ColumnWish>> Wishes(string path, ImportRequest request)
-    {
-        Result<List<ColumnWish>> stated = ColumnWishes.Read(request.Kind, request.Columns);
-        if (!stated.IsOk || request.Map is not { } name)
-        {
-            return stated;
-        }
-
-        Result<string?> map = CatalogStore.UseCurrent(path, file => file.ReadMap(name));
-        if (!map.IsOk)
-        {
-            return Result.Fail<List<ColumnWish>>(map.Problem);
-        }
-
-        return map.Value is null ? stated
-            : ColumnMapText.Read(map.Value, request.Kind) is { } kept ? Result.Ok<List<ColumnWish>>([.. stated.Value, .. kept])
-            : Result.Fail<List<ColumnWish>>(
-                "--map",
-                $"{Problem.Quote(name)} is a map of another kind of part",
-                "the name of a map of " + request.Kind.Word());
-    }
 }

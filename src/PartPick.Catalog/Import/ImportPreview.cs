@@ -7,6 +7,8 @@ namespace PartPick.Catalog.Import;
 /// <summary>Looks at a file as an import would, without a catalogue being changed.</summary>
 public static class ImportPreview
 {
+    private static readonly string[] Further = ["price", "prices", "temperature"];
+
     /// <summary>How many rows are looked at.</summary>
     public const int MostRows = 100;
 
@@ -33,7 +35,7 @@ public static class ImportPreview
 
     /// <summary>The names that a column of a list of some kind can be given.</summary>
     /// <param name="kind">The kind.</param>
-    public static ImmutableArray<string> FieldNames(PartKind kind) => ColumnWishes.Names(kind);
+    public static ImmutableArray<string> FieldNames(PartKind kind) => [.. PartShape.Of(kind).Fields.Select(field => field.Key), .. Further];
 
     // The last row of a head that is not the whole text may be cut off.
     private static ImmutableArray<LookedAtRow> RowsOf(ImportPlan plan, ImportRequest request)
@@ -84,6 +86,12 @@ public static class ImportPreview
         if (!draft.Has("id") && draft.Text("supplierPart") is { } number)
         {
             draft.Set("id", RowCompletion.IdOf(CellText.Harmless(number)));
+        }
+
+        if (!draft.Has("id"))
+        {
+            return new LookedAtRow(rows.Line, cells, null, new RowRejection(
+                rows.Line, null, null, "has neither a supplier's number nor an id; fits a row with one of them"));
         }
 
         RowCompletion.Complete(request.Kind, draft);

@@ -1,5 +1,4 @@
 using System.CommandLine;
-using System.Text.Json.Nodes;
 using PartPick.Catalog;
 using PartPick.Catalog.Browsing;
 using PartPick.Output;
@@ -33,36 +32,22 @@ internal static class CatalogListCommand
             PartKind wanted = CommandFailure.Unless(PartKinds.Named(parsed.GetRequiredValue(kind), kind.Name));
             int most = Counts.Read(parsed.GetValue(top), top.Name) ?? int.MaxValue;
             PartFilter narrow = CommandFailure.Unless(PartFilter.Read(wanted, parsed.GetValue(filter) ?? "", filter.Name));
-            var entries = new List<CatalogEntry>();
+            int count = 0;
+            using var parts = new PartsOutput(context.Output, context.FormatOf(parsed), wanted);
             CommandFailure.Unless(
                 CatalogReading.Each(context.CatalogPath(parsed), wanted, entry =>
                 {
                     context.Surroundings.Cancellation.ThrowIfCancellationRequested();
-                    if (entries.Count < most && narrow.Holds(PartRow.Of(entry.Part)))
+                    if (count < most && narrow.Holds(PartRow.Of(entry.Part)))
                     {
-                        entries.Add(entry);
+                        count++;
+                        parts.Write(entry);
                     }
                 }),
                 ExitStatus.NoCatalog);
-            Write(context.Output, context.FormatOf(parsed), wanted, entries);
+            parts.End();
             return ExitStatus.Done;
         });
         return command;
-    }
-
-    private static void Write(TextWriter output, OutputFormat format, PartKind kind, List<CatalogEntry> entries)
-    {
-        switch (format)
-        {
-            case OutputFormat.Json:
-                JsonOutput.Write(output, new JsonArray([.. entries.Select(entry => (JsonNode)PartJson.Of(entry))]));
-                break;
-            case OutputFormat.Csv:
-                PartCsv.Write(kind, entries.Select(entry => entry.Part), output);
-                break;
-            default:
-                PartTable.WriteList(output, kind, entries);
-                break;
-        }
     }
 }
