@@ -125,7 +125,7 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
 
     private ImmutableArray<Line> KeysBody(int room)
     {
-        ImmutableArray<Line> shown = model.KeysScroll.Cut(KeysPage.Draw(width, glyphs), room - 1);
+        ImmutableArray<Line> shown = model.KeysScroll.Cut(KeysPage.Draw(width, glyphs, model.Place == Place.Parts), room - 1);
         return [Rules.Draw("Keys", model.KeysScroll.HasMore ? "more below" : "", width, glyphs), .. shown];
     }
 
