@@ -36,6 +36,24 @@ public static class CatalogReading
             : Result.Fail<int>(path, "was changed by an import or an undo while it was read", "the same again"));
     }
 
+    /// <summary>Reads all parts as <see cref="CatalogStore.Load(string)"/> does, but leaves the catalogue free for others between pieces.</summary>
+    /// <param name="path">The path of the file.</param>
+    /// <param name="cancellation">Ends it.</param>
+    /// <returns>The parts, or the problem.</returns>
+    public static Result<PartsCatalog> All(string path, CancellationToken cancellation)
+    {
+        while (true)
+        {
+            var parts = new List<Part>();
+            Result<bool> whole = PartPieces.Read(
+                path, PartPieces.Most, (piece, _) => parts.AddRange(piece.Select(BuiltOf)), cancellation);
+            if (!whole.IsOk || whole.Value)
+            {
+                return whole.Map(_ => new PartsCatalog(parts));
+            }
+        }
+    }
+
     /// <summary>Reads one part.</summary>
     /// <param name="path">The path of the file.</param>
     /// <param name="id">The id of the part.</param>
@@ -73,7 +91,9 @@ public static class CatalogReading
     });
 
     private static CatalogEntry EntryOf(StoredPart stored, Origins origins) =>
-        new(stored.Build() ?? throw Unreadable(), origins.Of(stored));
+        new(BuiltOf(stored), origins.Of(stored));
+
+    private static Part BuiltOf(StoredPart stored) => stored.Build() ?? throw Unreadable();
 
     private static InvalidDataException Unreadable() => new("A part in it cannot be read.");
 }

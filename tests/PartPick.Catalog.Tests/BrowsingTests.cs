@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using PartPick.Catalog.Browsing;
+using PartPick.Catalog.Import;
 using PartPick.Values;
 
 namespace PartPick.Catalog.Tests;
@@ -27,6 +28,59 @@ public sealed class BrowsingTests : IDisposable
             Assert.All(expected, (id, row) => Assert.Equal(row, all[kind].Find(id)));
             Assert.Equal(-1, all[kind].Find("no such part"));
         }
+    }
+
+    [Fact]
+    public void Reading_in_pieces_gives_the_same_catalogue_and_begins_anew_when_an_import_comes_between()
+    {
+        CancellationToken stop = TestContext.Current.CancellationToken;
+        Assert.Equal(
+            CatalogStore.Load(CatalogFile).Value.All.Select(part => (part.Id, part.Kind)),
+            CatalogReading.All(CatalogFile, stop).Value.All.Select(part => (part.Id, part.Kind)));
+
+        var request = new ImportRequest { Kind = PartKind.Crystal, Name = "list.csv", Date = new DateOnly(2026, 3, 1) };
+        bool imported = false;
+        PartRows crystals = PartListing.Read(
+            CatalogFile,
+            _ =>
+            {
+                if (!imported)
+                {
+                    imported = true;
+                    using var list = new StringReader("Part No,Freq\nA-0,4 MHz\nZ-9,8 MHz\n");
+                    Assert.Equal(2, CatalogImport.Run(CatalogFile, list, request, stop).Value.Added);
+                }
+            },
+            stop).Value[PartKind.Crystal];
+
+        Assert.True(imported);
+        Assert.True(crystals.Find("A-0") >= 0);
+        Assert.True(crystals.Find("Z-9") >= 0);
+        Assert.Equal(PartsCatalog.BuiltIn().Crystals.Length + 2, crystals.Count);
+    }
+
+    [Fact]
+    public void An_import_that_comes_between_ends_a_reading_part_by_part()
+    {
+        CancellationToken stop = TestContext.Current.CancellationToken;
+        var request = new ImportRequest { Kind = PartKind.Crystal, Name = "list.csv", Date = new DateOnly(2026, 3, 1) };
+        string rows = string.Concat(Enumerable.Range(0, 9000).Select(i => $"L-{i:D5},4 MHz\n"));
+        using (var list = new StringReader("Part No,Freq\n" + rows))
+        {
+            Assert.Equal(9000, CatalogImport.Run(CatalogFile, list, request, stop).Value.Added);
+        }
+
+        bool undone = false;
+        Result<int> read = CatalogReading.Each(CatalogFile, PartKind.Crystal, _ =>
+        {
+            if (!undone)
+            {
+                undone = true;
+                Assert.NotNull(CatalogImport.Undo(CatalogFile).Value);
+            }
+        });
+
+        Assert.Contains("was changed by an import or an undo", read.Problem?.What, StringComparison.Ordinal);
     }
 
     [Fact]

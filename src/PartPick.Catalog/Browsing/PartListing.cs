@@ -30,17 +30,13 @@ public static class PartListing
                 FirstPiece,
                 (piece, _) =>
                 {
-                    if (!all.IsEmpty)
-                    {
-                        take(all);
-                    }
-
                     foreach (StoredPart stored in piece)
                     {
                         parts[stored.Kind].Add(PartRow.Of(stored));
                     }
 
                     all = parts.ToImmutableDictionary(pair => pair.Key, pair => pair.Value.ToRows());
+                    take(all);
                 },
                 cancellation);
             if (!read.IsOk || read.Value)

@@ -40,7 +40,7 @@ internal sealed class TerminalRun(
         var work = new ScreenWork(action => Post(app, action));
         var parts = new PartsModel(catalogPath, work, glyphs, () => DateOnly.FromDateTime(TimeProvider.System.GetLocalNow().Date));
         var model = new MainModel(start, live, glyphs, notice, currency, parts: parts);
-        model.PartsChanged += () => work.Start(_ => CatalogStore.Load(catalogPath), loaded => RankWith(loaded, model));
+        model.PartsChanged += () => work.Start(stop => CatalogReading.All(catalogPath, stop), loaded => RankWith(loaded, model));
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
         using var screen = new MainScreen(model, palette);
         using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, Leave);
