@@ -7,6 +7,7 @@ namespace PartPick.Screens;
 internal sealed class PartListShape
 {
     private const int Front = 3;
+    private const int LeastText = 10;
 
     private PartListShape(ImmutableArray<(int Column, int Width)> shown) => Shown = shown;
 
@@ -23,21 +24,26 @@ internal sealed class PartListShape
             first++;
         }
 
-        var shown = ImmutableArray.CreateBuilder<(int, int)>();
+        var shown = ImmutableArray.CreateBuilder<(int Column, int Width)>();
         shown.Add((0, widths[0]));
         int left = width - Front - widths[0];
         for (int i = first; i < columns.Length && left > 0; i++)
         {
             // A text may be cut at the right end; a number may not.
-            if (widths[i] > left && (columns[i].IsNumber || left < 8))
+            if (widths[i] > left && (columns[i].IsNumber || left < LeastText))
             {
                 break;
             }
 
-            bool isLast = i == columns.Length - 1 || (columns[i].Key == "description" && widths[i] >= left);
-            int taken = isLast ? left : Math.Min(left, widths[i]);
+            int taken = Math.Min(left, widths[i]);
             shown.Add((i, taken));
             left -= taken;
+        }
+
+        // What is left over goes to the last text.
+        if (shown.Count > 1 && !columns[shown[^1].Column].IsNumber)
+        {
+            shown[^1] = (shown[^1].Column, shown[^1].Width + left);
         }
 
         return new PartListShape(shown.ToImmutable());
