@@ -36,7 +36,9 @@ public static class CatalogReading
             : Result.Fail<int>(path, "was changed by an import or an undo while it was read", "the same again"));
     }
 
-    /// <summary>Reads all parts as <see cref="CatalogStore.Load(string)"/> does, but leaves the catalogue free for others between pieces.</summary>
+    /// <summary>
+    /// Reads all parts as <see cref="CatalogStore.Load(string)"/> does, but leaves the catalogue free for others between pieces.
+    /// </summary>
     /// <param name="path">The path of the file.</param>
     /// <param name="cancellation">Ends it.</param>
     /// <returns>The parts, or the problem.</returns>

@@ -14,7 +14,9 @@ internal static class PartPieces
     /// <param name="first">How many are read at first.</param>
     /// <param name="take">Is given each piece with the notes of the imports, while the catalogue is not held.</param>
     /// <param name="cancellation">Ends it.</param>
-    /// <returns>True; false where an import or an undo came between two pieces, which do not belong together then; or the problem.</returns>
+    /// <returns>
+    /// True; false where an import or an undo came between two pieces, which do not belong together then; or the problem.
+    /// </returns>
     public static Result<bool> Read(
         string path,
         int first,

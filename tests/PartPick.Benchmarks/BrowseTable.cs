@@ -72,7 +72,9 @@ internal sealed class BrowseTable
         Row("mark the description", 6, _ => Of(KeyName.Right));
         Row("order by a text", 4, _ => KeyPress.Of('o'));
         Row("open and leave a part", 20, i => Of(i % 2 == 0 ? KeyName.Enter : KeyName.Escape));
-        Row("open, write a note", 4, i => i switch { 0 => Of(KeyName.Enter), 1 => KeyPress.Of('n'), 2 => KeyPress.Of('x'), _ => Of(KeyName.Enter) });
+        Row(
+            "open, write a note", 4,
+            i => i switch { 0 or 3 => Of(KeyName.Enter), 1 => KeyPress.Of('n'), _ => KeyPress.Of('x') });
         _model.Stop();
     }
 

@@ -1,5 +1,4 @@
 using System.Collections.Immutable;
-using PartPick.Catalog.Fields;
 using PartPick.Values;
 
 namespace PartPick.Catalog.Browsing;
@@ -10,12 +9,10 @@ namespace PartPick.Catalog.Browsing;
 /// </summary>
 public sealed class PartFilter
 {
-    private static readonly string[] Signs = ["<=", ">=", "<", ">", "="];
-
     private readonly ImmutableArray<string> _words;
-    private readonly ImmutableArray<Condition> _conditions;
+    private readonly ImmutableArray<FigureCondition> _conditions;
 
-    private PartFilter(PartKind kind, ImmutableArray<string> words, ImmutableArray<Condition> conditions) =>
+    private PartFilter(PartKind kind, ImmutableArray<string> words, ImmutableArray<FigureCondition> conditions) =>
         (Kind, _words, _conditions) = (kind, words, conditions);
 
     /// <summary>The kind of the parts.</summary>
@@ -36,10 +33,10 @@ public sealed class PartFilter
     {
         ArgumentNullException.ThrowIfNull(text);
         var words = ImmutableArray.CreateBuilder<string>();
-        var conditions = ImmutableArray.CreateBuilder<Condition>();
+        var conditions = ImmutableArray.CreateBuilder<FigureCondition>();
         foreach (string word in text.Split(' ', StringSplitOptions.RemoveEmptyEntries))
         {
-            string? sign = Array.Find(Signs, each => word.IndexOf(each, StringComparison.Ordinal) > 0);
+            string? sign = Array.Find(FigureCondition.Signs, each => word.IndexOf(each, StringComparison.Ordinal) > 0);
             if (sign is null)
             {
                 words.Add(word);
@@ -47,7 +44,7 @@ public sealed class PartFilter
             }
 
             int at = word.IndexOf(sign, StringComparison.Ordinal);
-            Result<Condition> condition = ReadCondition(kind, word[..at], sign, word[(at + sign.Length)..], where);
+            Result<FigureCondition> condition = FigureCondition.Read(kind, word[..at], sign, word[(at + sign.Length)..], where);
             if (!condition.IsOk)
             {
                 return Result.Fail<PartFilter>(condition.Problem);
@@ -150,7 +147,7 @@ public sealed class PartFilter
 
     private bool Holds(PartBlock block, int row)
     {
-        foreach (Condition condition in _conditions)
+        foreach (FigureCondition condition in _conditions)
         {
             if (!condition.Holds(block.NumberOf(row, condition.Number)))
             {
@@ -168,39 +165,5 @@ public sealed class PartFilter
         }
 
         return true;
-    }
-
-    private static Result<Condition> ReadCondition(PartKind kind, string key, string sign, string value, string where)
-    {
-        ListColumn[] columns = [.. ListColumns.Of(kind).Where(column => column.IsNumber)];
-        int number = Array.FindIndex(columns, column => column.Key.Replace(" ", "", StringComparison.Ordinal) == key);
-        if (number < 0)
-        {
-            return Result.Fail<Condition>(
-                where, $"{Problem.Quote(key)} is no figure that {kind.Word()} are listed with",
-                "words, or one of " + string.Join(
-                    ", ", columns.Select(column => column.Key.Replace(" ", "", StringComparison.Ordinal))) + " with < <= = >= > and a value");
-        }
-
-        Dimension dimension =
-            PartShape.Of(kind).Fields.FirstOrDefault(field => field.Key == columns[number].Key)?.Dimension ?? Dimension.Number;
-        return ValueText.Parse(value, dimension, where + " " + key).Map(bound => new Condition(number, sign, bound));
-    }
-
-    private sealed record Condition(int Number, string Sign, double Bound)
-    {
-        // Values that are written alike are alike, whatever the last binary digit.
-        private const double Same = 1e-9;
-
-        public bool Holds(double value) => Sign switch
-        {
-            "<" => value < Bound && !IsSame(value),
-            ">" => value > Bound && !IsSame(value),
-            "<=" => value <= Bound || IsSame(value),
-            ">=" => value >= Bound || IsSame(value),
-            _ => IsSame(value),
-        };
-
-        private bool IsSame(double value) => Math.Abs(value - Bound) <= Same * Math.Abs(Bound);
     }
 }

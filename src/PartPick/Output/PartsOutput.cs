@@ -4,7 +4,9 @@ using PartPick.Commands;
 
 namespace PartPick.Output;
 
-/// <summary>Prints parts of one kind as they come, without holding them; only a table, whose columns fit all rows, waits for the last.</summary>
+/// <summary>
+/// Prints parts of one kind as they come, without holding them; only a table, whose columns fit all rows, waits for the last.
+/// </summary>
 internal sealed class PartsOutput : IDisposable
 {
     private readonly TextWriter _output;

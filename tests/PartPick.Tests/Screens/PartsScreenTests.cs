@@ -37,7 +37,8 @@ public sealed class PartsScreenTests : IDisposable
         bench.Settle();
         CrystalPart[] expected =
         [
-            .. PartsCatalog.BuiltIn().Crystals.Where(part => part.Id.Contains("H49", StringComparison.Ordinal) && part.LoadFarads > 29.9e-12)
+            .. PartsCatalog.BuiltIn().Crystals
+                .Where(part => part.Id.Contains("H49", StringComparison.Ordinal) && part.LoadFarads > 29.9e-12)
                 .OrderByDescending(part => part.ResistanceOhms ?? double.NegativeInfinity).ThenBy(part => part.Id, StringComparer.Ordinal),
         ];
         Assert.NotEmpty(expected);

@@ -88,7 +88,8 @@ internal sealed class PartListPicture(PartList list, Glyphs glyphs, int width)
         [
             Rules.Draw(row.Id, "", width, glyphs),
             new LineBuilder(glyphs).Add(" ").Words(Cell("description"), width - 2).Build(),
-            new LineBuilder(glyphs).Add(" ").Words(string.Join(", ", pieces.Where(piece => piece.Length > 0)), width - 2, Tone.Quiet).Build(),
+            new LineBuilder(glyphs).Add(" ")
+                .Words(string.Join(", ", pieces.Where(piece => piece.Length > 0)), width - 2, Tone.Quiet).Build(),
         ];
     }
 }

@@ -78,7 +78,7 @@ public sealed class PartPage(string path, ScreenWork work, Func<DateOnly> today)
             case { Name: KeyName.Enter } when Chosen is { CanBeSet: true }:
                 Begin(Chosen.Value ?? "");
                 return PartsAnswer.Taken;
-            case { Name: KeyName.Letter } when Chosen is { Dimension: not null } && (char.IsAsciiDigit(key.Letter) || key.Letter is '+' or '-' or '.' or '±'):
+            case { Name: KeyName.Letter, Letter: (>= '0' and <= '9') or '+' or '-' or '.' or '±' } when Chosen is { Dimension: not null }:
                 Begin(key.Letter.ToString());
                 return PartsAnswer.Taken;
             case { Name: KeyName.Delete } when Chosen is { CanBeSet: true, Value: not null }:

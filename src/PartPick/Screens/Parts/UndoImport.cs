@@ -59,7 +59,8 @@ public sealed class UndoImport(string path, ScreenWork work)
         IsBusy = false;
         Asked = found.ValueOr(null);
         Words = !found.IsOk ? found.Problem.ToString()
-            : Asked is { } note ? $"u once more takes back {note.File} of {note.Date}: {note.Added} added, {note.Updated} updated {note.Kind.Word()}."
+            : Asked is { } note
+                ? $"u once more takes back {note.File} of {note.Date}: {note.Added} added, {note.Updated} updated {note.Kind.Word()}."
             : "There is no import to take back.";
         Changed?.Invoke();
     }

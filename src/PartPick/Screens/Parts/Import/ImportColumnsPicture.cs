@@ -50,8 +50,8 @@ internal sealed class ImportColumnsPicture(ImportPage page, Glyphs glyphs, int w
             + ImportPace.Layout(look.Encoding, look.Delimiter, look.HeaderLine)
         : "";
 
-    private Line Heading() => new LineBuilder(glyphs).Add("  ").Column("column", HeaderWidth, Tone.Quiet).Column("figure", NameWidth, Tone.Quiet)
-        .Column("unit", UnitWidth, Tone.Quiet).Add("first cells", Tone.Quiet).Build();
+    private Line Heading() => new LineBuilder(glyphs).Add("  ")
+        .Column("column", HeaderWidth, Tone.Quiet).Column("figure", NameWidth, Tone.Quiet).Column("unit", UnitWidth, Tone.Quiet).Add("first cells", Tone.Quiet).Build();
 
     private int HeaderWidth => Math.Clamp(width / 4, 12, 30);
 

@@ -1,7 +1,6 @@
 using System.Collections.Immutable;
 using PartPick.Catalog;
 using PartPick.Catalog.Import;
-using PartPick.Commands;
 using PartPick.Values;
 
 namespace PartPick.Screens;
@@ -12,7 +11,7 @@ namespace PartPick.Screens;
 /// <param name="today">The day of the import.</param>
 public sealed class ImportPage(string path, ScreenWork work, Func<DateOnly> today)
 {
-    private int _number;
+    private readonly ImportLooking _looking = new(path, work, today);
 
     /// <summary>Raised when the page looks different without a key having been pressed.</summary>
     public event Action? Changed;
@@ -27,10 +26,10 @@ public sealed class ImportPage(string path, ScreenWork work, Func<DateOnly> toda
     public ImportWishes Wishes { get; private set; } = new();
 
     /// <summary>What the file looks like; null before it is looked at.</summary>
-    public ImportLook? Look { get; private set; }
+    public ImportLook? Look => _looking.Seen;
 
     /// <summary>Whether the file is being looked at.</summary>
-    public bool IsLooking { get; private set; }
+    public bool IsLooking => _looking.IsLooking;
 
     /// <summary>What is wrong; null for nothing.</summary>
     public Problem? Problem { get; private set; }
@@ -48,7 +47,7 @@ public sealed class ImportPage(string path, ScreenWork work, Func<DateOnly> toda
     public bool IsNaming { get; private set; }
 
     /// <summary>The names of the maps of the kind that are kept.</summary>
-    public ImmutableArray<string> Maps { get; private set; } = [];
+    public ImmutableArray<string> Maps => _looking.Maps;
 
     /// <summary>The run, with its progress and its report.</summary>
     public ImportWork Run { get; } = new(path, work);
@@ -64,6 +63,7 @@ public sealed class ImportPage(string path, ScreenWork work, Func<DateOnly> toda
     public void Begin(PartKind kind)
     {
         Run.Changed = Follow;
+        _looking.Changed = () => Changed?.Invoke();
         if (Step == ImportStep.Running)
         {
             return;
@@ -74,7 +74,7 @@ public sealed class ImportPage(string path, ScreenWork work, Func<DateOnly> toda
         Wishes = Wishes.File.Length == 0 ? Wishes with { Kind = kind } : Wishes;
         Typed = Wishes.File.Length == 0 ? new TypedText("", 1000) : null;
         Choices.Reset();
-        ReadMaps();
+        _looking.ReadMaps(Wishes.Kind);
     }
 
     /// <summary>Takes a key.</summary>
@@ -185,7 +185,8 @@ public sealed class ImportPage(string path, ScreenWork work, Func<DateOnly> toda
                 Step = ImportStep.Columns;
                 return PartsAnswer.Taken;
             case { Name: KeyName.Escape or KeyName.Enter or KeyName.Backspace }:
-                (Wishes, Look, Step) = (new ImportWishes { Kind = Wishes.Kind }, null, ImportStep.Columns);
+                (Wishes, Step) = (new ImportWishes { Kind = Wishes.Kind }, ImportStep.Columns);
+                _looking.Forget();
                 return PartsAnswer.Leave;
             default:
                 return PartsAnswer.NotMine;
@@ -228,39 +229,17 @@ public sealed class ImportPage(string path, ScreenWork work, Func<DateOnly> toda
         Wishes = otherKind ? wishes with { Map = null, Columns = ImmutableDictionary<string, string>.Empty } : wishes;
         if (otherKind)
         {
-            ReadMaps();
+            _looking.ReadMaps(Wishes.Kind);
         }
 
-        if (Wishes.File.Length == 0)
+        if (Wishes.File.Length > 0)
         {
-            return;
-        }
-
-        IsLooking = true;
-        int number = ++_number;
-        ImportRequest request = Wishes.Request(today(), true);
-        string file = Wishes.FullPath;
-        work.Start(
-            _ => ListFile.Open(file).Then(stream => ImportPreview.Look(path, stream, request)),
-            look =>
+            _looking.Look(Wishes, problem =>
             {
-                if (number == _number)
-                {
-                    (IsLooking, Look, Problem) = (false, look.ValueOr(null!), look.Problem);
-                    Choices.Fit(Look?.Columns.Length ?? 0);
-                    Changed?.Invoke();
-                }
+                Problem = problem;
+                Choices.Fit(Look?.Columns.Length ?? 0);
             });
-    }
-
-    private void ReadMaps()
-    {
-        PartKind kind = Wishes.Kind;
-        work.Start(_ => ColumnMaps.Names(path, kind), names =>
-        {
-            Maps = kind == Wishes.Kind ? names.ValueOr([]) : Maps;
-            Changed?.Invoke();
-        });
+        }
     }
 
     private void Keep(string name)
@@ -272,15 +251,11 @@ public sealed class ImportPage(string path, ScreenWork work, Func<DateOnly> toda
         }
 
         (Typed, IsNaming) = (null, false);
-        ImportRequest request = Wishes.Request(today(), true);
-        string file = Wishes.FullPath;
-        work.Start(_ => ListFile.Open(file).Then(stream => ColumnMaps.Keep(path, name, stream, request)), kept =>
+        _looking.Keep(name, Wishes, kept =>
         {
             Problem = kept.Problem;
             Notice = kept.IsOk ? $"The columns are kept under {name}." : null;
             Wishes = kept.IsOk ? Wishes with { Map = name } : Wishes;
-            ReadMaps();
-            Changed?.Invoke();
         });
     }
 

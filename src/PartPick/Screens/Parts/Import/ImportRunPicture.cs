@@ -57,7 +57,8 @@ internal sealed class ImportRunPicture(ImportPage page, Glyphs glyphs, int width
         lines.AddRange(Paragraph.Of(ImportPace.Sum(report), width - 2, glyphs, " ", 1, Tone.Strong));
         string seconds = string.Create(CultureInfo.InvariantCulture, $"{report.Elapsed.TotalSeconds:F1} s");
         lines.AddRange(Paragraph.Of(
-            $"{ImportPace.Layout(report.Encoding, report.Delimiter, report.HeaderLine)}; {seconds}", width - 2, glyphs, " ", 1, Tone.Quiet));
+            $"{ImportPace.Layout(report.Encoding, report.Delimiter, report.HeaderLine)}; {seconds}",
+            width - 2, glyphs, " ", 1, Tone.Quiet));
         if (report.RejectedFile is { } file)
         {
             lines.AddRange(Paragraph.Of($"The rejected rows are in {file}, to be mended and imported again.", width - 2, glyphs, " ", 1));
