@@ -24,6 +24,8 @@ public static class CatalogEdit
             path, () => CatalogStore.UseCurrent(path, file => Change(file, id, changes, date)).Then(result => result));
     }
 
+    internal static bool CanBeSet(PartField field) => field.Key is not ("id" or "basis");
+
     private static Result<Part> Change(CatalogFile file, string id, IReadOnlyList<(string Key, string? Value)> changes, DateOnly date)
     {
         if (file.FindStored(id) is not { } stored)
@@ -34,14 +36,15 @@ public static class CatalogEdit
         PartShape shape = PartShape.Of(stored.Kind);
         foreach ((string key, string? value) in changes)
         {
-            PartField? field = shape.Fields.FirstOrDefault(each => each.Key == key && key is not ("id" or "basis"));
+            PartField? field = shape.Fields.FirstOrDefault(each => each.Key == key && CanBeSet(each));
             if (field is null)
             {
                 return Result.Fail<Part>(
                     key, $"is no figure of {stored.Kind.Word()} that can be set",
                     "one of " + string.Join(", ", shape.Fields
+                        .Where(CanBeSet)
                         .Select(each => each.Key)
-                        .Where(each => each is not ("id" or "basis") && !each.Contains(' ', StringComparison.Ordinal))));
+                        .Where(each => !each.Contains(' ', StringComparison.Ordinal))));
             }
 
             stored.ByHand.Remove(key);

@@ -157,6 +157,10 @@ internal sealed class CatalogFile : IDisposable
     /// <summary>All stored parts one by one, in the order of their ids; null where a document holds none.</summary>
     public IEnumerable<StoredPart?> ReadStored() => PartPages.All(Parts).Select(PartDocument.ReadStored);
 
+    /// <summary>The stored parts whose ids come after one, in the order of their ids; null where a document holds none.</summary>
+    public IEnumerable<StoredPart?> ReadStoredAfter(string id, int most) =>
+        Parts.Find(BsonExpression.Create("$._id > @0", id), 0, most).Select(PartDocument.ReadStored);
+
     /// <summary>A stored part; null where there is none, or none can be read.</summary>
     public StoredPart? FindStored(string id) => Parts.FindById(id) is { } document ? PartDocument.ReadStored(document) : null;
 
@@ -248,15 +252,21 @@ internal sealed class CatalogFile : IDisposable
         About.Upsert(TextDocument.Write(UndoableKey, count));
     }
 
+    /// <summary>The import that can be taken back; null where there is none.</summary>
+    public ImportNote? Undoable() =>
+        int.TryParse(TextDocument.Read(About.FindById(UndoableKey)), out int number) && ImportNotes.FindById(number) is { } document
+            ? ImportDocument.Read(document)
+            : null;
+
     /// <summary>Takes back the last import, as far as it was not taken back before; null where there is none.</summary>
     public ImportNote? UndoLastImport()
     {
-        if (!int.TryParse(TextDocument.Read(About.FindById(UndoableKey)), out int number)
-            || ImportNotes.FindById(number) is not { } document || ImportDocument.Read(document) is not { } note)
+        if (Undoable() is not { } note)
         {
             return null;
         }
 
+        int number = note.Number;
         foreach (BsonDocument earlier in Earlier.FindAll().ToList())
         {
             StoredPart? now = FindStored(earlier["_id"].AsString);

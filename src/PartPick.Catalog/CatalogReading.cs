@@ -6,34 +6,54 @@ namespace PartPick.Catalog;
 /// <summary>Reads parts of a catalogue with their origins, one kind or one part at a time.</summary>
 public static class CatalogReading
 {
-    /// <summary>Reads the parts of a kind, one by one in the order of their ids, while the catalogue is held.</summary>
+    /// <summary>
+    /// Reads the parts of a kind, one by one in the order of their ids; what is done with them takes as long as it may, the catalogue
+    /// is not held meanwhile.
+    /// </summary>
     /// <param name="path">The path of the file; made as in <see cref="CatalogStore.Load(string)"/> where it is not there.</param>
     /// <param name="kind">The kind.</param>
     /// <param name="take">What is done with each part.</param>
-    /// <returns>How many there were, or the problem.</returns>
+    /// <returns>How many there were, or the problem; an import that comes between is one.</returns>
     public static Result<int> Each(string path, PartKind kind, Action<CatalogEntry> take)
     {
         ArgumentNullException.ThrowIfNull(take);
-        return CatalogStore.UseCurrent(path, file =>
-        {
-            var origins = new Origins(file.ReadImports());
-            int count = 0;
-            foreach (StoredPart? stored in file.ReadStored())
+        int count = 0;
+        Result<bool> whole = PartPieces.Read(
+            path,
+            PartPieces.Most,
+            (piece, imports) =>
             {
-                if (stored is null)
-                {
-                    throw Unreadable();
-                }
-
-                if (stored.Kind == kind)
+                var origins = new Origins(imports);
+                foreach (StoredPart stored in piece.Where(stored => stored.Kind == kind))
                 {
                     take(EntryOf(stored, origins));
                     count++;
                 }
-            }
+            },
+            CancellationToken.None);
+        return whole.Then(isWhole => isWhole
+            ? Result.Ok(count)
+            : Result.Fail<int>(path, "was changed by an import or an undo while it was read", "the same again"));
+    }
 
-            return count;
-        });
+    /// <summary>
+    /// Reads all parts as <see cref="CatalogStore.Load(string)"/> does, but leaves the catalogue free for others between pieces.
+    /// </summary>
+    /// <param name="path">The path of the file.</param>
+    /// <param name="cancellation">Ends it.</param>
+    /// <returns>The parts, or the problem.</returns>
+    public static Result<PartsCatalog> All(string path, CancellationToken cancellation)
+    {
+        while (true)
+        {
+            var parts = new List<Part>();
+            Result<bool> whole = PartPieces.Read(
+                path, PartPieces.Most, (piece, _) => parts.AddRange(piece.Select(BuiltOf)), cancellation);
+            if (!whole.IsOk || whole.Value)
+            {
+                return whole.Map(_ => new PartsCatalog(parts));
+            }
+        }
     }
 
     /// <summary>Reads one part.</summary>
@@ -46,6 +66,11 @@ public static class CatalogReading
         return CatalogStore.UseCurrent(
             path, file => file.FindStored(id) is { } stored ? EntryOf(stored, new Origins(file.ReadImports())) : null);
     }
+
+    /// <summary>The import that can be taken back.</summary>
+    /// <param name="path">The path of the file.</param>
+    /// <returns>Its note, null where there is none; or the problem.</returns>
+    public static Result<ImportNote?> Undoable(string path) => CatalogStore.UseCurrent(path, file => file.Undoable());
 
     /// <summary>Counts what a catalogue holds.</summary>
     /// <param name="path">The path of the file.</param>
@@ -68,7 +93,9 @@ public static class CatalogReading
     });
 
     private static CatalogEntry EntryOf(StoredPart stored, Origins origins) =>
-        new(stored.Build() ?? throw Unreadable(), origins.Of(stored));
+        new(BuiltOf(stored), origins.Of(stored));
+
+    private static Part BuiltOf(StoredPart stored) => stored.Build() ?? throw Unreadable();
 
     private static InvalidDataException Unreadable() => new("A part in it cannot be read.");
 }

@@ -79,22 +79,11 @@ public static class PartCsv
     {
         ArgumentNullException.ThrowIfNull(parts);
         ArgumentNullException.ThrowIfNull(text);
-        PartShape shape = PartShape.Of(kind);
-        CsvWriterOptions options = CsvWriterOptions.Default with { NewLine = "\n", Separator = ',', WriteByteOrderMark = false };
-        using CsvWriter writer = CsvWriter.Create(text, options, true);
-        writer.WriteRecord([.. shape.Fields.Select(field => field.Header)]);
+        using var writer = new PartCsvWriter(kind, text);
         foreach (Part part in parts)
         {
-            if (part.Kind != kind)
-            {
-                throw new ArgumentException($"{part.Id} is not one of the {kind.Word()}.", nameof(parts));
-            }
-
-            PartDraft draft = shape.DraftOf(part);
-            writer.WriteRecord([.. shape.Fields.Select(field => field.Write(draft))]);
+            writer.Write(part);
         }
-
-        writer.Flush();
     }
 
     private static Part? ReadRow(

@@ -134,7 +134,8 @@ internal static class ImportTable
 
     private static ConnectionString Connection(string path) => new() { Filename = path, Collation = new Collation("/Ordinal") };
 
-    private static void WriteList(string path, int rows)
+    /// <summary>Writes a list of crystals as a supplier might.</summary>
+    public static void WriteList(string path, int rows)
     {
         var random = new Random(1);
         using var text = new StreamWriter(path) { NewLine = "\n" };

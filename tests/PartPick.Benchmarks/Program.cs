@@ -7,6 +7,11 @@ if (args is ["--rankings", .. var rest])
     return RankingTable.Print(rest, Console.Out, Console.Error);
 }
 
+if (args is ["--browse", .. var parts])
+{
+    return BrowseTable.Print(parts, Console.Out);
+}
+
 if (args is ["--import", .. var size])
 {
     return ImportTable.Print(size, Console.Out);

@@ -83,7 +83,7 @@ public static class CatalogImport
         }
     }
 
-    private static Result<List<ColumnWish>> Wishes(string path, ImportRequest request)
+    internal static Result<List<ColumnWish>> Wishes(string path, ImportRequest request)
     {
         Result<List<ColumnWish>> stated = ColumnWishes.Read(request.Kind, request.Columns);
         if (!stated.IsOk || request.Map is not { } name)

@@ -1,6 +1,5 @@
 using System.CommandLine;
 using System.Text;
-using System.Text.Json.Nodes;
 using PartPick.Catalog;
 using PartPick.Output;
 using PartPick.Values;
@@ -32,17 +31,16 @@ internal static class CatalogExportCommand
         command.SetAction(parsed =>
         {
             PartKind wanted = CommandFailure.Unless(PartKinds.Named(parsed.GetRequiredValue(kind), kind.Name));
-            var entries = new List<CatalogEntry>();
-            CommandFailure.Unless(CatalogReading.Each(context.CatalogPath(parsed), wanted, entries.Add), ExitStatus.NoCatalog);
-            string form = parsed.GetValue(format) ?? "csv";
+            string catalog = context.CatalogPath(parsed);
             if (parsed.GetValue(to) is { } path)
             {
-                WriteFile(path, writer => Write(writer, form, wanted, entries));
-                context.Surroundings.Error.WriteLine($"{entries.Count} {wanted.Word()} written to {path}");
+                int count = 0;
+                WriteFile(path, writer => count = Write(writer, CommandContext.FormatOf(parsed, format), wanted, catalog));
+                context.Surroundings.Error.WriteLine($"{count} {wanted.Word()} written to {path}");
             }
             else
             {
-                Write(context.Output, form, wanted, entries);
+                Write(context.Output, CommandContext.FormatOf(parsed, format), wanted, catalog);
             }
 
             return ExitStatus.Done;
@@ -50,20 +48,12 @@ internal static class CatalogExportCommand
         return command;
     }
 
-    private static void Write(TextWriter output, string form, PartKind kind, List<CatalogEntry> entries)
+    private static int Write(TextWriter output, OutputFormat format, PartKind kind, string catalog)
     {
-        switch (form)
-        {
-            case "json":
-                JsonOutput.Write(output, new JsonArray([.. entries.Select(entry => (JsonNode)PartJson.Of(entry))]));
-                break;
-            case "table":
-                PartTable.WriteList(output, kind, entries);
-                break;
-            default:
-                PartCsv.Write(kind, entries.Select(entry => entry.Part), output);
-                break;
-        }
+        using var parts = new PartsOutput(output, format, kind);
+        int count = CommandFailure.Unless(CatalogReading.Each(catalog, kind, parts.Write), ExitStatus.NoCatalog);
+        parts.End();
+        return count;
     }
 
     // Under another name first: a full disk leaves an earlier file of this name as it was.
@@ -87,6 +77,22 @@ internal static class CatalogExportCommand
                     $"{Problem.Quote(path)} cannot be written: {error.Message}",
                     "a file in a directory that can be written to"),
                 ExitStatus.WrongInput);
+        }
+        finally
+        {
+            DeleteQuietly(unfinished);
+        }
+    }
+
+    private static void DeleteQuietly(string path)
+    {
+        try
+        {
+            File.Delete(path);
+        }
+        catch (Exception error) when (error is IOException or UnauthorizedAccessException or ArgumentException or NotSupportedException)
+        {
+            // What is wrong with the path was said already.
         }
     }
 }

@@ -64,7 +64,7 @@ internal static class CatalogImportCommand
                 Kind = CommandFailure.Unless(PartKinds.Named(parsed.GetRequiredValue(kind), kind.Name)),
                 Name = path == "-" ? "standard input" : Path.GetFileName(path),
                 RejectedPath = parsed.GetValue(rejected)
-                    ?? (path == "-" ? "standard-input.rejected.csv" : Path.ChangeExtension(path, ".rejected.csv")),
+                    ?? (path == "-" ? "standard-input.rejected.csv" : ListFile.RejectedPathOf(path)),
                 DryRun = parsed.GetValue(dryRun),
                 Map = parsed.GetValue(map) is { Length: > 0 } name ? name : null,
                 Columns = [.. parsed.GetValue(column) ?? []],
@@ -108,15 +108,8 @@ internal static class CatalogImportCommand
             return ((StreamReader)context.Surroundings.Input).BaseStream;
         }
 
-        try
-        {
-            return new FileStream(path, FileMode.Open, FileAccess.Read, FileShare.ReadWrite, 1 << 16, FileOptions.SequentialScan);
-        }
-        catch (Exception error) when (error is IOException or UnauthorizedAccessException or ArgumentException or NotSupportedException)
-        {
-            string what = error is FileNotFoundException or DirectoryNotFoundException ? "is not there"
-                : Directory.Exists(path) ? "is a directory" : "cannot be read";
-            throw new CommandFailure(new Problem(path, what, "the path of a file, or - for standard input"), ExitStatus.WrongInput);
-        }
+        Result<Stream> file = ListFile.Open(path);
+        return file.IsOk ? file.Value : throw new CommandFailure(
+            file.Problem with { Fits = file.Problem.Fits + ", or - for standard input" }, ExitStatus.WrongInput);
     }
 }

@@ -1,6 +1,6 @@
 using System.CommandLine;
-using System.Text.Json.Nodes;
 using PartPick.Catalog;
+using PartPick.Catalog.Browsing;
 using PartPick.Output;
 
 namespace PartPick.Commands;
@@ -12,6 +12,7 @@ internal static class CatalogListCommand
         """
         partpick catalog list crystals
         partpick catalog list crystals --filter "4 MHz" --top 20 --format json
+        partpick catalog list crystals --filter "H49 frequency=4.096M load<=18p"
         """;
 
     /// <summary>Builds the command.</summary>
@@ -20,7 +21,7 @@ internal static class CatalogListCommand
         var kind = new Argument<string>("KIND") { Description = string.Join(", ", PartKinds.All.Select(each => each.Word())) };
         var filter = new Option<string?>("--filter")
         {
-            Description = "Only parts with this text in id, description, package, supplier or number",
+            Description = "Words that stand in the texts of a part, and conditions on its figures such as load<=18p",
             HelpName = "TEXT",
         };
         var top = new Option<string?>("--top") { Description = "Most parts to list (all)", HelpName = "N" };
@@ -30,41 +31,23 @@ internal static class CatalogListCommand
         {
             PartKind wanted = CommandFailure.Unless(PartKinds.Named(parsed.GetRequiredValue(kind), kind.Name));
             int most = Counts.Read(parsed.GetValue(top), top.Name) ?? int.MaxValue;
-            string text = parsed.GetValue(filter) ?? "";
-            var entries = new List<CatalogEntry>();
+            PartFilter narrow = CommandFailure.Unless(PartFilter.Read(wanted, parsed.GetValue(filter) ?? "", filter.Name));
+            int count = 0;
+            using var parts = new PartsOutput(context.Output, context.FormatOf(parsed), wanted);
             CommandFailure.Unless(
                 CatalogReading.Each(context.CatalogPath(parsed), wanted, entry =>
                 {
                     context.Surroundings.Cancellation.ThrowIfCancellationRequested();
-                    if (entries.Count < most && Holds(entry.Part, text))
+                    if (count < most && narrow.Holds(PartRow.Of(entry.Part)))
                     {
-                        entries.Add(entry);
+                        count++;
+                        parts.Write(entry);
                     }
                 }),
                 ExitStatus.NoCatalog);
-            Write(context.Output, context.FormatOf(parsed), wanted, entries);
+            parts.End();
             return ExitStatus.Done;
         });
         return command;
     }
-
-    private static void Write(TextWriter output, OutputFormat format, PartKind kind, List<CatalogEntry> entries)
-    {
-        switch (format)
-        {
-            case OutputFormat.Json:
-                JsonOutput.Write(output, new JsonArray([.. entries.Select(entry => (JsonNode)PartJson.Of(entry))]));
-                break;
-            case OutputFormat.Csv:
-                PartCsv.Write(kind, entries.Select(entry => entry.Part), output);
-                break;
-            default:
-                PartTable.WriteList(output, kind, entries);
-                break;
-        }
-    }
-
-    private static bool Holds(Part part, string text) => text.Length == 0
-        || new[] { part.Id, part.Description, part.Package, part.Supplier, part.SupplierPart, part.Note }
-            .Any(each => each?.Contains(text, StringComparison.OrdinalIgnoreCase) == true);
 }

@@ -40,7 +40,10 @@ internal sealed class CommandContext
     private static string CatalogPathOption => PartPick.Catalog.CatalogPath.Option;
 
     /// <summary>The chosen format.</summary>
-    public OutputFormat FormatOf(ParseResult parsed) => parsed.GetValue(Format) switch
+    public OutputFormat FormatOf(ParseResult parsed) => FormatOf(parsed, Format);
+
+    /// <summary>The format that a command's own option chooses.</summary>
+    public static OutputFormat FormatOf(ParseResult parsed, Option<string> format) => parsed.GetValue(format) switch
     {
         "json" => OutputFormat.Json,
         "csv" => OutputFormat.Csv,

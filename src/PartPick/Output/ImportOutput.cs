@@ -52,8 +52,7 @@ internal static class ImportOutput
 
     private static void WriteTable(TextWriter output, ImportReport report)
     {
-        string delimiter = report.Delimiter switch { '\t' => "tab", ';' => "semicolon", ',' => "comma", _ => report.Delimiter.ToString() };
-        output.WriteLine($"{report.Encoding}, {delimiter} between cells, header on line {Text(report.HeaderLine)}");
+        output.WriteLine(ImportPace.Layout(report.Encoding, report.Delimiter, report.HeaderLine));
         output.WriteLine();
         TextTable.Write(
             output, [new("column"), new("figure"), new("unit"), new("why")],
@@ -67,8 +66,7 @@ internal static class ImportOutput
             output.WriteLine();
         }
 
-        output.WriteLine($"{Text(report.Read)} read = {Text(report.Added)} added + {Text(report.Updated)} updated + "
-            + $"{Text(report.Unchanged)} unchanged + {Text(report.Rejected)} rejected{(report.DryRun ? "; nothing was written" : "")}");
+        output.WriteLine(ImportPace.Sum(report));
         if (report.RejectedFile is { } path)
         {
             output.WriteLine($"rejected rows, to be mended and imported again: {path}");

@@ -1,4 +1,3 @@
-using System.Globalization;
 using PartPick.Catalog.Import;
 
 namespace PartPick.Output;
@@ -18,11 +17,7 @@ internal sealed class ImportProgressLine(TextWriter error) : IProgress<ImportPro
         }
 
         _last = value.Elapsed;
-        double rate = value.Rows / Math.Max(value.Elapsed.TotalSeconds, 1e-3);
-        string left = value.Share is > 0 and { } share
-            ? string.Create(CultureInfo.InvariantCulture, $", {value.Elapsed.TotalSeconds * (1 - share) / share:F0} s left")
-            : "";
-        string line = string.Create(CultureInfo.InvariantCulture, $"{value.Rows} rows, {rate:F0} rows/s{left}");
+        string line = ImportPace.Words(value);
         error.Write("\r" + line.PadRight(_shown));
         _shown = line.Length;
     }

@@ -16,4 +16,8 @@ internal static class JsonOutput
 
     /// <summary>Prints a node and ends the line.</summary>
     public static void Write(TextWriter output, JsonNode node) => output.WriteLine(node.ToJsonString(Readable));
+
+    /// <summary>A node as it stands within a list.</summary>
+    public static string Indented(JsonNode node) =>
+        "  " + node.ToJsonString(Readable).Replace("\n", "\n  ", StringComparison.Ordinal);
 }

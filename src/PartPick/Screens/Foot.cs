@@ -26,10 +26,12 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
             { Place: Place.Sentence } => [Value(("Tab", "next"), ("Esc", model.IsReading ? "circuit" : "list"))],
             { Place: Place.Circuit } => [Keys(
                 (UpDown, "scroll"), (glyphs.Left + " " + glyphs.Right, "other circuits"), ("Esc", "list"), ("e", "edit"), ("?", "keys"))],
-            { List.Chosen: null } => [Keys(("e", "edit the wanted"), ("?", "keys"), ("q", "quit"))],
-            _ => [Keys((UpDown, "choose"), ("Enter", "open"), ("e", "edit the wanted"), ("?", "keys"), ("q", "quit"))],
+            { List.Chosen: null } => [Keys([("e", "edit the wanted"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
+            _ => [Keys([(UpDown, "choose"), ("Enter", "open"), ("e", "edit the wanted"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
         };
     }
+
+    private (string, string)[] Catalogue => model.Parts is null ? [] : [("c", "catalogue")];
 
     private string UpDown => glyphs.Up + " " + glyphs.Down;
 
@@ -49,21 +51,5 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
         return line.Build();
     }
 
-    // Where they do not all fit, the last ones stay: they lead on and out.
-    private Line Keys(params (string Key, string Does)[] keys)
-    {
-        int first = 0;
-        while (first < keys.Length - 2 && keys[first..].Sum(pair => pair.Key.Length + pair.Does.Length + 4) - 2 > width)
-        {
-            first++;
-        }
-
-        LineBuilder line = new LineBuilder(glyphs).Add(" ");
-        foreach ((string key, string does) in keys[first..])
-        {
-            line.Add(key, Tone.Strong).Add(" " + does + "   ");
-        }
-
-        return line.Build();
-    }
+    private Line Keys(params (string Key, string Does)[] keys) => KeyLine.Draw(width, glyphs, keys);
 }

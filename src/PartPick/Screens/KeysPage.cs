@@ -8,14 +8,21 @@ public static class KeysPage
     /// <summary>The page.</summary>
     /// <param name="width">Width in cells.</param>
     /// <param name="glyphs">The signs.</param>
-    public static ImmutableArray<Line> Draw(int width, Glyphs glyphs)
+    /// <param name="fromParts">Whether it was asked for in the catalogue, whose keys come first then.</param>
+    public static ImmutableArray<Line> Draw(int width, Glyphs glyphs, bool fromParts = false)
     {
         ArgumentNullException.ThrowIfNull(glyphs);
         var lines = ImmutableArray.CreateBuilder<Line>();
+        if (fromParts)
+        {
+            Parts();
+        }
+
         Head("In the list");
         Key($"{glyphs.Up} {glyphs.Down}", "the circuit before, the next one; also PgUp, PgDn, Home, End");
         Key("Enter", "open the circuit: drawing, parts, error, figures, reasons");
         Key("e or Tab", "edit the wanted sentence; so does " + glyphs.Up + " on the first circuit");
+        Key("c", "the catalogue: its parts, and the import of a list");
         Key("?", "this page");
         Key("q", "quit; the wanted sentence is kept for the next time");
         Head("In the wanted sentence");
@@ -42,7 +49,34 @@ public static class KeysPage
         Text("The figures come from a model and from the parts' stated data: measure the start-up margin of the first board. " +
             "Radiating a signal needs a licence where the law says so. Timing that safety rests on needs a review by a qualified " +
             "person. Local codes and the law come before anything shown here.");
+        if (!fromParts)
+        {
+            Parts();
+        }
+
         return lines.ToImmutable();
+
+        void Parts()
+        {
+            Head("In the catalogue");
+            Key($"{glyphs.Up} {glyphs.Down}", "the part before, the next one; also PgUp, PgDn, Home, End");
+            Key("f or Tab", "filter: words of a part's texts, and conditions such as load<=18p or frequency=4.096M; Esc takes it away");
+            Key($"{glyphs.Left} {glyphs.Right}", "mark a column; o puts the parts in its order, o again turns the order round");
+            Key("k", "the next kind of part");
+            Key("Enter", "open the part: each figure with what it rests on and where it came from");
+            Key("i", "import a list; u takes the last import back, when pressed twice");
+            Head("In a part of the catalogue");
+            Key("Enter", "change the figure; a digit begins a new one; no import changes what was set by hand");
+            Key("b", "back to the figure that was supplied; Delete takes a figure away");
+            Key("n x", "write a note; exclude the part from every search, or take it in again");
+            Key($"{glyphs.Left} {glyphs.Right}", "the part before, the next one");
+            Head("In an import");
+            Key("Enter", "change what the list or a column is: a figure's name, or its beginning, with a unit behind a colon");
+            Key($"{glyphs.Left} {glyphs.Right}", "the choice before, the next one; Delete leaves a column out, b finds it again");
+            Key("r", "the first rows as they are read, with what is wrong in them");
+            Key("k", "keep the columns under a name, for the next list of this kind");
+            Key("d i", "try it without writing; import it, all or nothing; Esc and Ctrl-C stop it");
+        }
 
         void Head(string text)
         {

@@ -13,6 +13,7 @@ public sealed class MainModel
     private readonly Glyphs _glyphs;
     private readonly bool _waits;
     private readonly Reading _reading;
+    private bool _putOff;
 
     /// <summary>Makes the screen of a requirement and starts ranking.</summary>
     /// <param name="requirement">The requirement.</param>
@@ -21,8 +22,15 @@ public sealed class MainModel
     /// <param name="notice">A line to show until the first key; null for none.</param>
     /// <param name="currency">The currency of the cost limit; empty where it is not known.</param>
     /// <param name="waits">Whether a change waits a moment for the next one before it is ranked.</param>
+    /// <param name="parts">The screens of the catalogue; null for none.</param>
     public MainModel(
-        Requirement requirement, LiveRanking ranking, Glyphs glyphs, string? notice = null, string currency = "", bool waits = true)
+        Requirement requirement,
+        LiveRanking ranking,
+        Glyphs glyphs,
+        string? notice = null,
+        string currency = "",
+        bool waits = true,
+        PartsModel? parts = null)
     {
         ArgumentNullException.ThrowIfNull(ranking);
         _ranking = ranking;
@@ -33,6 +41,12 @@ public sealed class MainModel
         Wanted = new SentenceModel(requirement, glyphs, currency);
         Wanted.Changed += Rank;
         _ranking.Answered += Take;
+        Parts = parts;
+        if (parts is not null)
+        {
+            parts.Redraw += () => Redraw?.Invoke();
+        }
+
         _ranking.Ask(requirement, TimeSpan.Zero);
     }
 
@@ -41,6 +55,12 @@ public sealed class MainModel
 
     /// <summary>Raised with a requirement that is worth keeping.</summary>
     public event Action<Requirement>? Settled;
+
+    /// <summary>Raised when the parts of the catalogue are other ones than those that are ranked.</summary>
+    public event Action? PartsChanged;
+
+    /// <summary>The screens of the catalogue; null where there are none.</summary>
+    public PartsModel? Parts { get; }
 
     /// <summary>The sentence.</summary>
     public SentenceModel Wanted { get; }
@@ -78,6 +98,21 @@ public sealed class MainModel
     /// <summary>Ends the ranking.</summary>
     public void Stop() => _ranking.Stop();
 
+    /// <summary>Ranks again, as after the parts have changed.</summary>
+    public void RankAgain() => Rank(false);
+
+    /// <summary>Says something until the next key.</summary>
+    /// <param name="notice">The line.</param>
+    public void Say(string notice)
+    {
+        Notice = notice;
+        Redraw?.Invoke();
+    }
+
+    /// <summary>Stops what the user may want to stop without leaving: an import that runs.</summary>
+    /// <returns>Whether there was such a thing.</returns>
+    public bool Interrupt() => Place == Place.Parts && Parts!.Interrupt();
+
     /// <summary>Takes a key.</summary>
     /// <param name="key">The key.</param>
     public void Press(KeyPress key)
@@ -96,6 +131,9 @@ public sealed class MainModel
                 break;
             case Place.Circuit:
                 PressInCircuit(key);
+                break;
+            case Place.Parts:
+                PressInParts(key);
                 break;
             default:
                 PressInList(key);
@@ -152,6 +190,45 @@ public sealed class MainModel
         }
     }
 
+    private void PressInParts(KeyPress key)
+    {
+        switch (Parts!.Press(key))
+        {
+            case PartsAnswer.Leave:
+                LeaveParts();
+                break;
+            case PartsAnswer.NotMine when key.Letter is '?' or 'q':
+                PressAnywhere(key);
+                break;
+        }
+    }
+
+    // A ranking takes all the machine there is; it waits while the catalogue is open.
+    private void EnterParts()
+    {
+        Place = Place.Parts;
+        _putOff = _ranking.IsRunning;
+        _ranking.Stop();
+        Parts!.Enter();
+    }
+
+    // The ranking that was put off goes on where the parts are the same; else it waits for the new ones.
+    private void LeaveParts()
+    {
+        Place = _reading.IsThere ? Place.Circuit : Place.List;
+        if (Parts!.HasChanged)
+        {
+            Parts.HasChanged = false;
+            PartsChanged?.Invoke();
+        }
+        else if (_putOff)
+        {
+            RankAgain();
+        }
+
+        _putOff = false;
+    }
+
     private void LeaveSentence()
     {
         Place = _reading.IsThere ? Place.Circuit : Place.List;
@@ -206,6 +283,9 @@ public sealed class MainModel
                 break;
             case { Name: KeyName.Letter, Letter: 'e' }:
                 Place = Place.Sentence;
+                break;
+            case { Name: KeyName.Letter, Letter: 'c' } when Parts is not null:
+                EnterParts();
                 break;
             case { Name: KeyName.Tab or KeyName.BackTab } when Place == Place.Circuit:
                 Place = Place.Sentence;

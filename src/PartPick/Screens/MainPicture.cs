@@ -23,6 +23,11 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
             return Filled([Line.Empty, new LineBuilder(glyphs).Words(text, width).Build()], height);
         }
 
+        if (model is { Place: Place.Parts, ShowsKeys: false })
+        {
+            return model.Parts!.Draw(width, height);
+        }
+
         ImmutableArray<Line> sentence =
             model.Wanted.Draw(width - 1, model.Place == Place.Sentence && !model.ShowsKeys, Math.Max(3, height / 4));
         ImmutableArray<Line> foot = new Foot(model, glyphs, width).Draw();
@@ -120,7 +125,7 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
 
     private ImmutableArray<Line> KeysBody(int room)
     {
-        ImmutableArray<Line> shown = model.KeysScroll.Cut(KeysPage.Draw(width, glyphs), room - 1);
+        ImmutableArray<Line> shown = model.KeysScroll.Cut(KeysPage.Draw(width, glyphs, model.Place == Place.Parts), room - 1);
         return [Rules.Draw("Keys", model.KeysScroll.HasMore ? "more below" : "", width, glyphs), .. shown];
     }
 

@@ -11,4 +11,7 @@ public enum Place
 
     /// <summary>The page of one circuit.</summary>
     Circuit,
+
+    /// <summary>The screens of the catalogue.</summary>
+    Parts,
 }

@@ -31,7 +31,7 @@ public static class ScreenHost
 
     private static int Open(string catalogPath, string? requirementPath)
     {
-        Result<PartsCatalog> catalog = CatalogStore.Load(catalogPath);
+        Result<PartsCatalog> catalog = Load(catalogPath);
         if (!catalog.IsOk)
         {
             return Fail(ExitStatus.NoCatalog, catalog.Problem.ToString());
@@ -48,7 +48,7 @@ public static class ScreenHost
             : start.Value is null ? "Press e and say what is wanted; ? shows all keys."
             : null;
         var run = new TerminalRun(
-            new CatalogRanking(catalog.Value), TerminalTraits.Of(Environment.GetEnvironmentVariable),
+            catalogPath, new CatalogRanking(catalog.Value), TerminalTraits.Of(Environment.GetEnvironmentVariable),
             requirement => keeper.Keep(requirement), new Market(catalog.Value, 1).Currency);
         Requirement end = run.Show(start.ValueOr(null) ?? First, notice);
         return keeper.Keep(end) is { } problem ? Fail(ExitStatus.NoCatalog, problem.ToString()) : ExitStatus.Done;
@@ -56,6 +56,21 @@ public static class ScreenHost
 
     /// <summary>The sentence of the very first time.</summary>
     private static Requirement First => new() { OutputHz = 1000, Waveform = Waveform.Square };
+
+    // A large catalogue takes seconds: they are not left blank.
+    private static Result<PartsCatalog> Load(string catalogPath)
+    {
+        const string words = "reading the parts of the catalogue";
+        var loading = Task.Run(() => CatalogStore.Load(catalogPath));
+        if (!loading.Wait(TimeSpan.FromMilliseconds(500)))
+        {
+            Console.Error.Write(words);
+            ((IAsyncResult)loading).AsyncWaitHandle.WaitOne();
+            Console.Error.Write("\r" + new string(' ', words.Length) + "\r");
+        }
+
+        return loading.GetAwaiter().GetResult();
+    }
 
     private static Result<Requirement?> ReadFile(string path)
     {

@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using PartPick.Screens;
 using PartPick.Selection;
 using Terminal.Gui.App;
@@ -14,14 +15,26 @@ internal sealed class Bench : IDisposable
     private readonly IApplication _app;
     private readonly LiveRanking _live;
     private readonly MainScreen _screen;
+    private readonly ConcurrentQueue<Action> _posted = new();
+    private readonly ScreenWork _work;
 
-    public Bench(int width = 80, int height = 24, FakeRanking? ranking = null, Requirement? requirement = null, Glyphs? glyphs = null)
+    public Bench(
+        int width = 80,
+        int height = 24,
+        FakeRanking? ranking = null,
+        Requirement? requirement = null,
+        Glyphs? glyphs = null,
+        string? catalogue = null)
     {
         Ranking = ranking ?? new FakeRanking();
+        _work = new ScreenWork(_posted.Enqueue);
+        PartsModel? parts = catalogue is null
+            ? null
+            : new PartsModel(catalogue, _work, glyphs ?? Glyphs.Drawn, () => new DateOnly(2026, 3, 1));
         _app = Application.Create(new VirtualTimeProvider()).Init(DriverRegistry.Names.ANSI);
         _app.Driver!.SetScreenSize(width, height);
         _live = new LiveRanking(Ranking, action => action(), TimeProvider.System);
-        Model = new MainModel(requirement ?? SampleRanking.Wanted, _live, glyphs ?? Glyphs.Drawn, waits: false);
+        Model = new MainModel(requirement ?? SampleRanking.Wanted, _live, glyphs ?? Glyphs.Drawn, waits: false, parts: parts);
         _screen = new MainScreen(Model, Palette.Plain);
         _app.Begin(_screen);
         _app.LayoutAndDraw();
@@ -46,6 +59,30 @@ internal sealed class Bench : IDisposable
 
     public void Type(string text) => Press([.. text.Select(letter => new Key(letter))]);
 
+    /// <summary>Waits until what was begun in the background is done and shown.</summary>
+    public void Settle() => SettleUntil(() => _work.IsIdle && _posted.IsEmpty);
+
+    /// <summary>Shows what comes from the background until something is so.</summary>
+    public void SettleUntil(Func<bool> isSo)
+    {
+        long start = TimeProvider.System.GetTimestamp();
+        while (!isSo())
+        {
+            Assert.True(TimeProvider.System.GetElapsedTime(start) < TimeSpan.FromSeconds(60), "It did not settle:\n" + Text);
+            if (_posted.TryDequeue(out Action? posted))
+            {
+                posted();
+            }
+            else
+            {
+                Thread.Sleep(1);
+            }
+        }
+
+        _screen.Refresh();
+        _app.LayoutAndDraw();
+    }
+
     public void Resize(int width, int height)
     {
         _app.Driver!.SetScreenSize(width, height);
@@ -54,6 +91,7 @@ internal sealed class Bench : IDisposable
 
     public void Dispose()
     {
+        Model.Parts?.Stop();
         _live.Dispose();
         _screen.Dispose();
         _app.Dispose();

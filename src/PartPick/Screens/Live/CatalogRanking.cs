@@ -7,8 +7,14 @@ namespace PartPick.Screens;
 /// <param name="catalog">The parts.</param>
 public sealed class CatalogRanking(PartsCatalog catalog) : IRankingService
 {
+    /// <summary>The parts; the next ranking takes them as they are then.</summary>
+    public PartsCatalog Catalog { get; set; } = catalog;
+
     /// <inheritdoc/>
     public Task<RankingResult> RankAsync(
-        Requirement requirement, IProgress<RankingResult> progress, CancellationToken cancellation) =>
-        Task.Run(() => Ranker.Rank(requirement, catalog, null, progress, cancellation), cancellation);
+        Requirement requirement, IProgress<RankingResult> progress, CancellationToken cancellation)
+    {
+        PartsCatalog parts = Catalog;
+        return Task.Run(() => Ranker.Rank(requirement, parts, null, progress, cancellation), cancellation);
+    }
 }

@@ -49,6 +49,12 @@ internal sealed class MainScreen : Runnable
 
     protected override bool OnKeyDown(Key key)
     {
+        if (key == Key.C.WithCtrl && _model.Interrupt())
+        {
+            Refresh();
+            return true;
+        }
+
         if (key == Key.Q.WithCtrl || key == Key.C.WithCtrl)
         {
             App?.RequestStop();

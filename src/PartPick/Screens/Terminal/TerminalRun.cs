@@ -1,18 +1,25 @@
 using System.Runtime.InteropServices;
+using PartPick.Catalog;
 using PartPick.Selection;
+using PartPick.Values;
 using Terminal.Gui.App;
 using Terminal.Gui.Drivers;
 
 namespace PartPick.Screens;
 
 /// <summary>Owns the terminal from the first to the last drawn row.</summary>
-/// <param name="ranking">What ranks.</param>
+/// <param name="catalogPath">The path of the catalogue.</param>
+/// <param name="ranking">What ranks its parts.</param>
 /// <param name="traits">What the terminal can show.</param>
 /// <param name="keep">Keeps a requirement; called from any thread.</param>
 /// <param name="currency">The currency of the costs; empty where it is not known.</param>
-internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits, Action<Requirement> keep, string currency)
+internal sealed class TerminalRun(
+    string catalogPath, CatalogRanking ranking, TerminalTraits traits, Action<Requirement> keep, string currency)
 {
     private const string MouseReportsOff = "\x1b[?1003l\x1b[?1015l\x1b[?1006l";
+
+    // A key is answered in the next iteration: 25 a second, as set at first, would let most keys wait.
+    private const ushort IterationsPerSecond = 60;
 
     private static readonly TimeSpan LastMoment = TimeSpan.FromSeconds(3);
 
@@ -24,18 +31,23 @@ internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits
     {
         // The terminal's own sixteen colours: they fit its background, and few of them are sent.
         Driver.Force16Colors = true;
+        Application.MaximumIterationsPerSecond = IterationsPerSecond;
         Glyphs glyphs = traits.IsUtf8 ? Glyphs.Drawn : Glyphs.Ascii;
         Palette palette = traits.HasColour ? Palette.Coloured : Palette.Plain;
         using IApplication app = Application.Create().Init(DriverRegistry.Names.ANSI);
         app.Driver!.WriteRaw(MouseReportsOff);
         using var live = new LiveRanking(ranking, action => Post(app, action), TimeProvider.System);
-        var model = new MainModel(start, live, glyphs, notice, currency);
+        var work = new ScreenWork(action => Post(app, action));
+        var parts = new PartsModel(catalogPath, work, glyphs, () => DateOnly.FromDateTime(TimeProvider.System.GetLocalNow().Date));
+        var model = new MainModel(start, live, glyphs, notice, currency, parts: parts);
+        model.PartsChanged += () => work.Start(stop => CatalogReading.All(catalogPath, stop), loaded => RankWith(loaded, model));
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
         using var screen = new MainScreen(model, palette);
         using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, Leave);
         using PosixSignalRegistration interrupt = PosixSignalRegistration.Create(PosixSignal.SIGINT, Leave);
         using PosixSignalRegistration hangUp = PosixSignalRegistration.Create(PosixSignal.SIGHUP, HangUp);
         app.Run(screen);
+        parts.Stop();
         return model.Wanted.Accepted;
 
         void Leave(PosixSignalContext context)
@@ -56,6 +68,18 @@ internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits
                 _ = Task.Delay(LastMoment).ContinueWith(_ => Environment.Exit(ExitStatus.Fault), TaskScheduler.Default);
             }
         }
+    }
+
+    private void RankWith(Result<PartsCatalog> loaded, MainModel model)
+    {
+        if (!loaded.IsOk)
+        {
+            model.Say($"! {loaded.Problem}");
+            return;
+        }
+
+        ranking.Catalog = loaded.Value;
+        model.RankAgain();
     }
 
     private static bool HasTerminal()

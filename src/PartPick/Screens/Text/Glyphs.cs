@@ -1,3 +1,4 @@
+using System.Globalization;
 using System.Text;
 
 namespace PartPick.Screens;
@@ -97,12 +98,15 @@ public sealed record Glyphs
     /// <summary>Name of the key Right.</summary>
     public required string Right { get; init; }
 
-    /// <summary>The text in signs that can be shown: control signs become spaces, and in ASCII all else is spelled.</summary>
+    /// <summary>
+    /// The text in signs that can be shown: control signs become spaces, so do those that turn the direction of writing or take no
+    /// room, and in ASCII all else is spelled.
+    /// </summary>
     /// <param name="text">The text.</param>
     public string Show(string text)
     {
         ArgumentNullException.ThrowIfNull(text);
-        if (!text.Any(sign => char.IsControl(sign) || (IsAscii && !char.IsAscii(sign))))
+        if (!text.Any(sign => IsUnseen(sign) || (IsAscii && !char.IsAscii(sign))))
         {
             return text;
         }
@@ -111,7 +115,7 @@ public sealed record Glyphs
         foreach (char sign in text)
         {
             shown.Append(
-                char.IsControl(sign) ? " "
+                IsUnseen(sign) ? " "
                 : !IsAscii || char.IsAscii(sign) ? sign.ToString()
                 : Spelled.TryGetValue(sign, out string? spelled) ? spelled
                 : "?");
@@ -119,4 +123,8 @@ public sealed record Glyphs
 
         return shown.ToString();
     }
+
+    private static bool IsUnseen(char sign) => char.IsControl(sign)
+        || (!char.IsAscii(sign) && char.GetUnicodeCategory(sign)
+            is UnicodeCategory.Format or UnicodeCategory.LineSeparator or UnicodeCategory.ParagraphSeparator);
 }
