@@ -45,7 +45,7 @@ internal static class ShortlistDrawing
             here ? glyphs.Chosen + " " : "  ", FormattableString.Invariant($"{review.Entry.Number}"),
             $"{review.Chosen.Circuit.Word()} {review.Chosen.Ids["amplifier"]}", megahertz, FormattableString.Invariant($"{review.Entry.Builds}"),
             review.Now.ErrorWorst is { } error ? Figures.Three(error) : "-", review.Now.Margin is { } margin ? Figures.Three(margin) : "-",
-            review.Now.Cost is { } cost ? Figures.Money(cost) : "-", ReviewWords.State(review), width, glyphs,
+            review.Now.Cost is { } cost ? Figures.Money(cost) : "-", ReviewWords.ShortState(review), width, glyphs,
             review.IsFit ? review.IsChanged ? Tone.Accent : Tone.Normal : Tone.Warning);
         return here ? line.Chosen() : line;
     }
@@ -83,7 +83,7 @@ internal static class ShortlistDrawing
             .. Paragraph.Of(
                 $"Put here on {review.Entry.Added}" + (review.Entry.Note is { } note ? $": {note}" : "."), width - 1, glyphs, " ", 1, Tone.Quiet),
             .. Paragraph.Of(
-                string.Join("  ", review.Parts.Select(use => use.Value.Length == 0 ? $"{use.Designator} {use.Part.Id}" : $"{use.Designator} {use.Value}")),
+                string.Join(", ", review.Parts.Select(use => $"{use.Designator} {(use.Role == PartRoles.Amplifier ? use.Part.Id : use.Value)}")),
                 width - 1, glyphs, " ", 1),
             .. lines.Length == 0
                 ? Paragraph.Of("Nothing about its parts changed since.", width - 1, glyphs, " ", 1)
