@@ -84,6 +84,13 @@ public sealed class ShortlistExportTests
         XNamespace svg = "http://www.w3.org/2000/svg";
         Assert.Equal(2, page.Descendants(svg + "svg").Count(each => (string?)each.Attribute("class") == "schematic"));
         Assert.Equal(4, page.Descendants(svg + "svg").Count(each => (string?)each.Attribute("class") == "bars"));
+        foreach (XElement picture in page.Descendants(svg + "svg"))
+        {
+            // A letter of 13 px monospace is at most 8 px wide.
+            Assert.All(picture.Descendants(svg + "text"), text => Assert.True(
+                (int)text.Attribute("x")! + 8 * text.Value.Length <= (int)picture.Attribute("width")! + 8, text.Value));
+        }
+
         JsonElement candidate = bench.List().GetProperty("candidates")[0];
         string drawing = string.Join(' ', page.Descendants(svg + "svg").First().Descendants(svg + "text").Select(text => text.Value));
         foreach (JsonElement use in candidate.GetProperty("parts").EnumerateArray()
@@ -189,6 +196,7 @@ public sealed class ShortlistExportTests
             (["logger", "--currency", "USD"], "--rate EUR"),
             (["logger", "--currency", " "], "is empty"),
             (["logger", "--to", ""], "is no path"),
+            (["logger", "--to", "/dev/null", "--force"], "is a device"),
             (["logger", "--to", bench.Catalog, "--force"], "is the catalogue itself"),
         ];
         foreach ((string[] arguments, string says) in cases)
