@@ -1,5 +1,4 @@
 using System.Text;
-using PartPick.Catalog.Fields;
 
 namespace PartPick.Catalog.Import;
 

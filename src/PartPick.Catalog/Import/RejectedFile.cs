@@ -1,7 +1,6 @@
 using System.Globalization;
 using System.Text;
 using CsvHelper;
-using PartPick.Catalog.Fields;
 
 namespace PartPick.Catalog.Import;
 

@@ -1,8 +1,9 @@
 using CsvHelper;
+using PartPick.Catalog;
 
 namespace PartPick.Output;
 
-/// <summary>Prints comma-separated values: a header with units, then the rows.</summary>
+/// <summary>Prints comma-separated values: a header with units, then the rows, so that a spreadsheet runs none of them.</summary>
 internal static class CsvOutput
 {
     private static readonly CsvWriterOptions Plain =
@@ -15,7 +16,7 @@ internal static class CsvOutput
         writer.WriteRecord([.. header]);
         foreach (IEnumerable<string> row in rows)
         {
-            writer.WriteRecord([.. row]);
+            writer.WriteRecord([.. row.Select(FormulaGuard.Guard)]);
         }
 
         writer.Flush();

@@ -61,6 +61,9 @@ public sealed class ShortlistExportTests
         Assert.Contains("'=2+3", row);
         Assert.Contains("'@SUM(1;2), \"Ltd\"", row);
 
+        string lists = bench.Of("shortlist", "list", "--format", "csv").Output;
+        Assert.Equal("'=1+1|<b>", CsvTexts.ByBoth(lists, ',')[1][0]);
+
         string html = bench.Of("shortlist", "export", "=1+1|<b>", "--format", "html").Output;
         Assert.DoesNotContain("<script", html, StringComparison.Ordinal);
         Assert.DoesNotContain("<b>", html, StringComparison.Ordinal);

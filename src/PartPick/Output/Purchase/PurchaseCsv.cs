@@ -24,7 +24,7 @@ internal static class PurchaseCsv
         writer.WriteRecord(Header);
         foreach ((PurchaseLine line, PurchaseOrder order, bool first) in cells.Orders)
         {
-            writer.WriteRecord([.. Row(cells, list, line, order, first).Select(SpreadsheetText.Harmless)]);
+            writer.WriteRecord([.. Row(cells, list, line, order, first).Select(FormulaGuard.Guard)]);
         }
 
         writer.Flush();

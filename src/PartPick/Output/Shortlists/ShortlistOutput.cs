@@ -22,7 +22,7 @@ internal static class ShortlistOutput
                         "number", "added", "builds", "circuit", "crystal", "amplifier", "tap", "errorWorst (ppm)", "startUpMargin",
                         "driveLevel (W)", "startUpTime (s)", "cost", "currency", "state", "changes", "note",
                     ],
-                    list.Candidates.Select(each => CsvRow(each).Select(Catalog.SpreadsheetText.Harmless)));
+                    list.Candidates.Select(CsvRow));
                 break;
             default:
                 WriteTable(output, list);
