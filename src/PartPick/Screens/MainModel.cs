@@ -21,17 +21,14 @@ public sealed class MainModel
     /// <param name="notice">A line to show until the first key; null for none.</param>
     /// <param name="currency">The currency of the cost limit; empty where it is not known.</param>
     /// <param name="waits">Whether a change waits a moment for the next one before it is ranked.</param>
-    /// <param name="desk">Where the lists of candidates are kept; null where there are none.</param>
     public MainModel(
-        Requirement requirement, LiveRanking ranking, Glyphs glyphs, string? notice = null, string currency = "", bool waits = true,
-        IShortlistDesk? desk = null)
+        Requirement requirement, LiveRanking ranking, Glyphs glyphs, string? notice = null, string currency = "", bool waits = true)
     {
         ArgumentNullException.ThrowIfNull(ranking);
         _ranking = ranking;
         _glyphs = glyphs;
         Notice = notice;
         _waits = waits;
-        Shortlists = new ShortlistModel(desk);
         _reading = new Reading(List);
         Wanted = new SentenceModel(requirement, glyphs, currency);
         Wanted.Changed += Rank;
@@ -52,7 +49,7 @@ public sealed class MainModel
     public CandidateList List { get; } = new();
 
     /// <summary>The lists of candidates.</summary>
-    internal ShortlistModel Shortlists { get; }
+    internal ShortlistModel Shortlists { get; private set; } = new(null);
 
     /// <summary>Where the keys go.</summary>
     public Place Place { get; private set; }
@@ -114,6 +111,10 @@ public sealed class MainModel
                 break;
         }
     }
+
+    /// <summary>Lets circuits be put on lists; without it there are none.</summary>
+    /// <param name="desk">Where the lists are kept.</param>
+    public void KeepListsAt(IShortlistDesk desk) => Shortlists = new ShortlistModel(desk);
 
     /// <summary>The screen as lines, each as wide as the screen.</summary>
     /// <param name="width">Width in cells.</param>

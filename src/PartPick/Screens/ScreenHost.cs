@@ -49,8 +49,8 @@ public static class ScreenHost
             : null;
         var run = new TerminalRun(
             new CatalogRanking(catalog.Value), TerminalTraits.Of(Environment.GetEnvironmentVariable),
-            requirement => keeper.Keep(requirement), new Market(catalog.Value, 1).Currency, new CatalogDesk(catalogPath));
-        Requirement end = run.Show(start.ValueOr(null) ?? First, notice);
+            requirement => keeper.Keep(requirement), new Market(catalog.Value, 1).Currency);
+        Requirement end = run.Show(start.ValueOr(null) ?? First, notice, new CatalogDesk(catalogPath));
         return keeper.Keep(end) is { } problem ? Fail(ExitStatus.NoCatalog, problem.ToString()) : ExitStatus.Done;
     }
 

@@ -170,7 +170,12 @@ public sealed class ShortlistScreenTests
         Assert.True(bench.Model.IsDone);
     }
 
-    private Bench Open(int width = 80, int height = 24) => new(width, height, desk: new CatalogDesk(_db));
+    private Bench Open(int width = 80, int height = 24)
+    {
+        var bench = new Bench(width, height);
+        bench.Model.KeepListsAt(new CatalogDesk(_db));
+        return bench;
+    }
 
     private ShortlistEntry[] Entries(string list) => [.. ShortlistStore.Read(_db, list).Value.Entries];
 }

@@ -10,9 +10,7 @@ namespace PartPick.Screens;
 /// <param name="traits">What the terminal can show.</param>
 /// <param name="keep">Keeps a requirement; called from any thread.</param>
 /// <param name="currency">The currency of the costs; empty where it is not known.</param>
-/// <param name="desk">Where the lists of candidates are kept.</param>
-internal sealed class TerminalRun(
-    IRankingService ranking, TerminalTraits traits, Action<Requirement> keep, string currency, IShortlistDesk desk)
+internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits, Action<Requirement> keep, string currency)
 {
     private const string MouseReportsOff = "\x1b[?1003l\x1b[?1015l\x1b[?1006l";
 
@@ -21,8 +19,9 @@ internal sealed class TerminalRun(
     /// <summary>Shows the screen until it is left.</summary>
     /// <param name="start">The requirement to begin with.</param>
     /// <param name="notice">A line to show until the first key; null for none.</param>
+    /// <param name="desk">Where the lists of candidates are kept.</param>
     /// <returns>The requirement at the end.</returns>
-    public Requirement Show(Requirement start, string? notice)
+    public Requirement Show(Requirement start, string? notice, IShortlistDesk desk)
     {
         // The terminal's own sixteen colours: they fit its background, and few of them are sent.
         Driver.Force16Colors = true;
@@ -31,8 +30,9 @@ internal sealed class TerminalRun(
         using IApplication app = Application.Create().Init(DriverRegistry.Names.ANSI);
         app.Driver!.WriteRaw(MouseReportsOff);
         using var live = new LiveRanking(ranking, action => Post(app, action), TimeProvider.System);
-        var model = new MainModel(start, live, glyphs, notice, currency, desk: desk);
+        var model = new MainModel(start, live, glyphs, notice, currency);
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
+        model.KeepListsAt(desk);
         using var screen = new MainScreen(model, palette);
         using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, Leave);
         using PosixSignalRegistration interrupt = PosixSignalRegistration.Create(PosixSignal.SIGINT, Leave);

@@ -2,11 +2,9 @@ namespace PartPick.Screens;
 
 /// <summary>A text that is being typed, and where the next letter goes.</summary>
 /// <param name="text">The text to begin with; the caret stands behind it.</param>
-/// <param name="longest">The most letters.</param>
-public sealed class TypedText(string text, int longest = TypedText.Usual)
+/// <param name="longest">The most characters.</param>
+public sealed class TypedText(string text, int longest = 60)
 {
-    private const int Usual = 60;
-
     /// <summary>The text.</summary>
     public string Text { get; private set; } = text;
 
