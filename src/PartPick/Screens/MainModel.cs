@@ -214,17 +214,17 @@ public sealed class MainModel
                 KeysScroll.Reset();
                 ShowsKeys = true;
                 break;
-            case { Name: KeyName.Letter, Letter: 'q' }:
-                IsDone = true;
-                break;
-            case { Name: KeyName.Letter, Letter: 'e' } when !Shortlists.IsOpen:
-                Place = Place.Sentence;
-                break;
             case { Name: KeyName.Letter, Letter: 's' } when List is { Chosen: { } chosen, Result: { } result }:
                 Shortlists.Ask(chosen, result.Requirement);
                 break;
             case { Name: KeyName.Letter, Letter: 'l' }:
                 Notice = Shortlists.Open();
+                break;
+            case { Name: KeyName.Letter, Letter: 'q' }:
+                IsDone = true;
+                break;
+            case { Name: KeyName.Letter, Letter: 'e' }:
+                Place = Place.Sentence;
                 break;
             case { Name: KeyName.Tab or KeyName.BackTab } when Place == Place.Circuit:
                 Place = Place.Sentence;
