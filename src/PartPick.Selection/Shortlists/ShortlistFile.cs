@@ -45,27 +45,29 @@ public static class ShortlistFile
         }
 
         return root.TryGetProperty("circuitFile", out JsonElement circuit)
-            ? Described(circuit, fileName + ": circuitFile", catalog).Then(description =>
-            {
-                Requirement requirement = wanted ?? RequirementOf(description);
-                return CandidateReading.Read(root, fileName + ": ", catalog).Map(parts => new ShortlistSource(
-                    parts.Choice, parts.Support, requirement, wanted is null ? [Derived(requirement)] : []));
-            })
+            ? FromCandidate(root, circuit, fileName, catalog, wanted)
             : FromCircuit(json, fileName, catalog, wanted);
     }
+
+    private static Result<ShortlistSource> FromCandidate(
+        JsonElement candidate, JsonElement circuit, string fileName, PartsCatalog catalog, Requirement? wanted) =>
+        CircuitFile.Read(circuit.GetRawText(), fileName + ": circuitFile", catalog).Then(description =>
+        {
+            Result<Requirement>? own = wanted is null ? OwnRequirement(candidate, fileName) : Result.Ok(wanted);
+            return (own ?? Result.Ok(RequirementOf(description))).Then(requirement =>
+                CandidateReading.Read(candidate, fileName + ": ", catalog).Map(parts => new ShortlistSource(
+                    parts.Choice, parts.Support, requirement, own is null ? [Derived(requirement)] : [])));
+        });
+
+    // A ranking says it once, the candidates of a list each their own.
+    private static Result<Requirement>? OwnRequirement(JsonElement element, string fileName) =>
+        element.ValueKind == JsonValueKind.Object && element.TryGetProperty("requirement", out JsonElement given)
+            ? RequirementFile.Read(given.GetRawText(), fileName + ": requirement")
+            : null;
 
     private static Result<ShortlistSource> FromAnswer(
         JsonElement root, JsonElement candidates, string fileName, PartsCatalog catalog, string? which, Requirement? wanted)
     {
-        Result<Requirement> requirement = wanted is not null ? Result.Ok(wanted)
-            : root.TryGetProperty("requirement", out JsonElement given)
-                ? RequirementFile.Read(given.GetRawText(), fileName + ": requirement")
-                : Result.Fail<Requirement>(fileName + ": requirement", "is missing", Fits);
-        if (!requirement.IsOk)
-        {
-            return Result.Fail<ShortlistSource>(requirement.Problem);
-        }
-
         JsonElement[] all = candidates.ValueKind == JsonValueKind.Array ? [.. candidates.EnumerateArray()] : [];
         bool misses = all.Length == 0;
         if (misses && root.TryGetProperty("nearestMisses", out JsonElement near) && near.ValueKind == JsonValueKind.Array)
@@ -78,13 +80,18 @@ public static class ShortlistFile
             return Result.Fail<ShortlistSource>(fileName + ": candidates", "holds none", "a ranking that found one");
         }
 
-        JsonElement? found = Pick(all, which ?? "1");
-        return found is not { } candidate
-            ? Result.Fail<ShortlistSource>(
+        if (Pick(all, which ?? "1") is not { } candidate)
+        {
+            return Result.Fail<ShortlistSource>(
                 "--candidate", $"{Problem.Quote(which)} is none of its candidates",
-                string.Create(CultureInfo.InvariantCulture, $"a number from 1 to {all.Length}, or an id"))
-            : CandidateReading.Read(candidate, fileName + ": ", catalog).Map(parts => new ShortlistSource(
-                parts.Choice, parts.Support, requirement.Value, misses ? ["Nothing fits; this is one of the nearest misses."] : []));
+                string.Create(CultureInfo.InvariantCulture, $"a number from 1 to {all.Length}, or an id"));
+        }
+
+        Result<Requirement> requirement = wanted is not null ? Result.Ok(wanted)
+            : OwnRequirement(root, fileName) ?? OwnRequirement(candidate, fileName)
+                ?? Result.Fail<Requirement>(fileName + ": requirement", "is missing", Fits);
+        return requirement.Then(own => CandidateReading.Read(candidate, fileName + ": ", catalog).Map(parts => new ShortlistSource(
+            parts.Choice, parts.Support, own, misses ? ["Nothing fits; this is one of the nearest misses."] : [])));
     }
 
     private static JsonElement? Pick(JsonElement[] all, string which)
@@ -115,9 +122,6 @@ public static class ShortlistFile
             return PartsFinder.Find(description, fileName + ": ", catalog, new Market(catalog, requirement.Builds), remarks)
                 .Map(parts => new ShortlistSource(parts.Choice, parts.Support, requirement, remarks.ToImmutable()));
         });
-
-    private static Result<CircuitDescription> Described(JsonElement circuit, string where, PartsCatalog catalog) =>
-        CircuitFile.Read(circuit.GetRawText(), where, catalog);
 
     // A circuit alone says what it gives and on which board and supply; the rest is as usual.
     private static Requirement RequirementOf(CircuitDescription description) => new()

@@ -54,6 +54,23 @@ public sealed class ShortlistCommandTests
     }
 
     [Fact]
+    public void What_a_list_prints_can_be_added_again_with_the_prices_of_today()
+    {
+        ShortlistBench bench = new ShortlistBench().With(2);
+        string capacitor = ShortlistBench.PartOf(bench.List().GetProperty("candidates")[1], "C1");
+        Assert.Equal(0, bench.Of("catalog", "set", capacitor, "stock=4000").Status);
+        string printed = bench.Of("shortlist", "list", "logger", "--format", "json").Output;
+        Run whole = bench.WithInput(printed, "shortlist", "add", "again", "-", "--candidate", "2");
+        Assert.True(whole.Status == 0, whole.Error);
+        string alone = JsonNode.Parse(printed)!["candidates"]![1]!.ToJsonString();
+        Assert.Equal(0, bench.WithInput(alone, "shortlist", "add", "again", "-").Status);
+        JsonElement[] again = [.. bench.List("again").GetProperty("candidates").EnumerateArray()];
+        Assert.All(again, each => Assert.False(each.GetProperty("isChanged").GetBoolean()));
+        Assert.All(again, each => Assert.Equal(80e-6, each.GetProperty("requirement").GetProperty("budget").GetDouble()));
+        Assert.True(bench.List().GetProperty("candidates")[1].GetProperty("isChanged").GetBoolean());
+    }
+
+    [Fact]
     public void A_follower_and_a_port_come_back_from_their_circuit_files()
     {
         var bench = new ShortlistBench();
@@ -104,7 +121,8 @@ public sealed class ShortlistCommandTests
             ("{}", "circuit", ["logger", "-"]),
             ("{\"candidates\": 3, \"requirement\": {\"output\": 1000}}", "holds none", ["logger", "-"]),
             ("{\"candidates\": [3], \"requirement\": {\"output\": 1000}}", "holds the number", ["logger", "-"]),
-            ("{\"candidates\": []}", "requirement", ["logger", "-"]),
+            ("{\"candidates\": []}", "holds none", ["logger", "-"]),
+            ("{\"candidates\": [{\"circuit\": \"gate\"}]}", "requirement: is missing", ["logger", "-"]),
             ("{\"candidates\": [{\"circuit\": \"gate\"}], \"requirement\": {\"output\": 1000}}", "parts", ["logger", "-"]),
             (unknown.ToJsonString(), "'no-such' is not in the catalogue", ["logger", "-"]),
             (own.ToJsonString(), "no capacitor of 15.5 pF", ["logger", "-"]),
