@@ -19,7 +19,8 @@ internal static class ShortlistDrawing
     public static ImmutableArray<Line> Draw(ShortlistPage page, int width, int height, Glyphs glyphs)
     {
         int changed = page.Candidates.Count(each => each.IsChanged), unfit = page.Candidates.Count(each => !each.IsFit);
-        string counts = FormattableString.Invariant($"{page.Candidates.Length} candidates, {changed} changed, {unfit} unfit");
+        string noun = page.Candidates.Length == 1 ? "candidate" : "candidates";
+        string counts = FormattableString.Invariant($"{page.Candidates.Length} {noun}, {changed} changed, {unfit} unfit");
         ImmutableArray<Line> words = Words(page.Chosen, width, glyphs);
         int rows = Math.Clamp(page.Candidates.Length, 1, Math.Max(LeastRows, height - 4 - words.Length));
         int first = Math.Clamp(page.At - rows + 1, 0, Math.Max(0, page.Candidates.Length - rows));
