@@ -132,7 +132,11 @@ public sealed class PurchaseListTests
             + "drive level 500 µW, holder HC-49/U",
             BuyerText.Of(Sample.Crystal with
             {
-                ToleranceRatio = 30e-6, StabilityRatio = 50e-6, TemperatureMinCelsius = -20, TemperatureMaxCelsius = 70, Holder = "HC-49/U",
+                ToleranceRatio = 30e-6,
+                StabilityRatio = 50e-6,
+                TemperatureMinCelsius = -20,
+                TemperatureMaxCelsius = 70,
+                Holder = "HC-49/U",
             }));
     }
 
