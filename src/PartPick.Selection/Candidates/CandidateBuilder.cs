@@ -11,8 +11,15 @@ public sealed class CandidateBuilder(Requirement requirement, Market market)
     public Candidate? Build(CandidateParts choice)
     {
         ArgumentNullException.ThrowIfNull(choice);
+        return Build(choice, SupportParts.For(choice.Circuit, choice.Crystal.FrequencyHz, market));
+    }
+
+    /// <summary>The candidate with support parts that are already chosen; null as above.</summary>
+    public Candidate? Build(CandidateParts choice, SupportParts support)
+    {
+        ArgumentNullException.ThrowIfNull(choice);
+        ArgumentNullException.ThrowIfNull(support);
         CrystalModel model = CrystalModel.From(choice.Crystal);
-        SupportParts support = SupportParts.For(choice.Circuit, choice.Crystal.FrequencyHz, market);
         double feedback = support.Feedback?.ValueOhms ?? double.PositiveInfinity;
         if (CircuitTemplate.Create(requirement, choice.Circuit, model, choice.Amplifier, feedback) is not { } template)
         {

@@ -68,6 +68,9 @@ public sealed class MainModel
     /// <summary>The list.</summary>
     public CandidateList List { get; } = new();
 
+    /// <summary>The lists of candidates.</summary>
+    internal ShortlistModel Shortlists { get; private set; } = new(null);
+
     /// <summary>Where the keys go.</summary>
     public Place Place { get; private set; }
 
@@ -124,6 +127,12 @@ public sealed class MainModel
             return;
         }
 
+        if (Shortlists.Press(key, out string? notice))
+        {
+            Notice = notice;
+            return;
+        }
+
         switch (Place)
         {
             case Place.Sentence:
@@ -140,6 +149,10 @@ public sealed class MainModel
                 break;
         }
     }
+
+    /// <summary>Lets circuits be put on lists; without it there are none.</summary>
+    /// <param name="desk">Where the lists are kept.</param>
+    public void KeepListsAt(IShortlistDesk desk) => Shortlists = new ShortlistModel(desk);
 
     /// <summary>The screen as lines, each as wide as the screen.</summary>
     /// <param name="width">Width in cells.</param>
@@ -277,6 +290,12 @@ public sealed class MainModel
             case { Name: KeyName.Letter, Letter: '?' }:
                 KeysScroll.Reset();
                 ShowsKeys = true;
+                break;
+            case { Name: KeyName.Letter, Letter: 's' } when List is { Chosen: { } chosen, Result: { } result }:
+                Shortlists.Ask(chosen, result.Requirement);
+                break;
+            case { Name: KeyName.Letter, Letter: 'l' }:
+                Notice = Shortlists.Open();
                 break;
             case { Name: KeyName.Letter, Letter: 'q' }:
                 IsDone = true;

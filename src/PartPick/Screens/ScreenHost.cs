@@ -50,7 +50,7 @@ public static class ScreenHost
         var run = new TerminalRun(
             catalogPath, new CatalogRanking(catalog.Value), TerminalTraits.Of(Environment.GetEnvironmentVariable),
             requirement => keeper.Keep(requirement), new Market(catalog.Value, 1).Currency);
-        Requirement end = run.Show(start.ValueOr(null) ?? First, notice);
+        Requirement end = run.Show(start.ValueOr(null) ?? First, notice, new CatalogDesk(catalogPath));
         return keeper.Keep(end) is { } problem ? Fail(ExitStatus.NoCatalog, problem.ToString()) : ExitStatus.Done;
     }
 

@@ -26,8 +26,9 @@ internal sealed class TerminalRun(
     /// <summary>Shows the screen until it is left.</summary>
     /// <param name="start">The requirement to begin with.</param>
     /// <param name="notice">A line to show until the first key; null for none.</param>
+    /// <param name="desk">Where the lists of candidates are kept.</param>
     /// <returns>The requirement at the end.</returns>
-    public Requirement Show(Requirement start, string? notice)
+    public Requirement Show(Requirement start, string? notice, IShortlistDesk desk)
     {
         // The terminal's own sixteen colours: they fit its background, and few of them are sent.
         Driver.Force16Colors = true;
@@ -42,6 +43,7 @@ internal sealed class TerminalRun(
         var model = new MainModel(start, live, glyphs, notice, currency, parts: parts);
         model.PartsChanged += () => work.Start(stop => CatalogReading.All(catalogPath, stop), loaded => RankWith(loaded, model));
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
+        model.KeepListsAt(desk);
         using var screen = new MainScreen(model, palette);
         using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, Leave);
         using PosixSignalRegistration interrupt = PosixSignalRegistration.Create(PosixSignal.SIGINT, Leave);
