@@ -1,0 +1,28 @@
+using PartPick.Catalog;
+using PartPick.Values;
+
+namespace PartPick.Selection;
+
+/// <summary>A circuit that was chosen, with every part, analysed for what is needed of it.</summary>
+/// <param name="Board">Its parts.</param>
+/// <param name="Candidate">The circuit, analysed in full; it may be unfit.</param>
+public sealed record ChosenCircuit(BoardParts Board, Candidate Candidate)
+{
+    /// <summary>Analyses a circuit's parts.</summary>
+    /// <param name="board">The parts.</param>
+    /// <param name="requirement">What is needed.</param>
+    /// <param name="catalog">What can be bought.</param>
+    /// <returns>The circuit, or why its figures cannot be found.</returns>
+    public static Result<ChosenCircuit> Of(BoardParts board, Requirement requirement, PartsCatalog catalog)
+    {
+        ArgumentNullException.ThrowIfNull(board);
+        ArgumentNullException.ThrowIfNull(requirement);
+        var builder = new CandidateBuilder(requirement, new Market(catalog, requirement.Builds));
+        return builder.Build(board.Choice, board.Support) is { } candidate
+            ? Result.Ok(new ChosenCircuit(board, candidate))
+            : Result.Fail<ChosenCircuit>(
+                "supply",
+                $"{board.Choice.Amplifier.Id} is not specified over {requirement.SupplyMinVolts:0.###} to {requirement.SupplyMaxVolts:0.###} V",
+                "a supply range that the amplifier states");
+    }
+}
