@@ -45,6 +45,9 @@ internal sealed class CatalogFile : IDisposable
         private set => About.Upsert(TextDocument.Write(FingerprintKey, value!));
     }
 
+    /// <summary>The candidates of all shortlists.</summary>
+    public ILiteCollection<BsonDocument> Shortlists => _database.GetCollection(ShortlistDocument.Collection);
+
     private ILiteCollection<BsonDocument> Parts => _database.GetCollection(PartDocument.Collection);
 
     private ILiteCollection<BsonDocument> About => _database.GetCollection(TextDocument.AboutCollection);

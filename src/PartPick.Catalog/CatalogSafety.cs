@@ -140,6 +140,11 @@ public static class CatalogSafety
             faults.Add("a part that is kept for taking the last import back cannot be read");
         }
 
+        if (file.Shortlists.FindAll().Any(document => ShortlistDocument.Read(document) is null))
+        {
+            faults.Add("a candidate of a shortlist cannot be read");
+        }
+
         int maps = file.MapNames().Count(name => file.ReadMap(name) is not null);
         return new CatalogCheck(parts, origins, notes.Count, earlier, maps, faults);
     }

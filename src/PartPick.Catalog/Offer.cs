@@ -20,8 +20,9 @@ public sealed record Offer(string Currency, ImmutableArray<PriceBreak> Prices, i
     /// Of two equal totals the smaller quantity is taken.
     /// </summary>
     /// <param name="needed">How many are needed; zero or less costs nothing.</param>
-    /// <returns>The purchase; null where no price is known, or the quantity is beyond what can be counted.</returns>
-    public Purchase? CheapestPurchase(int needed)
+    /// <param name="most">The most that can be had, such as the stock.</param>
+    /// <returns>The purchase; null where no price is known, or the quantity is beyond what can be had or counted.</returns>
+    public Purchase? CheapestPurchase(int needed, int most = int.MaxValue)
     {
         if (!HasPrices)
         {
@@ -39,7 +40,7 @@ public sealed record Offer(string Currency, ImmutableArray<PriceBreak> Prices, i
         {
             long least = Math.Max(Math.Max(needed, MinimumOrder), (long)Prices[i].Quantity);
             long quantity = (least + Multiple - 1) / Multiple * Multiple;
-            long last = i + 1 < Prices.Length ? Prices[i + 1].Quantity - 1L : int.MaxValue;
+            long last = Math.Min(i + 1 < Prices.Length ? Prices[i + 1].Quantity - 1L : int.MaxValue, most);
             if (quantity > last)
             {
                 continue;

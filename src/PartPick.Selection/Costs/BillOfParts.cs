@@ -15,30 +15,30 @@ public static class BillOfParts
         ArgumentNullException.ThrowIfNull(support);
         var uses = new List<PartUse>
         {
-            Capacitor("C1", "load capacitor", choice.C1),
-            Capacitor("C2", "load capacitor", choice.C2),
+            Capacitor("C1", PartRoles.Load, choice.C1),
+            Capacitor("C2", PartRoles.Load, choice.C2),
         };
         int capacitor = 2;
         if (support.Decoupling is { } decoupling)
         {
-            uses.Add(Capacitor($"C{++capacitor}", "decoupling", decoupling));
+            uses.Add(Capacitor($"C{++capacitor}", PartRoles.Decoupling, decoupling));
         }
 
         if (support.Coupling is { } coupling)
         {
-            uses.Add(Capacitor($"C{++capacitor}", "output coupling", coupling));
+            uses.Add(Capacitor($"C{++capacitor}", PartRoles.Coupling, coupling));
         }
 
         int resistor = 0;
-        Add(choice.Series, "damping Rs");
-        Add(support.Feedback, "feedback Rf");
-        Add(choice.BaseTop, choice.BaseBottom is null ? "base bias RB" : "base bias, to supply");
-        Add(choice.BaseBottom, "base bias, to ground");
-        Add(choice.Emitter, "emitter RE");
+        Add(choice.Series, PartRoles.Damping);
+        Add(support.Feedback, PartRoles.Feedback);
+        Add(choice.BaseTop, choice.BaseBottom is null ? PartRoles.Base : PartRoles.BaseTop);
+        Add(choice.BaseBottom, PartRoles.BaseBottom);
+        Add(choice.Emitter, PartRoles.Emitter);
         uses.Add(choice.Amplifier is TransistorPart
-            ? new PartUse("Q1", "amplifier", choice.Amplifier, "")
-            : new PartUse("U1", "amplifier", choice.Amplifier, choice.Tap > 0 ? Stage(choice.Tap) : ""));
-        uses.Add(new PartUse("Y1", "crystal", choice.Crystal, ValueText.FormatExact(choice.Crystal.FrequencyHz, Dimension.Frequency)));
+            ? new PartUse("Q1", PartRoles.Amplifier, choice.Amplifier, "")
+            : new PartUse("U1", PartRoles.Amplifier, choice.Amplifier, choice.Tap > 0 ? Stage(choice.Tap) : ""));
+        uses.Add(new PartUse("Y1", PartRoles.Crystal, choice.Crystal, ValueText.FormatExact(choice.Crystal.FrequencyHz, Dimension.Frequency)));
         return [.. uses];
 
         void Add(ResistorPart? part, string role)
