@@ -39,8 +39,8 @@ internal sealed class PartsFinder
     private Result<(CandidateParts Choice, SupportParts? Support)> Find()
     {
         OscillatorCircuit circuit = _circuit.Circuit;
-        CrystalPart? crystal = _circuit.Crystal ?? Cheapest("crystal", _catalog.Crystals.Where(IsThisCrystal), "a crystal");
-        Part? amplifier = _circuit.Amplifier ?? Cheapest("amplifier", _catalog.All.Where(IsThisAmplifier), "an amplifier");
+        CrystalPart? crystal = _circuit.Crystal ?? Cheapest("crystal", _catalog.Crystals.Where(IsThisCrystal), "crystal");
+        Part? amplifier = _circuit.Amplifier ?? Cheapest("amplifier", _catalog.All.Where(IsThisAmplifier), "amplifier");
         CapacitorPart? c1 = _circuit.C1 ?? Capacitor("c1", circuit.C1Farads);
         CapacitorPart? c2 = _circuit.C2 ?? Capacitor("c2", circuit.C2Farads);
         var follower = circuit as FollowerCircuit;
@@ -112,11 +112,11 @@ internal sealed class PartsFinder
     };
 
     private CapacitorPart? Capacitor(string place, double farads) => Cheapest(
-        place, _catalog.Capacitors.Where(part => Near(part.ValueFarads, farads)), "a capacitor of " + Say.Farads(farads));
+        place, _catalog.Capacitors.Where(part => Near(part.ValueFarads, farads)), "capacitor of " + Say.Farads(farads));
 
     // Zero and infinite ohms are no part: a wire, and nothing.
     private ResistorPart? Resistor(string place, double ohms) => ohms > 0 && double.IsFinite(ohms)
-        ? Cheapest(place, _catalog.Resistors.Where(part => Near(part.ValueOhms, ohms)), "a resistor of " + Say.Ohms(ohms))
+        ? Cheapest(place, _catalog.Resistors.Where(part => Near(part.ValueOhms, ohms)), "resistor of " + Say.Ohms(ohms))
         : null;
 
     private T? Cheapest<T>(string place, IEnumerable<T> fitting, string what)
@@ -131,7 +131,7 @@ internal sealed class PartsFinder
         if (parts.Length == 0)
         {
             string figures = typeof(T) == typeof(CapacitorPart) || typeof(T) == typeof(ResistorPart) ? "" : " with these figures";
-            Fail(place, $"the catalogue holds not {what}{figures}", "values of a part, or { \"part\": \"ID\" } for crystal and amplifier");
+            Fail(place, $"the catalogue holds no {what}{figures}", "values of a part, or { \"part\": \"ID\" } for crystal and amplifier");
             return null;
         }
 
