@@ -25,4 +25,22 @@ public sealed record ChosenCircuit(BoardParts Board, Candidate Candidate)
                 $"{board.Choice.Amplifier.Id} is not specified over {requirement.SupplyMinVolts:0.###} to {requirement.SupplyMaxVolts:0.###} V",
                 "a supply range that the amplifier states");
     }
+
+    /// <summary>Analyses a candidate of a list with today's parts; those that are gone count as they were when it was put there.</summary>
+    /// <param name="review">The candidate.</param>
+    /// <param name="catalog">Today's parts.</param>
+    /// <returns>The circuit, or why its figures cannot be found.</returns>
+    public static Result<ChosenCircuit> Of(ShortlistReview review, PartsCatalog catalog)
+    {
+        ArgumentNullException.ThrowIfNull(review);
+        ArgumentNullException.ThrowIfNull(catalog);
+        var parts = new PartsCatalog(review.Entry.Parts
+            .Select(part => catalog.Find(part.Id) is { } today && today.Kind == part.Kind ? today : part));
+        return review.Chosen.In(parts) is { } found
+            ? Of(new BoardParts(found.Choice, found.Support), review.Requirement, catalog)
+            : Result.Fail<ChosenCircuit>(
+                FormattableString.Invariant($"candidate {review.Entry.Number}"),
+                "cannot be read",
+                "a candidate put there by partpick shortlist add");
+    }
 }

@@ -34,10 +34,11 @@ public static class ShortageSearch
         ArgumentNullException.ThrowIfNull(catalog);
         CandidateParts choice = chosen.Board.Choice;
         ImmutableArray<Part> kept = [.. new[] { choice.Crystal, choice.Amplifier }.Where(part => part.Id != line.Part.Id)];
+        string equal = EqualParts.KeyOf(line.Part);
         ImmutableArray<Part> gone =
         [
             .. catalog.OfKind(line.Part.Kind)
-                .Where(part => part.Id == line.Part.Id || (equalToo && EqualParts.AreEqual(part, line.Part))),
+                .Where(part => part.Id == line.Part.Id || (equalToo && EqualParts.KeyOf(part) == equal)),
         ];
         bool keepsAmplifier = kept.Contains(choice.Amplifier);
         Requirement wanted = keepsAmplifier ? requirement with { Circuits = [choice.Circuit] } : requirement;
