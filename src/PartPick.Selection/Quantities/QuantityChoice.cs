@@ -17,6 +17,9 @@ public sealed record QuantityChoice
     /// </summary>
     public required bool IsExact { get; init; }
 
+    /// <summary>Cost per unit of the best candidate, from one board on; null where none fits.</summary>
+    public required ImmutableArray<decimal?> Costs { get; init; }
+
     /// <summary>Number of candidates compared.</summary>
     public required int Compared { get; init; }
 

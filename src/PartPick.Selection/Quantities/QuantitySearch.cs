@@ -63,6 +63,7 @@ public static class QuantitySearch
             Spans = Spans(requirement, catalog, best, ranked),
             RankedAt = [.. ranked.Keys],
             IsExact = every || ranked.Count == options.Most,
+            Costs = [.. best.Skip(1).Select(point => point?.Cost)],
             Compared = pool.Count,
         };
 

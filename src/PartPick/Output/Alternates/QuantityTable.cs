@@ -1,0 +1,173 @@
+using System.Collections.Immutable;
+using System.Globalization;
+using PartPick.Catalog;
+using PartPick.Commands;
+using PartPick.Selection;
+
+namespace PartPick.Output;
+
+/// <summary>Cost and choice over the number of boards, for people.</summary>
+internal static class QuantityTable
+{
+    private const int Width = 64;
+    private const int Height = 10;
+    private const int MostLines = 20;
+
+    /// <summary>Prints picture, table, turns of the cost and ranges of the choice.</summary>
+    public static void Write(TextWriter output, QuantityView view)
+    {
+        ChosenSentence.Write(output, view.List, view.Review, view.Chosen);
+        output.WriteLine();
+        WritePicture(output, view);
+        output.WriteLine();
+        WriteRows(output, view);
+        WriteBreaks(output, view);
+        if (view.Choice is not null)
+        {
+            WriteChoice(output, view, view.Choice);
+        }
+
+        output.WriteLine();
+        output.WriteLine(HelpFooter.Cautions);
+    }
+
+    private static void WritePicture(TextWriter output, QuantityView view)
+    {
+        output.WriteLine($"Cost per unit ({view.Chosen.Candidate.Currency}) of this circuit over the number of boards, both logarithmic:");
+        foreach (string line in CostPicture.Draw(view.Curve.Most, view.Curve.UnitCost, Width, Height, view.Ascii))
+        {
+            output.WriteLine(line);
+        }
+
+        if (view.Choice is { } choice)
+        {
+            IEnumerable<char> letters = Enumerable.Range(0, Width)
+                .Select(column => view.Letter(choice.At(CostPicture.BuildsAt(column, Width, view.Curve.Most)).Candidate)[0]);
+            output.WriteLine($"    best  {string.Concat(letters)}");
+        }
+    }
+
+    private static void WriteRows(TextWriter output, QuantityView view)
+    {
+        string currency = view.Chosen.Candidate.Currency;
+        TextColumn[] columns = [new("boards", true), new($"each ({currency})", true), new($"all ({currency})", true), new("breaks")];
+        TextColumn[] best = [new("best"), new($"each ({currency})", true)];
+        TextTable.Write(
+            output,
+            [.. columns, .. view.Choice is null ? [] : best],
+            [
+                .. view.Rows.Select(builds => new[]
+                {
+                    Figures.Whole(builds),
+                    Money(view.Curve.UnitCost(builds)),
+                    (view.Curve.UnitCost(builds) * builds).ToString("F2", CultureInfo.InvariantCulture),
+                    view.Breaks(builds),
+                }.Concat(view.Choice is null ? [] : Best(view, view.Choice, builds)).ToArray()),
+            ]);
+        if (view.Curve.CoveredTo is { } covered && covered < view.Curve.Most)
+        {
+            output.WriteLine($"The stock of all its parts covers {Figures.Whole(covered)} boards.");
+        }
+    }
+
+    private static string[] Best(QuantityView view, QuantityChoice choice, int builds) =>
+        [view.Letter(choice.At(builds).Candidate), choice.Costs[builds - 1] is { } cost ? Money(cost) : Figures.None];
+
+    private static void WriteBreaks(TextWriter output, QuantityView view)
+    {
+        ImmutableArray<CostBreak> breaks = view.Curve.Breaks;
+        CostBreak[] single = [.. breaks.Where(turn => turn.Kind != CostBreakKind.Multiple)];
+        output.WriteLine();
+        if (breaks.IsEmpty)
+        {
+            output.WriteLine("The cost per unit turns nowhere.");
+            return;
+        }
+
+        output.WriteLine("Where it turns:");
+        output.WriteLine();
+        TextColumn[] columns =
+        [
+            new("from", true), new("part"), new("what"), new("bought", true), new("at", true), new("each before", true), new("each", true),
+        ];
+        TextTable.Write(output, columns, [.. single.Take(MostLines).Select(Row)]);
+        if (single.Length > MostLines)
+        {
+            output.WriteLine($"… and {Figures.Whole(single.Length - MostLines)} more (--format json).");
+        }
+
+        foreach (IGrouping<string, CostBreak> steps in breaks.Where(turn => turn.Kind == CostBreakKind.Multiple).GroupBy(turn => turn.Part.Id))
+        {
+            CostBreak first = steps.First();
+            output.WriteLine(
+                $"{steps.Key} is sold in multiples of {Figures.Whole(first.Part.Offer.Multiple)}: {Figures.Whole(steps.Count())} steps, "
+                + $"the first from {Figures.Whole(first.Builds)} boards on.");
+        }
+    }
+
+    private static string[] Row(CostBreak turn) =>
+    [
+        Figures.Whole(turn.Builds),
+        turn.Part.Id,
+        turn.Kind switch
+        {
+            CostBreakKind.Price => "another price",
+            CostBreakKind.UsedUp => "what is bought is used up",
+            _ => "stock does not cover",
+        },
+        Figures.Whole(turn.Ordered),
+        turn.UnitPrice.ToString("0.####", CultureInfo.InvariantCulture),
+        Money(turn.Before),
+        Money(turn.After),
+    ];
+
+    private static void WriteChoice(TextWriter output, QuantityView view, QuantityChoice choice)
+    {
+        output.WriteLine();
+        output.WriteLine(choice.Spans.Length == 1
+            ? "The best candidate by score is the same for every number of boards:"
+            : "The best candidate by score changes with the number of boards:");
+        output.WriteLine();
+        TextColumn[] columns =
+        [
+            new("best"), new("from", true), new("to", true), new("circuit"), new("crystal"), new("amplifier"), new("C1 (pF)", true),
+            new("C2 (pF)", true), new("Rs or RE (ohm)", true), new("error (ppm)", true), new("margin", true),
+            new("each at first", true), new("at last", true), new(""),
+        ];
+        TextTable.Write(output, columns, [.. choice.Spans.Take(MostLines).Select(span => Row(view, span))]);
+        if (choice.Spans.Length > MostLines)
+        {
+            output.WriteLine($"… and {Figures.Whole(choice.Spans.Length - MostLines)} more ranges (--format json).");
+        }
+
+        output.WriteLine();
+        output.WriteLine(choice.IsExact
+            ? $"Exact for every number of boards: all {Figures.Whole(choice.Compared)} fit combinations were compared at each."
+            : $"Exact where the whole catalogue was ranked: for {string.Join(", ", choice.RankedAt.Select(builds => Figures.Whole(builds)))} boards; "
+                + $"between them the best of {Figures.Whole(choice.Compared)} candidates that were on the front there. * ranked within the range.");
+    }
+
+    private static string[] Row(QuantityView view, ChoiceSpan span)
+    {
+        CandidateParts? choice = span.Candidate?.Choice;
+        return
+        [
+            view.Letter(span.Candidate),
+            Figures.Whole(span.From),
+            Figures.Whole(span.To),
+            choice?.Circuit.Word() ?? "nothing fits",
+            choice?.Crystal.Id ?? "",
+            choice?.Amplifier.Id ?? "",
+            Figures.Short(choice?.C1.ValueFarads, 1e-12),
+            Figures.Short(choice?.C2.ValueFarads, 1e-12),
+            Figures.Short(choice?.Circuit == CircuitKind.Follower ? choice.Emitter?.ValueOhms : choice is null ? null : choice.Series?.ValueOhms ?? 0, 1),
+            Figures.Fixed(span.Candidate?.Budget?.WorstRatio, 1e-6, 1),
+            Figures.Fixed(span.Candidate?.Margin.Value, 1, 2),
+            span.Candidate is { } candidate ? Money(candidate.Cost) : Figures.None,
+            span.CostAtEnd is { } cost ? Money(cost) : Figures.None,
+            span.Ranked ? "*" : "",
+        ];
+    }
+
+    private static string Money(decimal cost) => cost.ToString("F4", CultureInfo.InvariantCulture);
+}
