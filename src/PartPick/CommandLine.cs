@@ -15,6 +15,7 @@ internal static class CommandLine
         CheckCommand.Build,
         CapsCommand.Build,
         CatalogCommand.Build,
+        ShortlistCommand.Build,
     ];
 
     /// <summary>Runs the program.</summary>

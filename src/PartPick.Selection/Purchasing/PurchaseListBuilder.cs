@@ -35,14 +35,16 @@ public sealed class PurchaseListBuilder(PartsCatalog catalog, PurchaseOptions op
                 "builds", $"more {much.Key.Word()} are needed than can be ordered", "a number of boards that can be built");
         }
 
-        var orders = new OrderFinder(catalog, options, currency.Value);
+        // Where every part is gone, equal ones may still be bought.
+        string ofList = currency.Value.Length > 0 ? currency.Value : new Market(catalog, 1).Currency;
+        var orders = new OrderFinder(catalog, options, ofList);
         var lines = ImmutableArray.CreateBuilder<PurchaseLine>();
         foreach (ImmutableArray<Need> group in Group(needs, orders))
         {
             lines.Add(Line(lines.Count + 1, group, orders));
         }
 
-        return Result.Ok(new PurchaseList(name, currency.Value, circuits, lines.ToImmutable()));
+        return Result.Ok(new PurchaseList(name, ofList, circuits, lines.ToImmutable()));
     }
 
     private static ImmutableArray<Need> Merge(ImmutableArray<PurchaseCircuit> circuits) =>

@@ -8,14 +8,13 @@ namespace PartPick.Selection;
 /// <param name="Most">The most that can be had of it, zero or more.</param>
 public readonly record struct SplitOffer(Offer Offer, int Most);
 
-/// <summary>
-/// The cheapest way to buy a quantity from several offers together, exactly.
-/// </summary>
+/// <summary>The cheapest way to buy a quantity from several offers together, exactly.</summary>
 /// <remarks>
-/// Within one price the cost of an offer grows evenly. Let M be the least common multiple of all order multiples. Where two offers
-/// are both M or more away from the ends of their price's range, M parts can be moved from the dearer to the cheaper one, at no
-/// more cost, until one of them is not. So in some cheapest solution all offers but one buy a quantity less than M from an end of
-/// a range, and the remaining one buys the cheapest quantity that covers what is left.
+/// Within one price the cost of an offer grows evenly. Where two offers are both farther from the ends of their price's range than
+/// the least common multiple of their order multiples, that many parts can be moved from one to the other and back: in a cheapest
+/// solution their prices are equal, and among the cheapest ones that with the greatest sum of squares has no such pair. So all
+/// offers but one buy a quantity near an end of a range, as <see cref="SplitQuantities"/> lists them, and the remaining one buys
+/// the cheapest quantity that covers what is left.
 /// </remarks>
 public static class SplitBuy
 {
@@ -27,13 +26,11 @@ public static class SplitBuy
     {
         ArgumentNullException.ThrowIfNull(offers);
         ArgumentOutOfRangeException.ThrowIfLessThan(required, 1);
-        long common = offers.Aggregate(1L, (sofar, offer) => LeastCommonMultiple(sofar, offer.Offer.Multiple));
-        int[][] quantities = [.. offers.Select(offer => Quantities(offer, required, common))];
-        decimal[] lowest = [.. offers.Select(offer => offer.Offer.HasPrices ? offer.Offer.Prices.Min(price => price.UnitPrice) : 0)];
-        var best = new Best(decimal.MaxValue, null);
+        decimal least = SplitQuantities.LowestPrice(offers);
+        Found best = Greedy(offers, required);
         for (int last = 0; last < offers.Count; last++)
         {
-            best = With(offers, required, quantities, lowest, last, best);
+            best = With(offers, required, least, last, best);
         }
 
         return best.Quantities is { } found ? [.. found] : null;
@@ -48,31 +45,56 @@ public static class SplitBuy
         return quantity == 0 ? 0 : quantity * offer.Prices.Last(price => price.Quantity <= quantity).UnitPrice;
     }
 
+    // A solution to measure others by: the most of each offer, from the cheapest on, until one covers the rest.
+    private static Found Greedy(IReadOnlyList<SplitOffer> offers, int required)
+    {
+        var quantities = new int[offers.Count];
+        (int left, decimal cost) = (required, 0);
+        foreach (int i in Enumerable.Range(0, offers.Count).OrderBy(i => SplitQuantities.LowestPrice([offers[i]])))
+        {
+            (Offer offer, int most) = (offers[i].Offer, offers[i].Most);
+            if (offer.CheapestPurchase(left, most) is { } rest)
+            {
+                quantities[i] = rest.Quantity;
+                return new Found(cost + rest.Total, quantities);
+            }
+
+            int whole = most / offer.Multiple * offer.Multiple;
+            if (offer.HasPrices && whole >= Math.Max(offer.MinimumOrder, offer.Prices[0].Quantity))
+            {
+                quantities[i] = whole;
+                left -= whole;
+                cost += CostOf(offer, whole);
+            }
+        }
+
+        return new Found(decimal.MaxValue, null);
+    }
+
     // Every other offer at one of its few quantities; what is left comes from the last one.
-    private static Best With(
-        IReadOnlyList<SplitOffer> offers, int required, int[][] quantities, decimal[] lowest, int last, Best best)
+    private static Found With(IReadOnlyList<SplitOffer> offers, int required, decimal least, int last, Found best)
     {
         var states = new List<State> { new(0, 0, new int[offers.Count]) };
         for (int i = 0; i < offers.Count; i++)
         {
             if (i != last)
             {
-                states = Extend(states, i, offers[i].Offer, quantities[i], required, lowest, best.Cost);
+                states = Extend(states, i, SplitQuantities.Of(offers, i, required, least), required, least, best.Cost);
             }
         }
 
         foreach (State state in states)
         {
-            if (offers[last].Offer.CheapestPurchase(required - state.Sum, offers[last].Most) is { } rest
+            if (state.Sum < required && offers[last].Offer.CheapestPurchase(required - state.Sum, offers[last].Most) is { } rest
                 && state.Cost + rest.Total < best.Cost)
             {
                 int[] found = [.. state.Quantities];
                 found[last] = rest.Quantity;
-                best = new Best(state.Cost + rest.Total, found);
+                best = new Found(state.Cost + rest.Total, found);
             }
             else if (state.Sum >= required && state.Cost < best.Cost)
             {
-                best = new Best(state.Cost, state.Quantities);
+                best = new Found(state.Cost, state.Quantities);
             }
         }
 
@@ -80,24 +102,28 @@ public static class SplitBuy
     }
 
     private static List<State> Extend(
-        List<State> states, int offer, Offer prices, int[] quantities, int required, decimal[] lowest, decimal limit)
+        List<State> states, int offer, List<SplitQuantity> quantities, int required, decimal least, decimal limit)
     {
-        decimal least = lowest.Min();
         var next = new Dictionary<int, State>();
         foreach (State state in states)
         {
-            foreach (int quantity in quantities)
+            decimal floor = state.Cost + (required - state.Sum) * least;
+            foreach (SplitQuantity quantity in quantities)
             {
-                int sum = (int)Math.Min((long)state.Sum + quantity, required);
-                decimal cost = state.Cost + CostOf(prices, quantity);
-                if (cost + (required - sum) * least > limit || (next.TryGetValue(sum, out State? known) && known.Cost <= cost))
+                // They are in the order of what they cost above the lowest price: the rest can only be dearer, and no dearer one is sought.
+                if (floor + quantity.Above >= limit)
                 {
-                    continue;
+                    break;
                 }
 
-                int[] chosen = [.. state.Quantities];
-                chosen[offer] = quantity;
-                next[sum] = new State(sum, cost, chosen);
+                int sum = (int)Math.Min((long)state.Sum + quantity.Quantity, required);
+                decimal cost = state.Cost + quantity.Cost;
+                if (!next.TryGetValue(sum, out State? known) || cost < known.Cost)
+                {
+                    int[] chosen = [.. state.Quantities];
+                    chosen[offer] = quantity.Quantity;
+                    next[sum] = new State(sum, cost, chosen);
+                }
             }
         }
 
@@ -116,43 +142,7 @@ public static class SplitBuy
         return kept;
     }
 
-    private static int[] Quantities(SplitOffer offer, int required, long common)
-    {
-        var found = new SortedSet<int> { 0 };
-        Offer prices = offer.Offer;
-        for (int i = 0; i < prices.Prices.Length; i++)
-        {
-            long low = Up(Math.Max(prices.Prices[i].Quantity, prices.MinimumOrder), prices.Multiple);
-            long end = i + 1 < prices.Prices.Length ? prices.Prices[i + 1].Quantity - 1L : int.MaxValue;
-            long high = Math.Min(Math.Min(end, offer.Most), Up(Math.Max(required, low), prices.Multiple)) / prices.Multiple * prices.Multiple;
-            for (long quantity = low; quantity <= high; quantity += prices.Multiple)
-            {
-                if (quantity >= low + common && quantity <= high - common)
-                {
-                    quantity = Math.Max(quantity, Up(high - common + 1, prices.Multiple));
-                }
-
-                found.Add((int)quantity);
-            }
-        }
-
-        return [.. found];
-    }
-
-    private static long Up(long quantity, int multiple) => (quantity + multiple - 1) / multiple * multiple;
-
-    private static long LeastCommonMultiple(long one, long other)
-    {
-        (long a, long b) = (one, other);
-        while (b != 0)
-        {
-            (a, b) = (b, a % b);
-        }
-
-        return Math.Min(one / a * other, int.MaxValue);
-    }
-
     private sealed record State(int Sum, decimal Cost, int[] Quantities);
 
-    private sealed record Best(decimal Cost, int[]? Quantities);
+    private sealed record Found(decimal Cost, int[]? Quantities);
 }

@@ -1,0 +1,117 @@
+using System.CommandLine;
+using PartPick.Catalog;
+using PartPick.Output;
+using PartPick.Selection;
+using PartPick.Shortlists;
+using PartPick.Values;
+
+namespace PartPick.Commands;
+
+/// <summary><c>partpick shortlist export</c>: what to order for a list, and its design record.</summary>
+internal static class ShortlistExportCommand
+{
+    private const string Examples =
+        """
+        partpick shortlist export logger                                      the purchase list as CSV
+        partpick shortlist export logger --to order.csv --delimiter ";" --decimal , --bom
+        partpick shortlist export logger --to order.md                        Markdown
+        partpick shortlist export logger --to record.html                     the design record, to print
+        partpick shortlist export logger --format table --attrition 0% --attrition crystals=2%
+        One row is one order of one part for all circuits of the list. A part whose stock does not cover is bought from
+        several equal parts where they do. The form follows the ending of FILE, unless --format says another.
+        """;
+
+    /// <summary>Builds the command.</summary>
+    public static Command Build(CommandContext context)
+    {
+        var name = new Argument<string>("NAME") { Description = "The list" };
+        var to = new Option<string?>("--to") { Description = "The file to write, else standard output", HelpName = "FILE" };
+        var form = new Option<string?>("--format") { Description = string.Join(", ", ExportForms.Words), HelpName = "FORMAT" };
+        form.AcceptOnlyFromAmong(ExportForms.Words);
+        var force = new Option<bool>("--force") { Description = "Replace FILE where it is there" };
+        var bom = new Option<bool>("--bom") { Description = "Begin the CSV file with a byte order mark" };
+        var delimiter = new Option<string>("--delimiter")
+        {
+            Description = "Between the cells of the CSV file: comma, semicolon, tab, bar, or the sign (comma)",
+            HelpName = "SIGN",
+            DefaultValueFactory = _ => ",",
+        };
+        var point = new Option<string>("--decimal")
+        {
+            Description = "Decimal sign of the CSV file: . or , (.)",
+            HelpName = "SIGN",
+            DefaultValueFactory = _ => ".",
+        };
+        point.AcceptOnlyFromAmong(".", ",");
+        var command = new Command("export", "Writes what to order for a list: CSV, Markdown, or an HTML design record.")
+        {
+            name, to, form, force, bom, delimiter, point,
+        };
+        var purchase = new PurchaseArguments();
+        purchase.AddTo(command);
+        HelpFooter.AddTo(command, "Examples", Examples);
+        HelpFooter.AddTo(command, "Cautions", HelpFooter.Cautions);
+        command.SetAction(parsed =>
+        {
+            string list = CommandFailure.Unless(ShortlistName.Read(parsed.GetRequiredValue(name)));
+            var style = new CsvStyle(Delimiter(parsed.GetValue(delimiter)!, delimiter.Name), parsed.GetValue(point)![0], parsed.GetValue(bom));
+            PurchaseOptions options = purchase.Read(parsed);
+            string? path = parsed.GetValue(to);
+            ExportForm chosen = ExportForms.Named(parsed.GetValue(form)) ?? (path is null ? null : ExportForms.OfFile(path)) ?? ExportForm.Csv;
+            PartsCatalog catalog = context.LoadCatalog(parsed);
+            var view = ShortlistView.Of(ShortlistListCommand.Load(context, parsed, list)[0], new ShortlistReviewer(catalog));
+            PurchaseList made = CommandFailure.Unless(ShortlistExport.Purchase(view, catalog, options));
+            string text = ShortlistExport.Text(view, made, chosen, style, ShortlistAddCommand.Today());
+            Write(context, path, text, style.Mark && chosen == ExportForm.Csv, parsed.GetValue(force), to.Name);
+            Tell(context.Surroundings.Error, view, made, path, chosen);
+            return ExitStatus.Done;
+        });
+        return command;
+    }
+
+    private static void Write(CommandContext context, string? path, string text, bool mark, bool force, string option)
+    {
+        if (path is null)
+        {
+            context.Output.Write((mark ? "\uFEFF" : "") + text);
+        }
+        else if (ShortlistExport.Save(path, text, mark, force, option) is { } problem)
+        {
+            throw new CommandFailure(problem, ExitStatus.WrongInput);
+        }
+    }
+
+    // What a buyer or an engineer has to look at is said even where only the file is wanted.
+    private static void Tell(TextWriter error, ShortlistView view, PurchaseList list, string? path, ExportForm form)
+    {
+        var cells = new PurchaseCells(list);
+        if (path is not null)
+        {
+            error.WriteLine(FormattableString.Invariant(
+                $"{list.Lines.Length} lines, {cells.Amount(list.Total)} {list.Currency} in all, written to {path}"));
+        }
+
+        foreach (ShortlistReview review in view.Candidates.Where(each => !each.IsFit))
+        {
+            error.WriteLine($"candidate {Figures.Whole(review.Entry.Number)}: {ReviewWords.State(review)}");
+        }
+
+        if (form != ExportForm.Table)
+        {
+            foreach (string note in cells.Notes())
+            {
+                error.WriteLine(note);
+            }
+        }
+    }
+
+    private static char Delimiter(string text, string option) => text switch
+    {
+        "comma" or "," => ',',
+        "semicolon" or ";" => ';',
+        "tab" or "\t" or "\\t" => '\t',
+        "bar" or "|" => '|',
+        _ => throw new CommandFailure(
+            new Problem(option, $"{Problem.Quote(text)} is no delimiter", "comma, semicolon, tab or bar"), ExitStatus.WrongInput),
+    };
+}

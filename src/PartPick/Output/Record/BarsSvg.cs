@@ -1,0 +1,53 @@
+using System.Globalization;
+using System.Text;
+
+namespace PartPick.Output;
+
+/// <summary>A bar of a picture.</summary>
+/// <param name="Name">What it shows.</param>
+/// <param name="Share">Its length: 1 at the limit; null for none.</param>
+/// <param name="Words">The figure in words.</param>
+internal sealed record PictureBar(string Name, double? Share, string Words);
+
+/// <summary>Draws shares of a limit as bars; a bar beyond its limit is hollow, so that a print without colours shows it.</summary>
+internal static class BarsSvg
+{
+    private const int NameWidth = 190;
+    private const int BarWidth = 240;
+    private const int RowHeight = 20;
+    private const int Width = 860;
+
+    /// <summary>The picture as an SVG element.</summary>
+    public static string Of(IReadOnlyList<PictureBar> bars, string title)
+    {
+        int height = bars.Count * RowHeight + 6;
+        var rows = new StringBuilder();
+        for (int i = 0; i < bars.Count; i++)
+        {
+            Row(rows, bars[i], i * RowHeight + 4);
+        }
+
+        return string.Create(
+            CultureInfo.InvariantCulture,
+            $"""
+            <svg class="bars" xmlns="http://www.w3.org/2000/svg" role="img" width="{Width}" height="{height}" viewBox="0 0 {Width} {height}">
+            <title>{Html.Encode(title)}</title>
+            {rows}<line x1="{NameWidth + BarWidth}" y1="0" x2="{NameWidth + BarWidth}" y2="{height}" stroke="currentColor" stroke-dasharray="3 3"/>
+            </svg>
+            """);
+    }
+
+    private static void Row(StringBuilder rows, PictureBar bar, int y)
+    {
+        rows.Append(CultureInfo.InvariantCulture, $"<text x=\"0\" y=\"{y + 11}\">{Html.Encode(bar.Name)}</text>\n");
+        if (bar.Share is { } share && !double.IsNaN(share))
+        {
+            // The line at the limit stands free of bars that stay below it; what goes beyond ends soon after it.
+            double length = Math.Clamp(share, 0, 1.15) * BarWidth;
+            string look = share > 1 ? "fill=\"none\" stroke-width=\"2\"" : "fill=\"currentColor\" fill-opacity=\"0.55\"";
+            rows.Append(CultureInfo.InvariantCulture, $"<rect x=\"{NameWidth}\" y=\"{y}\" width=\"{length:0.#}\" height=\"12\" {look} stroke=\"currentColor\"/>\n");
+        }
+
+        rows.Append(CultureInfo.InvariantCulture, $"<text x=\"{NameWidth + BarWidth + 46}\" y=\"{y + 11}\">{Html.Encode(bar.Words)}</text>\n");
+    }
+}

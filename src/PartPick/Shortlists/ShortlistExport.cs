@@ -1,0 +1,61 @@
+using System.Collections.Immutable;
+using System.Text;
+using PartPick.Catalog;
+using PartPick.Output;
+using PartPick.Selection;
+using PartPick.Values;
+
+namespace PartPick.Shortlists;
+
+/// <summary>Makes what leaves the program of a list: for the command and for the screen.</summary>
+internal static class ShortlistExport
+{
+    /// <summary>The purchase list of a list's candidates.</summary>
+    /// <param name="view">The list.</param>
+    /// <param name="catalog">Today's parts.</param>
+    /// <param name="options">How it is made.</param>
+    public static Result<PurchaseList> Purchase(ShortlistView view, PartsCatalog catalog, PurchaseOptions options)
+    {
+        ImmutableArray<PurchaseCircuit> circuits =
+        [
+            .. view.Candidates.Select(each => new PurchaseCircuit(
+                Figures.Whole(each.Entry.Number), ReviewWords.Name(each), each.Entry.Builds, each.Parts)),
+        ];
+        return new PurchaseListBuilder(catalog, options).Build(view.Name, circuits);
+    }
+
+    /// <summary>The text in a form.</summary>
+    public static string Text(ShortlistView view, PurchaseList list, ExportForm form, CsvStyle style, DateOnly date)
+    {
+        using var output = new StringWriter { NewLine = "\n" };
+        switch (form)
+        {
+            case ExportForm.Csv:
+                PurchaseCsv.Write(output, list, style);
+                break;
+            case ExportForm.Markdown:
+                output.Write(PurchaseMarkdown.Of(view, list, date));
+                break;
+            case ExportForm.Html:
+                output.Write(DesignRecord.Of(view, list, date));
+                break;
+            case ExportForm.Json:
+                JsonOutput.Write(output, PurchaseJson.Of(list));
+                break;
+            default:
+                PurchaseTable.Write(output, list);
+                break;
+        }
+
+        return output.ToString();
+    }
+
+    /// <summary>Writes a text to a file, whole or not at all.</summary>
+    /// <param name="path">The path of the file.</param>
+    /// <param name="text">The text.</param>
+    /// <param name="mark">Whether it begins with a byte order mark.</param>
+    /// <param name="replace">Whether a file that is there may be replaced.</param>
+    /// <param name="where">The option or field that names the file, for the problem.</param>
+    public static Problem? Save(string path, string text, bool mark, bool replace, string where) =>
+        WholeFile.Write(path, [.. mark ? Encoding.UTF8.Preamble : [], .. new UTF8Encoding(false).GetBytes(text)], replace, where);
+}
