@@ -55,10 +55,10 @@ public sealed class CostCurve
         {
             foreach ((Part part, int count) in counts)
             {
-                if (Turn(part, count, builds) is { } turn)
+                if (part.Offer.CheapestPurchase(count * builds) is { } now)
                 {
-                    breaks.Add(new CostBreak(
-                        builds, part, turn.Kind, turn.Now.Quantity, turn.Now.Total / turn.Now.Quantity, costs[builds - 1], costs[builds]));
+                    breaks.AddRange(Turns(part, count, builds, now).Select(kind => new CostBreak(
+                        builds, part, kind, now.Quantity, now.Total / now.Quantity, costs[builds - 1], costs[builds])));
                 }
             }
         }
@@ -67,19 +67,28 @@ public sealed class CostCurve
         return new CostCurve(costs, breaks.ToImmutable(), covered.Length == 0 ? null : covered.Min());
     }
 
-    private static (CostBreakKind Kind, Purchase Now)? Turn(Part part, int count, int builds)
+    private static IEnumerable<CostBreakKind> Turns(Part part, int count, int builds, Purchase now)
     {
-        if (part.Offer.CheapestPurchase(count * (builds - 1)) is not { } before || part.Offer.CheapestPurchase(count * builds) is not { } now)
+        int needed = count * builds;
+        if (part.Offer.CheapestPurchase(needed - count) is { } before)
         {
-            return null;
+            if (before.Total * now.Quantity != now.Total * before.Quantity)
+            {
+                yield return CostBreakKind.Price;
+            }
+            else if (part.Offer.Multiple > 1 && now.Quantity > before.Quantity)
+            {
+                yield return CostBreakKind.Multiple;
+            }
+            else if (part.Offer.Multiple == 1 && before.Quantity > needed - count && now.Quantity == needed)
+            {
+                yield return CostBreakKind.UsedUp;
+            }
         }
 
-        CostBreakKind? kind =
-            before.Total * now.Quantity != now.Total * before.Quantity ? CostBreakKind.Price
-            : part.Offer.Multiple > 1 && now.Quantity > before.Quantity ? CostBreakKind.Multiple
-            : part.Offer.Multiple == 1 && before.Quantity > count * (builds - 1) && now.Quantity == count * builds ? CostBreakKind.UsedUp
-            : part.Stock / count == builds - 1 ? CostBreakKind.Stock
-            : null;
-        return kind is { } why ? (why, now) : null;
+        if (part.Stock / count == builds - 1)
+        {
+            yield return CostBreakKind.Stock;
+        }
     }
 }

@@ -39,7 +39,7 @@ internal static class ShortlistAlternatesCommand
     private static int Run(CommandContext context, ParseResult parsed, AlternatesWish wish)
     {
         PartsCatalog catalog = context.LoadCatalog(parsed);
-        Shortlist list = Load(context, parsed, wish.List);
+        Shortlist list = ShortlistListCommand.Load(context, parsed, wish.List)[0];
         ImmutableArray<ShortlistEntry> entries = Entries(list, wish);
         var reviewer = new ShortlistReviewer(catalog);
         (ShortlistReview Review, ChosenCircuit Chosen)[] circuits =
@@ -53,12 +53,6 @@ internal static class ShortlistAlternatesCommand
             { Quantities: true } => OtherQuantities.Run(context, parsed, wish, circuits[0], catalog),
             _ => PartReplacement.Run(context, parsed, wish, circuits, catalog),
         };
-    }
-
-    private static Shortlist Load(CommandContext context, ParseResult parsed, string name)
-    {
-        Result<Shortlist> list = ShortlistStore.Read(context.CatalogPath(parsed), name);
-        return CommandFailure.Unless(list, list.Problem?.Where == "NAME" ? ExitStatus.WrongInput : ExitStatus.NoCatalog);
     }
 
     private static ImmutableArray<ShortlistEntry> Entries(Shortlist list, AlternatesWish wish)

@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using System.CommandLine;
 using PartPick.Catalog;
 using PartPick.Output;
@@ -47,6 +48,12 @@ internal static class ShortlistExportCommand
         {
             name, to, form, force, bom, delimiter, point,
         };
+        var alternates = new Option<string?>("--alternates")
+        {
+            Description = "Name up to so many replacements of each part that keep every circuit fit; looks for them first",
+            HelpName = "N",
+        };
+        command.Add(alternates);
         var purchase = new PurchaseArguments();
         purchase.AddTo(command);
         HelpFooter.AddTo(command, "Examples", Examples);
@@ -60,6 +67,11 @@ internal static class ShortlistExportCommand
             ExportForm chosen = ExportForms.Named(parsed.GetValue(form)) ?? (path is null ? null : ExportForms.OfFile(path)) ?? ExportForm.Csv;
             PartsCatalog catalog = context.LoadCatalog(parsed);
             var view = ShortlistView.Of(ShortlistListCommand.Load(context, parsed, list)[0], new ShortlistReviewer(catalog));
+            if (Counts.Read(parsed.GetValue(alternates), alternates.Name) is { } most)
+            {
+                options = options with { Alternates = Alternates(view, catalog, most, context.Surroundings.Cancellation) };
+            }
+
             PurchaseList made = CommandFailure.Unless(ShortlistExport.Purchase(view, catalog, options));
             string text = ShortlistExport.Text(view, made, chosen, style, ShortlistAddCommand.Today());
             Write(context, path, text, style.Mark && chosen == ExportForm.Csv, parsed.GetValue(force), to.Name);
@@ -68,6 +80,15 @@ internal static class ShortlistExportCommand
         });
         return command;
     }
+
+    private static ImmutableDictionary<string, ImmutableArray<string>> Alternates(
+        ShortlistView view, PartsCatalog catalog, int most, CancellationToken stop) => ListAlternates.Of(
+        [
+            .. view.Candidates.Select(review => (CommandFailure.Unless(ChosenCircuit.Of(review, catalog)), review.Requirement)),
+        ],
+        catalog,
+        most,
+        cancellation: stop);
 
     private static void Write(CommandContext context, string? path, string text, bool mark, bool force, string option)
     {

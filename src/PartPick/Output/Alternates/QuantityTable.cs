@@ -1,6 +1,5 @@
 using System.Collections.Immutable;
 using System.Globalization;
-using PartPick.Catalog;
 using PartPick.Commands;
 using PartPick.Selection;
 
@@ -76,7 +75,10 @@ internal static class QuantityTable
     private static void WriteBreaks(TextWriter output, QuantityView view)
     {
         ImmutableArray<CostBreak> breaks = view.Curve.Breaks;
-        CostBreak[] single = [.. breaks.Where(turn => turn.Kind != CostBreakKind.Multiple)];
+        IGrouping<(int Builds, CostBreakKind Kind), CostBreak>[] single =
+        [
+            .. breaks.Where(turn => turn.Kind != CostBreakKind.Multiple).GroupBy(turn => (turn.Builds, turn.Kind)),
+        ];
         output.WriteLine();
         if (breaks.IsEmpty)
         {
@@ -86,11 +88,9 @@ internal static class QuantityTable
 
         output.WriteLine("Where it turns:");
         output.WriteLine();
-        TextColumn[] columns =
-        [
-            new("from", true), new("part"), new("what"), new("bought", true), new("at", true), new("each before", true), new("each", true),
-        ];
-        TextTable.Write(output, columns, [.. single.Take(MostLines).Select(Row)]);
+        ImmutableArray<BoardLine> lines = BoardLine.Of(view.Chosen.Board);
+        TextColumn[] columns = [new("from", true), new("each before", true), new("each", true), new("what")];
+        TextTable.Write(output, columns, [.. single.Take(MostLines).Select(turns => Row(turns, lines))]);
         if (single.Length > MostLines)
         {
             output.WriteLine($"… and {Figures.Whole(single.Length - MostLines)} more (--format json).");
@@ -105,21 +105,27 @@ internal static class QuantityTable
         }
     }
 
-    private static string[] Row(CostBreak turn) =>
-    [
-        Figures.Whole(turn.Builds),
-        turn.Part.Id,
-        turn.Kind switch
-        {
-            CostBreakKind.Price => "another price",
-            CostBreakKind.UsedUp => "what is bought is used up",
-            _ => "stock does not cover",
-        },
-        Figures.Whole(turn.Ordered),
-        turn.UnitPrice.ToString("0.####", CultureInfo.InvariantCulture),
-        Money(turn.Before),
-        Money(turn.After),
-    ];
+    private static string[] Row(IGrouping<(int Builds, CostBreakKind Kind), CostBreak> turns, ImmutableArray<BoardLine> lines)
+    {
+        string[] parts =
+        [
+            .. turns.Select(turn =>
+                string.Join(", ", lines.First(line => line.Part.Id == turn.Part.Id).Designators)
+                + (turns.Key.Kind == CostBreakKind.Price ? $" {Figures.Whole(turn.Ordered)} at {Price(turn.UnitPrice)}" : "")),
+        ];
+        return
+        [
+            Figures.Whole(turns.Key.Builds),
+            Money(turns.First().Before),
+            Money(turns.First().After),
+            turns.Key.Kind switch
+            {
+                CostBreakKind.Price => "another price: ",
+                CostBreakKind.UsedUp => "all bought are used: ",
+                _ => "stock does not cover: ",
+            } + string.Join(", ", parts),
+        ];
+    }
 
     private static void WriteChoice(TextWriter output, QuantityView view, QuantityChoice choice)
     {
@@ -130,8 +136,8 @@ internal static class QuantityTable
         output.WriteLine();
         TextColumn[] columns =
         [
-            new("best"), new("from", true), new("to", true), new("circuit"), new("crystal"), new("amplifier"), new("C1 (pF)", true),
-            new("C2 (pF)", true), new("Rs or RE (ohm)", true), new("error (ppm)", true), new("margin", true),
+            new("best"), new("from", true), new("to", true), new("circuit"), new("crystal"), new("amplifier"), new("C1"), new("C2"),
+            new("Rs or RE (ohm)", true), new("error (ppm)", true), new("margin", true),
             new("each at first", true), new("at last", true), new(""),
         ];
         TextTable.Write(output, columns, [.. choice.Spans.Take(MostLines).Select(span => Row(view, span))]);
@@ -158,8 +164,8 @@ internal static class QuantityTable
             choice?.Circuit.Word() ?? "nothing fits",
             choice?.Crystal.Id ?? "",
             choice?.Amplifier.Id ?? "",
-            Figures.Short(choice?.C1.ValueFarads, 1e-12),
-            Figures.Short(choice?.C2.ValueFarads, 1e-12),
+            choice?.C1.Id ?? "",
+            choice?.C2.Id ?? "",
             Figures.Short(choice?.Circuit == CircuitKind.Follower ? choice.Emitter?.ValueOhms : choice is null ? null : choice.Series?.ValueOhms ?? 0, 1),
             Figures.Fixed(span.Candidate?.Budget?.WorstRatio, 1e-6, 1),
             Figures.Fixed(span.Candidate?.Margin.Value, 1, 2),
@@ -168,6 +174,8 @@ internal static class QuantityTable
             span.Ranked ? "*" : "",
         ];
     }
+
+    private static string Price(decimal price) => price.ToString("0.####", CultureInfo.InvariantCulture);
 
     private static string Money(decimal cost) => cost.ToString("F4", CultureInfo.InvariantCulture);
 }
