@@ -14,10 +14,10 @@ public static class BuyerText
         CrystalPart crystal => Crystal(crystal),
         CapacitorPart capacitor => Capacitor(capacitor),
         ResistorPart resistor => Resistor(resistor),
-        InverterPart => ["Logic inverter", part.Description],
-        CounterPart => ["Binary counter with oscillator", part.Description],
-        PortPart => ["Microcontroller with oscillator port", part.Description],
-        TransistorPart => ["NPN transistor", part.Description],
+        InverterPart => Device(part, "inverter"),
+        CounterPart => Device(part, "counter"),
+        PortPart => Device(part, "microcontroller"),
+        TransistorPart => Device(part, "transistor"),
         _ => [part.Description],
     }).Append(part.Package ?? "").Where(piece => piece.Length > 0));
 
@@ -64,6 +64,12 @@ public static class BuyerText
 
     private static IEnumerable<string> Resistor(ResistorPart part) =>
         [$"Resistor {ValueText.FormatExact(part.ValueOhms, Dimension.Resistance)} ±{Ratio(part.ToleranceRatio)}"];
+
+    // What a device is stands in its description, at least beside the word for its kind.
+    private static IEnumerable<string> Device(Part part, string word) =>
+        part.Description.Contains(word, StringComparison.OrdinalIgnoreCase)
+            ? [char.ToUpperInvariant(part.Description[0]) + part.Description[1..]]
+            : [char.ToUpperInvariant(word[0]) + word[1..], part.Description];
 
     // From a tenth of a per cent on, per cent are the trade's unit.
     private static string Ratio(double ratio) => ratio >= 1e-3
