@@ -50,7 +50,7 @@ internal static class ShortlistExportCommand
         };
         var alternates = new Option<string?>("--alternates")
         {
-            Description = "Name up to so many replacements of each part that keep every circuit fit; looks for them first",
+            Description = "Look for replacements of each part, of its package, that keep every circuit fit; name up to N",
             HelpName = "N",
         };
         command.Add(alternates);
@@ -81,6 +81,7 @@ internal static class ShortlistExportCommand
         return command;
     }
 
+    // A buyer cannot change the board: only parts of the same package.
     private static ImmutableDictionary<string, ImmutableArray<string>> Alternates(
         ShortlistView view, PartsCatalog catalog, int most, CancellationToken stop) => ListAlternates.Of(
         [
@@ -88,7 +89,8 @@ internal static class ShortlistExportCommand
         ],
         catalog,
         most,
-        cancellation: stop);
+        new AlternatesOptions { SamePackage = true },
+        stop);
 
     private static void Write(CommandContext context, string? path, string text, bool mark, bool force, string option)
     {

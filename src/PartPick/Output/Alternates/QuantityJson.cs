@@ -71,7 +71,7 @@ internal static class QuantityJson
             _ => "stock",
         },
         ["ordered"] = turn.Ordered,
-        ["unitPrice"] = turn.UnitPrice,
+        ["unitPrice"] = Plain(turn.UnitPrice),
         ["costBefore"] = turn.Before,
         ["cost"] = turn.After,
     };
@@ -89,7 +89,10 @@ internal static class QuantityJson
     };
 
     // What is bought is paid in full: the sum of whole purchases, without the remainder of the division by the boards.
-    private static decimal Total(QuantityView view, int builds) => decimal.Round(view.Curve.UnitCost(builds) * builds, 6);
+    private static decimal Total(QuantityView view, int builds) => Plain(decimal.Round(view.Curve.UnitCost(builds) * builds, 6));
+
+    // Without the zeros at the end that a division or a product leaves.
+    private static decimal Plain(decimal value) => value / 1.0000000000000000000000000000m;
 
     private static string Text(decimal value) => value.ToString(CultureInfo.InvariantCulture);
 }
