@@ -43,7 +43,6 @@ internal static class ShortlistExportCommand
             HelpName = "SIGN",
             DefaultValueFactory = _ => ".",
         };
-        point.AcceptOnlyFromAmong(".", ",");
         var command = new Command("export", "Writes what to order for a list: CSV, Markdown, or an HTML design record.")
         {
             name, to, form, force, bom, delimiter, point,
@@ -61,7 +60,8 @@ internal static class ShortlistExportCommand
         command.SetAction(parsed =>
         {
             string list = CommandFailure.Unless(ShortlistName.Read(parsed.GetRequiredValue(name)));
-            var style = new CsvStyle(Delimiter(parsed.GetValue(delimiter)!, delimiter.Name), parsed.GetValue(point)![0], parsed.GetValue(bom));
+            var style = new CsvStyle(
+                Delimiter(parsed.GetValue(delimiter)!, delimiter.Name), DecimalSign(parsed.GetValue(point)!, point.Name), parsed.GetValue(bom));
             PurchaseOptions options = purchase.Read(parsed);
             string? path = parsed.GetValue(to);
             ExportForm chosen = ExportForms.Named(parsed.GetValue(form)) ?? (path is null ? null : ExportForms.OfFile(path)) ?? ExportForm.Csv;
@@ -137,4 +137,8 @@ internal static class ShortlistExportCommand
         _ => throw new CommandFailure(
             new Problem(option, $"{Problem.Quote(text)} is no delimiter", "comma, semicolon, tab or bar"), ExitStatus.WrongInput),
     };
+
+    private static char DecimalSign(string text, string option) => text is "." or ","
+        ? text[0]
+        : throw new CommandFailure(new Problem(option, $"{Problem.Quote(text)} is no decimal sign", ". or ,"), ExitStatus.WrongInput);
 }

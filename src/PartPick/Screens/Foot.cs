@@ -18,16 +18,24 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
             return [.. Paragraph.Of(problem.ToString(), width - 1, glyphs, " ! ", 3, Tone.Warning).Take(MostRows)];
         }
 
+        if (model is { ShowsKeys: false, Shortlists.Asking: { } asking })
+        {
+            return asking.Draw(model.Shortlists.Enter, width, glyphs);
+        }
+
         return model switch
         {
             { Notice: { } notice } => [new LineBuilder(glyphs).Add(" ").Column(notice, width - 1, Tone.Accent).Build()],
             { ShowsKeys: true } => [Keys((UpDown, "scroll"), ("Esc", "back"))],
+            { Shortlists.IsOpen: true } => [Keys(
+                (UpDown, "choose"), (glyphs.Left + " " + glyphs.Right, "lists"), ("x", "write to a file"), ("Del", "take off"), ("Esc", "back"))],
             { Place: Place.Sentence, Wanted.Typed: not null } => [Value(("Enter", "keep"), ("Esc", "as it was"))],
             { Place: Place.Sentence } => [Value(("Tab", "next"), ("Esc", model.IsReading ? "circuit" : "list"))],
             { Place: Place.Circuit } => [Keys(
-                (UpDown, "scroll"), (glyphs.Left + " " + glyphs.Right, "other circuits"), ("Esc", "list"), ("e", "edit"), ("?", "keys"))],
+                (UpDown, "scroll"), (glyphs.Left + " " + glyphs.Right, "other circuits"), ("s", "to a list"), ("Esc", "list"), ("e", "edit"),
+                ("?", "keys"))],
             { List.Chosen: null } => [Keys(("e", "edit the wanted"), ("?", "keys"), ("q", "quit"))],
-            _ => [Keys((UpDown, "choose"), ("Enter", "open"), ("e", "edit the wanted"), ("?", "keys"), ("q", "quit"))],
+            _ => [Keys((UpDown, "choose"), ("Enter", "open"), ("s", "to a list"), ("e", "edit the wanted"), ("?", "keys"), ("q", "quit"))],
         };
     }
 

@@ -15,6 +15,8 @@ public static class KeysPage
         Head("In the list");
         Key($"{glyphs.Up} {glyphs.Down}", "the circuit before, the next one; also PgUp, PgDn, Home, End");
         Key("Enter", "open the circuit: drawing, parts, error, figures, reasons");
+        Key("s", "put the circuit on a list; so in a circuit, too");
+        Key("l", "the lists: what changed since, and writing them to files");
         Key("e or Tab", "edit the wanted sentence; so does " + glyphs.Up + " on the first circuit");
         Key("?", "this page");
         Key("q", "quit; the wanted sentence is kept for the next time");
@@ -38,6 +40,12 @@ public static class KeysPage
         Text("Error is the worst case over tolerance, temperature, ageing, capacitors, strays and amplifier. Margin, drive and " +
             "start-up are taken at their worst corners of supply, temperature, device and capacitance. Cost is for one board, " +
             "with prices at the quantity built.");
+        Head("In a list");
+        Key($"{glyphs.Up} {glyphs.Down}", "the candidate before, the next one; PgUp and PgDn scroll what is said about it");
+        Key($"{glyphs.Left} {glyphs.Right}", "the list before, the next one");
+        Key("x", "write it to a file: .csv and .md to order from, .html to print");
+        Key("Del Del", "take the candidate off");
+        Key("Esc", "back");
         Head("Cautions");
         Text("The figures come from a model and from the parts' stated data: measure the start-up margin of the first board. " +
             "Radiating a signal needs a licence where the law says so. Timing that safety rests on needs a review by a qualified " +

@@ -21,14 +21,17 @@ public sealed class MainModel
     /// <param name="notice">A line to show until the first key; null for none.</param>
     /// <param name="currency">The currency of the cost limit; empty where it is not known.</param>
     /// <param name="waits">Whether a change waits a moment for the next one before it is ranked.</param>
+    /// <param name="desk">Where the lists of candidates are kept; null where there are none.</param>
     public MainModel(
-        Requirement requirement, LiveRanking ranking, Glyphs glyphs, string? notice = null, string currency = "", bool waits = true)
+        Requirement requirement, LiveRanking ranking, Glyphs glyphs, string? notice = null, string currency = "", bool waits = true,
+        IShortlistDesk? desk = null)
     {
         ArgumentNullException.ThrowIfNull(ranking);
         _ranking = ranking;
         _glyphs = glyphs;
         Notice = notice;
         _waits = waits;
+        Shortlists = new ShortlistModel(desk);
         _reading = new Reading(List);
         Wanted = new SentenceModel(requirement, glyphs, currency);
         Wanted.Changed += Rank;
@@ -47,6 +50,9 @@ public sealed class MainModel
 
     /// <summary>The list.</summary>
     public CandidateList List { get; } = new();
+
+    /// <summary>The lists of candidates.</summary>
+    internal ShortlistModel Shortlists { get; }
 
     /// <summary>Where the keys go.</summary>
     public Place Place { get; private set; }
@@ -86,6 +92,12 @@ public sealed class MainModel
         if (ShowsKeys)
         {
             PressInKeys(key);
+            return;
+        }
+
+        if (Shortlists.Press(key, out string? notice))
+        {
+            Notice = notice;
             return;
         }
 
@@ -204,8 +216,14 @@ public sealed class MainModel
             case { Name: KeyName.Letter, Letter: 'q' }:
                 IsDone = true;
                 break;
-            case { Name: KeyName.Letter, Letter: 'e' }:
+            case { Name: KeyName.Letter, Letter: 'e' } when !Shortlists.IsOpen:
                 Place = Place.Sentence;
+                break;
+            case { Name: KeyName.Letter, Letter: 's' } when List is { Chosen: { } chosen, Result: { } result }:
+                Shortlists.Ask(chosen, result.Requirement);
+                break;
+            case { Name: KeyName.Letter, Letter: 'l' }:
+                Notice = Shortlists.Open();
                 break;
             case { Name: KeyName.Tab or KeyName.BackTab } when Place == Place.Circuit:
                 Place = Place.Sentence;

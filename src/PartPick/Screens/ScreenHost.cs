@@ -49,7 +49,7 @@ public static class ScreenHost
             : null;
         var run = new TerminalRun(
             new CatalogRanking(catalog.Value), TerminalTraits.Of(Environment.GetEnvironmentVariable),
-            requirement => keeper.Keep(requirement), new Market(catalog.Value, 1).Currency);
+            requirement => keeper.Keep(requirement), new Market(catalog.Value, 1).Currency, new CatalogDesk(catalogPath));
         Requirement end = run.Show(start.ValueOr(null) ?? First, notice);
         return keeper.Keep(end) is { } problem ? Fail(ExitStatus.NoCatalog, problem.ToString()) : ExitStatus.Done;
     }

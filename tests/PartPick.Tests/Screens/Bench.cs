@@ -15,13 +15,15 @@ internal sealed class Bench : IDisposable
     private readonly LiveRanking _live;
     private readonly MainScreen _screen;
 
-    public Bench(int width = 80, int height = 24, FakeRanking? ranking = null, Requirement? requirement = null, Glyphs? glyphs = null)
+    public Bench(
+        int width = 80, int height = 24, FakeRanking? ranking = null, Requirement? requirement = null, Glyphs? glyphs = null,
+        IShortlistDesk? desk = null)
     {
         Ranking = ranking ?? new FakeRanking();
         _app = Application.Create(new VirtualTimeProvider()).Init(DriverRegistry.Names.ANSI);
         _app.Driver!.SetScreenSize(width, height);
         _live = new LiveRanking(Ranking, action => action(), TimeProvider.System);
-        Model = new MainModel(requirement ?? SampleRanking.Wanted, _live, glyphs ?? Glyphs.Drawn, waits: false);
+        Model = new MainModel(requirement ?? SampleRanking.Wanted, _live, glyphs ?? Glyphs.Drawn, waits: false, desk: desk);
         _screen = new MainScreen(Model, Palette.Plain);
         _app.Begin(_screen);
         _app.LayoutAndDraw();

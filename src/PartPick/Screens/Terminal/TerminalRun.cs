@@ -10,7 +10,9 @@ namespace PartPick.Screens;
 /// <param name="traits">What the terminal can show.</param>
 /// <param name="keep">Keeps a requirement; called from any thread.</param>
 /// <param name="currency">The currency of the costs; empty where it is not known.</param>
-internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits, Action<Requirement> keep, string currency)
+/// <param name="desk">Where the lists of candidates are kept.</param>
+internal sealed class TerminalRun(
+    IRankingService ranking, TerminalTraits traits, Action<Requirement> keep, string currency, IShortlistDesk desk)
 {
     private const string MouseReportsOff = "\x1b[?1003l\x1b[?1015l\x1b[?1006l";
 
@@ -29,7 +31,7 @@ internal sealed class TerminalRun(IRankingService ranking, TerminalTraits traits
         using IApplication app = Application.Create().Init(DriverRegistry.Names.ANSI);
         app.Driver!.WriteRaw(MouseReportsOff);
         using var live = new LiveRanking(ranking, action => Post(app, action), TimeProvider.System);
-        var model = new MainModel(start, live, glyphs, notice, currency);
+        var model = new MainModel(start, live, glyphs, notice, currency, desk: desk);
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
         using var screen = new MainScreen(model, palette);
         using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, Leave);

@@ -2,9 +2,10 @@ namespace PartPick.Screens;
 
 /// <summary>A text that is being typed, and where the next letter goes.</summary>
 /// <param name="text">The text to begin with; the caret stands behind it.</param>
-public sealed class TypedText(string text)
+/// <param name="longest">The most letters.</param>
+public sealed class TypedText(string text, int longest = TypedText.Usual)
 {
-    private const int Longest = 60;
+    private const int Usual = 60;
 
     /// <summary>The text.</summary>
     public string Text { get; private set; } = text;
@@ -38,7 +39,7 @@ public sealed class TypedText(string text)
             case KeyName.Delete when Caret < Text.Length:
                 Text = Text.Remove(Caret, 1);
                 break;
-            case KeyName.Letter when !char.IsControl(key.Letter) && Text.Length < Longest:
+            case KeyName.Letter when !char.IsControl(key.Letter) && Text.Length < longest:
                 Text = Text.Insert(Caret++, key.Letter.ToString());
                 break;
         }

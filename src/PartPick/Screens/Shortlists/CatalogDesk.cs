@@ -1,0 +1,56 @@
+using System.Collections.Immutable;
+using PartPick.Catalog;
+using PartPick.Output;
+using PartPick.Selection;
+using PartPick.Shortlists;
+using PartPick.Values;
+
+namespace PartPick.Screens;
+
+/// <summary>The lists of a catalogue. Each call reads the parts anew: an import elsewhere may have changed them.</summary>
+/// <param name="catalogPath">Path of the catalogue's file.</param>
+public sealed class CatalogDesk(string catalogPath) : IShortlistDesk
+{
+    private static DateOnly Today => DateOnly.FromDateTime(TimeProvider.System.GetLocalNow().Date);
+
+    /// <inheritdoc/>
+    public Result<ImmutableArray<string>> Names() =>
+        ShortlistStore.ReadAll(catalogPath).Map<ImmutableArray<string>>(lists => [.. lists.Select(list => list.Name)]);
+
+    /// <inheritdoc/>
+    public Result<ImmutableArray<ShortlistReview>> Read(string list) => CatalogStore.Load(catalogPath).Then(catalog => Read(list, catalog));
+
+    /// <inheritdoc/>
+    public Result<ShortlistEntry> Put(string list, CandidateParts choice, Requirement requirement, string? note) =>
+        CatalogStore.Load(catalogPath).Then(catalog =>
+        {
+            // The parts that are shown may be older than the catalogue.
+            return ChosenParts.Of(choice, new SupportParts(null, null, null)).In(catalog) is { } now
+                ? new ShortlistReviewer(catalog).Make(now.Choice, null, requirement, note, Today)
+                : Result.Fail<ShortlistEntry>("circuit", "one of its parts is not in the catalogue any more", "a circuit of today's parts");
+        }).Then(entry => ShortlistStore.Add(catalogPath, list, entry));
+
+    /// <inheritdoc/>
+    public Problem? Remove(string list, int number) => ShortlistStore.Remove(catalogPath, list, number).Problem;
+
+    /// <inheritdoc/>
+    public Result<string> Export(string list, string path, bool replace) => CatalogStore.Load(catalogPath).Then(catalog =>
+        Read(list, catalog).Then(reviews =>
+        {
+            var view = new ShortlistView(list, reviews);
+            return ShortlistExport.Purchase(view, catalog, new PurchaseOptions()).Then(purchase =>
+            {
+                ExportForm form = ExportForms.OfFile(path) ?? ExportForm.Csv;
+                string text = ShortlistExport.Text(view, purchase, form, new CsvStyle(), Today);
+                return ShortlistExport.Save(path, text, false, replace, "file") is { } problem
+                    ? Result.Fail<string>(problem)
+                    : Result.Ok($"{purchase.Lines.Length} lines, {new PurchaseCells(purchase).Amount(purchase.Total)} {purchase.Currency}, written to {path}");
+            });
+        }));
+
+    /// <inheritdoc/>
+    public bool IsThere(string path) => File.Exists(path);
+
+    private Result<ImmutableArray<ShortlistReview>> Read(string list, PartsCatalog catalog) =>
+        ShortlistStore.Read(catalogPath, list).Then(found => new ShortlistReviewer(catalog).Review(found));
+}
