@@ -22,7 +22,8 @@ public sealed record ChosenCircuit(BoardParts Board, Candidate Candidate)
             ? Result.Ok(new ChosenCircuit(board, candidate))
             : Result.Fail<ChosenCircuit>(
                 "supply",
-                $"{board.Choice.Amplifier.Id} is not specified over {requirement.SupplyMinVolts:0.###} to {requirement.SupplyMaxVolts:0.###} V",
+                FormattableString.Invariant(
+                    $"{board.Choice.Amplifier.Id} is not specified over {requirement.SupplyMinVolts} to {requirement.SupplyMaxVolts} V"),
                 "a supply range that the amplifier states");
     }
 

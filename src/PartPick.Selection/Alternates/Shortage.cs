@@ -20,6 +20,8 @@ public sealed record Shortage
     /// <summary>The ranking without the one and with the other.</summary>
     public required RankingResult Ranking { get; init; }
 
-    /// <summary>The best of each group, in the order of the ranking, with the change from the chosen circuit; empty where none fits.</summary>
+    /// <summary>
+    /// The best of each group, in the order of the ranking, with the change from the chosen circuit; empty where none fits.
+    /// </summary>
     public required ImmutableArray<ChangedCandidate> Candidates { get; init; }
 }

@@ -74,7 +74,9 @@ public sealed class Market
         }
     }
 
-    /// <summary>Cost per unit of a number of a part on every board, for any number of boards; beyond all cost where it has no price.</summary>
+    /// <summary>
+    /// Cost per unit of a number of a part on every board, for any number of boards; beyond all cost where it has no price.
+    /// </summary>
     internal static decimal UnitCost(Part part, int count, int builds)
     {
         long needed = Math.Min((long)count * builds, int.MaxValue);

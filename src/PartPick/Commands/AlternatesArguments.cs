@@ -57,7 +57,7 @@ internal sealed class AlternatesArguments
 
     private readonly Option<string?> _gone = new("--gone")
     {
-        Description = "This part cannot be had: rank what else meets the requirement, keeping crystal and amplifier where they are not it",
+        Description = "This part cannot be had: rank what else meets the requirement, keeping crystal or amplifier",
         HelpName = "PART",
     };
 
@@ -129,7 +129,9 @@ internal sealed class AlternatesArguments
         {
             Refuse(
                 !int.TryParse(word, NumberStyles.None, CultureInfo.InvariantCulture, out int builds) || builds is < 1 or > MostBuilds,
-                _builds.Name, $"{Problem.Quote(word)} is no number of boards", $"whole numbers from 1 to {Figures.Whole(MostBuilds)} such as 50,75,300");
+                _builds.Name,
+                $"{Problem.Quote(word)} is no number of boards",
+                $"whole numbers from 1 to {Figures.Whole(MostBuilds)} such as 50,75,300");
             numbers.Add(builds);
         }
 

@@ -24,7 +24,9 @@ internal static class PartWish
         {
             if (!lines.Any(line => Is(line, name)))
             {
-                IEnumerable<string> words = Words.Where(word => lines.Any(line => line.Places.Contains(word.Place))).Select(word => word.Word);
+                IEnumerable<string> words = Words
+                    .Where(word => lines.Any(line => line.Places.Contains(word.Place)))
+                    .Select(word => word.Word);
                 throw new CommandFailure(
                     new Problem(
                         option,

@@ -62,13 +62,17 @@ internal static class ShortlistAlternatesCommand
         if (entries.IsEmpty)
         {
             throw new CommandFailure(
-                new Problem("NUMBER", $"{Figures.Whole(wish.Number!.Value)} is no candidate of {Problem.Quote(list.Name)}", "one of " + numbers),
+                new Problem(
+                    "NUMBER", $"{Figures.Whole(wish.Number!.Value)} is no candidate of {Problem.Quote(list.Name)}", "one of " + numbers),
                 ExitStatus.WrongInput);
         }
 
         return entries.Length > 1 && (wish.Gone is not null || wish.Quantities)
             ? throw new CommandFailure(
-                new Problem("NUMBER", $"is missing: {Problem.Quote(list.Name)} holds {Figures.Whole(entries.Length)} candidates", "one of " + numbers),
+                new Problem(
+                    "NUMBER",
+                    $"is missing: {Problem.Quote(list.Name)} holds {Figures.Whole(entries.Length)} candidates",
+                    "one of " + numbers),
                 ExitStatus.WrongInput)
             : entries;
     }

@@ -5,6 +5,10 @@ namespace PartPick.Tests.Shortlists;
 
 public sealed class AlternatesCommandTests
 {
+    private const string Parts = "C1, C2, C3, R1, R2, U1, Y1, crystal, amplifier, rs, rf, decoupling or an id";
+
+    private const string Numbers = "whole numbers from 1 to 10000 such as 50,75,300";
+
     private static readonly string[] Alternates = ["shortlist", "alternates", "logger"];
 
     [Fact]
@@ -17,7 +21,8 @@ public sealed class AlternatesCommandTests
         JsonElement found = Assert.Single(run.Json.EnumerateArray());
         JsonElement listed = bench.List().GetProperty("candidates")[0];
         Assert.Equal(
-            listed.GetProperty("parts").EnumerateArray().Select(part => part.GetProperty("designator").GetString()).Order(StringComparer.Ordinal),
+            listed.GetProperty("parts").EnumerateArray().Select(part => part.GetProperty("designator").GetString())
+                .Order(StringComparer.Ordinal),
             found.GetProperty("parts").EnumerateArray().SelectMany(part => part.GetProperty("designators").EnumerateArray())
                 .Select(designator => designator.GetString()).Order(StringComparer.Ordinal));
         foreach (JsonElement part in found.GetProperty("parts").EnumerateArray())
@@ -32,9 +37,10 @@ public sealed class AlternatesCommandTests
             double[] sizes = [.. replacements.Select(one => one.GetProperty("change").GetProperty("size").GetDouble())];
             Assert.Equal(sizes.Order(), sizes);
             Assert.All(replacements, one => Assert.InRange(one.GetProperty("figures").GetProperty("errorWorst").GetDouble(), 0, 80));
+            double before = found.GetProperty("figures").GetProperty("errorWorst").GetDouble();
             Assert.All(replacements, one => Assert.Equal(
                 one.GetProperty("figures").GetProperty("errorWorst").GetDouble(),
-                found.GetProperty("figures").GetProperty("errorWorst").GetDouble() + one.GetProperty("change").GetProperty("errorWorst").GetDouble(),
+                before + one.GetProperty("change").GetProperty("errorWorst").GetDouble(),
                 1e-6));
         }
     }
@@ -49,7 +55,8 @@ public sealed class AlternatesCommandTests
         changed["parts"]!.AsArray().Single(part => part!["designator"]!.GetValue<string>() == "C1")!["part"] =
             first.GetProperty("part").GetString();
 
-        Run added = bench.WithInput(changed.ToJsonString(), "shortlist", "add", "other", "-", "--requirement", Run.File(ShortlistBench.River));
+        string river = Run.File(ShortlistBench.River);
+        Run added = bench.WithInput(changed.ToJsonString(), "shortlist", "add", "other", "-", "--requirement", river);
 
         Assert.True(added.Status == 0, added.Error);
         JsonElement now = bench.List("other").GetProperty("candidates")[0].GetProperty("now");
@@ -65,7 +72,8 @@ public sealed class AlternatesCommandTests
 
         Assert.Equal(0, run.Status);
         Assert.Matches(@"^logger, candidate 1: counter CNT-\S+ with X-\S+, stage \d+; error \d+\.\d of 80\.0 ppm, margin ", run.Output);
-        Assert.Matches(@"\nY1, crystal, X-\S+: \d+ of 417 others keep the circuit fit; \d+ analysed\.\n  Left out: .*\d+ another frequency", run.Output);
+        Assert.Matches(@"\nY1, crystal, X-\S+: \d+ of 417 others keep the circuit fit; \d+ analysed\.\n", run.Output);
+        Assert.Matches(@"\n  Left out: .*\d+ another frequency", run.Output);
         Assert.Matches(@"\nR\d, damping Rs, R-\S+: ", run.Output);
         Assert.DoesNotContain("load capacitor", run.Output, StringComparison.Ordinal);
         Assert.Matches(@"part +frequency \(ppm\) +error \(ppm\) +margin +drive \(uW\) +start-up \(ms\) +cost \(EUR\) +change", run.Output);
@@ -141,7 +149,9 @@ public sealed class AlternatesCommandTests
         JsonElement found = bench.Of([.. Alternates, "1", "--builds", "--format", "json"]).Json;
 
         JsonElement[] rows = [.. found.GetProperty("rows").EnumerateArray()];
-        Assert.Equal([1, 2, 5, 10, 20, 50, 100, 200, 500, 1000, 2000, 5000, 10000], rows.Select(row => row.GetProperty("builds").GetInt32()));
+        Assert.Equal(
+            [1, 2, 5, 10, 20, 50, 100, 200, 500, 1000, 2000, 5000, 10000],
+            rows.Select(row => row.GetProperty("builds").GetInt32()));
         Assert.Equal(cost, rows[6].GetProperty("cost").GetDecimal());
         Assert.All(rows, row => Assert.Equal(
             row.GetProperty("cost").GetDecimal() * row.GetProperty("builds").GetInt32(), row.GetProperty("total").GetDecimal(), 5));
@@ -153,8 +163,10 @@ public sealed class AlternatesCommandTests
         Assert.Equal((1, 10000), (choices[0].GetProperty("from").GetInt32(), choices[^1].GetProperty("to").GetInt32()));
         foreach (int builds in new[] { 7, 60, 300 })
         {
-            Run again = bench.Of([.. SmallRank, "--top", "1", "--builds", builds.ToString(CultureInfo.InvariantCulture), "--format", "json"]);
-            JsonElement span = choices.Single(one => one.GetProperty("from").GetInt32() <= builds && one.GetProperty("to").GetInt32() >= builds);
+            string count = builds.ToString(CultureInfo.InvariantCulture);
+            Run again = bench.Of([.. SmallRank, "--top", "1", "--builds", count, "--format", "json"]);
+            JsonElement span = choices.Single(one =>
+                one.GetProperty("from").GetInt32() <= builds && one.GetProperty("to").GetInt32() >= builds);
             Assert.Equal(again.Json.GetProperty("candidates")[0].GetProperty("id").GetString(), span.GetProperty("id").GetString());
         }
     }
@@ -183,10 +195,10 @@ public sealed class AlternatesCommandTests
     [InlineData("NUMBER: is missing: 'logger' holds 2 candidates; fits one of 1, 2", "logger", "--gone", "Y1")]
     [InlineData("NUMBER: is missing: 'logger' holds 2 candidates; fits one of 1, 2", "logger", "--builds")]
     [InlineData("NAME: there is no list 'nothing'; fits one of 'logger'", "nothing")]
-    [InlineData("--part: 'C9' is no part of the circuit; fits C1, C2, C3, R1, R2, U1, Y1, crystal, amplifier, rs, rf, decoupling or an id", "logger", "1", "--part", "C9")]
-    [InlineData("--gone: 'coupling' is no part of the circuit; fits C1, C2, C3, R1, R2, U1, Y1, crystal, amplifier, rs, rf, decoupling or an id", "logger", "1", "--gone", "coupling")]
-    [InlineData("--builds: '0' is no number of boards; fits whole numbers from 1 to 10000 such as 50,75,300", "logger", "1", "--builds", "5,0")]
-    [InlineData("--builds: 'many' is no number of boards; fits whole numbers from 1 to 10000 such as 50,75,300", "logger", "1", "--builds", "many")]
+    [InlineData("--part: 'C9' is no part of the circuit; fits " + Parts, "logger", "1", "--part", "C9")]
+    [InlineData("--gone: 'coupling' is no part of the circuit; fits " + Parts, "logger", "1", "--gone", "coupling")]
+    [InlineData("--builds: '0' is no number of boards; fits " + Numbers, "logger", "1", "--builds", "5,0")]
+    [InlineData("--builds: 'many' is no number of boards; fits " + Numbers, "logger", "1", "--builds", "many")]
     [InlineData("--builds: does not go with --gone; fits one of the two", "logger", "1", "--gone", "Y1", "--builds")]
     [InlineData("--part: does not go with --gone; fits one of the two", "logger", "1", "--gone", "Y1", "--part", "C1")]
     [InlineData("--equal: says nothing without --gone; fits --gone PART --equal", "logger", "1", "--equal")]

@@ -3,7 +3,9 @@ using System.Text;
 
 namespace PartPick.Output;
 
-/// <summary>Draws a cost per unit over the number of boards, both logarithmic, so that a fixed sum shared by more boards falls straight.</summary>
+/// <summary>
+/// Draws a cost per unit over the number of boards, both logarithmic, so that a fixed sum shared by more boards falls straight.
+/// </summary>
 internal static class CostPicture
 {
     private const int DotsAcross = 2;

@@ -23,7 +23,7 @@ internal static class QuantityTable
         WriteBreaks(output, view);
         if (view.Choice is not null)
         {
-            WriteChoice(output, view, view.Choice);
+            ChoiceTable.Write(output, view, view.Choice);
         }
 
         output.WriteLine();
@@ -96,7 +96,9 @@ internal static class QuantityTable
             output.WriteLine($"… and {Figures.Whole(single.Length - MostLines)} more (--format json).");
         }
 
-        foreach (IGrouping<string, CostBreak> steps in breaks.Where(turn => turn.Kind == CostBreakKind.Multiple).GroupBy(turn => turn.Part.Id))
+        foreach (IGrouping<string, CostBreak> steps in breaks
+            .Where(turn => turn.Kind == CostBreakKind.Multiple)
+            .GroupBy(turn => turn.Part.Id))
         {
             CostBreak first = steps.First();
             output.WriteLine(
@@ -127,55 +129,8 @@ internal static class QuantityTable
         ];
     }
 
-    private static void WriteChoice(TextWriter output, QuantityView view, QuantityChoice choice)
-    {
-        output.WriteLine();
-        output.WriteLine(choice.Spans.Length == 1
-            ? "The best candidate by score is the same for every number of boards:"
-            : "The best candidate by score changes with the number of boards:");
-        output.WriteLine();
-        TextColumn[] columns =
-        [
-            new("best"), new("from", true), new("to", true), new("circuit"), new("crystal"), new("amplifier"), new("C1"), new("C2"),
-            new("Rs or RE (ohm)", true), new("error (ppm)", true), new("margin", true),
-            new("each at first", true), new("at last", true), new(""),
-        ];
-        TextTable.Write(output, columns, [.. choice.Spans.Take(MostLines).Select(span => Row(view, span))]);
-        if (choice.Spans.Length > MostLines)
-        {
-            output.WriteLine($"… and {Figures.Whole(choice.Spans.Length - MostLines)} more ranges (--format json).");
-        }
-
-        output.WriteLine();
-        output.WriteLine(choice.IsExact
-            ? $"Exact for every number of boards: all {Figures.Whole(choice.Compared)} fit combinations were compared at each."
-            : $"Exact where the whole catalogue was ranked: for {string.Join(", ", choice.RankedAt.Select(builds => Figures.Whole(builds)))} boards; "
-                + $"between them the best of {Figures.Whole(choice.Compared)} candidates that were on the front there. * ranked within the range.");
-    }
-
-    private static string[] Row(QuantityView view, ChoiceSpan span)
-    {
-        CandidateParts? choice = span.Candidate?.Choice;
-        return
-        [
-            view.Letter(span.Candidate),
-            Figures.Whole(span.From),
-            Figures.Whole(span.To),
-            choice?.Circuit.Word() ?? "nothing fits",
-            choice?.Crystal.Id ?? "",
-            choice?.Amplifier.Id ?? "",
-            choice?.C1.Id ?? "",
-            choice?.C2.Id ?? "",
-            Figures.Short(choice?.Circuit == CircuitKind.Follower ? choice.Emitter?.ValueOhms : choice is null ? null : choice.Series?.ValueOhms ?? 0, 1),
-            Figures.Fixed(span.Candidate?.Budget?.WorstRatio, 1e-6, 1),
-            Figures.Fixed(span.Candidate?.Margin.Value, 1, 2),
-            span.Candidate is { } candidate ? Money(candidate.Cost) : Figures.None,
-            span.CostAtEnd is { } cost ? Money(cost) : Figures.None,
-            span.Ranked ? "*" : "",
-        ];
-    }
-
     private static string Price(decimal price) => price.ToString("0.####", CultureInfo.InvariantCulture);
 
-    private static string Money(decimal cost) => cost.ToString("F4", CultureInfo.InvariantCulture);
+    /// <summary>A cost of one board.</summary>
+    public static string Money(decimal cost) => cost.ToString("F4", CultureInfo.InvariantCulture);
 }

@@ -12,7 +12,13 @@ namespace PartPick.Output;
 /// <param name="Rows">The numbers of boards of the table, ascending.</param>
 /// <param name="Ascii">Whether only ASCII may be used.</param>
 internal sealed record QuantityView(
-    string List, ShortlistReview Review, ChosenCircuit Chosen, CostCurve Curve, QuantityChoice? Choice, ImmutableArray<int> Rows, bool Ascii)
+    string List,
+    ShortlistReview Review,
+    ChosenCircuit Chosen,
+    CostCurve Curve,
+    QuantityChoice? Choice,
+    ImmutableArray<int> Rows,
+    bool Ascii)
 {
     /// <summary>The candidates of the choice, each once, in the order in which they come; a letter stands for each.</summary>
     public ImmutableArray<Candidate> Candidates { get; } = Choice is null

@@ -36,7 +36,9 @@ internal static class CostSvg
         var marks = new StringBuilder();
         for (int count = 1; count <= curve.Most; count *= 10)
         {
-            marks.Append(CultureInfo.InvariantCulture, $"<text x=\"{X(count):0.#}\" y=\"{Top + High + 16}\" text-anchor=\"middle\">{count}</text>\n");
+            marks.Append(
+                CultureInfo.InvariantCulture,
+                $"<text x=\"{X(count):0.#}\" y=\"{Top + High + 16}\" text-anchor=\"middle\">{count}</text>\n");
         }
 
         return string.Create(
