@@ -75,7 +75,11 @@ internal sealed class AlternatesArguments
         Description = "With --builds: only what the chosen circuit costs; nothing is ranked",
     };
 
-    private readonly Option<string?> _top = new("--top") { Description = "Most replacements of a part (5), or candidates (10)", HelpName = "N" };
+    private readonly Option<string?> _top = new("--top")
+    {
+        Description = "Most replacements of a part (5), or candidates (10)",
+        HelpName = "N",
+    };
 
     private readonly Option<bool> _quiet = new("--no-progress") { Description = "Show no progress" };
 

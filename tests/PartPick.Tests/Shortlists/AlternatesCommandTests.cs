@@ -178,7 +178,9 @@ public sealed class AlternatesCommandTests
     {
         ShortlistBench bench = Small(out _);
         Run run = Run.In(
-            name => name == "LC_ALL" ? locale : null, "", [.. Alternates, "1", "--builds", "50,75", "--chosen-only", "--catalog", bench.Catalog]);
+            name => name == "LC_ALL" ? locale : null,
+            "",
+            [.. Alternates, "1", "--builds", "50,75", "--chosen-only", "--catalog", bench.Catalog]);
 
         Assert.Equal((0, ""), (run.Status, run.Error));
         string[] picture = [.. run.Output.Split('\n').Where(line => line.Length > 9 && line[9] == axis)];
@@ -188,6 +190,21 @@ public sealed class AlternatesCommandTests
         Assert.Matches(@"\n +7 +\d\.\d{4} +\d\.\d{4}  another price: ", run.Output);
         Assert.DoesNotContain("best", run.Output, StringComparison.Ordinal);
         Assert.Equal(locale == "C", picture.All(line => line.All(char.IsAscii)));
+    }
+
+    [Fact]
+    public void The_design_record_draws_the_cost_through_the_cost_of_this_build()
+    {
+        ShortlistBench bench = Small(out decimal cost);
+        string html = bench.Of("shortlist", "export", "logger", "--format", "html").Output;
+
+        Assert.Contains(string.Create(CultureInfo.InvariantCulture, $">100 boards: {cost:0.000}</text>"), html, StringComparison.Ordinal);
+        string points = html.Split("<polyline points=\"")[1].Split('"')[0];
+        double[][] line = [.. points.Split(' ').Select(point => point.Split(',')
+            .Select(number => double.Parse(number, CultureInfo.InvariantCulture)).ToArray())];
+        Assert.Equal((60, 700), (line[0][0], line[^1][0]));
+        Assert.Equal((8, 158), (line.Min(point => point[1]), line.Max(point => point[1])));
+        Assert.Equal(line.Select(point => point[0]).Order(), line.Select(point => point[0]));
     }
 
     [Theory]

@@ -57,8 +57,8 @@ internal static class ShortageOutput
         ];
         TextTable.Write(output, columns, [.. shortage.Candidates.Select(Row)]);
         output.WriteLine();
-        output.WriteLine("Best first, as in a ranking. The figures are changes from the circuit as it stands; change is the largest share that");
-        output.WriteLine("a figure takes, or gives back, of what its limit had left.");
+        output.WriteLine("Best first, as in a ranking. The figures are changes from the circuit as it stands; change is the largest");
+        output.WriteLine("share that a figure takes, or gives back, of what its limit had left.");
         output.WriteLine();
         output.WriteLine(HelpFooter.Cautions);
     }

@@ -44,8 +44,8 @@ internal static class CostSvg
         return string.Create(
             CultureInfo.InvariantCulture,
             $"""
-            <svg class="bars" xmlns="http://www.w3.org/2000/svg" role="img" width="{Width}" height="{Height}" viewBox="0 0 {Width} {Height}">
-            <title>{Html.Encode(title)}</title>
+            <svg class="bars costs" xmlns="http://www.w3.org/2000/svg" role="img" width="{Width}" height="{Height}"
+            viewBox="0 0 {Width} {Height}"><title>{Html.Encode(title)}</title>
             <path d="M{Left},{Top} V{Top + High} H{Left + Wide}" fill="none" stroke="currentColor"/>
             <polyline points="{points.ToString().TrimEnd()}" fill="none" stroke="currentColor" stroke-width="2"/>
             <line x1="{X(builds):0.#}" y1="{Top}" x2="{X(builds):0.#}" y2="{Top + High}" stroke="currentColor" stroke-dasharray="3 3"/>
