@@ -60,6 +60,9 @@ public class QuantitySearchTests
         return result.Candidates.IsEmpty ? null : result.Candidates[0];
     }
 
+    // Resistors of the same values, which are cheaper for some numbers of boards.
+    private static IEnumerable<ResistorPart> Twins(PartsCatalog catalog) => catalog.Resistors.Select(part => part with { Id = part.Id + "-twin" });
+
     // Small worlds in which every part has its own price breaks, and some a small stock, a minimum order or a multiple.
     private static SmallWorld Stepped(int seed)
     {
@@ -67,7 +70,7 @@ public class QuantitySearchTests
         var random = new Random(seed);
         return world with
         {
-            Catalog = new PartsCatalog(world.Catalog.All.Select(part => part with
+            Catalog = new PartsCatalog(world.Catalog.All.Concat(Twins(world.Catalog)).Select(part => part with
             {
                 Stock = random.Next(5) == 0 ? random.Next(20, 200) : 1000,
                 Offer = part.Offer with
