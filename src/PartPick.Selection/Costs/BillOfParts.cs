@@ -38,7 +38,8 @@ public static class BillOfParts
         uses.Add(choice.Amplifier is TransistorPart
             ? new PartUse("Q1", PartRoles.Amplifier, choice.Amplifier, "")
             : new PartUse("U1", PartRoles.Amplifier, choice.Amplifier, choice.Tap > 0 ? Stage(choice.Tap) : ""));
-        uses.Add(new PartUse("Y1", PartRoles.Crystal, choice.Crystal, ValueText.FormatExact(choice.Crystal.FrequencyHz, Dimension.Frequency)));
+        string frequency = ValueText.FormatExact(choice.Crystal.FrequencyHz, Dimension.Frequency);
+        uses.Add(new PartUse("Y1", PartRoles.Crystal, choice.Crystal, frequency));
         return [.. uses];
 
         void Add(ResistorPart? part, string role)

@@ -63,6 +63,7 @@ public sealed record CurrencyRates(string? Currency, ImmutableSortedDictionary<s
         string rows = string.Join("; ", groups.Select(group =>
             $"{group.Key}: {string.Join(", ", group.Take(5).Select(row => row.Row))}{(group.Count() > 5 ? " and others" : "")}"));
         string foreign = groups.Select(group => group.Key).FirstOrDefault(key => key != currency, currency);
-        return Result.Fail<string>("prices", $"are in more than one currency ({rows})", $"one currency, or rates such as --rate {foreign}=0.9");
+        return Result.Fail<string>(
+            "prices", $"are in more than one currency ({rows})", $"one currency, or rates such as --rate {foreign}=0.9");
     }
 }

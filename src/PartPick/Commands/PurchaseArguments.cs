@@ -54,7 +54,8 @@ internal sealed class PurchaseArguments
         {
             Attrition = new AttritionRates((parsed.GetValue(_attrition) ?? []).Aggregate(AttritionRates.Usual.Ratios, WithAttrition)),
             Rates = new CurrencyRates(
-                currency, (parsed.GetValue(_rates) ?? []).Aggregate(CurrencyRates.None.Rates, (rates, text) => WithRate(rates, text, currency))),
+                currency,
+                (parsed.GetValue(_rates) ?? []).Aggregate(CurrencyRates.None.Rates, (rates, text) => WithRate(rates, text, currency))),
             Splits = !parsed.GetValue(_whole),
         };
     }
@@ -93,12 +94,13 @@ internal sealed class PurchaseArguments
 
         if (halves[0] == currency || rates.ContainsKey(halves[0]))
         {
-            throw Wrong(
-                _rates.Name, $"{Problem.Quote(halves[0])} {(halves[0] == currency ? "is the currency of the list" : "is given twice")}", fits);
+            string what = halves[0] == currency ? "is the currency of the list" : "is given twice";
+            throw Wrong(_rates.Name, $"{Problem.Quote(halves[0])} {what}", fits);
         }
 
         return rates.Add(halves[0], rate);
     }
 
-    private static CommandFailure Wrong(string where, string what, string fits) => new(new Problem(where, what, fits), ExitStatus.WrongInput);
+    private static CommandFailure Wrong(string where, string what, string fits) =>
+        new(new Problem(where, what, fits), ExitStatus.WrongInput);
 }

@@ -61,8 +61,9 @@ internal static class ShortlistAddCommand
     private static void Tell(TextWriter error, string list, ShortlistEntry entry, ShortlistSource source)
     {
         CandidateParts choice = source.Choice;
+        string parts = $"{choice.Circuit.Word()}, {choice.Crystal.Id}, {choice.Amplifier.Id}";
         error.WriteLine(FormattableString.Invariant(
-            $"candidate {entry.Number} of {Problem.Quote(list)}: {choice.Circuit.Word()}, {choice.Crystal.Id}, {choice.Amplifier.Id}, {entry.Builds} boards"));
+            $"candidate {entry.Number} of {Problem.Quote(list)}: {parts}, {entry.Builds} boards"));
         foreach (string remark in source.Remarks)
         {
             error.WriteLine(remark);

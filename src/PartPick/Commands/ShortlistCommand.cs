@@ -6,7 +6,8 @@ namespace PartPick.Commands;
 internal static class ShortlistCommand
 {
     /// <summary>Builds the command with all that it can do.</summary>
-    public static Command Build(CommandContext context) => new("shortlist", "Keeps chosen candidates on named lists, and orders their parts.")
+    public static Command Build(CommandContext context) => new(
+        "shortlist", "Keeps chosen candidates on named lists, and orders their parts.")
     {
         ShortlistAddCommand.Build(context),
         ShortlistListCommand.Build(context),

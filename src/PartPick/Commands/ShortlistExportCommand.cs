@@ -61,10 +61,12 @@ internal static class ShortlistExportCommand
         {
             string list = CommandFailure.Unless(ShortlistName.Read(parsed.GetRequiredValue(name)));
             var style = new CsvStyle(
-                Delimiter(parsed.GetValue(delimiter)!, delimiter.Name), DecimalSign(parsed.GetValue(point)!, point.Name), parsed.GetValue(bom));
+                Delimiter(parsed.GetValue(delimiter)!, delimiter.Name),
+                DecimalSign(parsed.GetValue(point)!, point.Name),
+                parsed.GetValue(bom));
             PurchaseOptions options = purchase.Read(parsed);
             string? path = parsed.GetValue(to);
-            ExportForm chosen = ExportForms.Named(parsed.GetValue(form)) ?? (path is null ? null : ExportForms.OfFile(path)) ?? ExportForm.Csv;
+            ExportForm chosen = ExportForms.Named(parsed.GetValue(form)) ?? ExportForms.OfFile(path ?? "") ?? ExportForm.Csv;
             PartsCatalog catalog = context.LoadCatalog(parsed);
             var view = ShortlistView.Of(ShortlistListCommand.Load(context, parsed, list)[0], new ShortlistReviewer(catalog));
             if (Counts.Read(parsed.GetValue(alternates), alternates.Name) is { } most)
@@ -74,7 +76,17 @@ internal static class ShortlistExportCommand
 
             PurchaseList made = CommandFailure.Unless(ShortlistExport.Purchase(view, catalog, options));
             string text = ShortlistExport.Text(view, made, chosen, style, ShortlistAddCommand.Today());
-            Write(context, path, text, style.Mark && chosen == ExportForm.Csv, parsed.GetValue(force), to.Name);
+            bool mark = style.Mark && chosen == ExportForm.Csv;
+            if (path is null)
+            {
+                context.Output.Write((mark ? "\uFEFF" : "") + text);
+            }
+            else if (ShortlistExport.Save(
+                new ExportTarget(path, parsed.GetValue(force), to.Name, context.CatalogPath(parsed)), text, mark) is { } problem)
+            {
+                throw new CommandFailure(problem, ExitStatus.WrongInput);
+            }
+
             Tell(context.Surroundings.Error, view, made, path, chosen);
             return ExitStatus.Done;
         });
@@ -91,18 +103,6 @@ internal static class ShortlistExportCommand
         most,
         new AlternatesOptions { SamePackage = true },
         stop);
-
-    private static void Write(CommandContext context, string? path, string text, bool mark, bool force, string option)
-    {
-        if (path is null)
-        {
-            context.Output.Write((mark ? "\uFEFF" : "") + text);
-        }
-        else if (ShortlistExport.Save(path, text, mark, force, option) is { } problem)
-        {
-            throw new CommandFailure(problem, ExitStatus.WrongInput);
-        }
-    }
 
     // What a buyer or an engineer has to look at is said even where only the file is wanted.
     private static void Tell(TextWriter error, ShortlistView view, PurchaseList list, string? path, ExportForm form)

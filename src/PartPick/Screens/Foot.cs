@@ -28,12 +28,13 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
             { Notice: { } notice } => [new LineBuilder(glyphs).Add(" ").Column(notice, width - 1, Tone.Accent).Build()],
             { ShowsKeys: true } => [Keys((UpDown, "scroll"), ("Esc", "back"))],
             { Shortlists.IsOpen: true } => [Keys(
-                (UpDown, "choose"), (glyphs.Left + " " + glyphs.Right, "lists"), ("x", "write to a file"), ("Del", "take off"), ("Esc", "back"))],
+                (UpDown, "choose"), (glyphs.Left + " " + glyphs.Right, "lists"), ("x", "write to a file"), ("Del", "take off"),
+                ("Esc", "back"))],
             { Place: Place.Sentence, Wanted.Typed: not null } => [Value(("Enter", "keep"), ("Esc", "as it was"))],
             { Place: Place.Sentence } => [Value(("Tab", "next"), ("Esc", model.IsReading ? "circuit" : "list"))],
             { Place: Place.Circuit } => [Keys(
-                (UpDown, "scroll"), (glyphs.Left + " " + glyphs.Right, "other circuits"), ("s", "to a list"), ("Esc", "list"), ("e", "edit"),
-                ("?", "keys"))],
+                (UpDown, "scroll"), (glyphs.Left + " " + glyphs.Right, "other circuits"), ("s", "to a list"), ("Esc", "list"),
+                ("e", "edit"), ("?", "keys"))],
             { List.Chosen: null } => [Keys(("e", "edit the wanted"), ("?", "keys"), ("q", "quit"))],
             _ => [Keys((UpDown, "choose"), ("Enter", "open"), ("s", "to a list"), ("e", "edit the wanted"), ("?", "keys"), ("q", "quit"))],
         };

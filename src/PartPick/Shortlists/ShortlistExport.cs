@@ -50,12 +50,17 @@ internal static class ShortlistExport
         return output.ToString();
     }
 
-    /// <summary>Writes a text to a file, whole or not at all.</summary>
-    /// <param name="path">The path of the file.</param>
+    /// <summary>Writes a text to a file, whole or not at all, and never over the catalogue.</summary>
+    /// <param name="target">The file.</param>
     /// <param name="text">The text.</param>
     /// <param name="mark">Whether it begins with a byte order mark.</param>
-    /// <param name="replace">Whether a file that is there may be replaced.</param>
-    /// <param name="where">The option or field that names the file, for the problem.</param>
-    public static Problem? Save(string path, string text, bool mark, bool replace, string where) =>
-        WholeFile.Write(path, [.. mark ? Encoding.UTF8.Preamble : [], .. new UTF8Encoding(false).GetBytes(text)], replace, where);
+    public static Problem? Save(ExportTarget target, string text, bool mark)
+    {
+        byte[] bytes = [.. mark ? Encoding.UTF8.Preamble : [], .. new UTF8Encoding(false).GetBytes(text)];
+        return IsPath(target.Path) && Path.GetFullPath(target.Path) == Path.GetFullPath(target.Catalog)
+            ? new Problem(target.Where, "is the catalogue itself", "another file")
+            : WholeFile.Write(target.Path, bytes, target.Replaces, target.Where);
+    }
+
+    private static bool IsPath(string path) => !string.IsNullOrWhiteSpace(path) && !path.Contains('\0', StringComparison.Ordinal);
 }

@@ -154,7 +154,7 @@ public sealed class ShortlistExportTests
         Assert.Equal(1.50m, line.GetProperty("saving").GetDecimal());
         Assert.Equal(["A-1", "B-1"], line.GetProperty("orders").EnumerateArray().Select(order => order.GetProperty("part").GetString()));
         Run whole = bench.Of("shortlist", "export", "logger", "--format", "csv", "--no-split");
-        Assert.Contains("the stock of A-1 is 150", whole.Error, StringComparison.Ordinal);
+        Assert.Contains("the stock of A-1 is 150, 206 are to be ordered", whole.Error, StringComparison.Ordinal);
         Assert.Contains("B-1", CsvTexts.ByBoth(whole.Output, ',').Single(row => row.Contains("A-1")));
     }
 
@@ -182,6 +182,7 @@ public sealed class ShortlistExportTests
             (["logger", "--currency", "USD"], "--rate EUR"),
             (["logger", "--currency", " "], "is empty"),
             (["logger", "--to", ""], "is no path"),
+            (["logger", "--to", bench.Catalog, "--force"], "is the catalogue itself"),
         ];
         foreach ((string[] arguments, string says) in cases)
         {

@@ -60,12 +60,15 @@ internal sealed class PurchaseCells(PurchaseList list, char decimalSign = '.')
     /// <summary>Sentences for what a buyer has to look at.</summary>
     public ImmutableArray<string> Notes() =>
     [
-        .. list.Uncovered.Select(line => string.Create(
-            CultureInfo.InvariantCulture,
-            $"Line {line.Number}: the stock of {line.Orders[0].Part.Id} is {line.Orders[0].Part.Stock ?? 0}, {line.Required} are required.")),
-        .. list.Unpriced.Select(line => string.Create(
-            CultureInfo.InvariantCulture, $"Line {line.Number}: {line.Orders[0].Part.Id} has no price and is not in the total.")),
+        .. list.Uncovered.Select(line => $"Line {Figures.Whole(line.Number)}: {Shortage(line, line.Orders[0])}."),
+        .. list.Unpriced.Where(line => !line.IsGone).Select(line =>
+            $"Line {Figures.Whole(line.Number)}: {line.Orders[0].Part.Id} has no price and is not in the total."),
     ];
+
+    private static string Shortage(PurchaseLine line, PurchaseOrder order) =>
+        line.IsGone ? $"{order.Part.Id} is not in the catalogue any more, and not in the total"
+        : order.Part.Excluded ? $"{order.Part.Id} is excluded in the catalogue"
+        : $"the stock of {order.Part.Id} is {Stock(order)}, {Figures.Whole(order.Quantity)} are to be ordered";
 
     private string Number(decimal value, string format) =>
         value.ToString(format, CultureInfo.InvariantCulture).Replace('.', decimalSign);

@@ -30,9 +30,10 @@ internal static class BarsSvg
         return string.Create(
             CultureInfo.InvariantCulture,
             $"""
-            <svg class="bars" xmlns="http://www.w3.org/2000/svg" role="img" width="{Width}" height="{height}" viewBox="0 0 {Width} {height}">
+            <svg class="bars" xmlns="http://www.w3.org/2000/svg" role="img"
+             width="{Width}" height="{height}" viewBox="0 0 {Width} {height}">
             <title>{Html.Encode(title)}</title>
-            {rows}<line x1="{NameWidth + BarWidth}" y1="0" x2="{NameWidth + BarWidth}" y2="{height}" stroke="currentColor" stroke-dasharray="3 3"/>
+            {rows}<path d="M{NameWidth + BarWidth} 0V{height}" stroke="currentColor" stroke-dasharray="3 3"/>
             </svg>
             """);
     }
@@ -45,9 +46,11 @@ internal static class BarsSvg
             // The line at the limit stands free of bars that stay below it; what goes beyond ends soon after it.
             double length = Math.Clamp(share, 0, 1.15) * BarWidth;
             string look = share > 1 ? "fill=\"none\" stroke-width=\"2\"" : "fill=\"currentColor\" fill-opacity=\"0.55\"";
-            rows.Append(CultureInfo.InvariantCulture, $"<rect x=\"{NameWidth}\" y=\"{y}\" width=\"{length:0.#}\" height=\"12\" {look} stroke=\"currentColor\"/>\n");
+            rows.Append(CultureInfo.InvariantCulture, $"<rect x=\"{NameWidth}\" y=\"{y}\" width=\"{length:0.#}\" height=\"12\"")
+                .Append(CultureInfo.InvariantCulture, $" {look} stroke=\"currentColor\"/>\n");
         }
 
-        rows.Append(CultureInfo.InvariantCulture, $"<text x=\"{NameWidth + BarWidth + 46}\" y=\"{y + 11}\">{Html.Encode(bar.Words)}</text>\n");
+        rows.Append(CultureInfo.InvariantCulture, $"<text x=\"{NameWidth + BarWidth + 46}\" y=\"{y + 11}\">")
+            .Append(Html.Encode(bar.Words)).Append("</text>\n");
     }
 }

@@ -55,7 +55,8 @@ internal static class CircuitSection
         page.Element("h3", "Figures of the nominal circuit")
             .Table(
                 [new("figure"), new("value")],
-                CircuitFigures.Of(candidate.Describe(requirement.OutputHz), candidate.Result).Select(figure => new[] { figure.Label, figure.Text }));
+                CircuitFigures.Of(candidate.Describe(requirement.OutputHz), candidate.Result)
+                    .Select(figure => new[] { figure.Label, figure.Text }));
         page.Element("h3", "Assumptions and warnings").List(Assumptions(candidate, requirement));
         page.Element("h3", "Before it is built").List(Cautions.Of(requirement));
     }
@@ -86,11 +87,11 @@ internal static class CircuitSection
 
     private static ImmutableArray<string> Assumptions(Candidate candidate, Requirement requirement)
     {
-        var strays = requirement.Board.Strays;
+        Board board = requirement.Board;
         return
         [
-            $"Strays of the board ({requirement.Board.Name}): {Farads(strays.InputFarads)} at the input, {Farads(strays.OutputFarads)} at the "
-                + $"output, {Farads(strays.AcrossFarads)} across, all within {Figures.Fixed(requirement.Board.UncertaintyRatio, 0.01, 0)} %.",
+            $"Strays of the board ({board.Name}): {Farads(board.Strays.InputFarads)} at the input, {Farads(board.Strays.OutputFarads)} at "
+                + $"the output, {Farads(board.Strays.AcrossFarads)} across, within {Figures.Fixed(board.UncertaintyRatio, 0.01, 0)} %.",
             $"Least start-up margin at {candidate.Margin.Corner}.",
             .. candidate.Drive is { } drive ? [$"Highest drive level at {drive.Corner}."] : Array.Empty<string>(),
             .. candidate.Parts.Select(use => use.Part).DistinctBy(part => part.Id)
@@ -107,7 +108,8 @@ internal static class CircuitSection
             [new("reference"), new("value"), new("role"), new("part"), new("description"), new("supplier"), new("supplier's number")],
             review.Parts.Select(use => new[]
             {
-                use.Designator, use.Value, use.Role, use.Part.Id, BuyerText.Of(use.Part), use.Part.Supplier ?? "", use.Part.SupplierPart ?? "",
+                use.Designator, use.Value, use.Role, use.Part.Id, BuyerText.Of(use.Part), use.Part.Supplier ?? "",
+                use.Part.SupplierPart ?? "",
             }));
 
     private static void WriteCosts(Html page, ShortlistReview review)

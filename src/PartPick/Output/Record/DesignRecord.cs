@@ -14,11 +14,14 @@ internal static class DesignRecord
         body { font: 10.5pt/1.4 sans-serif; color: #111; background: #fff; max-width: 62em; margin: 2em auto; padding: 0 1em; }
         h1 { font-size: 1.6em; margin-bottom: 0; } h2 { font-size: 1.25em; border-bottom: 1px solid #888; margin-top: 2em; }
         h3 { font-size: 1em; margin: 1.2em 0 .3em; }
-        table { border-collapse: collapse; margin: .5em 0; font-size: .85em; } th, td { padding: .15em .5em; text-align: left; vertical-align: top; }
+        table { border-collapse: collapse; margin: .5em 0; font-size: .85em; }
+        th, td { padding: .15em .5em; text-align: left; vertical-align: top; }
         th { border-bottom: 1px solid #888; } td { border-bottom: 1px solid #ddd; } .n { text-align: right; white-space: nowrap; }
-        svg { display: block; margin: .5em 0; max-width: 100%; height: auto; } svg text { font: 13px monospace; fill: currentColor; stroke: none; }
-        .caution { border: 2px solid #111; padding: .2em 1em; margin: 1em 0; } .changed { border-left: 4px solid #111; padding-left: .8em; }
-        section { break-inside: auto; } section.circuit { break-before: page; } h2, h3 { break-after: avoid; } tr, svg { break-inside: avoid; }
+        svg { display: block; margin: .5em 0; max-width: 100%; height: auto; }
+        svg text { font: 13px monospace; fill: currentColor; stroke: none; }
+        .caution { border: 2px solid #111; padding: .2em 1em; margin: 1em 0; }
+        .changed { border-left: 4px solid #111; padding-left: .8em; }
+        section.circuit { break-before: page; } h2, h3 { break-after: avoid; } tr, svg { break-inside: avoid; }
         @media print { body { margin: 0; max-width: none; } }
         @page { margin: 15mm; }
         """;

@@ -47,7 +47,8 @@ internal static class DrawingSvg
         return string.Create(
             CultureInfo.InvariantCulture,
             $"""
-            <svg class="schematic" xmlns="http://www.w3.org/2000/svg" role="img" width="{width}" height="{height}" viewBox="0 0 {width} {height}">
+            <svg class="schematic" xmlns="http://www.w3.org/2000/svg" role="img"
+             width="{width}" height="{height}" viewBox="0 0 {width} {height}">
             <title>{Html.Encode(title)}</title>
             <path d="{path}" fill="none" stroke="currentColor" stroke-width="1.4" stroke-linecap="square"/>
             {texts}</svg>
@@ -84,15 +85,17 @@ internal static class DrawingSvg
                 'R' => Segment(x, y, x + CellWidth / 2.0, y),
                 'U' => Segment(x, y, x, y - CellHeight / 2.0),
                 'D' => Segment(x, y, x, y + CellHeight / 2.0),
-                _ => Segment(x - CellWidth / 2.0, y, x + CellWidth / 2.0, y) + Segment(x - CellWidth / 2.0, y + 3, x + CellWidth / 2.0, y + 3),
+                _ => Across(x, y) + Across(x, y + 3),
             });
         }
     }
 
+    private static string Across(double x, double y) => Segment(x - CellWidth / 2.0, y, x + CellWidth / 2.0, y);
+
     private static string Segment(double x1, double y1, double x2, double y2) =>
         string.Create(CultureInfo.InvariantCulture, $"M{x1:0.#} {y1:0.#}L{x2:0.#} {y2:0.#}");
 
-    private static void Text(StringBuilder texts, string text, int column, int row) => texts.Append(
-        CultureInfo.InvariantCulture,
-        $"<text x=\"{column * CellWidth}\" y=\"{row * CellHeight + 13}\" textLength=\"{text.Length * CellWidth}\">{Html.Encode(text)}</text>\n");
+    private static void Text(StringBuilder texts, string text, int column, int row) => texts
+        .Append(CultureInfo.InvariantCulture, $"<text x=\"{column * CellWidth}\" y=\"{row * CellHeight + 13}\"")
+        .Append(CultureInfo.InvariantCulture, $" textLength=\"{text.Length * CellWidth}\">{Html.Encode(text)}</text>\n");
 }

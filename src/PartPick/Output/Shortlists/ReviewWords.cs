@@ -28,6 +28,15 @@ public static class ReviewWords
         return review is { IsChanged: true, HasGoneParts: false } ? fits + ", changed" : fits;
     }
 
+    /// <summary>How it stands, for a narrow column.</summary>
+    /// <param name="review">The candidate.</param>
+    public static string ShortState(ShortlistReview review)
+    {
+        ArgumentNullException.ThrowIfNull(review);
+        string fits = review.HasGoneParts ? "part gone" : review.IsFit ? "fits" : "unfit";
+        return review is { IsChanged: true, HasGoneParts: false } ? fits + ", changed" : fits;
+    }
+
     /// <summary>What there is to say: limits broken, what changed about the parts, and what became of the figures.</summary>
     /// <param name="review">The candidate.</param>
     public static IEnumerable<string> Lines(ShortlistReview review)
@@ -35,7 +44,7 @@ public static class ReviewWords
         ArgumentNullException.ThrowIfNull(review);
         foreach (Miss miss in review.Misses)
         {
-            yield return $"{(review.Then.IsFit ? "no longer fits" : "does not fit")}: {LimitWords.Words(miss.Limit)}: {miss.Sentence}";
+            yield return $"{(review.Then.IsFit ? "no longer fits" : "does not fit")} ({LimitWords.Words(miss.Limit)}): {miss.Sentence}";
         }
 
         foreach (PartChange change in review.Changes)

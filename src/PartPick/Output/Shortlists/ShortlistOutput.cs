@@ -22,7 +22,7 @@ internal static class ShortlistOutput
                         "number", "added", "builds", "circuit", "crystal", "amplifier", "tap", "errorWorst (ppm)", "startUpMargin",
                         "driveLevel (W)", "startUpTime (s)", "cost", "currency", "state", "changes", "note",
                     ],
-                    list.Candidates.Select(CsvRow));
+                    list.Candidates.Select(each => CsvRow(each).Select(Catalog.SpreadsheetText.Harmless)));
                 break;
             default:
                 WriteTable(output, list);
@@ -92,6 +92,6 @@ internal static class ShortlistOutput
         review.Now.Currency,
         ReviewWords.State(review),
         string.Join(" | ", ReviewWords.Lines(review)),
-        Catalog.SpreadsheetText.Harmless(review.Entry.Note ?? ""),
+        review.Entry.Note ?? "",
     ];
 }

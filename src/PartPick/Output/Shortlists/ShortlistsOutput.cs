@@ -31,7 +31,9 @@ internal static class ShortlistsOutput
                 })]));
                 break;
             case OutputFormat.Csv:
-                CsvOutput.Write(output, ["name", "candidates", "builds", "changed", "unfit", "lastAdded"], rows);
+                CsvOutput.Write(
+                    output, ["name", "candidates", "builds", "changed", "unfit", "lastAdded"],
+                    rows.Select(row => row.Select(Catalog.SpreadsheetText.Harmless)));
                 break;
             case OutputFormat.Table when lists.Length == 0:
                 output.WriteLine("There is no list yet: partpick shortlist add makes one.");

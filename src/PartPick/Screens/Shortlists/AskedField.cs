@@ -1,6 +1,8 @@
 namespace PartPick.Screens;
 
-/// <summary>A field that is asked for in place. The first letter typed into a field that was not touched replaces what stands there.</summary>
+/// <summary>
+/// A field that is asked for in place. The first letter typed into a field that was not touched replaces what stands there.
+/// </summary>
 /// <param name="name">Its name.</param>
 /// <param name="text">What stands there at first.</param>
 /// <param name="longest">The most letters.</param>

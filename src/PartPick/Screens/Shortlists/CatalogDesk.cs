@@ -42,9 +42,10 @@ public sealed class CatalogDesk(string catalogPath) : IShortlistDesk
             {
                 ExportForm form = ExportForms.OfFile(path) ?? ExportForm.Csv;
                 string text = ShortlistExport.Text(view, purchase, form, new CsvStyle(), Today);
-                return ShortlistExport.Save(path, text, false, replace, "file") is { } problem
+                string total = $"{new PurchaseCells(purchase).Amount(purchase.Total)} {purchase.Currency}";
+                return ShortlistExport.Save(new ExportTarget(path, replace, "file", catalogPath), text, mark: false) is { } problem
                     ? Result.Fail<string>(problem)
-                    : Result.Ok($"{purchase.Lines.Length} lines, {new PurchaseCells(purchase).Amount(purchase.Total)} {purchase.Currency}, written to {path}");
+                    : Result.Ok($"{purchase.Lines.Length} lines, {total}, written to {path}");
             });
         }));
 

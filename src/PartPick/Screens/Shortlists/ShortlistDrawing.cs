@@ -1,4 +1,6 @@
 using System.Collections.Immutable;
+using System.Globalization;
+using PartPick.Catalog;
 using PartPick.Output;
 using PartPick.Selection;
 
@@ -17,13 +19,13 @@ internal static class ShortlistDrawing
     public static ImmutableArray<Line> Draw(ShortlistPage page, int width, int height, Glyphs glyphs)
     {
         int changed = page.Candidates.Count(each => each.IsChanged), unfit = page.Candidates.Count(each => !each.IsFit);
-        string title = FormattableString.Invariant($"List {page.Name}: {page.Candidates.Length} candidates, {changed} changed, {unfit} unfit");
+        string counts = FormattableString.Invariant($"{page.Candidates.Length} candidates, {changed} changed, {unfit} unfit");
         ImmutableArray<Line> words = Words(page.Chosen, width, glyphs);
         int rows = Math.Clamp(page.Candidates.Length, 1, Math.Max(LeastRows, height - 4 - words.Length));
         int first = Math.Clamp(page.At - rows + 1, 0, Math.Max(0, page.Candidates.Length - rows));
         return
         [
-            Rules.Draw(title, page.Position, width, glyphs, Tone.Strong),
+            Rules.Draw($"List {page.Name}: {counts}", page.Position, width, glyphs, Tone.Strong),
             Heading(page, width, glyphs),
             .. page.Candidates.Skip(first).Take(rows).Select((each, i) => Row(each, first + i == page.At, width, glyphs)),
             Rules.Draw(page.Chosen is { } chosen ? ReviewWords.Name(chosen) : "", "", width, glyphs),
@@ -39,13 +41,14 @@ internal static class ShortlistDrawing
 
     private static Line Row(ShortlistReview review, bool here, int width, Glyphs glyphs)
     {
-        PartUse? crystal = review.Parts.FirstOrDefault(use => use.Part is Catalog.CrystalPart);
-        string megahertz = crystal?.Part is Catalog.CrystalPart part ? (part.FrequencyHz / 1e6).ToString("0.######", System.Globalization.CultureInfo.InvariantCulture) : "";
+        CrystalPart? crystal = review.Parts.Select(use => use.Part).OfType<CrystalPart>().FirstOrDefault();
+        string megahertz = (crystal?.FrequencyHz / 1e6)?.ToString("0.######", CultureInfo.InvariantCulture) ?? "";
         Line line = Cells(
             here ? glyphs.Chosen + " " : "  ", FormattableString.Invariant($"{review.Entry.Number}"),
-            $"{review.Chosen.Circuit.Word()} {review.Chosen.Ids["amplifier"]}", megahertz, FormattableString.Invariant($"{review.Entry.Builds}"),
+            $"{review.Chosen.Circuit.Word()} {review.Chosen.Ids["amplifier"]}", megahertz,
+            FormattableString.Invariant($"{review.Entry.Builds}"),
             review.Now.ErrorWorst is { } error ? Figures.Three(error) : "-", review.Now.Margin is { } margin ? Figures.Three(margin) : "-",
-            review.Now.Cost is { } cost ? Figures.Money(cost) : "-", ReviewWords.State(review), width, glyphs,
+            review.Now.Cost is { } cost ? Figures.Money(cost) : "-", ReviewWords.ShortState(review), width, glyphs,
             review.IsFit ? review.IsChanged ? Tone.Accent : Tone.Normal : Tone.Warning);
         return here ? line.Chosen() : line;
     }
@@ -81,13 +84,14 @@ internal static class ShortlistDrawing
         [
             .. Paragraph.Of("Wanted: " + RequirementSentence.Of(review.Requirement), width - 1, glyphs, " ", 1),
             .. Paragraph.Of(
-                $"Put here on {review.Entry.Added}" + (review.Entry.Note is { } note ? $": {note}" : "."), width - 1, glyphs, " ", 1, Tone.Quiet),
-            .. Paragraph.Of(
-                string.Join("  ", review.Parts.Select(use => use.Value.Length == 0 ? $"{use.Designator} {use.Part.Id}" : $"{use.Designator} {use.Value}")),
-                width - 1, glyphs, " ", 1),
+                $"Put here on {review.Entry.Added}" + (review.Entry.Note is { } note ? $": {note}" : "."), width - 1, glyphs, " ", 1,
+                Tone.Quiet),
+            .. Paragraph.Of(string.Join(", ", review.Parts.Select(Label)), width - 1, glyphs, " ", 1),
             .. lines.Length == 0
                 ? Paragraph.Of("Nothing about its parts changed since.", width - 1, glyphs, " ", 1)
                 : lines.SelectMany(line => Paragraph.Of(line, width - 1, glyphs, " - ", 3, Tone.Accent)),
         ];
     }
+
+    private static string Label(PartUse use) => $"{use.Designator} {(use.Role == PartRoles.Amplifier ? use.Part.Id : use.Value)}";
 }
