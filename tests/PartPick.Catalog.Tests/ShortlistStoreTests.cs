@@ -10,7 +10,8 @@ public sealed class ShortlistStoreTests : IDisposable
 
     private static ShortlistEntry Entry => new()
     {
-        Added = "2026-03-01", Builds = 200, Note = "a note", Choice = "{}", Circuit = "{\"c\": 1}", Requirement = "{\"r\": 2}", Figures = "{}",
+        Added = "2026-03-01", Builds = 200, Note = "a note", Choice = "{}", Circuit = "{\"c\": 1}",
+        Requirement = "{\"r\": 2}", Figures = "{}",
         Parts = [.. PartKinds.All.Select(kind => PartsCatalog.BuiltIn().OfKind(kind).First())],
     };
 
@@ -22,7 +23,8 @@ public sealed class ShortlistStoreTests : IDisposable
         Assert.Equal(1, kept.Number);
         Assert.Equal(Entry with { Number = 1, Parts = default }, found with { Parts = default });
         Assert.Equal(
-            Entry.Parts.Select(part => string.Join('|', PartFigures.Of(part))), found.Parts.Select(part => string.Join('|', PartFigures.Of(part))));
+            Entry.Parts.Select(part => string.Join('|', PartFigures.Of(part))),
+            found.Parts.Select(part => string.Join('|', PartFigures.Of(part))));
     }
 
     [Fact]
@@ -50,7 +52,9 @@ public sealed class ShortlistStoreTests : IDisposable
         ShortlistEntry[] kept = [.. ShortlistStore.Read(Db, "a").Value.Entries];
         Assert.Equal(kept.Length, kept.Select(entry => entry.Number).Distinct().Count());
         Assert.Equal(1 + added.Count(each => each.IsOk), kept.Length);
-        Assert.All(added, each => Assert.True(each.IsOk || each.Problem.What.Contains("in use", StringComparison.Ordinal), each.ToString()));
+        Assert.All(
+            added,
+            each => Assert.True(each.IsOk || each.Problem.What.Contains("in use", StringComparison.Ordinal), each.ToString()));
     }
 
     [Fact]

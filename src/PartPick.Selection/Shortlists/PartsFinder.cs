@@ -131,7 +131,8 @@ internal sealed class PartsFinder
         if (parts.Length == 0)
         {
             string figures = typeof(T) == typeof(CapacitorPart) || typeof(T) == typeof(ResistorPart) ? "" : " with these figures";
-            Fail(place, $"the catalogue holds no {what}{figures}", "values of a part, or { \"part\": \"ID\" } for crystal and amplifier");
+            string fits = typeof(T) == typeof(ResistorPart) ? "a value that it holds" : "the figures of a part, or { \"part\": \"ID\" }";
+            Fail(place, $"the catalogue holds no {what}{figures}", fits);
             return null;
         }
 

@@ -23,6 +23,12 @@ internal static class WholeFile
             return new Problem(where, $"{Problem.Quote(path)} is a directory", "the path of a file");
         }
 
+        // A rename would put a file in the place of the device.
+        if (!OperatingSystem.IsWindows() && Path.GetFullPath(path).StartsWith("/dev/", StringComparison.Ordinal))
+        {
+            return new Problem(where, $"{Problem.Quote(path)} is a device", "the path of a file");
+        }
+
         if (!replace && File.Exists(path))
         {
             return Taken(path, where);

@@ -119,7 +119,8 @@ public sealed class PurchaseListTests
 
     [Fact]
     public void More_than_can_be_counted_is_a_problem() => Assert.False(Try(
-        PurchaseOptionsOf(AttritionRates.Usual), [Sample.Crystal], new PurchaseCircuit("1", "", int.MaxValue, [Use("Y1", Sample.Crystal)])).IsOk);
+        PurchaseOptionsOf(AttritionRates.Usual), [Sample.Crystal],
+        new PurchaseCircuit("1", "", int.MaxValue, [Use("Y1", Sample.Crystal)])).IsOk);
 
     [Fact]
     public void A_description_says_what_a_buyer_needs()

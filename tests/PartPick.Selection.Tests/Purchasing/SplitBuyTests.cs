@@ -10,7 +10,8 @@ public sealed class SplitBuyTests
         from prices in Gen.Int[1, 60].Array[3]
         from minimum in Gen.Int[1, 12]
         from multiple in Gen.OneOf(Gen.Const(1), Gen.Int[1, 10])
-        select new Offer("EUR", [.. breaks.Distinct().Order().Select((quantity, i) => new PriceBreak(quantity, prices[i] / 100m))], minimum, multiple);
+        let each = breaks.Distinct().Order().Select((quantity, i) => new PriceBreak(quantity, prices[i] / 100m))
+        select new Offer("EUR", [.. each], minimum, multiple);
 
     private static readonly Gen<SplitOffer> AnySplit =
         from offer in AnyOffer

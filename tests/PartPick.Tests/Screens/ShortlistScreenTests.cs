@@ -121,6 +121,22 @@ public sealed class ShortlistScreenTests
     }
 
     [Fact]
+    public void A_file_that_cannot_be_is_said_and_asked_again()
+    {
+        using Bench bench = Open();
+        bench.Press(new Key('s'), Key.Enter, new Key('l'), new Key('x'));
+        bench.Type(" ");
+        bench.Press(Key.Enter);
+        Assert.Contains("! file: '' is no path", bench.Rows[^1], StringComparison.Ordinal);
+        bench.Type(_db);
+        bench.Press(Key.Enter, Key.Enter);
+        Assert.Contains("! file: is the catalogue itself", bench.Rows[^1], StringComparison.Ordinal);
+        bench.Press(Key.Esc);
+        Assert.Contains("List default", bench.Text, StringComparison.Ordinal);
+        Assert.Single(Entries("default"));
+    }
+
+    [Fact]
     public void Del_twice_takes_a_candidate_off_and_another_key_between_keeps_it()
     {
         using Bench bench = Open();

@@ -41,7 +41,8 @@ public sealed class ChangedMarketTests
             CultureInfo.InvariantCulture);
         JsonElement candidate = after.GetProperty("candidates")[0];
         Assert.Equal(
-            candidate.GetProperty("then").GetProperty("cost").GetDecimal() + 0.75m - old, candidate.GetProperty("now").GetProperty("cost").GetDecimal());
+            candidate.GetProperty("then").GetProperty("cost").GetDecimal() + 0.75m - old,
+            candidate.GetProperty("now").GetProperty("cost").GetDecimal());
         Assert.Contains("changed", bench.Of("shortlist", "list", "logger").Output, StringComparison.Ordinal);
     }
 
@@ -65,7 +66,9 @@ public sealed class ChangedMarketTests
         Assert.Equal("no longer fits, changed", candidate.GetProperty("state").GetString());
         Assert.Equal("error", Text(Assert.Single(candidate.GetProperty("misses").EnumerateArray()), "limit"));
         JsonElement change = Assert.Single(candidate.GetProperty("changes").EnumerateArray());
-        Assert.Equal(("data", "tolerance", "10 ppm", "60 ppm"), (Text(change, "kind"), Text(change, "key"), Text(change, "old"), Text(change, "new")));
+        Assert.Equal(
+            ("data", "tolerance", "10 ppm", "60 ppm"),
+            (Text(change, "kind"), Text(change, "key"), Text(change, "old"), Text(change, "new")));
         double then = candidate.GetProperty("then").GetProperty("errorWorst").GetDouble();
         Assert.Equal(then + 50, candidate.GetProperty("now").GetProperty("errorWorst").GetDouble(), 1e-6);
     }

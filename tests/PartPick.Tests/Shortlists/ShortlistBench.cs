@@ -39,7 +39,7 @@ internal sealed class ShortlistBench
     {
         for (int i = 1; i <= count; i++)
         {
-            Run run = WithInput(Ranking, "shortlist", "add", list, "-", "--candidate", i.ToString(System.Globalization.CultureInfo.InvariantCulture));
+            Run run = WithInput(Ranking, "shortlist", "add", list, "-", "--candidate", FormattableString.Invariant($"{i}"));
             Assert.True(run.Status == 0, run.Error);
         }
 

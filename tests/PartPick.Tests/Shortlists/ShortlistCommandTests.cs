@@ -59,7 +59,8 @@ public sealed class ShortlistCommandTests
         var bench = new ShortlistBench();
         foreach ((string output, string circuit) in new[] { ("4 MHz", "follower"), ("32.768 kHz", "port") })
         {
-            Run ranked = bench.Of("rank", "--output", output, "--circuits", circuit, "--budget", "200 ppm", "--format", "json", "--top", "1");
+            Run ranked = bench.Of("rank", "--output", output, "--circuits", circuit, "--budget", "200 ppm",
+                "--format", "json", "--top", "1");
             Assert.Equal(0, ranked.Status);
             JsonObject candidate = JsonNode.Parse(ranked.Output)!["candidates"]![0]!.AsObject();
             Run added = bench.WithInput(candidate["circuitFile"]!.ToJsonString(), "shortlist", "add", circuit, "-");

@@ -27,12 +27,12 @@ public sealed class ShortlistExportTests
 
         string[][] rows = CsvTexts.ByBoth(text, delimiter switch { "tab" => '\t', "bar" => '|', _ => delimiter[0] });
         Assert.All(rows, row => Assert.Equal(rows[0].Length, row.Length));
-        int total = Array.IndexOf(rows[0], "lineTotal"), order = Array.IndexOf(rows[0], "order"), price = Array.IndexOf(rows[0], "unitPrice");
+        int[] at = [.. new[] { "lineTotal", "order", "unitPrice" }.Select(name => Array.IndexOf(rows[0], name))];
         decimal sum = 0;
         foreach (string[] row in rows.Skip(1))
         {
-            decimal line = Number(row[total]);
-            Assert.Equal(decimal.Round(Number(row[order]) * Number(row[price]), 2, MidpointRounding.AwayFromZero), line);
+            decimal line = Number(row[at[0]]);
+            Assert.Equal(decimal.Round(Number(row[at[1]]) * Number(row[at[2]]), 2, MidpointRounding.AwayFromZero), line);
             sum += line;
         }
 
@@ -54,7 +54,9 @@ public sealed class ShortlistExportTests
 
         string csv = bench.Of("shortlist", "export", "=1+1|<b>", "--format", "csv").Output;
         string[][] rows = CsvTexts.ByBoth(csv, ',');
-        Assert.All(rows.SelectMany(row => row), cell => Assert.False(cell.Length > 0 && "=@+-".Contains(cell[0], StringComparison.Ordinal), cell));
+        Assert.All(
+            rows.SelectMany(row => row),
+            cell => Assert.False(cell.Length > 0 && "=@+-".Contains(cell[0], StringComparison.Ordinal), cell));
         string[] row = rows.Single(each => each.Contains(crystal));
         Assert.Contains("'=2+3", row);
         Assert.Contains("'@SUM(1;2), \"Ltd\"", row);
@@ -67,7 +69,8 @@ public sealed class ShortlistExportTests
         string markdown = bench.Of("shortlist", "export", "=1+1|<b>", "--format", "markdown").Output;
         Assert.DoesNotContain("<script", markdown.Replace("\\<", "", StringComparison.Ordinal), StringComparison.Ordinal);
         string[] table = [.. markdown.Split('\n').Where(line => line.StartsWith('|'))];
-        Assert.Equal(2, table.Select(line => line.Replace("\\|", "", StringComparison.Ordinal).Count(sign => sign == '|')).Distinct().Count());
+        int[] bars = [.. table.Select(line => line.Replace("\\|", "", StringComparison.Ordinal).Count(sign => sign == '|')).Distinct()];
+        Assert.Equal(2, bars.Length);
     }
 
     [Fact]
@@ -81,17 +84,25 @@ public sealed class ShortlistExportTests
         XNamespace svg = "http://www.w3.org/2000/svg";
         Assert.Equal(2, page.Descendants(svg + "svg").Count(each => (string?)each.Attribute("class") == "schematic"));
         Assert.Equal(4, page.Descendants(svg + "svg").Count(each => (string?)each.Attribute("class") == "bars"));
+        foreach (XElement picture in page.Descendants(svg + "svg"))
+        {
+            // A letter of 13 px monospace is at most 8 px wide.
+            Assert.All(picture.Descendants(svg + "text"), text => Assert.True(
+                (int)text.Attribute("x")! + 8 * text.Value.Length <= (int)picture.Attribute("width")! + 8, text.Value));
+        }
+
         JsonElement candidate = bench.List().GetProperty("candidates")[0];
         string drawing = string.Join(' ', page.Descendants(svg + "svg").First().Descendants(svg + "text").Select(text => text.Value));
-        foreach (JsonElement use in candidate.GetProperty("parts").EnumerateArray().Where(use => use.GetProperty("role").GetString() != "decoupling"))
+        foreach (JsonElement use in candidate.GetProperty("parts").EnumerateArray()
+            .Where(use => use.GetProperty("role").GetString() != "decoupling"))
         {
             Assert.Contains(use.GetProperty("designator").GetString()!, drawing, StringComparison.Ordinal);
         }
 
         foreach (string words in new[]
         {
-            "needs a licence where the law says so", "review by a qualified person", "Local codes", "Strays of the board", "crystal over temperature",
-            "What to order", "worst case, all together", "Wanted: river: square wave 1 kHz",
+            "needs a licence where the law says so", "review by a qualified person", "Local codes", "Strays of the board",
+            "crystal over temperature", "What to order", "worst case, all together", "Wanted: river: square wave 1 kHz",
         })
         {
             Assert.Contains(words, page.Value, StringComparison.Ordinal);
@@ -110,9 +121,11 @@ public sealed class ShortlistExportTests
         Assert.Equal("mine", File.ReadAllText(path));
         Assert.Equal(0, bench.Of("shortlist", "export", "logger", "--to", path, "--force").Status);
         Assert.StartsWith("# logger", File.ReadAllText(path), StringComparison.Ordinal);
-        Assert.Contains("directory", bench.Of("shortlist", "export", "logger", "--to", Path.GetDirectoryName(path)!).WrongLine(), StringComparison.Ordinal);
-        Assert.Contains("its directory is not there", bench.Of("shortlist", "export", "logger", "--to", bench.NewFile("no/such.csv")).WrongLine(), StringComparison.Ordinal);
+        Assert.Contains("is a directory", To(Path.GetDirectoryName(path)!), StringComparison.Ordinal);
+        Assert.Contains("its directory is not there", To(bench.NewFile("no/such.csv")), StringComparison.Ordinal);
         Assert.DoesNotContain(Directory.GetFiles(Path.GetDirectoryName(path)!), file => file.EndsWith(".new", StringComparison.Ordinal));
+
+        string To(string target) => bench.Of("shortlist", "export", "logger", "--to", target).WrongLine();
     }
 
     [Fact]
@@ -128,8 +141,9 @@ public sealed class ShortlistExportTests
         Assert.Contains("--rate", line, StringComparison.Ordinal);
         JsonElement rated = bench.Of("shortlist", "export", "logger", "--format", "json", "--rate", "USD=1").Json;
         Assert.Equal(("EUR", before), (rated.GetProperty("currency").GetString(), rated.GetProperty("total").GetDecimal()));
-        Assert.Equal("USD", bench.Of(
-            "shortlist", "export", "logger", "--format", "json", "--rate", "EUR=2", "--currency", "USD").Json.GetProperty("currency").GetString());
+        JsonElement dollars = bench.Of(
+            "shortlist", "export", "logger", "--format", "json", "--rate", "EUR=2", "--currency", "USD").Json;
+        Assert.Equal("USD", dollars.GetProperty("currency").GetString());
 
         // The list says that its cost cannot be had, not a sum of two currencies.
         Assert.Equal(JsonValueKind.Null, bench.List().GetProperty("candidates")[0].GetProperty("now").GetProperty("cost").ValueKind);
@@ -182,6 +196,7 @@ public sealed class ShortlistExportTests
             (["logger", "--currency", "USD"], "--rate EUR"),
             (["logger", "--currency", " "], "is empty"),
             (["logger", "--to", ""], "is no path"),
+            (["logger", "--to", "/dev/null", "--force"], "is a device"),
             (["logger", "--to", bench.Catalog, "--force"], "is the catalogue itself"),
         ];
         foreach ((string[] arguments, string says) in cases)

@@ -45,12 +45,12 @@ internal static class CircuitSection
     {
         page.Element("h3", "Schematic").Raw(DrawingSvg.Of(Schematic.Draw(candidate, Glyphs.Drawn), "Schematic of the circuit"));
         page.Element("h3", "Limits: the line is the limit")
-            .Raw(BarsSvg.Of(
+            .Raw(new BarsSvg(
                 [
                     .. LimitUses.Of(candidate, requirement).Select(use => new PictureBar(
                         use.Word, use.Used, $"{use.Figure} {use.Against} {use.Unlimited} ({use.Because})")),
                 ],
-                "Share of each limit that is used"));
+                "Share of each limit that is used").ToString());
         WriteBudget(page, candidate, requirement);
         page.Element("h3", "Figures of the nominal circuit")
             .Table(
@@ -76,13 +76,13 @@ internal static class CircuitSection
             ("worst case, all together", budget.WorstRatio, ""), ("root of the sum of squares", budget.RssRatio, ""),
         ];
         page.Element("h3", $"Frequency error; the line is the budget of {ValueText.Format(requirement.BudgetRatio, Dimension.Relative)}")
-            .Raw(BarsSvg.Of(
+            .Raw(new BarsSvg(
                 [
                     .. rows.Select(row => new PictureBar(
                         row.Name, Math.Abs(row.Ratio) / requirement.BudgetRatio,
                         $"{Figures.Fixed(row.Ratio, 1e-6, 2)} ppm{(row.Basis.Length > 0 ? ", " + row.Basis : "")}")),
                 ],
-                "Terms of the frequency error"));
+                "Terms of the frequency error").ToString());
     }
 
     private static ImmutableArray<string> Assumptions(Candidate candidate, Requirement requirement)
