@@ -42,6 +42,7 @@ internal static class AlternatesBench
 
     private static CapacitorPart Load(string id, string prices) => Sample.Capacitor(22e-12, id, prices) with
     {
-        TemperatureCoefficientPerKelvin = 30e-6, Package = "SMD 0603",
+        TemperatureCoefficientPerKelvin = 30e-6,
+        Package = "SMD 0603",
     };
 }

@@ -6,7 +6,10 @@ public class CandidateChangeTests
     // 100 ppm allowed, 60 used; a margin of 10 where 5 is wanted; 400 of 500 µW; 20 of 50 ms; 0.50 of 1.00 each.
     private static readonly Requirement Wanted = Sample.Requirement with
     {
-        BudgetRatio = 100e-6, Margin = 5, StartUpTimeSeconds = 50e-3, CostLimit = 1,
+        BudgetRatio = 100e-6,
+        Margin = 5,
+        StartUpTimeSeconds = 50e-3,
+        CostLimit = 1,
     };
 
     private static Candidate Before { get; } = AlternatesBench.Chosen().Candidate with
