@@ -38,7 +38,7 @@ internal static class CostSvg
         {
             marks.Append(
                 CultureInfo.InvariantCulture,
-                $"<text x=\"{X(count):0.#}\" y=\"{Top + High + 16}\" text-anchor=\"middle\">{count}</text>\n");
+                $"<text x=\"{X(count):0}\" y=\"{Top + High + 16}\" text-anchor=\"middle\">{count}</text>\n");
         }
 
         return string.Create(
@@ -51,7 +51,7 @@ internal static class CostSvg
             <line x1="{X(builds):0.#}" y1="{Top}" x2="{X(builds):0.#}" y2="{Top + High}" stroke="currentColor" stroke-dasharray="3 3"/>
             <text x="{Left - 6}" y="{Top + 10}" text-anchor="end">{costs.Max():0.000}</text>
             <text x="{Left - 6}" y="{Top + High}" text-anchor="end">{costs.Min():0.000}</text>
-            <text x="{X(builds):0.#}" y="{Top + High + 30}" text-anchor="middle">{builds} boards: {costs[builds - 1]:0.000}</text>
+            <text x="{X(builds):0}" y="{Top + High + 30}" text-anchor="middle">{builds} boards: {costs[builds - 1]:0.000}</text>
             {marks}</svg>
             """);
 
