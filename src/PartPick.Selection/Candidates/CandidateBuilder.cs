@@ -14,22 +14,22 @@ public sealed class CandidateBuilder(Requirement requirement, Market market)
         return Build(choice, SupportParts.For(choice.Circuit, choice.Crystal.FrequencyHz, market));
     }
 
-    /// <summary>The candidate with support parts that are already chosen; null as above.</summary>
+    /// <summary>The candidate with support parts that are given; null where its amplifier is not specified over the supply range.</summary>
+    /// <param name="choice">The parts that a ranking varies.</param>
+    /// <param name="support">The parts that the circuit needs besides.</param>
     public Candidate? Build(CandidateParts choice, SupportParts support)
     {
         ArgumentNullException.ThrowIfNull(choice);
         ArgumentNullException.ThrowIfNull(support);
         CrystalModel model = CrystalModel.From(choice.Crystal);
-        double feedback = support.Feedback?.ValueOhms ?? double.PositiveInfinity;
-        if (CircuitTemplate.Create(requirement, choice.Circuit, model, choice.Amplifier, feedback) is not { } template)
+        if (TemplateOf(choice, support, model) is not { } template)
         {
             return null;
         }
 
         CircuitValues values = CircuitValues.Of(choice);
         var analysis = new ValueAnalysis(template, requirement, values);
-        var corners = new CornerAnalysis(
-            template, requirement, values, BudgetBuilder.Tolerance(choice.C1), BudgetBuilder.Tolerance(choice.C2));
+        CornerAnalysis corners = CornersOf(choice, template, values);
         ErrorBudget? budget = BudgetBuilder.Build(choice, requirement, model, CrystalSpread.Of(choice.Crystal, requirement), analysis);
         AtCorner? drive = budget is null ? null : corners.Drive(analysis);
         AtCorner? time = budget is null ? null : corners.StartUpTime(analysis);
@@ -64,4 +64,27 @@ public sealed class CandidateBuilder(Requirement requirement, Market market)
         };
         return candidate with { Warnings = CircuitWarnings.Of(candidate.Describe(requirement.OutputHz), candidate.Result) };
     }
+
+    /// <summary>
+    /// Whether a choice builds up at every corner with the required margin: the figures of the whole candidate without its steady
+    /// state. Null where its amplifier is not specified over the supply range.
+    /// </summary>
+    /// <param name="choice">The parts that a ranking varies.</param>
+    /// <param name="support">The parts that the circuit needs besides.</param>
+    internal bool? StartsWithMargin(CandidateParts choice, SupportParts support)
+    {
+        if (TemplateOf(choice, support, CrystalModel.From(choice.Crystal)) is not { } template)
+        {
+            return null;
+        }
+
+        CornerAnalysis corners = CornersOf(choice, template, CircuitValues.Of(choice));
+        return corners.Margin.Value >= requirement.Margin && corners.Starts;
+    }
+
+    private CircuitTemplate? TemplateOf(CandidateParts choice, SupportParts support, CrystalModel model) => CircuitTemplate.Create(
+        requirement, choice.Circuit, model, choice.Amplifier, support.Feedback?.ValueOhms ?? double.PositiveInfinity);
+
+    private CornerAnalysis CornersOf(CandidateParts choice, CircuitTemplate template, CircuitValues values) => new(
+        template, requirement, values, BudgetBuilder.Tolerance(choice.C1), BudgetBuilder.Tolerance(choice.C2));
 }

@@ -80,7 +80,8 @@ public static class BillOfParts
         return null;
     }
 
-    private static List<(Part Part, int Count)> Counts(CandidateParts choice, SupportParts support)
+    /// <summary>Every part that is bought, with the number on one board.</summary>
+    internal static List<(Part Part, int Count)> Counts(CandidateParts choice, SupportParts support)
     {
         var counts = new List<(Part Part, int Count)>(10);
         Count(choice.Crystal);

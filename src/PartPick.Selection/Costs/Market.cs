@@ -68,11 +68,19 @@ public sealed class Market
                 return known;
             }
 
-            long needed = Math.Min((long)count * _builds, int.MaxValue);
-            decimal cost = part.Offer.CheapestPurchase((int)needed) is { } purchase ? purchase.Total / _builds : decimal.MaxValue / 1000;
+            decimal cost = UnitCost(part, count, _builds);
             _costs.Add((part.Id, count), cost);
             return cost;
         }
+    }
+
+    /// <summary>
+    /// Cost per unit of a number of a part on every board, for any number of boards; beyond all cost where it has no price.
+    /// </summary>
+    internal static decimal UnitCost(Part part, int count, int builds)
+    {
+        long needed = Math.Min((long)count * builds, int.MaxValue);
+        return part.Offer.CheapestPurchase((int)needed) is { } purchase ? purchase.Total / builds : decimal.MaxValue / 1000;
     }
 
     private bool IsOffered(Part part) => IsListed(part) && Covers(part, 1);

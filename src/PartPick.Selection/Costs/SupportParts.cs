@@ -20,9 +20,9 @@ public sealed record SupportParts(ResistorPart? Feedback, CapacitorPart? Decoupl
     public static SupportParts For(CircuitKind kind, double crystalHz, Market market)
     {
         ArgumentNullException.ThrowIfNull(market);
-        CapacitorPart? decoupling = kind == CircuitKind.Port ? null : Cheapest(market, 100e-9, 1e-6);
+        CapacitorPart? decoupling = kind == CircuitKind.Port ? null : Cheapest(market, IsDecoupling);
         return kind == CircuitKind.Follower
-            ? new SupportParts(null, decoupling, Cheapest(market, 10e-9, 100e-9))
+            ? new SupportParts(null, decoupling, Cheapest(market, IsCoupling))
             : new SupportParts(Nearest(market, UsualFeedbackOhms(crystalHz)), decoupling, null);
     }
 
@@ -37,6 +37,29 @@ public sealed record SupportParts(ResistorPart? Feedback, CapacitorPart? Decoupl
         _ => 1e6,
     };
 
+    /// <summary>Whether a resistor can be the feedback resistor: within a factor of five of the usual one.</summary>
+    /// <param name="part">The resistor.</param>
+    /// <param name="crystalHz">Crystal frequency in hertz.</param>
+    public static bool IsFeedback(ResistorPart part, double crystalHz)
+    {
+        ArgumentNullException.ThrowIfNull(part);
+        return IsNear(part, UsualFeedbackOhms(crystalHz));
+    }
+
+    /// <summary>Whether a capacitor can decouple the supply: 100 nF to 1 µF, of a dielectric that keeps its value.</summary>
+    public static bool IsDecoupling(CapacitorPart part)
+    {
+        ArgumentNullException.ThrowIfNull(part);
+        return IsBetween(part, 100e-9, 1e-6);
+    }
+
+    /// <summary>Whether a capacitor can couple a follower's output: 10 to 100 nF, of a dielectric that keeps its value.</summary>
+    public static bool IsCoupling(CapacitorPart part)
+    {
+        ArgumentNullException.ThrowIfNull(part);
+        return IsBetween(part, 10e-9, 100e-9);
+    }
+
     private static ResistorPart? Nearest(Market market, double ohms)
     {
         ResistorPart? best = market.Resistors
@@ -44,15 +67,19 @@ public sealed record SupportParts(ResistorPart? Feedback, CapacitorPart? Decoupl
             .ThenBy(part => market.UnitCost(part, 1))
             .ThenBy(part => part.Id, StringComparer.Ordinal)
             .FirstOrDefault();
-        return best is not null && Math.Abs(Math.Log(best.ValueOhms / ohms)) <= Math.Log(FeedbackReach) ? best : null;
+        return best is not null && IsNear(best, ohms) ? best : null;
     }
+
+    private static bool IsNear(ResistorPart part, double ohms) => Math.Abs(Math.Log(part.ValueOhms / ohms)) <= Math.Log(FeedbackReach);
+
+    private static bool IsBetween(CapacitorPart part, double leastFarads, double mostFarads) =>
+        part.ValueFarads >= leastFarads * 0.999 && part.ValueFarads <= mostFarads * 1.001 && HoldsItsValue(part);
 
     // EIA-198: the third letters T, U and V stand for a loss of a third to four fifths over temperature.
     private static bool HoldsItsValue(CapacitorPart part) => part.Dielectric is not [.., 'T' or 'U' or 'V'];
 
-    private static CapacitorPart? Cheapest(Market market, double leastFarads, double mostFarads) => market.Capacitors
-        .Where(part => part.ValueFarads >= leastFarads * 0.999 && part.ValueFarads <= mostFarads * 1.001)
-        .Where(HoldsItsValue)
+    private static CapacitorPart? Cheapest(Market market, Func<CapacitorPart, bool> serves) => market.Capacitors
+        .Where(serves)
         .OrderBy(part => market.UnitCost(part, 1))
         .ThenBy(part => part.ValueFarads)
         .ThenBy(part => part.Id, StringComparer.Ordinal)

@@ -87,7 +87,7 @@ internal sealed class SearchSpace
                 foreach (int tap in (amplifier as CounterPart)?.Taps ?? [0])
                 {
                     double target = Requirement.OutputHz * Math.Pow(2, tap);
-                    if (!Reaches(model, target))
+                    if (!Specification.ReachesFrequency(model, target, Requirement.BudgetRatio))
                     {
                         continue;
                     }
@@ -124,14 +124,6 @@ internal sealed class SearchSpace
                 };
             }
         }
-    }
-
-    // Whatever the load, a crystal runs between its series and its antiresonant frequency.
-    private bool Reaches(CrystalModel model, double targetHz)
-    {
-        double series = model.Crystal.SeriesHz;
-        double highest = series * Math.Sqrt(1 + model.Crystal.MotionalFarads / model.Crystal.ShuntFarads);
-        return targetHz * (1 + Requirement.BudgetRatio) >= series && targetHz * (1 - Requirement.BudgetRatio) <= highest;
     }
 
     private (FamilyMember? Member, Limit Limit) Admit(

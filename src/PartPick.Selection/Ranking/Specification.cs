@@ -33,6 +33,21 @@ public static class Specification
             || crystalHz <= clock;
     }
 
+    /// <summary>
+    /// Whether a crystal can run at a frequency within a budget: whatever the load, it runs between its series and its
+    /// antiresonant frequency.
+    /// </summary>
+    /// <param name="model">The crystal.</param>
+    /// <param name="targetHz">Wanted frequency at the crystal in hertz.</param>
+    /// <param name="budgetRatio">Largest frequency error as a ratio.</param>
+    public static bool ReachesFrequency(CrystalModel model, double targetHz, double budgetRatio)
+    {
+        ArgumentNullException.ThrowIfNull(model);
+        double series = model.Crystal.SeriesHz;
+        double highest = series * Math.Sqrt(1 + model.Crystal.MotionalFarads / model.Crystal.ShuntFarads);
+        return targetHz * (1 + budgetRatio) >= series && targetHz * (1 - budgetRatio) <= highest;
+    }
+
     private static bool Covers(double? low, double? high, Requirement requirement)
     {
         ArgumentNullException.ThrowIfNull(requirement);

@@ -70,17 +70,10 @@ internal static class RankCommand
         CommandContext context, ParseResult parsed, Requirement requirement, RankingOptions options, bool quiet)
     {
         Catalog.PartsCatalog catalog = context.LoadCatalog(parsed);
-        RankingProgress? progress = quiet || !context.Surroundings.ErrorIsTerminal ? null : new RankingProgress(context.Surroundings.Error);
-        RankingResult result;
-        try
-        {
-            result = Ranker.Rank(requirement, catalog, options, progress, context.Surroundings.Cancellation);
-        }
-        finally
-        {
-            progress?.Clear();
-        }
-
+        RankingResult result = RankingProgress.Over(
+            context.Surroundings,
+            quiet,
+            progress => Ranker.Rank(requirement, catalog, options, progress, context.Surroundings.Cancellation));
         var view = new RankView(result, context.Surroundings.UsesColour);
         switch (context.FormatOf(parsed))
         {

@@ -12,6 +12,7 @@ internal static class ShortlistCommand
         ShortlistAddCommand.Build(context),
         ShortlistListCommand.Build(context),
         ShortlistRemoveCommand.Build(context),
+        ShortlistAlternatesCommand.Build(context),
         ShortlistExportCommand.Build(context),
     };
 }

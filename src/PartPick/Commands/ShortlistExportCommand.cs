@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using System.CommandLine;
 using PartPick.Catalog;
 using PartPick.Output;
@@ -46,6 +47,12 @@ internal static class ShortlistExportCommand
         {
             name, to, form, force, bom, delimiter, point,
         };
+        var alternates = new Option<string?>("--alternates")
+        {
+            Description = "Look for replacements of each part, of its package, that keep every circuit fit; name up to N",
+            HelpName = "N",
+        };
+        command.Add(alternates);
         var purchase = new PurchaseArguments();
         purchase.AddTo(command);
         HelpFooter.AddTo(command, "Examples", Examples);
@@ -62,6 +69,11 @@ internal static class ShortlistExportCommand
             ExportForm chosen = ExportForms.Named(parsed.GetValue(form)) ?? ExportForms.OfFile(path ?? "") ?? ExportForm.Csv;
             PartsCatalog catalog = context.LoadCatalog(parsed);
             var view = ShortlistView.Of(ShortlistListCommand.Load(context, parsed, list)[0], new ShortlistReviewer(catalog));
+            if (Counts.Read(parsed.GetValue(alternates), alternates.Name) is { } most)
+            {
+                options = options with { Alternates = Alternates(view, catalog, most, context.Surroundings.Cancellation) };
+            }
+
             PurchaseList made = CommandFailure.Unless(ShortlistExport.Purchase(view, catalog, options));
             string text = ShortlistExport.Text(view, made, chosen, style, ShortlistAddCommand.Today());
             bool mark = style.Mark && chosen == ExportForm.Csv;
@@ -80,6 +92,17 @@ internal static class ShortlistExportCommand
         });
         return command;
     }
+
+    // A buyer cannot change the board: only parts of the same package.
+    private static ImmutableDictionary<string, ImmutableArray<string>> Alternates(
+        ShortlistView view, PartsCatalog catalog, int most, CancellationToken stop) => ListAlternates.Of(
+        [
+            .. view.Candidates.Select(review => (CommandFailure.Unless(ChosenCircuit.Of(review, catalog)), review.Requirement)),
+        ],
+        catalog,
+        most,
+        new AlternatesOptions { SamePackage = true },
+        stop);
 
     // What a buyer or an engineer has to look at is said even where only the file is wanted.
     private static void Tell(TextWriter error, ShortlistView view, PurchaseList list, string? path, ExportForm form)

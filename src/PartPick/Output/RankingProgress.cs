@@ -32,4 +32,21 @@ internal sealed class RankingProgress(TextWriter error) : IProgress<RankingResul
             _width = 0;
         }
     }
+
+    /// <summary>Does work that ranks, with its progress on a terminal and nowhere else.</summary>
+    /// <param name="surroundings">Where it shows.</param>
+    /// <param name="quiet">Whether no progress is wanted.</param>
+    /// <param name="work">The work.</param>
+    public static T Over<T>(Surroundings surroundings, bool quiet, Func<IProgress<RankingResult>?, T> work)
+    {
+        RankingProgress? progress = quiet || !surroundings.ErrorIsTerminal ? null : new RankingProgress(surroundings.Error);
+        try
+        {
+            return work(progress);
+        }
+        finally
+        {
+            progress?.Clear();
+        }
+    }
 }

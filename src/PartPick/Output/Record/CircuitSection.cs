@@ -28,6 +28,7 @@ internal static class CircuitSection
         }
 
         WriteParts(page, review);
+        WriteCosts(page, review);
         page.Raw("</section>");
     }
 
@@ -110,6 +111,18 @@ internal static class CircuitSection
                 use.Designator, use.Value, use.Role, use.Part.Id, BuyerText.Of(use.Part), use.Part.Supplier ?? "",
                 use.Part.SupplierPart ?? "",
             }));
+
+    private static void WriteCosts(Html page, ShortlistReview review)
+    {
+        const int most = 10_000;
+        var parts = new PartsCatalog(review.Parts.Select(use => use.Part).DistinctBy(part => part.Id));
+        if (review.Candidate is not null && review.Chosen.In(parts) is { } found
+            && CostCurve.Of(new BoardParts(found.Choice, found.Support), most) is { } curve)
+        {
+            page.Element("h3", $"Cost of one board ({review.Candidate.Currency}) over the number of boards, both logarithmic")
+                .Raw(CostSvg.Of(curve, Math.Min(review.Requirement.Builds, most), "Cost of one board over the number of boards"));
+        }
+    }
 
     private static string Farads(double farads) => ValueText.Format(farads, Dimension.Capacitance);
 }
