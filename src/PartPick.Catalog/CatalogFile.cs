@@ -14,6 +14,7 @@ internal sealed class CatalogFile : IDisposable
 
     private const string FingerprintKey = "builtInFingerprint";
     private const string ImportCountKey = "importCount";
+    private const string PartsMarkKey = "partsMark";
     private const string UndoableKey = "undoable";
     private const string EarlierCollection = "earlier";
     private const int PageBytes = 8192;
@@ -24,6 +25,7 @@ internal sealed class CatalogFile : IDisposable
 
     private readonly LiteDatabase _database;
     private int _earlierOf;
+    private bool _isUnmarked;
 
     private CatalogFile(string path)
     {
@@ -44,6 +46,11 @@ internal sealed class CatalogFile : IDisposable
         get => TextDocument.Read(About.FindAll().FirstOrDefault(document => document["_id"] == FingerprintKey));
         private set => About.Upsert(TextDocument.Write(FingerprintKey, value!));
     }
+
+    /// <summary>
+    /// What marks the parts as they are: it goes before any of them changes, and no later one is the same. Null where none is set.
+    /// </summary>
+    public string? PartsMark => TextDocument.Read(About.FindById(PartsMarkKey));
 
     /// <summary>The candidates of all shortlists.</summary>
     public ILiteCollection<BsonDocument> Shortlists => _database.GetCollection(ShortlistDocument.Collection);
@@ -167,8 +174,26 @@ internal sealed class CatalogFile : IDisposable
     /// <summary>A stored part; null where there is none, or none can be read.</summary>
     public StoredPart? FindStored(string id) => Parts.FindById(id) is { } document ? PartDocument.ReadStored(document) : null;
 
+    /// <summary>Gives the mark of the parts as they are, and sets one where there is none.</summary>
+    public string MarkParts()
+    {
+        if (PartsMark is { } set)
+        {
+            return set;
+        }
+
+        string mark = Guid.NewGuid().ToString("N");
+        About.Upsert(TextDocument.Write(PartsMarkKey, mark));
+        _isUnmarked = false;
+        return mark;
+    }
+
     /// <summary>Puts a stored part in the place of the one with its id.</summary>
-    public void Put(StoredPart part) => Parts.Upsert(PartDocument.Write(part));
+    public void Put(StoredPart part)
+    {
+        Unmark();
+        Parts.Upsert(PartDocument.Write(part));
+    }
 
     /// <summary>What is kept about the imports, by their numbers.</summary>
     public Dictionary<int, ImportNote> ReadImports() =>
@@ -184,6 +209,7 @@ internal sealed class CatalogFile : IDisposable
     /// <summary>Puts the built-in parts in the place of the earlier ones, in one transaction; a part of the user's own stays.</summary>
     public void ReplaceBuiltIn(BuiltInFiles builtIn)
     {
+        Unmark();
         _database.BeginTrans();
         Dictionary<string, StoredPart> handwork = Parts.Find(BsonExpression.Create($"$.{PartDocument.BuiltIn} = @0", true))
             .Where(document => document[PartDocument.ByHand].IsDocument)
@@ -198,6 +224,7 @@ internal sealed class CatalogFile : IDisposable
     /// <summary>Puts in parts of the user's own; a part of the same id is replaced.</summary>
     public void PutOwn(IEnumerable<Part> parts)
     {
+        Unmark();
         _database.BeginTrans();
         foreach (Part part in parts)
         {
@@ -227,7 +254,11 @@ internal sealed class CatalogFile : IDisposable
         TextDocument.Read(About.FindById(ImportCountKey)) ?? "0", System.Globalization.CultureInfo.InvariantCulture);
 
     /// <summary>Puts in parts whose ids are new.</summary>
-    public void InsertNew(List<BsonDocument> parts) => Parts.InsertBulk(parts, parts.Count);
+    public void InsertNew(List<BsonDocument> parts)
+    {
+        Unmark();
+        Parts.InsertBulk(parts, parts.Count);
+    }
 
     /// <summary>Keeps a part as it was before an import changes it.</summary>
     public void KeepEarlier(string id, int import)
@@ -269,6 +300,7 @@ internal sealed class CatalogFile : IDisposable
             return null;
         }
 
+        Unmark();
         int number = note.Number;
         foreach (BsonDocument earlier in Earlier.FindAll().ToList())
         {
@@ -330,6 +362,15 @@ internal sealed class CatalogFile : IDisposable
     }
 
     public void Dispose() => _database.Dispose();
+
+    private void Unmark()
+    {
+        if (!_isUnmarked)
+        {
+            About.Delete(PartsMarkKey);
+            _isUnmarked = true;
+        }
+    }
 
     private static StoredPart WithHandwork(Part part, StoredPart? earlier) => new()
     {

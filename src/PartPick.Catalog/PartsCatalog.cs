@@ -8,11 +8,18 @@ public sealed class PartsCatalog
     private static readonly Lazy<PartsCatalog> Embedded = new(() => BuiltInFiles.Embedded().ReadCatalog());
 
     private readonly Dictionary<string, Part> _byId;
+    private readonly Lazy<string> _currency;
 
     /// <summary>Makes a catalogue of parts.</summary>
     /// <param name="parts">The parts, in any order.</param>
     /// <exception cref="ArgumentException">Two parts have the same id.</exception>
     public PartsCatalog(IEnumerable<Part> parts)
+        : this(parts, null)
+    {
+    }
+
+    /// <summary>Makes a catalogue of some of the parts of a larger one, which has a main currency of its own.</summary>
+    internal PartsCatalog(IEnumerable<Part> parts, string? currency)
     {
         ArgumentNullException.ThrowIfNull(parts);
         All = [.. parts.OrderBy(part => part.Id, StringComparer.Ordinal)];
@@ -24,6 +31,7 @@ public sealed class PartsCatalog
         Counters = [.. All.OfType<CounterPart>()];
         Ports = [.. All.OfType<PortPart>()];
         Transistors = [.. All.OfType<TransistorPart>()];
+        _currency = currency is null ? new Lazy<string>(MostUsedCurrency) : new Lazy<string>(currency);
     }
 
     /// <summary>A catalogue without parts.</summary>
@@ -53,6 +61,9 @@ public sealed class PartsCatalog
     /// <summary>The transistors.</summary>
     public ImmutableArray<TransistorPart> Transistors { get; }
 
+    /// <summary>The currency in which most parts are priced, the first by ordinal of equally many; empty where none is priced.</summary>
+    public string Currency => _currency.Value;
+
     /// <summary>The parts that travel inside the program.</summary>
     /// <returns>The catalogue, read once.</returns>
     /// <exception cref="BuiltInPartsException">The files in the program are wrong.</exception>
@@ -67,4 +78,15 @@ public sealed class PartsCatalog
     /// <param name="id">Its id.</param>
     /// <returns>The part; null when there is none.</returns>
     public Part? Find(string id) => _byId.GetValueOrDefault(id);
+
+    private string MostUsedCurrency()
+    {
+        var counts = new CurrencyCounts();
+        foreach (Part part in All)
+        {
+            counts.Add(part.Offer);
+        }
+
+        return counts.Most;
+    }
 }

@@ -20,13 +20,7 @@ public sealed class Market
         ArgumentNullException.ThrowIfNull(catalog);
         ArgumentOutOfRangeException.ThrowIfLessThan(builds, 1);
         _builds = builds;
-        Currency = catalog.All
-            .Where(part => part.Offer.HasPrices)
-            .GroupBy(part => part.Offer.Currency, StringComparer.Ordinal)
-            .OrderByDescending(group => group.Count())
-            .ThenBy(group => group.Key, StringComparer.Ordinal)
-            .Select(group => group.Key)
-            .FirstOrDefault("");
+        Currency = catalog.Currency;
         Capacitors = [.. catalog.Capacitors.Where(IsOffered)];
         Resistors = [.. catalog.Resistors.Where(IsOffered)];
     }

@@ -22,8 +22,7 @@ public sealed record CrystalModel(Crystal Crystal, bool MotionalAssumed, bool Sh
     public static CrystalModel From(CrystalPart part)
     {
         ArgumentNullException.ThrowIfNull(part);
-        double motional = part.MotionalFarads ?? DefaultMotionalFarads(part);
-        double shunt = part.ShuntFarads ?? DefaultShuntFarads(part, motional);
+        (double motional, double shunt) = Capacitances(CrystalOutline.Of(part));
         var crystal = new Crystal
         {
             NominalHz = part.FrequencyHz,
@@ -37,9 +36,26 @@ public sealed record CrystalModel(Crystal Crystal, bool MotionalAssumed, bool Sh
         return new CrystalModel(crystal, motionalAssumed, shuntUncertain);
     }
 
-    private static bool IsSmall(CrystalPart part) => part.Package?.StartsWith("SMD", StringComparison.OrdinalIgnoreCase) == true;
+    /// <summary>Between which frequencies a crystal can run, in hertz: the series and the antiresonant one of its equivalent circuit.</summary>
+    /// <param name="outline">What is known of the crystal.</param>
+    public static (double SeriesHz, double AntiresonantHz) SpanHz(in CrystalOutline outline)
+    {
+        (double motional, double shunt) = Capacitances(outline);
+        double series = outline.LoadFarads is { } load
+            ? outline.FrequencyHz / Math.Sqrt(1 + motional / (shunt + load))
+            : outline.FrequencyHz;
+        return (series, series * Math.Sqrt(1 + motional / shunt));
+    }
 
-    private static double DefaultMotionalFarads(CrystalPart part) => part.Cut switch
+    private static (double MotionalFarads, double ShuntFarads) Capacitances(in CrystalOutline part)
+    {
+        double motional = part.MotionalFarads ?? DefaultMotionalFarads(part);
+        return (motional, part.ShuntFarads ?? DefaultShuntFarads(part, motional));
+    }
+
+    private static bool IsSmall(in CrystalOutline part) => part.Package?.StartsWith("SMD", StringComparison.OrdinalIgnoreCase) == true;
+
+    private static double DefaultMotionalFarads(in CrystalOutline part) => part.Cut switch
     {
         CrystalCut.Fork => 3e-15,
         _ when IsSmall(part) => 4e-15,
@@ -47,7 +63,7 @@ public sealed record CrystalModel(Crystal Crystal, bool MotionalAssumed, bool Sh
         _ => 15e-15,
     };
 
-    private static double DefaultShuntFarads(CrystalPart part, double motional) =>
+    private static double DefaultShuntFarads(in CrystalOutline part, double motional) =>
         part.Cut == CrystalCut.Fork ? 1.2e-12 : Math.Clamp(250 * motional, 1e-12, 7e-12);
 
     private static double DefaultResistanceOhms(CrystalPart part) => part switch

@@ -26,7 +26,8 @@ internal static class RelaxedSearch
             StartUpTimeSeconds = null,
         };
         var options = new RankingOptions { Top = count };
-        var run = new SearchRun(new SearchSpace(relaxed, space.Catalog, every: false), options, null, cancellation, leadersOnly: true);
+        var wider = new SearchSpace(relaxed, space.Source, every: false, cancellation);
+        var run = new SearchRun(wider, options, null, cancellation, leadersOnly: true);
         run.Search();
         return [.. run.Leaders.Best().Take(count).Select(point => point.Choice)];
     }

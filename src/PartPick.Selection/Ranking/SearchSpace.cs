@@ -8,25 +8,41 @@ internal sealed class SearchSpace
 {
     private readonly Dictionary<Limit, double> _rejections = [];
     private readonly AmplifierOptions _options;
+    private readonly SearchScope _scope;
+    private readonly CrystalDesk _crystals;
+    private readonly CancellationToken _cancellation;
 
     /// <param name="requirement">What is needed.</param>
     /// <param name="catalog">All parts.</param>
     /// <param name="every">Whether every load capacitor is tried, also those that another one beats whatever the circuit.</param>
     public SearchSpace(Requirement requirement, PartsCatalog catalog, bool every)
+        : this(requirement, new WholeCatalog(catalog), every, CancellationToken.None)
     {
+    }
+
+    /// <param name="requirement">What is needed.</param>
+    /// <param name="source">Where the parts come from.</param>
+    /// <param name="every">Whether every load capacitor is tried, also those that another one beats whatever the circuit.</param>
+    /// <param name="cancellation">Ends it.</param>
+    public SearchSpace(Requirement requirement, IPartsSource source, bool every, CancellationToken cancellation)
+    {
+        PartsCatalog catalog = source.PartsFor(requirement, cancellation);
         Requirement = requirement;
-        Catalog = catalog;
+        Source = source;
+        _cancellation = cancellation;
         Market = new Market(catalog, requirement.Builds);
+        _scope = new SearchScope(requirement, catalog);
+        _crystals = new CrystalDesk(requirement, catalog, Market);
         Capacitors = CapacitorChoice.Of(requirement, Market, every);
         _options = new AmplifierOptions(requirement, Market);
-        Families = [.. Kinds().SelectMany(FamiliesOf)];
+        Families = [.. _scope.Kinds.SelectMany(FamiliesOf)];
     }
 
     /// <summary>What is needed.</summary>
     public Requirement Requirement { get; }
 
-    /// <summary>All parts.</summary>
-    public PartsCatalog Catalog { get; }
+    /// <summary>Where the parts come from.</summary>
+    public IPartsSource Source { get; }
 
     /// <summary>What can be bought.</summary>
     public Market Market { get; }
@@ -58,51 +74,27 @@ internal sealed class SearchSpace
     /// </summary>
     public double? LeastCrystalRatio { get; private set; }
 
-    private IEnumerable<CircuitKind> Kinds() => Requirement.Circuits.Distinct().Order().Where(kind => Requirement.Waveform switch
-    {
-        Waveform.Sine => kind == CircuitKind.Follower,
-        Waveform.Square => kind != CircuitKind.Follower,
-        _ => true,
-    });
-
-    private IEnumerable<Part> Amplifiers(CircuitKind kind) => kind switch
-    {
-        CircuitKind.Gate => Catalog.Inverters,
-        CircuitKind.Counter => Catalog.Counters,
-        CircuitKind.Port => Catalog.Ports,
-        _ => Catalog.Transistors,
-    };
-
     private IEnumerable<CircuitFamily> FamiliesOf(CircuitKind kind)
     {
-        foreach (Part amplifier in Amplifiers(kind).Where(Market.IsListed))
+        foreach (Part amplifier in _scope.Amplifiers(kind).Where(Market.IsListed))
         {
             ImmutableArray<AmplifierOption> options =
                 amplifier is TransistorPart transistor ? _options.BiasFor(transistor) : _options.Series;
             double size = CapacitorPairs * options.Length;
             var members = new List<(FamilyMember Member, SupportParts Support)>();
-            foreach (CrystalPart crystal in Catalog.Crystals.Where(part => part.Overtone == 1 && Market.IsListed(part)))
+            foreach ((CrystalDesk.Entry crystal, int tap, double target) in Reaching(amplifier))
             {
-                CrystalModel model = CrystalModel.From(crystal);
-                foreach (int tap in (amplifier as CounterPart)?.Taps ?? [0])
+                _cancellation.ThrowIfCancellationRequested();
+                Combinations += size;
+                SupportParts support = _crystals.Support(kind, crystal.Part);
+                (FamilyMember? member, Limit limit) = Admit(kind, amplifier, crystal, tap, target, support);
+                if (member is not null)
                 {
-                    double target = Requirement.OutputHz * Math.Pow(2, tap);
-                    if (!Specification.ReachesFrequency(model, target, Requirement.BudgetRatio))
-                    {
-                        continue;
-                    }
-
-                    Combinations += size;
-                    SupportParts support = SupportParts.For(kind, crystal.FrequencyHz, Market);
-                    (FamilyMember? member, Limit limit) = Admit(kind, amplifier, crystal, model, tap, target, support);
-                    if (member is not null)
-                    {
-                        members.Add((member, support));
-                    }
-                    else
-                    {
-                        _rejections[limit] = _rejections.GetValueOrDefault(limit) + size;
-                    }
+                    members.Add((member, support));
+                }
+                else
+                {
+                    _rejections[limit] = _rejections.GetValueOrDefault(limit) + size;
                 }
             }
 
@@ -126,9 +118,18 @@ internal sealed class SearchSpace
         }
     }
 
+    // Crystals by id, each with the stages that it serves.
+    private IEnumerable<(CrystalDesk.Entry Crystal, int Tap, double TargetHz)> Reaching(Part amplifier) =>
+        from tap in SearchScope.Taps(amplifier)
+        let target = _scope.TargetHz(tap)
+        from crystal in _crystals.Reaching(target)
+        orderby crystal.Place
+        select (crystal, tap, target);
+
     private (FamilyMember? Member, Limit Limit) Admit(
-        CircuitKind kind, Part amplifier, CrystalPart crystal, CrystalModel model, int tap, double targetHz, SupportParts support)
+        CircuitKind kind, Part amplifier, CrystalDesk.Entry entry, int tap, double targetHz, SupportParts support)
     {
+        (CrystalPart crystal, CrystalModel model) = (entry.Part, entry.Model);
         double feedback = support.Feedback?.ValueOhms ?? double.PositiveInfinity;
         CircuitTemplate? template = CircuitTemplate.Create(Requirement, kind, model, amplifier, feedback);
         if (template is null)
@@ -152,7 +153,7 @@ internal sealed class SearchSpace
             return (null, Limit.Stock);
         }
 
-        ImmutableArray<BudgetTerm> terms = CrystalSpread.Of(crystal, Requirement);
+        ImmutableArray<BudgetTerm> terms = entry.Terms;
         double ratio = terms.Sum(term => term.Ratio);
         decimal cost = Market.UnitCost(crystal, 1) + Market.UnitCost(amplifier, 1)
             + Cost(support.Feedback) + Cost(support.Decoupling) + Cost(support.Coupling);
