@@ -69,11 +69,9 @@ internal static class RankCommand
     private static int Run(
         CommandContext context, ParseResult parsed, Requirement requirement, RankingOptions options, bool quiet)
     {
-        Catalog.PartsCatalog catalog = context.LoadCatalog(parsed);
-        RankingResult result = RankingProgress.Over(
-            context.Surroundings,
-            quiet,
-            progress => Ranker.Rank(requirement, catalog, options, progress, context.Surroundings.Cancellation));
+        var parts = new PartsOnDemand(new Catalog.StoredParts(context.CatalogPath(parsed)));
+        CommandFailure.Unless(parts.Open(context.Surroundings.Cancellation), ExitStatus.NoCatalog);
+        RankingResult result = RankingProgress.Over(context.Surroundings, quiet, progress => Rank(context, requirement, parts, options, progress));
         var view = new RankView(result, context.Surroundings.UsesColour);
         switch (context.FormatOf(parsed))
         {
@@ -89,6 +87,19 @@ internal static class RankCommand
         }
 
         return result.Candidates.IsEmpty ? ExitStatus.NothingFits : ExitStatus.Done;
+    }
+
+    private static RankingResult Rank(
+        CommandContext context, Requirement requirement, PartsOnDemand parts, RankingOptions options, IProgress<RankingResult>? progress)
+    {
+        try
+        {
+            return Ranker.Rank(requirement, parts, options, progress, context.Surroundings.Cancellation);
+        }
+        catch (PartsUnreadableException unreadable)
+        {
+            throw new CommandFailure(unreadable.Problem, ExitStatus.NoCatalog);
+        }
     }
 
     private static Option<string?> OptionOf(RequirementKey key)

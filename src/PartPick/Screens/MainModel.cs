@@ -41,6 +41,7 @@ public sealed class MainModel
         Wanted = new SentenceModel(requirement, glyphs, currency);
         Wanted.Changed += Rank;
         _ranking.Answered += Take;
+        _ranking.Failed += problem => Say($"! {problem}");
         Parts = parts;
         if (parts is not null)
         {
@@ -86,6 +87,9 @@ public sealed class MainModel
     /// <summary>Whether the list answers an older requirement.</summary>
     public bool IsStale { get; private set; }
 
+    /// <summary>Whether the parts are still being read.</summary>
+    public bool ReadsParts { get; set; }
+
     /// <summary>Whether a better or newer answer is being computed.</summary>
     public bool IsRanking => _ranking.IsRunning;
 
@@ -103,6 +107,15 @@ public sealed class MainModel
 
     /// <summary>Ranks again, as after the parts have changed.</summary>
     public void RankAgain() => Rank(false);
+
+    /// <summary>Takes that the parts have been read.</summary>
+    /// <param name="currency">Their main currency.</param>
+    public void PartsAreRead(string currency)
+    {
+        ReadsParts = false;
+        Wanted.Currency = currency;
+        Redraw?.Invoke();
+    }
 
     /// <summary>Says something until the next key.</summary>
     /// <param name="notice">The line.</param>

@@ -110,7 +110,7 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
         string order = list.Candidates.IsEmpty ? ""
             : FormattableString.Invariant($"{list.At + 1} of {list.Candidates.Length}, {(list.ShowsMisses ? "nearest" : "best")} first");
         return Rules.Draw(
-            AnswerWords.Of(list.Result, model.IsRanking, model.IsStale), order, ruleWidth, glyphs,
+            AnswerWords.Of(list.Result, model.IsRanking, model.IsStale, model.ReadsParts), order, ruleWidth, glyphs,
             model.IsRanking ? Tone.Accent : Tone.Strong);
     }
 

@@ -7,6 +7,8 @@ namespace PartPick.Screens;
 /// <summary>Opens the terminal interface.</summary>
 public static class ScreenHost
 {
+    private static readonly TimeSpan ReadingTime = TimeSpan.FromMilliseconds(300);
+
     /// <summary>Runs the terminal interface until it is left.</summary>
     /// <param name="catalogPath">Path of the catalogue's file.</param>
     /// <param name="requirementPath">A requirement file to begin with; null to go on with the one that was kept.</param>
@@ -31,10 +33,18 @@ public static class ScreenHost
 
     private static int Open(string catalogPath, string? requirementPath)
     {
-        Result<PartsCatalog> catalog = Load(catalogPath);
-        if (!catalog.IsOk)
+        Result<ImportNote?> probe = CatalogReading.Undoable(catalogPath);
+        if (!probe.IsOk)
         {
-            return Fail(ExitStatus.NoCatalog, catalog.Problem.ToString());
+            return Fail(ExitStatus.NoCatalog, probe.Problem.ToString());
+        }
+
+        // A small catalogue is read in this time, and any problem of it is said before the screen opens.
+        var ranking = new CatalogRanking(new PartsOnDemand(new StoredParts(catalogPath)));
+        Task<Result<bool>> opening = ranking.Open();
+        if (opening.Wait(ReadingTime) && opening.GetAwaiter().GetResult() is { IsOk: false } failed)
+        {
+            return Fail(ExitStatus.NoCatalog, failed.Problem.ToString());
         }
 
         var keeper = new RequirementKeeper(catalogPath);
@@ -48,29 +58,13 @@ public static class ScreenHost
             : start.Value is null ? "Press e and say what is wanted; ? shows all keys."
             : null;
         var run = new TerminalRun(
-            catalogPath, new CatalogRanking(catalog.Value), TerminalTraits.Of(Environment.GetEnvironmentVariable),
-            requirement => keeper.Keep(requirement), new Market(catalog.Value, 1).Currency);
+            catalogPath, ranking, TerminalTraits.Of(Environment.GetEnvironmentVariable), requirement => keeper.Keep(requirement), opening);
         Requirement end = run.Show(start.ValueOr(null) ?? First, notice, new CatalogDesk(catalogPath));
         return keeper.Keep(end) is { } problem ? Fail(ExitStatus.NoCatalog, problem.ToString()) : ExitStatus.Done;
     }
 
     /// <summary>The sentence of the very first time.</summary>
     private static Requirement First => new() { OutputHz = 1000, Waveform = Waveform.Square };
-
-    // A large catalogue takes seconds: they are not left blank.
-    private static Result<PartsCatalog> Load(string catalogPath)
-    {
-        const string words = "reading the parts of the catalogue";
-        var loading = Task.Run(() => CatalogStore.Load(catalogPath));
-        if (!loading.Wait(TimeSpan.FromMilliseconds(500)))
-        {
-            Console.Error.Write(words);
-            ((IAsyncResult)loading).AsyncWaitHandle.WaitOne();
-            Console.Error.Write("\r" + new string(' ', words.Length) + "\r");
-        }
-
-        return loading.GetAwaiter().GetResult();
-    }
 
     private static Result<Requirement?> ReadFile(string path)
     {

@@ -10,8 +10,14 @@ public static class AnswerWords
     /// <param name="result">The answer that is shown; null before the first one.</param>
     /// <param name="running">Whether a better or newer answer is being computed.</param>
     /// <param name="stale">Whether the answer shown is one to an older requirement.</param>
-    public static string Of(RankingResult? result, bool running, bool stale)
+    /// <param name="reading">Whether the parts are still being read.</param>
+    public static string Of(RankingResult? result, bool running, bool stale, bool reading = false)
     {
+        if (reading && running)
+        {
+            return "reading the parts" + (result is null ? "" : "; the list is still the one before");
+        }
+
         if (result is null)
         {
             return running ? "computing" : "nothing ranked yet";

@@ -1,20 +1,27 @@
-using PartPick.Catalog;
 using PartPick.Selection;
+using PartPick.Values;
 
 namespace PartPick.Screens;
 
 /// <summary>Ranks the parts of a catalogue on threads of their own.</summary>
-/// <param name="catalog">The parts.</param>
-public sealed class CatalogRanking(PartsCatalog catalog) : IRankingService
+/// <param name="parts">The parts.</param>
+public sealed class CatalogRanking(PartsOnDemand parts) : IRankingService
 {
-    /// <summary>The parts; the next ranking takes them as they are then.</summary>
-    public PartsCatalog Catalog { get; set; } = catalog;
+    private Task<Result<bool>> _opening = Task.FromResult(Result.Ok(true));
+
+    /// <summary>The main currency; empty before the parts were read.</summary>
+    public string Currency => parts.Currency;
+
+    /// <summary>Reads the parts as they now are; rankings wait for it. An edit of the requirement does not begin it anew.</summary>
+    /// <returns>True, or the problem.</returns>
+    public Task<Result<bool>> Open() => _opening = Task.Run(() => parts.Open(CancellationToken.None));
 
     /// <inheritdoc/>
-    public Task<RankingResult> RankAsync(
+    public async Task<RankingResult> RankAsync(
         Requirement requirement, IProgress<RankingResult> progress, CancellationToken cancellation)
     {
-        PartsCatalog parts = Catalog;
-        return Task.Run(() => Ranker.Rank(requirement, parts, null, progress, cancellation), cancellation);
+        // What went wrong is tried again, and said by the ranking itself.
+        await _opening.WaitAsync(cancellation).ConfigureAwait(false);
+        return await Task.Run(() => Ranker.Rank(requirement, parts, null, progress, cancellation), cancellation).ConfigureAwait(false);
     }
 }

@@ -1,5 +1,6 @@
 using System.Runtime.ExceptionServices;
 using PartPick.Selection;
+using PartPick.Values;
 
 namespace PartPick.Screens;
 
@@ -28,6 +29,9 @@ public sealed class LiveRanking : IDisposable
 
     /// <summary>Raised on the screen's thread with every answer, best-so-far or complete.</summary>
     public event Action<RankingResult>? Answered;
+
+    /// <summary>Raised on the screen's thread where the parts cannot be read.</summary>
+    public event Action<Problem>? Failed;
 
     /// <summary>Whether the latest requirement still waits for its complete answer.</summary>
     public bool IsRunning { get; private set; }
@@ -73,6 +77,10 @@ public sealed class LiveRanking : IDisposable
         {
             // Something newer has been asked.
         }
+        catch (PartsUnreadableException unreadable)
+        {
+            _post(() => Fail(unreadable.Problem, number));
+        }
         catch (Exception error)
         {
             var caught = ExceptionDispatchInfo.Capture(error);
@@ -95,6 +103,15 @@ public sealed class LiveRanking : IDisposable
 
         IsRunning = !result.IsComplete;
         Answered?.Invoke(result);
+    }
+
+    private void Fail(Problem problem, int number)
+    {
+        if (number == _number)
+        {
+            IsRunning = false;
+            Failed?.Invoke(problem);
+        }
     }
 
     private sealed class Reports(Action<RankingResult> take) : IProgress<RankingResult>

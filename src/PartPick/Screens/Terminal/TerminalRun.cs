@@ -1,5 +1,4 @@
 using System.Runtime.InteropServices;
-using PartPick.Catalog;
 using PartPick.Selection;
 using PartPick.Values;
 using Terminal.Gui.App;
@@ -12,9 +11,9 @@ namespace PartPick.Screens;
 /// <param name="ranking">What ranks its parts.</param>
 /// <param name="traits">What the terminal can show.</param>
 /// <param name="keep">Keeps a requirement; called from any thread.</param>
-/// <param name="currency">The currency of the costs; empty where it is not known.</param>
+/// <param name="opening">The reading of the parts, which may go on while the screen is shown.</param>
 internal sealed class TerminalRun(
-    string catalogPath, CatalogRanking ranking, TerminalTraits traits, Action<Requirement> keep, string currency)
+    string catalogPath, CatalogRanking ranking, TerminalTraits traits, Action<Requirement> keep, Task<Result<bool>> opening)
 {
     private const string MouseReportsOff = "\x1b[?1003l\x1b[?1015l\x1b[?1006l";
 
@@ -40,8 +39,13 @@ internal sealed class TerminalRun(
         using var live = new LiveRanking(ranking, action => Post(app, action), TimeProvider.System);
         var work = new ScreenWork(action => Post(app, action));
         var parts = new PartsModel(catalogPath, work, glyphs, () => DateOnly.FromDateTime(TimeProvider.System.GetLocalNow().Date));
-        var model = new MainModel(start, live, glyphs, notice, currency, parts: parts);
-        model.PartsChanged += () => work.Start(stop => CatalogReading.All(catalogPath, stop), loaded => RankWith(loaded, model));
+        var model = new MainModel(start, live, glyphs, notice, ranking.Currency, parts: parts);
+        Await(opening);
+        model.PartsChanged += () =>
+        {
+            Await(ranking.Open());
+            model.RankAgain();
+        };
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
         model.KeepListsAt(desk);
         using var screen = new MainScreen(model, palette);
@@ -51,6 +55,13 @@ internal sealed class TerminalRun(
         app.Run(screen);
         parts.Stop();
         return model.Wanted.Accepted;
+
+        // Rankings wait for the parts by themselves; this only says so.
+        void Await(Task<Result<bool>> reading)
+        {
+            model.ReadsParts = !reading.IsCompleted;
+            _ = reading.ContinueWith(_ => Post(app, () => model.PartsAreRead(ranking.Currency)), TaskScheduler.Default);
+        }
 
         void Leave(PosixSignalContext context)
         {
@@ -70,18 +81,6 @@ internal sealed class TerminalRun(
                 _ = Task.Delay(LastMoment).ContinueWith(_ => Environment.Exit(ExitStatus.Fault), TaskScheduler.Default);
             }
         }
-    }
-
-    private void RankWith(Result<PartsCatalog> loaded, MainModel model)
-    {
-        if (!loaded.IsOk)
-        {
-            model.Say($"! {loaded.Problem}");
-            return;
-        }
-
-        ranking.Catalog = loaded.Value;
-        model.RankAgain();
     }
 
     private static bool HasTerminal()

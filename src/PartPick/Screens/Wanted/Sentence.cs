@@ -15,8 +15,8 @@ public static class Sentence
 {
     /// <summary>The pieces, in the order of the sentence; the first value is the name, the second the output frequency.</summary>
     /// <param name="start">The requirement at the beginning: a board of its own stays among the choices.</param>
-    /// <param name="currency">The currency of the cost limit; empty where it is not known.</param>
-    public static ImmutableArray<SentencePiece> Pieces(Requirement start, string currency = "")
+    /// <param name="currency">The currency of the cost limit, asked for at each drawing; empty where it is not known.</param>
+    public static ImmutableArray<SentencePiece> Pieces(Requirement start, Func<string>? currency = null)
     {
         ArgumentNullException.ThrowIfNull(start);
         return
@@ -26,7 +26,7 @@ public static class Sentence
             Value(RangeFields.SupplyMin()), Words("~to~"), Value(RangeFields.SupplyMax()), Words(", "),
             Value(RangeFields.TemperatureMin()), Words("~to~"), Value(RangeFields.TemperatureMax()),
             Words(", start-up margin~"), Value(Margin()), Words(", "), Value(Start()), Words(" "), Value(StartUpTime()),
-            Words(", "), Value(Builds()), Words("~boards at "), Value(Cost(currency)),
+            Words(", "), Value(Builds()), Words("~boards at "), Value(Cost(currency ?? (() => ""))),
             Words(", "), Value(BoardOf(start)), Words(" board, C1,~C2~of~"), Value(Series(start)), Words(", "),
             Value(new CircuitsField()),
             Words("; error ×"), Value(Weight("weight of the error", w => w.Error, (w, v) => w with { Error = v })),
@@ -82,9 +82,9 @@ public static class Sentence
         "boards", "a whole number from 1", Dimension.Count,
         r => r.Builds, (r, v) => r with { Builds = (int)v }, (_, v) => v >= 1 ? null : "is below 1");
 
-    private static TypedField Cost(string currency) => TypedFields.Optional(
+    private static TypedField Cost(Func<string> currency) => TypedFields.Optional(
         "cost limit", "for one board, such as 2.50, or any", Dimension.Number,
-        r => r.CostLimit is { } cost ? $"{Figures.Money(cost)} {(currency.Length == 0 ? "each" : currency)} at most" : "any cost",
+        r => r.CostLimit is { } cost ? $"{Figures.Money(cost)} {(currency() is { Length: > 0 } known ? known : "each")} at most" : "any cost",
         r => r.CostLimit is { } cost ? cost.ToString(CultureInfo.InvariantCulture) : "any",
         (r, v) => r with { CostLimit = v is { } cost ? (decimal)Math.Min(cost, 1e9) : null });
 

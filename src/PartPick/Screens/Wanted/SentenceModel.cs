@@ -23,13 +23,17 @@ public sealed class SentenceModel
         Accepted = requirement;
         Current = requirement;
         _glyphs = glyphs;
-        _pieces = Sentence.Pieces(requirement, currency);
+        Currency = currency;
+        _pieces = Sentence.Pieces(requirement, () => Currency);
         _fields = [.. _pieces.Select(piece => piece.Field).OfType<SentenceField>()];
         _walk = new SentenceWalk(1);
     }
 
     /// <summary>Raised when <see cref="Current"/> is another requirement; true while it is still being typed.</summary>
     public event Action<bool>? Changed;
+
+    /// <summary>The currency of the cost limit; empty where it is not known.</summary>
+    public string Currency { get; set; }
 
     /// <summary>The requirement without what is being typed.</summary>
     public Requirement Accepted { get; private set; }
