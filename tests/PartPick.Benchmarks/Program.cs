@@ -12,6 +12,11 @@ if (args is ["--browse", .. var parts])
     return BrowseTable.Print(parts, Console.Out);
 }
 
+if (args is ["--large", .. var large])
+{
+    return LargeTable.Print(large, Console.Out);
+}
+
 if (args is ["--import", .. var size])
 {
     return ImportTable.Print(size, Console.Out);
