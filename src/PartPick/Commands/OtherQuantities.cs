@@ -33,7 +33,7 @@ internal static class OtherQuantities
                 new QuantityOptions { Most = MostBuilds },
                 progress,
                 context.Surroundings.Cancellation));
-        ImmutableArray<int> rows = wish.Builds.IsEmpty ? UsualRows(requirement.Builds) : wish.Builds;
+        ImmutableArray<int> rows = wish.Builds.IsEmpty ? QuantityView.UsualRows(requirement.Builds, MostBuilds) : wish.Builds;
         bool ascii = !Screens.TerminalTraits.Of(context.Surroundings.Environment).IsUtf8;
         var view = new QuantityView(wish.List, circuit.Review, circuit.Chosen, curve, choice, rows, ascii);
         switch (context.FormatOf(parsed))
@@ -51,10 +51,4 @@ internal static class OtherQuantities
 
         return ExitStatus.Done;
     }
-
-    private static ImmutableArray<int> UsualRows(int builds) =>
-    [
-        .. new[] { 1, 2, 5, 10, 20, 50, 100, 200, 500, 1000, 2000, 5000, MostBuilds }
-            .Append(Math.Min(builds, MostBuilds)).Distinct().Order(),
-    ];
 }

@@ -21,6 +21,14 @@ public sealed class CatalogDesk(string catalogPath) : IShortlistDesk
     public Result<ImmutableArray<ShortlistReview>> Read(string list) => CatalogStore.Load(catalogPath).Then(catalog => Read(list, catalog));
 
     /// <inheritdoc/>
+    public Result<ListCircuit> Circuit(string list, int number) => CatalogStore.Load(catalogPath).Then(catalog =>
+        ShortlistStore.Read(catalogPath, list).Then(found => found.Entries.FirstOrDefault(entry => entry.Number == number) is { } entry
+            ? new ShortlistReviewer(catalog).Review(list, entry).Then(review =>
+                ChosenCircuit.Of(review, catalog).Map(chosen => new ListCircuit(review, chosen, catalog)))
+            : Result.Fail<ListCircuit>(
+                "list", FormattableString.Invariant($"candidate {number} is not on it any more"), "a candidate that is on the list")));
+
+    /// <inheritdoc/>
     public Result<ShortlistEntry> Put(string list, CandidateParts choice, Requirement requirement, string? note) =>
         CatalogStore.Load(catalogPath).Then(catalog =>
         {

@@ -43,12 +43,13 @@ internal sealed class TerminalRun(
         var model = new MainModel(start, live, glyphs, notice, currency, parts: parts);
         model.PartsChanged += () => work.Start(stop => CatalogReading.All(catalogPath, stop), loaded => RankWith(loaded, model));
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
-        model.KeepListsAt(desk);
+        model.KeepListsAt(desk, work);
         using var screen = new MainScreen(model, palette);
         using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, Leave);
         using PosixSignalRegistration interrupt = PosixSignalRegistration.Create(PosixSignal.SIGINT, Leave);
         using PosixSignalRegistration hangUp = PosixSignalRegistration.Create(PosixSignal.SIGHUP, HangUp);
         app.Run(screen);
+        model.Stop();
         parts.Stop();
         return model.Wanted.Accepted;
 
