@@ -23,7 +23,7 @@ internal static class OtherQuantities
     {
         Requirement requirement = circuit.Review.Requirement;
         CostCurve curve = CostCurve.Of(circuit.Chosen.Board, MostBuilds) ?? throw new CommandFailure(
-            new Problem("--builds", "a part of the circuit has no price", "a candidate whose parts all have one"), ExitStatus.WrongInput);
+            new Problem("--builds", "a part of the circuit has no price, or one in another currency", "a candidate whose parts all have one"), ExitStatus.WrongInput);
         QuantityChoice? choice = wish.ChosenOnly
             ? null
             : RankingProgress.Over(context.Surroundings, wish.Quiet, progress => QuantitySearch.Find(

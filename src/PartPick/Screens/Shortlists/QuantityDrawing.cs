@@ -25,10 +25,9 @@ internal static class QuantityDrawing
             _ => [],
         };
         ImmutableArray<Line> shown = page.Scroll.Cut(all, height - 1);
-        string title = page.View is { } of ? $"Cost over boards: {ReviewWords.Name(of.Review)}" : "Cost over boards";
-        string state = !page.IsLooking ? page.Scroll.HasMore ? "more below" : ""
-            : page.View is null ? "reading" : "computing the best";
-        return [Rules.Draw(title, state, width, glyphs, page.IsLooking ? Tone.Accent : Tone.Strong), .. shown];
+        string state = !page.IsLooking ? "" : page.View is null ? ": reading" : ": computing the best";
+        string more = page.Scroll.HasMore ? "more below" : "";
+        return [Rules.Draw("Cost over boards" + state, more, width, glyphs, page.IsLooking ? Tone.Accent : Tone.Strong), .. shown];
     }
 
     private static ImmutableArray<Line> Page(QuantityView view, int width, Glyphs glyphs)
@@ -36,6 +35,7 @@ internal static class QuantityDrawing
         var lines = ImmutableArray.CreateBuilder<Line>();
         string currency = view.Chosen.Candidate.Currency;
         int across = Math.Clamp(width - 14, 20, Widest);
+        Say(ReviewWords.Name(view.Review), Tone.Strong);
         Say($"One board ({currency}) over the number of boards, both logarithmic");
         foreach (string line in CostPicture.Draw(view.Curve.Most, view.Curve.UnitCost, across, Height, view.Ascii))
         {

@@ -80,7 +80,7 @@ internal sealed class QuantityPage(IShortlistDesk desk, ScreenWork work, bool as
     {
         if (curve is null)
         {
-            Problem = new Problem("cost", "a part of the circuit has no price", "a candidate whose parts all have one");
+            Problem = new Problem("cost", "a part of the circuit has no price, or one in another currency", "a candidate whose parts all have one");
             return;
         }
 

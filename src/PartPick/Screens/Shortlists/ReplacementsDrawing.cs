@@ -8,6 +8,7 @@ namespace PartPick.Screens;
 /// <summary>Draws the replacements of a part: what each changes, and below them the circuit with the chosen one.</summary>
 internal static class ReplacementsDrawing
 {
+    private const int Narrow = 56;
     private const int Middle = 78;
     private const int Wide = 104;
     private const int LeastRows = 3;
@@ -52,11 +53,11 @@ internal static class ReplacementsDrawing
         }
 
         BoardLine line = page.Lines[page.Part];
-        string part = $"{string.Join(", ", line.Designators)} {line.Part.Id}";
+        string part = string.Join(", ", line.Designators) + (width < Narrow ? "" : $" {line.Part.Id}");
         string count = page.Found is { } found
             ? FormattableString.Invariant($"{found.Replacements.Length} of {found.Considered} others fit")
             : "computing";
-        return width < Middle ? $"{part}: {count}" : $"For {part}, {string.Join(" and ", line.Roles)}: {count}";
+        return width < Wide ? $"{part}: {count}" : $"For {part}, {string.Join(" and ", line.Roles)}: {count}";
     }
 
     private static string Position(ReplacementsPage page) =>
