@@ -155,7 +155,7 @@ public sealed class ShortlistExportTests
             bench.Of("shortlist", "alternates", "logger", "1", "--builds", "--chosen-only").WrongLine(),
             StringComparison.Ordinal);
         JsonElement alternates = bench.Of("shortlist", "alternates", "logger", "1", "--part", "C1", "--format", "json").Json;
-        JsonElement first = alternates[0].GetProperty("lines")[0].GetProperty("replacements")[0];
+        JsonElement first = alternates[0].GetProperty("parts")[0].GetProperty("replacements")[0];
         Assert.Equal(JsonValueKind.Null, first.GetProperty("change").GetProperty("cost").ValueKind);
         string table = bench.Of("shortlist", "alternates", "logger", "1", "--part", "C1").Output;
         Assert.Contains("priced in more than one currency", table, StringComparison.Ordinal);
