@@ -19,7 +19,7 @@ internal sealed class ColumnFit(PartKind kind, ColumnSample sample)
             return false;
         }
 
-        double least = match.Score >= FieldMatch.Whole ? double.Epsilon : MostUnfit;
+        double least = match.Field == "priceFor" ? MostUnfit : match.Score >= FieldMatch.Whole ? double.Epsilon : MostUnfit;
         string[] cells = sample.Cells(match.Column);
         return ColumnSample.Share(cells, cell => Reads(match.Field, dimension, header, cell)) >= least;
     }

@@ -27,6 +27,9 @@ internal static class ImportFields
     /// <summary>Whether a field may come from several columns.</summary>
     public static bool IsRepeated(string field) => field is "price" or "priceQuantity";
 
+    /// <summary>Whether parts of a kind differ in their inverting stages.</summary>
+    public static bool HasStages(PartKind kind) => PartShape.Of(kind).Fields.Any(field => field.Key == "stages");
+
     /// <summary>The number of inverting stages that a cell states, as a number or in words; null where it states none.</summary>
     public static int? Stages(string cell) => Trade.Words(cell) switch
     {
