@@ -38,6 +38,8 @@ internal sealed class ColumnFit(PartKind kind, ColumnSample sample)
     private bool Reads(string field, Dimension? dimension, HeaderCell header, string cell) => field switch
     {
         "temperature" => TemperatureRange.Read(cell) is not null,
+        "price" or "prices" when TradeAnswers.IsOnRequest(cell) => true,
+        "stock" when TradeAnswers.Stock(cell) is not null => true,
         "price" => Either(notation => PriceCells.Price(cell, notation) is not null),
         "prices" => Either(notation => PriceCells.List(cell, notation) is not null),
         "priceQuantity" or "priceFor" => Either(notation => CellNumber.Read(cell, Dimension.Count, 0, notation, false).IsOk),
