@@ -22,7 +22,8 @@ public sealed class RunningState
         _factors = factors;
     }
 
-    internal RunningState(double radians, double peakAmps, double[] state, PeriodMesh mesh, bool holdsCurrent, FollowerFundamentals fundamentals)
+    internal RunningState(
+        double radians, double peakAmps, double[] state, PeriodMesh mesh, bool holdsCurrent, FollowerFundamentals fundamentals)
         : this(typeof(FollowerPeriod), mesh.Count, radians, peakAmps, state, null)
     {
         Mesh = mesh;

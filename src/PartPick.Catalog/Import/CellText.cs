@@ -10,6 +10,9 @@ internal static class CellText
         "", "-", "--", "---", "n/a", "na", "n.a.", "none", "null", "nil", "tbd", "tba", "?", "*", "\u2013", "\u2014",
         "not specified", "unspecified", "not applicable", "not available", "unknown", "k.a.", "k. a.", "keine angabe",
         "n/d", "nd", "#n/a", "nan", ".",
+        "/", "//", "n.d.", "n. d.", "s/d", "n/v", "nvt", "n.v.t.", "b.d.", "brak", "brak danych", "néant", "neant", "aucun", "aucune",
+        "ninguno", "ninguna", "sin datos", "nessuno", "nessuna", "nenhum", "nenhuma", "keine", "#n/d", "#nv", "#ref!", "#value!",
+        "#div/0!", "#name?", "#wert!", "#bezug!",
     };
 
     private static readonly string[] Leading =

@@ -19,7 +19,7 @@ internal sealed class ColumnFit(PartKind kind, ColumnSample sample)
             return false;
         }
 
-        double least = match.Score >= FieldMatch.Whole ? double.Epsilon : MostUnfit;
+        double least = match.Field == "priceFor" ? MostUnfit : match.Score >= FieldMatch.Whole ? double.Epsilon : MostUnfit;
         string[] cells = sample.Cells(match.Column);
         return ColumnSample.Share(cells, cell => Reads(match.Field, dimension, header, cell)) >= least;
     }
@@ -38,6 +38,8 @@ internal sealed class ColumnFit(PartKind kind, ColumnSample sample)
     private bool Reads(string field, Dimension? dimension, HeaderCell header, string cell) => field switch
     {
         "temperature" => TemperatureRange.Read(cell) is not null,
+        "price" or "prices" when TradeAnswers.IsOnRequest(cell) => true,
+        "stock" when TradeAnswers.Stock(cell) is not null => true,
         "price" => Either(notation => PriceCells.Price(cell, notation) is not null),
         "prices" => Either(notation => PriceCells.List(cell, notation) is not null),
         "priceQuantity" or "priceFor" => Either(notation => CellNumber.Read(cell, Dimension.Count, 0, notation, false).IsOk),

@@ -16,12 +16,12 @@ internal static class ColumnWishes
             string[] rest = equals < 0 ? [""] : text[(equals + 1)..].Split(':', 2, StringSplitOptions.TrimEntries);
             string unit = rest.Length > 1 ? rest[1] : "";
             PartField? field = PartShape.Of(kind).Fields.FirstOrDefault(each => each.Key == rest[0]);
-            if (header.Trim().Length == 0 || (rest[0].Length > 0 && field is null && !ImportFields.Further.Contains(rest[0])))
+            if (header.Trim().Length == 0 || (rest[0].Length > 0 && !ImportFields.Names(kind).Contains(rest[0])))
             {
                 return Result.Fail<List<ColumnWish>>(
                     "--column", $"{Problem.Quote(text)} names no figure of {kind.Word()}",
                     "HEADER=FIELD or HEADER=FIELD:UNIT with one of "
-                        + string.Join(", ", PartShape.Of(kind).Fields.Select(each => each.Key).Concat(ImportFields.Further)));
+                        + string.Join(", ", ImportFields.Names(kind)));
             }
 
             if (unit.Length > 0 && field?.Dimension is { } dimension && UnitSpelling.PowerOf(unit, dimension) is null)

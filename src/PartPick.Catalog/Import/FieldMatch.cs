@@ -102,6 +102,12 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
                 return 0;
             }
 
+            // A few letters beside other words may begin many a long word.
+            if (phrase.Length == 1 && header.Length > 1 && best < 1 && header[at].Length * 3 < word.Length)
+            {
+                return 0;
+            }
+
             sure |= best >= Compound && header[at].Length > 2;
 
             used[at] = true;

@@ -21,7 +21,7 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
 
     private static readonly HashSet<string> Middle = new(StringComparer.Ordinal)
     {
-        "typ", "typical", "typisch", "typique", "tipico", "tipica", "typisk", "typowe", "typowa", "典型", "тип",
+        "typ", "typical", "typisch", "typique", "tip", "tipico", "tipica", "typisk", "typowe", "typowa", "典型", "тип",
     };
 
     private static readonly HashSet<string> Noise =
@@ -43,13 +43,15 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
     /// <summary>The same with those that only qualify it.</summary>
     public string[] All { get; } = TradePhrase.Telling(TradePhrase.Folded(Name));
 
-    /// <summary>The names that a header gives side by side, "Fréquence / Frequency"; none where it gives one.</summary>
+    /// <summary>The names that a header gives side by side, "Fréquence / Frequency", and its own with the words in full.</summary>
     public IEnumerable<HeaderCell> Alternatives()
     {
         string[] pieces = Text.Split(['/', '|', '\n', '='], StringSplitOptions.TrimEntries | StringSplitOptions.RemoveEmptyEntries);
-        return pieces.Length < 2
+        IEnumerable<HeaderCell> beside = pieces.Length < 2
             ? []
             : pieces.Select(Of).Where(cell => cell.Name.Length > 2).Select(cell => cell.Unit.Length > 0 ? cell : cell with { Unit = Unit });
+        string full = Abbreviations.InFull(Name);
+        return full == Name ? beside : beside.Append(new HeaderCell(Text, full, Unit, Basis));
     }
 
     /// <summary>Takes a cell apart.</summary>
@@ -90,7 +92,7 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
 
     // "at 25 °C", "à 25°C", "@ IC", "bei +25 °C", "(25 °C)", "(IC=2mA)": under which condition the figures hold.
     [GeneratedRegex(
-        @"(?<=.)@.*$|\([^)]*=[^)]*\)|(?:\b(?:at|à|a|bei|bij|ved|vid|w|przy|pri|при|la))"
+        @"(?<=.)@.*$|\([^)]*=[^)]*\)|(?:\b(?:at|à|a|bei|b\.|bij|ved|vid|w|przy|pri|при|la))"
             + @"\s*\+?\s*25\s*(?:[°º]\s*C?|deg\.?\s*C|C\b|℃)|\(\s*\+?25\s*(?:[°º]\s*C|C|℃)\s*\)",
         RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex Condition();

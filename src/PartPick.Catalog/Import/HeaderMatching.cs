@@ -22,12 +22,17 @@ internal sealed class HeaderMatching(PartKind kind, ColumnSample sample)
         }
 
         PriceColumns.Mark(kind, cells, sample, uses);
-        IEnumerable<FieldMatch> matches = cells
-            .SelectMany((cell, i) => uses[i] is { Field: null, IsUnnamed: true } ? FieldMatch.Of(kind, i, cell) : [])
-            .OrderByDescending(match => match.Score).ThenBy(match => match.Column);
+        FieldMatch[] matches =
+        [
+            .. cells.SelectMany((cell, i) => uses[i] is { Field: null, IsUnnamed: true } ? FieldMatch.Of(kind, i, cell) : [])
+                .OrderByDescending(match => match.Score).ThenBy(match => match.Column),
+        ];
         foreach (FieldMatch match in matches)
         {
-            if (uses[match.Column].Field is not null || !_fit.Holds(match, cells[match.Column]))
+            // For how many a price is says something only beside a price.
+            bool alone = match.Field == "priceFor" && !uses.Any(use => use.Field == "price")
+                && !matches.Any(other => other.Field == "price" && other.Column != match.Column);
+            if (alone || uses[match.Column].Field is not null || !_fit.Holds(match, cells[match.Column]))
             {
                 continue;
             }

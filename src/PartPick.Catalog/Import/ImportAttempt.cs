@@ -67,8 +67,7 @@ internal sealed class ImportAttempt(
         Updated = run.Updated,
         Unchanged = run.Unchanged,
         Rejected = count.Rejected,
-        Columns = [.. uses.Select(use => new ImportColumn(
-            CellText.Harmless(use.Header), use.Field, use.Power == ColumnUse.NoPlainNumbers ? "" : use.Unit, use.Why))],
+        Columns = new ImportPlan(layout, uses).Columns(),
         Rejections = count.Listed,
         RejectedFile = count.PublishRejected(),
         Encoding = encoding,

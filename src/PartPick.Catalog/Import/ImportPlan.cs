@@ -25,7 +25,7 @@ internal sealed record ImportPlan(FileLayout Layout, ColumnUse[] Uses)
 
         Result<FileLayout> found = FileLayout.Find(text.Reader, request.Name, request.Kind, wishes.Value);
         return found.Map(layout => new ImportPlan(
-            layout, new ColumnProposal(request.Kind, layout.Sample, OptionsOf(request)).For(layout.Header, wishes.Value)));
+            layout, new ColumnProposal(request.Kind, layout.Sample, ImportOptions.Of(request)).For(layout.Header, wishes.Value)));
     }
 
     /// <summary>The columns for a report.</summary>
@@ -34,15 +34,4 @@ internal sealed record ImportPlan(FileLayout Layout, ColumnUse[] Uses)
         .. Uses.Select(use => new ImportColumn(
             CellText.Harmless(use.Header), use.Field, use.Power == ColumnUse.NoPlainNumbers ? "" : use.Unit, use.Why)),
     ];
-
-    private static ImportOptions OptionsOf(ImportRequest request) => new()
-    {
-        Notation = request.DecimalSign switch
-        {
-            "comma" => NumberNotation.Comma,
-            "point" => NumberNotation.Point,
-            _ => NumberNotation.Unknown,
-        },
-        Currency = request.Currency,
-    };
 }

@@ -7,8 +7,6 @@ namespace PartPick.Catalog.Import;
 /// <summary>Looks at a file as an import would, without a catalogue being changed.</summary>
 public static class ImportPreview
 {
-    private static readonly string[] Further = ["price", "prices", "temperature"];
-
     /// <summary>How many rows are looked at.</summary>
     public const int MostRows = 100;
 
@@ -35,13 +33,13 @@ public static class ImportPreview
 
     /// <summary>The names that a column of a list of some kind can be given.</summary>
     /// <param name="kind">The kind.</param>
-    public static ImmutableArray<string> FieldNames(PartKind kind) => [.. PartShape.Of(kind).Fields.Select(field => field.Key), .. Further];
+    public static ImmutableArray<string> FieldNames(PartKind kind) => [.. ImportFields.Names(kind)];
 
     // The last row of a head that is not the whole text may be cut off.
     private static ImmutableArray<LookedAtRow> RowsOf(ImportPlan plan, ImportRequest request)
     {
         var looked = ImmutableArray.CreateBuilder<LookedAtRow>();
-        var reader = new RowReader(request.Kind, plan.Uses);
+        var builder = new RowBuilder(request.Kind, plan.Uses, request.Supplier);
         var rows = new CsvRows(TextReader.Null, plan.Layout.Delimiter, plan.Layout.Head);
         LookedAtRow? last = null;
         while (looked.Count < MostRows && rows.Read())
@@ -53,7 +51,7 @@ public static class ImportPreview
 
             bool isRow = rows.Line > plan.Layout.HeaderLine
                 && (rows.Fault is not null || rows.Cells.Any(cell => !string.IsNullOrWhiteSpace(cell)));
-            last = isRow ? RowOf(rows, reader, request) : null;
+            last = isRow ? RowOf(rows, builder, plan.Layout.Header.Length) : null;
         }
 
         if (last is not null && plan.Layout.IsWhole && looked.Count < MostRows)
@@ -64,43 +62,34 @@ public static class ImportPreview
         return looked.ToImmutable();
     }
 
-    private static LookedAtRow RowOf(CsvRows rows, RowReader reader, ImportRequest request)
+    private static LookedAtRow RowOf(CsvRows rows, RowBuilder builder, int headerCells)
     {
         ImmutableArray<string> cells = [.. rows.Cells.Select(cell => CellText.Harmless(cell.Length > 200 ? cell[..200] : cell))];
-        if (rows.Fault is { } fault)
+        (Part? part, RowRejection? wrong) = rows.Fault is { } fault
+            ? (null, new RowRejection(rows.Line, null, null, fault))
+            : PartOf(rows, builder, headerCells);
+        return new LookedAtRow(rows.Line, cells, part, wrong);
+    }
+
+    private static (Part? Part, RowRejection? Wrong) PartOf(CsvRows rows, RowBuilder builder, int headerCells)
+    {
+        (RowPart named, RowRejection? unnamed) = builder.Begin(rows.Cells, rows.Line, headerCells);
+        if (unnamed is not null)
         {
-            return new LookedAtRow(rows.Line, cells, null, new RowRejection(rows.Line, null, null, fault));
+            return (null, unnamed);
         }
 
-        (PartDraft? draft, RowRejection? wrong) = reader.Read(rows.Cells, rows.Line);
+        (PartDraft? draft, RowRejection? wrong) = builder.Read(rows.Cells, rows.Line, named);
         if (draft is null)
         {
-            return new LookedAtRow(rows.Line, cells, null, wrong);
-        }
-
-        if (request.Supplier is { } supplier && !draft.Has("supplier"))
-        {
-            draft.Set("supplier", CellText.Harmless(supplier));
-        }
-
-        if (!draft.Has("id") && draft.Text("supplierPart") is { } number)
-        {
-            draft.Set("id", RowCompletion.IdOf(CellText.Harmless(number)));
+            return (null, wrong);
         }
 
         if (!draft.Has("id"))
         {
-            return new LookedAtRow(rows.Line, cells, null, new RowRejection(
-                rows.Line, null, null, "has neither a supplier's number nor an id; fits a row with one of them"));
+            draft.Set("id", RowCompletion.IdOf(named.Number!));
         }
 
-        RowCompletion.Complete(request.Kind, draft);
-        var figures = new DraftReader(draft, key => key);
-        Part? part = PartShape.Of(request.Kind).Build(figures);
-        Problem? problem = part is null ? figures.Problems[0] : null;
-        return new LookedAtRow(
-            rows.Line, cells, part,
-            problem is null ? null : new RowRejection(
-                rows.Line, problem.Where, draft.Text(problem.Where), $"{problem.Where} {problem.What}; fits {problem.Fits}"));
+        return builder.Build(draft, rows.Line);
     }
 }

@@ -1,7 +1,6 @@
 using System.Globalization;
 using PartPick.Catalog.Fields;
 using PartPick.Catalog.Mapping;
-using PartPick.Values;
 
 namespace PartPick.Catalog.Import;
 
@@ -10,24 +9,19 @@ internal sealed class ImportRun : IDisposable
 {
     private readonly CatalogFile _file;
     private readonly ImportRequest _request;
-    private readonly ColumnUse[] _uses;
-    private readonly RowReader _reader;
+    private readonly RowBuilder _builder;
     private readonly RowDigest _digest;
-    private readonly PartShape _shape;
     private readonly PartMerge _merge;
     private readonly KnownParts _known;
     private readonly PartBatches _batches;
-    private readonly RowName _name;
     private readonly int _number;
 
     public ImportRun(CatalogFile file, ImportRequest request, ColumnUse[] uses)
     {
-        (_file, _request, _uses) = (file, request, uses);
-        _shape = PartShape.Of(request.Kind);
-        _reader = new RowReader(request.Kind, uses);
-        _merge = new PartMerge(_shape, _reader.Keys);
+        (_file, _request) = (file, request);
+        _builder = new RowBuilder(request.Kind, uses, request.Supplier);
+        _merge = new PartMerge(_builder.Shape, _builder.Keys);
         _batches = new PartBatches(file);
-        _name = new RowName(uses, request.Supplier);
         _digest = RowDigest.For(request, uses);
         _known = KnownParts.Of(file);
         _number = file.NextImport();
@@ -43,23 +37,13 @@ internal sealed class ImportRun : IDisposable
     public RowRejection? Take(CsvRows rows, int headerCells)
     {
         long line = rows.Line;
-        IReadOnlyList<string> cells = rows.Cells;
-        bool tooMany = cells.Count > headerCells && cells.Skip(headerCells).Any(cell => !string.IsNullOrWhiteSpace(cell));
-        if (tooMany || (_uses[0].Exact && cells.Count != headerCells))
+        (RowPart named, RowRejection? unnamed) = _builder.Begin(rows.Cells, line, headerCells);
+        if (unnamed is not null)
         {
-            return new RowRejection(
-                line,
-                null,
-                null,
-                $"has {CellNumber.Text(cells.Count)} cells, the header {CellNumber.Text(headerCells)}; fits one cell for each column");
+            return unnamed;
         }
 
-        (string? id, string? number, string? supplier) = _name.Of(cells);
-        if (id is null && number is null)
-        {
-            return new RowRejection(line, null, null, "has neither a supplier's number nor an id; fits a row with one of them");
-        }
-
+        (string? id, string? number, string? supplier) = named;
         int known = id is not null ? _known.WithId(id) : _known.WithNumber(_request.Kind, number!, supplier);
         UInt128 digest = _digest.Of(rows.Raw);
         if (known >= 0)
@@ -68,7 +52,7 @@ internal sealed class ImportRun : IDisposable
             if (part.MetOn > 0 && part.Row != digest)
             {
                 return new RowRejection(
-                    line, Header(id is not null ? "id" : "supplierPart"), id ?? number,
+                    line, _builder.Header(id is not null ? "id" : "supplierPart"), id ?? number,
                     string.Create(
                         CultureInfo.InvariantCulture, $"is the part of line {part.MetOn} with other figures; fits one row for each part"));
             }
@@ -82,19 +66,15 @@ internal sealed class ImportRun : IDisposable
 
             if (part.Kind != _request.Kind)
             {
-                return new RowRejection(line, Header("id"), id, $"is the id of one of the {part.Kind.Word()}; fits an id of its own");
+                return new RowRejection(
+                    line, _builder.Header("id"), id, $"is the id of one of the {part.Kind.Word()}; fits an id of its own");
             }
         }
 
-        (PartDraft? draft, RowRejection? wrong) = _reader.Read(cells, line);
+        (PartDraft? draft, RowRejection? wrong) = _builder.Read(rows.Cells, line, named);
         if (draft is null)
         {
             return wrong;
-        }
-
-        if (supplier is not null && !draft.Has("supplier"))
-        {
-            draft.Set("supplier", CellText.Harmless(supplier));
         }
 
         return known < 0
@@ -132,8 +112,7 @@ internal sealed class ImportRun : IDisposable
             draft.Set("id", _known.FreeId(RowCompletion.IdOf(number!), supplier));
         }
 
-        RowCompletion.Complete(_request.Kind, draft);
-        (Part? part, RowRejection? wrong) = Build(draft, line);
+        (Part? part, RowRejection? wrong) = _builder.Build(draft, line);
         if (part is null)
         {
             return wrong;
@@ -144,7 +123,7 @@ internal sealed class ImportRun : IDisposable
         _batches.Add(PartDocument.Write(new StoredPart
         {
             Kind = _request.Kind,
-            Supplied = _shape.DraftOf(part),
+            Supplied = _builder.Shape.DraftOf(part),
             Place = new RowPlace(_number, line),
             Digest = RowDigest.Bytes(digest),
         }));
@@ -156,15 +135,14 @@ internal sealed class ImportRun : IDisposable
         _batches.Wait();
         StoredPart old = _file.FindStored(id) ?? throw new InvalidDataException("A part in it cannot be read.");
         PartDraft merged = _merge.Join(old, draft);
-        RowCompletion.Complete(_request.Kind, merged);
-        (Part? part, RowRejection? wrong) = Build(merged, line);
+        (Part? part, RowRejection? wrong) = _builder.Build(merged, line);
         if (part is null)
         {
             return wrong;
         }
 
         Meet(known, line, digest);
-        PartDraft supplied = _shape.DraftOf(part);
+        PartDraft supplied = _builder.Shape.DraftOf(part);
         if (_merge.IsSame(old, supplied))
         {
             Unchanged++;
@@ -184,20 +162,4 @@ internal sealed class ImportRun : IDisposable
     }
 
     private static uint ShortLine(long line) => (uint)Math.Min(line, uint.MaxValue);
-
-    private (Part? Part, RowRejection? Wrong) Build(PartDraft draft, long line)
-    {
-        var figures = new DraftReader(draft, key => key);
-        if (_shape.Build(figures) is { } part)
-        {
-            return (part, null);
-        }
-
-        Problem problem = figures.Problems.Find(each => Header(each.Where) is not null)
-            ?? figures.Problems.Find(each => each.Where is "frequency" or "value" or "beta") ?? figures.Problems[0];
-        string what = $"{problem.Where} {problem.What}; fits {problem.Fits}";
-        return (null, new RowRejection(line, Header(problem.Where), draft.Text(problem.Where), what));
-    }
-
-    private string? Header(string key) => Array.Find(_uses, use => use.Field == key)?.Header;
 }

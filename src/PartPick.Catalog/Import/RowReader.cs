@@ -92,11 +92,19 @@ internal sealed class RowReader
 
         switch (use.Field)
         {
+            case "price" or "prices" when TradeAnswers.IsOnRequest(cell):
+                return null;
             case "price":
                 return _prices.Take(use, cell, row);
             case "prices":
                 return _prices.TakeList(use, cell);
             case "priceQuantity" or "priceFor":
+                return null;
+            case "stock" when TradeAnswers.Stock(cell) is { } answer:
+                draft.Set("stock", answer.Pieces);
+                return null;
+            case "taps":
+                draft.Set("taps", TapList.Written(cell));
                 return null;
             case "temperature":
                 return ReadRange(cell, draft);
@@ -126,6 +134,12 @@ internal sealed class RowReader
         if (!value.IsOk)
         {
             return Say(value.Problem);
+        }
+
+        // Stock systems write 0 where no least order or multiple is kept.
+        if (value.Value == 0 && use.Field is ("minimumOrder" or "multiple"))
+        {
+            return null;
         }
 
         draft.Set(field.Key, value.Value);

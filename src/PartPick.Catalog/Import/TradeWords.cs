@@ -61,7 +61,8 @@ internal sealed record TradeWords(string Field, IReadOnlyList<(TradePhrase Phras
         }
     }
 
-    private static List<(string Section, string Field, string[] Phrases)> Lines()
+    /// <summary>The lines of all lists of words.</summary>
+    internal static List<(string Section, string Field, string[] Phrases)> Lines()
     {
         var lines = new List<(string, string, string[])>();
         foreach (string name in typeof(TradeWords).Assembly.GetManifestResourceNames().Order(StringComparer.Ordinal)

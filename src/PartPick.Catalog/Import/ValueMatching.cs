@@ -29,6 +29,11 @@ internal sealed class ValueMatching(PartKind kind, ColumnSample sample, NumberNo
             Take(uses, "prices", use => sample.Cells(use.Index).All(cell => PriceCells.List(cell, file) is { Count: > 1 }));
         }
 
+        if (ImportFields.HasStages(kind))
+        {
+            Take(uses, "stages", use => sample.Cells(use.Index).All(cell => cell.Length > 3 && ImportFields.Stages(cell) is not null));
+        }
+
         if (!uses.Any(use => use.Field is "id" or "supplierPart"))
         {
             ColumnUse? code = uses.FirstOrDefault(use => IsOpen(use) && sample.IsCode(use.Index));
@@ -61,6 +66,7 @@ internal sealed class ValueMatching(PartKind kind, ColumnSample sample, NumberNo
                 Power = ColumnUse.NoPlainNumbers,
                 Notation = file,
                 Why = field is "temperature" ? "its cells: temperature ranges"
+                    : field is "stages" ? "its cells: buffered or not"
                     : field is "prices" ? "its cells: lists of prices" : "the unit of its cells",
             };
         }

@@ -1,4 +1,5 @@
 using System.Numerics;
+using System.Runtime.Intrinsics;
 
 namespace PartPick.Physics.Steady;
 
@@ -22,10 +23,14 @@ internal sealed class SaturatedSine
     private const double Saturation = 13;
     private const double CoarseSaturation = 11;
     private const double EdgeReserve = 1.3;
+    private const double LargestExponent = 700;
+    private static readonly int Lanes = Vector256<double>.Count;
     private readonly double _steepness;
     private readonly Complex[] _moments;
     private readonly Complex[] _harmonics;
     private double[] _values = [];
+    private double[] _real = [];
+    private double[] _imaginary = [];
     private Complex[] _roots = [];
     private int _first;
     private int _edge;
@@ -173,37 +178,95 @@ internal sealed class SaturatedSine
         int half = Math.Min(count / 2, EdgeSteps(coarse ? CoarseSaturation : Saturation, count));
         _first = (int)Math.Round(_crossing * count / Math.PI) - half;
         _edge = 2 * half;
-        if (_values.Length < _edge)
+        double scale = 2.0 / count;
+        SumEdge(scale);
+        for (int k = 0; k < _harmonics.Length; k++)
         {
-            _values = new double[_edge];
+            _harmonics[k] += scale * Flat(2 * k + 1);
+        }
+    }
+
+    // The sums over the edge, four steps at a time; those beyond it count nothing.
+    private void SumEdge(double scale)
+    {
+        int padded = (_edge + Lanes - 1) / Lanes * Lanes;
+        if (_values.Length < padded)
+        {
+            _values = new double[padded];
+            _real = new double[padded];
+            _imaginary = new double[padded];
         }
 
-        Array.Clear(_moments);
-        Array.Clear(_harmonics);
-        double scale = 2.0 / count;
-        for (int j = 0; j < _edge; j++)
+        UnitRoots.Copy(_roots, _first, _real.AsSpan(0, padded), _imaginary.AsSpan(0, padded));
+        Span<Vector256<double>> moments = stackalloc Vector256<double>[2 * _moments.Length];
+        Span<Vector256<double>> harmonics = stackalloc Vector256<double>[2 * _harmonics.Length];
+        moments.Clear();
+        harmonics.Clear();
+        var within = Vector256.Create(scale);
+        for (int j = 0; j < padded; j += Lanes)
         {
-            Complex root = UnitRoots.Power(_roots, _first + j);
-            double value = Math.Tanh(_steepness * Evaluate(Input, Complex.Conjugate(root), out _));
-            _values[j] = value;
-            double slope = _steepness * (1 - value * value);
-            Complex turn = root * root;
-            Complex power = scale;
-            for (int k = 0; k < _moments.Length; k++)
+            if (j + Lanes > _edge)
             {
-                _moments[k] += slope * power;
-                if (k < _harmonics.Length)
-                {
-                    _harmonics[k] += value * (power * root);
-                }
-
-                power *= turn;
+                within = Vector256.ConditionalSelect(
+                    Vector256.LessThan(Vector256.Create(0.0, 1, 2, 3), Vector256.Create((double)(_edge - j))), within, default);
             }
+
+            AddSteps(Vector256.Create(_real, j), Vector256.Create(_imaginary, j), within, j, moments, harmonics);
+        }
+
+        for (int k = 0; k < _moments.Length; k++)
+        {
+            _moments[k] = new Complex(Vector256.Sum(moments[2 * k]), Vector256.Sum(moments[2 * k + 1]));
         }
 
         for (int k = 0; k < _harmonics.Length; k++)
         {
-            _harmonics[k] += scale * Flat(2 * k + 1);
+            _harmonics[k] = new Complex(Vector256.Sum(harmonics[2 * k]), Vector256.Sum(harmonics[2 * k + 1]));
+        }
+    }
+
+    private void AddSteps(
+        Vector256<double> real,
+        Vector256<double> imaginary,
+        Vector256<double> weight,
+        int place,
+        Span<Vector256<double>> moments,
+        Span<Vector256<double>> harmonics)
+    {
+        Vector256<double> turnReal = real * real - imaginary * imaginary;
+        Vector256<double> turnImaginary = 2 * real * imaginary;
+
+        // The input is that at the conjugate root.
+        Vector256<double> powerReal = real;
+        Vector256<double> powerImaginary = imaginary;
+        Vector256<double> volts = Vector256<double>.Zero;
+        foreach (Complex harmonic in Input)
+        {
+            volts += harmonic.Real * powerReal + harmonic.Imaginary * powerImaginary;
+            (powerReal, powerImaginary) = (
+                powerReal * turnReal - powerImaginary * turnImaginary, powerReal * turnImaginary + powerImaginary * turnReal);
+        }
+
+        // tanh x = 1 − 2/(1 + e^2x), to an absolute rounding of one.
+        Vector256<double> twice = Vector256.Min(Vector256.Create(LargestExponent), 2 * _steepness * volts);
+        Vector256<double> value = Vector256<double>.One - Vector256.Create(2.0) / (Vector256<double>.One + Vector256.Exp(twice));
+        value.CopyTo(_values, place);
+        Vector256<double> slope = _steepness * (Vector256<double>.One - value * value) * weight;
+        Vector256<double> height = value * weight;
+        powerReal = Vector256<double>.One;
+        powerImaginary = Vector256<double>.Zero;
+        for (int k = 0; k < _moments.Length; k++)
+        {
+            moments[2 * k] += slope * powerReal;
+            moments[2 * k + 1] += slope * powerImaginary;
+            if (k < _harmonics.Length)
+            {
+                harmonics[2 * k] += height * (powerReal * real - powerImaginary * imaginary);
+                harmonics[2 * k + 1] += height * (powerReal * imaginary + powerImaginary * real);
+            }
+
+            (powerReal, powerImaginary) = (
+                powerReal * turnReal - powerImaginary * turnImaginary, powerReal * turnImaginary + powerImaginary * turnReal);
         }
     }
 

@@ -26,6 +26,19 @@ internal static class UnitRoots
         return (turns & 1) == 0 ? table[place] : -table[place];
     }
 
+    /// <summary>Powers of a table's second entry from the k-th on, by real and imaginary part.</summary>
+    public static void Copy(Complex[] table, int k, Span<double> real, Span<double> imaginary)
+    {
+        int place = k % (2 * table.Length);
+        place = place < 0 ? place + 2 * table.Length : place;
+        for (int j = 0; j < real.Length; j++)
+        {
+            Complex root = place < table.Length ? table[place] : -table[place - table.Length];
+            (real[j], imaginary[j]) = (root.Real, root.Imaginary);
+            place = place + 1 == 2 * table.Length ? 0 : place + 1;
+        }
+    }
+
     private static Complex[] Table(int points) =>
         [.. Enumerable.Range(0, points).Select(k => Complex.FromPolarCoordinates(1, -Math.PI * k / points))];
 }

@@ -26,8 +26,8 @@ public sealed record CandidateChange
     /// <summary>Change of the longest start-up time in seconds; null where one of the two is not known.</summary>
     public required double? StartUpSeconds { get; init; }
 
-    /// <summary>Change of the cost per unit, in the catalogue's currency.</summary>
-    public required decimal Cost { get; init; }
+    /// <summary>Change of the cost per unit, in the catalogue's currency; null where one of the two is in several.</summary>
+    public required decimal? Cost { get; init; }
 
     /// <summary>How much changes: zero or more, 1 where a figure moved by all that it had left.</summary>
     public required double Size { get; init; }
@@ -58,7 +58,12 @@ public sealed record CandidateChange
             sizes.Add(Moved(ChangedFigure.StartUpTime, from.StartUpTime?.Value / time, to.StartUpTime?.Value / time));
         }
 
-        if (requirement.CostLimit is { } limit and > 0)
+        bool priced = from.IsInOneCurrency && to.IsInOneCurrency;
+        if (!priced)
+        {
+            // There is no sum of different currencies.
+        }
+        else if (requirement.CostLimit is { } limit and > 0)
         {
             sizes.Add(Moved(ChangedFigure.Cost, (double)(from.Cost / limit), (double)(to.Cost / limit)));
         }
@@ -75,7 +80,7 @@ public sealed record CandidateChange
             Margin = to.Margin.Value - from.Margin.Value,
             DriveWatts = to.Drive?.Value - from.Drive?.Value,
             StartUpSeconds = to.StartUpTime?.Value - from.StartUpTime?.Value,
-            Cost = to.Cost - from.Cost,
+            Cost = priced ? to.Cost - from.Cost : null,
             Size = size,
             Most = most,
         };

@@ -21,6 +21,9 @@ public sealed record Candidate
     /// <summary>All parts on the board, in the order of their designators.</summary>
     public required ImmutableArray<PartUse> Parts { get; init; }
 
+    /// <summary>Whether every price is in its currency, so that its cost is a sum.</summary>
+    public bool IsInOneCurrency => Parts.All(use => !use.Part.Offer.HasPrices || use.Part.Offer.Currency == Currency);
+
     /// <summary>The nominal circuit: the mid supply, 25 °C, typical device, nominal values.</summary>
     public required OscillatorCircuit Nominal { get; init; }
 

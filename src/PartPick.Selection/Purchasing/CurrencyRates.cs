@@ -60,7 +60,7 @@ public sealed record CurrencyRates(string? Currency, ImmutableSortedDictionary<s
 
     private static Result<string> Mixed(IGrouping<string, (string Row, Part Part)>[] groups, string currency)
     {
-        string rows = string.Join("; ", groups.Select(group =>
+        string rows = string.Join("; ", groups.OrderBy(group => group.Count()).Select(group =>
             $"{group.Key}: {string.Join(", ", group.Take(5).Select(row => row.Row))}{(group.Count() > 5 ? " and others" : "")}"));
         string foreign = groups.Select(group => group.Key).FirstOrDefault(key => key != currency, currency);
         return Result.Fail<string>(

@@ -21,7 +21,7 @@ public sealed class PurchaseListBuilder(PartsCatalog catalog, PurchaseOptions op
         Result<string> currency = options.Rates.Settle(
         [
             .. needs.Where(need => IsThere(need.Part))
-                .Select(need => ($"{need.Part.Id} ({string.Join(", ", need.Uses.SelectMany(use => use.Designators))})", need.Part)),
+                .Select(need => ($"{need.Part.Id} ({References(need, circuits.Length == 1)})", need.Part)),
         ]);
         if (!currency.IsOk)
         {
@@ -103,6 +103,10 @@ public sealed class PurchaseListBuilder(PartsCatalog catalog, PurchaseOptions op
             IsGone = group.All(need => !IsThere(need.Part)),
         };
     }
+
+    private static string References(Need need, bool one) => one
+        ? string.Join(", ", need.Uses.SelectMany(use => use.Designators))
+        : string.Join("; ", need.Uses.Select(use => $"{use.Circuit}: {string.Join(' ', use.Designators)}"));
 
     private int RequiredOf(ImmutableArray<Need> group) =>
         (int)options.Attrition.Required(group[0].Part.Kind, group.Sum(need => need.Count));

@@ -31,7 +31,7 @@ public sealed class CostCurve
     /// <param name="builds">Number of boards, from 1 to <see cref="Most"/>.</param>
     public decimal UnitCost(int builds) => _costs[builds];
 
-    /// <summary>The curve of a circuit; null where a part of it has no price.</summary>
+    /// <summary>The curve of a circuit; null where a part of it has no price, or one in another currency.</summary>
     /// <param name="board">Its parts.</param>
     /// <param name="most">Largest number of boards, one or more.</param>
     public static CostCurve? Of(BoardParts board, int most)
@@ -39,7 +39,8 @@ public sealed class CostCurve
         ArgumentNullException.ThrowIfNull(board);
         ArgumentOutOfRangeException.ThrowIfLessThan(most, 1);
         List<(Part Part, int Count)> counts = BillOfParts.Counts(board.Choice, board.Support);
-        if (!counts.TrueForAll(entry => entry.Part.Offer.HasPrices))
+        if (!counts.TrueForAll(entry => entry.Part.Offer.HasPrices)
+            || counts.Select(entry => entry.Part.Offer.Currency).Distinct().Skip(1).Any())
         {
             return null;
         }

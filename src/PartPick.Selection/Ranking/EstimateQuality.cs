@@ -14,9 +14,14 @@ namespace PartPick.Selection.Search;
 /// <param name="SlopeShare">Least slopes of the frequency by the capacitances, over those of the first order.</param>
 internal readonly record struct EstimateQuality(double PullShare, double PerHarmonic, double Ratio, double DriveShare, double SlopeShare)
 {
-    private static readonly EstimateQuality Follower = new(0.002, 0, 0.5e-6, 0.02, 0.95);
+    // With so small a third harmonic the few harmonics of an estimate leave next to nothing, or little.
+    private const double Sinusoidal = 0.012;
+    private const double SinusoidalShare = 0.001;
+    private const double NearlySinusoidal = 0.02;
+    private const double NearlySinusoidalShare = 0.006;
+    private static readonly EstimateQuality Follower = new(0.001, 0, 0.5e-6, 0.02, 0.95);
     private static readonly EstimateQuality OneStage = new(0.012, 0, 0.3e-6, 0.08, 0.86);
-    private static readonly EstimateQuality Buffered = new(0.01, 0.8, 1e-6, 0.3, 0.75);
+    private static readonly EstimateQuality Buffered = new(0.005, 1.7, 1e-6, 0.3, 0.75);
 
     /// <summary>The quality of an amplifier's estimates.</summary>
     public static EstimateQuality Of(Part amplifier) => amplifier switch
@@ -31,5 +36,10 @@ internal readonly record struct EstimateQuality(double PullShare, double PerHarm
     /// <param name="hertz">The estimate.</param>
     /// <param name="harmonicShare">The estimate's harmonics.</param>
     public double ErrorRatio(Crystal crystal, double hertz, double harmonicShare) =>
-        (PullShare + PerHarmonic * harmonicShare) * Math.Abs(hertz / crystal.SeriesHz - 1) + Ratio;
+        Share(harmonicShare) * Math.Abs(hertz / crystal.SeriesHz - 1) + Ratio;
+
+    private double Share(double harmonicShare) =>
+        PerHarmonic == 0 || harmonicShare >= NearlySinusoidal ? PullShare + PerHarmonic * harmonicShare
+        : harmonicShare >= Sinusoidal ? NearlySinusoidalShare
+        : SinusoidalShare;
 }

@@ -10,6 +10,9 @@ internal sealed record FitPoint(double ErrorRatio, double Margin, decimal Cost, 
     /// <summary>The identifier, which breaks ties.</summary>
     public string Id { get; } = CandidateId.Of(Choice);
 
+    /// <summary>The cost as a binary number, for quick comparisons.</summary>
+    public double CostNumber { get; } = (double)Cost;
+
     /// <summary>Whether this one beats or equals the other's figures with one strictly better.</summary>
     public bool Dominates(double errorRatio, double margin, decimal cost) =>
         ErrorRatio <= errorRatio && Margin >= margin && Cost <= cost

@@ -7,6 +7,8 @@ namespace PartPick.Selection.Search;
 internal sealed class Front
 {
     private readonly Lock _gate = new();
+
+    // In order of the error: only those before a point can dominate it.
     private FitPoint[] _points = [];
 
     /// <summary>The points so far.</summary>
@@ -22,7 +24,13 @@ internal sealed class Front
                 return;
             }
 
-            Volatile.Write(ref _points, [.. _points.Where(other => !point.Dominates(other.ErrorRatio, other.Margin, other.Cost)), point]);
+            Volatile.Write(ref _points,
+            [
+                .. _points.TakeWhile(other => other.ErrorRatio < point.ErrorRatio),
+                point,
+                .. _points.SkipWhile(other => other.ErrorRatio < point.ErrorRatio)
+                    .Where(other => !point.Dominates(other.ErrorRatio, other.Margin, other.Cost)),
+            ]);
         }
     }
 
@@ -31,6 +39,11 @@ internal sealed class Front
     {
         foreach (FitPoint point in Volatile.Read(ref _points))
         {
+            if (point.ErrorRatio > errorRatio)
+            {
+                return false;
+            }
+
             if (point.Dominates(errorRatio, margin, cost))
             {
                 return true;

@@ -24,7 +24,7 @@ internal readonly record struct GridFineness(
     double SlopeShare,
     double AcrossShare)
 {
-    private static readonly GridFineness Follower = new(6, 0.03, 0.6, 0.6, 1.15, 0, 0.88, 0.4);
+    private static readonly GridFineness Follower = new(6, 0.035, 0.6, 0.6, 1.4, 0, 0.88, 0.4);
     private static readonly GridFineness OneStage = new(3, 0.01, 0.25, 0.22, 1.25, 0, 0.8, 0.3);
     private static readonly GridFineness Buffered = new(3, 0.015, 0.6, 0.75, 1.1, 0.3, 0.68, 0.6);
 

@@ -12,7 +12,9 @@ internal sealed class Leaders
     private readonly decimal _floor;
     private readonly Lock _gate = new();
     private readonly Dictionary<FamilyMember, List<FitPoint>> _points = [];
+    private readonly double _perFloor;
     private decimal? _cheapest;
+    private double _perCheapest;
     private (double AtCheapest, double AtFloor)? _threshold;
 
     /// <param name="requirement">What is needed.</param>
@@ -23,6 +25,7 @@ internal sealed class Leaders
         _requirement = requirement;
         _listed = listed;
         _floor = floor;
+        _perFloor = PerCost(floor);
     }
 
     /// <summary>Cheapest fit cost so far; null before the first fit combination.</summary>
@@ -55,6 +58,7 @@ internal sealed class Leaders
             points.RemoveAll(other => point.Dominates(other.ErrorRatio, other.Margin, other.Cost));
             points.Add(point);
             _cheapest = _cheapest is { } cheapest ? Math.Min(cheapest, point.Cost) : point.Cost;
+            _perCheapest = PerCost(_cheapest.Value);
             _threshold = null;
         }
     }
@@ -69,13 +73,13 @@ internal sealed class Leaders
                 return true;
             }
 
-            (double AtCheapest, double AtFloor) least = Both(errorRatio, margin, cost, cheapest);
+            (double AtCheapest, double AtFloor) least = Both(errorRatio, margin, (double)cost);
             least = (least.AtCheapest - Tie, least.AtFloor - Tie);
             if (_points.TryGetValue(member, out List<FitPoint>? points))
             {
                 foreach (FitPoint point in points)
                 {
-                    (double atCheapest, double atFloor) = Both(point.ErrorRatio, point.Margin, point.Cost, cheapest);
+                    (double atCheapest, double atFloor) = Both(point.ErrorRatio, point.Margin, point.CostNumber);
                     if (atCheapest < least.AtCheapest && atFloor < least.AtFloor)
                     {
                         return false;
@@ -119,15 +123,16 @@ internal sealed class Leaders
     }
 
     // The scores at both bounds of the cheapest cost; in binary numbers, which are many times quicker and exact to far less than a tie.
-    private (double AtCheapest, double AtFloor) Both(double errorRatio, double margin, decimal cost, decimal cheapest)
+    private (double AtCheapest, double AtFloor) Both(double errorRatio, double margin, double cost)
     {
         double common = _requirement.Weights.Error * errorRatio / _requirement.BudgetRatio
             + _requirement.Weights.Margin * _requirement.Margin / margin;
-        return (common + OfCost(cost, cheapest), common + OfCost(cost, _floor));
+        double free = _cheapest > 0 ? 0 : _requirement.Weights.Cost;
+        return (common + free + _perCheapest * cost, common + _perFloor * cost);
     }
 
-    private double OfCost(decimal cost, decimal scale) =>
-        _requirement.Weights.Cost * (scale > 0 ? (double)cost / (double)scale : 1 + (double)cost);
+    // Where the cheapest costs nothing, a score counts each cost as one more than itself.
+    private double PerCost(decimal scale) => scale > 0 ? _requirement.Weights.Cost / (double)scale : _requirement.Weights.Cost;
 
     private double Of(FitPoint point, decimal cheapest) =>
         Score.Of(_requirement, point.ErrorRatio, point.Margin, point.Cost, cheapest);

@@ -41,7 +41,8 @@ internal readonly struct LeastTerms
     /// <param name="values">Nominal values.</param>
     /// <param name="slopes">∂f/f by C1, C2 and the stray across, per farad.</param>
     /// <param name="share">Least true slopes over these.</param>
-    public static LeastTerms OfSlopes(Board board, bool gate, in CircuitValues values, (double C1, double C2, double Across) slopes, double share) => Of(
+    public static LeastTerms OfSlopes(
+        Board board, bool gate, in CircuitValues values, (double C1, double C2, double Across) slopes, double share) => Of(
         board,
         gate,
         values,

@@ -23,7 +23,7 @@ internal static class OtherQuantities
     {
         Requirement requirement = circuit.Review.Requirement;
         CostCurve curve = CostCurve.Of(circuit.Chosen.Board, MostBuilds) ?? throw new CommandFailure(
-            new Problem("--builds", "a part of the circuit has no price", "a candidate whose parts all have one"), ExitStatus.WrongInput);
+            new Problem("--builds", "a part of the circuit has no price, or one in another currency", "a candidate whose parts all have one"), ExitStatus.WrongInput);
         QuantityChoice? choice = wish.ChosenOnly
             ? null
             : RankingProgress.Over(context.Surroundings, wish.Quiet, progress => QuantitySearch.Find(
@@ -33,7 +33,7 @@ internal static class OtherQuantities
                 new QuantityOptions { Most = MostBuilds },
                 progress,
                 context.Surroundings.Cancellation));
-        ImmutableArray<int> rows = wish.Builds.IsEmpty ? UsualRows(requirement.Builds) : wish.Builds;
+        ImmutableArray<int> rows = wish.Builds.IsEmpty ? QuantityView.UsualRows(requirement.Builds, MostBuilds) : wish.Builds;
         bool ascii = !Screens.TerminalTraits.Of(context.Surroundings.Environment).IsUtf8;
         var view = new QuantityView(wish.List, circuit.Review, circuit.Chosen, curve, choice, rows, ascii);
         switch (context.FormatOf(parsed))
@@ -51,10 +51,4 @@ internal static class OtherQuantities
 
         return ExitStatus.Done;
     }
-
-    private static ImmutableArray<int> UsualRows(int builds) =>
-    [
-        .. new[] { 1, 2, 5, 10, 20, 50, 100, 200, 500, 1000, 2000, 5000, MostBuilds }
-            .Append(Math.Min(builds, MostBuilds)).Distinct().Order(),
-    ];
 }

@@ -66,7 +66,9 @@ internal static class ShortlistExportCommand
                 parsed.GetValue(bom));
             PurchaseOptions options = purchase.Read(parsed);
             string? path = parsed.GetValue(to);
-            ExportForm chosen = ExportForms.Named(parsed.GetValue(form)) ?? ExportForms.OfFile(path ?? "") ?? ExportForm.Csv;
+            ExportForm chosen = ExportForms.Named(parsed.GetValue(form))
+                ?? CommandFailure.Unless(ShortlistExport.Form(
+                    new ExportTarget(path ?? "", false, to.Name, context.CatalogPath(parsed))));
             PartsCatalog catalog = context.LoadCatalog(parsed);
             var view = ShortlistView.Of(ShortlistListCommand.Load(context, parsed, list)[0], new ShortlistReviewer(catalog));
             if (Counts.Read(parsed.GetValue(alternates), alternates.Name) is { } most)

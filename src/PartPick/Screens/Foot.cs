@@ -27,9 +27,12 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
         {
             { Notice: { } notice } => [new LineBuilder(glyphs).Add(" ").Column(notice, width - 1, Tone.Accent).Build()],
             { ShowsKeys: true } => [Keys((UpDown, "scroll"), ("Esc", "back"))],
+            { Shortlists.Page.Replacements: not null } => [Keys(
+                (UpDown, "choose"), (glyphs.Left + " " + glyphs.Right, "other parts"), ("Esc", "the list"), ("?", "keys"))],
+            { Shortlists.Page.Quantity: not null } => [Keys((UpDown, "scroll"), ("Esc", "the list"), ("?", "keys"))],
             { Shortlists.IsOpen: true } => [Keys(
-                (UpDown, "choose"), (glyphs.Left + " " + glyphs.Right, "lists"), ("x", "write to a file"), ("Del", "take off"),
-                ("Esc", "back"))],
+                (glyphs.Left + " " + glyphs.Right, "lists"), ("Del", "take off"), ("x", "to a file"), ("r", "replacements"),
+                ("b", "cost over boards"), ("Esc", "back"))],
             { Place: Place.Sentence, Wanted.Typed: not null } => [Value(("Enter", "keep"), ("Esc", "as it was"))],
             { Place: Place.Sentence } => [Value(("Tab", "next"), ("Esc", model.IsReading ? "circuit" : "list"))],
             { Place: Place.Circuit } => [Keys(

@@ -50,6 +50,9 @@ public static class KeysPage
         Head("In a list");
         Key($"{glyphs.Up} {glyphs.Down}", "the candidate before, the next one; PgUp and PgDn scroll what is said about it");
         Key($"{glyphs.Left} {glyphs.Right}", "the list before, the next one");
+        Key("r", "what may replace each part of the candidate, the one that changes least first; " +
+            $"{glyphs.Left} {glyphs.Right} go to its other parts");
+        Key("b", "its cost over 1 to 10 000 boards, where it turns, and the best candidate for each number");
         Key("x", "write it to a file: .csv and .md to order from, .html to print");
         Key("Del Del", "take the candidate off");
         Key("Esc", "back");

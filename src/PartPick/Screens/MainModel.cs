@@ -70,7 +70,7 @@ public sealed class MainModel
     public CandidateList List { get; } = new();
 
     /// <summary>The lists of candidates.</summary>
-    internal ShortlistModel Shortlists { get; private set; } = new(null);
+    internal ShortlistModel Shortlists { get; private set; } = new();
 
     /// <summary>Where the keys go.</summary>
     public Place Place { get; private set; }
@@ -102,8 +102,12 @@ public sealed class MainModel
     /// <summary>Whether the program is to end.</summary>
     public bool IsDone { get; private set; }
 
-    /// <summary>Ends the ranking.</summary>
-    public void Stop() => _ranking.Stop();
+    /// <summary>Ends the ranking, and what is being looked for.</summary>
+    public void Stop()
+    {
+        _ranking.Stop();
+        Shortlists.Stop();
+    }
 
     /// <summary>Ranks again, as after the parts have changed.</summary>
     public void RankAgain() => Rank(false);
@@ -165,7 +169,12 @@ public sealed class MainModel
 
     /// <summary>Lets circuits be put on lists; without it there are none.</summary>
     /// <param name="desk">Where the lists are kept.</param>
-    public void KeepListsAt(IShortlistDesk desk) => Shortlists = new ShortlistModel(desk);
+    /// <param name="work">Does what takes long.</param>
+    public void KeepListsAt(IShortlistDesk desk, ScreenWork work)
+    {
+        Shortlists = new ShortlistModel(desk, work, _glyphs.IsAscii);
+        Shortlists.Redraw += () => Redraw?.Invoke();
+    }
 
     /// <summary>The screen as lines, each as wide as the screen.</summary>
     /// <param name="width">Width in cells.</param>

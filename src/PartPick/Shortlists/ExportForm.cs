@@ -1,3 +1,5 @@
+using PartPick.Values;
+
 namespace PartPick.Shortlists;
 
 /// <summary>The forms in which a list leaves the program.</summary>
@@ -28,6 +30,14 @@ public static class ExportForms
     /// <summary>The form of a word; null for another word.</summary>
     /// <param name="word">The word.</param>
     public static ExportForm? Named(string? word) => Array.IndexOf(Words, word) is >= 0 and int at ? (ExportForm)at : null;
+
+    /// <summary>The form that the name of a file asks for by its ending: CSV without an ending, a problem where it is another one.</summary>
+    /// <param name="path">The path of the file.</param>
+    /// <param name="where">The option or field that names the file, for the problem.</param>
+    public static Result<ExportForm> Asked(string path, string where) => OfFile(path) is { } form ? Result.Ok(form)
+        : Path.GetExtension(path).Length == 0 ? Result.Ok(ExportForm.Csv)
+        : Result.Fail<ExportForm>(
+            where, $"{Problem.Quote(Path.GetExtension(path))} is the ending of no form", "a name with .csv, .md, .html, .json or .txt");
 
     /// <summary>The form that the name of a file asks for by its ending; null where it asks for none.</summary>
     /// <param name="path">The path of the file.</param>

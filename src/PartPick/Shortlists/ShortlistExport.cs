@@ -57,10 +57,18 @@ internal static class ShortlistExport
     public static Problem? Save(ExportTarget target, string text, bool mark)
     {
         byte[] bytes = [.. mark ? Encoding.UTF8.Preamble : [], .. new UTF8Encoding(false).GetBytes(text)];
-        return IsPath(target.Path) && Path.GetFullPath(target.Path) == Path.GetFullPath(target.Catalog)
-            ? new Problem(target.Where, "is the catalogue itself", "another file")
-            : WholeFile.Write(target.Path, bytes, target.Replaces, target.Where);
+        return Catalogue(target) ?? WholeFile.Write(target.Path, bytes, target.Replaces, target.Where);
     }
+
+    /// <summary>The form that the name of a file asks for.</summary>
+    /// <param name="target">The file.</param>
+    public static Result<ExportForm> Form(ExportTarget target) =>
+        Catalogue(target) is { } problem ? Result.Fail<ExportForm>(problem) : ExportForms.Asked(target.Path, target.Where);
+
+    private static Problem? Catalogue(ExportTarget target) =>
+        IsPath(target.Path) && Path.GetFullPath(target.Path) == Path.GetFullPath(target.Catalog)
+            ? new Problem(target.Where, "is the catalogue itself", "another file")
+            : null;
 
     private static bool IsPath(string path) => !string.IsNullOrWhiteSpace(path) && !path.Contains('\0', StringComparison.Ordinal);
 }

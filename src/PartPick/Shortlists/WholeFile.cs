@@ -55,7 +55,9 @@ internal static class WholeFile
         catch (Exception error) when (error is IOException or UnauthorizedAccessException or ArgumentException or NotSupportedException)
         {
             Remove(unfinished);
-            string why = error is DirectoryNotFoundException ? "its directory is not there" : error.Message;
+            string why = error is DirectoryNotFoundException ? "its directory is not there"
+                : error is UnauthorizedAccessException ? "no permission"
+                : error.Message.Replace(Path.GetFullPath(unfinished), path, StringComparison.Ordinal).TrimEnd('.');
             return new Problem(where, $"{Problem.Quote(path)} cannot be written: {why}", "a file in a directory that can be written to");
         }
     }

@@ -43,6 +43,19 @@ public sealed class ImportPreviewTests : IDisposable
     }
 
     [Fact]
+    public void A_row_with_more_cells_than_the_header_is_refused_as_its_import_refuses_it()
+    {
+        byte[] list = Encoding.UTF8.GetBytes("Part No;Freq\nA-1;4 MHz\nA-2;8 MHz;12\nA-3;10 MHz;\n");
+        ImportLook look = ImportPreview.Look(CatalogFile, new MemoryStream(list), Request()).Value;
+        ImportReport report = CatalogImport.Run(
+            CatalogFile, new MemoryStream(list), Request(), null, TestContext.Current.CancellationToken).Value;
+
+        RowRejection rejected = Assert.Single(report.Rejections);
+        Assert.Equal(3, rejected.Line);
+        Assert.Equal(rejected, Assert.Single(look.Rows, row => row.Part is null).Rejection);
+    }
+
+    [Fact]
     public void A_stated_column_changes_what_is_read()
     {
         ImportLook look = Look(Request() with { Columns = ["CL (pF)=shunt:pF", "Remark=note"] });

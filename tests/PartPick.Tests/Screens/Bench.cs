@@ -48,6 +48,9 @@ internal sealed class Bench : IDisposable
 
     public string[] Rows => [.. Text.TrimEnd('\r', '\n').Split('\n').Select(row => row.TrimEnd())];
 
+    /// <summary>Keeps lists of candidates in a catalogue.</summary>
+    public void KeepLists(string catalogue) => Model.KeepListsAt(new CatalogDesk(catalogue), _work);
+
     public void Press(params Key[] keys)
     {
         foreach (Key key in keys)
@@ -91,6 +94,7 @@ internal sealed class Bench : IDisposable
 
     public void Dispose()
     {
+        Model.Stop();
         Model.Parts?.Stop();
         _live.Dispose();
         _screen.Dispose();

@@ -173,7 +173,7 @@ public sealed class ShortlistScreenTests
     private Bench Open(int width = 80, int height = 24)
     {
         var bench = new Bench(width, height);
-        bench.Model.KeepListsAt(new CatalogDesk(_db));
+        bench.KeepLists(_db);
         return bench;
     }
 

@@ -150,6 +150,15 @@ public sealed class ShortlistExportTests
 
         // The list says that its cost cannot be had, not a sum of two currencies.
         Assert.Equal(JsonValueKind.Null, bench.List().GetProperty("candidates")[0].GetProperty("now").GetProperty("cost").ValueKind);
+        Assert.Contains(
+            "in another currency",
+            bench.Of("shortlist", "alternates", "logger", "1", "--builds", "--chosen-only").WrongLine(),
+            StringComparison.Ordinal);
+        JsonElement alternates = bench.Of("shortlist", "alternates", "logger", "1", "--part", "C1", "--format", "json").Json;
+        JsonElement first = alternates[0].GetProperty("parts")[0].GetProperty("replacements")[0];
+        Assert.Equal(JsonValueKind.Null, first.GetProperty("change").GetProperty("cost").ValueKind);
+        string table = bench.Of("shortlist", "alternates", "logger", "1", "--part", "C1").Output;
+        Assert.Contains("priced in more than one currency", table, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -198,6 +207,7 @@ public sealed class ShortlistExportTests
             (["logger", "--rate", "EUR=1"], "none is its own"),
             (["logger", "--currency", "USD"], "--rate EUR"),
             (["logger", "--currency", " "], "is empty"),
+            (["logger", "--to", "order.pdf"], "ending of no form"),
             (["logger", "--to", ""], "is no path"),
             (["logger", "--to", "/dev/null", "--force"], "is a device"),
             (["logger", "--to", bench.Catalog, "--force"], "is the catalogue itself"),

@@ -64,7 +64,7 @@ internal static class AlternatesJson
         ["startUpMargin"] = double.IsFinite(candidate.Margin.Value) ? candidate.Margin.Value : null,
         ["driveLevel"] = candidate.Drive?.Value,
         ["startUpTime"] = candidate.StartUpTime?.Value,
-        ["cost"] = candidate.Cost,
+        ["cost"] = candidate.IsInOneCurrency ? candidate.Cost : null,
         ["currency"] = candidate.Currency,
     };
 }

@@ -37,16 +37,9 @@ internal static class AlternatesTable
             $"{string.Join(", ", found.Line.Designators)}, {string.Join(" and ", found.Line.Roles)}, {part.Id}: "
             + $"{Figures.Whole(found.Replacements.Length)} of {Figures.Whole(found.Considered)} others keep the circuit fit; "
             + $"{Figures.Whole(found.Analysed)} analysed.");
-        string[] leftOut = [.. found.LeftOut.Select(pair => $"{Figures.Whole(pair.Value)} {LeftOutWords.Words(pair.Key)}")];
-        string[] unfit = [.. found.Unfit.Select(pair => $"{Figures.Whole(pair.Value)} {LimitWords.Words(pair.Key)}")];
-        if (leftOut.Length > 0)
+        foreach (string words in LeftOutWords.Lines(found))
         {
-            output.WriteLine($"  Left out: {string.Join(", ", leftOut)}.");
-        }
-
-        if (unfit.Length > 0)
-        {
-            output.WriteLine($"  Break a limit: {string.Join(", ", unfit)}.");
+            output.WriteLine("  " + words);
         }
 
         if (found.Replacements.IsEmpty)

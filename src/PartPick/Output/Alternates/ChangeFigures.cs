@@ -23,7 +23,7 @@ internal static class ChangeFigures
         Signed(change.Margin, 1, 2),
         Signed(change.DriveWatts, 1e-6, 1),
         Signed(change.StartUpSeconds, 1e-3, 2),
-        Signed((double)change.Cost, 1, 4),
+        Signed((double?)change.Cost, 1, 4),
         change.Size.ToString(change.Size < 10 ? "0.000" : "0.0", CultureInfo.InvariantCulture),
         change.Size == 0 ? "" : Words(change.Most),
     ];
@@ -43,7 +43,7 @@ internal static class ChangeFigures
         Figures.Exact(change.Margin),
         Figures.Exact(change.DriveWatts),
         Figures.Exact(change.StartUpSeconds),
-        change.Cost.ToString(CultureInfo.InvariantCulture),
+        change.Cost?.ToString(CultureInfo.InvariantCulture) ?? "",
         Figures.Exact(change.Size),
         Key(change.Most),
     ];

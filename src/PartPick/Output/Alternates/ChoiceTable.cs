@@ -28,15 +28,16 @@ internal static class ChoiceTable
         }
 
         output.WriteLine();
-        output.WriteLine(choice.IsExact
-            ? $"Exact for every number of boards: all {Figures.Whole(choice.Compared)} fit combinations were compared at each."
-            : "Exact where the whole catalogue was ranked: for "
-                + $"{string.Join(", ", choice.RankedAt.Select(builds => Figures.Whole(builds)))} boards. Between them the best of");
-        if (!choice.IsExact)
-        {
-            output.WriteLine($"{Figures.Whole(choice.Compared)} candidates that were on the front there. * ranked within the range.");
-        }
+        output.WriteLine(Exactness(choice));
     }
+
+    /// <summary>How far the choice is exact.</summary>
+    /// <param name="choice">The choice.</param>
+    public static string Exactness(QuantityChoice choice) => choice.IsExact
+        ? $"Exact for every number of boards: all {Figures.Whole(choice.Compared)} fit combinations were compared at each."
+        : "Exact where the whole catalogue was ranked: for "
+            + $"{string.Join(", ", choice.RankedAt.Select(builds => Figures.Whole(builds)))} boards. Between them the best of "
+            + $"{Figures.Whole(choice.Compared)} candidates that were on the front there. * ranked within the range.";
 
     private static string[] Row(QuantityView view, ChoiceSpan span)
     {

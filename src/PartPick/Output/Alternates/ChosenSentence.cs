@@ -18,13 +18,14 @@ internal static class ChosenSentence
             ? $", drive level {ValueText.Format(most.Value, Dimension.Power)}"
                 + (candidate.RatedDriveWatts is { } rated ? $" of {ValueText.Format(rated, Dimension.Power)}" : "")
             : "";
-        string cost = candidate.Cost.ToString("0.000", CultureInfo.InvariantCulture)
-            + (requirement.CostLimit is { } limit ? " of " + limit.ToString("0.###", CultureInfo.InvariantCulture) : "");
+        string cost = !candidate.IsInOneCurrency ? "priced in more than one currency" : candidate.Cost.ToString("0.000", CultureInfo.InvariantCulture)
+            + (requirement.CostLimit is { } limit ? " of " + limit.ToString("0.###", CultureInfo.InvariantCulture) : "")
+            + $" {candidate.Currency} each";
         output.WriteLine(
             $"{list}, candidate {Figures.Whole(review.Entry.Number)}: {choice.Circuit.Word()} {choice.Amplifier.Id} with "
             + $"{choice.Crystal.Id}{stage}; error {Figures.Fixed(candidate.Budget?.WorstRatio, 1e-6, 1)} of "
             + $"{Figures.Fixed(requirement.BudgetRatio, 1e-6, 1)} ppm, margin {Figures.Fixed(candidate.Margin.Value, 1, 2)} "
-            + $"({Figures.Short(requirement.Margin, 1)} wanted){drive}, {cost} {candidate.Currency} each for "
+            + $"({Figures.Short(requirement.Margin, 1)} wanted){drive}, {cost} for "
             + $"{Figures.Whole(requirement.Builds)} boards.");
         foreach (Miss miss in review.Misses)
         {

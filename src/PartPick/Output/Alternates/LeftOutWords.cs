@@ -12,6 +12,23 @@ internal static class LeftOutWords
         _ => reason.ToString().ToLowerInvariant(),
     };
 
+    /// <summary>How many parts were left out and how many break a limit, as sentences; none where there are none.</summary>
+    /// <param name="found">What was found for a part.</param>
+    public static IEnumerable<string> Lines(LineAlternates found)
+    {
+        string[] leftOut = [.. found.LeftOut.Select(pair => $"{Figures.Whole(pair.Value)} {Words(pair.Key)}")];
+        string[] unfit = [.. found.Unfit.Select(pair => $"{Figures.Whole(pair.Value)} {LimitWords.Words(pair.Key)}")];
+        if (leftOut.Length > 0)
+        {
+            yield return $"Left out: {string.Join(", ", leftOut)}.";
+        }
+
+        if (unfit.Length > 0)
+        {
+            yield return $"Break a limit: {string.Join(", ", unfit)}.";
+        }
+    }
+
     /// <summary>The reason in words.</summary>
     public static string Words(LeftOut reason) => reason switch
     {

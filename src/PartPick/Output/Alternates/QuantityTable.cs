@@ -40,13 +40,19 @@ internal static class QuantityTable
 
         if (view.Choice is { } choice)
         {
-            IEnumerable<char> letters = Enumerable.Range(0, Width)
-                .Select(column => view.Letter(choice.At(CostPicture.BuildsAt(column, Width, view.Curve.Most)).Candidate)[0]);
-            output.WriteLine($"    best  {string.Concat(letters)}");
+            output.WriteLine($"    best  {Letters(view, choice, Width)}");
         }
     }
 
-    private static void WriteRows(TextWriter output, QuantityView view)
+    /// <summary>The letters of the best candidates, one below each column of the picture.</summary>
+    /// <param name="view">What is shown.</param>
+    /// <param name="choice">Its best candidates.</param>
+    /// <param name="width">Width of the picture in letters.</param>
+    public static string Letters(QuantityView view, QuantityChoice choice, int width) => string.Concat(Enumerable.Range(0, width)
+        .Select(column => view.Letter(choice.At(CostPicture.BuildsAt(column, width, view.Curve.Most)).Candidate)[0]));
+
+    /// <summary>Prints the table of costs.</summary>
+    public static void WriteRows(TextWriter output, QuantityView view)
     {
         string currency = view.Chosen.Candidate.Currency;
         TextColumn[] columns = [new("boards", true), new($"each ({currency})", true), new($"all ({currency})", true), new("breaks")];
@@ -96,16 +102,30 @@ internal static class QuantityTable
             output.WriteLine($"… and {Figures.Whole(single.Length - MostLines)} more (--format json).");
         }
 
-        foreach (IGrouping<string, CostBreak> steps in breaks
-            .Where(turn => turn.Kind == CostBreakKind.Multiple)
-            .GroupBy(turn => turn.Part.Id))
+        foreach (string steps in Multiples(breaks))
         {
-            CostBreak first = steps.First();
-            output.WriteLine(
-                $"{steps.Key} is sold in multiples of {Figures.Whole(first.Part.Offer.Multiple)}: {Figures.Whole(steps.Count())} steps, "
-                + $"the first from {Figures.Whole(first.Builds)} boards on.");
+            output.WriteLine(steps);
         }
     }
+
+    /// <summary>Where the cost turns, a sentence each.</summary>
+    /// <param name="view">What is shown.</param>
+    public static IEnumerable<string> Turns(QuantityView view)
+    {
+        ImmutableArray<BoardLine> lines = BoardLine.Of(view.Chosen.Board);
+        return view.Curve.Breaks.Where(turn => turn.Kind != CostBreakKind.Multiple)
+            .GroupBy(turn => (turn.Builds, turn.Kind))
+            .Select(turns => Row(turns, lines))
+            .Select(row => row[1] == row[2] ? $"From {row[0]}: {row[3]}." : $"From {row[0]}: {row[1]} → {row[2]}, {row[3]}.")
+            .Concat(Multiples(view.Curve.Breaks))
+            .DefaultIfEmpty("The cost per unit turns nowhere.");
+    }
+
+    private static IEnumerable<string> Multiples(ImmutableArray<CostBreak> breaks) => breaks
+        .Where(turn => turn.Kind == CostBreakKind.Multiple)
+        .GroupBy(turn => turn.Part.Id)
+        .Select(steps => $"{steps.Key} is sold in multiples of {Figures.Whole(steps.First().Part.Offer.Multiple)}: "
+            + $"{Figures.Whole(steps.Count())} steps, the first from {Figures.Whole(steps.First().Builds)} boards on.");
 
     private static string[] Row(IGrouping<(int Builds, CostBreakKind Kind), CostBreak> turns, ImmutableArray<BoardLine> lines)
     {

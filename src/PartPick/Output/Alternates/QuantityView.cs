@@ -25,6 +25,14 @@ internal sealed record QuantityView(
         ? []
         : [.. Choice.Spans.Select(span => span.Candidate).OfType<Candidate>().DistinctBy(candidate => candidate.Id)];
 
+    /// <summary>The usual numbers of boards for the table, and the wanted one.</summary>
+    /// <param name="builds">The wanted number.</param>
+    /// <param name="most">The largest.</param>
+    public static ImmutableArray<int> UsualRows(int builds, int most) =>
+    [
+        .. new[] { 1, 2, 5, 10, 20, 50, 100, 200, 500, 1000, 2000, 5000, most }.Append(Math.Min(builds, most)).Distinct().Order(),
+    ];
+
     /// <summary>The letter of a candidate: A to Z, then a number behind it.</summary>
     public string Letter(Candidate? candidate)
     {

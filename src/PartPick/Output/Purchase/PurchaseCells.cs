@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using System.Globalization;
+using PartPick.Catalog;
 using PartPick.Selection;
 
 namespace PartPick.Output;
@@ -53,6 +54,7 @@ internal sealed class PurchaseCells(PurchaseList list, char decimalSign = '.')
         : line.IsGone ? "not in the catalogue any more"
         : line.Parts.Length > 1 ? "equal parts bought together: " + string.Join(' ', line.Parts.Select(part => part.Id))
         : line.Orders[0].Total is null ? "no price is known"
+        : line.Parts[0] is PortPart && line.Orders[0].Total == 0 ? "counted as on the board already, at no cost"
         : !line.IsSplit ? line.Orders[0].Part.Id == line.Parts[0].Id ? "" : $"in the place of {line.Parts[0].Id}"
         : line.Saving is { } saving ? $"split over {line.Orders.Length} parts, saves {Amount(saving)} {list.Currency}"
         : $"split over {line.Orders.Length} parts; no single one suffices";

@@ -52,12 +52,13 @@ internal static class PurchaseMarkdown
         }));
         Line(text, "");
         Line(text, $"**Total: {cells.Amount(list.Total)} {Escaped(list.Currency)}**");
+        Line(text, "");
         foreach (string note in cells.Notes())
         {
             Line(text, "- " + Escaped(note));
         }
 
-        Line(text, "");
+        Line(text, cells.Notes().IsEmpty ? null : "");
         Line(text, HelpFooter.Cautions);
         return text.ToString();
     }
@@ -91,5 +92,5 @@ internal static class PurchaseMarkdown
         return shown.ToString();
     }
 
-    private static void Line(StringBuilder text, string line) => text.Append(line).Append('\n');
+    private static void Line(StringBuilder text, string? line) => text.Append(line).Append(line is null ? "" : "\n");
 }

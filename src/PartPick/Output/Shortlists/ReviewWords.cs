@@ -78,7 +78,7 @@ public static class ReviewWords
 
         if (then.Cost != now.Cost || then.Currency != now.Currency)
         {
-            yield return $"cost per board {Money(then.Cost)} → {Money(now.Cost)} {now.Currency}";
+            yield return $"cost per board {Money(then.Cost)} → {Money(now.Cost)}{(now.Cost is null ? "" : " " + now.Currency)}";
         }
 
         (string Name, string Old, string New)[] figures =

@@ -40,7 +40,7 @@ internal static class ShortlistOutput
             [
                 new("#", true), new("added"), new("boards", true), new("circuit"), new("crystal"), new("amplifier"), new("tap", true),
                 new("error (ppm)", true), new("margin", true), new("drive (uW)", true), new("start-up (ms)", true),
-                new($"cost ({currency})", true), new("state"), new("note"),
+                new(currency.Length == 0 ? "cost" : $"cost ({currency})", true), new("state"), new("note"),
             ],
             [.. list.Candidates.Select(Row)]);
         string[] lines =

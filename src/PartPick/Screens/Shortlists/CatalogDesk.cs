@@ -21,6 +21,14 @@ public sealed class CatalogDesk(string catalogPath) : IShortlistDesk
     public Result<ImmutableArray<ShortlistReview>> Read(string list) => CatalogStore.Load(catalogPath).Then(catalog => Read(list, catalog));
 
     /// <inheritdoc/>
+    public Result<ListCircuit> Circuit(string list, int number) => CatalogStore.Load(catalogPath).Then(catalog =>
+        ShortlistStore.Read(catalogPath, list).Then(found => found.Entries.FirstOrDefault(entry => entry.Number == number) is { } entry
+            ? new ShortlistReviewer(catalog).Review(list, entry).Then(review =>
+                ChosenCircuit.Of(review, catalog).Map(chosen => new ListCircuit(review, chosen, catalog)))
+            : Result.Fail<ListCircuit>(
+                "list", FormattableString.Invariant($"candidate {number} is not on it any more"), "a candidate that is on the list")));
+
+    /// <inheritdoc/>
     public Result<ShortlistEntry> Put(string list, CandidateParts choice, Requirement requirement, string? note) =>
         CatalogStore.Load(catalogPath).Then(catalog =>
         {
@@ -34,23 +42,29 @@ public sealed class CatalogDesk(string catalogPath) : IShortlistDesk
     public Problem? Remove(string list, int number) => ShortlistStore.Remove(catalogPath, list, number).Problem;
 
     /// <inheritdoc/>
-    public Result<string> Export(string list, string path, bool replace) => CatalogStore.Load(catalogPath).Then(catalog =>
-        Read(list, catalog).Then(reviews =>
-        {
-            var view = new ShortlistView(list, reviews);
-            return ShortlistExport.Purchase(view, catalog, new PurchaseOptions()).Then(purchase =>
-            {
-                ExportForm form = ExportForms.OfFile(path) ?? ExportForm.Csv;
-                string text = ShortlistExport.Text(view, purchase, form, new CsvStyle(), Today);
-                string total = $"{new PurchaseCells(purchase).Amount(purchase.Total)} {purchase.Currency}";
-                return ShortlistExport.Save(new ExportTarget(path, replace, "file", catalogPath), text, mark: false) is { } problem
-                    ? Result.Fail<string>(problem)
-                    : Result.Ok($"{purchase.Lines.Length} lines, {total}, written to {path}");
-            });
-        }));
+    public Result<string> Export(string list, string path, bool replace)
+    {
+        var target = new ExportTarget(path, replace, "file", catalogPath);
+        return ShortlistExport.Form(target).Then(form => CatalogStore.Load(catalogPath).Then(catalog =>
+            Read(list, catalog).Then(reviews => Export(list, reviews, catalog, target, form))));
+    }
 
     /// <inheritdoc/>
     public bool IsThere(string path) => File.Exists(path);
+
+    private static Result<string> Export(
+        string list, ImmutableArray<ShortlistReview> reviews, PartsCatalog catalog, ExportTarget target, ExportForm form)
+    {
+        var view = new ShortlistView(list, reviews);
+        return ShortlistExport.Purchase(view, catalog, new PurchaseOptions()).Then(purchase =>
+        {
+            string text = ShortlistExport.Text(view, purchase, form, new CsvStyle(), Today);
+            string total = $"{new PurchaseCells(purchase).Amount(purchase.Total)} {purchase.Currency}";
+            return ShortlistExport.Save(target, text, mark: false) is { } problem
+                ? Result.Fail<string>(problem)
+                : Result.Ok(FormattableString.Invariant($"{purchase.Lines.Length} lines, {total}, written to {target.Path}"));
+        });
+    }
 
     private Result<ImmutableArray<ShortlistReview>> Read(string list, PartsCatalog catalog) =>
         ShortlistStore.Read(catalogPath, list).Then(found => new ShortlistReviewer(catalog).Review(found));

@@ -15,6 +15,11 @@ public interface IShortlistDesk
     /// <param name="list">The name of the list.</param>
     Result<ImmutableArray<ShortlistReview>> Read(string list);
 
+    /// <summary>A candidate of a list, analysed with today's parts.</summary>
+    /// <param name="list">The name of the list.</param>
+    /// <param name="number">Its number.</param>
+    Result<ListCircuit> Circuit(string list, int number);
+
     /// <summary>Puts a candidate on a list.</summary>
     /// <param name="list">The name of the list.</param>
     /// <param name="choice">The parts.</param>

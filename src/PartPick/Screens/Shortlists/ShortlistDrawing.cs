@@ -18,6 +18,16 @@ internal static class ShortlistDrawing
     /// <param name="glyphs">The signs.</param>
     public static ImmutableArray<Line> Draw(ShortlistPage page, int width, int height, Glyphs glyphs)
     {
+        if (page.Replacements is { } replacements)
+        {
+            return ReplacementsDrawing.Draw(replacements, width, height, glyphs);
+        }
+
+        if (page.Quantity is { } quantity)
+        {
+            return QuantityDrawing.Draw(quantity, width, height, glyphs);
+        }
+
         int changed = page.Candidates.Count(each => each.IsChanged), unfit = page.Candidates.Count(each => !each.IsFit);
         string noun = page.Candidates.Length == 1 ? "candidate" : "candidates";
         string counts = FormattableString.Invariant($"{page.Candidates.Length} {noun}, {changed} changed, {unfit} unfit");

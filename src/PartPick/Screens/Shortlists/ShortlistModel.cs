@@ -6,13 +6,35 @@ using PartPick.Values;
 namespace PartPick.Screens;
 
 /// <summary>Putting a candidate on a list, and the page of a list. Takes the keys while it asks or is open.</summary>
-/// <param name="desk">Where the lists are kept; null where there are none.</param>
-internal sealed class ShortlistModel(IShortlistDesk? desk)
+internal sealed class ShortlistModel
 {
-    private readonly ShortlistPage _page = new(desk);
+    private readonly IShortlistDesk? _desk;
+    private readonly ReplacementsPage? _replacements;
+    private readonly QuantityPage? _quantity;
+    private readonly ShortlistPage _page;
     private string _list = ShortlistName.Usual;
     private AskedFields _fields = new();
     private (Candidate Candidate, Requirement Requirement)? _asked;
+
+    /// <summary>Without any lists.</summary>
+    public ShortlistModel() => _page = new ShortlistPage(null, null, null);
+
+    /// <summary>With lists.</summary>
+    /// <param name="desk">Where they are kept.</param>
+    /// <param name="work">Does what takes long.</param>
+    /// <param name="ascii">Whether only ASCII may be used.</param>
+    public ShortlistModel(IShortlistDesk desk, ScreenWork work, bool ascii)
+    {
+        _desk = desk;
+        _replacements = new ReplacementsPage(desk, work);
+        _quantity = new QuantityPage(desk, work, ascii);
+        _replacements.Changed += () => Redraw?.Invoke();
+        _quantity.Changed += () => Redraw?.Invoke();
+        _page = new ShortlistPage(desk, _replacements, _quantity);
+    }
+
+    /// <summary>Raised when the screen looks different without a key having been pressed.</summary>
+    public event Action? Redraw;
 
     /// <summary>The fields that are asked for; null where nothing is.</summary>
     public AskedFields? Asking => _asked is null ? _page.Asking : _fields;
@@ -29,7 +51,7 @@ internal sealed class ShortlistModel(IShortlistDesk? desk)
     /// <summary>Asks on which list a candidate goes, and for how many boards.</summary>
     public void Ask(Candidate candidate, Requirement requirement)
     {
-        if (desk is not null)
+        if (_desk is not null)
         {
             _asked = (candidate, requirement);
             _fields = new AskedFields(
@@ -39,7 +61,14 @@ internal sealed class ShortlistModel(IShortlistDesk? desk)
 
     /// <summary>Opens the page of the list that was last used.</summary>
     /// <returns>A line to show; null for none.</returns>
-    public string? Open() => desk is null ? null : _page.Open(_list);
+    public string? Open() => _desk is null ? null : _page.Open(_list);
+
+    /// <summary>Ends what is being looked for.</summary>
+    public void Stop()
+    {
+        _replacements?.Close();
+        _quantity?.Close();
+    }
 
     /// <summary>Takes a key, if something is asked or the page is open.</summary>
     /// <param name="key">The key.</param>
@@ -83,7 +112,7 @@ internal sealed class ShortlistModel(IShortlistDesk? desk)
         }
 
         string note = _fields.Fields[2].Text.Trim();
-        Result<ShortlistEntry> put = desk!.Put(
+        Result<ShortlistEntry> put = _desk!.Put(
             name.Value, candidate.Choice, requirement with { Builds = boards.Value }, note.Length == 0 ? null : note);
         if (!put.IsOk)
         {

@@ -6,7 +6,9 @@ namespace PartPick.Screens;
 
 /// <summary>The page of one list: its candidates, which of them is chosen, and writing it to a file.</summary>
 /// <param name="desk">Where the lists are kept; null where there are none.</param>
-internal sealed class ShortlistPage(IShortlistDesk? desk)
+/// <param name="replacements">What may replace the parts of a candidate; null where there are no lists.</param>
+/// <param name="quantity">What a candidate costs over the number of boards; null where there are no lists.</param>
+internal sealed class ShortlistPage(IShortlistDesk? desk, ReplacementsPage? replacements, QuantityPage? quantity)
 {
     private ImmutableArray<string> _names = [];
     private bool _replaces;
@@ -35,6 +37,12 @@ internal sealed class ShortlistPage(IShortlistDesk? desk)
 
     /// <summary>Where the words about the chosen candidate are scrolled to.</summary>
     public PageScroll Scroll { get; } = new();
+
+    /// <summary>What may replace the parts of the chosen candidate; null where it is not open.</summary>
+    public ReplacementsPage? Replacements => replacements is { IsOpen: true } ? replacements : null;
+
+    /// <summary>What the chosen candidate costs over the number of boards; null where it is not open.</summary>
+    public QuantityPage? Quantity => quantity is { IsOpen: true } ? quantity : null;
 
     /// <summary>Opens it.</summary>
     /// <param name="list">The list to show; where it is not there, the first one.</param>
@@ -71,6 +79,12 @@ internal sealed class ShortlistPage(IShortlistDesk? desk)
             return true;
         }
 
+        if (Replacements is not null || Quantity is not null)
+        {
+            notice = null;
+            return Replacements?.Press(key) ?? Quantity!.Press(key);
+        }
+
         notice = key switch
         {
             { Name: KeyName.Escape or KeyName.Enter or KeyName.Backspace } => Close(),
@@ -83,6 +97,8 @@ internal sealed class ShortlistPage(IShortlistDesk? desk)
             { Name: KeyName.Right } => Turn(1),
             { Name: KeyName.Delete } => Remove(leaving),
             { Name: KeyName.Letter, Letter: 'x' } => AskFile(),
+            { Name: KeyName.Letter, Letter: 'r' } => Study(replacements!.Open),
+            { Name: KeyName.Letter, Letter: 'b' } => Study(quantity!.Open),
             _ => null,
         };
         return (key.Name is KeyName.PageUp or KeyName.PageDown && Scroll.Press(key))
@@ -141,6 +157,16 @@ internal sealed class ShortlistPage(IShortlistDesk? desk)
         return desk!.Remove(Name, number) is { } problem
             ? problem.ToString()
             : Open(Name) ?? FormattableString.Invariant($"Candidate {number} was taken off.");
+    }
+
+    private string? Study(Action<string, int> open)
+    {
+        if (Chosen is { } chosen)
+        {
+            open(Name, chosen.Entry.Number);
+        }
+
+        return null;
     }
 
     private string? AskFile()

@@ -47,12 +47,13 @@ internal sealed class TerminalRun(
             model.RankAgain();
         };
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
-        model.KeepListsAt(desk);
+        model.KeepListsAt(desk, work);
         using var screen = new MainScreen(model, palette);
         using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, Leave);
         using PosixSignalRegistration interrupt = PosixSignalRegistration.Create(PosixSignal.SIGINT, Leave);
         using PosixSignalRegistration hangUp = PosixSignalRegistration.Create(PosixSignal.SIGHUP, HangUp);
         app.Run(screen);
+        model.Stop();
         parts.Stop();
         return model.Wanted.Accepted;
 
