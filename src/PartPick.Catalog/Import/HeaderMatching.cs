@@ -42,7 +42,8 @@ internal sealed class HeaderMatching(PartKind kind, ColumnSample sample)
             {
                 uses[match.Column] = uses[match.Column] with
                 {
-                    IsUnnamed = false, Why = "the prices for each quantity are in other columns",
+                    IsUnnamed = false,
+                    Why = "the prices for each quantity are in other columns",
                 };
             }
             else if (taken.Add(match.Field))

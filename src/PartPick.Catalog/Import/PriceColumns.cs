@@ -71,7 +71,9 @@ internal static partial class PriceColumns
                 {
                     uses[partner] = uses[partner] with
                     {
-                        Field = "priceQuantity", IsUnnamed = false, Why = $"the quantities of {cells[column].Text}",
+                        Field = "priceQuantity",
+                        IsUnnamed = false,
+                        Why = $"the quantities of {cells[column].Text}",
                     };
                 }
             }
@@ -141,7 +143,8 @@ internal static partial class PriceColumns
             <= 1.05 => use with { Why = $"{use.Why}, each piece, as {single!.Header} shows" },
             _ when ratio > use.Quantity * 0.2 && ratio <= use.Quantity * 1.05 => use with
             {
-                Per = use.Quantity, Why = $"{use.Why}, for {CellNumber.Text(use.Quantity)} together, as {single!.Header} shows",
+                Per = use.Quantity,
+                Why = $"{use.Why}, for {CellNumber.Text(use.Quantity)} together, as {single!.Header} shows",
             },
             _ => use with
             {
