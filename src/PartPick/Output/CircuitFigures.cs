@@ -23,7 +23,7 @@ internal static class CircuitFigures
         return
         [
             new("frequency", "Frequency at the crystal", "Hz", Value(steady?.FrequencyHz, Dimension.Frequency, 10)),
-            new("outputFrequency", $"Output frequency (divided by 2^{description.Tap})", "Hz",
+            new("outputFrequency", description.Tap > 0 ? $"Output frequency (divided by 2^{description.Tap})" : "Output frequency", "Hz",
                 Value(steady?.FrequencyHz / Math.Pow(2, description.Tap), Dimension.Frequency, 10)),
             new("error", $"Error {reference}", "ppm",
                 steady is null
