@@ -11,8 +11,9 @@ internal sealed class ColumnFit(PartKind kind, ColumnSample sample)
     private const double MostUnfit = 0.5;
 
     /// <summary>Whether they can.</summary>
-    public bool Holds(FieldMatch match, HeaderCell header)
+    public bool Holds(FieldMatch match)
     {
+        HeaderCell header = match.Reading;
         Dimension? dimension = ImportFields.DimensionOf(kind, match.Field);
         if (header.Unit.Length > 0 && !UnitFits(match.Field, dimension, header))
         {

@@ -26,7 +26,7 @@ internal static class UnitSpelling
         ["ppm / °c"] = "ppm/°C",
         ["℃"] = "°C", ["'c"] = "°C", ["°"] = "°C", ["kc"] = "kHz", ["mc"] = "MHz", ["pz"] = "", ["szt"] = "", ["ks"] = "", ["kpl"] = "",
         ["db"] = "", ["шт"] = "", ["个"] = "", ["個"] = "", ["ud"] = "", ["uds"] = "", ["pzas"] = "", ["pz."] = "", ["adet"] = "",
-        ["v="] = "V", ["volt dc"] = "V", ["vdcw"] = "V", ["ma max"] = "mA", ["ppm/an"] = "ppm", ["ppm/año"] = "ppm",
+        ["v="] = "V", ["vpp"] = "V", ["vss"] = "V", ["vp-p"] = "V", ["v pp"] = "V", ["volt dc"] = "V", ["vdcw"] = "V", ["ma max"] = "mA", ["ppm/an"] = "ppm", ["ppm/año"] = "ppm",
         ["ppm/anno"] = "ppm", ["ppm/ano"] = "ppm", ["ppm/år"] = "ppm", ["ppm/jaar"] = "ppm", ["ppm/rok"] = "ppm", ["ppm/annum"] = "ppm",
         ["ppm 1. jahr"] = "ppm", ["ppm/1st year"] = "ppm", ["ppm/1. jahr"] = "ppm",
         ["pcs"] = "", ["pcs."] = "", ["pc"] = "", ["stk"] = "", ["st"] = "", ["stück"] = "", ["ea"] = "", ["units"] = "", ["pieces"] = "",

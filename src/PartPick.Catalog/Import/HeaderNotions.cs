@@ -1,0 +1,30 @@
+namespace PartPick.Catalog.Import;
+
+/// <summary>The words of a header, each with the ways in which it can be understood.</summary>
+/// <param name="Words">The words, those that only join others left out.</param>
+internal sealed record HeaderNotions(IReadOnlyList<(string Word, IReadOnlyList<Notion> Notions)> Words)
+{
+    // Words that may only join others, "in" beside "input".
+    private static readonly Notion Nothing = new(0, 0.02);
+
+    /// <summary>Takes a name apart.</summary>
+    /// <param name="name">A name in the form of <see cref="TradePhrase.Folded"/>.</param>
+    public static HeaderNotions Of(string name)
+    {
+        var words = new List<(string, IReadOnlyList<Notion>)>();
+        foreach (string word in name.Split(' ', StringSplitOptions.RemoveEmptyEntries).Where(word => word.Length < 40).Take(12))
+        {
+            IReadOnlyList<Notion> notions = Notions.Of(word);
+            if (!TradePhrase.IsSmall(word))
+            {
+                words.Add((word, notions));
+            }
+            else if (notions.Count > 0)
+            {
+                words.Add((word, [.. notions, Nothing]));
+            }
+        }
+
+        return new HeaderNotions(words);
+    }
+}
