@@ -116,6 +116,7 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
         for (Match tail = Tail().Match(text); tail.Success; tail = Tail().Match(text, tail.Index + 1))
         {
             string unit = tail.Groups[2].Value;
+            unit = isJoined && unit is ("f" or "a" or "w") ? unit.ToUpperInvariant() : unit;
             bool isApart = unit.Length > 1 || tail.Groups[1].Value.Trim() is not "" || unit is "Ω" or "%" || isJoined;
             if (isApart && HeaderUnit.IsUnit(unit))
             {

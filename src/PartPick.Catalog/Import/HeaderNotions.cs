@@ -7,6 +7,11 @@ internal sealed record HeaderNotions(IReadOnlyList<(string Word, IReadOnlyList<N
     // Words that may only join others, "in" beside "input".
     private static readonly Notion Nothing = new(0, 0.02);
 
+    private static readonly HashSet<string> Joining = new(StringComparer.Ordinal) { "on", "to", "at", "with", "by", "is", "med", "mit", "con", "met" };
+
+    // A single letter beside words, which may stand for anything.
+    private static readonly Notion Anything = new(0, 0.3);
+
     /// <summary>Takes a name apart.</summary>
     /// <param name="name">A name in the form of <see cref="TradePhrase.Folded"/>.</param>
     public static HeaderNotions Of(string name)
@@ -15,7 +20,11 @@ internal sealed record HeaderNotions(IReadOnlyList<(string Word, IReadOnlyList<N
         foreach (string word in name.Split(' ', StringSplitOptions.RemoveEmptyEntries).Where(word => word.Length < 40).Take(12))
         {
             IReadOnlyList<Notion> notions = Notions.Of(word);
-            if (!TradePhrase.IsSmall(word))
+            if (word.Length == 1 && name.Length > 1 && notions.Count > 0)
+            {
+                words.Add((word, [.. notions, Anything]));
+            }
+            else if (!TradePhrase.IsSmall(word) && !Joining.Contains(word))
             {
                 words.Add((word, notions));
             }

@@ -38,7 +38,7 @@ internal static class Plausible
     private static (double Least, double Greatest)? OfAmplifier(string field) => field switch
     {
         "supply" => (0.5, 60),
-        "gmMin" or "gm" or "gmMax" => (10e-9, 2),
+        "gmMin" or "gm" or "gmMax" => (10e-9, 1000),
         "ro" => (1, 1e9),
         "ron" => (0.01, 1e6),
         "gain" => (1.5, 1e7),

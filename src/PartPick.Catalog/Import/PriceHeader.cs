@@ -9,10 +9,13 @@ namespace PartPick.Catalog.Import;
 /// prices.</param>
 /// <param name="IsPer">Whether it may be the price of so many together: "Price per 100".</param>
 /// <param name="IsBare">Whether it is the number alone, or with words of quantity.</param>
-internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsPer, bool IsBare)
+/// <param name="IsPriced">Whether it names a price or a currency, and not only a step of quantities.</param>
+internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsPer, bool IsBare, bool IsPriced)
 {
     private static readonly Words Prices = new(
         "k kr sales ar t r", "price", "unit", "net", "currency", "break");
+
+    private static readonly Words Costs = new("k kr ar", "price", "net", "unit", "currency");
 
     private static readonly Words Quantities = new("off q", "quantity", "piece");
 
@@ -46,7 +49,8 @@ internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsP
         bool per = !Plus().IsMatch(header) && numbers.Count == 1
             && (words.Any(Per.Contains) || Slash().IsMatch(header)) && !words.Any(From.Contains) && quantity > 1;
         return new PriceHeader(
-            quantity, marked, per, !words.Any(Prices.Contains) && Currencies.In(HeaderCell.Parted(header)) is null && !Plus().IsMatch(header));
+            quantity, marked, per, !words.Any(Prices.Contains) && Currencies.In(HeaderCell.Parted(header)) is null && !Plus().IsMatch(header),
+            words.Any(Costs.Contains) || Currencies.In(HeaderCell.Parted(header)) is not null);
     }
 
     private static int? Read(Match number)
@@ -60,6 +64,8 @@ internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsP
 
     private static bool IsTax(string word) => Notions.Of(word) is [var notion, ..] && notion.Marks == Notions.Mark("vat");
 
+    private static readonly UInt128 Money = Notions.Mark("currency");
+
     // Words for one thing: some by themselves, and all that stand for certain notions and for nothing else.
     private sealed class Words(string more, params string[] notions)
     {
@@ -67,6 +73,7 @@ internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsP
         private readonly UInt128 _marks = notions.Aggregate((UInt128)0, (marks, name) => marks | Notions.Mark(name));
 
         public bool Contains(string word) => _more.Contains(word)
+            || ((_marks & Money) != 0 && Currencies.IsName(word))
             || Notions.Of(word).Any(notion => notion.Doubt <= 0.1 && (notion.Marks & ~_marks) == 0);
     }
 
