@@ -14,6 +14,9 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
 
     private const double Compound = 0.8;
 
+    private static readonly UInt128 Least = Notions.Mark("minimum");
+    private static readonly UInt128 Greatest = Notions.Mark("maximum");
+
     // Up to here words of the header are left over.
     private const double Incomplete = 60;
 
@@ -47,6 +50,11 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
                 best = Math.Max(best, Rate(alternative, words, known) - 2);
             }
 
+            if (IsOtherEnd(kind, words.Field, notions))
+            {
+                continue;
+            }
+
             Recipe[] recipes = [.. Recipes.Of(kind, words.Field)];
             if (best < Incomplete && recipes.Length > 0 && recipes.All(recipe => recipe.IsContradicted(notions)))
             {
@@ -63,6 +71,14 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
                 yield return new FieldMatch(column, words.Field, best, header);
             }
         }
+    }
+
+    // The least and the greatest are no typical figure where a part has a field for each.
+    private static bool IsOtherEnd(PartKind kind, string field, HeaderNotions header)
+    {
+        string[] key = field.Split(' ');
+        bool Has(string end) => PartShape.Of(kind).Fields.Any(each => each.Key == string.Join(' ', [key[0] + end, .. key[1..]]));
+        return (header.Says(Least) && Has("Min")) || (header.Says(Greatest) && Has("Max"));
     }
 
     private static double Rate(HeaderCell header, TradeWords words, IReadOnlySet<string> known)

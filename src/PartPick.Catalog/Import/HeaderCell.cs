@@ -69,7 +69,8 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
     public static HeaderCell Of(string text) => Of(text, unitAtEnd: true);
 
     /// <summary>A text with its joined words parted: "unitPriceUsd" is "unit Price Usd".</summary>
-    public static string Parted(string text) => Joint().Replace(text, " ");
+    public static string Parted(string text) =>
+        Joint().Replace(Initials().Replace(text, match => match.Value.Replace(".", "", StringComparison.Ordinal)), " ");
 
     private static HeaderCell Of(string text, bool unitAtEnd)
     {
@@ -132,8 +133,8 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
 
     // Without a tax, or with one of nought: what says only that the price is the net one.
     [GeneratedRegex(
-        @"\b(?:(?:excl?|exkl|excluding|without|ohne|hors|sin|sem|senza|zonder|uden|utan|bez)\b\.?\s*(?:of\s+)?(?:vat|tax|mwst|ust|tva|taxes?|iva|btw"
-            + @"|moms|mva|dph|kdv)\b|(?:alv|vat|mwst|ust|tva|iva|btw|moms|mva|dph|kdv)\b\.?\s*0\s*%)",
+        @"\b(?:(?:excl?|exkl|excluding|without|ohne|hors|sin|sem|senza|zonder|uden|utan|bez)\b\.?\s*(?:of\s+)?"
+            + @"(?:vat|tax|mwst|ust|tva|taxes?|iva|btw|moms|mva|dph|kdv)\b|(?:alv|vat|mwst|ust|tva|iva|btw|moms|mva|dph|kdv)\b\.?\s*0\s*%)",
         RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex Untaxed();
 
@@ -159,6 +160,10 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
 
     [GeneratedRegex(@"(?<=[a-z])[\s_]+([mµu]?a|ppm)[\s_]+(v|k|c|yr|y|year)\s*$", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex Quotient();
+
+    // "P.U.", "C.L.": letters with full stops.
+    [GeneratedRegex(@"(?<!\w)(?:\p{L}\.){2,}(?=\W|$)")]
+    private static partial Regex Initials();
 
     // "ratedVoltageVdc", "priceEUR": a capital letter behind small ones begins a word; "kHz" and "fTmin" are none.
     [GeneratedRegex(@"(?<=[a-z]{3})(?=[A-Z])")]

@@ -7,10 +7,16 @@ internal sealed record HeaderNotions(IReadOnlyList<(string Word, IReadOnlyList<N
     // Words that may only join others, "in" beside "input".
     private static readonly Notion Nothing = new(0, 0.02);
 
-    private static readonly HashSet<string> Joining = new(StringComparer.Ordinal) { "on", "to", "at", "with", "by", "is", "med", "mit", "con", "met" };
+    private static readonly HashSet<string> Joining = new(StringComparer.Ordinal)
+    {
+        "on", "to", "at", "with", "by", "is", "med", "mit", "con", "met",
+    };
 
     // A single letter beside words, which may stand for anything.
     private static readonly Notion Anything = new(0, 0.3);
+
+    /// <summary>Whether a word can only mean a certain thing, such as the least figure.</summary>
+    public bool Says(UInt128 mark) => Words.Any(word => word.Notions.Count > 0 && word.Notions.All(notion => (notion.Marks & mark) != 0));
 
     /// <summary>Takes a name apart.</summary>
     /// <param name="name">A name in the form of <see cref="TradePhrase.Folded"/>.</param>

@@ -22,7 +22,9 @@ internal static class Notions
     {
         if (Exact.TryGetValue(word, out List<Notion>? exact))
         {
-            return exact;
+            return word.Length is 3 or 4
+                ? [.. exact, .. CutShort(word).Where(notion => !exact.Exists(known => known.Marks == notion.Marks)).Select(Doubtful)]
+                : exact;
         }
 
         if (word.Length is < 2 or > 40 || word.Any(char.IsAsciiDigit))
@@ -33,6 +35,9 @@ internal static class Notions
         List<Notion> found = [.. Joined(word), .. Longer(word)];
         return found.Count > 0 ? found : [.. CutShort(word), .. WithoutVowels(word)];
     }
+
+    // A short word may also be one cut short: "bez".
+    private static Notion Doubtful(Notion notion) => notion with { Doubt = 0.25 };
 
     // "belastningskap", "nennfreq", "fmax": two words, with or without a letter between.
     private static IEnumerable<Notion> Joined(string text)

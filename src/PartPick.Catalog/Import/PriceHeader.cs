@@ -48,9 +48,10 @@ internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsP
         bool marked = numbers.Count == 2 || Plus().IsMatch(header) || words.Any(From.Contains) || words.Any(Quantities.Contains);
         bool per = !Plus().IsMatch(header) && numbers.Count == 1
             && (words.Any(Per.Contains) || Slash().IsMatch(header)) && !words.Any(From.Contains) && quantity > 1;
+        string? currency = Currencies.In(HeaderCell.Parted(header));
         return new PriceHeader(
-            quantity, marked, per, !words.Any(Prices.Contains) && Currencies.In(HeaderCell.Parted(header)) is null && !Plus().IsMatch(header),
-            words.Any(Costs.Contains) || Currencies.In(HeaderCell.Parted(header)) is not null);
+            quantity, marked, per, !words.Any(Prices.Contains) && currency is null && !Plus().IsMatch(header),
+            words.Any(Costs.Contains) || currency is not null);
     }
 
     private static int? Read(Match number)

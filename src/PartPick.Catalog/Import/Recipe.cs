@@ -10,6 +10,9 @@ internal sealed record Recipe(string Field, UInt128 Required, UInt128 Allowed, b
     // How much of a header may be words that are not known.
     private const double MostUnknown = 0.4;
 
+    // Up to this doubt a word is known.
+    private const double Sure = 0.05;
+
     /// <summary>How surely the words of a header are this one, below <see cref="FieldMatch.Whole"/>; 0 where they are not.</summary>
     public double Rate(HeaderNotions header)
     {
@@ -51,7 +54,8 @@ internal sealed record Recipe(string Field, UInt128 Required, UInt128 Allowed, b
 
     /// <summary>Whether a word of the header is known for something else.</summary>
     public bool IsContradicted(HeaderNotions header) => header.Words.Any(
-        word => word.Notions.Count > 0 && word.Notions.All(notion => notion.Doubt <= 0.05 && (notion.Marks & ~Allowed) != 0));
+        word => word.Notions.Any(notion => notion.Doubt <= Sure)
+            && word.Notions.All(notion => notion.Doubt > Sure || (notion.Marks & ~Allowed) != 0));
 
     // What adds a notion that is still missing goes first.
     private Notion? Best(IReadOnlyList<Notion> notions, UInt128 covered)
