@@ -142,9 +142,10 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
     [GeneratedRegex(@"\b(?:d|l|all|dell|nell|dall|sull)['’´`](?=\w)", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex Elision();
 
+    // A unit behind a condition stays: "hFE @ IC (mA)" are currents.
     // "at 25 °C", "à 25°C", "@ IC", "bei +25 °C", "(25 °C)", "(IC=2mA)": under which condition the figures hold.
     [GeneratedRegex(
-        @"(?<=.)@.*$|\([^)]*=[^)]*\)|(?:\b(?:at|à|a|bei|b\.|bij|ved|v\.|vid|w|przy|pri|при|la)|\s)"
+        @"(?<=.)@[^\(\[]*|\([^)]*=[^)]*\)|(?:\b(?:at|à|a|bei|b\.|bij|ved|v\.|vid|w|przy|pri|при|la)|\s)"
             + @"\s*\+?\s*25\s*(?:[°º]\s*C?|deg\.?\s*C|C\b|℃)|\(\s*\+?25\s*(?:[°º]\s*C|C|℃)\s*\)",
         RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex Condition();

@@ -5,7 +5,7 @@ internal static class Notions
 {
     private static readonly List<string> Names = [];
     private static readonly Dictionary<string, List<Notion>> Exact = new(StringComparer.Ordinal);
-    private static readonly List<(string Word, Notion Notion)> English = [];
+    private static readonly List<(string Word, Notion Notion)> Whole = [];
     private static readonly string[] Sorted = Load();
 
     private static readonly UInt128 Qualifying = Mark("minimum") | Mark("maximum") | Mark("typical") | Mark("nominal");
@@ -106,11 +106,10 @@ internal static class Notions
         }
     }
 
-    // "vltg", "rtg", "splr": the consonants of an English word, in its order.
+    // "vltg", "rtg", "prz": the consonants of a word, in its order; usual in English lists, less so in others.
     private static IEnumerable<Notion> WithoutVowels(string text) => text.Length is < 3 or > 6 || text[1..].Any("aeiou".Contains)
         ? []
-        : English.Where(each => each.Word.Length > text.Length && IsWithin(text, each.Word))
-            .Select(each => each.Notion with { Doubt = 0.2 });
+        : Whole.Where(each => each.Word.Length > text.Length && IsWithin(text, each.Word)).Select(each => each.Notion);
 
     private static bool IsWithin(string text, string word)
     {
@@ -149,10 +148,7 @@ internal static class Notions
                     known.Add(notion);
                 }
 
-                if (english)
-                {
-                    English.Add((word, notion));
-                }
+                Whole.Add((word, notion with { Doubt = english ? 0.2 : 0.22 }));
             }
         }
 

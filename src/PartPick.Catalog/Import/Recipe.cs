@@ -10,6 +10,9 @@ internal sealed record Recipe(string Field, UInt128 Required, UInt128 Allowed, b
     // How much of a header may be words that are not known.
     private const double MostUnknown = 0.4;
 
+    // No cell speaks against a text, so that its words have to be surer.
+    private const double MostDoubtOfText = 0.2;
+
     // Up to this doubt a word is known.
     private const double Sure = 0.05;
 
@@ -64,7 +67,7 @@ internal sealed record Recipe(string Field, UInt128 Required, UInt128 Allowed, b
         bool adds = false;
         foreach (Notion notion in notions)
         {
-            if ((notion.Marks & ~Allowed) != 0)
+            if ((notion.Marks & ~Allowed) != 0 || (IsText && notion.Doubt > MostDoubtOfText))
             {
                 continue;
             }
