@@ -21,7 +21,8 @@ internal static class CellNumber
         // "G1" is a shelf and no number of pieces or ratio of currents: a letter stands for the decimal sign of values only.
         if (dimension is Dimension.Count or Dimension.Number && front.Length > 0 && char.IsLetter(front[0]))
         {
-            return Result.Fail<double>("", $"{Problem.Quote(cell)} does not begin with a number", dimension == Dimension.Count ? "a whole number" : "a number");
+            return Result.Fail<double>(
+                "", $"{Problem.Quote(cell)} does not begin with a number", dimension == Dimension.Count ? "a whole number" : "a number");
         }
 
         if (start == end || IsLetterCode(front, tail))

@@ -17,9 +17,6 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
     private static readonly UInt128 Least = Notions.Mark("minimum");
     private static readonly UInt128 Greatest = Notions.Mark("maximum");
 
-    // Up to here words of the header are left over.
-    private const double Incomplete = 60;
-
     // What a way of reading is less sure than the first.
     private const double OtherReading = 3;
 
@@ -56,7 +53,7 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
             }
 
             Recipe[] recipes = [.. Recipes.Of(kind, words.Field)];
-            if (best < Incomplete && recipes.Length > 0 && recipes.All(recipe => recipe.IsContradicted(notions)))
+            if (best < Whole && recipes.Length > 0 && recipes.All(recipe => recipe.IsContradicted(notions)))
             {
                 best = 0;
             }

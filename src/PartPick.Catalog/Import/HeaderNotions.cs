@@ -25,7 +25,7 @@ internal sealed record HeaderNotions(IReadOnlyList<(string Word, IReadOnlyList<N
         var words = new List<(string, IReadOnlyList<Notion>)>();
         foreach (string word in name.Split(' ', StringSplitOptions.RemoveEmptyEntries).Where(word => word.Length < 40).Take(12))
         {
-            IReadOnlyList<Notion> notions = Notions.Of(word);
+            IReadOnlyList<Notion> notions = name.Length > 1 ? Notions.Of(word) : [];
             if (word.Length == 1 && name.Length > 1 && notions.Count > 0)
             {
                 words.Add((word, [.. notions, Anything]));

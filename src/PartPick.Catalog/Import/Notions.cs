@@ -1,8 +1,13 @@
+using System.Collections.Concurrent;
+
 namespace PartPick.Catalog.Import;
 
 /// <summary>What single words of headers stand for, in any of the languages of the lists, also cut short or joined.</summary>
 internal static class Notions
 {
+    private const int MostUnderstood = 4096;
+
+    private static readonly ConcurrentDictionary<string, IReadOnlyList<Notion>> Understood = new(StringComparer.Ordinal);
     private static readonly List<string> Names = [];
     private static readonly Dictionary<string, List<Notion>> Exact = new(StringComparer.Ordinal);
     private static readonly List<(string Word, Notion Notion)> Whole = [];
@@ -19,6 +24,20 @@ internal static class Notions
     /// <summary>The ways in which a word of a header can be understood; none where it is not known.</summary>
     /// <param name="word">A word in the form of <see cref="TradePhrase.Folded"/>.</param>
     public static IReadOnlyList<Notion> Of(string word)
+    {
+        if (!Understood.TryGetValue(word, out IReadOnlyList<Notion>? known))
+        {
+            known = Find(word);
+            if (Understood.Count < MostUnderstood)
+            {
+                Understood[word] = known;
+            }
+        }
+
+        return known;
+    }
+
+    private static List<Notion> Find(string word)
     {
         if (Exact.TryGetValue(word, out List<Notion>? exact))
         {

@@ -85,7 +85,9 @@ internal sealed class UnseenScore
             string found = "";
             if (key.StartsWith("price", StringComparison.Ordinal))
             {
-                int quantity = key.Length > 5 ? int.Parse(key[6..], CultureInfo.InvariantCulture) : part.Offer.Prices.FirstOrDefault().Quantity;
+                int quantity = key.Length > 5
+                    ? int.Parse(key[6..], CultureInfo.InvariantCulture)
+                    : part.Offer.Prices.FirstOrDefault().Quantity;
                 PriceBreak step = part.Offer.Prices.FirstOrDefault(price => price.Quantity == quantity);
                 found = step.Quantity == 0 ? "" : step.UnitPrice.ToString(CultureInfo.InvariantCulture);
             }

@@ -50,7 +50,7 @@ public sealed class WrongFigureTests : IDisposable
         ImportReport report = _bench.Run(
             "Part No,Type,Supply (V),Output resistance\nI1,unbuffered,5,1.8 kOhm\n", PartKind.Inverter);
         RowRejection row = Assert.Single(report.Rejections);
-        Assert.Contains("gm 1 is missing: whether an oscillator starts rests on the transconductance", row.Reason, StringComparison.Ordinal);
+        Assert.StartsWith("gm 1 is missing: whether an oscillator starts rests on", row.Reason, StringComparison.Ordinal);
     }
 
     [Fact]
