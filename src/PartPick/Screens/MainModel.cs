@@ -194,6 +194,11 @@ public sealed class MainModel
     public void KeepWantedAt(KeptRequirementStore store, ScreenWork work, IRankingService service)
     {
         Kept = new KeptModel(store, work, service);
+        if (List.Result is { } result)
+        {
+            Kept.Figures.Take(result);
+        }
+
         Kept.Changed += said =>
         {
             Notice = said ?? Notice;

@@ -40,17 +40,24 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
     {
         if (model.ShowsKeys)
         {
-            return model.Place == Place.Parts ? KeysBody(width, room) : WithPage(page => KeysBody(page, room), room);
+            return model.Place == Place.Parts
+                ? KeysBody(width, room)
+                : Beside(ScreenColumns.WithPage(width), page => KeysBody(page, room), room);
         }
 
         if (model.Shortlists.IsOpen)
         {
-            return WithPage(page => ShortlistDrawing.Draw(model.Shortlists.Page, page, room, glyphs), room);
+            ShortlistPage list = model.Shortlists.Page;
+            bool isTable = list.Replacements is not null || list.Quantity is not null;
+            return Beside(
+                isTable ? ScreenColumns.WithTable(width) : ScreenColumns.WithPage(width),
+                page => ShortlistDrawing.Draw(list, page, room, glyphs), room);
         }
 
         if (model.Kept.IsOpen)
         {
-            return WithPage(page => KeptDrawing.Draw(model.Kept, model.Wanted.Currency, page, room, glyphs), room);
+            return Beside(
+                ScreenColumns.WithPage(width), page => KeptDrawing.Draw(model.Kept, model.Wanted.Currency, page, room, glyphs), room);
         }
 
         ScreenColumns reading = ScreenColumns.WithCircuit(width);
@@ -61,11 +68,8 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
             : NarrowBody(room);
     }
 
-    private ImmutableArray<Line> WithPage(Func<int, ImmutableArray<Line>> page, int room)
-    {
-        ScreenColumns columns = ScreenColumns.WithPage(width);
-        return Columns(columns, page(columns.Page), room);
-    }
+    private ImmutableArray<Line> Beside(ScreenColumns columns, Func<int, ImmutableArray<Line>> page, int room) =>
+        Columns(columns, page(columns.Page), room);
 
     private ImmutableArray<Line> Columns(ScreenColumns columns, ImmutableArray<Line> page, int room) => ScreenColumns.Join(
     [

@@ -57,7 +57,7 @@ public static class ScreenHost
         }
 
         string? notice = !start.IsOk ? "! " + start.Problem
-            : start.Value is null ? "An example: a river-level logger. e says what you want instead, ? shows all keys."
+            : start.Value is null ? "A river-level logger, as an example: press e to change it, ? for all keys."
             : null;
         var run = new TerminalRun(
             catalogPath, ranking, TerminalTraits.Of(Environment.GetEnvironmentVariable), requirement => keeper.Keep(requirement), opening);

@@ -12,6 +12,7 @@ internal sealed class ScreenColumns
     private const int Two = ListShape.Full + 2 + Schematic.Width;
     private const int Three = Two + 1 + ListAsideDrawing.Width;
     private const int NarrowList = 43;
+    private const int UsualPage = 80;
     private const int WidePage = Schematic.Width + 64;
 
     private ScreenColumns(int list, int page, int kept)
@@ -39,13 +40,18 @@ internal sealed class ScreenColumns
     public static ScreenColumns WithCircuit(int width)
     {
         int kept = width < Three ? 0 : ListAsideDrawing.Width;
-        return width < Two ? new ScreenColumns(0, width, 0) : Beside(ListFor(width - (kept > 0 ? kept + 1 : 0)), width, kept);
+        return width < Two ? new ScreenColumns(0, width, 0) : Beside(ListFor(width - (kept > 0 ? kept + 1 : 0), WidePage), width, kept);
     }
 
     /// <summary>The columns beside any other page.</summary>
     /// <param name="width">Width of the screen in cells.</param>
     public static ScreenColumns WithPage(int width) =>
-        width < Two ? new ScreenColumns(0, width, 0) : Beside(ListFor(width), width, 0);
+        width < Two ? new ScreenColumns(0, width, 0) : Beside(ListFor(width, UsualPage), width, 0);
+
+    /// <summary>The columns beside a table that needs all its own columns.</summary>
+    /// <param name="width">Width of the screen in cells.</param>
+    public static ScreenColumns WithTable(int width) =>
+        width < NarrowList + 1 + WidePage ? new ScreenColumns(0, width, 0) : Beside(ListFor(width, WidePage), width, 0);
 
     /// <summary>Puts the columns side by side, with bars between them that hang from their first lines.</summary>
     /// <param name="columns">The lines and the width of each.</param>
@@ -75,7 +81,7 @@ internal sealed class ScreenColumns
         return lines.ToImmutable();
     }
 
-    private static int ListFor(int width) => Math.Clamp(width - 1 - WidePage, NarrowList, ListShape.Full + 1);
+    private static int ListFor(int width, int page) => Math.Clamp(width - 1 - page, NarrowList, ListShape.Full + 1);
 
     private static ScreenColumns Beside(int list, int width, int kept) =>
         new(list, width - list - 1 - (kept > 0 ? kept + 1 : 0), kept);

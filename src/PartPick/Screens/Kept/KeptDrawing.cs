@@ -30,12 +30,16 @@ internal static class KeptDrawing
         int rows = Math.Clamp(page.Rows.Length, 1, Math.Max(LeastRows, height - 3 - below.Length));
         int first = Math.Clamp(page.At - rows + 1, 0, page.Rows.Length - rows);
         int kept = page.Rows.Length - 1;
+        RankedFigure?[] found = [.. page.Rows.Select(row => page.Figures.Of(row.Requirement))];
+        string[] error = Figures.LineUp([.. found.Select(each => each?.Best?.Budget is { } budget ? Figures.Ppm(budget.WorstRatio) : "")]);
+        string[] margin = Figures.LineUp([.. found.Select(each => each?.Best is { } best ? Figures.Three(best.Margin.Value) : "")]);
         string count = kept == 0 ? "Wanted: nothing is kept yet" : FormattableString.Invariant($"Wanted: {kept} kept");
         return
         [
             Rules.Draw(count, page.IsAtWork ? "at work" : "", width, glyphs),
             Heading(currency, width, glyphs),
-            .. page.Rows.Skip(first).Take(rows).Select((row, i) => Row(page, row, first + i == page.At, width, glyphs)),
+            .. page.Rows.Skip(first).Take(rows).Select((row, i) =>
+                Row(page, row, found[first + i], error[first + i], margin[first + i], width, glyphs)),
             .. below,
         ];
     }
@@ -47,18 +51,16 @@ internal static class KeptDrawing
             .Column(currency.Length is > 0 and <= 4 ? currency : "cost", 6, Tone.Quiet, true).Build();
     }
 
-    private static Line Row(KeptModel page, KeptRow row, bool here, int width, Glyphs glyphs)
+    private static Line Row(KeptModel page, KeptRow row, RankedFigure? found, string error, string margin, int width, Glyphs glyphs)
     {
-        RankedFigure? found = page.Figures.Of(row.Requirement);
+        bool here = ReferenceEquals(row, page.Chosen);
         string mark = (here ? glyphs.Chosen : " ") + " " + (page.IsMarked(row) ? "* " : "  ");
         string name = row.Kept is null ? "as it stands" : row.Name;
         LineBuilder line = Named(
             mark, name, KeptWords.Short(row.Requirement), width, glyphs, row.Kept is null ? Tone.Normal : Tone.Strong, Tone.Normal);
-        Candidate? best = found?.Best;
         line.Column(found?.Fit.ToString(CultureInfo.InvariantCulture) ?? "", 5, right: true)
-            .Column(best?.Budget is { } budget ? Point(Figures.Ppm(budget.WorstRatio)) : "", 8, right: true)
-            .Column(best is null ? "" : Point(Figures.Three(best.Margin.Value)), 8, right: true)
-            .Column(best is null ? "" : Figures.Money(best.Cost), 6, right: true);
+            .Column(error, 8, right: true).Column(margin, 8, right: true)
+            .Column(found?.Best is { } best ? Figures.Money(best.Cost) : "", 6, right: true);
         return here ? line.Build().Chosen() : line.Build();
     }
 
@@ -75,13 +77,6 @@ internal static class KeptDrawing
         line.Column(name, named, tone).Add("  ");
         int start = line.Width;
         return line.Words(wanted, room - named - 2, words).To(start + room - named - 2);
-    }
-
-    // Three figures have their point in three places: filled, they stand below each other.
-    private static string Point(string number)
-    {
-        int point = number.IndexOf('.', StringComparison.Ordinal);
-        return point < 0 ? number + "   " : number.PadRight(point + 3);
     }
 
     private static IEnumerable<Line> Wrong(KeptModel page, int width, Glyphs glyphs) => page.Problems.SelectMany(problem =>

@@ -28,10 +28,18 @@ internal static class KeptWords
     public static ImmutableArray<(string Name, string Value)> Values(Requirement requirement, string currency) =>
     [
         .. Sentence.Pieces(requirement, () => currency).Select(piece => piece.Field).OfType<SentenceField>().Skip(1)
-            .Select(field => (field.Name, field.Show(requirement))),
+            .Select(field => (field.Name, field.Show(requirement) + UnitOf(field.Name))),
         ("damping series", requirement.ResistorSeries),
         ("bias series", requirement.BiasSeries),
     ];
+
+    // In the sentence the unit follows the second value of a range.
+    private static string UnitOf(string field) => field switch
+    {
+        "lowest supply" => " V",
+        "lowest temperature" => " °C",
+        _ => "",
+    };
 
     private static string Number(double value) => value.ToString("0.###", CultureInfo.InvariantCulture);
 }

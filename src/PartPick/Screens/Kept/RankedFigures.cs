@@ -29,7 +29,12 @@ internal sealed class RankedFigures
     /// <param name="other">The other one.</param>
     public static bool AreSame(Requirement one, Requirement other) => KeyOf(one) == KeyOf(other);
 
-    private static string KeyOf(Requirement requirement) => RequirementFile.Write(requirement with { Name = "" }).ToJsonString();
+    // 2.50 and 2.5 are one limit: the division leaves out what zeros there are behind.
+    private static string KeyOf(Requirement requirement) => RequirementFile.Write(requirement with
+    {
+        Name = "",
+        CostLimit = requirement.CostLimit / 1.0000000000000000000000000000m,
+    }).ToJsonString();
 }
 
 /// <summary>What a ranking found.</summary>

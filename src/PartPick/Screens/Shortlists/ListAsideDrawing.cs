@@ -22,17 +22,17 @@ internal static class ListAsideDrawing
         {
             return
             [
-                Rules.Draw("Kept circuits", "", width, glyphs),
+                Rules.Draw("Lists", "", width, glyphs),
                 .. Paragraph.Of(problem.ToString(), width - 1, glyphs, " ! ", 3, Tone.Warning),
             ];
         }
 
         return column?.Glance switch
         {
-            null => [Rules.Draw("Kept circuits", column is null ? "" : "reading", width, glyphs)],
+            null => [Rules.Draw("Lists", column is null ? "" : "reading", width, glyphs)],
             { Rows.IsEmpty: true } =>
             [
-                Rules.Draw("Kept circuits", "none yet", width, glyphs),
+                Rules.Draw("Lists", "none yet", width, glyphs),
                 .. Paragraph.Of("s puts the chosen circuit on a list, which then stands here.", width - 1, glyphs, " ", 1, Tone.Quiet),
             ],
             { } glance => Of(glance, width, height, glyphs),
