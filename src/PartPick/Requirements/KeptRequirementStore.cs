@@ -67,6 +67,11 @@ public sealed class KeptRequirementStore(string catalogPath)
         }).Problem;
     }
 
+    /// <summary>Puts a text aside that is no requirement any more, rather than lose it.</summary>
+    /// <param name="text">The text.</param>
+    /// <returns>The problem; null where it is in the folder.</returns>
+    public Problem? PutAside(string text) => _folder.Change(_ => Result.Ok(_folder.Add("not readable", text))).Problem;
+
     private static Result<Requirement> Named(Requirement requirement) =>
         RequirementName.Read(requirement.Name).Map(name => requirement with { Name = name });
 
@@ -108,5 +113,6 @@ public sealed class KeptRequirementStore(string catalogPath)
     private static Problem? Same(ImmutableArray<KeptText> texts, KeptRequirement kept) =>
         texts.FirstOrDefault(text => text.Id == kept.Id) is { } now && now.Content.ValueOr("") == kept.Text
             ? null
-            : new Problem("wanted", $"{Problem.Quote(kept.Name)} was changed or taken away elsewhere meanwhile", "to look at it as it is now");
+            : new Problem(
+                "wanted", $"{Problem.Quote(kept.Name)} was changed or taken away elsewhere meanwhile", "to look at it as it is now");
 }

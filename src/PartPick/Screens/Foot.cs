@@ -48,7 +48,8 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
                 ("e", "edit"), ("?", "keys"))],
             { List.Chosen: null } => [Keys([("e", "edit the wanted"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
             _ => [Keys([
-                (UpDown, "choose"), ("Enter", "open"), ("s", "to a list"), .. Kept, ("e", "edit"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
+                (UpDown, "choose"), ("Enter", "open"), ("s", "to a list"), .. Kept, ("e", "edit"), .. Catalogue, ("?", "keys"),
+                ("q", "quit")])],
         };
     }
 

@@ -62,7 +62,8 @@ public static class ScreenHost
         var run = new TerminalRun(
             catalogPath, ranking, TerminalTraits.Of(Environment.GetEnvironmentVariable), requirement => keeper.Keep(requirement), opening);
         Requirement end = run.Show(
-            start.ValueOr(null) ?? FirstRequirement.RiverLogger, notice, new CatalogDesk(catalogPath), new KeptRequirementStore(catalogPath));
+            start.ValueOr(null) ?? FirstRequirement.RiverLogger, notice, new CatalogDesk(catalogPath),
+            new KeptRequirementStore(catalogPath));
         if (!run.Finish(WritingTime))
         {
             return Fail(ExitStatus.NoCatalog, "what was put on a list at the end was not written in time; look at the list");

@@ -1,4 +1,6 @@
+using PartPick.Catalog;
 using PartPick.Requirements;
+using PartPick.Screens;
 using PartPick.Selection;
 using PartPick.Values;
 
@@ -22,7 +24,8 @@ public sealed class KeptRequirementStoreTests
             SupplyMaxVolts = 3.6, TemperatureMinCelsius = -40, TemperatureMaxCelsius = 85.5, Years = 12.5, Margin = 7.25,
             AllowDisturbance = true, StartUpTimeSeconds = 0.0123, Builds = 4321, CostLimit = 1.875m,
             Board = new Board("own", new Physics.Circuits.Strays(1e-12, 2e-12, 0.4e-12), 0.2), CapacitorSeries = "E24",
-            ResistorSeries = "E48", BiasSeries = "E6", Circuits = [CircuitKind.Follower, CircuitKind.Gate], Weights = new Weights(2, 0, 0.5),
+            ResistorSeries = "E48", BiasSeries = "E6", Circuits = [CircuitKind.Follower, CircuitKind.Gate],
+            Weights = new Weights(2, 0, 0.5),
         };
         Assert.True(Store.Keep(odd).IsOk);
         Requirement back = Store.Read().Value.Items.Single().Requirement;
@@ -164,6 +167,19 @@ public sealed class KeptRequirementStoreTests
         File.WriteAllText(Folder, "a file");
         Assert.Contains(Folder, Store.Keep(Of("logger")).Problem!.ToString(), StringComparison.Ordinal);
         Assert.Equal("a file", File.ReadAllText(Folder));
+    }
+
+    [Fact]
+    public void A_last_sentence_that_cannot_be_read_is_put_aside_before_another_is_kept()
+    {
+        Assert.Null(CatalogStore.WriteSetting(_catalogue, "requirement", "{ half"));
+        var keeper = new RequirementKeeper(_catalogue);
+        Assert.Contains("the requirement that was kept", keeper.Recall().Problem!.ToString(), StringComparison.Ordinal);
+        Assert.Null(keeper.Keep(Of("next")));
+        Assert.Equal("next", new RequirementKeeper(_catalogue).Recall().Value!.Name);
+        Assert.Equal("{ half", File.ReadAllText(Path.Combine(Folder, "not readable.json")));
+        Assert.Null(keeper.Keep(Of("last")));
+        Assert.Single(Directory.GetFiles(Folder, "*.json"));
     }
 
     private static Requirement Of(string name) => new() { Name = name, OutputHz = 1000 };

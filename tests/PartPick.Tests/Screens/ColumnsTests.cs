@@ -60,7 +60,7 @@ public sealed class ColumnsTests
     public void At_160_columns_the_list_of_kept_circuits_is_the_third_column_and_s_adds_to_it()
     {
         using Bench bench = Open(160, 50);
-        Assert.Contains(Right(bench), row => row.Contains("Lists ", StringComparison.Ordinal) && row.Contains("none yet", StringComparison.Ordinal));
+        Assert.Contains(Right(bench), row => row.Contains("Lists ", StringComparison.Ordinal) && Ends(row, "none yet ──"));
         Assert.Contains("s puts the chosen circuit on a list", bench.Text, StringComparison.Ordinal);
         bench.Do(Key.CursorDown, new Key('s'), Key.Enter);
         string[] right = Right(bench);
@@ -78,20 +78,19 @@ public sealed class ColumnsTests
     [Fact]
     public void The_column_says_which_of_its_circuits_have_changed_parts()
     {
-        string crystal = SampleRanking.Counter.Choice.Crystal.Id;
-        using (Bench first = Open(80, 24))
-        {
-            first.Do(new Key('s'), Key.Enter);
-        }
-
+        var desk = new CatalogDesk(_db);
+        CancellationToken cancellation = TestContext.Current.CancellationToken;
+        Assert.True(desk.Put("default", ListStudyTests.Fit(), SampleRanking.Wanted, null, cancellation).IsOk);
+        Assert.True(desk.Put("default", SampleRanking.SecondCounter.Choice, SampleRanking.Wanted, null, cancellation).IsOk);
         using (Bench second = Open(160, 50))
         {
+            Assert.Contains(Right(second), row => row.Contains("2 CNT-14-HC", StringComparison.Ordinal) && Ends(row, "unfit"));
             Assert.DoesNotContain("changed", string.Concat(Right(second)), StringComparison.Ordinal);
         }
 
-        Assert.True(CatalogEdit.Set(_db, crystal, [("stock", "7000000")], new DateOnly(2026, 1, 2)).IsOk);
+        Assert.True(CatalogEdit.Set(_db, "X-04M096-20-H49-10", [("stock", "7000000")], new DateOnly(2026, 1, 2)).IsOk);
         using Bench third = Open(160, 50);
-        Assert.Contains("changed", string.Concat(Right(third)), StringComparison.Ordinal);
+        Assert.Contains(Right(third), row => row.Contains("1 CNT-14-HC", StringComparison.Ordinal) && Ends(row, "changed"));
     }
 
     [Fact]
@@ -99,7 +98,8 @@ public sealed class ColumnsTests
     {
         using Bench bench = Open(120, 40);
         bench.Do(new Key('s'), Key.Enter);
-        foreach ((char key, string title) in new[] { ('l', "List default: 1 candidate"), ('w', "Wanted: nothing is kept yet"), ('?', "In the list") })
+        (char, string)[] pages = [('l', "List default: 1 candidate"), ('w', "Wanted: nothing is kept yet"), ('?', "In the list")];
+        foreach ((char key, string title) in pages)
         {
             bench.Do(new Key(key));
             Assert.Contains(title, bench.Text, StringComparison.Ordinal);
@@ -133,6 +133,8 @@ public sealed class ColumnsTests
         Assert.Contains("200 boards at 2.50", bench.Text, StringComparison.Ordinal);
         Assert.Contains("5 circuits fit", bench.Text, StringComparison.Ordinal);
     }
+
+    private static bool Ends(string row, string end) => row.EndsWith(end, StringComparison.Ordinal);
 
     private static string[] Right(Bench bench) => [.. bench.Rows.Select(row => row.Length > 120 ? row[120..] : "")];
 

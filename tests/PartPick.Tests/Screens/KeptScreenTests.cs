@@ -161,7 +161,7 @@ public sealed class KeptScreenTests
         Cells("circuits that fit", "5", "2");
         Cells("circuit ", "counter CNT-14-HC", "port MCU-KHZ-C");
         Assert.Contains("The same in all: waveform square", bench.Text, StringComparison.Ordinal);
-        Assert.DoesNotContain(rows, row => row.Contains("start-up margin 5", StringComparison.Ordinal) && row.Contains("tide", StringComparison.Ordinal));
+        Assert.DoesNotContain(rows, row => row.TrimStart().StartsWith("waveform ", StringComparison.Ordinal));
         Assert.All(rows, row => Assert.True(row.Length <= width));
         Assert.Equal(32768, bench.Ranking.Asked[^1].OutputHz);
         bench.Do(Key.Esc);
@@ -170,8 +170,11 @@ public sealed class KeptScreenTests
 
         void Cells(string label, string left, string right)
         {
-            string row = rows.First(each => each.Contains(label, StringComparison.Ordinal) && each.Contains(right, StringComparison.Ordinal));
-            Assert.True(row.IndexOf(left, StringComparison.Ordinal) < row.IndexOf(right, StringComparison.Ordinal), row);
+            string row = rows.First(
+                each => each.Contains(label, StringComparison.Ordinal) && each.Contains(right, StringComparison.Ordinal));
+            row = row[row.IndexOf(label, StringComparison.Ordinal)..];
+            int at = row.IndexOf(left, StringComparison.Ordinal);
+            Assert.True(at >= 0 && at < row.IndexOf(right, StringComparison.Ordinal), row);
         }
     }
 
@@ -184,7 +187,7 @@ public sealed class KeptScreenTests
         bench.Press(Key.CursorDown, new Key('d'));
         bench.SettleUntil(() => bench.Ranking.Asked.Count == 2);
         Assert.True(bench.Ranking.IsCancelled(0));
-        Assert.Contains("ranking as it stands, 0 %", bench.Text.Replace("Wanted", "as it stands", StringComparison.Ordinal), StringComparison.Ordinal);
+        Assert.Contains("ranking Wanted, 0 %", bench.Text, StringComparison.Ordinal);
         Assert.Contains("computing", bench.Text, StringComparison.Ordinal);
         bench.Ranking.Report(
             1, SampleRanking.Answer(SampleRanking.Wanted, SampleRanking.Counter) with { IsComplete = false, Covered = 2_061_500 });

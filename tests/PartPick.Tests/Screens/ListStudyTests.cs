@@ -143,7 +143,7 @@ public sealed class ListStudyTests
         return bench;
     }
 
-    private static CandidateParts Fit()
+    internal static CandidateParts Fit()
     {
         var parts = PartsCatalog.BuiltIn();
         return new CandidateParts

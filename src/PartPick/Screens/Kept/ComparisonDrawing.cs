@@ -45,7 +45,8 @@ internal sealed class ComparisonDrawing
             : "Side by side";
         ImmutableArray<Line> page = [.. Wanted(currency, out string same), .. Found(currency), Line.Empty, .. Same(same)];
         Line rule = Rules.Draw(state, place, _width, _glyphs, _comparison.Current is null ? Tone.Strong : Tone.Accent);
-        return [rule, Row("", row => (row.Kept is null ? "as it stands" : row.Name, Tone.Strong)), .. _comparison.Scroll.Cut(page, height - 2)];
+        Line names = Row("", row => (row.Kept is null ? "as it stands" : row.Name, Tone.Strong));
+        return [rule, names, .. _comparison.Scroll.Cut(page, height - 2)];
     }
 
     private List<Line> Wanted(string currency, out string same)

@@ -104,7 +104,7 @@ internal sealed class KeptNaming
         for (int number = 2; ; number++)
         {
             string tail = FormattableString.Invariant($" {number}");
-            string proposed = (name.Length + tail.Length > RequirementName.Longest ? name[..(RequirementName.Longest - tail.Length)] : name) + tail;
+            string proposed = name[..Math.Min(name.Length, RequirementName.Longest - tail.Length)] + tail;
             if (_kept.All(each => each.Name != proposed))
             {
                 return proposed;

@@ -35,7 +35,8 @@ public sealed class CatalogDesk(string catalogPath) : IShortlistDesk
         CatalogReading.All(catalogPath, cancellation).Then(catalog => Read(list, catalog));
 
     /// <inheritdoc/>
-    public Result<ListCircuit> Circuit(string list, int number, CancellationToken cancellation) => CatalogReading.All(catalogPath, cancellation).Then(catalog =>
+    public Result<ListCircuit> Circuit(string list, int number, CancellationToken cancellation) => CatalogReading.All(
+        catalogPath, cancellation).Then(catalog =>
         ShortlistStore.Read(catalogPath, list).Then(found => found.Entries.FirstOrDefault(entry => entry.Number == number) is { } entry
             ? new ShortlistReviewer(catalog).Review(list, entry).Then(review =>
                 ChosenCircuit.Of(review, catalog).Map(chosen => new ListCircuit(review, chosen, catalog)))
