@@ -58,10 +58,10 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
     private (string, string)[] Kept => model.Kept.CanKeep ? [("w", "kept")] : [];
 
     private (string, string)[] KeptKeys => model.Kept.Chosen.Kept is null
-        ? [("n", "keep it"), ("Space", "mark"), ("d", "side by side"), (UpDown, "choose"), ("?", "keys"), ("Esc", "back")]
+        ? [("n", "keep it"), ("Space", "mark"), ("d", "compare"), (UpDown, "choose"), ("?", "keys"), ("Esc", "back")]
         :
         [
-            ("n", "rename"), ("c", "copy"), ("Del", "take away"), ("Space", "mark"), ("d", "side by side"), ("Enter", "take it"),
+            ("n", "rename"), ("c", "copy"), ("Del", "away"), ("Space", "mark"), ("d", "compare"), ("Enter", "take"),
             ("Esc", "back"),
         ];
 

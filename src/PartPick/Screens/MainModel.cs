@@ -114,9 +114,9 @@ public sealed class MainModel
     /// <summary>Ends the ranking, and what is being looked for.</summary>
     public void Stop()
     {
-        _ranking.Stop();
-        Shortlists.Stop();
         Kept.Stop();
+        Shortlists.Stop();
+        _ranking.Stop();
     }
 
     /// <summary>Ranks again, as after the parts have changed.</summary>
@@ -128,6 +128,7 @@ public sealed class MainModel
     {
         ReadsParts = false;
         Wanted.Currency = currency;
+        Shortlists.Aside?.TryAgain();
         Redraw?.Invoke();
     }
 
@@ -206,7 +207,8 @@ public sealed class MainModel
         };
         Kept.Named += name => Wanted.Rename(name);
         Kept.Taken += Begin;
-        Kept.Comparison!.Ranks += ranks =>
+        Kept.Comparison!.Ranked += TakeInstead;
+        Kept.Comparison.Ranks += ranks =>
         {
             if (ranks)
             {
@@ -300,7 +302,17 @@ public sealed class MainModel
         if (_putOff)
         {
             _putOff = false;
-            RankAgain();
+            _ranking.Ask(Wanted.Current, TimeSpan.Zero);
+        }
+    }
+
+    // What was ranked for a comparison may be what the list was waiting for.
+    private void TakeInstead(RankingResult result)
+    {
+        if (_putOff && RankedFigures.AreSame(result.Requirement, Wanted.Current))
+        {
+            _putOff = false;
+            Take(result);
         }
     }
 

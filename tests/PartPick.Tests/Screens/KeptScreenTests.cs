@@ -202,6 +202,21 @@ public sealed class KeptScreenTests
     }
 
     [Fact]
+    public void What_the_comparison_ranked_for_the_sentence_is_not_ranked_again_for_the_list()
+    {
+        Keep("tide", 2000);
+        using Bench bench = Open(ranking: new FakeRanking { Holds = true });
+        bench.Do(new Key('w'));
+        bench.Press(Key.CursorDown);
+        bench.Ranking.Holds = false;
+        bench.Do(new Key('d'), Key.Esc, Key.Esc);
+        Assert.Equal([1000, 1000, 2000], bench.Ranking.Asked.Select(requirement => requirement.OutputHz));
+        Assert.True(bench.Ranking.IsCancelled(0));
+        Assert.False(bench.Model.IsRanking);
+        Assert.Contains("5 circuits fit", bench.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void With_no_mark_on_the_sentence_d_says_what_to_mark()
     {
         using Bench bench = Open();

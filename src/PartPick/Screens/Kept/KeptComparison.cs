@@ -22,6 +22,9 @@ internal sealed class KeptComparison(IRankingService service, ScreenWork work, R
     /// <summary>Raised when it begins to rank, and when it has ended.</summary>
     public event Action<bool>? Ranks;
 
+    /// <summary>Raised with each exact answer.</summary>
+    public event Action<RankingResult>? Ranked;
+
     /// <summary>Whether it is open.</summary>
     public bool IsOpen { get; private set; }
 
@@ -111,7 +114,9 @@ internal sealed class KeptComparison(IRankingService service, ScreenWork work, R
             Problem = answer.Problem;
             if (answer.IsOk)
             {
-                figures.Take(answer.Value with { Requirement = row.Requirement, IsComplete = true });
+                RankingResult exact = answer.Value with { Requirement = row.Requirement, IsComplete = true };
+                figures.Take(exact);
+                Ranked?.Invoke(exact);
             }
 
             Next();

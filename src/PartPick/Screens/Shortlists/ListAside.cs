@@ -45,6 +45,15 @@ internal sealed class ListAside(IShortlistDesk desk, LatestWork reading)
     /// <summary>Reads it anew, as after the parts have changed.</summary>
     public void Refresh() => Show(_list);
 
+    /// <summary>Reads it again if it could not be read, as where the catalogue was in use.</summary>
+    public void TryAgain()
+    {
+        if (Problem is not null)
+        {
+            Refresh();
+        }
+    }
+
     /// <summary>Ends the reading.</summary>
     public void Stop() => reading.Stop();
 
