@@ -1,0 +1,170 @@
+using PartPick.Selection;
+
+namespace PartPick.Screens;
+
+/// <summary>Sets the dots and letters of a picture: bands below, then curves, single points, marks, and limits where room is left.</summary>
+internal static class ChartPlot
+{
+    private const char Edge = ':';
+    private const char Inside = '.';
+
+    /// <summary>The field of dots.</summary>
+    /// <param name="chart">The numbers.</param>
+    /// <param name="width">Width in cells.</param>
+    /// <param name="height">Height in cells.</param>
+    /// <param name="glyphs">The signs.</param>
+    public static PlotDots Of(Chart chart, int width, int height, Glyphs glyphs)
+    {
+        var dots = new PlotDots(width, height, glyphs);
+        foreach (ChartBand band in chart.Bands)
+        {
+            Band(dots, chart, band);
+        }
+
+        for (int i = 0; i < chart.Curves.Length; i++)
+        {
+            Curve(dots, chart, chart.Curves[i]);
+        }
+
+        for (int i = 0; i < chart.Curves.Length; i++)
+        {
+            Letters(dots, chart, chart.Curves[i], i);
+        }
+
+        foreach (ChartSpot spot in chart.Spots)
+        {
+            (int x, int y) = Place(dots, chart, spot.Point);
+            dots.Letter(x, y, ChartKey.Sign(spot.Kind, glyphs));
+        }
+
+        foreach (ChartMark mark in chart.Marks)
+        {
+            (int x, int y) = Place(dots, chart, mark.Point);
+            dots.Letter(Math.Clamp(x, 0, dots.DotsAcross - 1), Math.Clamp(y, 0, dots.DotsDown - 1), mark.Letter);
+        }
+
+        foreach (ChartLimit limit in chart.Limits)
+        {
+            Limit(dots, chart, limit, glyphs);
+            Words(dots, chart, limit, glyphs);
+        }
+
+        return dots;
+    }
+
+    private static (int X, int Y) Place(PlotDots dots, Chart chart, ChartPoint point) =>
+        (dots.Column(chart.X.Place(point.X)), dots.Row(chart.Y.Place(point.Y)));
+
+    // Edges are drawn through, the inside is dotted thinly.
+    private static void Band(PlotDots dots, Chart chart, ChartBand band)
+    {
+        BandPoint[] points = [.. band.Points];
+        if (points.Length == 1)
+        {
+            points = [points[0], points[0]];
+        }
+
+        for (int i = 1; i < points.Length; i++)
+        {
+            (int x1, int low1) = Place(dots, chart, new ChartPoint(points[i - 1].X, points[i - 1].Low));
+            (int x2, int low2) = Place(dots, chart, new ChartPoint(points[i].X, points[i].Low));
+            int high1 = dots.Row(chart.Y.Place(points[i - 1].High));
+            int high2 = dots.Row(chart.Y.Place(points[i].High));
+            for (int x = x1; x <= x2; x++)
+            {
+                double part = x2 == x1 ? 0 : (double)(x - x1) / (x2 - x1);
+                int top = (int)Math.Round(high1 + part * (high2 - high1));
+                int bottom = (int)Math.Round(low1 + part * (low2 - low1));
+                for (int y = top + 1; y < bottom; y++)
+                {
+                    if (x % (2 * dots.Across) == 0 && y % dots.Down == dots.Down / 2)
+                    {
+                        dots.Dot(x, y, Inside);
+                    }
+                }
+            }
+
+            dots.Stroke(x1, low1, x2, low2, Edge);
+            dots.Stroke(x1, high1, x2, high2, Edge);
+        }
+    }
+
+    // A broken line, only where nothing else is.
+    private static void Limit(PlotDots dots, Chart chart, ChartLimit limit, Glyphs glyphs)
+    {
+        if (limit.IsUpright)
+        {
+            int column = dots.Column(chart.X.Place(limit.Value)) / dots.Across;
+            foreach (int at in Enumerable.Range(0, dots.Height).Where(at => at % 2 == 0 && dots.IsEmpty(column, at, 1)))
+            {
+                dots.Words(column, at, glyphs.Vertical.ToString());
+            }
+
+            return;
+        }
+
+        int row = dots.Row(chart.Y.Place(limit.Value)) / dots.Down;
+        foreach (int at in Enumerable.Range(0, dots.Width).Where(at => at % 3 != 2 && dots.IsEmpty(at, row, 1)))
+        {
+            dots.Words(at, row, glyphs.Horizontal.ToString());
+        }
+    }
+
+    // In the row of the limit at its right end; else beside it. Nothing is written over letters.
+    private static void Words(PlotDots dots, Chart chart, ChartLimit limit, Glyphs glyphs)
+    {
+        string text = " " + glyphs.Show(limit.Words) + " ";
+        if (limit.IsUpright)
+        {
+            int column = dots.Column(chart.X.Place(limit.Value)) / dots.Across;
+            int start = column + 1 + text.Length <= dots.Width ? column + 1 : column - text.Length;
+            int free = Enumerable.Range(0, dots.Height).FirstOrDefault(at => dots.IsEmpty(start, at, text.Length), -1);
+            if (free >= 0)
+            {
+                dots.Words(start, free, text);
+            }
+
+            return;
+        }
+
+        int row = dots.Row(chart.Y.Place(limit.Value)) / dots.Down;
+        int last = dots.Width - text.Length;
+        int[] starts = [.. Enumerable.Range(0, Math.Max(0, last + 1)).Select(k => last - k)];
+        foreach (int beside in new[] { row, row - 1, row + 1 })
+        {
+            // Only the limit's own line may be written over.
+            int at = starts.FirstOrDefault(start => beside == row ? dots.Holds(start, row, text.Length, glyphs.Horizontal)
+                : dots.IsEmpty(start, beside, text.Length), -1);
+            if (at >= 0)
+            {
+                dots.Words(at, beside, text);
+                return;
+            }
+        }
+    }
+
+    private static void Curve(PlotDots dots, Chart chart, ChartCurve curve)
+    {
+        (int X, int Y)[] places = [.. curve.Points.Select(point => Place(dots, chart, point))];
+        for (int i = 0; i < places.Length; i++)
+        {
+            (int X, int Y) before = places[Math.Max(0, i - 1)];
+            dots.Stroke(before.X, before.Y, places[i].X, places[i].Y, curve.Letter);
+        }
+    }
+
+    // A curve's letter stands on it in a few places, another curve's elsewhere.
+    private static void Letters(PlotDots dots, Chart chart, ChartCurve curve, int number)
+    {
+        const int most = 3;
+        int count = chart.Curves.Length;
+        for (int k = 0; k < most; k++)
+        {
+            double place = (k * count + number + 0.5) / (most * count);
+            double x = curve.Points[0].X + place * (curve.Points[^1].X - curve.Points[0].X);
+            ChartPoint point = curve.Points.MinBy(each => Math.Abs(each.X - x));
+            (int column, int row) = Place(dots, chart, new ChartPoint(point.X, point.Y));
+            dots.Letter(column, row, curve.Letter);
+        }
+    }
+}
