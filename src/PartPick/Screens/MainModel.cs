@@ -72,6 +72,9 @@ public sealed class MainModel
     /// <summary>The lists of candidates.</summary>
     internal ShortlistModel Shortlists { get; private set; } = new();
 
+    /// <summary>The pictures of a candidate.</summary>
+    internal PicturesModel Pictures { get; private set; } = new();
+
     /// <summary>Where the keys go.</summary>
     public Place Place { get; private set; }
 
@@ -107,6 +110,7 @@ public sealed class MainModel
     {
         _ranking.Stop();
         Shortlists.Stop();
+        Pictures.Close();
     }
 
     /// <summary>Ranks again, as after the parts have changed.</summary>
@@ -144,7 +148,7 @@ public sealed class MainModel
             return;
         }
 
-        if (Shortlists.Press(key, out string? notice))
+        if (Shortlists.Press(key, out string? notice) || Pictures.Press(key, out notice))
         {
             Notice = notice;
             return;
@@ -174,6 +178,15 @@ public sealed class MainModel
     {
         Shortlists = new ShortlistModel(desk, work, _glyphs.IsAscii);
         Shortlists.Redraw += () => Redraw?.Invoke();
+    }
+
+    /// <summary>Lets pictures of circuits be opened; without it there are none.</summary>
+    /// <param name="work">Does what takes long.</param>
+    public void DrawPicturesWith(ScreenWork work)
+    {
+        Pictures = new PicturesModel(work);
+        Pictures.Redraw += () => Redraw?.Invoke();
+        Pictures.Said += Say;
     }
 
     /// <summary>The screen as lines, each as wide as the screen.</summary>
@@ -319,6 +332,9 @@ public sealed class MainModel
             case { Name: KeyName.Letter, Letter: 'l' }:
                 Notice = Shortlists.Open();
                 break;
+            case { Name: KeyName.Letter, Letter: 'p' } when List is { Chosen: { } chosen, Result: { } result }:
+                Pictures.Open(chosen, result);
+                break;
             case { Name: KeyName.Letter, Letter: 'q' }:
                 IsDone = true;
                 break;
@@ -344,6 +360,7 @@ public sealed class MainModel
     {
         IsStale = false;
         List.Show(result);
+        Pictures.Follow(result);
         if (Place == Place.Circuit && !_reading.IsThere)
         {
             Place = Place.List;

@@ -34,6 +34,7 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
         int room = height - sentence.Length - foot.Length;
         ImmutableArray<Line> body = model.ShowsKeys ? KeysBody(room)
             : model.Shortlists.IsOpen ? ShortlistDrawing.Draw(model.Shortlists.Page, width, room, glyphs)
+            : model.Pictures.IsOpen ? PicturesDrawing.Draw(model.Pictures, width, room, glyphs)
             : model.Place == Place.Circuit && model.List.Chosen is { } candidate ? CircuitBody(candidate, room)
             : width >= ListShape.Full + 2 + Schematic.Width ? WideBody(room)
             : NarrowBody(room);

@@ -1,0 +1,191 @@
+using PartPick.Selection;
+
+namespace PartPick.Output;
+
+/// <summary>Draws a picture of numbers as SVG. Curves differ by their strokes and letters, never by colour.</summary>
+internal sealed class ChartSvg
+{
+    private const double Width = 760;
+    private const double Left = 96;
+    private const double Right = 40;
+    private const double Top = SvgSheet.Head + 24;
+    private const double High = 340;
+    private const double Bottom = Top + High;
+    private const double RowHeight = 18;
+    private const double LetterWidth = 7;
+    private static readonly string[] Strokes = ["", "9 4", "2 4", "12 4 2 4"];
+
+    private readonly SvgText _svg = new();
+    private readonly Chart _chart;
+
+    private ChartSvg(Chart chart) => _chart = chart;
+
+    /// <summary>The SVG file.</summary>
+    /// <param name="chart">The numbers.</param>
+    /// <param name="subtitle">Of which circuit they are.</param>
+    public static string Of(Chart chart, string subtitle)
+    {
+        var drawing = new ChartSvg(chart);
+        drawing.Axes();
+        foreach (ChartBand band in chart.Bands)
+        {
+            drawing.Band(band);
+        }
+
+        foreach (ChartLimit limit in chart.Limits)
+        {
+            drawing.Limit(limit);
+        }
+
+        for (int i = 0; i < chart.Curves.Length; i++)
+        {
+            drawing.Curve(chart.Curves[i], i);
+        }
+
+        foreach (ChartSpot spot in chart.Spots)
+        {
+            drawing.Spot(spot.Kind, drawing.X(spot.Point.X), drawing.Y(spot.Point.Y));
+        }
+
+        foreach (ChartMark mark in chart.Marks)
+        {
+            (double x, double y) = (drawing.X(mark.Point.X), drawing.Y(mark.Point.Y));
+            drawing._svg.Circle(x, y, 4, "full").Text(x + (x > Width - Right - 20 ? -8 : 8), y - 8, mark.Letter.ToString(), "letter",
+                x > Width - Right - 20 ? "end" : "start");
+        }
+
+        double end = drawing.Key(Bottom + 62);
+        return SvgSheet.Of(chart.Title, subtitle, Width, end, drawing._svg.ToString());
+    }
+
+    private double X(double value) => Left + Clamped(_chart.X.Place(value)) * (Width - Left - Right);
+
+    private double Y(double value) => Bottom - Clamped(_chart.Y.Place(value)) * High;
+
+    // What lies far outside would only make a renderer's numbers large.
+    private static double Clamped(double place) => Math.Clamp(place, -0.02, 1.02);
+
+    private void Axes()
+    {
+        foreach (AxisTick tick in _chart.X.Ticks(9))
+        {
+            _svg.Line(X(tick.Value), Top, X(tick.Value), Bottom, "grid").Line(X(tick.Value), Bottom, X(tick.Value), Bottom + 5, "axis")
+                .Text(X(tick.Value), Bottom + 20, tick.Text, anchor: "middle");
+        }
+
+        foreach (AxisTick tick in _chart.Y.Ticks(9))
+        {
+            _svg.Line(Left, Y(tick.Value), Width - Right, Y(tick.Value), "grid").Line(Left - 5, Y(tick.Value), Left, Y(tick.Value), "axis")
+                .Text(Left - 9, Y(tick.Value) + 4, tick.Text, anchor: "end");
+        }
+
+        _svg.Points([(Left, Top), (Left, Bottom), (Width - Right, Bottom)], "axis")
+            .Text(16, Top - 8, _chart.Y.Heading)
+            .Text(Width - Right, Bottom + 40, _chart.X.Heading, anchor: "end");
+    }
+
+    private void Band(ChartBand band)
+    {
+        IEnumerable<(double X, double Y)> high = band.Points.Select(point => (X(point.X), Y(point.High)));
+        IEnumerable<(double X, double Y)> low = band.Points.Reverse().Select(point => (X(point.X), Y(point.Low)));
+        _svg.Points([.. high, .. low], "band", isClosed: true);
+    }
+
+    private void Limit(ChartLimit limit)
+    {
+        if (limit.IsUpright)
+        {
+            double x = X(limit.Value);
+            bool before = x + limit.Words.Length * LetterWidth > Width - Right;
+            _svg.Line(x, Top, x, Bottom, "limit").Text(x + (before ? -6 : 6), Top + 12, limit.Words, anchor: before ? "end" : "start");
+            return;
+        }
+
+        double y = Y(limit.Value);
+        _svg.Line(Left, y, Width - Right, y, "limit").Text(Width - Right, y < Top + 20 ? y + 15 : y - 6, limit.Words, anchor: "end");
+    }
+
+    // The letter stands on the curve at a place of its own.
+    private void Curve(ChartCurve curve, int number)
+    {
+        _svg.Points(curve.Points.Select(point => (X(point.X), Y(point.Y))), "curve", Strokes[number % Strokes.Length]);
+        double place = (number + 0.5) / _chart.Curves.Length;
+        double wanted = curve.Points[0].X + place * (curve.Points[^1].X - curve.Points[0].X);
+        ChartPoint at = curve.Points.MinBy(point => Math.Abs(point.X - wanted));
+        _svg.Text(X(at.X), Y(at.Y) - 6, curve.Letter.ToString(), "letter", "middle");
+    }
+
+    private void Spot(SpotKind kind, double x, double y)
+    {
+        switch (kind)
+        {
+            case SpotKind.Front:
+                _svg.Box(x - 4.5, y - 4.5, 9, 9, "full");
+                break;
+            case SpotKind.Chosen:
+                _svg.Line(x - 7, y - 7, x + 7, y + 7, "curve").Line(x - 7, y + 7, x + 7, y - 7, "curve").Circle(x, y, 9, "open");
+                break;
+            default:
+                _svg.Circle(x, y, 4, "open");
+                break;
+        }
+    }
+
+    private double Key(double y)
+    {
+        for (int i = 0; i < _chart.Curves.Length; i++)
+        {
+            _svg.Points([(Left, y - 4), (Left + 44, y - 4)], "curve", Strokes[i % Strokes.Length]);
+            Row($"{_chart.Curves[i].Letter}  {_chart.Curves[i].Name}");
+        }
+
+        foreach (ChartBand band in _chart.Bands)
+        {
+            _svg.Box(Left, y - 11, 44, 14, "band");
+            Row(band.Name);
+        }
+
+        foreach (SpotKind kind in _chart.Spots.Select(spot => spot.Kind).Distinct().OrderDescending())
+        {
+            Spot(kind, Left + 22, y - 4);
+            Row(kind switch { SpotKind.Chosen => "the chosen one", SpotKind.Front => "on the front", _ => "another" });
+        }
+
+        foreach (ChartMark mark in _chart.Marks)
+        {
+            _svg.Circle(Left + 22, y - 4, 4, "full");
+            Row($"{mark.Letter}  {mark.Words}");
+        }
+
+        foreach (string line in _chart.Notes.SelectMany(note => Wrapped(note, (int)((Width - 32) / LetterWidth))))
+        {
+            _svg.Text(16, y, line);
+            y += RowHeight;
+        }
+
+        return y;
+
+        void Row(string words)
+        {
+            _svg.Text(Left + 56, y, words);
+            y += RowHeight;
+        }
+    }
+
+    private static IEnumerable<string> Wrapped(string text, int longest)
+    {
+        string line = "";
+        foreach (string word in text.Split(' '))
+        {
+            if (line.Length > 0 && line.Length + 1 + word.Length > longest)
+            {
+                yield return line;
+                line = "";
+            }
+
+            line += line.Length == 0 ? word : " " + word;
+        }
+
+        yield return line;
+    }
+}
