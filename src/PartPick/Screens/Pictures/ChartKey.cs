@@ -15,7 +15,7 @@ internal static class ChartKey
         (string Sign, string Name)[] signs =
         [
             .. chart.Curves.Select(curve => (curve.Letter.ToString(), curve.Name)),
-            .. chart.Bands.Select(band => (glyphs.IsAscii ? ": :" : "dotted", band.Name)),
+            .. chart.Bands.Select(band => ($"{glyphs.Free} {glyphs.Free}", band.Name)),
             .. chart.Spots.Select(spot => spot.Kind).Distinct().OrderDescending()
                 .Select(kind => (Sign(kind, glyphs).ToString(), Word(kind))),
             .. chart.Marks.Select(mark => (mark.Letter.ToString(), mark.Words)),

@@ -6,7 +6,6 @@ namespace PartPick.Screens;
 internal static class ChartPlot
 {
     private const char Edge = ':';
-    private const char Inside = '.';
 
     /// <summary>The field of dots.</summary>
     /// <param name="chart">The numbers.</param>
@@ -18,12 +17,13 @@ internal static class ChartPlot
         var dots = new PlotDots(width, height, glyphs);
         foreach (ChartBand band in chart.Bands)
         {
-            Band(dots, chart, band);
+            Edges(dots, chart, band);
         }
 
-        for (int i = 0; i < chart.Curves.Length; i++)
+        // In ASCII the first curve, which is what the picture is about, covers the others.
+        foreach (ChartCurve curve in chart.Curves.Reverse())
         {
-            Curve(dots, chart, chart.Curves[i]);
+            Curve(dots, chart, curve);
         }
 
         for (int i = 0; i < chart.Curves.Length; i++)
@@ -43,6 +43,11 @@ internal static class ChartPlot
             dots.Letter(Math.Clamp(x, 0, dots.DotsAcross - 1), Math.Clamp(y, 0, dots.DotsDown - 1), mark.Letter);
         }
 
+        foreach (ChartBand band in chart.Bands)
+        {
+            Inside(dots, chart, band, glyphs);
+        }
+
         foreach (ChartLimit limit in chart.Limits)
         {
             Limit(dots, chart, limit, glyphs);
@@ -55,37 +60,30 @@ internal static class ChartPlot
     private static (int X, int Y) Place(PlotDots dots, Chart chart, ChartPoint point) =>
         (dots.Column(chart.X.Place(point.X)), dots.Row(chart.Y.Place(point.Y)));
 
-    // Edges are drawn through, the inside is dotted thinly.
-    private static void Band(PlotDots dots, Chart chart, ChartBand band)
+    private static void Edges(PlotDots dots, Chart chart, ChartBand band)
     {
-        BandPoint[] points = [.. band.Points];
-        if (points.Length == 1)
+        for (int i = 0; i < band.Points.Length; i++)
         {
-            points = [points[0], points[0]];
-        }
-
-        for (int i = 1; i < points.Length; i++)
-        {
-            (int x1, int low1) = Place(dots, chart, new ChartPoint(points[i - 1].X, points[i - 1].Low));
-            (int x2, int low2) = Place(dots, chart, new ChartPoint(points[i].X, points[i].Low));
-            int high1 = dots.Row(chart.Y.Place(points[i - 1].High));
-            int high2 = dots.Row(chart.Y.Place(points[i].High));
-            for (int x = x1; x <= x2; x++)
-            {
-                double part = x2 == x1 ? 0 : (double)(x - x1) / (x2 - x1);
-                int top = (int)Math.Round(high1 + part * (high2 - high1));
-                int bottom = (int)Math.Round(low1 + part * (low2 - low1));
-                for (int y = top + 1; y < bottom; y++)
-                {
-                    if (x % (2 * dots.Across) == 0 && y % dots.Down == dots.Down / 2)
-                    {
-                        dots.Dot(x, y, Inside);
-                    }
-                }
-            }
-
+            (BandPoint from, BandPoint to) = (band.Points[Math.Max(0, i - 1)], band.Points[i]);
+            (int x1, int low1) = Place(dots, chart, new ChartPoint(from.X, from.Low));
+            (int x2, int low2) = Place(dots, chart, new ChartPoint(to.X, to.Low));
             dots.Stroke(x1, low1, x2, low2, Edge);
-            dots.Stroke(x1, high1, x2, high2, Edge);
+            dots.Stroke(x1, dots.Row(chart.Y.Place(from.High)), x2, dots.Row(chart.Y.Place(to.High)), Edge);
+        }
+    }
+
+    // Every other cell between the edges that nothing else is in.
+    private static void Inside(PlotDots dots, Chart chart, ChartBand band, Glyphs glyphs)
+    {
+        for (int column = 0; column < dots.Width; column += 2)
+        {
+            BandPoint at = band.Points.MinBy(point => Math.Abs(dots.Column(chart.X.Place(point.X)) / dots.Across - column));
+            int top = dots.Row(chart.Y.Place(at.High)) / dots.Down;
+            int bottom = dots.Row(chart.Y.Place(at.Low)) / dots.Down;
+            foreach (int row in Enumerable.Range(top + 1, Math.Max(0, bottom - top - 1)).Where(row => dots.IsEmpty(column, row, 1)))
+            {
+                dots.Words(column, row, glyphs.Free.ToString());
+            }
         }
     }
 

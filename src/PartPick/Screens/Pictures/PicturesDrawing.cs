@@ -26,7 +26,10 @@ internal static class PicturesDrawing
         string circuit = CircuitPane.ShortTitle(model.Candidate!);
         if (count == 1)
         {
-            lines.Add(Rules.Draw($"{PictureBlock.Title(model, model.At)}: {circuit}", place, width, glyphs));
+            // Which picture of how many counts for more than the stage of the divider.
+            CandidateParts choice = model.Candidate!.Choice;
+            string title = $"{PictureBlock.Title(model, model.At)}: {choice.Circuit.Word()} {choice.Amplifier.Id}";
+            lines.Add(Rules.Draw(title, place, width, glyphs));
             lines.AddRange(PictureBlock.Draw(model, model.At, width, height - 1, glyphs));
             return lines.ToImmutable();
         }
