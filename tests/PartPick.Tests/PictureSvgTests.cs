@@ -2,7 +2,6 @@ using System.Globalization;
 using System.Xml.Linq;
 using PartPick.Catalog;
 using PartPick.Output;
-using PartPick.Screens;
 using PartPick.Selection;
 using PartPick.Tests.Screens;
 using PartPick.Tests.Screens.Pictures;

@@ -13,7 +13,7 @@ internal sealed class ChartSvg
     private const double Bottom = Top + High;
     private const double RowHeight = 18;
     private const double LetterWidth = 7;
-    private static readonly string[] Strokes = ["", "9 4", "2 4", "12 4 2 4"];
+    private static readonly string[] Strokes = ["", "7 3", "2 3", "10 3 2 3"];
 
     private readonly SvgText _svg = new();
     private readonly Chart _chart;
@@ -108,11 +108,13 @@ internal sealed class ChartSvg
     // The letter stands on the curve at a place of its own.
     private void Curve(ChartCurve curve, int number)
     {
-        _svg.Points(curve.Points.Select(point => (X(point.X), Y(point.Y))), "curve", Strokes[number % Strokes.Length]);
-        double place = (number + 0.5) / _chart.Curves.Length;
-        double wanted = curve.Points[0].X + place * (curve.Points[^1].X - curve.Points[0].X);
-        ChartPoint at = curve.Points.MinBy(point => Math.Abs(point.X - wanted));
-        _svg.Text(X(at.X), Y(at.Y) - 6, curve.Letter.ToString(), "letter", "middle");
+        (double X, double Y)[] points = [.. curve.Points.Select(point => (X(point.X), Y(point.Y)))];
+        _svg.Points(points, "curve", Strokes[number % Strokes.Length]);
+        double x = points[0].X + (number + 0.5) / _chart.Curves.Length * (points[^1].X - points[0].X);
+        int at = Math.Max(1, Array.FindIndex(points, point => point.X >= x));
+        (double X, double Y) from = points[at - 1], to = points[Math.Min(at, points.Length - 1)];
+        double part = to.X == from.X ? 0 : (x - from.X) / (to.X - from.X);
+        _svg.Text(x - 4, from.Y + part * (to.Y - from.Y) - 7, curve.Letter.ToString(), "letter", "end");
     }
 
     private void Spot(SpotKind kind, double x, double y)

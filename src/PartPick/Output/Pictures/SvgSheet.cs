@@ -15,7 +15,7 @@ internal static class SvgSheet
         .schematic text, .bars text { font: 13px monospace; }
         .axis { stroke: currentColor; fill: none; stroke-width: 1.2; }
         .grid { stroke: currentColor; stroke-opacity: 0.15; fill: none; }
-        .limit { stroke: currentColor; fill: none; stroke-width: 1.6; stroke-dasharray: 10 6; }
+        .limit { stroke: currentColor; fill: none; stroke-width: 1; stroke-dasharray: 22 7; }
         .curve { stroke: currentColor; fill: none; stroke-width: 2; stroke-linejoin: round; }
         .band { stroke: currentColor; stroke-width: 0.8; fill: currentColor; fill-opacity: 0.12; }
         .open { stroke: currentColor; fill: none; stroke-width: 1.6; }

@@ -156,13 +156,15 @@ internal static class ChartPlot
     {
         const int most = 3;
         int count = chart.Curves.Length;
+        (int X, int Y)[] places = [.. curve.Points.Select(point => Place(dots, chart, point))];
         for (int k = 0; k < most; k++)
         {
             double place = (k * count + number + 0.5) / (most * count);
-            double x = curve.Points[0].X + place * (curve.Points[^1].X - curve.Points[0].X);
-            ChartPoint point = curve.Points.MinBy(each => Math.Abs(each.X - x));
-            (int column, int row) = Place(dots, chart, new ChartPoint(point.X, point.Y));
-            dots.Letter(column, row, curve.Letter);
+            int column = (int)(places[0].X + place * (places[^1].X - places[0].X));
+            int at = Math.Max(1, Array.FindIndex(places, each => each.X >= column));
+            ((int X, int Y) from, (int X, int Y) to) = (places[Math.Min(at, places.Length) - 1], places[Math.Min(at, places.Length - 1)]);
+            double part = to.X == from.X ? 0 : (double)(column - from.X) / (to.X - from.X);
+            dots.Letter(column, (int)Math.Round(from.Y + part * (to.Y - from.Y)), curve.Letter);
         }
     }
 }
