@@ -7,7 +7,7 @@ public class PictureCommandTests
 {
     private const string Wanted = """
         { "output": "4.096 MHz", "budget": "150 ppm", "supply": ["4.5 V", "5.5 V"], "temperature": [0, 50], "builds": 100,
-          "circuits": ["gate"], "margin": 5 }
+          "circuits": ["gate"], "margin": 5, "capacitorSeries": "E6" }
         """;
 
     private static readonly string Requirement = Run.File(Wanted, "wanted.json");

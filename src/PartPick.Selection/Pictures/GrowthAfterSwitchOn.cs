@@ -36,8 +36,12 @@ public static class GrowthAfterSwitchOn
         ArgumentNullException.ThrowIfNull(circuit);
         return OscillatorAnalysis.FindGrowth(circuit, cancellation) is { } growth
             ? Result.Ok(Draw(growth))
-            : Result.Fail<Chart>("growth", "cannot be drawn, for the circuit does not build up from noise", "a circuit that builds up");
+            : Result.Fail<Chart>("growth", Why(circuit), "a circuit that builds up from noise");
     }
+
+    private static string Why(OscillatorCircuit circuit) => OscillatorAnalysis.AnalyseStartUp(circuit).GrowthRatePerSecond > 0
+        ? "cannot be followed up to a running amplitude"
+        : "cannot be drawn, for the circuit does not build up from noise";
 
     private static Chart Draw(AmplitudeGrowth growth)
     {

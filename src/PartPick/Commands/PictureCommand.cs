@@ -119,23 +119,10 @@ internal static class PictureCommand
     // A ranking takes its time: what cannot be written is said before it.
     private static void Check(ExportTarget target)
     {
-        if (target.Path == "-")
+        if (target.Path != "-"
+            && PictureFile.Check(target.Path, target.Replaces, target.Where, "another name, or --force to replace it") is { } problem)
         {
-            return;
-        }
-
-        if (!Path.GetExtension(target.Path).Equals(".svg", StringComparison.OrdinalIgnoreCase))
-        {
-            throw new CommandFailure(
-                new Problem(target.Where, $"{Problem.Quote(target.Path)} is no name of a picture", "a name with .svg, or - for standard output"),
-                ExitStatus.WrongInput);
-        }
-
-        if (!target.Replaces && File.Exists(target.Path))
-        {
-            throw new CommandFailure(
-                new Problem(target.Where, $"{Problem.Quote(target.Path)} is there already", "another name, or --force to replace it"),
-                ExitStatus.WrongInput);
+            throw new CommandFailure(problem, ExitStatus.WrongInput);
         }
     }
 

@@ -15,7 +15,7 @@ internal static class PictureSvg
 
     /// <summary>Whether a picture is drawn of numbers; the budget and the schematic are not.</summary>
     /// <param name="kind">The picture.</param>
-    public static bool Draws(PictureKind kind) => kind is not (PictureKind.Budget or PictureKind.Schematic);
+    public static bool IsChart(PictureKind kind) => kind is not (PictureKind.Budget or PictureKind.Schematic);
 
     /// <summary>The SVG file.</summary>
     /// <param name="kind">The picture.</param>

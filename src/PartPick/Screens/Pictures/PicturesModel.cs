@@ -143,7 +143,7 @@ internal sealed class PicturesModel
 
     private string? AskFile()
     {
-        if (PictureSvg.Draws(At) && ChartOf(At) is not { IsOk: true })
+        if (PictureSvg.IsChart(At) && ChartOf(At) is not { IsOk: true })
         {
             return ChartOf(At)?.Problem?.ToString() ?? "The picture is still being computed.";
         }
@@ -172,9 +172,8 @@ internal sealed class PicturesModel
     {
         string svg = PictureSvg.Of(At, Candidate!, Result!.Requirement, ChartOf(At));
         _writing!.Start(
-            _ => File.Exists(path)
-                ? new Problem("file", $"{Problem.Quote(path)} is there already", "another name")
-                : WholeFile.Write(path, new UTF8Encoding(false).GetBytes(svg), replace: false, "file"),
+            _ => PictureFile.Check(path, replaces: false, "file", "another name")
+                ?? WholeFile.Write(path, new UTF8Encoding(false).GetBytes(svg), replace: false, "file"),
             problem =>
             {
                 file.Problem = problem?.ToString();
