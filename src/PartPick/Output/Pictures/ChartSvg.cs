@@ -11,9 +11,7 @@ internal sealed class ChartSvg
     private const double Top = SvgSheet.Head + 24;
     private const double High = 340;
     private const double Bottom = Top + High;
-    private const double RowHeight = 18;
     private const double LetterWidth = 7;
-    private static readonly string[] Strokes = ["", "7 3", "2 3", "10 3 2 3"];
 
     private readonly SvgText _svg = new();
     private readonly Chart _chart;
@@ -44,7 +42,7 @@ internal sealed class ChartSvg
 
         foreach (ChartSpot spot in chart.Spots)
         {
-            drawing.Spot(spot.Kind, drawing.X(spot.Point.X), drawing.Y(spot.Point.Y));
+            ChartSvgKey.Spot(drawing._svg, spot.Kind, drawing.X(spot.Point.X), drawing.Y(spot.Point.Y));
         }
 
         foreach (ChartMark mark in chart.Marks)
@@ -54,7 +52,7 @@ internal sealed class ChartSvg
                 x > Width - Right - 20 ? "end" : "start");
         }
 
-        double end = drawing.Key(Bottom + 62);
+        double end = ChartSvgKey.Draw(drawing._svg, chart, Left, Bottom + 62, Width);
         return SvgSheet.Of(chart.Title, subtitle, Width, end, drawing._svg.ToString());
     }
 
@@ -109,85 +107,11 @@ internal sealed class ChartSvg
     private void Curve(ChartCurve curve, int number)
     {
         (double X, double Y)[] points = [.. curve.Points.Select(point => (X(point.X), Y(point.Y)))];
-        _svg.Points(points, "curve", Strokes[number % Strokes.Length]);
+        _svg.Points(points, "curve", ChartSvgKey.Strokes(number));
         double x = points[0].X + (number + 0.5) / _chart.Curves.Length * (points[^1].X - points[0].X);
         int at = Math.Max(1, Array.FindIndex(points, point => point.X >= x));
         (double X, double Y) from = points[at - 1], to = points[Math.Min(at, points.Length - 1)];
         double part = to.X == from.X ? 0 : (x - from.X) / (to.X - from.X);
         _svg.Text(x - 4, from.Y + part * (to.Y - from.Y) - 7, curve.Letter.ToString(), "letter", "end");
-    }
-
-    private void Spot(SpotKind kind, double x, double y)
-    {
-        switch (kind)
-        {
-            case SpotKind.Front:
-                _svg.Box(x - 4.5, y - 4.5, 9, 9, "full");
-                break;
-            case SpotKind.Chosen:
-                _svg.Line(x - 7, y - 7, x + 7, y + 7, "curve").Line(x - 7, y + 7, x + 7, y - 7, "curve").Circle(x, y, 9, "open");
-                break;
-            default:
-                _svg.Circle(x, y, 4, "open");
-                break;
-        }
-    }
-
-    private double Key(double y)
-    {
-        for (int i = 0; i < _chart.Curves.Length; i++)
-        {
-            _svg.Points([(Left, y - 4), (Left + 44, y - 4)], "curve", Strokes[i % Strokes.Length]);
-            Row($"{_chart.Curves[i].Letter}  {_chart.Curves[i].Name}");
-        }
-
-        foreach (ChartBand band in _chart.Bands)
-        {
-            _svg.Box(Left, y - 11, 44, 14, "band");
-            Row(band.Name);
-        }
-
-        foreach (SpotKind kind in _chart.Spots.Select(spot => spot.Kind).Distinct().OrderDescending())
-        {
-            Spot(kind, Left + 22, y - 4);
-            Row(kind switch { SpotKind.Chosen => "the chosen one", SpotKind.Front => "on the front", _ => "another" });
-        }
-
-        foreach (ChartMark mark in _chart.Marks)
-        {
-            _svg.Circle(Left + 22, y - 4, 4, "full");
-            Row($"{mark.Letter}  {mark.Words}");
-        }
-
-        foreach (string line in _chart.Notes.SelectMany(note => Wrapped(note, (int)((Width - 32) / LetterWidth))))
-        {
-            _svg.Text(16, y, line);
-            y += RowHeight;
-        }
-
-        return y;
-
-        void Row(string words)
-        {
-            _svg.Text(Left + 56, y, words);
-            y += RowHeight;
-        }
-    }
-
-    private static IEnumerable<string> Wrapped(string text, int longest)
-    {
-        string line = "";
-        foreach (string word in text.Split(' '))
-        {
-            if (line.Length > 0 && line.Length + 1 + word.Length > longest)
-            {
-                yield return line;
-                line = "";
-            }
-
-            line += line.Length == 0 ? word : " " + word;
-        }
-
-        yield return line;
     }
 }

@@ -46,7 +46,8 @@ internal static class ChartKey
         _ => 'o',
     };
 
-    private static string Word(SpotKind kind) => kind switch
+    /// <summary>The words for a single point.</summary>
+    public static string Word(SpotKind kind) => kind switch
     {
         SpotKind.Chosen => "the chosen one",
         SpotKind.Front => "on the front",

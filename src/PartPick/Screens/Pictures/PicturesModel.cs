@@ -1,4 +1,3 @@
-using System.Collections.Immutable;
 using System.Text;
 using PartPick.Output;
 using PartPick.Selection;
@@ -10,10 +9,7 @@ namespace PartPick.Screens;
 /// <summary>The pictures of one candidate. Takes the keys while it is open; what takes long to compute follows from the background.</summary>
 internal sealed class PicturesModel
 {
-    private readonly Dictionary<PictureKind, Result<Chart>> _charts = [];
-    private readonly ScreenWork? _work;
-    private readonly LatestWork? _margin;
-    private readonly LatestWork? _growth;
+    private readonly PictureCharts? _charts;
     private readonly LatestWork? _writing;
     private AskedFields? _file;
 
@@ -26,8 +22,8 @@ internal sealed class PicturesModel
     /// <param name="work">Does what takes long.</param>
     public PicturesModel(ScreenWork work)
     {
-        _work = work;
-        (_margin, _growth, _writing) = (new LatestWork(work), new LatestWork(work), new LatestWork(work));
+        (_charts, _writing) = (new PictureCharts(work), new LatestWork(work));
+        _charts.Changed += () => Redraw?.Invoke();
     }
 
     /// <summary>Raised when the screen looks different without a key having been pressed.</summary>
@@ -53,25 +49,18 @@ internal sealed class PicturesModel
 
     /// <summary>The numbers of a picture, or why there are none; null while they are computed, and for what is no chart.</summary>
     /// <param name="kind">The picture.</param>
-    public Result<Chart>? ChartOf(PictureKind kind) => _charts.GetValueOrDefault(kind);
+    public Result<Chart>? ChartOf(PictureKind kind) => _charts?.Of(kind);
 
     /// <summary>Opens the pictures of a candidate, at the one that was last looked at.</summary>
     /// <param name="candidate">The candidate.</param>
     /// <param name="result">The ranking that it belongs to.</param>
     public void Open(Candidate candidate, RankingResult result)
     {
-        if (_work is null)
+        if (_charts is not null)
         {
-            return;
+            (Candidate, Result, _file) = (candidate, result, null);
+            _charts.Start(candidate, result);
         }
-
-        (Candidate, Result, _file) = (candidate, result, null);
-        _charts.Clear();
-        Requirement requirement = result.Requirement;
-        _charts[PictureKind.Error] = ErrorOverTemperature.Of(candidate, requirement);
-        _charts[PictureKind.Scatter] = ErrorAgainstCost.Of(result, candidate);
-        _margin!.Start(stop => MarginOverSupply.Of(candidate, requirement, stop), chart => Take(PictureKind.Margin, chart));
-        _growth!.Start(stop => GrowthAfterSwitchOn.Of(candidate, stop), chart => Take(PictureKind.Growth, chart));
     }
 
     /// <summary>Takes that the ranking has another answer: the candidate stays, what it stands among changes.</summary>
@@ -83,7 +72,7 @@ internal sealed class PicturesModel
         {
             Result = result;
             Candidate = result.Candidates.FirstOrDefault(each => each.Id == candidate.Id) ?? candidate;
-            _charts[PictureKind.Scatter] = ErrorAgainstCost.Of(result, Candidate);
+            _charts!.Follow(Candidate, result);
         }
     }
 
@@ -91,8 +80,7 @@ internal sealed class PicturesModel
     public void Close()
     {
         (Candidate, _file) = (null, null);
-        _margin?.Stop();
-        _growth?.Stop();
+        _charts?.Stop();
     }
 
     /// <summary>Takes a key, if they are open.</summary>
@@ -134,12 +122,6 @@ internal sealed class PicturesModel
 
     private void Move(int step) =>
         At = PictureKinds.All[((int)At + step + PictureKinds.All.Length) % PictureKinds.All.Length];
-
-    private void Take(PictureKind kind, Result<Chart> chart)
-    {
-        _charts[kind] = chart;
-        Redraw?.Invoke();
-    }
 
     private string? AskFile()
     {
