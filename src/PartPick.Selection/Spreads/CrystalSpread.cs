@@ -38,8 +38,12 @@ public static class CrystalSpread
             double reach = Math.Max(
                 Math.Abs(requirement.TemperatureMinCelsius - turnover),
                 Math.Abs(requirement.TemperatureMaxCelsius - turnover));
-            double curvature = Math.Abs(part.ParabolaPerSquareKelvin ?? ForkParabolaPerSquareKelvin);
-            return new BudgetTerm(Term, curvature * reach * reach, RestsOn(part, "parabola", part.ParabolaPerSquareKelvin));
+            double parabola = part.ParabolaPerSquareKelvin ?? ForkParabolaPerSquareKelvin;
+            double curvature = Math.Abs(parabola);
+            return new BudgetTerm(Term, curvature * reach * reach, RestsOn(part, "parabola", part.ParabolaPerSquareKelvin))
+            {
+                Law = TemperatureLaw.Parabola(turnover, reach, Math.Sign(parabola)),
+            };
         }
 
         return new BudgetTerm(Term, AssumedStability, "assumed");

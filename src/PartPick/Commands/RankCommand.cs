@@ -69,9 +69,7 @@ internal static class RankCommand
     private static int Run(
         CommandContext context, ParseResult parsed, Requirement requirement, RankingOptions options, bool quiet)
     {
-        var parts = new PartsOnDemand(new Catalog.StoredParts(context.CatalogPath(parsed)));
-        CommandFailure.Unless(parts.Open(context.Surroundings.Cancellation), ExitStatus.NoCatalog);
-        RankingResult result = RankingProgress.Over(context.Surroundings, quiet, progress => Rank(context, requirement, parts, options, progress));
+        RankingResult result = Rank(context, parsed, requirement, options, quiet);
         var view = new RankView(result, context.Surroundings.UsesColour);
         switch (context.FormatOf(parsed))
         {
@@ -87,6 +85,15 @@ internal static class RankCommand
         }
 
         return result.Candidates.IsEmpty ? ExitStatus.NothingFits : ExitStatus.Done;
+    }
+
+    /// <summary>Ranks the parts of the catalogue, with its progress on a terminal.</summary>
+    internal static RankingResult Rank(
+        CommandContext context, ParseResult parsed, Requirement requirement, RankingOptions options, bool quiet)
+    {
+        var parts = new PartsOnDemand(new Catalog.StoredParts(context.CatalogPath(parsed)));
+        CommandFailure.Unless(parts.Open(context.Surroundings.Cancellation), ExitStatus.NoCatalog);
+        return RankingProgress.Over(context.Surroundings, quiet, progress => Rank(context, requirement, parts, options, progress));
     }
 
     private static RankingResult Rank(

@@ -28,6 +28,11 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
             return naming.Draw(model.Kept.Enter, width, glyphs);
         }
 
+        if (model is { ShowsKeys: false, Pictures.Asking: { } file })
+        {
+            return file.Draw("write", width, glyphs);
+        }
+
         return model switch
         {
             { Notice: { } notice } => [new LineBuilder(glyphs).Add(" ").Column(notice, width - 1, Tone.Accent).Build()],
@@ -41,15 +46,17 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
             { Kept: { IsOpen: true, Comparison.IsOpen: true } } => [Keys(
                 (glyphs.Left + " " + glyphs.Right, "others"), (UpDown, "scroll"), ("Esc", "what is kept"), ("?", "keys"))],
             { Kept.IsOpen: true } => [Keys(KeptKeys)],
+            { Pictures.IsOpen: true } => [Keys(
+                (glyphs.Left + " " + glyphs.Right, "other pictures"), ("x", "to an SVG file"), ("Esc", "back"), ("?", "keys"))],
             { Place: Place.Sentence, Wanted.Typed: not null } => [Value(("Enter", "keep"), ("Esc", "as it was"))],
             { Place: Place.Sentence } => [Value(("Tab", "next"), ("Esc", model.IsReading ? "circuit" : "list"))],
             { Place: Place.Circuit } => [Keys(
-                (UpDown, "scroll"), (glyphs.Left + " " + glyphs.Right, "other circuits"), ("s", "to a list"), ("Esc", "list"),
-                ("e", "edit"), ("?", "keys"))],
+                (UpDown, "scroll"), (glyphs.Left + " " + glyphs.Right, "other circuits"), ("s", "to a list"), ("p", "pictures"),
+                ("Esc", "list"), ("e", "edit"), ("?", "keys"))],
             { List.Chosen: null } => [Keys([("e", "edit the wanted"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
             _ => [Keys([
-                (UpDown, "choose"), ("Enter", "open"), ("s", "to a list"), .. Kept, ("e", "edit"), .. Catalogue, ("?", "keys"),
-                ("q", "quit")])],
+                (UpDown, "choose"), ("Enter", "open"), ("p", "pictures"), ("s", "to a list"), .. Kept, ("e", "edit"), .. Catalogue,
+                ("?", "keys"), ("q", "quit")])],
         };
     }
 

@@ -22,6 +22,7 @@ public static class KeysPage
         Key($"{glyphs.Up} {glyphs.Down}", "the circuit before, the next one; also PgUp, PgDn, Home, End");
         Key("Enter", "open the circuit: drawing, parts, error, figures, reasons");
         Key("s", "put the circuit on a list; so in a circuit, too");
+        Key("p", "pictures of the circuit, one after the other: " + glyphs.Left + " " + glyphs.Right + "; x writes one to an SVG file");
         Key("l", "the lists: what changed since, and writing them to files");
         Key("w", "what is kept: requirements by name, to take one, copy it, or put some side by side");
         Key("e or Tab", "edit the wanted sentence; so does " + glyphs.Up + " on the first circuit");

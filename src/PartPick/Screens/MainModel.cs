@@ -75,6 +75,9 @@ public sealed class MainModel
     /// <summary>The kept requirements.</summary>
     internal KeptModel Kept { get; private set; } = new();
 
+    /// <summary>The pictures of a candidate.</summary>
+    internal PicturesModel Pictures { get; private set; } = new();
+
     /// <summary>Where the keys go.</summary>
     public Place Place { get; private set; }
 
@@ -116,6 +119,7 @@ public sealed class MainModel
     {
         Kept.Stop();
         Shortlists.Stop();
+        Pictures.Close();
         _ranking.Stop();
     }
 
@@ -155,7 +159,7 @@ public sealed class MainModel
             return;
         }
 
-        if (Shortlists.Press(key, out string? notice) || Kept.Press(key, out notice))
+        if (Shortlists.Press(key, out string? notice) || Kept.Press(key, out notice) || Pictures.Press(key, out notice))
         {
             Notice = notice;
             return;
@@ -219,6 +223,15 @@ public sealed class MainModel
                 GoOnRanking();
             }
         };
+    }
+
+    /// <summary>Lets pictures of circuits be opened; without it there are none.</summary>
+    /// <param name="work">Does what takes long.</param>
+    public void DrawPicturesWith(ScreenWork work)
+    {
+        Pictures = new PicturesModel(work);
+        Pictures.Redraw += () => Redraw?.Invoke();
+        Pictures.Said += Say;
     }
 
     /// <summary>The screen as lines, each as wide as the screen.</summary>
@@ -410,6 +423,9 @@ public sealed class MainModel
             case { Name: KeyName.Letter, Letter: 'w' }:
                 Kept.Open(Wanted.Accepted);
                 break;
+            case { Name: KeyName.Letter, Letter: 'p' } when List is { Chosen: { } chosen, Result: { } result }:
+                Pictures.Open(chosen, result);
+                break;
             case { Name: KeyName.Letter, Letter: 'q' }:
                 IsDone = true;
                 break;
@@ -436,6 +452,7 @@ public sealed class MainModel
         IsStale = false;
         List.Show(result);
         Kept.Figures.Take(result);
+        Pictures.Follow(result);
         if (Place == Place.Circuit && !_reading.IsThere)
         {
             Place = Place.List;

@@ -54,6 +54,11 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
                 page => ShortlistDrawing.Draw(list, page, room, glyphs), room);
         }
 
+        if (model.Pictures.IsOpen)
+        {
+            return PicturesDrawing.Draw(model.Pictures, width, room, glyphs);
+        }
+
         if (model.Kept.IsOpen)
         {
             return Beside(

@@ -36,6 +36,7 @@ internal sealed class Bench : IDisposable
         _app.Driver!.SetScreenSize(width, height);
         _live = new LiveRanking(Ranking, action => action(), TimeProvider.System);
         Model = new MainModel(requirement ?? SampleRanking.Wanted, _live, glyphs ?? Glyphs.Drawn, waits: false, parts: parts);
+        Model.DrawPicturesWith(_work);
         _screen = new MainScreen(Model, Palette.Plain);
         _app.Begin(_screen);
         _app.LayoutAndDraw();

@@ -31,6 +31,19 @@ public class TerminalTests
         Assert.Equal(expected, traits.IsUtf8);
     }
 
+    [Theory]
+    [InlineData("xterm-256color", true, false)]
+    [InlineData("tmux-256color", true, false)]
+    [InlineData("linux", false, false)]
+    [InlineData("ansi", false, false)]
+    [InlineData("xterm-256color", false, true)]
+    public void Dots_are_drawn_with_what_the_font_of_the_terminal_has(string term, bool braille, bool ascii)
+    {
+        TerminalTraits traits = TerminalTraits.Of(name => name switch { "TERM" => term, "LANG" => ascii ? "C" : "C.UTF-8", _ => null });
+
+        Assert.Equal((braille, ascii), (traits.Glyphs.HasBraille, traits.Glyphs.IsAscii));
+    }
+
     [Fact]
     public void The_requirement_is_kept_and_recalled()
     {

@@ -71,7 +71,8 @@ public static class CircuitPage
         }
     }
 
-    private static IEnumerable<Line> Budget(Candidate candidate, Requirement requirement, int width, Glyphs glyphs)
+    /// <summary>The error budget as bars: an empty line, a heading, and a line for each term and sum.</summary>
+    internal static IEnumerable<Line> Budget(Candidate candidate, Requirement requirement, int width, Glyphs glyphs)
     {
         yield return Line.Empty;
         if (candidate.Budget is not { } budget)
@@ -82,20 +83,13 @@ public static class CircuitPage
 
         string limit = ValueText.Format(requirement.BudgetRatio, Dimension.Relative);
         yield return Heading($"Frequency error, ppm; the bars are shares of {limit}", glyphs);
-        BudgetTerm[] terms = [.. budget.Terms.OrderByDescending(term => term.Ratio)];
+        BudgetBar[] bars = [.. BudgetBars.Of(budget)];
         string[] texts = Figures.LineUp(
-        [
-            Signed(budget.CentreRatio), .. terms.Select(term => glyphs.Show("±" + Figures.Ppm(term.Ratio))),
-            Figures.Ppm(budget.WorstRatio), Figures.Ppm(budget.RssRatio),
-        ]);
-        yield return Row(texts[0], Math.Abs(budget.CentreRatio), "centre: nominal values at 25 °C");
-        for (int i = 0; i < terms.Length; i++)
+            [.. bars.Select((bar, i) => bar.IsSpread ? glyphs.Show("±" + Figures.Ppm(bar.Ratio)) : i == 0 ? Signed(bar.Ratio) : Figures.Ppm(bar.Ratio))]);
+        for (int i = 0; i < bars.Length; i++)
         {
-            yield return Row(texts[i + 1], terms[i].Ratio, terms[i].Term + (terms[i].RestsOn is { } rest ? $" ({rest})" : ""));
+            yield return Row(texts[i], Math.Abs(bars[i].Ratio), bars[i].Name + (bars[i].RestsOn is { } rest ? $" ({rest})" : ""));
         }
-
-        yield return Row(texts[^2], budget.WorstRatio, "worst case, all together: the ranked figure");
-        yield return Row(texts[^1], budget.RssRatio, "root of the sum of squares");
 
         Line Row(string figure, double ratio, string words)
         {

@@ -36,7 +36,7 @@ internal sealed class TerminalRun(
         // The terminal's own sixteen colours: they fit its background, and few of them are sent.
         Driver.Force16Colors = true;
         Application.MaximumIterationsPerSecond = IterationsPerSecond;
-        Glyphs glyphs = traits.IsUtf8 ? Glyphs.Drawn : Glyphs.Ascii;
+        Glyphs glyphs = traits.Glyphs;
         Palette palette = traits.HasColour ? Palette.Coloured : Palette.Plain;
         using IApplication app = Application.Create().Init(DriverRegistry.Names.ANSI);
         app.Driver!.WriteRaw(MouseReportsOff);
@@ -53,6 +53,7 @@ internal sealed class TerminalRun(
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
         model.KeepListsAt(desk, work);
         model.KeepWantedAt(store, work, ranking);
+        model.DrawPicturesWith(work);
         using var screen = new MainScreen(model, palette);
         using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, Leave);
         using PosixSignalRegistration interrupt = PosixSignalRegistration.Create(PosixSignal.SIGINT, Leave);
