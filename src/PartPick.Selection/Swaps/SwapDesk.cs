@@ -121,11 +121,12 @@ public sealed class SwapDesk
         return
         [
             .. _scope.Amplifiers(choice.Circuit)
-                .Where(part => part.Id == choice.Amplifier.Id || (_market.IsListed(part)
+                .Where(part => part.Id != choice.Amplifier.Id && _market.IsListed(part)
                     && (part is not CounterPart counter || counter.Taps.Contains(choice.Tap))
                     && Specification.CoversTemperature(choice.Crystal, part, _requirement)
                     && Specification.CoversClock(part, choice.Crystal.FrequencyHz, _requirement)
-                    && CircuitTemplate.Create(_requirement, choice.Circuit, model, part, double.PositiveInfinity) is not null))
+                    && CircuitTemplate.Create(_requirement, choice.Circuit, model, part, double.PositiveInfinity) is not null)
+                .Append(choice.Amplifier)
                 .OrderBy(Strength).ThenBy(part => _market.UnitCost(part, 1)).ThenBy(part => part.Id, StringComparer.Ordinal)
                 .Select(part => new SwapOption(SwapPlace.Amplifier, part.Id, [part])),
         ];

@@ -33,14 +33,16 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
             { Shortlists.IsOpen: true } => [Keys(
                 (glyphs.Left + " " + glyphs.Right, "lists"), ("Del", "take off"), ("x", "to a file"), ("r", "replacements"),
                 ("b", "cost over boards"), ("Esc", "back"))],
+            { Differences.Pair: not null } => [Keys((UpDown, "scroll"), ("Esc", "back"), ("?", "keys"))],
             { Place: Place.Sentence, Wanted.Typed: not null } => [Value(("Enter", "keep"), ("Esc", "as it was"))],
             { Place: Place.Sentence } => [Value(("Tab", "next"), ("Esc", model.IsReading ? "circuit" : "list"))],
-            { Place: Place.Circuit } => [Keys(
-                (UpDown, "scroll"), (glyphs.Left + " " + glyphs.Right, "other circuits"), ("s", "to a list"), ("Esc", "list"),
-                ("e", "edit"), ("?", "keys"))],
+            { Place: Place.Circuit } => [Keys([
+                .. new[] { ("n", "next"), ("d", "differences"), (UpDown, "part"), (glyphs.Left + " " + glyphs.Right, "value") },
+                .. model.Swaps.IsChanged ? new[] { ("Backspace", "as ranked") } : [],
+                ("s", "to a list"), ("Esc", "list"), ("?", "keys")])],
             { List.Chosen: null } => [Keys([("e", "edit the wanted"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
             _ => [Keys([
-                (UpDown, "choose"), ("Enter", "open"), ("s", "to a list"), ("e", "edit"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
+                ("d", "differences"), (UpDown, "choose"), ("Enter", "open"), ("s", "to a list"), ("e", "edit"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
         };
     }
 

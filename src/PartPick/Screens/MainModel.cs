@@ -4,7 +4,7 @@ using PartPick.Selection;
 namespace PartPick.Screens;
 
 /// <summary>The screen: sentence, list and circuit, and what the keys do. Knows nothing of the terminal.</summary>
-public sealed class MainModel
+public sealed partial class MainModel
 {
     private static readonly TimeSpan AfterChoice = TimeSpan.FromMilliseconds(150);
     private static readonly TimeSpan WhileTyping = TimeSpan.FromMilliseconds(400);
@@ -38,6 +38,7 @@ public sealed class MainModel
         Notice = notice;
         _waits = waits;
         _reading = new Reading(List);
+        Differences = new DifferencesModel(List);
         Wanted = new SentenceModel(requirement, glyphs, currency);
         Wanted.Changed += Rank;
         _ranking.Answered += Take;
@@ -107,6 +108,7 @@ public sealed class MainModel
     {
         _ranking.Stop();
         Shortlists.Stop();
+        Swaps.Forget();
     }
 
     /// <summary>Ranks again, as after the parts have changed.</summary>
@@ -147,6 +149,11 @@ public sealed class MainModel
         if (Shortlists.Press(key, out string? notice))
         {
             Notice = notice;
+            return;
+        }
+
+        if (Differences.Press(key))
+        {
             return;
         }
 
@@ -197,29 +204,6 @@ public sealed class MainModel
                 LeaveSentence();
                 break;
             case SentenceAnswer.NotMine:
-                PressAnywhere(key);
-                break;
-        }
-    }
-
-    private void PressInCircuit(KeyPress key)
-    {
-        if (CircuitScroll.Press(key))
-        {
-            return;
-        }
-
-        switch (key.Name)
-        {
-            case KeyName.Escape or KeyName.Enter or KeyName.Backspace:
-                _reading.Close();
-                Place = Place.List;
-                break;
-            case KeyName.Left or KeyName.Right:
-                List.Move(key.Name == KeyName.Left ? -1 : 1);
-                _reading.Open();
-                break;
-            default:
                 PressAnywhere(key);
                 break;
         }
@@ -289,7 +273,7 @@ public sealed class MainModel
                 break;
             case KeyName.Enter when List.Chosen is not null:
                 CircuitScroll.Reset();
-                _reading.Open();
+                OpenCircuit();
                 Place = Place.Circuit;
                 break;
             case KeyName.Escape:
@@ -314,7 +298,10 @@ public sealed class MainModel
                 ShowsKeys = true;
                 break;
             case { Name: KeyName.Letter, Letter: 's' } when List is { Chosen: { } chosen, Result: { } result }:
-                Shortlists.Ask(chosen, result.Requirement);
+                PutOnList(chosen, result.Requirement);
+                break;
+            case { Name: KeyName.Letter, Letter: 'd' } when List is { Chosen: { } chosen, Result: { } result }:
+                SetBeside(chosen, result.Requirement);
                 break;
             case { Name: KeyName.Letter, Letter: 'l' }:
                 Notice = Shortlists.Open();
@@ -336,6 +323,7 @@ public sealed class MainModel
 
     private void Rank(bool typing)
     {
+        Swaps.Forget();
         IsStale = List.Result is not null;
         _ranking.Ask(Wanted.Current, !_waits ? TimeSpan.Zero : typing ? WhileTyping : AfterChoice);
     }
@@ -350,6 +338,7 @@ public sealed class MainModel
             SayWhereItIsGone();
         }
 
+        TakeInCircuit(result);
         if (result.IsComplete)
         {
             Settled?.Invoke(Wanted.Accepted);

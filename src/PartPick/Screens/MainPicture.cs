@@ -34,7 +34,8 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
         int room = height - sentence.Length - foot.Length;
         ImmutableArray<Line> body = model.ShowsKeys ? KeysBody(room)
             : model.Shortlists.IsOpen ? ShortlistDrawing.Draw(model.Shortlists.Page, width, room, glyphs)
-            : model.Place == Place.Circuit && model.List.Chosen is { } candidate ? CircuitBody(candidate, room)
+            : model.Differences.Pair is not null ? DifferencesDrawing.Draw(model.Differences, width, room, glyphs)
+            : model.Place == Place.Circuit && model.List.Chosen is { } candidate ? CircuitBody(model.Swaps.Shown ?? candidate, room)
             : width >= ListShape.Full + 2 + Schematic.Width ? WideBody(room)
             : NarrowBody(room);
         return [.. Filled([.. sentence, .. body], height - foot.Length), .. foot.Select(line => line.Fit(width))];
@@ -116,12 +117,13 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
 
     private ImmutableArray<Line> CircuitBody(Candidate candidate, int room)
     {
-        ImmutableArray<Line> page = CircuitPage.Draw(candidate, model.List.Result!, width, glyphs);
+        ImmutableArray<Line> page = CircuitPage.Draw(candidate, model.List.Result!, width, glyphs, model.Swaps);
         ImmutableArray<Line> shown = model.CircuitScroll.Cut(page, room - 1);
         string number = FormattableString.Invariant($"{model.List.At + 1} of {model.List.Candidates.Length}");
         string more = model.CircuitScroll.HasMore ? number + ", more below" : number;
-        string age = model.IsStale ? "for the wanted before, " : model.IsRanking ? "computing, " : "";
-        return [Rules.Draw(CircuitPane.ShortTitle(candidate), age + more, width, glyphs), .. shown];
+        string age = model.IsStale ? "for the wanted before, " : model.IsRanking || model.Swaps.IsComputing ? "computing, " : "";
+        string title = CircuitPane.ShortTitle(candidate) + (model.Swaps.IsChanged ? ", changed" : "");
+        return [Rules.Draw(title, age + more, width, glyphs), .. shown];
     }
 
     private ImmutableArray<Line> KeysBody(int room)

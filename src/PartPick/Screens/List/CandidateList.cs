@@ -23,6 +23,9 @@ public sealed class CandidateList
     /// <summary>The chosen candidate; null while there is none.</summary>
     public Candidate? Chosen => Candidates.IsEmpty ? null : Candidates[At];
 
+    /// <summary>The candidate that is marked, to be set beside another one; null for none.</summary>
+    public Candidate? Marked { get; set; }
+
     /// <summary>Whether the list shows nearest misses because nothing is fit.</summary>
     public bool ShowsMisses => Result is { Candidates.IsEmpty: true } && !Candidates.IsEmpty;
 
@@ -102,7 +105,7 @@ public sealed class CandidateList
         for (int i = _top; i < Math.Min(Candidates.Length, _top + height); i++)
         {
             bool here = i == At;
-            Line line = ListDrawing.Row(columns.Rows[i], here, shape, glyphs);
+            Line line = ListDrawing.Row(columns.Rows[i], here, Candidates[i].Id == Marked?.Id, shape, glyphs);
             lines.Add(here && chosen ? line.Chosen() : here ? line.In(Tone.Strong) : stale ? line.In(Tone.Quiet) : line);
         }
 

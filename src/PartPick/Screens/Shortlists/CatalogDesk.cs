@@ -29,12 +29,13 @@ public sealed class CatalogDesk(string catalogPath) : IShortlistDesk
                 "list", FormattableString.Invariant($"candidate {number} is not on it any more"), "a candidate that is on the list")));
 
     /// <inheritdoc/>
-    public Result<ShortlistEntry> Put(string list, CandidateParts choice, Requirement requirement, string? note) =>
+    public Result<ShortlistEntry> Put(
+        string list, CandidateParts choice, Requirement requirement, string? note, SupportParts? support = null) =>
         CatalogStore.Load(catalogPath).Then(catalog =>
         {
             // The parts that are shown may be older than the catalogue.
-            return ChosenParts.Of(choice, new SupportParts(null, null, null)).In(catalog) is { } now
-                ? new ShortlistReviewer(catalog).Make(now.Choice, null, requirement, note, Today)
+            return ChosenParts.Of(choice, support ?? new SupportParts(null, null, null)).In(catalog) is { } now
+                ? new ShortlistReviewer(catalog).Make(now.Choice, support is null ? null : now.Support, requirement, note, Today)
                 : Result.Fail<ShortlistEntry>("circuit", "one of its parts is not in the catalogue any more", "a circuit of today's parts");
         }).Then(entry => ShortlistStore.Add(catalogPath, list, entry));
 

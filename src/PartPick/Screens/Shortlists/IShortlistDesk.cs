@@ -25,7 +25,9 @@ public interface IShortlistDesk
     /// <param name="choice">The parts.</param>
     /// <param name="requirement">What is wanted, with the number of boards.</param>
     /// <param name="note">Free text; null for none.</param>
-    Result<ShortlistEntry> Put(string list, CandidateParts choice, Requirement requirement, string? note);
+    /// <param name="support">The parts that the circuit needs besides; null for the usual ones.</param>
+    Result<ShortlistEntry> Put(
+        string list, CandidateParts choice, Requirement requirement, string? note, SupportParts? support = null);
 
     /// <summary>Takes a candidate off a list.</summary>
     /// <param name="list">The name of the list.</param>

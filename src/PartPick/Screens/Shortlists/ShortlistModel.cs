@@ -14,7 +14,7 @@ internal sealed class ShortlistModel
     private readonly ShortlistPage _page;
     private string _list = ShortlistName.Usual;
     private AskedFields _fields = new();
-    private (Candidate Candidate, Requirement Requirement)? _asked;
+    private (Candidate Candidate, Requirement Requirement, bool Changed)? _asked;
 
     /// <summary>Without any lists.</summary>
     public ShortlistModel() => _page = new ShortlistPage(null, null, null);
@@ -49,11 +49,14 @@ internal sealed class ShortlistModel
     public ShortlistPage Page => _page;
 
     /// <summary>Asks on which list a candidate goes, and for how many boards.</summary>
-    public void Ask(Candidate candidate, Requirement requirement)
+    /// <param name="candidate">The candidate.</param>
+    /// <param name="requirement">What is wanted.</param>
+    /// <param name="changed">Whether its parts were changed, so that all of them go on the list as they are.</param>
+    public void Ask(Candidate candidate, Requirement requirement, bool changed = false)
     {
         if (_desk is not null)
         {
-            _asked = (candidate, requirement);
+            _asked = (candidate, requirement, changed);
             _fields = new AskedFields(
                 ("list", _list, 60), ("boards", requirement.Builds.ToString(CultureInfo.InvariantCulture), 10), ("note", "", 200));
         }
@@ -79,14 +82,14 @@ internal sealed class ShortlistModel
         notice = null;
         if (_asked is { } asked)
         {
-            notice = PressInFields(key, asked.Candidate, asked.Requirement);
+            notice = PressInFields(key, asked);
             return true;
         }
 
         return _page.IsOpen && _page.Press(key, out notice);
     }
 
-    private string? PressInFields(KeyPress key, Candidate candidate, Requirement requirement)
+    private string? PressInFields(KeyPress key, (Candidate Candidate, Requirement Requirement, bool Changed) asked)
     {
         switch (key.Name)
         {
@@ -94,14 +97,14 @@ internal sealed class ShortlistModel
                 _asked = null;
                 return null;
             case KeyName.Enter:
-                return Put(candidate, requirement);
+                return Put(asked.Candidate, asked.Requirement, asked.Changed);
             default:
                 _fields.Press(key);
                 return null;
         }
     }
 
-    private string? Put(Candidate candidate, Requirement requirement)
+    private string? Put(Candidate candidate, Requirement requirement, bool changed)
     {
         Result<string> name = ShortlistName.Read(_fields.Fields[0].Text, "list");
         Result<int> boards = Boards(_fields.Fields[1].Text);
@@ -113,7 +116,8 @@ internal sealed class ShortlistModel
 
         string note = _fields.Fields[2].Text.Trim();
         Result<ShortlistEntry> put = _desk!.Put(
-            name.Value, candidate.Choice, requirement with { Builds = boards.Value }, note.Length == 0 ? null : note);
+            name.Value, candidate.Choice, requirement with { Builds = boards.Value }, note.Length == 0 ? null : note,
+            changed ? BoardParts.Of(candidate).Support : null);
         if (!put.IsOk)
         {
             _fields.Problem = put.Problem.ToString();

@@ -48,6 +48,7 @@ internal sealed class TerminalRun(
         };
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
         model.KeepListsAt(desk, work);
+        model.ChangePartsFrom(ranking.Parts, work);
         using var screen = new MainScreen(model, palette);
         using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, Leave);
         using PosixSignalRegistration interrupt = PosixSignalRegistration.Create(PosixSignal.SIGINT, Leave);
