@@ -18,6 +18,7 @@ public sealed partial class MainModel
     {
         Swaps = new SwapModel(parts, work);
         Swaps.Redraw += () => Redraw?.Invoke();
+        List.IsChanged = Swaps.IsKept;
     }
 
     private void PressInCircuit(KeyPress key)

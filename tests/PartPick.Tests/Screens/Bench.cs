@@ -1,4 +1,5 @@
 using System.Collections.Concurrent;
+using PartPick.Catalog;
 using PartPick.Screens;
 using PartPick.Selection;
 using Terminal.Gui.App;
@@ -50,6 +51,9 @@ internal sealed class Bench : IDisposable
 
     /// <summary>Keeps lists of candidates in a catalogue.</summary>
     public void KeepLists(string catalogue) => Model.KeepListsAt(new CatalogDesk(catalogue), _work);
+
+    /// <summary>Lets the parts of an open circuit be changed for others.</summary>
+    public void ChangeParts(PartsCatalog catalogue) => Model.ChangePartsFrom(new WholeCatalog(catalogue), _work);
 
     public void Press(params Key[] keys)
     {

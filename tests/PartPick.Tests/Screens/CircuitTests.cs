@@ -139,7 +139,7 @@ public class CircuitTests
     }
 
     [Fact]
-    public void At_80_columns_the_limits_stand_beside_the_drawing()
+    public void At_80_columns_the_parts_stand_beside_the_drawing()
     {
         ImmutableArray<Line> page = CircuitPage.Draw(
             SampleRanking.Counter, SampleRanking.Answer(SampleRanking.Wanted, SampleRanking.Counter), 80, Glyphs.Drawn);

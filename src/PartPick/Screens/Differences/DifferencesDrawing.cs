@@ -31,9 +31,10 @@ internal static class DifferencesDrawing
         lines.AddRange(Paragraph.Of(PairFigures.Sentence(figures), width, glyphs, " ", 1, Tone.Strong));
         Broken("A", pair.A);
         Broken("B", pair.B);
+        lines.AddRange(PairParts.Different(pair, width, glyphs));
         lines.AddRange(FigureLines(figures, width, glyphs));
         lines.Add(Line.Empty);
-        lines.AddRange(PairParts.Draw(pair, width, glyphs));
+        lines.AddRange(Paragraph.Of(PairParts.Same(pair), width, glyphs, " ", 1, Tone.Quiet));
         if (width >= 2 * Schematic.Width)
         {
             lines.Add(Line.Empty);

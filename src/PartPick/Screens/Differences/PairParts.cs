@@ -4,54 +4,40 @@ using PartPick.Selection;
 
 namespace PartPick.Screens;
 
-/// <summary>Draws which parts of two circuits differ, in a row each, and names those that are the same.</summary>
+/// <summary>Says which parts of two circuits differ, in a row each, and which are the same.</summary>
 internal static class PairParts
 {
     private const int Name = 12;
 
-    /// <summary>The lines.</summary>
+    /// <summary>The parts that differ, a row each.</summary>
     /// <param name="pair">The circuits.</param>
     /// <param name="width">Width in cells.</param>
     /// <param name="glyphs">The signs.</param>
-    public static ImmutableArray<Line> Draw(CircuitPair pair, int width, Glyphs glyphs)
+    public static ImmutableArray<Line> Different(CircuitPair pair, int width, Glyphs glyphs)
+    {
+        int half = (width - 1 - Name) / 2;
+        (string Name, string A, string B)[] rows = [.. Of(pair).Where(one => one.A != one.B)];
+        return rows.Length == 0
+            ? []
+            : [Row(("differs", "A", "B"), Tone.Strong), .. rows.Select(row => Row(row, Tone.Normal)), Line.Empty];
+
+        Line Row((string Name, string A, string B) row, Tone tone) => new LineBuilder(glyphs).Add(" ")
+            .Column(row.Name, Name, tone).Column(row.A, half - 1, tone).Add(" ").Column(row.B, half, tone).Build();
+    }
+
+    /// <summary>The parts that are the same, in a sentence.</summary>
+    /// <param name="pair">The circuits.</param>
+    public static string Same(CircuitPair pair)
+    {
+        string[] same = [.. Of(pair).Where(one => one.A == one.B).Select(one => one.Name + " " + one.A)];
+        return same.Length == 0 ? "No part is the same in both." : "The same in both: " + string.Join(", ", same) + ".";
+    }
+
+    private static IEnumerable<(string Name, string A, string B)> Of(CircuitPair pair)
     {
         (BoardParts a, BoardParts b) = (BoardParts.Of(pair.A), BoardParts.Of(pair.B));
-        int half = (width - 1 - Name) / 2;
-        var lines = ImmutableArray.CreateBuilder<Line>();
-        var same = new List<string>();
-        if (pair.A.Choice.Circuit != pair.B.Choice.Circuit)
-        {
-            Row("circuit", pair.A.Choice.Circuit.Word(), pair.B.Choice.Circuit.Word());
-        }
-
-        foreach (SwapPlace place in pair.Places)
-        {
-            (string one, string other) = (Words(place, a), Words(place, b));
-            if (one == other)
-            {
-                same.Add(Called(place) + " " + one);
-            }
-            else
-            {
-                Row(Called(place), one, other);
-            }
-        }
-
-        if (lines.Count > 0)
-        {
-            lines.Insert(0, new LineBuilder(glyphs).Add(" ").Column("differs", Name, Tone.Strong).Column("A", half, Tone.Strong)
-                .Column("B", half, Tone.Strong).Build());
-        }
-
-        if (same.Count > 0)
-        {
-            lines.AddRange(Paragraph.Of("The same in both: " + string.Join(", ", same) + ".", width, glyphs, " ", 1, Tone.Quiet));
-        }
-
-        return lines.ToImmutable();
-
-        void Row(string name, string one, string other) => lines.Add(new LineBuilder(glyphs).Add(" ")
-            .Column(name, Name).Column(one, half - 1).Add(" ").Column(other, half).Build());
+        return pair.Places.Select(place => (Called(place), Words(place, a), Words(place, b)))
+            .Prepend(("circuit", pair.A.Choice.Circuit.Word(), pair.B.Choice.Circuit.Word()));
     }
 
     private static string Called(SwapPlace place) => place switch

@@ -87,6 +87,10 @@ internal sealed class SwapModel
         }
     }
 
+    /// <summary>Whether something was changed in a circuit, open or not.</summary>
+    /// <param name="candidate">The circuit as it was ranked.</param>
+    public bool IsKept(Candidate candidate) => _kept.ContainsKey(Group(candidate));
+
     /// <summary>Takes that the parts may be other ones.</summary>
     public void Forget() => _bench?.Forget();
 
@@ -94,7 +98,7 @@ internal sealed class SwapModel
     public void Stop() => _bench?.Stop();
 
     /// <summary>What there is to say when the circuit is left; null for nothing.</summary>
-    public string? Leave() => IsChanged ? "The changed circuit is kept: Enter shows it again, d beside the ranked one." : null;
+    public string? Leave() => IsChanged ? "The changed circuit is kept, marked with *: Enter shows it again." : null;
 
     /// <summary>Takes a key.</summary>
     /// <param name="key">The key.</param>
@@ -103,12 +107,12 @@ internal sealed class SwapModel
     public bool Press(KeyPress key, out string? notice)
     {
         notice = null;
-        switch (key.Name)
+        switch (key)
         {
-            case KeyName.Up or KeyName.Down:
+            case { Name: KeyName.Up or KeyName.Down }:
                 At = Math.Clamp(At + (key.Name == KeyName.Up ? -1 : 1), 0, Math.Max(0, Places.Length - 1));
                 return true;
-            case KeyName.Left or KeyName.Right or KeyName.Backspace or KeyName.Delete:
+            case { Name: KeyName.Left or KeyName.Right or KeyName.Backspace or KeyName.Delete } or { Name: KeyName.Letter, Letter: '0' }:
                 notice = Ranked is null || _bench is null ? "There are no parts to put in." : Change(key);
                 return true;
             default:
@@ -136,15 +140,28 @@ internal sealed class SwapModel
                 break;
             case KeyName.Backspace or KeyName.Delete:
                 return key.Name == KeyName.Delete ? "All parts are as they were ranked." : "That part is as it was ranked.";
+            case KeyName.Letter:
+                return TakeOut();
             default:
-                return Step(place, key.Name == KeyName.Left ? -1 : 1);
+                return Step(key.Name == KeyName.Left ? -1 : 1);
         }
 
         Compute();
         return null;
     }
 
-    private string? Step(SwapPlace place, int step)
+    private string? TakeOut()
+    {
+        if (Options.FirstOrDefault(one => one.Parts is [null]) is not { } option)
+        {
+            return "The circuit needs a part there.";
+        }
+
+        Put(option);
+        return null;
+    }
+
+    private string? Step(int step)
     {
         ImmutableArray<SwapOption> options = Options;
         int at = options.IndexOf(options.First(option => option.StandsIn(Board!)));
@@ -154,10 +171,14 @@ internal sealed class SwapModel
                 : $"{options[at].Words} is the {(step < 0 ? "first" : "last")} that the catalogue has for there.";
         }
 
-        SwapOption option = options[at + step];
-        Keep(option.StandsIn(Before!) ? Changes.Without(place) : Changes.With(option));
-        Compute();
+        Put(options[at + step]);
         return null;
+    }
+
+    private void Put(SwapOption option)
+    {
+        Keep(option.StandsIn(Before!) ? Changes.Without(option.Place) : Changes.With(option));
+        Compute();
     }
 
     private void Compute()

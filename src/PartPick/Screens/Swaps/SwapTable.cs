@@ -89,7 +89,7 @@ internal static class SwapTable
 
         ImmutableArray<SwapOption> options = swaps.Options;
         int at = options.IsEmpty ? -1 : options.IndexOf(options.First(option => option.StandsIn(board)));
-        string count = at < 0 ? "reading the parts" : FormattableString.Invariant($"{at + 1} of {options.Length} that fit there");
+        string count = at < 0 ? "reading the parts" : FormattableString.Invariant($"{at + 1} of {options.Length}");
         string part = board.At(swaps.Places[swaps.At]) is { } one ? one.Id + ", " : "";
         return
         [
