@@ -42,7 +42,7 @@ public class DifferencesTests
         using Bench bench = SwapWorld.Open();
         bench.Press(new Key('d'), Key.CursorDown, new Key('d'));
         (Candidate a, Candidate b) = (SwapWorld.Ranking.Candidates[0], SwapWorld.Ranking.Candidates[1]);
-        string heading = bench.Rows.Single(row => row.TrimEnd().EndsWith("better", StringComparison.Ordinal));
+        Assert.Single(bench.Rows, row => row.EndsWith("better", StringComparison.Ordinal));
         AssertLine("error, worst case", Figures.Ppm(a.Budget!.WorstRatio), Figures.Ppm(b.Budget!.WorstRatio), a.Budget.WorstRatio < b.Budget.WorstRatio);
         AssertLine("margin, worst corner", Figures.Three(a.Margin.Value), Figures.Three(b.Margin.Value), a.Margin.Value > b.Margin.Value);
         AssertLine("drive, worst corner", Figures.Three(a.Drive!.Value * 1e6), Figures.Three(b.Drive!.Value * 1e6), a.Drive.Value < b.Drive.Value);
@@ -58,7 +58,6 @@ public class DifferencesTests
             Assert.Contains(one, words);
             Assert.Contains(other, words);
             Assert.Equal(one == other ? "same" : first ? "A" : "B", words[^1]);
-            Assert.True(heading.Length > 0);
         }
     }
 
@@ -110,8 +109,7 @@ public class DifferencesTests
         bench.Press(Key.Enter);
         Assert.Same(SampleRanking.Counter, bench.Model.List.Marked);
         bench.Ranking.Answer = requirement => SampleRanking.Answer(requirement, SampleRanking.Port);
-        bench.Type("3k");
-        bench.Press(Key.Enter);
+        bench.Type("3");
         Assert.Null(bench.Model.List.Marked);
         Assert.Contains("The marked circuit is not in the list any more.", bench.Model.Notice, StringComparison.Ordinal);
     }

@@ -9,10 +9,6 @@ internal static class SwapWorld
 {
     private static readonly PartsCatalog BuiltIn = PartsCatalog.BuiltIn();
 
-    private static readonly Lazy<RankingResult> Best = new(() => Ranker.Rank(Wanted, Parts));
-
-    private static readonly Lazy<RankingResult> Everything = new(() => Ranker.Rank(Wanted, Parts, new RankingOptions { All = true, Top = null }));
-
     public static Requirement Wanted { get; } = new()
     {
         OutputHz = 1000, Waveform = Waveform.Square, BudgetRatio = 100e-6, TemperatureMinCelsius = -10, StartUpTimeSeconds = 0.05,
@@ -28,6 +24,10 @@ internal static class SwapWorld
         .. BuiltIn.Capacitors.Where(part => part.ValueFarads is > 9e-12 and < 50e-12 or > 90e-9 and < 110e-9),
         .. BuiltIn.Resistors.Where(part => part.ValueOhms is > 300 and < 1300 or 100e3 or 1e6 or 2.2e6 or 4.7e6),
     ]);
+
+    private static readonly Lazy<RankingResult> Best = new(() => Ranker.Rank(Wanted, Parts));
+
+    private static readonly Lazy<RankingResult> Everything = new(() => Ranker.Rank(Wanted, Parts, new RankingOptions { All = true, Top = null }));
 
     /// <summary>The best of each group.</summary>
     public static RankingResult Ranking => Best.Value;

@@ -64,6 +64,11 @@ public static class Bars
     public static ImmutableArray<Line> DrawTall(ImmutableArray<LimitUse> uses, int width, Glyphs glyphs)
     {
         ArgumentNullException.ThrowIfNull(glyphs);
+        if (Width(uses, 4, glyphs) > width)
+        {
+            uses = [.. uses.Select(use => use.Change.Length == 0 ? use : use with { Change = "", Because = $"{use.Change}; {use.Because}" })];
+        }
+
         int cells = Math.Clamp(width - Width(uses, 0, glyphs), 4, MostCells);
         var lines = ImmutableArray.CreateBuilder<Line>();
         foreach ((LineBuilder line, int i) in Pictures(uses, cells, glyphs).Select((line, i) => (line, i)))

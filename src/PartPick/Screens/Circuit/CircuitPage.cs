@@ -22,12 +22,17 @@ internal static class CircuitPage
         ArgumentNullException.ThrowIfNull(result);
         Requirement requirement = result.Requirement;
         var lines = ImmutableArray.CreateBuilder<Line>();
-        foreach (string text in Broken.Sentences(candidate, swaps?.Ranked).Concat(candidate.Warnings))
+        Watch(Broken.Sentences(candidate, swaps?.Ranked));
+        lines.AddRange(DrawingLimitsAndParts(candidate, requirement, width, glyphs, swaps));
+        if (candidate.Misses.Length + candidate.Warnings.Length > 0)
         {
-            lines.AddRange(Paragraph.Of(text, width, glyphs, " ! ", 3, Tone.Warning));
+            lines.Add(Line.Empty);
+            lines.Add(Heading("To be watched", glyphs));
+            Watch(candidate.Misses.Select(miss => miss.Sentence).Concat(candidate.Warnings));
         }
 
-        lines.AddRange(DrawingLimitsAndParts(candidate, requirement, width, glyphs, swaps));
+        lines.Add(Line.Empty);
+        lines.AddRange(PartsTable.Draw(candidate, glyphs));
         lines.AddRange(Budget(candidate, requirement, width, glyphs));
         lines.AddRange(Corners(candidate, width, glyphs));
         lines.AddRange(CircuitFigures.Draw(candidate, glyphs));
@@ -45,11 +50,14 @@ internal static class CircuitPage
         }
 
         return lines.ToImmutable();
+
+        void Watch(IEnumerable<string> sentences) =>
+            lines.AddRange(sentences.SelectMany(text => Paragraph.Of(text, width, glyphs, " ! ", 3, Tone.Warning)));
     }
 
     internal static Line Heading(string text, Glyphs glyphs) => new LineBuilder(glyphs).Add(" " + text, Tone.Strong).Build();
 
-    // The limits stand above the drawing with the parts beside it, or all follow each other.
+    // The limits stand above the drawing with the parts that can be changed beside it, or all follow each other.
     private static IEnumerable<Line> DrawingLimitsAndParts(
         Candidate candidate, Requirement requirement, int width, Glyphs glyphs, SwapModel? swaps)
     {
@@ -60,17 +68,15 @@ internal static class CircuitPage
         }
 
         ImmutableArray<Line> drawing = Schematic.Draw(candidate, glyphs);
-        ImmutableArray<Line> parts = PartsTable.Draw(candidate, glyphs);
-        ImmutableArray<Line> list = swaps is null ? [] : [Line.Empty, .. parts];
         if (width < Schematic.Width + 36)
         {
-            ImmutableArray<Line> narrow = swaps is null ? parts : SwapTable.Draw(swaps, width, glyphs);
-            return [.. Bars.DrawTall(uses, width, glyphs), Line.Empty, .. narrow, Line.Empty, .. drawing, .. list];
+            ImmutableArray<Line> narrow = swaps is null ? [] : [.. SwapTable.Draw(swaps, width, glyphs), Line.Empty];
+            return [.. Bars.DrawTall(uses, width, glyphs), Line.Empty, .. narrow, .. drawing];
         }
 
         int left = width >= Schematic.Width + 64 ? Schematic.Width + 3 : Schematic.Width;
-        ImmutableArray<Line> beside = swaps is null ? parts : SwapTable.Draw(swaps, width - left, glyphs);
-        return [.. Bars.Draw(uses, width, glyphs), Line.Empty, .. SideBySide(drawing, left, beside), .. list];
+        ImmutableArray<Line> beside = swaps is null ? [] : SwapTable.Draw(swaps, width - left, glyphs);
+        return [.. Bars.Draw(uses, width, glyphs), Line.Empty, .. SideBySide(drawing, left, beside)];
     }
 
     private static IEnumerable<Line> SideBySide(ImmutableArray<Line> left, int width, ImmutableArray<Line> right)

@@ -43,12 +43,9 @@ internal static class PairFigures
             .. new[] { ("A", "A is better in "), ("B", "B is better in "), ("", "they are the same in ") }
                 .Select(group => (Begin: group.Item2, Words: judged.Where(one => one.Figure.Better == group.Item1).Select(one => one.Word).ToArray()))
                 .Where(group => group.Words.Length > 0)
-                .Select(group => group.Begin + List(group.Words)),
+                .Select(group => group.Begin + WordList.Of(group.Words)),
         ];
         string text = string.Join("; ", parts);
         return char.ToUpperInvariant(text[0]) + text[1..] + ".";
     }
-
-    private static string List(string[] words) =>
-        words.Length == 1 ? words[0] : string.Join(", ", words[..^1]) + " and " + words[^1];
 }

@@ -2,23 +2,42 @@ using PartPick.Selection;
 
 namespace PartPick.Screens;
 
-/// <summary>Says which limits a circuit breaks, and which of them and of its limits have changed against the ranked one.</summary>
+/// <summary>Says which limits a circuit breaks, and what of it is new against the ranked one.</summary>
 internal static class Broken
 {
-    /// <summary>The sentences.</summary>
+    /// <summary>A sentence for those that are newly broken, those that still are, and those that hold now.</summary>
     /// <param name="candidate">The circuit.</param>
     /// <param name="ranked">The circuit as it was ranked; null for none.</param>
     public static IEnumerable<string> Sentences(Candidate candidate, Candidate? ranked)
     {
+        Limit[] now = LimitsOf(candidate);
         if (ranked is null || ReferenceEquals(ranked, candidate))
         {
-            return candidate.Misses.Select(miss => miss.Sentence);
+            return Said("It does not start by itself.", "It breaks ", now);
         }
 
-        IEnumerable<string> now = candidate.Misses.Select(miss => Breaks(ranked, miss.Limit) ? miss.Sentence : "Newly broken: " + miss.Sentence);
-        Limit[] mended = [.. ranked.Misses.Select(miss => miss.Limit).Distinct().Where(limit => !Breaks(candidate, limit))];
-        return mended.Length == 0 ? now : now.Append("It holds now: " + string.Join(", ", mended.Select(Trade.Words)));
+        Limit[] before = LimitsOf(ranked);
+        return
+        [
+            .. Said("It does not start by itself any more.", "Newly broken: ", now.Except(before)),
+            .. Said("It still does not start by itself.", "Still broken: ", now.Intersect(before)),
+            .. Said("It starts by itself now.", "It holds now: ", before.Except(now)),
+        ];
     }
 
-    private static bool Breaks(Candidate candidate, Limit limit) => candidate.Misses.Any(miss => miss.Limit == limit);
+    private static Limit[] LimitsOf(Candidate candidate) => [.. candidate.Misses.Select(miss => miss.Limit).Distinct().Order()];
+
+    private static IEnumerable<string> Said(string start, string begin, IEnumerable<Limit> limits)
+    {
+        if (limits.Contains(Limit.Start))
+        {
+            yield return start;
+        }
+
+        string[] words = [.. limits.Where(limit => limit != Limit.Start).Select(Trade.Words)];
+        if (words.Length > 0)
+        {
+            yield return begin + WordList.Of(words) + ".";
+        }
+    }
 }

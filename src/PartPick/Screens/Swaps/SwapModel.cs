@@ -168,7 +168,7 @@ internal sealed class SwapModel
         if (at + step < 0 || at + step >= options.Length)
         {
             return options.Length == 1 ? "The catalogue has nothing else that may stand there."
-                : $"{options[at].Words} is the {(step < 0 ? "first" : "last")} that the catalogue has for there.";
+                : $"{options[at].Words} is the {(step < 0 ? "first" : "last")} one that may stand there.";
         }
 
         Put(options[at + step]);
