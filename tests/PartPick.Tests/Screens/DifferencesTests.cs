@@ -45,19 +45,20 @@ public class DifferencesTests
         Assert.Single(bench.Rows, row => row.EndsWith("better", StringComparison.Ordinal));
         AssertLine("error, worst case", Figures.Ppm(a.Budget!.WorstRatio), Figures.Ppm(b.Budget!.WorstRatio), a.Budget.WorstRatio < b.Budget.WorstRatio);
         AssertLine("margin, worst corner", Figures.Three(a.Margin.Value), Figures.Three(b.Margin.Value), a.Margin.Value > b.Margin.Value);
-        AssertLine("drive, worst corner", Figures.Three(a.Drive!.Value * 1e6), Figures.Three(b.Drive!.Value * 1e6), a.Drive.Value < b.Drive.Value);
+        (double one, double other) = (a.Drive!.Value / a.RatedDriveWatts!.Value, b.Drive!.Value / b.RatedDriveWatts!.Value);
+        AssertLine("  of the rated", Figures.Three(one * 100), Figures.Three(other * 100), one < other);
         int[] points = [.. bench.Rows.Where(row => row.StartsWith(" error, w", StringComparison.Ordinal)
             || row.StartsWith(" cost", StringComparison.Ordinal)).Select(row => row.IndexOf('.', StringComparison.Ordinal))];
         Assert.Equal(2, points.Length);
         Assert.Equal(points[0], points[1]);
 
-        void AssertLine(string name, string one, string other, bool first)
+        void AssertLine(string name, string textA, string textB, bool first)
         {
             string row = bench.Rows.Single(text => text.StartsWith(" " + name, StringComparison.Ordinal));
             string[] words = row[name.Length..].Split(' ', StringSplitOptions.RemoveEmptyEntries);
-            Assert.Contains(one, words);
-            Assert.Contains(other, words);
-            Assert.Equal(one == other ? "same" : first ? "A" : "B", words[^1]);
+            Assert.Contains(textA, words);
+            Assert.Contains(textB, words);
+            Assert.Equal(textA == textB ? "same" : first ? "A" : "B", words[^1]);
         }
     }
 

@@ -10,12 +10,14 @@ internal static class PairFigures
     /// <param name="pair">The circuits.</param>
     public static ImmutableArray<FigurePair> Of(CircuitPair pair)
     {
+        // What counts of the drive level is its share of what each crystal is rated for, where both are.
+        bool rated = pair is { A.RatedDriveWatts: not null, B.RatedDriveWatts: not null };
         bool priced = pair.A.Currency == pair.B.Currency;
         return
         [
             Figure("error, worst case", "ppm", -1, one => one.Budget?.WorstRatio * 1e6),
             Figure("margin, worst corner", "", 1, one => one.Margin.Value),
-            Figure("drive, worst corner", "µW", -1, one => one.Drive?.Value * 1e6),
+            Figure("drive, worst corner", "µW", rated ? 0 : -1, one => one.Drive?.Value * 1e6),
             Figure("  of the rated", "%", -1, one => one.Drive?.Value / one.RatedDriveWatts * 100),
             Figure("start-up, longest", "ms", -1, one => one.StartUpTime?.Value * 1e3),
             Figure("cost of a board", priced ? pair.A.Currency : "", priced ? -1 : 0, one => (double)one.Cost, 3),
@@ -37,7 +39,7 @@ internal static class PairFigures
     public static string Sentence(ImmutableArray<FigurePair> figures)
     {
         (string Word, FigurePair Figure)[] judged =
-            [("error", figures[0]), ("margin", figures[1]), ("drive", figures[2]), ("start-up", figures[4]), ("cost", figures[5])];
+            [("error", figures[0]), ("margin", figures[1]), ("drive", figures[2].Sense == 0 ? figures[3] : figures[2]), ("start-up", figures[4]), ("cost", figures[5])];
         string[] parts =
         [
             .. new[] { ("A", "A is better in "), ("B", "B is better in "), ("", "they are the same in ") }

@@ -39,7 +39,7 @@ internal static class SwapTable
         lines.AddRange(Beside(swaps, board, width, glyphs));
         if (swaps is { IsChanged: true, IsComputing: false })
         {
-            lines.AddRange(Paragraph.Of(Whole(swaps.Ranked!, swaps.Shown!, swaps), width, glyphs, " ", 1));
+            lines.AddRange(Paragraph.Of(Whole(swaps.Ranked!, swaps.Shown!), width, glyphs, " ", 1));
         }
 
         return lines.ToImmutable();
@@ -102,12 +102,14 @@ internal static class SwapTable
             .Column(key, 6, Tone.Strong).Column(words ?? "-", width - 7, words is null ? Tone.Quiet : Tone.Normal).Build();
     }
 
-    private static string Whole(Candidate from, Candidate to, SwapModel swaps)
+    private static string Whole(Candidate from, Candidate to)
     {
-        string frequency = to.Budget?.CentreRatio - from.Budget?.CentreRatio is { } shift
-            ? $"Frequency {Signed.Of(shift * 1e6)} ppm"
-            : "No frequency: it does not run";
+        if (to.Budget?.CentreRatio - from.Budget?.CentreRatio is not { } shift)
+        {
+            return to.Budget is null ? "No frequency: it does not run." : "The ranked one does not run.";
+        }
+
         string score = to.IsFit && from.IsFit ? FormattableString.Invariant($", score {to.Score:F3}, ranked {from.Score:F3}") : "";
-        return $"{frequency} against the ranked{score}. " + (swaps.Shown!.IsFit ? "Every limit holds." : "A limit is broken.");
+        return $"Frequency {Signed.Of(shift * 1e6)} ppm against the ranked{score}.";
     }
 }
