@@ -200,6 +200,20 @@ public class SwapScreenTests
         Assert.Equal(90e-6, bench.Model.List.Result!.Requirement.BudgetRatio);
     }
 
+    [Fact]
+    public void A_follower_has_its_bias_resistors_to_choose_from_and_without_a_catalogue_they_stay()
+    {
+        using var bench = new Bench(height: 40);
+        bench.Press(Key.End, Key.Enter);
+        Assert.Matches("► C1 +100 pF", bench.Text);
+        Assert.Matches("R1 RB top +100 kΩ", bench.Text);
+        Assert.Matches("R2 RB low +100 kΩ", bench.Text);
+        Assert.Matches("R3 RE +2.2 kΩ", bench.Text);
+        bench.Press(Key.CursorDown, Key.CursorDown, Key.CursorRight);
+        Assert.Matches("► R1 RB top", bench.Text);
+        Assert.Contains("There are no parts to put in.", bench.Rows[^1], StringComparison.Ordinal);
+    }
+
     [Theory]
     [InlineData(40, 12)]
     [InlineData(60, 20)]
