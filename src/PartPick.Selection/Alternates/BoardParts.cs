@@ -23,7 +23,9 @@ public sealed record BoardParts(CandidateParts Choice, SupportParts Support)
         return new BoardParts(
             candidate.Choice,
             new SupportParts(
-                In(PartRoles.Feedback) as ResistorPart, In(PartRoles.Decoupling) as CapacitorPart, In(PartRoles.Coupling) as CapacitorPart));
+                In(PartRoles.Feedback) as ResistorPart,
+                In(PartRoles.Decoupling) as CapacitorPart,
+                In(PartRoles.Coupling) as CapacitorPart));
 
         Part? In(string role) => candidate.Parts.FirstOrDefault(use => use.Role == role)?.Part;
     }

@@ -77,7 +77,11 @@ public sealed class SwapDesk
             values = values.Append((standing.ValueFarads, [standing]));
         }
 
-        return [.. values.OrderBy(value => value.Farads).Select(value => new SwapOption(place, SwapPlaces.Words(place, value.Parts[0]), value.Parts))];
+        return
+        [
+            .. values.OrderBy(value => value.Farads)
+                .Select(value => new SwapOption(place, SwapPlaces.Words(place, value.Parts[0]), value.Parts)),
+        ];
     }
 
     private static ImmutableArray<SwapOption> Resistors(

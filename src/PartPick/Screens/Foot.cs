@@ -42,7 +42,8 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
                 ("s", "to a list"), ("Esc", "list"), ("?", "keys")])],
             { List.Chosen: null } => [Keys([("e", "edit the wanted"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
             _ => [Keys([
-                ("d", "differences"), (UpDown, "choose"), ("Enter", "open"), ("s", "to a list"), ("e", "edit"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
+                ("d", "differences"), (UpDown, "choose"),
+                ("Enter", "open"), ("s", "to a list"), ("e", "edit"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
         };
     }
 

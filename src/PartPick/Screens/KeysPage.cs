@@ -38,8 +38,8 @@ public static class KeysPage
         Key("Esc", "leave the value as it was; once more, back to the list or circuit");
         Head("In a circuit");
         Key($"{glyphs.Up} {glyphs.Down}", "choose a part: capacitors, resistors, crystal, amplifier, stage");
-        Key($"{glyphs.Left} {glyphs.Right}", "its value before, its next one: every figure follows, with its change against the ranked circuit; " +
-            "s puts the changed circuit on a list as it stands, d shows it beside the ranked one");
+        Key($"{glyphs.Left} {glyphs.Right}", "its value before, its next one: every figure follows, with its change against the ranked " +
+            "circuit; s puts the changed circuit on a list as it stands, d shows it beside the ranked one");
         Key("0", "a direct connection in the place of Rs, or no lower base resistor");
         Key("Backspace", "the chosen part as it was ranked; Del takes all changes back");
         Key("n b", "the next circuit, the one before, at the same place of the page");

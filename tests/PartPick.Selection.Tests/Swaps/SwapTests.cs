@@ -80,7 +80,8 @@ public class SwapTests
                 SwapChanges.None.With(stage).Boards(ranked, desk.Support), desk.Requirement, desk.Market, ranking, Cancellation);
             Assert.Equal(stage.Tap, trial.Candidate!.Choice.Tap);
             Assert.Equal(1000 * Math.Pow(2, stage.Tap), trial.Candidate.Choice.Crystal.FrequencyHz, 1e-3);
-            Assert.Equal(SupportParts.For(CircuitKind.Counter, trial.Candidate.Choice.Crystal.FrequencyHz, desk.Market), trial.Board.Support);
+            Assert.Equal(
+                SupportParts.For(CircuitKind.Counter, trial.Candidate.Choice.Crystal.FrequencyHz, desk.Market), trial.Board.Support);
         }
     }
 

@@ -19,8 +19,10 @@ public class DifferencesTests
         Assert.Contains(bench.Rows, row => row.StartsWith(" =counter", StringComparison.Ordinal));
         bench.Press(new Key('d'));
         ImmutableArray<Candidate> ranked = SwapWorld.Ranking.Candidates;
-        Assert.Contains("A marked: counter " + ranked[0].Choice.Amplifier.Id + ", " + ranked[0].Choice.Crystal.Id, bench.Text, StringComparison.Ordinal);
-        Assert.Contains("B chosen: counter " + ranked[1].Choice.Amplifier.Id + ", " + ranked[1].Choice.Crystal.Id, bench.Text, StringComparison.Ordinal);
+        Assert.Contains(
+            "A marked: counter " + ranked[0].Choice.Amplifier.Id + ", " + ranked[0].Choice.Crystal.Id, bench.Text, StringComparison.Ordinal);
+        Assert.Contains(
+            "B chosen: counter " + ranked[1].Choice.Amplifier.Id + ", " + ranked[1].Choice.Crystal.Id, bench.Text, StringComparison.Ordinal);
         foreach ((string one, string other) in new[]
         {
             (ranked[0].Choice.Crystal.Id, ranked[1].Choice.Crystal.Id), (ranked[0].Choice.C1.Id, ranked[1].Choice.C1.Id),
@@ -43,8 +45,10 @@ public class DifferencesTests
         bench.Press(new Key('d'), Key.CursorDown, new Key('d'));
         (Candidate a, Candidate b) = (SwapWorld.Ranking.Candidates[0], SwapWorld.Ranking.Candidates[1]);
         Assert.Single(bench.Rows, row => row.EndsWith("better", StringComparison.Ordinal));
-        AssertLine("error, worst case", Figures.Ppm(a.Budget!.WorstRatio), Figures.Ppm(b.Budget!.WorstRatio), a.Budget.WorstRatio < b.Budget.WorstRatio);
-        AssertLine("margin, worst corner", Figures.Three(a.Margin.Value), Figures.Three(b.Margin.Value), a.Margin.Value > b.Margin.Value);
+        AssertLine(
+            "error, worst case", Figures.Ppm(a.Budget!.WorstRatio), Figures.Ppm(b.Budget!.WorstRatio), a.Budget.WorstRatio < b.Budget.WorstRatio);
+        AssertLine(
+            "margin, worst corner", Figures.Three(a.Margin.Value), Figures.Three(b.Margin.Value), a.Margin.Value > b.Margin.Value);
         (double one, double other) = (a.Drive!.Value / a.RatedDriveWatts!.Value, b.Drive!.Value / b.RatedDriveWatts!.Value);
         AssertLine("  of the rated", Figures.Three(one * 100), Figures.Three(other * 100), one < other);
         int[] points = [.. bench.Rows.Where(row => row.StartsWith(" error, w", StringComparison.Ordinal)

@@ -27,7 +27,8 @@ internal static class SwapWorld
 
     private static readonly Lazy<RankingResult> Best = new(() => Ranker.Rank(Wanted, Parts));
 
-    private static readonly Lazy<RankingResult> Everything = new(() => Ranker.Rank(Wanted, Parts, new RankingOptions { All = true, Top = null }));
+    private static readonly Lazy<RankingResult> Everything = new(
+        () => Ranker.Rank(Wanted, Parts, new RankingOptions { All = true, Top = null }));
 
     /// <summary>The best of each group.</summary>
     public static RankingResult Ranking => Best.Value;

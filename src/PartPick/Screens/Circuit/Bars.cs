@@ -66,7 +66,9 @@ public static class Bars
         ArgumentNullException.ThrowIfNull(glyphs);
         if (Width(uses, 4, glyphs) > width)
         {
-            uses = [.. uses.Select(use => use.Change.Length == 0 ? use : use with { Change = "", Because = $"{use.Change}; {use.Because}" })];
+            uses = [.. uses.Select(use => use.Change.Length == 0
+                ? use
+                : use with { Change = "", Because = $"{use.Change}; {use.Because}" })];
         }
 
         int cells = Math.Clamp(width - Width(uses, 0, glyphs), 4, MostCells);

@@ -39,11 +39,16 @@ internal static class PairFigures
     public static string Sentence(ImmutableArray<FigurePair> figures)
     {
         (string Word, FigurePair Figure)[] judged =
-            [("error", figures[0]), ("margin", figures[1]), ("drive", figures[2].Sense == 0 ? figures[3] : figures[2]), ("start-up", figures[4]), ("cost", figures[5])];
+        [
+            ("error", figures[0]), ("margin", figures[1]), ("drive", figures[2].Sense == 0 ? figures[3] : figures[2]),
+            ("start-up", figures[4]), ("cost", figures[5]),
+        ];
         string[] parts =
         [
             .. new[] { ("A", "A is better in "), ("B", "B is better in "), ("", "they are the same in ") }
-                .Select(group => (Begin: group.Item2, Words: judged.Where(one => one.Figure.Better == group.Item1).Select(one => one.Word).ToArray()))
+                .Select(group => (
+                    Begin: group.Item2,
+                    Words: judged.Where(one => one.Figure.Better == group.Item1).Select(one => one.Word).ToArray()))
                 .Where(group => group.Words.Length > 0)
                 .Select(group => group.Begin + WordList.Of(group.Words)),
         ];

@@ -32,7 +32,8 @@ internal static class LimitChanges
     }
 
     // In the unit of the limit, where there is one.
-    private static string Moved(double? change, double? limit, Dimension dimension, bool gone, double? share = null) => change is not { } moved
+    private static string Moved(
+        double? change, double? limit, Dimension dimension, bool gone, double? share = null) => change is not { } moved
         ? gone ? "none now" : "new"
         : Say(share ?? moved, Signed.Of(moved, limit is { } one
             ? Figures.OfLimit(Math.Abs(moved), one, dimension).Value

@@ -4,7 +4,9 @@ using PartPick.Values;
 
 namespace PartPick.Screens;
 
-/// <summary>Reads what may stand in a circuit, and analyses changed ones, in the background; what was analysed before is remembered.</summary>
+/// <summary>
+/// Reads what may stand in a circuit, and analyses changed ones, in the background; what was analysed before is remembered.
+/// </summary>
 /// <param name="parts">The parts that are ranked.</param>
 /// <param name="work">Does what takes long.</param>
 internal sealed class SwapBench(IPartsSource parts, ScreenWork work)
