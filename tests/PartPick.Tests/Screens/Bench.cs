@@ -1,5 +1,6 @@
 using System.Collections.Concurrent;
 using PartPick.Catalog;
+using PartPick.Requirements;
 using PartPick.Screens;
 using PartPick.Selection;
 using Terminal.Gui.App;
@@ -54,6 +55,19 @@ internal sealed class Bench : IDisposable
 
     /// <summary>Lets the parts of an open circuit be changed for others.</summary>
     public void ChangeParts(PartsCatalog catalogue) => Model.ChangePartsFrom(new WholeCatalog(catalogue), _work);
+
+    /// <summary>Keeps requirements beside a catalogue.</summary>
+    public void KeepWanted(string catalogue) => Model.KeepWantedAt(new KeptRequirementStore(catalogue), _work, Ranking);
+
+    /// <summary>Presses keys, and after each waits until what it began in the background is done.</summary>
+    public void Do(params Key[] keys)
+    {
+        foreach (Key key in keys)
+        {
+            Press(key);
+            Settle();
+        }
+    }
 
     public void Press(params Key[] keys)
     {

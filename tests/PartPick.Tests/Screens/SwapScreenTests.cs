@@ -174,6 +174,7 @@ public class SwapScreenTests
         bench.Settle();
         Candidate shown = bench.Model.Swaps.Shown!;
         bench.Press(new Key('s'), Key.Enter);
+        bench.Settle();
         Assert.Contains("Candidate 1 of the list default", bench.Rows[^1], StringComparison.Ordinal);
         ShortlistEntry entry = ShortlistStore.Read(catalogue, "default").Value.Entries.Single();
         Assert.Equal(BoardParts.Of(shown).Support.Feedback!.Id, ChosenParts.Read(entry.Choice)!.Ids["rf"]);
