@@ -43,6 +43,7 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
             { Shortlists.IsOpen: true } => [Keys(
                 (glyphs.Left + " " + glyphs.Right, "lists"), ("Del", "take off"), ("x", "to a file"), ("r", "replacements"),
                 ("b", "cost over boards"), ("Esc", "back"))],
+            { Differences.Pair: not null } => [Keys((UpDown, "scroll"), ("Esc", "back"), ("?", "keys"))],
             { Kept: { IsOpen: true, Comparison.IsOpen: true } } => [Keys(
                 (glyphs.Left + " " + glyphs.Right, "others"), (UpDown, "scroll"), ("Esc", "what is kept"), ("?", "keys"))],
             { Kept.IsOpen: true } => [Keys(KeptKeys)],
@@ -50,12 +51,14 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
                 (glyphs.Left + " " + glyphs.Right, "other pictures"), ("x", "to an SVG file"), ("Esc", "back"), ("?", "keys"))],
             { Place: Place.Sentence, Wanted.Typed: not null } => [Value(("Enter", "keep"), ("Esc", "as it was"))],
             { Place: Place.Sentence } => [Value(("Tab", "next"), ("Esc", model.IsReading ? "circuit" : "list"))],
-            { Place: Place.Circuit } => [Keys(
-                (UpDown, "scroll"), (glyphs.Left + " " + glyphs.Right, "other circuits"), ("s", "to a list"), ("p", "pictures"),
-                ("Esc", "list"), ("e", "edit"), ("?", "keys"))],
+            { Place: Place.Circuit } => [Keys([
+                .. new[] { ("n", "next"), ("d", "differences"), (UpDown, "part"), (glyphs.Left + " " + glyphs.Right, "value") },
+                .. model.Swaps.IsChanged ? new[] { ("Backspace", "as ranked") } : [],
+                ("p", "pictures"), ("s", "to a list"), ("Esc", "list"), ("?", "keys")])],
             { List.Chosen: null } => [Keys([("e", "edit the wanted"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
             _ => [Keys([
-                (UpDown, "choose"), ("Enter", "open"), ("p", "pictures"), ("s", "to a list"), .. Kept, ("e", "edit"), .. Catalogue,
+                (UpDown, "choose"), ("d", "differences"), .. Kept, .. Catalogue, ("p", "pictures"), ("s", "to a list"), ("Enter", "open"),
+                ("e", "edit"),
                 ("?", "keys"), ("q", "quit")])],
         };
     }

@@ -5,7 +5,7 @@ using PartPick.Selection;
 namespace PartPick.Screens;
 
 /// <summary>The screen: sentence, list and circuit, and what the keys do. Knows nothing of the terminal.</summary>
-public sealed class MainModel
+public sealed partial class MainModel
 {
     private static readonly TimeSpan AfterChoice = TimeSpan.FromMilliseconds(150);
     private static readonly TimeSpan WhileTyping = TimeSpan.FromMilliseconds(400);
@@ -39,6 +39,7 @@ public sealed class MainModel
         Notice = notice;
         _waits = waits;
         _reading = new Reading(List);
+        Differences = new DifferencesModel(List);
         Wanted = SentenceOf(requirement, currency);
         _ranking.Answered += Take;
         _ranking.Failed += problem => Say($"! {problem}");
@@ -94,7 +95,7 @@ public sealed class MainModel
     internal bool KeepsReading => Place == Place.Sentence && _reading.IsThere;
 
     /// <summary>Whether the keys go to the list, with nothing open beside it.</summary>
-    internal bool IsInList => Place == Place.List && !ShowsKeys && !Shortlists.IsOpen && !Kept.IsOpen;
+    internal bool IsInList => Place == Place.List && !ShowsKeys && !Shortlists.IsOpen && !Kept.IsOpen && Differences.Pair is null;
 
     /// <summary>Whether the list answers an older requirement.</summary>
     public bool IsStale { get; private set; }
@@ -120,6 +121,7 @@ public sealed class MainModel
         Kept.Stop();
         Shortlists.Stop();
         Pictures.Close();
+        Swaps.Forget();
         _ranking.Stop();
     }
 
@@ -162,6 +164,11 @@ public sealed class MainModel
         if (Shortlists.Press(key, out string? notice) || Kept.Press(key, out notice) || Pictures.Press(key, out notice))
         {
             Notice = notice;
+            return;
+        }
+
+        if (Differences.Press(key))
+        {
             return;
         }
 
@@ -255,29 +262,6 @@ public sealed class MainModel
                 LeaveSentence();
                 break;
             case SentenceAnswer.NotMine:
-                PressAnywhere(key);
-                break;
-        }
-    }
-
-    private void PressInCircuit(KeyPress key)
-    {
-        if (CircuitScroll.Press(key))
-        {
-            return;
-        }
-
-        switch (key.Name)
-        {
-            case KeyName.Escape or KeyName.Enter or KeyName.Backspace:
-                _reading.Close();
-                Place = Place.List;
-                break;
-            case KeyName.Left or KeyName.Right:
-                List.Move(key.Name == KeyName.Left ? -1 : 1);
-                _reading.Open();
-                break;
-            default:
                 PressAnywhere(key);
                 break;
         }
@@ -390,7 +374,7 @@ public sealed class MainModel
                 break;
             case KeyName.Enter when List.Chosen is not null:
                 CircuitScroll.Reset();
-                _reading.Open();
+                OpenCircuit();
                 Place = Place.Circuit;
                 break;
             case KeyName.Escape:
@@ -415,7 +399,10 @@ public sealed class MainModel
                 ShowsKeys = true;
                 break;
             case { Name: KeyName.Letter, Letter: 's' } when List is { Chosen: { } chosen, Result: { } result }:
-                Shortlists.Ask(chosen, result.Requirement);
+                PutOnList(chosen, result.Requirement);
+                break;
+            case { Name: KeyName.Letter, Letter: 'd' } when List is { Chosen: { } chosen, Result: { } result }:
+                SetBeside(chosen, result.Requirement);
                 break;
             case { Name: KeyName.Letter, Letter: 'l' }:
                 Shortlists.Open();
@@ -443,6 +430,7 @@ public sealed class MainModel
 
     private void Rank(bool typing)
     {
+        Swaps.Forget();
         IsStale = List.Result is not null;
         _ranking.Ask(Wanted.Current, !_waits ? TimeSpan.Zero : typing ? WhileTyping : AfterChoice);
     }
@@ -459,6 +447,7 @@ public sealed class MainModel
             SayWhereItIsGone();
         }
 
+        TakeInCircuit(result);
         if (result.IsComplete)
         {
             Settled?.Invoke(Wanted.Accepted);

@@ -1,4 +1,5 @@
 using System.Collections.Concurrent;
+using PartPick.Catalog;
 using PartPick.Requirements;
 using PartPick.Screens;
 using PartPick.Selection;
@@ -52,6 +53,9 @@ internal sealed class Bench : IDisposable
 
     /// <summary>Keeps lists of candidates in a catalogue.</summary>
     public void KeepLists(string catalogue) => Model.KeepListsAt(new CatalogDesk(catalogue), _work);
+
+    /// <summary>Lets the parts of an open circuit be changed for others.</summary>
+    public void ChangeParts(PartsCatalog catalogue) => Model.ChangePartsFrom(new WholeCatalog(catalogue), _work);
 
     /// <summary>Keeps requirements beside a catalogue.</summary>
     public void KeepWanted(string catalogue) => Model.KeepWantedAt(new KeptRequirementStore(catalogue), _work, Ranking);

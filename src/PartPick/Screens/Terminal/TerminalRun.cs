@@ -52,6 +52,7 @@ internal sealed class TerminalRun(
         };
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
         model.KeepListsAt(desk, work);
+        model.ChangePartsFrom(ranking.Parts, work);
         model.KeepWantedAt(store, work, ranking);
         model.DrawPicturesWith(work);
         using var screen = new MainScreen(model, palette);
