@@ -44,6 +44,7 @@ internal sealed class AnswerBuilder(SearchRun run, RankingOptions options)
             Candidates = [.. candidates],
             Front = [.. front.Select(point => point.Id)],
             NearestMisses = nearest,
+            CheapestCost = run.Leaders.Cheapest,
             Rejections = run.Tally.Rejections(),
             IsComplete = complete,
             ElapsedSeconds = elapsedSeconds,
