@@ -94,13 +94,24 @@ public class WhyNotLimitTests
     }
 
     [Fact]
-    public void Two_limits_that_trade_against_each_other_each_lift_it_alone()
+    public void Limits_that_trade_against_each_other_each_lift_it_alone()
     {
-        WhyNotAnswer wide = WhyNotWorld.Ask(Strict(Limit.Error), WhyNotWorld.Usual, "X");
+        // The largest margin within a narrow budget, and within a wide one: between them either limit may give way.
+        double narrow = Most(WhyNotWorld.Wanted with { BudgetRatio = 95e-6 });
+        double wide = Most(WhyNotWorld.Wanted with { BudgetRatio = 400e-6 });
+        Assert.True(wide > 1.02 * narrow, $"{wide} against {narrow}");
+        Requirement strict = WhyNotWorld.Wanted with { BudgetRatio = 95e-6, Margin = Math.Sqrt(narrow * wide) };
 
-        // The least error is reached at the wanted margin; another margin cannot be the only way.
-        Assert.All(wide.Changes, set => Assert.NotEmpty(WhyNotWorld.Listed(set.Requirement, WhyNotWorld.Usual)));
-        Assert.Equal(wide.Changes.Select(set => set.Size).Order(), wide.Changes.Select(set => set.Size));
+        WhyNotAnswer answer = WhyNotWorld.Ask(strict, WhyNotWorld.Usual, "X");
+
+        Assert.Equal(["budget", "margin"], answer.Changes.Select(set => Assert.Single(set.Changes).Key!.Name).Order());
+        Assert.All(answer.Changes, set => Assert.NotEmpty(WhyNotWorld.Listed(strict.With(set.Changes[0]), WhyNotWorld.Usual)));
+        Assert.Equal(answer.Changes.Select(set => set.Size).Order(), answer.Changes.Select(set => set.Size));
+
+        static double Most(Requirement requirement) => Values.ValueText.Parse(
+            WhyNotWorld.Ask(requirement with { Margin = 500 }, WhyNotWorld.Usual, "X").Changes
+                .SelectMany(set => set.Changes).First(change => change.Key?.Name == "margin").Becomes,
+            Values.Dimension.Number, "margin").Value;
     }
 
     [Fact]

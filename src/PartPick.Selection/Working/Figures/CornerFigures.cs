@@ -32,6 +32,13 @@ internal static class CornerFigures
                 ]);
         }
 
+        if (candidate.Drive is null)
+        {
+            yield return new FigureWorking(
+                "drive level, highest", "none", "There is none, as a corner does not run: it has no steady state.",
+                [new WorkingStep(Section, "steady state", "Re Zc(I) = -Rm", "", "none at a corner", "periodic states at all corners")]);
+        }
+
         if (candidate.StartUpTime is { } time && corners.StartUpTime(study.Analysis)?.Point is { } slow
             && corners.RunningAt(study.Analysis, slow) is { } grown)
         {

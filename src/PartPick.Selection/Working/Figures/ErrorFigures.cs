@@ -14,6 +14,14 @@ internal static class ErrorFigures
             yield break;
         }
 
+        if (!double.IsFinite(budget.WorstRatio))
+        {
+            yield return new FigureWorking(
+                "frequency error, worst case", "none", "There is none, as a corner does not run: it has no steady state.",
+                [new WorkingStep(Section, "steady state", "Re Zc(I) = -Rm", "", "none at a corner", "periodic states at all corners")]);
+            yield break;
+        }
+
         string centre = Numbers.Ppm(Math.Abs(budget.CentreRatio));
         string[] terms = [.. budget.Terms.Select(term => Numbers.Ppm(term.Ratio))];
         yield return new FigureWorking(

@@ -7,7 +7,7 @@ internal static class ScoreFigure
 {
     public static IEnumerable<FigureWorking> Of(Candidate candidate, Requirement requirement, decimal? cheapest)
     {
-        if (candidate.Budget is not { } budget || cheapest is not { } least || !double.IsFinite(candidate.Score))
+        if (candidate.Budget is not { } budget || cheapest is not { } least || !double.IsFinite(candidate.Score) || !double.IsFinite(budget.WorstRatio))
         {
             yield break;
         }
