@@ -50,6 +50,32 @@ public static class WhyNotSearch
         return sets.IsEmpty ? Unlifted(answer, search, run, lifted) : Changed(answer, search, lifted, sets, progress);
     }
 
+    /// <summary>The answer for a part that a ranking lists already; null where it does not, or is not complete.</summary>
+    /// <param name="ranked">The ranking.</param>
+    /// <param name="id">The id of the part.</param>
+    public static WhyNotAnswer? InList(RankingResult ranked, string id)
+    {
+        ArgumentNullException.ThrowIfNull(ranked);
+        for (int i = 0; i < ranked.Candidates.Length && ranked.IsComplete; i++)
+        {
+            Candidate candidate = ranked.Candidates[i];
+            if (candidate.Choice.Crystal.Id == id || candidate.Choice.Amplifier.Id == id)
+            {
+                return new WhyNotAnswer
+                {
+                    Part = candidate.Choice.Crystal.Id == id ? candidate.Choice.Crystal : candidate.Choice.Amplifier,
+                    Requirement = ranked.Requirement,
+                    Candidate = candidate,
+                    Limits = LimitReading.Of(candidate, ranked.Requirement),
+                    Place = new ListPlace(
+                        i + 1, ranked.Candidates.Length, ranked.Candidates[0], i == 0 ? null : ranked.Candidates[i - 1]),
+                };
+            }
+        }
+
+        return null;
+    }
+
     private static WhyNotAnswer Placed(WhyNotAnswer answer, PartSearch search, FitPoint best, IProgress<string>? progress)
     {
         progress?.Report("it fits; ranking it among all others");

@@ -27,6 +27,7 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
         {
             { Notice: { } notice } => [new LineBuilder(glyphs).Add(" ").Column(notice, width - 1, Tone.Accent).Build()],
             { ShowsKeys: true } => [Keys((UpDown, "scroll"), ("Esc", "back"))],
+            { Questions.IsOpen: true } => [Keys(model.Questions.Keys(glyphs))],
             { Shortlists.Page.Replacements: not null } => [Keys(
                 (UpDown, "choose"), (glyphs.Left + " " + glyphs.Right, "other parts"), ("Esc", "the list"), ("?", "keys"))],
             { Shortlists.Page.Quantity: not null } => [Keys((UpDown, "scroll"), ("Esc", "the list"), ("?", "keys"))],
@@ -37,10 +38,10 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
             { Place: Place.Sentence } => [Value(("Tab", "next"), ("Esc", model.IsReading ? "circuit" : "list"))],
             { Place: Place.Circuit } => [Keys(
                 (UpDown, "scroll"), (glyphs.Left + " " + glyphs.Right, "other circuits"), ("s", "to a list"), ("Esc", "list"),
-                ("e", "edit"), ("?", "keys"))],
-            { List.Chosen: null } => [Keys([("e", "edit the wanted"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
+                ("h", "how a figure comes"), ("e", "edit"), ("?", "keys"))],
+            { List.Chosen: null } => [Keys([("y", "why not a part"), ("e", "edit the wanted"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
             _ => [Keys([
-                (UpDown, "choose"), ("Enter", "open"), ("s", "to a list"), ("e", "edit"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
+                (UpDown, "choose"), ("h", "how"), ("Enter", "open"), ("s", "to a list"), ("y", "why not"), ("e", "edit"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
         };
     }
 

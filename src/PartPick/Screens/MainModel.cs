@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using PartPick.Selection;
+using PartPick.WhyNot;
 
 namespace PartPick.Screens;
 
@@ -72,6 +73,9 @@ public sealed class MainModel
     /// <summary>The lists of candidates.</summary>
     internal ShortlistModel Shortlists { get; private set; } = new();
 
+    /// <summary>What can be asked of the list and of a circuit.</summary>
+    internal QuestionModel Questions { get; private set; } = new();
+
     /// <summary>Where the keys go.</summary>
     public Place Place { get; private set; }
 
@@ -107,6 +111,7 @@ public sealed class MainModel
     {
         _ranking.Stop();
         Shortlists.Stop();
+        Questions.Stop();
     }
 
     /// <summary>Ranks again, as after the parts have changed.</summary>
@@ -129,9 +134,9 @@ public sealed class MainModel
         Redraw?.Invoke();
     }
 
-    /// <summary>Stops what the user may want to stop without leaving: an import that runs.</summary>
+    /// <summary>Stops what the user may want to stop without leaving: an import that runs, an answer that is looked for.</summary>
     /// <returns>Whether there was such a thing.</returns>
-    public bool Interrupt() => Place == Place.Parts && Parts!.Interrupt();
+    public bool Interrupt() => Questions.Interrupt() || Place == Place.Parts && Parts!.Interrupt();
 
     /// <summary>Takes a key.</summary>
     /// <param name="key">The key.</param>
@@ -141,6 +146,11 @@ public sealed class MainModel
         if (ShowsKeys)
         {
             PressInKeys(key);
+            return;
+        }
+
+        if (Questions.Press(key))
+        {
             return;
         }
 
@@ -174,6 +184,15 @@ public sealed class MainModel
     {
         Shortlists = new ShortlistModel(desk, work, _glyphs.IsAscii);
         Shortlists.Redraw += () => Redraw?.Invoke();
+    }
+
+    /// <summary>Lets questions be asked; without it there are none.</summary>
+    /// <param name="desk">What answers why a part is not in the list.</param>
+    /// <param name="work">Does what takes long.</param>
+    public void AnswerQuestionsAt(IWhyNotDesk desk, ScreenWork work)
+    {
+        Questions = new QuestionModel(desk, work);
+        Questions.Redraw += () => Redraw?.Invoke();
     }
 
     /// <summary>The screen as lines, each as wide as the screen.</summary>
@@ -231,6 +250,9 @@ public sealed class MainModel
         {
             case PartsAnswer.Leave:
                 LeaveParts();
+                break;
+            case PartsAnswer.NotMine when key.Letter == 'y' && Parts.AskableId is { } id:
+                Questions.AskWhyNot(Wanted.Accepted, null, id);
                 break;
             case PartsAnswer.NotMine when key.Letter is '?' or 'q':
                 PressAnywhere(key);
@@ -318,6 +340,12 @@ public sealed class MainModel
                 break;
             case { Name: KeyName.Letter, Letter: 'l' }:
                 Notice = Shortlists.Open();
+                break;
+            case { Name: KeyName.Letter, Letter: 'y' }:
+                Questions.AskWhyNot(Wanted.Accepted, IsStale ? null : List.Result);
+                break;
+            case { Name: KeyName.Letter, Letter: 'h' } when List is { Chosen: { } shown, Result: { } ranked }:
+                Questions.ShowFigures(shown, ranked);
                 break;
             case { Name: KeyName.Letter, Letter: 'q' }:
                 IsDone = true;

@@ -23,7 +23,7 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
             return Filled([Line.Empty, new LineBuilder(glyphs).Words(text, width).Build()], height);
         }
 
-        if (model is { Place: Place.Parts, ShowsKeys: false })
+        if (model is { Place: Place.Parts, ShowsKeys: false, Questions.IsOpen: false })
         {
             return model.Parts!.Draw(width, height);
         }
@@ -33,6 +33,7 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
         ImmutableArray<Line> foot = new Foot(model, glyphs, width).Draw();
         int room = height - sentence.Length - foot.Length;
         ImmutableArray<Line> body = model.ShowsKeys ? KeysBody(room)
+            : model.Questions.IsOpen ? model.Questions.Draw(width, room, glyphs)
             : model.Shortlists.IsOpen ? ShortlistDrawing.Draw(model.Shortlists.Page, width, room, glyphs)
             : model.Place == Place.Circuit && model.List.Chosen is { } candidate ? CircuitBody(candidate, room)
             : width >= ListShape.Full + 2 + Schematic.Width ? WideBody(room)

@@ -1,3 +1,6 @@
+using System.Collections.Immutable;
+using PartPick.Catalog;
+using PartPick.Catalog.Browsing;
 using PartPick.Selection;
 using PartPick.Values;
 
@@ -13,4 +16,8 @@ public interface IWhyNotDesk
     /// <param name="cancellation">Ends it with <see cref="OperationCanceledException"/>.</param>
     /// <returns>The answer, or the problem.</returns>
     Result<WhyNotAnswer> Ask(Requirement requirement, string id, IProgress<string>? progress, CancellationToken cancellation);
+
+    /// <summary>The parts of the catalogue as lines of a list, by kind.</summary>
+    /// <param name="cancellation">Ends it with <see cref="OperationCanceledException"/>.</param>
+    Result<ImmutableDictionary<PartKind, PartRows>> Rows(CancellationToken cancellation);
 }

@@ -1,4 +1,6 @@
+using System.Collections.Immutable;
 using PartPick.Catalog;
+using PartPick.Catalog.Browsing;
 using PartPick.Selection;
 using PartPick.Values;
 
@@ -13,6 +15,10 @@ public sealed class WhyNotDesk(string catalogPath) : IWhyNotDesk
     /// <inheritdoc/>
     public Result<WhyNotAnswer> Ask(Requirement requirement, string id, IProgress<string>? progress, CancellationToken cancellation) =>
         Find(id, "part").Then(part => Ask(requirement, part, progress, cancellation));
+
+    /// <inheritdoc/>
+    public Result<ImmutableDictionary<PartKind, PartRows>> Rows(CancellationToken cancellation) =>
+        PartListing.Read(catalogPath, _ => { }, cancellation);
 
     /// <summary>The crystal or amplifier of an id.</summary>
     /// <param name="id">The id.</param>

@@ -51,6 +51,9 @@ internal sealed class Bench : IDisposable
     /// <summary>Keeps lists of candidates in a catalogue.</summary>
     public void KeepLists(string catalogue) => Model.KeepListsAt(new CatalogDesk(catalogue), _work);
 
+    /// <summary>Answers questions from a catalogue.</summary>
+    public void AnswerQuestions(string catalogue) => Model.AnswerQuestionsAt(new WhyNot.WhyNotDesk(catalogue), _work);
+
     public void Press(params Key[] keys)
     {
         foreach (Key key in keys)

@@ -1,6 +1,7 @@
 using System.Runtime.InteropServices;
 using PartPick.Selection;
 using PartPick.Values;
+using PartPick.WhyNot;
 using Terminal.Gui.App;
 using Terminal.Gui.Drivers;
 
@@ -48,6 +49,7 @@ internal sealed class TerminalRun(
         };
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
         model.KeepListsAt(desk, work);
+        model.AnswerQuestionsAt(new WhyNotDesk(catalogPath), work);
         using var screen = new MainScreen(model, palette);
         using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, Leave);
         using PosixSignalRegistration interrupt = PosixSignalRegistration.Create(PosixSignal.SIGINT, Leave);
