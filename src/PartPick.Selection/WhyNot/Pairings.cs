@@ -42,28 +42,30 @@ internal sealed class Pairings(PartSearch search)
     {
         Requirement wanted = lift.Requirement;
         return reaching.GroupBy(pair => pair.Kind)
-            .Select(group =>
-            {
-                bool fitsWave = wanted.Waveform switch
-                {
-                    Waveform.Sine => group.Key == CircuitKind.Follower,
-                    Waveform.Square => group.Key != CircuitKind.Follower,
-                    _ => true,
-                };
-                Requirement wider = wanted with
-                {
-                    Circuits = wanted.Circuits.Contains(group.Key) ? wanted.Circuits : wanted.Circuits.Add(group.Key),
-                    Waveform = fitsWave ? wanted.Waveform : Waveform.Any,
-                };
-                string want = string.Join(" or ", wanted.Circuits.Select(circuit => circuit.Word()))
-                    + (wanted.Waveform == Waveform.Any ? "" : $", {RequirementWords.Of(wanted.Waveform)}");
-                Pairing pair = group.First();
-                string stage = pair.Tap > 0 ? string.Create(CultureInfo.InvariantCulture, $", stage {pair.Tap}") : "";
-                return Least(lift.Over(HurdleName.Circuit, want, group.Key.Word() + stage, "", wider), group);
-            })
+            .Select(group => Least(OverCircuit(lift, group.First()), group))
             .OrderBy(one => one.Hurdles.Count(hurdle => !hurdle.CanBeLifted))
             .ThenBy(one => RequirementChanges.Between(wanted, one.Requirement).Sum(change => Math.Log(change.Size)))
             .First();
+    }
+
+    private static Lift OverCircuit(Lift lift, Pairing pair)
+    {
+        Requirement wanted = lift.Requirement;
+        bool fitsWave = wanted.Waveform switch
+        {
+            Waveform.Sine => pair.Kind == CircuitKind.Follower,
+            Waveform.Square => pair.Kind != CircuitKind.Follower,
+            _ => true,
+        };
+        Requirement wider = wanted with
+        {
+            Circuits = wanted.Circuits.Contains(pair.Kind) ? wanted.Circuits : wanted.Circuits.Add(pair.Kind),
+            Waveform = fitsWave ? wanted.Waveform : Waveform.Any,
+        };
+        string want = string.Join(" or ", wanted.Circuits.Select(circuit => circuit.Word()))
+            + (wanted.Waveform == Waveform.Any ? "" : $", {RequirementWords.Of(wanted.Waveform)}");
+        string stage = pair.Tap > 0 ? string.Create(CultureInfo.InvariantCulture, $", stage {pair.Tap}") : "";
+        return lift.Over(HurdleName.Circuit, want, pair.Kind.Word() + stage, "", wider);
     }
 
     // Another output is what is left: the nearest that a stage gives.
@@ -71,13 +73,25 @@ internal sealed class Pairings(PartSearch search)
     {
         Requirement wanted = lift.Requirement;
         Pairing[] allowed = [.. all.Where(pair => scope.Kinds.Contains(pair.Kind))];
+        if (allowed.Length == 0 && all.Length > 0)
+        {
+            Pairing other = Nearest(all, wanted);
+            return OverFrequency(OverCircuit(lift, other), [.. all.Where(pair => pair.Kind == other.Kind)]);
+        }
+
+        return OverFrequency(lift, allowed);
+    }
+
+    private static Lift OverFrequency(Lift lift, Pairing[] allowed)
+    {
+        Requirement wanted = lift.Requirement;
         if (allowed.Length == 0)
         {
             string none = lift.Part is CrystalPart ? "no amplifier of a wanted circuit" : "no crystal that it could use";
             return lift.Over(HurdleName.Frequency, Say.Hertz(wanted.OutputHz), $"the catalogue has {none}", "", null);
         }
 
-        Pairing nearest = allowed.MinBy(pair => (Math.Abs(Math.Log(pair.OutputHz / wanted.OutputHz)), pair.Tap, pair.Amplifier.Id))!;
+        Pairing nearest = Nearest(allowed, wanted);
         double ratio = nearest.OutputHz / wanted.OutputHz;
         string stage = nearest.Tap == 0
             ? "without a divider"
@@ -90,6 +104,9 @@ internal sealed class Pairings(PartSearch search)
             wanted with { OutputHz = nearest.OutputHz });
         return Least(over, allowed.Where(pair => pair.OutputHz == nearest.OutputHz));
     }
+
+    private static Pairing Nearest(IEnumerable<Pairing> pairs, Requirement wanted) =>
+        pairs.MinBy(pair => (Math.Abs(Math.Log(pair.OutputHz / wanted.OutputHz)), pair.Tap, pair.Amplifier.Id))!;
 
     private static IEnumerable<Pairing> Of(Part part, PartsCatalog parts, int builds)
     {

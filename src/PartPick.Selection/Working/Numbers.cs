@@ -18,6 +18,14 @@ internal static class Numbers
     /// <summary>A ratio in ppm to six digits.</summary>
     public static string Ppm(double ratio) => Of(ratio * 1e6) + " ppm";
 
+    /// <summary>A ratio in ppm as the screens show it: about three figures.</summary>
+    public static string ShownPpm(double ratio)
+    {
+        double ppm = ratio * 1e6;
+        string format = Math.Abs(ppm) >= 99.95 ? "0" : Math.Abs(ppm) >= 9.995 ? "0.0" : "0.00";
+        return ppm.ToString(format, CultureInfo.InvariantCulture) + " ppm";
+    }
+
     /// <summary>The size of a relative change per farad, in ppm/pF to six digits.</summary>
     public static string PerPicofarad(double perFarad) => Of(Math.Abs(perFarad) * 1e-12 * 1e6) + " ppm/pF";
 

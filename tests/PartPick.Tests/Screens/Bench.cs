@@ -52,7 +52,10 @@ internal sealed class Bench : IDisposable
     public void KeepLists(string catalogue) => Model.KeepListsAt(new CatalogDesk(catalogue), _work);
 
     /// <summary>Answers questions from a catalogue.</summary>
-    public void AnswerQuestions(string catalogue) => Model.AnswerQuestionsAt(new WhyNot.WhyNotDesk(catalogue), _work);
+    public void AnswerQuestions(string catalogue) => AnswerQuestions(new WhyNot.WhyNotDesk(catalogue));
+
+    /// <summary>Answers questions.</summary>
+    public void AnswerQuestions(WhyNot.IWhyNotDesk desk) => Model.AnswerQuestionsAt(desk, _work);
 
     public void Press(params Key[] keys)
     {

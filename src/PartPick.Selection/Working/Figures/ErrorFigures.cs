@@ -25,7 +25,7 @@ internal static class ErrorFigures
         string centre = Numbers.Ppm(Math.Abs(budget.CentreRatio));
         string[] terms = [.. budget.Terms.Select(term => Numbers.Ppm(term.Ratio))];
         yield return new FigureWorking(
-            "frequency error, worst case", Say.Number(budget.WorstRatio * 1e6) + " ppm",
+            "frequency error, worst case", Numbers.ShownPpm(budget.WorstRatio),
             "How far the output may be off when everything that spreads lies at its end in the same direction. It is what the budget "
                 + "limits and the list ranks by.",
             [
@@ -33,7 +33,7 @@ internal static class ErrorFigures
                     Numbers.Ppm(budget.WorstRatio), "linear sum: no combination is worse"),
             ]);
         yield return new FigureWorking(
-            "frequency error, RSS", Say.Number(budget.RssRatio * 1e6) + " ppm",
+            "frequency error, RSS", Numbers.ShownPpm(budget.RssRatio),
             "How far the output is usually off: the centre and the root of the sum of the squared spreads, as if they were independent.",
             [
                 new WorkingStep(Section, "RSS", "|e0| + sqrt(sum of the spreads squared)",
@@ -42,7 +42,7 @@ internal static class ErrorFigures
             ]);
         string divided = candidate.Choice.Tap == 0 ? "" : FormattableString.Invariant($"2^{candidate.Choice.Tap} ");
         yield return new FigureWorking(
-            "centre error e0", Say.SignedPpm(budget.CentreRatio),
+            "centre error e0", (budget.CentreRatio < 0 ? "" : "+") + Numbers.ShownPpm(budget.CentreRatio),
             "How far the output is off with every value nominal, at 25 °C and the middle of the supply. A trimmed capacitor moves it; "
                 + "the spreads stay.",
             [
@@ -55,7 +55,7 @@ internal static class ErrorFigures
         {
             (string definition, ImmutableArray<WorkingStep> steps) = spreads.Of(term);
             yield return new FigureWorking(
-                term.Term, "±" + Say.Number(term.Ratio * 1e6) + " ppm" + (term.RestsOn is { } rest ? $" ({rest})" : ""), definition, steps);
+                term.Term, "±" + Numbers.ShownPpm(term.Ratio) + (term.RestsOn is { } rest ? $" ({rest})" : ""), definition, steps);
         }
     }
 }

@@ -6,32 +6,32 @@ namespace PartPick.Screens;
 /// <summary>Draws the figures of a candidate at the left, and how the chosen one comes about beside them, or below where it is narrow.</summary>
 internal static class FigureDrawing
 {
-    private const int Names = 28;
+    private const int Names = 27;
     private const int Least = 74;
     private const int FewRows = 4;
 
     /// <summary>The lines.</summary>
     public static ImmutableArray<Line> Draw(FigurePage page, int width, int height, Glyphs glyphs)
     {
-        string place = page.Figures.IsEmpty ? "" : FormattableString.Invariant($"{page.At + 1} of {page.Figures.Length}");
-        Line title = Rules.Draw(
-            page.IsLooking ? "How the figures come about: computing" : $"How it comes about: {CircuitPane.ShortTitle(page.Candidate!)}",
-            place, width, glyphs, page.IsLooking ? Tone.Accent : Tone.Strong);
         if (page.Figures.IsEmpty)
         {
-            return [title];
+            return [Rules.Draw("How the figures come about: computing", "", width, glyphs, Tone.Accent)];
         }
 
         int room = height - 1;
-        if (width < Least)
+        bool narrow = width < Least;
+        int few = narrow ? Math.Min(FewRows, page.Figures.Length) : room;
+        int left = narrow ? width : Math.Min(Names + page.Figures.Max(figure => glyphs.Show(Short(figure.Value)).Length) + 4, width / 2);
+        ImmutableArray<Line> list = List(page, few, left, glyphs);
+        ImmutableArray<Line> words = page.Scroll.Cut(
+            Explained(page.Figures[page.At], narrow ? width : width - left - 2, glyphs), narrow ? room - few - 1 : room);
+        string place = FormattableString.Invariant($"{page.At + 1} of {page.Figures.Length}") + (page.Scroll.HasMore ? ", more below: PgDn" : "");
+        Line title = Rules.Draw($"How it comes about: {CircuitPane.ShortTitle(page.Candidate!)}", place, width, glyphs);
+        if (narrow)
         {
-            int few = Math.Min(FewRows, page.Figures.Length);
-            return [title, .. List(page, few, width, glyphs), Rules.Draw("", "", width, glyphs), .. Explained(page.Figures[page.At], width, glyphs).Take(room - few - 1)];
+            return [title, .. list, Rules.Draw("", page.Scroll.HasMore ? "more below: PgDn" : "", width, glyphs), .. words];
         }
 
-        int left = Math.Min(Names + page.Figures.Max(figure => glyphs.Show(Short(figure.Value)).Length) + 4, width / 2);
-        ImmutableArray<Line> list = List(page, room, left, glyphs);
-        ImmutableArray<Line> words = Explained(page.Figures[page.At], width - left - 2, glyphs);
         var bar = new Line([new Span(glyphs.Vertical.ToString(), Tone.Quiet)]);
         return
         [
@@ -72,7 +72,7 @@ internal static class FigureDrawing
         {
             lines.Add(Line.Empty);
             Add($"{step.Quantity}: {step.Formula}", " ", 3, Tone.Normal);
-            if (step.Numbers.Length > 0)
+            if (step.Numbers.Length > 0 && step.Numbers != step.Value)
             {
                 Add("= " + step.Numbers, "   ", 5, Tone.Normal);
             }

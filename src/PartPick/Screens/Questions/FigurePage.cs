@@ -7,8 +7,6 @@ namespace PartPick.Screens;
 /// <param name="work">Does what takes long.</param>
 internal sealed class FigurePage(ScreenWork work)
 {
-    private const int Leap = 5;
-
     private readonly LatestWork _study = new(work);
     private string? _name;
 
@@ -27,12 +25,16 @@ internal sealed class FigurePage(ScreenWork work)
     /// <summary>Whether they are being worked out.</summary>
     public bool IsLooking => _study.IsRunning;
 
+    /// <summary>Where the words about the chosen figure are scrolled to.</summary>
+    public PageScroll Scroll { get; } = new();
+
     /// <summary>Opens it at the figure that was looked at last.</summary>
     /// <param name="candidate">The candidate.</param>
     /// <param name="result">The ranking that it belongs to.</param>
     public void Open(Candidate candidate, RankingResult result)
     {
         (Candidate, Figures, At) = (candidate, [], 0);
+        Scroll.Reset();
         _study.Start(_ => FigureWorkings.Of(candidate, result.Requirement, result.CheapestCost), figures =>
         {
             Figures = figures;
@@ -58,17 +60,26 @@ internal sealed class FigurePage(ScreenWork work)
             return true;
         }
 
+        if (key is { Name: KeyName.PageUp or KeyName.PageDown } or { Name: KeyName.Letter, Letter: ' ' })
+        {
+            return Scroll.Press(key);
+        }
+
+        int before = At;
         int to = key.Name switch
         {
             KeyName.Up => At - 1,
             KeyName.Down => At + 1,
-            KeyName.PageUp => At - Leap,
-            KeyName.PageDown => At + Leap,
             KeyName.Home => 0,
             KeyName.End => Figures.Length - 1,
             _ => At,
         };
         At = Math.Clamp(to, 0, Math.Max(0, Figures.Length - 1));
+        if (At != before)
+        {
+            Scroll.Reset();
+        }
+
         _name = At < Figures.Length ? Figures[At].Name : _name;
         return key is not { Name: KeyName.Letter, Letter: '?' or 'q' };
     }

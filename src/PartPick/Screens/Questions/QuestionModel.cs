@@ -67,6 +67,6 @@ internal sealed class QuestionModel
         { _whyNot: { IsOpen: true, Id: null } } => [("words", "of a part"), (glyphs.Up + " " + glyphs.Down, "choose"), ("Enter", "ask"), ("Esc", "back")],
         { _whyNot: { IsOpen: true, IsLooking: true } } => [("Esc", "stop it"), ("?", "keys")],
         { _whyNot.IsOpen: true } => [(glyphs.Up + " " + glyphs.Down, "scroll"), ("Esc", "back"), ("?", "keys")],
-        _ => [(glyphs.Up + " " + glyphs.Down, "other figures"), ("Esc", "back"), ("?", "keys")],
+        _ => [(glyphs.Up + " " + glyphs.Down, "other figures"), ("PgDn", "further down"), ("Esc", "back"), ("?", "keys")],
     };
 }
