@@ -126,6 +126,19 @@ public class FigureWorkingTests
     }
 
     [Fact]
+    public void The_emitters_voltage_swings_about_where_it_rests_and_an_inverters_about_half_the_supply()
+    {
+        SteadyState emitter = Make("follower").Item1.Result.Steady!;
+        double rest = Make("follower").Item1.Result.EmitterCurrentAmps!.Value * 2200;
+        SteadyState gate = Make("one stage").Item1.Result.Steady!;
+
+        Assert.InRange(rest, emitter.OutputLowVolts, emitter.OutputHighVolts);
+        Assert.InRange(emitter.OutputLowVolts, 0, 5);
+        Assert.InRange(emitter.OutputHighVolts, 0, 5);
+        Assert.Equal(0, gate.OutputLowVolts + gate.OutputHighVolts, 1e-12);
+    }
+
+    [Fact]
     public void The_arithmetic_of_these_tests_is_right()
     {
         Assert.Equal(2.5, Arithmetic.Of("1 + 3 / 2"));
