@@ -31,6 +31,9 @@ internal sealed class QuestionModel
     /// <summary>Whether a question is open.</summary>
     public bool IsOpen => _whyNot is { IsOpen: true } || _figures is { Candidate: not null };
 
+    /// <summary>Whether what is open needs its own columns.</summary>
+    public bool IsTable => _figures is { Candidate: not null };
+
     /// <summary>Asks why a part is not in the list.</summary>
     /// <param name="wanted">The requirement.</param>
     /// <param name="ranked">The complete answer to it; null where there is none yet.</param>

@@ -1,4 +1,5 @@
 using System.Runtime.InteropServices;
+using PartPick.Requirements;
 using PartPick.Selection;
 using PartPick.Values;
 using PartPick.WhyNot;
@@ -23,12 +24,15 @@ internal sealed class TerminalRun(
 
     private static readonly TimeSpan LastMoment = TimeSpan.FromSeconds(3);
 
+    private ScreenWork? _work;
+
     /// <summary>Shows the screen until it is left.</summary>
     /// <param name="start">The requirement to begin with.</param>
     /// <param name="notice">A line to show until the first key; null for none.</param>
     /// <param name="desk">Where the lists of candidates are kept.</param>
+    /// <param name="store">Where requirements are kept.</param>
     /// <returns>The requirement at the end.</returns>
-    public Requirement Show(Requirement start, string? notice, IShortlistDesk desk)
+    public Requirement Show(Requirement start, string? notice, IShortlistDesk desk, KeptRequirementStore store)
     {
         // The terminal's own sixteen colours: they fit its background, and few of them are sent.
         Driver.Force16Colors = true;
@@ -38,7 +42,7 @@ internal sealed class TerminalRun(
         using IApplication app = Application.Create().Init(DriverRegistry.Names.ANSI);
         app.Driver!.WriteRaw(MouseReportsOff);
         using var live = new LiveRanking(ranking, action => Post(app, action), TimeProvider.System);
-        var work = new ScreenWork(action => Post(app, action));
+        ScreenWork work = _work = new ScreenWork(action => Post(app, action));
         var parts = new PartsModel(catalogPath, work, glyphs, () => DateOnly.FromDateTime(TimeProvider.System.GetLocalNow().Date));
         var model = new MainModel(start, live, glyphs, notice, ranking.Currency, parts: parts);
         Await(opening);
@@ -50,6 +54,7 @@ internal sealed class TerminalRun(
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
         model.KeepListsAt(desk, work);
         model.AnswerQuestionsAt(new WhyNotDesk(catalogPath), work);
+        model.KeepWantedAt(store, work, ranking);
         using var screen = new MainScreen(model, palette);
         using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, Leave);
         using PosixSignalRegistration interrupt = PosixSignalRegistration.Create(PosixSignal.SIGINT, Leave);
@@ -85,6 +90,11 @@ internal sealed class TerminalRun(
             }
         }
     }
+
+    /// <summary>Waits for what was still being written when the screen was left.</summary>
+    /// <param name="longest">The most to wait.</param>
+    /// <returns>Whether all of it is done.</returns>
+    public bool Finish(TimeSpan longest) => _work is null || SpinWait.SpinUntil(() => _work.IsIdle, longest);
 
     private static bool HasTerminal()
     {
