@@ -14,7 +14,8 @@ public class WhyNotCommandTests
     [Fact]
     public void A_part_that_fits_is_status_0_and_has_its_place()
     {
-        string first = Run.Of([.. Small, "--top", "1", "--format", "json"]).Json.GetProperty("candidates")[0].GetProperty("crystal").GetString()!;
+        string first = Run.Of([.. Small, "--top", "1", "--format",
+            "json"]).Json.GetProperty("candidates")[0].GetProperty("crystal").GetString()!;
 
         Run run = Run.Of([.. Small, "--why-not", first, "--format", "json"]);
 
@@ -35,8 +36,10 @@ public class WhyNotCommandTests
         Assert.Equal((1, ""), (run.Status, run.Error));
         JsonElement change = run.Json.GetProperty("changes")[0].GetProperty("changes")[0];
         Assert.Equal(("budget", "80 ppm"), (change.GetProperty("key").GetString(), change.GetProperty("was").GetString()));
-        Run changed = Run.Of([.. Small.Where(word => word is not ("--budget" or "80 ppm")), "--" + change.GetProperty("key").GetString(), change.GetProperty("becomes").GetString()!, "--format", "json"]);
-        string[] crystals = [.. changed.Json.GetProperty("candidates").EnumerateArray().Select(one => one.GetProperty("crystal").GetString()!)];
+        Run changed = Run.Of([.. Small.Where(word => word is not ("--budget" or "80 ppm")), "--" + change.GetProperty("key").GetString(),
+            change.GetProperty("becomes").GetString()!, "--format", "json"]);
+        string[] crystals = [.. changed.Json.GetProperty("candidates").EnumerateArray().Select(one =>
+            one.GetProperty("crystal").GetString()!)];
         Assert.Equal(Array.IndexOf(crystals, Id) + 1, run.Json.GetProperty("placeThen").GetProperty("number").GetInt32());
         JsonElement error = run.Json.GetProperty("limits")[0];
         Assert.Equal(("error", true), (error.GetProperty("limit").GetString(), error.GetProperty("broken").GetBoolean()));
@@ -53,7 +56,8 @@ public class WhyNotCommandTests
     }
 
     [Theory]
-    [InlineData("--why-not: 'CNT-14-H' is no part of the catalogue; fits the id of a crystal or an amplifier, such as CNT-14-HC", "CNT-14-H")]
+    [InlineData("--why-not: 'CNT-14-H' is no part of the catalogue; fits the id of a crystal or an amplifier, such as CNT-14-HC",
+        "CNT-14-H")]
     [InlineData("--why-not: 'C-015p-C0G-1-0603' is one of the capacitors", "C-015p-C0G-1-0603")]
     [InlineData("--why-not: '' is no part of the catalogue", "")]
     public void What_is_no_such_part_is_one_line(string expected, string id) =>

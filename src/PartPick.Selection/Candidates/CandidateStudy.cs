@@ -18,12 +18,14 @@ public sealed record CandidateStudy(CrystalModel Model, CircuitTemplate Template
         CrystalModel model = CrystalModel.From(choice.Crystal);
         return TemplateOf(requirement, choice, support, model) is { } template
             ? new CandidateStudy(
-                model, template, new ValueAnalysis(template, requirement, CircuitValues.Of(choice)), CornersOf(requirement, choice, template))
+                model, template, new ValueAnalysis(template, requirement, CircuitValues.Of(choice)),
+                    CornersOf(requirement, choice, template))
             : null;
     }
 
     internal static CircuitTemplate? TemplateOf(Requirement requirement, CandidateParts choice, SupportParts support, CrystalModel model) =>
-        CircuitTemplate.Create(requirement, choice.Circuit, model, choice.Amplifier, support.Feedback?.ValueOhms ?? double.PositiveInfinity);
+        CircuitTemplate.Create(requirement, choice.Circuit, model, choice.Amplifier,
+            support.Feedback?.ValueOhms ?? double.PositiveInfinity);
 
     internal static CornerAnalysis CornersOf(Requirement requirement, CandidateParts choice, CircuitTemplate template) => new(
         template, requirement, CircuitValues.Of(choice), BudgetBuilder.Tolerance(choice.C1), BudgetBuilder.Tolerance(choice.C2));

@@ -31,7 +31,8 @@ internal sealed class OnePartSource(IPartsSource inner, Part part, bool alone, d
     private PartsCatalog Make(PartsCatalog parts)
     {
         IEnumerable<Part> others = parts.All.Where(other =>
-            other.Id != part.Id && other.Offer.Currency == parts.Currency && !(alone && IsCrystal(other) == IsCrystal(part) && Varies(other)));
+            other.Id != part.Id && other.Offer.Currency == parts.Currency
+                && !(alone && IsCrystal(other) == IsCrystal(part) && Varies(other)));
         return new PartsCatalog(others.Append(part).Select(Rated));
     }
 

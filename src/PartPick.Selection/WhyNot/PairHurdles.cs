@@ -2,7 +2,10 @@ using PartPick.Catalog;
 
 namespace PartPick.Selection.Search;
 
-/// <summary>What keeps a crystal and an amplifier out together, before a circuit of them is looked at: stock, supply, temperature, clock.</summary>
+/// <summary>
+/// What keeps a crystal and an amplifier out together, before a circuit of them is looked at: stock, supply, temperature,
+/// clock.
+/// </summary>
 internal static class PairHurdles
 {
     private const double ClockStepVolts = 0.05;
@@ -83,7 +86,8 @@ internal static class PairHurdles
             HurdleName.Temperature,
             $"{Say.Number(wanted.TemperatureMinCelsius)} to {Say.Celsius(wanted.TemperatureMaxCelsius)}",
             $"{narrower.Id} {Say.Number(low)} to {Say.Celsius(high)}",
-            Distance(low - wanted.TemperatureMinCelsius, wanted.TemperatureMaxCelsius - high, value => Say.Number(value) + " K", "starts", "ends"),
+            Distance(low - wanted.TemperatureMinCelsius, wanted.TemperatureMaxCelsius - high, value => Say.Number(value) + " K",
+                "starts", "ends"),
             lifted);
     }
 
@@ -100,13 +104,15 @@ internal static class PairHurdles
         {
             return lift.Over(
                 HurdleName.Clock, Say.Hertz(hertz),
-                $"{port.Id} {Say.Hertz(port.FrequencyMinHz ?? 0)} to {Say.Hertz(port.FrequencyMaxHz ?? double.PositiveInfinity)}", "", null);
+                $"{port.Id} {Say.Hertz(port.FrequencyMinHz ?? 0)} to {Say.Hertz(port.FrequencyMaxHz ?? double.PositiveInfinity)}", "",
+                    null);
         }
 
         double guaranteed = InverterModel.GuaranteedClockHz((AmplifierPart)pair.Amplifier, wanted.SupplyMinVolts) ?? 0;
         return lift.Over(
             HurdleName.Clock, $"{Say.Hertz(hertz)} at {Say.Volts(wanted.SupplyMinVolts)}",
-            $"{pair.Amplifier.Id} guarantees {Say.Hertz(guaranteed)} there", $"{Say.Hertz(hertz - guaranteed)} beyond", Faster(wanted, pair));
+            $"{pair.Amplifier.Id} guarantees {Say.Hertz(guaranteed)} there", $"{Say.Hertz(hertz - guaranteed)} beyond",
+                Faster(wanted, pair));
     }
 
     // The lowest supply in twentieths of a volt, not above the highest one wanted, at which the clock is guaranteed.
@@ -136,7 +142,8 @@ internal static class PairHurdles
         double[] known =
         [
             .. part.Points.Select(point => point.SupplyVolts).Where(volts =>
-                InverterModel.At(part, volts, DeviceStrength.Weakest) is not null && InverterModel.At(part, volts, DeviceStrength.Strongest) is not null),
+                InverterModel.At(part, volts, DeviceStrength.Weakest) is not null
+                    && InverterModel.At(part, volts, DeviceStrength.Strongest) is not null),
         ];
         return known.Length == 0 ? (double.NaN, double.NaN) : (known[0], known[^1]);
     }

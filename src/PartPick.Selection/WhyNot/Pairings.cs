@@ -111,7 +111,8 @@ internal sealed class Pairings(PartSearch search)
     private static IEnumerable<Pairing> Of(Part part, PartsCatalog parts, int builds)
     {
         var market = new Market(parts, builds);
-        IEnumerable<CrystalPart> crystals = part is CrystalPart own ? [own] : parts.Crystals.Where(one => one.Overtone == 1 && market.IsListed(one));
+        IEnumerable<CrystalPart> crystals = part is CrystalPart own ? [own]
+            : parts.Crystals.Where(one => one.Overtone == 1 && market.IsListed(one));
         (CrystalPart Part, CrystalModel Model)[] modelled = [.. crystals.Select(one => (one, CrystalModel.From(one)))];
         var scope = new SearchScope(new Requirement { OutputHz = 1 }, parts);
         foreach (CircuitKind kind in Every)

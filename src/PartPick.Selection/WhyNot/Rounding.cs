@@ -21,5 +21,6 @@ internal static class Rounding
 
     // As the decimal number that is printed, not as the product of two binary ones.
     private static double Exactly(double steps, double step) =>
-        double.Parse(FormattableString.Invariant($"{steps:F0}e{Math.Round(Math.Log10(step)):F0}"), System.Globalization.CultureInfo.InvariantCulture);
+        double.Parse(FormattableString.Invariant($"{steps:F0}e{Math.Round(Math.Log10(step)):F0}"),
+            System.Globalization.CultureInfo.InvariantCulture);
 }

@@ -18,7 +18,8 @@ public static class WhyNotSearch
     /// <param name="cancellation">Ends it at once with <see cref="OperationCanceledException"/>.</param>
     /// <exception cref="PartsUnreadableException">The parts cannot be read.</exception>
     public static WhyNotAnswer Find(
-        Requirement requirement, IPartsSource source, Part part, IProgress<string>? progress = null, CancellationToken cancellation = default)
+        Requirement requirement, IPartsSource source, Part part, IProgress<string>? progress = null,
+            CancellationToken cancellation = default)
     {
         ArgumentNullException.ThrowIfNull(requirement);
         ArgumentNullException.ThrowIfNull(source);

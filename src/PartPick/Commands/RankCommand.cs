@@ -16,7 +16,8 @@ internal static class RankCommand
         A requirement file: { "output": "1 kHz", "waveform": "square", "budget": "80 ppm", "supply": ["4.5 V", "5.5 V"],
           "temperature": [-10, 50], "years": 5, "margin": 5, "builds": 200, "costLimit": 2.50, "board": "two-layer" }
         Only output is needed. Any key may be given as an option, which then counts instead of the file's.
-        Exit status: 0 done, 1 nothing fits (the nearest misses are printed) or the part of --why-not does not, 2 wrong input, 3 the catalogue cannot be used.
+        Exit status: 0 done, 1 nothing fits (the nearest misses are printed) or the part of --why-not does not, 2 wrong input,
+        3 the catalogue cannot be used.
         """;
 
     /// <summary>Builds the command.</summary>
@@ -81,7 +82,8 @@ internal static class RankCommand
     {
         var parts = new PartsOnDemand(new Catalog.StoredParts(context.CatalogPath(parsed)));
         CommandFailure.Unless(parts.Open(context.Surroundings.Cancellation), ExitStatus.NoCatalog);
-        RankingResult result = RankingProgress.Over(context.Surroundings, quiet, progress => Rank(context, requirement, parts, options, progress));
+        RankingResult result = RankingProgress.Over(context.Surroundings, quiet, progress =>
+            Rank(context, requirement, parts, options, progress));
         var view = new RankView(result, context.Surroundings.UsesColour);
         switch (context.FormatOf(parsed))
         {

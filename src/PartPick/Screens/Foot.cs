@@ -47,9 +47,11 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
             { Place: Place.Circuit } => [Keys(
                 (UpDown, "scroll"), (glyphs.Left + " " + glyphs.Right, "other circuits"), ("s", "to a list"), ("Esc", "list"),
                 ("h", "how a figure comes"), ("e", "edit"), ("?", "keys"))],
-            { List.Chosen: null } => [Keys([("y", "why not a part"), ("e", "edit the wanted"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
+            { List.Chosen: null } =>
+                [Keys([("y", "why not a part"), ("e", "edit the wanted"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
             _ => [Keys([
-                (UpDown, "choose"), ("h", "how"), ("y", "why not"), ("Enter", "open"), ("s", "to a list"), .. Kept, ("e", "edit"), .. Catalogue, ("?", "keys"),
+                (UpDown, "choose"), ("h", "how"), ("y", "why not"), ("Enter", "open"), ("s", "to a list"), .. Kept, ("e", "edit"),
+                    .. Catalogue, ("?", "keys"),
                 ("q", "quit")])],
         };
     }

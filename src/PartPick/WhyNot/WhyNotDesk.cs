@@ -68,9 +68,11 @@ public sealed class WhyNotDesk(string catalogPath) : IWhyNotDesk
         ];
         string[] near =
         [
-            .. known.Select(one => (Id: one, Same: one.Zip(id).TakeWhile(pair => char.ToUpperInvariant(pair.First) == char.ToUpperInvariant(pair.Second)).Count()))
+            .. known.Select(one => (Id: one,
+                Same: one.Zip(id).TakeWhile(pair => char.ToUpperInvariant(pair.First) == char.ToUpperInvariant(pair.Second)).Count()))
                 .Where(one => one.Same > 1)
-                .OrderByDescending(one => one.Same).ThenBy(one => Math.Abs(one.Id.Length - id.Length)).ThenBy(one => one.Id, StringComparer.Ordinal)
+                .OrderByDescending(one => one.Same).ThenBy(one => Math.Abs(one.Id.Length - id.Length)).ThenBy(one => one.Id,
+                    StringComparer.Ordinal)
                 .Take(MostNear).Select(one => one.Id),
         ];
         return Result.Fail<Part>(opened.Problem ?? new Problem(

@@ -21,7 +21,8 @@ public class WhyNotHurdleTests
     [Fact]
     public void A_temperature_outside_the_part_is_narrowed_to_it()
     {
-        PartsCatalog catalog = WhyNotWorld.Of(WhyNotWorld.Crystal with { TemperatureMinCelsius = 0, TemperatureMaxCelsius = 70 }, Sample.Inverter);
+        PartsCatalog catalog = WhyNotWorld.Of(WhyNotWorld.Crystal with { TemperatureMinCelsius = 0, TemperatureMaxCelsius = 70 },
+            Sample.Inverter);
 
         WhyNotAnswer answer = WhyNotWorld.Ask(WhyNotWorld.Wanted, catalog, "X");
 
@@ -112,7 +113,8 @@ public class WhyNotHurdleTests
     [Fact]
     public void A_hurdle_and_a_broken_limit_are_one_set_of_changes()
     {
-        PartsCatalog catalog = WhyNotWorld.Of(WhyNotWorld.Crystal with { TemperatureMinCelsius = 0, TemperatureMaxCelsius = 70 }, Sample.Inverter);
+        PartsCatalog catalog = WhyNotWorld.Of(WhyNotWorld.Crystal with { TemperatureMinCelsius = 0, TemperatureMaxCelsius = 70 },
+            Sample.Inverter);
         Requirement wanted = WhyNotWorld.Wanted with { BudgetRatio = 70e-6 };
 
         WhyNotAnswer answer = WhyNotWorld.Ask(wanted, catalog, "X");

@@ -70,7 +70,8 @@ public class WhyNotLimitTests
         ChangeSet rating = Assert.Single(answer.Changes, set => !set.IsOfRequirement);
         NeededChange change = Assert.Single(rating.Changes);
         double watts = Values.ValueText.Parse(change.Becomes, Values.Dimension.Power, "drive").Value;
-        Assert.Equal(["X", "U"], WhyNotWorld.Listed(WhyNotWorld.Wanted, WhyNotWorld.Of(weak with { DriveLevelWatts = watts }, Sample.Inverter)));
+        Assert.Equal(["X", "U"],
+            WhyNotWorld.Listed(WhyNotWorld.Wanted, WhyNotWorld.Of(weak with { DriveLevelWatts = watts }, Sample.Inverter)));
         Assert.Empty(WhyNotWorld.Listed(WhyNotWorld.Wanted, WhyNotWorld.Of(weak with { DriveLevelWatts = watts / 1.02 }, Sample.Inverter)));
         Assert.All(answer.Changes.Where(set => set.IsOfRequirement), set =>
         {

@@ -19,7 +19,8 @@ internal sealed class Arithmetic
 
     private static readonly Dictionary<string, double> Prefixes = new(StringComparer.Ordinal)
     {
-        [""] = 1, ["a"] = 1e-18, ["f"] = 1e-15, ["p"] = 1e-12, ["n"] = 1e-9, ["µ"] = 1e-6, ["m"] = 1e-3, ["k"] = 1e3, ["M"] = 1e6, ["G"] = 1e9,
+        [""] = 1, ["a"] = 1e-18, ["f"] = 1e-15, ["p"] = 1e-12, ["n"] = 1e-9, ["µ"] = 1e-6, ["m"] = 1e-3, ["k"] = 1e3, ["M"] = 1e6,
+            ["G"] = 1e9,
     };
 
     private static readonly string[] Bases = ["F", "Hz", "Ω", "S", "V", "A", "W", "s"];
@@ -121,7 +122,8 @@ internal sealed class Arithmetic
         int start = _at;
         while (_at < _text.Length
             && (char.IsAsciiDigit(_text[_at]) || _text[_at] == '.'
-                || (_text[_at] is 'E' or 'e' && _at + 1 < _text.Length && (_text[_at + 1] is '-' or '+' || char.IsAsciiDigit(_text[_at + 1])))
+                || (_text[_at] is 'E' or 'e' && _at + 1 < _text.Length
+                    && (_text[_at + 1] is '-' or '+' || char.IsAsciiDigit(_text[_at + 1])))
                 || (_text[_at] is '-' or '+' && _text[_at - 1] is 'E' or 'e')))
         {
             _at++;

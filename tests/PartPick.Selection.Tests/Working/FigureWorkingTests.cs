@@ -88,17 +88,20 @@ public class FigureWorkingTests
 
         // The condition that defines it: with just that transconductance the margin is 1.
         FigureWorking critical = figures.Single(figure => figure.Name == "critical transconductance");
-        Assert.Equal(candidate.Result.StartUp.CriticalSiemens!.Value, Arithmetic.Of(critical.Steps[0].Value), candidate.Result.StartUp.CriticalSiemens.Value * 1e-5);
+        Assert.Equal(candidate.Result.StartUp.CriticalSiemens!.Value, Arithmetic.Of(critical.Steps[0].Value),
+            candidate.Result.StartUp.CriticalSiemens.Value * 1e-5);
         Assert.Equal(1, Arithmetic.Of(critical.Steps[^1].Numbers), 1e-4);
 
         void Equal(double expected, string name) => Assert.Equal(
-            expected, Arithmetic.Of(figures.Single(figure => figure.Name == name).Steps[^1].Value), Math.Abs(expected) * 1e-5 + 1e-12 * (name[0] == 'c' && name.Contains("e0", StringComparison.Ordinal) ? 1 : 0));
+            expected, Arithmetic.Of(figures.Single(figure => figure.Name == name).Steps[^1].Value), Math.Abs(expected) * 1e-5
+                + 1e-12 * (name[0] == 'c' && name.Contains("e0", StringComparison.Ordinal) ? 1 : 0));
     }
 
     [Fact]
     public void An_assumed_motional_and_shunt_capacitance_have_their_own_terms()
     {
-        (Candidate candidate, Requirement requirement) = Make("one stage", crystal => crystal with { MotionalFarads = null, ShuntFarads = null });
+        (Candidate candidate, Requirement requirement) = Make("one stage", crystal =>
+            crystal with { MotionalFarads = null, ShuntFarads = null });
 
         ImmutableArray<FigureWorking> figures = FigureWorkings.Of(candidate, requirement, null);
 
@@ -119,7 +122,8 @@ public class FigureWorkingTests
 
         ImmutableArray<FigureWorking> figures = FigureWorkings.Of(stuck, requirement, 0.2m);
 
-        Assert.DoesNotContain(figures.SelectMany(figure => figure.Steps), step => step.Numbers.Contains("Infinity", StringComparison.Ordinal));
+        Assert.DoesNotContain(figures.SelectMany(figure => figure.Steps), step =>
+            step.Numbers.Contains("Infinity", StringComparison.Ordinal));
         Assert.Equal("none", figures[0].Value);
         Assert.Contains("a corner does not run", figures[0].Definition, StringComparison.Ordinal);
         Assert.Equal("none", figures.Single(figure => figure.Name == "drive level, highest").Value);
@@ -157,8 +161,10 @@ public class FigureWorkingTests
         };
         Part amplifier = circuit switch
         {
-            "one stage" => Parts.Inverters.First(part => !part.IsBuffered && part.Points[0].SupplyVolts <= 4.5 && part.Points[^1].SupplyVolts >= 5.5),
-            "buffered" => Parts.Inverters.First(part => part.IsBuffered && part.Points[0].SupplyVolts <= 4.5 && part.Points[^1].SupplyVolts >= 5.5),
+            "one stage" => Parts.Inverters.First(part => !part.IsBuffered && part.Points[0].SupplyVolts <= 4.5
+                && part.Points[^1].SupplyVolts >= 5.5),
+            "buffered" => Parts.Inverters.First(part => part.IsBuffered && part.Points[0].SupplyVolts <= 4.5
+                && part.Points[^1].SupplyVolts >= 5.5),
             "counter" => Parts.Find("CNT-14-HC")!,
             "port" => Parts.Ports.First(part => part.FrequencyMinHz <= 8e6 && part.FrequencyMaxHz >= 8e6),
             _ => Parts.Transistors[0],

@@ -23,7 +23,8 @@ internal static class CostFigure
                     Section, $"{Designators(candidate, part)} {part.Id}",
                     string.Create(CultureInfo.InvariantCulture, $"paid for {bought.Quantity} of them ({needed} needed) / boards"),
                     string.Create(CultureInfo.InvariantCulture, $"{bought.Total} {currency} / {builds}"),
-                    $"{Exact(Market.UnitCost(part, count, builds))} {currency}", "cheapest purchase under price breaks, minimum order and multiple"));
+                    $"{Exact(Market.UnitCost(part, count, builds))} {currency}",
+                        "cheapest purchase under price breaks, minimum order and multiple"));
             }
         }
 
@@ -33,7 +34,8 @@ internal static class CostFigure
             $"{Exact(candidate.Cost)} {currency}", "definition"));
         return new FigureWorking(
             "cost", $"{Say.Money(candidate.Cost)} {currency}",
-            string.Create(CultureInfo.InvariantCulture, $"What the parts of one board cost when {builds} boards are bought for at once; equal parts are bought together."),
+            string.Create(CultureInfo.InvariantCulture,
+                $"What the parts of one board cost when {builds} boards are bought for at once; equal parts are bought together."),
             steps.ToImmutable());
     }
 

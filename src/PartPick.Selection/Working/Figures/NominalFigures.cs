@@ -81,7 +81,8 @@ internal static class NominalFigures
                     .. Named("series resonance fs"),
                     new WorkingStep(
                         "Steady state (all harmonics)", "frequency f", "fs sqrt(1 + Cm/(C0 + C)), C the load capacitance",
-                        $"{Numbers.Finely(candidate.Nominal.Crystal.SeriesHz)} sqrt(1 + {Numbers.Farads(candidate.Nominal.Crystal.MotionalFarads)}"
+                        $"{Numbers.Finely(candidate.Nominal.Crystal.SeriesHz)} sqrt(1 + "
+                            + $"{Numbers.Farads(candidate.Nominal.Crystal.MotionalFarads)}"
                             + $"/({Numbers.Farads(candidate.Nominal.Crystal.ShuntFarads)} + {Numbers.Farads(state.LoadFarads)}))",
                         Numbers.Finely(state.FrequencyHz), "loaded frequency; f itself comes from the steady state"),
                 ]);

@@ -7,7 +7,8 @@ internal static class ScoreFigure
 {
     public static IEnumerable<FigureWorking> Of(Candidate candidate, Requirement requirement, decimal? cheapest)
     {
-        if (candidate.Budget is not { } budget || cheapest is not { } least || !double.IsFinite(candidate.Score) || !double.IsFinite(budget.WorstRatio))
+        if (candidate.Budget is not { } budget || cheapest is not { } least || !double.IsFinite(candidate.Score)
+            || !double.IsFinite(budget.WorstRatio))
         {
             yield break;
         }
@@ -23,7 +24,8 @@ internal static class ScoreFigure
                 new WorkingStep(
                     "Order of the list", "score", "we error/budget + wm wanted margin/margin + wc cost/cheapest cost that fits",
                     $"{Numbers.Of(weights.Error)} ({Numbers.Ppm(budget.WorstRatio)} / {Numbers.Ppm(requirement.BudgetRatio)}) + "
-                        + $"{Numbers.Of(weights.Margin)} ({Numbers.Of(requirement.Margin)} / {Numbers.Of(candidate.Margin.Value)}) + {cost}",
+                        + $"{Numbers.Of(weights.Margin)} "
+                        + $"({Numbers.Of(requirement.Margin)} / {Numbers.Of(candidate.Margin.Value)}) + {cost}",
                     Numbers.Of(candidate.Score), "definition; the weights are the requirement's"),
             ]);
     }

@@ -45,7 +45,8 @@ internal sealed class SpreadSteps(Candidate candidate, Requirement requirement, 
         "motional capacitance" => (
             "What an assumed motional capacitance may put the frequency off by: the crystal is right at its rated load, and only the "
                 + "shift from there depends on Cm.",
-            [Moved(term, "Cm", CrystalModel.MotionalUncertainty, (part, share) => part with { MotionalFarads = part.MotionalFarads * share })]),
+            [Moved(term, "Cm", CrystalModel.MotionalUncertainty, (part, share) =>
+                part with { MotionalFarads = part.MotionalFarads * share })]),
         "shunt capacitance" => (
             "What a shunt capacitance that is assumed, or stated as a maximum only, may put the frequency off by.",
             [Moved(term, "C0", CrystalModel.ShuntUncertainty, (part, share) => part with { ShuntFarads = part.ShuntFarads * share })]),
@@ -107,7 +108,8 @@ internal sealed class SpreadSteps(Candidate candidate, Requirement requirement, 
         return new WorkingStep(
             Section, term.Term,
             $"u ({(isFollower ? "" : "|df/f by C1| Cs,in + ")}|df/f by C2| Cs,out + |df/f by C3| Cs,across)",
-            $"{Numbers.Of(requirement.Board.UncertaintyRatio)} ({input}{Numbers.PerPicofarad(byC2)} {Numbers.Farads(strays.OutputFarads)} + "
+            $"{Numbers.Of(requirement.Board.UncertaintyRatio)} ({input}"
+                + $"{Numbers.PerPicofarad(byC2)} {Numbers.Farads(strays.OutputFarads)} + "
                 + $"{Numbers.PerPicofarad(across)} {Numbers.Farads(strays.AcrossFarads)})",
             Numbers.Ppm(term.Ratio), $"strays of a {requirement.Board.Name} board and their uncertainty u: common practice");
     }

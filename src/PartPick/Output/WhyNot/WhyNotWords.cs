@@ -59,7 +59,8 @@ internal static class WhyNotWords
     public static string? Then(WhyNotAnswer answer) => answer.PlaceThen switch
     {
         null => null,
-        { Number: { } number } then => $"With {Shown(answer.Changes[0])} it is number {Figures.Whole(number)} of {Figures.Whole(then.Listed)} listed.",
+        { Number: { } number } then =>
+            $"With {Shown(answer.Changes[0])} it is number {Figures.Whole(number)} of {Figures.Whole(then.Listed)} listed.",
         { } then => $"With {Shown(answer.Changes[0])} it fits, behind the {Figures.Whole(then.Listed)} that are listed.",
     };
 
@@ -77,7 +78,8 @@ internal static class WhyNotWords
     ];
 
     private static string Joined(Hurdle hurdle) =>
-        (hurdle.Wanted.Length == 0 ? "" : $"wanted {hurdle.Wanted}, ") + hurdle.Has + (hurdle.Distance.Length == 0 ? "" : $", {hurdle.Distance}");
+        (hurdle.Wanted.Length == 0 ? "" : $"wanted {hurdle.Wanted}, ") + hurdle.Has
+            + (hurdle.Distance.Length == 0 ? "" : $", {hurdle.Distance}");
 
     private static string Wanted(LimitReading limit) =>
         limit.Limit == Limit.Drive ? $"rated {limit.Wanted}" : $"wanted {limit.Wanted}";

@@ -34,7 +34,8 @@ internal sealed class PartsFoot(PartsModel model, Glyphs glyphs, int width)
     private Line ListKeys() => model.List.Typed is not null
         ? Keys(("words", "or"), ("load<=18p", "and such"), ("Enter", "to the list"), ("Esc", "as it was"))
         : Keys(
-            ("y", "why not"), ("Enter", "open"), ("f", "filter"), (glyphs.Left + " " + glyphs.Right + " o", "order"), ("k", "kind"), ("i", "import"),
+            ("y", "why not"), ("Enter", "open"), ("f", "filter"), (glyphs.Left + " " + glyphs.Right + " o", "order"), ("k", "kind"),
+                ("i", "import"),
             ("Esc", model.List.FilterText.Length > 0 ? "all" : "circuits"), ("?", "keys"));
 
     private Line PartKeys() => model.Page.Typed is not null

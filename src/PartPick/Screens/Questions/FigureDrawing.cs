@@ -3,7 +3,10 @@ using PartPick.Selection;
 
 namespace PartPick.Screens;
 
-/// <summary>Draws the figures of a candidate at the left, and how the chosen one comes about beside them, or below where it is narrow.</summary>
+/// <summary>
+/// Draws the figures of a candidate at the left, and how the chosen one comes about beside them, or below where it is
+/// narrow.
+/// </summary>
 internal static class FigureDrawing
 {
     private const int Names = 27;
@@ -25,7 +28,8 @@ internal static class FigureDrawing
         ImmutableArray<Line> list = List(page, few, left, glyphs);
         ImmutableArray<Line> words = page.Scroll.Cut(
             Explained(page.Figures[page.At], narrow ? width : width - left - 2, glyphs), narrow ? room - few - 1 : room);
-        string place = FormattableString.Invariant($"{page.At + 1} of {page.Figures.Length}") + (page.Scroll.HasMore ? ", more below: PgDn" : "");
+        string place = FormattableString.Invariant($"{page.At + 1} of {page.Figures.Length}")
+            + (page.Scroll.HasMore ? ", more below: PgDn" : "");
         Line title = Rules.Draw($"How it comes about: {CircuitPane.ShortTitle(page.Candidate!)}", place, width, glyphs);
         if (narrow)
         {

@@ -67,7 +67,8 @@ internal sealed class QuestionModel
     /// <summary>The keys that work in the open question.</summary>
     public (string Key, string Does)[] Keys(Glyphs glyphs) => this switch
     {
-        { _whyNot: { IsOpen: true, Id: null } } => [("words", "of a part"), (glyphs.Up + " " + glyphs.Down, "choose"), ("Enter", "ask"), ("Esc", "back")],
+        { _whyNot: { IsOpen: true, Id: null } } =>
+            [("words", "of a part"), (glyphs.Up + " " + glyphs.Down, "choose"), ("Enter", "ask"), ("Esc", "back")],
         { _whyNot: { IsOpen: true, IsLooking: true } } => [("Esc", "stop it"), ("?", "keys")],
         { _whyNot.IsOpen: true } => [(glyphs.Up + " " + glyphs.Down, "scroll"), ("Esc", "back"), ("?", "keys")],
         _ => [(glyphs.Up + " " + glyphs.Down, "other figures"), ("PgDn", "further down"), ("Esc", "back"), ("?", "keys")],

@@ -21,7 +21,8 @@ internal static class WhyNotDrawing
         LineBuilder typed = new LineBuilder(glyphs).Add(" Part with ");
         var lines = ImmutableArray.CreateBuilder<Line>();
         lines.Add(Rules.Draw(
-            picker.IsLooking ? "Why not: reading" : "Why not which part?", count, width, glyphs, picker.IsLooking ? Tone.Accent : Tone.Strong));
+            picker.IsLooking ? "Why not: reading" : "Why not which part?", count, width, glyphs, picker.IsLooking ? Tone.Accent
+                : Tone.Strong));
         lines.Add(typed.Typed(picker.Typed, Math.Max(8, width - typed.Width - 1), glyphs).Build());
         if (picker.Problem is { } problem)
         {
@@ -45,7 +46,8 @@ internal static class WhyNotDrawing
         LineBuilder line = new LineBuilder(glyphs).Add(here ? glyphs.Chosen + " " : "  ").Column(row.Id, Ids).Add(" ");
         if (width - line.Width > KindWidth + 10)
         {
-            line.Column(row.Kind.Word()[..^1], KindWidth, Tone.Quiet).Words(Description(row), width - line.Width - KindWidth - 1, Tone.Quiet);
+            line.Column(row.Kind.Word()[..^1], KindWidth, Tone.Quiet).Words(Description(row), width - line.Width - KindWidth - 1,
+                Tone.Quiet);
         }
 
         return here ? line.Build().Chosen() : line.Build();
@@ -62,11 +64,13 @@ internal static class WhyNotDrawing
         string title = page.IsLooking ? $"Why not {page.Id}: computing" : $"Why not {page.Id}";
         if (page.Answer is not { } answer)
         {
-            string words = page.Problem?.ToString() ?? (page.Doing.Length == 0 ? "" : char.ToUpperInvariant(page.Doing[0]) + page.Doing[1..] + " …");
+            string words = page.Problem?.ToString() ?? (page.Doing.Length == 0 ? "" : char.ToUpperInvariant(page.Doing[0])
+                + page.Doing[1..] + " …");
             return
             [
                 Rules.Draw(title, "", width, glyphs, page.IsLooking ? Tone.Accent : Tone.Strong),
-                .. Paragraph.Of(words, width - 1, glyphs, page.Problem is null ? " " : " ! ", 3, page.Problem is null ? Tone.Quiet : Tone.Warning),
+                .. Paragraph.Of(words, width - 1, glyphs, page.Problem is null ? " " : " ! ", 3, page.Problem is null ? Tone.Quiet
+                    : Tone.Warning),
             ];
         }
 

@@ -24,7 +24,8 @@ internal static class WhyNotLines
         {
             string wanted = limit.Limit == Limit.Drive ? "rated" : "wanted";
             string at = limit.At.Length == 0 ? "" : $", at {limit.At}";
-            Say($"{LimitWords.Words(limit.Limit)}: {wanted} {limit.Wanted}; {limit.Reached} reached, {limit.Distance}{at}", " ! ", Tone.Warning);
+            Say($"{LimitWords.Words(limit.Limit)}: {wanted} {limit.Wanted}; {limit.Reached} reached, {limit.Distance}{at}", " ! ",
+                Tone.Warning);
         }
 
         if (answer.Changes.Length > 0)
@@ -47,7 +48,8 @@ internal static class WhyNotLines
 
         if (answer.Candidate is { } candidate)
         {
-            Head(answer.Fits ? "Its best circuit" : answer.Hurdles.IsEmpty ? "The nearest that it comes" : "The nearest, with that out of the way");
+            Head(answer.Fits ? "Its best circuit" : answer.Hurdles.IsEmpty ? "The nearest that it comes"
+                : "The nearest, with that out of the way");
             Say(CircuitPane.Title(candidate), " ", Tone.Normal);
             lines.AddRange(Bars.Draw(LimitUses.Of(candidate, answer.Requirement), width, glyphs));
         }

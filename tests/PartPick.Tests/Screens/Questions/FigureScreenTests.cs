@@ -22,7 +22,8 @@ public sealed class FigureScreenTests : IDisposable
         bench.Press(new Key('h'));
         bench.Settle();
         Assert.Contains("How it comes about: counter", bench.Text, StringComparison.Ordinal);
-        while (bench.Text.Contains("more below", StringComparison.Ordinal) && !bench.Text.Contains("|e0| + sum of", StringComparison.Ordinal))
+        while (bench.Text.Contains("more below", StringComparison.Ordinal)
+            && !bench.Text.Contains("|e0| + sum of", StringComparison.Ordinal))
         {
             bench.Press(Key.PageDown);
         }
@@ -41,7 +42,8 @@ public sealed class FigureScreenTests : IDisposable
             new HashSet<string>(
             [
                 "frequency error, worst case", "crystal tolerance", "strays", "start-up margin, least", "critical transconductance",
-                "gain margin", "running margin", "drive level, highest", "start-up time, longest", "load capacitance", "output swing", "cost",
+                "gain margin", "running margin", "drive level, highest", "start-up time, longest", "load capacitance", "output swing",
+                    "cost",
             ]),
             seen);
         bench.Press(Key.CursorUp, Key.CursorUp, Key.Esc);
@@ -79,7 +81,8 @@ public sealed class FigureScreenTests : IDisposable
         bench.Settle();
         bench.Press(Key.End);
 
-        Assert.Contains($"score: {best.Score.ToString("0.000", System.Globalization.CultureInfo.InvariantCulture)}", bench.Text, StringComparison.Ordinal);
+        Assert.Contains($"score: {best.Score.ToString("0.000", System.Globalization.CultureInfo.InvariantCulture)}", bench.Text,
+            StringComparison.Ordinal);
         Assert.Contains("we error/budget + wm wanted margin/margin", bench.Text, StringComparison.Ordinal);
     }
 

@@ -36,7 +36,8 @@ public sealed class WhyNotScreenTests : IDisposable
         bench.Settle();
         Assert.Equal(
             PartsCatalog.BuiltIn().Crystals.Count(part =>
-                part.LoadFarads > 29.9e-12 && part.Id.Contains("04M096", StringComparison.Ordinal) && part.Id.Contains("H49", StringComparison.Ordinal)),
+                part.LoadFarads > 29.9e-12 && part.Id.Contains("04M096", StringComparison.Ordinal)
+                    && part.Id.Contains("H49", StringComparison.Ordinal)),
             bench.Rows.Count(row => row.Contains("X-04M096-", StringComparison.Ordinal)));
         bench.Press(Key.Enter);
         Assert.Contains("computing", bench.Text, StringComparison.Ordinal);
@@ -82,7 +83,8 @@ public sealed class WhyNotScreenTests : IDisposable
 
         int counters = PartsCatalog.BuiltIn().Counters.Length;
         Assert.Contains($"{counters} crystals and amplifiers", bench.Text, StringComparison.Ordinal);
-        Assert.Equal(counters, bench.Rows.Count(row => row.Contains("CNT-", StringComparison.Ordinal) && row.Contains(" counter ", StringComparison.Ordinal)));
+        Assert.Equal(counters,
+            bench.Rows.Count(row => row.Contains("CNT-", StringComparison.Ordinal) && row.Contains(" counter ", StringComparison.Ordinal)));
     }
 
     [Fact]
