@@ -96,6 +96,19 @@ public sealed class CornerAnalysis
         return _template.Corners.Reverse().All(point => At(analysis, point) is { } steady && !(steady.DriveWatts > ratedWatts));
     }
 
+    /// <summary>The circuit at a corner.</summary>
+    /// <param name="point">The corner.</param>
+    public OscillatorCircuit CircuitAt(OperatingPoint point) => _template.At(_values, point, _c1Tolerance, _c2Tolerance);
+
+    /// <summary>The steady state at a corner, as the worst of drive level and start-up time take it; null where there is none.</summary>
+    /// <param name="analysis">The figures of the nominal values.</param>
+    /// <param name="point">The corner.</param>
+    public RunningFigures? RunningAt(ValueAnalysis analysis, OperatingPoint point)
+    {
+        ArgumentNullException.ThrowIfNull(analysis);
+        return At(analysis, point);
+    }
+
     private RunningFigures? At(ValueAnalysis analysis, OperatingPoint point)
     {
         if (!_running.TryGetValue(point, out RunningFigures? figures))
@@ -122,7 +135,7 @@ public sealed class CornerAnalysis
             }
         }
 
-        return (new AtCorner(least, where.Describe(_template.Kind)), starts);
+        return (new AtCorner(least, where.Describe(_template.Kind), where), starts);
     }
 
     private (AtCorner? Drive, AtCorner? Time) FindRunning(ValueAnalysis analysis)
@@ -155,7 +168,7 @@ public sealed class CornerAnalysis
         }
 
         return (
-            new AtCorner(mostDrive, driven.Describe(_template.Kind)),
-            double.IsFinite(longest) ? new AtCorner(longest, slow.Describe(_template.Kind)) : null);
+            new AtCorner(mostDrive, driven.Describe(_template.Kind), driven),
+            double.IsFinite(longest) ? new AtCorner(longest, slow.Describe(_template.Kind), slow) : null);
     }
 }

@@ -37,6 +37,7 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
         {
             { Notice: { } notice } => [new LineBuilder(glyphs).Add(" ").Column(notice, width - 1, Tone.Accent).Build()],
             { ShowsKeys: true } => [Keys((UpDown, "scroll"), ("Esc", "back"))],
+            { Questions.IsOpen: true } => [Keys(model.Questions.Keys(glyphs))],
             { Shortlists.Page.Replacements: not null } => [Keys(
                 (UpDown, "choose"), (glyphs.Left + " " + glyphs.Right, "other parts"), ("Esc", "the list"), ("?", "keys"))],
             { Shortlists.Page.Quantity: not null } => [Keys((UpDown, "scroll"), ("Esc", "the list"), ("?", "keys"))],
@@ -52,14 +53,14 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
             { Place: Place.Sentence, Wanted.Typed: not null } => [Value(("Enter", "keep"), ("Esc", "as it was"))],
             { Place: Place.Sentence } => [Value(("Tab", "next"), ("Esc", model.IsReading ? "circuit" : "list"))],
             { Place: Place.Circuit } => [Keys([
-                .. new[] { ("n", "next"), ("d", "differences"), (UpDown, "part"), (glyphs.Left + " " + glyphs.Right, "value") },
+                .. new[] { ("n", "next"), ("d", "differences"), ("h", "how"), (UpDown, "part"), (glyphs.Left + " " + glyphs.Right, "value") },
                 .. model.Swaps.IsChanged ? new[] { ("Backspace", "as ranked") } : [],
                 ("p", "pictures"), ("s", "to a list"), ("Esc", "list"), ("?", "keys")])],
-            { List.Chosen: null } => [Keys([("e", "edit the wanted"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
+            { List.Chosen: null } =>
+                [Keys([("y", "why not a part"), ("e", "edit the wanted"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
             _ => [Keys([
-                (UpDown, "choose"), ("d", "differences"), .. Kept, .. Catalogue, ("p", "pictures"), ("s", "to a list"), ("Enter", "open"),
-                ("e", "edit"),
-                ("?", "keys"), ("q", "quit")])],
+                (UpDown, "choose"), ("d", "differences"), ("h", "how"), .. Kept, .. Catalogue, ("y", "why not"), ("p", "pictures"),
+                ("s", "to a list"), ("Enter", "open"), ("e", "edit"), ("?", "keys"), ("q", "quit")])],
         };
     }
 

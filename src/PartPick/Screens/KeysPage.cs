@@ -26,6 +26,8 @@ public static class KeysPage
         Key("d", "differences: marks the circuit, and shows the marked one and another side by side; so in a circuit, too");
         Key("l", "the lists: what changed since, and writing them to files");
         Key("w", "what is kept: requirements by name, to take one, copy it, or put some side by side");
+        Key("y", "why not: which limit keeps a crystal or amplifier out of the list, and what would let it in");
+        Key("h", "how each figure of the circuit comes about; so in a circuit, too");
         Key("e or Tab", "edit the wanted sentence; so does " + glyphs.Up + " on the first circuit");
         Key("c", "the catalogue: its parts, and the import of a list");
         Key("?", "this page");
@@ -89,6 +91,7 @@ public static class KeysPage
             Key($"{glyphs.Left} {glyphs.Right}", "mark a column; o puts the parts in its order, o again turns the order round");
             Key("k", "the next kind of part");
             Key("Enter", "open the part: each figure with what it rests on and where it came from");
+            Key("y", "why the part is not in the list of circuits; so in a part");
             Key("i", "import a list; u takes the last import back, when pressed twice");
             Head("In a part of the catalogue");
             Key("Enter", "change the figure; a digit begins a new one; no import changes what was set by hand");

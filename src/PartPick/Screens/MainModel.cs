@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using PartPick.Requirements;
 using PartPick.Selection;
+using PartPick.WhyNot;
 
 namespace PartPick.Screens;
 
@@ -79,6 +80,9 @@ public sealed partial class MainModel
     /// <summary>The pictures of a candidate.</summary>
     internal PicturesModel Pictures { get; private set; } = new();
 
+    /// <summary>What can be asked of the list and of a circuit.</summary>
+    internal QuestionModel Questions { get; private set; } = new();
+
     /// <summary>Where the keys go.</summary>
     public Place Place { get; private set; }
 
@@ -122,6 +126,7 @@ public sealed partial class MainModel
         Shortlists.Stop();
         Pictures.Close();
         Swaps.Forget();
+        Questions.Stop();
         _ranking.Stop();
     }
 
@@ -146,9 +151,9 @@ public sealed partial class MainModel
         Redraw?.Invoke();
     }
 
-    /// <summary>Stops what the user may want to stop without leaving: an import that runs.</summary>
+    /// <summary>Stops what the user may want to stop without leaving: an import that runs, an answer that is looked for.</summary>
     /// <returns>Whether there was such a thing.</returns>
-    public bool Interrupt() => Place == Place.Parts && Parts!.Interrupt();
+    public bool Interrupt() => Questions.Interrupt() || Place == Place.Parts && Parts!.Interrupt();
 
     /// <summary>Takes a key.</summary>
     /// <param name="key">The key.</param>
@@ -158,6 +163,11 @@ public sealed partial class MainModel
         if (ShowsKeys)
         {
             PressInKeys(key);
+            return;
+        }
+
+        if (Questions.Press(key))
+        {
             return;
         }
 
@@ -241,6 +251,15 @@ public sealed partial class MainModel
         Pictures.Said += Say;
     }
 
+    /// <summary>Lets questions be asked; without it there are none.</summary>
+    /// <param name="desk">What answers why a part is not in the list.</param>
+    /// <param name="work">Does what takes long.</param>
+    public void AnswerQuestionsAt(IWhyNotDesk desk, ScreenWork work)
+    {
+        Questions = new QuestionModel(desk, work);
+        Questions.Redraw += () => Redraw?.Invoke();
+    }
+
     /// <summary>The screen as lines, each as wide as the screen.</summary>
     /// <param name="width">Width in cells.</param>
     /// <param name="height">Height in rows.</param>
@@ -273,6 +292,9 @@ public sealed partial class MainModel
         {
             case PartsAnswer.Leave:
                 LeaveParts();
+                break;
+            case PartsAnswer.NotMine when key.Letter == 'y' && Parts.AskableId is { } id:
+                Questions.AskWhyNot(Wanted.Accepted, null, id);
                 break;
             case PartsAnswer.NotMine when key.Letter is '?' or 'q':
                 PressAnywhere(key);
@@ -412,6 +434,12 @@ public sealed partial class MainModel
                 break;
             case { Name: KeyName.Letter, Letter: 'p' } when List is { Chosen: { } chosen, Result: { } result }:
                 Pictures.Open(chosen, result);
+                break;
+            case { Name: KeyName.Letter, Letter: 'y' }:
+                Questions.AskWhyNot(Wanted.Accepted, IsStale ? null : List.Result);
+                break;
+            case { Name: KeyName.Letter, Letter: 'h' } when List is { Chosen: { } shown, Result: { } ranked }:
+                Questions.ShowFigures(shown, ranked);
                 break;
             case { Name: KeyName.Letter, Letter: 'q' }:
                 IsDone = true;

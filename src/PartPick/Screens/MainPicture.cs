@@ -23,7 +23,7 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
             return Filled([Line.Empty, new LineBuilder(glyphs).Words(text, width).Build()], height);
         }
 
-        if (model is { Place: Place.Parts, ShowsKeys: false })
+        if (model is { Place: Place.Parts, ShowsKeys: false, Questions.IsOpen: false })
         {
             return model.Parts!.Draw(width, height);
         }
@@ -43,6 +43,14 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
             return model.Place == Place.Parts
                 ? KeysBody(width, room)
                 : Beside(ScreenColumns.WithPage(width), page => KeysBody(page, room), room);
+        }
+
+        if (model.Questions.IsOpen)
+        {
+            ScreenColumns asked = model.Place == Place.Parts ? ScreenColumns.Alone(width)
+                : model.Questions.IsTable ? ScreenColumns.WithTable(width)
+                : ScreenColumns.WithPage(width);
+            return Beside(asked, page => model.Questions.Draw(page, room, glyphs), room);
         }
 
         if (model.Shortlists.IsOpen)

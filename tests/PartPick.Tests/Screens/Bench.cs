@@ -70,6 +70,12 @@ internal sealed class Bench : IDisposable
         }
     }
 
+    /// <summary>Answers questions from a catalogue.</summary>
+    public void AnswerQuestions(string catalogue) => AnswerQuestions(new WhyNot.WhyNotDesk(catalogue));
+
+    /// <summary>Answers questions.</summary>
+    public void AnswerQuestions(WhyNot.IWhyNotDesk desk) => Model.AnswerQuestionsAt(desk, _work);
+
     public void Press(params Key[] keys)
     {
         foreach (Key key in keys)

@@ -2,6 +2,7 @@ using System.Runtime.InteropServices;
 using PartPick.Requirements;
 using PartPick.Selection;
 using PartPick.Values;
+using PartPick.WhyNot;
 using Terminal.Gui.App;
 using Terminal.Gui.Drivers;
 
@@ -53,6 +54,7 @@ internal sealed class TerminalRun(
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
         model.KeepListsAt(desk, work);
         model.ChangePartsFrom(ranking.Parts, work);
+        model.AnswerQuestionsAt(new WhyNotDesk(catalogPath), work);
         model.KeepWantedAt(store, work, ranking);
         model.DrawPicturesWith(work);
         using var screen = new MainScreen(model, palette);
