@@ -48,7 +48,7 @@ public sealed class PicturesScreenTests
         Assert.Contains("x to an SVG file", bench.Rows[^1], StringComparison.Ordinal);
         bench.Press(Key.Esc);
         Assert.Equal(Place.Circuit, bench.Model.Place);
-        Assert.Contains("other circuits", bench.Rows[^1], StringComparison.Ordinal);
+        Assert.Contains("pictures", bench.Rows[^1], StringComparison.Ordinal);
     }
 
     [Fact]
