@@ -6,6 +6,9 @@ namespace PartPick.Selection;
 /// <summary>The worst of margin, drive level and start-up time over the corners, for capacitors of given tolerances.</summary>
 public sealed class CornerAnalysis
 {
+    // Between the crystal's frequency and that of the natural mode the margin changes by less than a hundredth.
+    private const double MarginReserve = 1.03;
+    private const double ClearOfOne = 1.1;
     private readonly CircuitTemplate _template;
     private readonly CircuitValues _values;
     private readonly Requirement _requirement;
@@ -51,11 +54,30 @@ public sealed class CornerAnalysis
     /// </summary>
     /// <param name="analysis">The figures of the nominal values.</param>
     /// <param name="ratedWatts">Highest rated drive level in watts; null where none is stated.</param>
-    public bool RunsWithin(ValueAnalysis analysis, double? ratedWatts)
+    /// <param name="mostOverNominal">
+    /// Largest drive level at a corner over that at the same one with nominal capacitances; corners that this settles are not looked
+    /// at. Infinite to look at all.
+    /// </param>
+    internal bool RunsWithin(ValueAnalysis analysis, double? ratedWatts, double mostOverNominal)
     {
-        ArgumentNullException.ThrowIfNull(analysis);
-        return _template.Corners.Reverse().All(point => At(analysis, point) is { } steady && !(steady.DriveWatts > ratedWatts));
+        for (int corner = _template.Corners.Length - 1; corner >= 0; corner--)
+        {
+            // Each corner of the amplifier stands twice, with capacitances low and high.
+            bool settled = mostOverNominal * analysis.AmplifierDriveWattsAt(corner / 2) <= (ratedWatts ?? double.MaxValue);
+            if (!settled && !(At(analysis, _template.Corners[corner]) is { } steady && !(steady.DriveWatts > ratedWatts)))
+            {
+                return false;
+            }
+        }
+
+        return true;
     }
+
+    /// <summary>Whether it runs at the last corner, which likely drives most, with no more than a drive level.</summary>
+    /// <param name="analysis">The figures of the nominal values.</param>
+    /// <param name="ratedWatts">Highest rated drive level in watts.</param>
+    internal bool HardestRunsWithin(ValueAnalysis analysis, double ratedWatts) =>
+        At(analysis, _template.Corners[^1]) is { } steady && steady.DriveWatts <= ratedWatts;
 
     private RunningFigures? At(ValueAnalysis analysis, OperatingPoint point)
     {
@@ -68,14 +90,26 @@ public sealed class CornerAnalysis
         return figures;
     }
 
+    // The margin at the crystal's frequency costs little and is near that of the natural mode: only corners where it may be the least,
+    // or where it is not clear of one, are looked at in full.
     private (AtCorner Margin, bool BuildsUp) FindStart()
     {
         double least = double.PositiveInfinity;
         OperatingPoint where = _template.Corners[0];
         bool starts = true;
-        foreach (OperatingPoint point in _template.Corners)
+        double hertz = _template.Crystal.Crystal.NominalHz;
+        OscillatorCircuit[] circuits =
+            [.. _template.Corners.Select(point => _template.At(_values, point, _c1Tolerance, _c2Tolerance))];
+        double[] near = [.. circuits.Select(circuit => OscillatorAnalysis.FindMarginAt(circuit, hertz))];
+        double looked = Math.Max(near.Min() * MarginReserve, ClearOfOne);
+        for (int corner = 0; corner < circuits.Length; corner++)
         {
-            OscillatorCircuit circuit = _template.At(_values, point, _c1Tolerance, _c2Tolerance);
+            if (near[corner] > looked)
+            {
+                continue;
+            }
+
+            (OperatingPoint point, OscillatorCircuit circuit) = (_template.Corners[corner], circuits[corner]);
             StartFigures figures = OscillatorAnalysis.FindStartFigures(circuit);
             double margin = figures.Margin;
             if (figures.GrowthRatePerSecond <= 0)

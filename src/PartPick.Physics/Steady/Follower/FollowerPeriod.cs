@@ -129,6 +129,13 @@ internal sealed partial class FollowerPeriod : ForcedState
     }
 
     /// <inheritdoc/>
+    public override void Release()
+    {
+        _shooting.Release();
+        _remembered.Release();
+    }
+
+    /// <inheritdoc/>
     public override double OutputSwingVolts() => _shooting.Now.Extremes().Swing * _units.Volts;
 
     private Complex LinearControl() =>
