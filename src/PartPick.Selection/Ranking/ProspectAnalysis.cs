@@ -91,8 +91,9 @@ internal sealed class ProspectAnalysis
         {
             Reject(Limit.Drive);
         }
-        else if (Left(pair => MayRunHardest(pair, analysis)) && MayReach(nominal, analysis)
-            && _family.IsGate ? Left(pair => Budget(pair, nominal, analysis, BaseSlack)) : MayReachSteady(analysis)
+        else if (Left(pair => MayRunHardest(pair, analysis))
+            && MayReach(nominal, analysis)
+            && (_family.IsGate ? Left(pair => Budget(pair, nominal, analysis, BaseSlack)) : MayReachSteady(analysis))
             && Left(pair => Budget(pair, analysis.Steady, analysis, 0))
             && Left(Margins))
         {
