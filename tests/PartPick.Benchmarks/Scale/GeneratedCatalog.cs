@@ -67,11 +67,14 @@ internal sealed class GeneratedCatalog
     {
         var vary = new PartVariation(_random);
         (int inverters, int transistors, int ports) = (count * 2 / 5, count / 4, count / 4);
-        return InTurn(near.Inverters, inverters).Select((part, i) => vary.Inverter(part, PartVariation.Id("INV", i)))
-            .Concat(InTurn(near.Transistors, transistors).Select((part, i) => vary.Transistor(part, PartVariation.Id("TR", i))))
-            .Concat(InTurn(near.Ports, ports).Select((part, i) => vary.Port(part, PartVariation.Id("MCU", i))))
-            .Concat(InTurn(near.Counters, count - inverters - transistors - ports)
-                .Select((part, i) => vary.Counter(part, PartVariation.Id("CNT", i))));
+        return
+        [
+            .. InTurn(near.Inverters, inverters).Select((part, i) => vary.Inverter(part, PartVariation.Id("INV", i))),
+            .. InTurn(near.Transistors, transistors).Select((part, i) => vary.Transistor(part, PartVariation.Id("TR", i))),
+            .. InTurn(near.Ports, ports).Select((part, i) => vary.Port(part, PartVariation.Id("MCU", i))),
+            .. InTurn(near.Counters, count - inverters - transistors - ports)
+                .Select((part, i) => vary.Counter(part, PartVariation.Id("CNT", i))),
+        ];
     }
 
     // Every built-in part before any a second time, so that each value and kind is there.

@@ -23,7 +23,7 @@ internal static class OddWorld
             4 => OneOfEach(world.Catalog.All),
             _ => world.Catalog.All,
         };
-        return world with { Catalog = new PartsCatalog(parts) };
+        return new SmallWorld(number % 3 == 0 ? world.Requirement : Easier(world.Requirement, kind), new PartsCatalog(parts));
     }
 
     /// <summary>What is odd about a world, for the names of tests.</summary>
@@ -35,6 +35,17 @@ internal static class OddWorld
         3 => "an empty kind",
         4 => "single parts",
         _ => "nothing odd",
+    };
+
+    // Few of the values drawn load their crystal rightly: in two worlds of three more of them may be fit.
+    private static Requirement Easier(Requirement requirement, CircuitKind kind) => requirement with
+    {
+        BudgetRatio = requirement.BudgetRatio * 3,
+        Margin = 2,
+        SupplyMinVolts = kind == CircuitKind.Port ? 3.2 : 4.75,
+        SupplyMaxVolts = kind == CircuitKind.Port ? 3.4 : 5.25,
+        CostLimit = null,
+        StartUpTimeSeconds = null,
     };
 
     private static IEnumerable<Part> EqualCosts(IEnumerable<Part> parts) =>
