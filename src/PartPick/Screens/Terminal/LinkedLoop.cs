@@ -57,6 +57,7 @@ internal sealed class LinkedLoop : IScreenLoop
     {
         _beforeEnd = beforeEnd;
         IDriver driver = _app.Driver!;
+        var intake = new KeyIntake();
         PosixSignalRegistration? stopped = null;
         screen.StopAsked += Suspend;
         screen.RepaintAsked += Repaint;
@@ -72,7 +73,7 @@ internal sealed class LinkedLoop : IScreenLoop
         stopped = PosixSignalRegistration.Create(PosixSignal.SIGTSTP, StopFromOutside);
         _link.Enter(Size.Height, Size.Width);
         var keys = (InputProcessorImpl<char>)driver.GetInputProcessor();
-        KeyIntake.Start(
+        intake.Start(
             typed =>
             {
                 foreach (char sign in typed)
@@ -90,6 +91,7 @@ internal sealed class LinkedLoop : IScreenLoop
         finally
         {
             stopped?.Dispose();
+            intake.Rest();
             _link.Leave();
         }
 
@@ -103,6 +105,7 @@ internal sealed class LinkedLoop : IScreenLoop
         void Suspend()
         {
             stopped?.Dispose();
+            intake.Rest();
             _link.Leave();
             _goesOn.Reset();
             NativeTerminal.Stop();
@@ -111,6 +114,7 @@ internal sealed class LinkedLoop : IScreenLoop
             _goesOn.WaitOne(LoopPace.UntilStopped);
             stopped = PosixSignalRegistration.Create(PosixSignal.SIGTSTP, StopFromOutside);
             Enter();
+            intake.GoOn();
         }
     }
 

@@ -4,20 +4,30 @@ using Microsoft.Win32.SafeHandles;
 namespace PartPick.Screens;
 
 /// <summary>Reads what is typed, on a thread of its own that only waits.</summary>
-internal static class KeyIntake
+internal sealed class KeyIntake
 {
     private const int ReadAtOnce = 1024;
+
+    private static readonly TimeSpan Look = TimeSpan.FromMilliseconds(20);
+
+    private volatile bool _rests;
 
     /// <summary>Starts to read, until the terminal is gone or the program ends.</summary>
     /// <param name="take">Takes the characters; called from another thread.</param>
     /// <param name="gone">Told that the terminal is gone; called from another thread.</param>
-    public static void Start(Action<ReadOnlySpan<char>> take, Action gone)
+    public void Start(Action<ReadOnlySpan<char>> take, Action gone)
     {
         var thread = new Thread(() => Read(take, gone)) { IsBackground = true, Name = "keys" };
         thread.Start();
     }
 
-    private static void Read(Action<ReadOnlySpan<char>> take, Action gone)
+    /// <summary>Leaves what is typed from now on to another program: the shell.</summary>
+    public void Rest() => _rests = true;
+
+    /// <summary>Reads again.</summary>
+    public void GoOn() => _rests = false;
+
+    private void Read(Action<ReadOnlySpan<char>> take, Action gone)
     {
         using var input = new FileStream(new SafeFileHandle(0, ownsHandle: false), FileAccess.Read, bufferSize: 0);
         Decoder decoder = Encoding.UTF8.GetDecoder();
@@ -25,6 +35,13 @@ internal static class KeyIntake
         char[] signs = new char[ReadAtOnce + 1];
         while (true)
         {
+            NativeTerminal.WaitForInput();
+            if (_rests)
+            {
+                Thread.Sleep(Look);
+                continue;
+            }
+
             int count;
             try
             {

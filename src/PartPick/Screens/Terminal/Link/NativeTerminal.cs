@@ -9,6 +9,7 @@ internal static class NativeTerminal
 {
     private const int Input = 0;
     private const int Now = 0;
+    private const short Readable = 1;
 
     // struct termios takes 60 bytes on Linux and 72 on macOS; it is only ever kept, changed by cfmakeraw and handed back.
     private const int StateBytes = 256;
@@ -38,6 +39,16 @@ internal static class NativeTerminal
     /// <summary>Stops the program and whatever runs with it in the foreground, as Ctrl-Z does; returns when it goes on.</summary>
     public static void Stop() => _ = Kill(0, StopSignal);
 
+    /// <summary>Waits until something can be read, without reading it.</summary>
+    public static void WaitForInput()
+    {
+        Waiting[] one = [new Waiting(Input, Readable)];
+        _ = Poll(one, 1, -1);
+    }
+
+    [DllImport("libc", EntryPoint = "poll")]
+    private static extern int Poll([In, Out] Waiting[] terminals, nuint count, int milliseconds);
+
     [DllImport("libc", EntryPoint = "tcgetattr")]
     private static extern int GetState(int terminal, [In, Out] byte[] state);
 
@@ -49,4 +60,11 @@ internal static class NativeTerminal
 
     [DllImport("libc", EntryPoint = "kill")]
     private static extern int Kill(int process, int signal);
+
+    private struct Waiting(int terminal, short events)
+    {
+        public int Terminal = terminal;
+        public short Events = events;
+        public short Happened = 0;
+    }
 }

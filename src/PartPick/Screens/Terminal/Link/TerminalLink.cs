@@ -93,10 +93,11 @@ internal sealed class TerminalLink : IDisposable
                 return;
             }
 
+            // First the modes: who sees the screen go may type at once.
             _isIn = false;
+            GiveModesBack();
             Send((_traits.HasAlternateScreen ? "\x1b[m" + MainScreen : PlainAndClear)
                 + (_traits.HidesCursor ? ShowCursor : "") + OrdinaryKeys);
-            GiveModesBack();
         }
     }
 
