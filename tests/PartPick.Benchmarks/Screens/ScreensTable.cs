@@ -1,0 +1,193 @@
+using System.Diagnostics;
+using System.Globalization;
+using PartPick.Catalog;
+using PartPick.Catalog.Import;
+
+namespace PartPick.Benchmarks;
+
+/// <summary>
+/// The program in a pseudo-terminal beside an empty program of the toolkit, driven by keys: the first frame, the processor time of doing
+/// nothing, how long a key waits for its answer, and what is sent for it. One run, both programs by turns, so that ratios compare.
+/// </summary>
+internal sealed class ScreensTable
+{
+    private const string Down = "\x1b[B";
+    private const string PageDown = "\x1b[6~";
+
+    private static readonly TimeSpan Patience = TimeSpan.FromMinutes(2);
+    private static readonly TimeSpan Still = TimeSpan.FromMilliseconds(700);
+
+    private readonly TextWriter _output;
+    private readonly string _catalog;
+
+    private ScreensTable(string catalog, TextWriter output)
+    {
+        _catalog = catalog;
+        _output = output;
+    }
+
+    /// <summary>Measures and prints.</summary>
+    /// <param name="arguments">Rows of the large catalogue, 500000 when left out, 0 for none; then the starts of each program, 9.</param>
+    /// <param name="output">Where to print.</param>
+    public static int Print(string[] arguments, TextWriter output)
+    {
+        int rows = arguments.Length > 0 ? int.Parse(arguments[0], CultureInfo.InvariantCulture) : 500_000;
+        int starts = arguments.Length > 1 ? int.Parse(arguments[1], CultureInfo.InvariantCulture) : 9;
+        string folder = Directory.CreateTempSubdirectory("partpick-screens-bench-").FullName;
+        try
+        {
+            var small = new ScreensTable(Path.Combine(folder, "small.db"), output);
+            small.FirstFrames(starts);
+            small.Idle();
+            output.WriteLine("120 x 40                          ms, median     worst   over 50 ms   bytes, median     worst");
+            small.Keys("");
+            if (rows > 0)
+            {
+                var large = new ScreensTable(Path.Combine(folder, "large.db"), output);
+                large.Fill(folder, rows);
+                large.Keys(string.Create(CultureInfo.InvariantCulture, $", {rows} parts"));
+            }
+
+            return 0;
+        }
+        finally
+        {
+            Directory.Delete(folder, recursive: true);
+        }
+    }
+
+    private static string[] Program(string name, params string[] arguments) =>
+        Environment.ProcessPath is { } running && Path.GetFileNameWithoutExtension(running) == "dotnet"
+            ? [running, Path.Combine(AppContext.BaseDirectory, name + ".dll"), .. arguments]
+            : [Path.Combine(AppContext.BaseDirectory, name), .. arguments];
+
+    private static double Median(List<double> values)
+    {
+        values.Sort();
+        return values[values.Count / 2];
+    }
+
+    private PseudoTerminal PartPick() => new(Program("partpick"), _catalog);
+
+    private PseudoTerminal Empty() => new(Program("PartPick.Benchmarks", "--empty-screen"), _catalog);
+
+    private static void Need(bool came, string what)
+    {
+        if (!came)
+        {
+            throw new InvalidOperationException($"It never came: {what}.");
+        }
+    }
+
+    private void FirstFrames(int starts)
+    {
+        var ours = new List<double>();
+        var empty = new List<double>();
+        var answers = new List<double>();
+
+        // The first start of each reads its files from the disk.
+        for (int i = 0; i <= starts; i++)
+        {
+            using PseudoTerminal none = Empty();
+            Need(none.WaitFor(EmptyScreen.Words, 0, Patience), "the empty screen");
+            double noneCame = Stopwatch.GetElapsedTime(none.Started).TotalMilliseconds;
+            none.Dispose();
+            using PseudoTerminal terminal = PartPick();
+            Need(terminal.WaitFor("Wanted", 0, Patience), "the sentence");
+            double came = Stopwatch.GetElapsedTime(terminal.Started).TotalMilliseconds;
+            Need(terminal.WaitFor("best first", 0, Patience), "the list");
+            if (i > 0)
+            {
+                empty.Add(noneCame);
+                ours.Add(came);
+                answers.Add(Stopwatch.GetElapsedTime(terminal.Started).TotalMilliseconds);
+            }
+        }
+
+        double unit = Median(empty);
+        _output.WriteLine(string.Create(
+            CultureInfo.InvariantCulture, $"first frame over that of an empty program: {Median(ours) / unit:F2}; first circuits: {Median(answers) / unit:F2}"));
+        _output.WriteLine(string.Create(CultureInfo.InvariantCulture, $"  (medians of {starts} starts; {unit:F0} ms for the empty program)"));
+    }
+
+    private void Idle()
+    {
+        using PseudoTerminal none = Empty();
+        using PseudoTerminal terminal = PartPick();
+        Need(terminal.WaitFor("circuits", 0, Patience), "an answer");
+        terminal.WaitForRest(TimeSpan.FromSeconds(3));
+        TimeSpan oursBefore = terminal.Work, emptyBefore = none.Work;
+        int sentBefore = terminal.Sent, emptySent = none.Sent;
+        long start = Stopwatch.GetTimestamp();
+        Thread.Sleep(TimeSpan.FromSeconds(15));
+        double passed = Stopwatch.GetElapsedTime(start).TotalSeconds;
+        double ours = (terminal.Work - oursBefore).TotalSeconds, empty = (none.Work - emptyBefore).TotalSeconds;
+        _output.WriteLine(string.Create(
+            CultureInfo.InvariantCulture,
+            $"idle: {ours / empty:F2} of the empty program's processor time ({ours / passed:P2} and {empty / passed:P2} of a core); "
+            + $"sent meanwhile: {terminal.Sent - sentBefore} and {none.Sent - emptySent} bytes"));
+    }
+
+    private void Fill(string folder, int rows)
+    {
+        string list = Path.Combine(folder, "list.csv");
+        ImportTable.WriteList(list, rows);
+        var request = new ImportRequest { Kind = PartKind.Crystal, Name = "list.csv", Date = new DateOnly(2026, 3, 1) };
+        if (!CatalogImport.Run(_catalog, File.OpenRead(list), request, null, CancellationToken.None).IsOk)
+        {
+            throw new InvalidOperationException("The list cannot be imported.");
+        }
+    }
+
+    private void Keys(string which)
+    {
+        using PseudoTerminal terminal = PartPick();
+        Need(terminal.WaitFor("best first", 0, Patience), "the list");
+
+        // Typing begins at once: parts may still be read, and every value starts a ranking that the next one ends.
+        int from = terminal.Type("e");
+        Need(terminal.WaitFor("output frequency", from, Patience), "the sentence");
+        Row("typed in the sentence, 20 a second" + which, terminal, 240, 50, Typed);
+        terminal.Type("\x1b");
+        terminal.WaitForRest(Still);
+        terminal.Type("\x1b");
+        terminal.WaitForRest(TimeSpan.FromSeconds(3));
+        Row("Down in the list" + which, terminal, 15, 200, _ => (Down, "►"));
+        terminal.Type("c");
+        terminal.WaitForRest(TimeSpan.FromSeconds(3));
+        Row("Down in the catalogue" + which, terminal, 60, 100, _ => (Down, "►"));
+        Row("PgDn in the catalogue" + which, terminal, 40, 100, _ => (PageDown, ""));
+    }
+
+    // Another output frequency each time: 1 kHz, 2 kHz and so on. What is typed has to be seen.
+    private static (string Key, string Shown) Typed(int number) => (number % 5) switch
+    {
+        0 => ((1 + number / 5 % 9).ToString(CultureInfo.InvariantCulture), (1 + number / 5 % 9).ToString(CultureInfo.InvariantCulture)),
+        1 => ("k", "k"),
+        2 => ("H", "H"),
+        3 => ("z", "z"),
+        _ => ("\r", ""),
+    };
+
+    private void Row(string name, PseudoTerminal terminal, int count, int pause, Func<int, (string Key, string Shown)> key)
+    {
+        var times = new List<double>();
+        var bytes = new List<double>();
+        for (int i = 0; i < count; i++)
+        {
+            (string press, string shown) = key(i);
+            long start = Stopwatch.GetTimestamp();
+            int from = terminal.Type(press);
+            Need(terminal.WaitFor(shown, from, Patience), $"the answer to {press}");
+            times.Add(Stopwatch.GetElapsedTime(start).TotalMilliseconds);
+            Thread.Sleep(pause);
+            bytes.Add(terminal.Sent - from);
+        }
+
+        double worst = times.Max(), worstBytes = bytes.Max();
+        int late = times.Count(time => time > 50);
+        _output.WriteLine(string.Create(
+            CultureInfo.InvariantCulture,
+            $"{name,-46}{Median(times),8:F1}{worst,10:F1}{late,8} of {count,-5}{Median(bytes),10:F0}{worstBytes,10:F0}"));
+    }
+}
