@@ -71,6 +71,12 @@ internal sealed class ScreensTable
 
     private PseudoTerminal Empty() => new(Program("PartPick.Benchmarks", "--empty-screen"), _catalog);
 
+    private static double Until(PseudoTerminal terminal, string text)
+    {
+        Need(terminal.WaitFor(text, 0, Patience), text);
+        return Stopwatch.GetElapsedTime(terminal.Started).TotalMilliseconds;
+    }
+
     private static void Need(bool came, string what)
     {
         if (!came)
@@ -88,19 +94,19 @@ internal sealed class ScreensTable
         // The first start of each reads its files from the disk.
         for (int i = 0; i <= starts; i++)
         {
-            using PseudoTerminal none = Empty();
-            Need(none.WaitFor(EmptyScreen.Words, 0, Patience), "the empty screen");
-            double noneCame = Stopwatch.GetElapsedTime(none.Started).TotalMilliseconds;
-            none.Dispose();
+            double noneCame;
+            using (PseudoTerminal none = Empty())
+            {
+                noneCame = Until(none, EmptyScreen.Words);
+            }
+
             using PseudoTerminal terminal = PartPick();
-            Need(terminal.WaitFor("Wanted", 0, Patience), "the sentence");
-            double came = Stopwatch.GetElapsedTime(terminal.Started).TotalMilliseconds;
-            Need(terminal.WaitFor("best first", 0, Patience), "the list");
+            double came = Until(terminal, "Wanted"), answered = Until(terminal, "best first");
             if (i > 0)
             {
                 empty.Add(noneCame);
                 ours.Add(came);
-                answers.Add(Stopwatch.GetElapsedTime(terminal.Started).TotalMilliseconds);
+                answers.Add(answered);
             }
         }
 

@@ -19,15 +19,16 @@ public sealed class GoldenScreenTests : IDisposable
         ["list of misses"] = bench =>
         {
             bench.Ranking.Answer = SampleRanking.Nothing;
-            bench.Press(new Key('e'), Key.Tab, new Key('s'), Key.Esc);
+            bench.Press(new Key('e'), Key.Tab, new Key(' '), Key.Enter, Key.Esc);
         },
         ["circuit"] = bench => bench.Press(Key.Enter),
         ["circuit, follower"] = bench => bench.Press(Key.End, Key.Enter),
         ["sentence"] = bench => bench.Press(new Key('e'), Key.Tab, Key.Tab),
-        ["sentence, a value typed"] = bench =>
+        ["sentence, a wrong value"] = bench =>
         {
             bench.Press(new Key('e'), Key.Tab, Key.Tab);
             bench.Type("20 pF");
+            bench.Press(Key.Enter);
         },
         ["keys"] = bench => bench.Press(new Key('?')),
         ["shortlist, asked"] = bench => bench.Press(new Key('s')),
@@ -70,7 +71,7 @@ public sealed class GoldenScreenTests : IDisposable
                 folder = folder.Parent ?? throw new InvalidOperationException("These tests run within a clone of the repository.");
             }
 
-            return Path.Combine(folder.FullName, "tests", "PartPick.Tests", "Screens", "Golden");
+            return Directory.CreateDirectory(Path.Combine(folder.FullName, "tests", "PartPick.Tests", "Screens", "Golden")).FullName;
         }
     }
 
@@ -92,7 +93,6 @@ public sealed class GoldenScreenTests : IDisposable
         string file = Path.Combine(Folder, name);
         if (Environment.GetEnvironmentVariable(Accept) == "1")
         {
-            Directory.CreateDirectory(Folder);
             File.WriteAllText(file, shown);
             return;
         }
