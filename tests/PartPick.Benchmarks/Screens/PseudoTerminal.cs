@@ -80,9 +80,8 @@ internal sealed class PseudoTerminal : IDisposable
     {
         get
         {
-            long nanoseconds = Directory.GetDirectories($"/proc/{_process.Id}/task")
-                .Sum(thread => long.Parse(File.ReadAllText(thread + "/schedstat").Split(' ')[0], CultureInfo.InvariantCulture));
-            return TimeSpan.FromMicroseconds(nanoseconds / 1000.0);
+            double nanoseconds = Directory.GetDirectories($"/proc/{_process.Id}/task").Sum(OfThread);
+            return TimeSpan.FromMicroseconds(nanoseconds / 1000);
         }
     }
 
@@ -138,6 +137,19 @@ internal sealed class PseudoTerminal : IDisposable
         _process.WaitForExit();
         _keys.Dispose();
         _process.Dispose();
+    }
+
+    // A thread may end while it is looked at.
+    private static double OfThread(string folder)
+    {
+        try
+        {
+            return double.Parse(File.ReadAllText(folder + "/schedstat").Split(' ')[0], CultureInfo.InvariantCulture);
+        }
+        catch (IOException)
+        {
+            return 0;
+        }
     }
 
     private void Read()
