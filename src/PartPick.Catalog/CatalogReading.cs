@@ -67,6 +67,19 @@ public static class CatalogReading
             path, file => file.FindStored(id) is { } stored ? EntryOf(stored, new Origins(file.ReadImports())) : null);
     }
 
+    /// <summary>Reads some parts.</summary>
+    /// <param name="path">The path of the file.</param>
+    /// <param name="ids">The ids of the parts.</param>
+    /// <returns>Those of them that are there; or the problem.</returns>
+    public static Result<PartsCatalog> FindAll(string path, IEnumerable<string> ids)
+    {
+        ArgumentNullException.ThrowIfNull(ids);
+        return CatalogStore.UseCurrent(
+            path,
+            file => new PartsCatalog(
+                ids.Distinct(StringComparer.Ordinal).Select(file.FindStored).OfType<StoredPart>().Select(BuiltOf).ToList()));
+    }
+
     /// <summary>The import that can be taken back.</summary>
     /// <param name="path">The path of the file.</param>
     /// <returns>Its note, null where there is none; or the problem.</returns>

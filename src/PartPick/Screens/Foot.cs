@@ -23,6 +23,11 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
             return asking.Draw(model.Shortlists.Enter, width, glyphs);
         }
 
+        if (model is { ShowsKeys: false, Kept.Asking: { } naming })
+        {
+            return naming.Draw(model.Kept.Enter, width, glyphs);
+        }
+
         return model switch
         {
             { Notice: { } notice } => [new LineBuilder(glyphs).Add(" ").Column(notice, width - 1, Tone.Accent).Build()],
@@ -33,6 +38,9 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
             { Shortlists.IsOpen: true } => [Keys(
                 (glyphs.Left + " " + glyphs.Right, "lists"), ("Del", "take off"), ("x", "to a file"), ("r", "replacements"),
                 ("b", "cost over boards"), ("Esc", "back"))],
+            { Kept: { IsOpen: true, Comparison.IsOpen: true } } => [Keys(
+                (glyphs.Left + " " + glyphs.Right, "others"), (UpDown, "scroll"), ("Esc", "what is kept"), ("?", "keys"))],
+            { Kept.IsOpen: true } => [Keys(KeptKeys)],
             { Place: Place.Sentence, Wanted.Typed: not null } => [Value(("Enter", "keep"), ("Esc", "as it was"))],
             { Place: Place.Sentence } => [Value(("Tab", "next"), ("Esc", model.IsReading ? "circuit" : "list"))],
             { Place: Place.Circuit } => [Keys(
@@ -40,11 +48,22 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
                 ("e", "edit"), ("?", "keys"))],
             { List.Chosen: null } => [Keys([("e", "edit the wanted"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
             _ => [Keys([
-                (UpDown, "choose"), ("Enter", "open"), ("s", "to a list"), ("e", "edit"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
+                (UpDown, "choose"), ("Enter", "open"), ("s", "to a list"), .. Kept, ("e", "edit"), .. Catalogue, ("?", "keys"),
+                ("q", "quit")])],
         };
     }
 
     private (string, string)[] Catalogue => model.Parts is null ? [] : [("c", "catalogue")];
+
+    private (string, string)[] Kept => model.Kept.CanKeep ? [("w", "kept")] : [];
+
+    private (string, string)[] KeptKeys => model.Kept.Chosen.Kept is null
+        ? [("n", "keep it"), ("Space", "mark"), ("d", "compare"), (UpDown, "choose"), ("?", "keys"), ("Esc", "back")]
+        :
+        [
+            ("n", "rename"), ("c", "copy"), ("Del", "away"), ("Space", "mark"), ("d", "compare"), ("Enter", "take"),
+            ("Esc", "back"),
+        ];
 
     private string UpDown => glyphs.Up + " " + glyphs.Down;
 

@@ -23,6 +23,7 @@ public static class KeysPage
         Key("Enter", "open the circuit: drawing, parts, error, figures, reasons");
         Key("s", "put the circuit on a list; so in a circuit, too");
         Key("l", "the lists: what changed since, and writing them to files");
+        Key("w", "what is kept: requirements by name, to take one, copy it, or put some side by side");
         Key("e or Tab", "edit the wanted sentence; so does " + glyphs.Up + " on the first circuit");
         Key("c", "the catalogue: its parts, and the import of a list");
         Key("?", "this page");
@@ -55,6 +56,12 @@ public static class KeysPage
         Key("b", "its cost over 1 to 10 000 boards, where it turns, and the best candidate for each number");
         Key("x", "write it to a file: .csv and .md to order from, .html to print");
         Key("Del Del", "take the candidate off");
+        Key("Esc", "back");
+        Head("In what is kept");
+        Key("Enter", "make it the wanted sentence; one that is not kept goes only when Enter is pressed twice");
+        Key("n c", "keep the sentence under a name, or call a kept one otherwise; keep a copy of it");
+        Key("Space d", "mark some; put the marked ones side by side: what differs, and the best circuit of each");
+        Key("Del Del", "take a kept one away");
         Key("Esc", "back");
         Head("Cautions");
         Text("The figures come from a model and from the parts' stated data: measure the start-up margin of the first board. " +

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using PartPick.Requirements;
 using PartPick.Selection;
 
 namespace PartPick.Screens;
@@ -38,8 +39,7 @@ public sealed class MainModel
         Notice = notice;
         _waits = waits;
         _reading = new Reading(List);
-        Wanted = new SentenceModel(requirement, glyphs, currency);
-        Wanted.Changed += Rank;
+        Wanted = SentenceOf(requirement, currency);
         _ranking.Answered += Take;
         _ranking.Failed += problem => Say($"! {problem}");
         Parts = parts;
@@ -64,13 +64,16 @@ public sealed class MainModel
     public PartsModel? Parts { get; }
 
     /// <summary>The sentence.</summary>
-    public SentenceModel Wanted { get; }
+    public SentenceModel Wanted { get; private set; }
 
     /// <summary>The list.</summary>
     public CandidateList List { get; } = new();
 
     /// <summary>The lists of candidates.</summary>
     internal ShortlistModel Shortlists { get; private set; } = new();
+
+    /// <summary>The kept requirements.</summary>
+    internal KeptModel Kept { get; private set; } = new();
 
     /// <summary>Where the keys go.</summary>
     public Place Place { get; private set; }
@@ -83,6 +86,12 @@ public sealed class MainModel
 
     /// <summary>Whether a circuit is open, though its page may be away while the sentence is edited.</summary>
     public bool IsReading => _reading.IsOpen;
+
+    /// <summary>Whether the open circuit stays in sight, where there is room, while the sentence is edited.</summary>
+    internal bool KeepsReading => Place == Place.Sentence && _reading.IsThere;
+
+    /// <summary>Whether the keys go to the list, with nothing open beside it.</summary>
+    internal bool IsInList => Place == Place.List && !ShowsKeys && !Shortlists.IsOpen && !Kept.IsOpen;
 
     /// <summary>Whether the list answers an older requirement.</summary>
     public bool IsStale { get; private set; }
@@ -105,8 +114,9 @@ public sealed class MainModel
     /// <summary>Ends the ranking, and what is being looked for.</summary>
     public void Stop()
     {
-        _ranking.Stop();
+        Kept.Stop();
         Shortlists.Stop();
+        _ranking.Stop();
     }
 
     /// <summary>Ranks again, as after the parts have changed.</summary>
@@ -118,6 +128,7 @@ public sealed class MainModel
     {
         ReadsParts = false;
         Wanted.Currency = currency;
+        Shortlists.Aside?.TryAgain();
         Redraw?.Invoke();
     }
 
@@ -144,7 +155,7 @@ public sealed class MainModel
             return;
         }
 
-        if (Shortlists.Press(key, out string? notice))
+        if (Shortlists.Press(key, out string? notice) || Kept.Press(key, out notice))
         {
             Notice = notice;
             return;
@@ -174,6 +185,40 @@ public sealed class MainModel
     {
         Shortlists = new ShortlistModel(desk, work, _glyphs.IsAscii);
         Shortlists.Redraw += () => Redraw?.Invoke();
+        Shortlists.Said += Say;
+    }
+
+    /// <summary>Lets requirements be kept; without it none are.</summary>
+    /// <param name="store">Where they are kept.</param>
+    /// <param name="work">Does what takes long.</param>
+    /// <param name="service">What ranks those that are compared.</param>
+    public void KeepWantedAt(KeptRequirementStore store, ScreenWork work, IRankingService service)
+    {
+        Kept = new KeptModel(store, work, service);
+        if (List.Result is { } result)
+        {
+            Kept.Figures.Take(result);
+        }
+
+        Kept.Changed += said =>
+        {
+            Notice = said ?? Notice;
+            Redraw?.Invoke();
+        };
+        Kept.Named += name => Wanted.Rename(name);
+        Kept.Taken += Begin;
+        Kept.Comparison!.Ranked += TakeInstead;
+        Kept.Comparison.Ranks += ranks =>
+        {
+            if (ranks)
+            {
+                PutOffRanking();
+            }
+            else
+            {
+                GoOnRanking();
+            }
+        };
     }
 
     /// <summary>The screen as lines, each as wide as the screen.</summary>
@@ -238,13 +283,56 @@ public sealed class MainModel
         }
     }
 
-    // A ranking takes all the machine there is; it waits while the catalogue is open.
     private void EnterParts()
     {
         Place = Place.Parts;
-        _putOff = _ranking.IsRunning;
-        _ranking.Stop();
+        PutOffRanking();
         Parts!.Enter();
+    }
+
+    // A ranking takes all the machine there is; it waits while the catalogue is open or others are compared.
+    private void PutOffRanking()
+    {
+        _putOff |= _ranking.IsRunning;
+        _ranking.Stop();
+    }
+
+    private void GoOnRanking()
+    {
+        if (_putOff)
+        {
+            _putOff = false;
+            _ranking.Ask(Wanted.Current, TimeSpan.Zero);
+        }
+    }
+
+    // What was ranked for a comparison may be what the list was waiting for.
+    private void TakeInstead(RankingResult result)
+    {
+        if (_putOff && RankedFigures.AreSame(result.Requirement, Wanted.Current))
+        {
+            _putOff = false;
+            Take(result);
+        }
+    }
+
+    // Another requirement becomes the sentence; a circuit that was open belongs to the one before.
+    private void Begin(Requirement requirement)
+    {
+        Wanted.Changed -= Rank;
+        Wanted = SentenceOf(requirement, Wanted.Currency);
+        _reading.Close();
+        Place = Place.List;
+        _putOff = false;
+        IsStale = List.Result is not null;
+        _ranking.Ask(requirement, TimeSpan.Zero);
+    }
+
+    private SentenceModel SentenceOf(Requirement requirement, string currency)
+    {
+        var sentence = new SentenceModel(requirement, _glyphs, currency);
+        sentence.Changed += Rank;
+        return sentence;
     }
 
     // The ranking that was put off goes on where the parts are the same; else it waits for the new ones.
@@ -253,15 +341,15 @@ public sealed class MainModel
         Place = _reading.IsThere ? Place.Circuit : Place.List;
         if (Parts!.HasChanged)
         {
-            Parts.HasChanged = false;
+            (Parts.HasChanged, _putOff) = (false, false);
+            Kept.Figures.Clear();
+            Shortlists.Aside?.Refresh();
             PartsChanged?.Invoke();
         }
-        else if (_putOff)
+        else
         {
-            RankAgain();
+            GoOnRanking();
         }
-
-        _putOff = false;
     }
 
     private void LeaveSentence()
@@ -317,7 +405,10 @@ public sealed class MainModel
                 Shortlists.Ask(chosen, result.Requirement);
                 break;
             case { Name: KeyName.Letter, Letter: 'l' }:
-                Notice = Shortlists.Open();
+                Shortlists.Open();
+                break;
+            case { Name: KeyName.Letter, Letter: 'w' }:
+                Kept.Open(Wanted.Accepted);
                 break;
             case { Name: KeyName.Letter, Letter: 'q' }:
                 IsDone = true;
@@ -344,6 +435,7 @@ public sealed class MainModel
     {
         IsStale = false;
         List.Show(result);
+        Kept.Figures.Take(result);
         if (Place == Place.Circuit && !_reading.IsThere)
         {
             Place = Place.List;

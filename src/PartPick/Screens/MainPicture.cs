@@ -32,13 +32,51 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
             model.Wanted.Draw(width - 1, model.Place == Place.Sentence && !model.ShowsKeys, Math.Max(3, height / 4));
         ImmutableArray<Line> foot = new Foot(model, glyphs, width).Draw();
         int room = height - sentence.Length - foot.Length;
-        ImmutableArray<Line> body = model.ShowsKeys ? KeysBody(room)
-            : model.Shortlists.IsOpen ? ShortlistDrawing.Draw(model.Shortlists.Page, width, room, glyphs)
-            : model.Place == Place.Circuit && model.List.Chosen is { } candidate ? CircuitBody(candidate, room)
-            : width >= ListShape.Full + 2 + Schematic.Width ? WideBody(room)
-            : NarrowBody(room);
-        return [.. Filled([.. sentence, .. body], height - foot.Length), .. foot.Select(line => line.Fit(width))];
+        return [.. Filled([.. sentence, .. Body(room)], height - foot.Length), .. foot.Select(line => line.Fit(width))];
     }
+
+    // What is asked for stands beside the list where there is room, and in its place where there is none.
+    private ImmutableArray<Line> Body(int room)
+    {
+        if (model.ShowsKeys)
+        {
+            return model.Place == Place.Parts
+                ? KeysBody(width, room)
+                : Beside(ScreenColumns.WithPage(width), page => KeysBody(page, room), room);
+        }
+
+        if (model.Shortlists.IsOpen)
+        {
+            ShortlistPage list = model.Shortlists.Page;
+            bool isTable = list.Replacements is not null || list.Quantity is not null;
+            return Beside(
+                isTable ? ScreenColumns.WithTable(width) : ScreenColumns.WithPage(width),
+                page => ShortlistDrawing.Draw(list, page, room, glyphs), room);
+        }
+
+        if (model.Kept.IsOpen)
+        {
+            return Beside(
+                ScreenColumns.WithPage(width), page => KeptDrawing.Draw(model.Kept, model.Wanted.Currency, page, room, glyphs), room);
+        }
+
+        ScreenColumns reading = ScreenColumns.WithCircuit(width);
+        bool reads = model.Place == Place.Circuit || (reading.List > 0 && model.KeepsReading);
+        return reads && model.List.Chosen is { } candidate
+            ? Columns(reading, CircuitBody(candidate, reading.Page, room), room)
+            : ScreenColumns.AtAGlance(width) is { Page: > 0 } glance ? Columns(glance, Glance(glance.Page), room)
+            : NarrowBody(room);
+    }
+
+    private ImmutableArray<Line> Beside(ScreenColumns columns, Func<int, ImmutableArray<Line>> page, int room) =>
+        Columns(columns, page(columns.Page), room);
+
+    private ImmutableArray<Line> Columns(ScreenColumns columns, ImmutableArray<Line> page, int room) => ScreenColumns.Join(
+    [
+        (columns.List > 0 ? ListBody(columns.List, room) : [], columns.List),
+        (page, columns.Page),
+        (columns.Kept > 0 ? ListAsideDrawing.Draw(model.Shortlists.Aside, columns.Kept, room, glyphs) : [], columns.Kept),
+    ], room, glyphs);
 
     private ImmutableArray<Line> NarrowBody(int room)
     {
@@ -63,30 +101,13 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
         ];
     }
 
-    private ImmutableArray<Line> WideBody(int room)
-    {
-        const int left = ListShape.Full + 1;
-        int right = width - left - 1;
-        ImmutableArray<Line> list = ListBody(left, room);
-        ImmutableArray<Line> pane = model.List.Chosen is { } candidate
-            ?
-            [
-                Rules.Draw(CircuitPane.ShortTitle(candidate), "", right, glyphs),
-                .. CircuitPane.Beside(candidate, model.List.Result!.Requirement, right, glyphs),
-            ]
-            : [Rules.Draw("", "", right, glyphs)];
-        var bar = new Line([new Span(glyphs.Vertical.ToString(), Tone.Quiet)]);
-        var lines = ImmutableArray.CreateBuilder<Line>();
-        for (int i = 0; i < room; i++)
-        {
-            Line middle = i == 0 ? new Line([new Span(glyphs.TeeDown.ToString(), Tone.Quiet)]) : bar;
-            lines.Add((i < list.Length ? list[i] : Line.Empty)
-                .Beside(left, middle)
-                .Beside(left + 1, i < pane.Length ? pane[i] : Line.Empty));
-        }
-
-        return lines.ToImmutable();
-    }
+    private ImmutableArray<Line> Glance(int page) => model.List.Chosen is { } candidate
+        ?
+        [
+            Rules.Draw(CircuitPane.ShortTitle(candidate), "", page, glyphs),
+            .. CircuitPane.Beside(candidate, model.List.Result!.Requirement, page, glyphs),
+        ]
+        : [Rules.Draw("", "", page, glyphs)];
 
     private ImmutableArray<Line> ListBody(int listWidth, int room)
     {
@@ -100,7 +121,7 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
 
         ImmutableArray<Line> below = why.Length > 0 && room - 2 >= LeastRows + 1 + why.Length ? [Line.Empty, .. why] : [];
         ImmutableArray<Line> rows =
-            list.Draw(room - 2 - below.Length, model.Place == Place.List, model.IsStale, glyphs, listWidth);
+            list.Draw(room - 2 - below.Length, model.IsInList, model.IsStale, glyphs, listWidth);
         return [AnswerRule(listWidth), list.Heading(glyphs, listWidth), .. rows, .. below];
     }
 
@@ -109,25 +130,29 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
         CandidateList list = model.List;
         string order = list.Candidates.IsEmpty ? ""
             : FormattableString.Invariant($"{list.At + 1} of {list.Candidates.Length}, {(list.ShowsMisses ? "nearest" : "best")} first");
-        return Rules.Draw(
-            AnswerWords.Of(list.Result, model.IsRanking, model.IsStale, model.ReadsParts), order, ruleWidth, glyphs,
-            model.IsRanking ? Tone.Accent : Tone.Strong);
+        string words = AnswerWords.Of(list.Result, model.IsRanking, model.IsStale, model.ReadsParts);
+        if (words.Length + 4 > ruleWidth)
+        {
+            words = words.Split(',', ';')[0];
+        }
+
+        return Rules.Draw(words, order, ruleWidth, glyphs, model.IsRanking ? Tone.Accent : Tone.Strong);
     }
 
-    private ImmutableArray<Line> CircuitBody(Candidate candidate, int room)
+    private ImmutableArray<Line> CircuitBody(Candidate candidate, int page, int room)
     {
-        ImmutableArray<Line> page = CircuitPage.Draw(candidate, model.List.Result!, width, glyphs);
-        ImmutableArray<Line> shown = model.CircuitScroll.Cut(page, room - 1);
+        ImmutableArray<Line> shown =
+            model.CircuitScroll.Cut(CircuitPage.Draw(candidate, model.List.Result!, page, glyphs), room - 1);
         string number = FormattableString.Invariant($"{model.List.At + 1} of {model.List.Candidates.Length}");
         string more = model.CircuitScroll.HasMore ? number + ", more below" : number;
         string age = model.IsStale ? "for the wanted before, " : model.IsRanking ? "computing, " : "";
-        return [Rules.Draw(CircuitPane.ShortTitle(candidate), age + more, width, glyphs), .. shown];
+        return [Rules.Draw(CircuitPane.ShortTitle(candidate), age + more, page, glyphs), .. shown];
     }
 
-    private ImmutableArray<Line> KeysBody(int room)
+    private ImmutableArray<Line> KeysBody(int page, int room)
     {
-        ImmutableArray<Line> shown = model.KeysScroll.Cut(KeysPage.Draw(width, glyphs, model.Place == Place.Parts), room - 1);
-        return [Rules.Draw("Keys", model.KeysScroll.HasMore ? "more below" : "", width, glyphs), .. shown];
+        ImmutableArray<Line> shown = model.KeysScroll.Cut(KeysPage.Draw(page, glyphs, model.Place == Place.Parts), room - 1);
+        return [Rules.Draw("Keys", model.KeysScroll.HasMore ? "more below" : "", page, glyphs), .. shown];
     }
 
     private ImmutableArray<Line> Filled(ImmutableArray<Line> lines, int rows) =>

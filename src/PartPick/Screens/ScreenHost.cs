@@ -1,4 +1,5 @@
 using PartPick.Catalog;
+using PartPick.Requirements;
 using PartPick.Selection;
 using PartPick.Values;
 
@@ -8,6 +9,7 @@ namespace PartPick.Screens;
 public static class ScreenHost
 {
     private static readonly TimeSpan ReadingTime = TimeSpan.FromMilliseconds(300);
+    private static readonly TimeSpan WritingTime = TimeSpan.FromSeconds(60);
 
     private const string WithoutScreens = "the commands work without one (partpick --help)";
 
@@ -66,15 +68,19 @@ public static class ScreenHost
         }
 
         string? notice = !start.IsOk ? "! " + start.Problem
-            : start.Value is null ? "Press e and say what is wanted; ? shows all keys."
+            : start.Value is null ? "A river-level logger, as an example: press e to change it, ? for all keys."
             : null;
         var run = new TerminalRun(catalogPath, ranking, traits, requirement => keeper.Keep(requirement), opening);
-        Requirement end = run.Show(loop, start.ValueOr(null) ?? First, notice, new CatalogDesk(catalogPath));
+        Requirement end = run.Show(
+            loop, start.ValueOr(null) ?? FirstRequirement.RiverLogger, notice, new CatalogDesk(catalogPath),
+            new KeptRequirementStore(catalogPath));
+        if (!run.Finish(WritingTime))
+        {
+            return Fail(ExitStatus.NoCatalog, "what was put on a list at the end was not written in time; look at the list");
+        }
+
         return keeper.Keep(end) is { } problem ? Fail(ExitStatus.NoCatalog, problem.ToString()) : ExitStatus.Done;
     }
-
-    /// <summary>The sentence of the very first time.</summary>
-    private static Requirement First => new() { OutputHz = 1000, Waveform = Waveform.Square };
 
     private static Result<Requirement?> ReadFile(string path)
     {

@@ -1,4 +1,5 @@
 using System.Collections.Concurrent;
+using PartPick.Requirements;
 using PartPick.Screens;
 using PartPick.Selection;
 using Terminal.Gui.App;
@@ -50,6 +51,19 @@ internal sealed class Bench : IDisposable
 
     /// <summary>Keeps lists of candidates in a catalogue.</summary>
     public void KeepLists(string catalogue) => Model.KeepListsAt(new CatalogDesk(catalogue), _work);
+
+    /// <summary>Keeps requirements beside a catalogue.</summary>
+    public void KeepWanted(string catalogue) => Model.KeepWantedAt(new KeptRequirementStore(catalogue), _work, Ranking);
+
+    /// <summary>Presses keys, and after each waits until what it began in the background is done.</summary>
+    public void Do(params Key[] keys)
+    {
+        foreach (Key key in keys)
+        {
+            Press(key);
+            Settle();
+        }
+    }
 
     public void Press(params Key[] keys)
     {

@@ -137,13 +137,13 @@ public sealed class ListStudyTests
     {
         var bench = new Bench(width, height);
         bench.KeepLists(_db);
-        Assert.True(new CatalogDesk(_db).Put("default", Fit(), SampleRanking.Wanted, null).IsOk);
+        Assert.True(new CatalogDesk(_db).Put("default", Fit(), SampleRanking.Wanted, null, TestContext.Current.CancellationToken).IsOk);
         bench.Press(new Key('l'));
         bench.Settle();
         return bench;
     }
 
-    private static CandidateParts Fit()
+    internal static CandidateParts Fit()
     {
         var parts = PartsCatalog.BuiltIn();
         return new CandidateParts
@@ -158,7 +158,7 @@ public sealed class ListStudyTests
         };
     }
 
-    private ListCircuit Circuit() => new CatalogDesk(_db).Circuit("default", 1).Value;
+    private ListCircuit Circuit() => new CatalogDesk(_db).Circuit("default", 1, TestContext.Current.CancellationToken).Value;
 
     private List<BoardLine> Lines() => [.. BoardLine.Of(Circuit().Chosen.Board)];
 

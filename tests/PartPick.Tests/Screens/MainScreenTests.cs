@@ -162,7 +162,7 @@ public class MainScreenTests
     [Fact]
     public void A_question_mark_shows_keys_and_cautions_and_escape_leaves_them()
     {
-        using var bench = new Bench(height: 60);
+        using var bench = new Bench(height: 120);
         bench.Press(new Key('?'));
         Assert.Contains("licence", bench.Text, StringComparison.Ordinal);
         Assert.Contains("qualified", bench.Text, StringComparison.Ordinal);

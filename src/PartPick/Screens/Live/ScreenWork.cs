@@ -32,7 +32,10 @@ public sealed class ScreenWork(Action<Action> post)
     {
         try
         {
-            T result = await Task.Run(() => work(cancellation), CancellationToken.None).ConfigureAwait(false);
+            // A ranking keeps the pool's threads busy; what a key asked for does not wait for one of them.
+            T result = await Task.Factory.StartNew(
+                () => work(cancellation), CancellationToken.None, TaskCreationOptions.LongRunning, TaskScheduler.Default)
+                .ConfigureAwait(false);
             post(() => take(result));
         }
         catch (OperationCanceledException)

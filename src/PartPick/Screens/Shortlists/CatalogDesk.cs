@@ -18,10 +18,25 @@ public sealed class CatalogDesk(string catalogPath) : IShortlistDesk
         ShortlistStore.ReadAll(catalogPath).Map<ImmutableArray<string>>(lists => [.. lists.Select(list => list.Name)]);
 
     /// <inheritdoc/>
-    public Result<ImmutableArray<ShortlistReview>> Read(string list) => CatalogStore.Load(catalogPath).Then(catalog => Read(list, catalog));
+    public Result<ListGlance> Glance(string list) => ShortlistStore.ReadAll(catalogPath).Then(lists =>
+    {
+        if ((lists.FirstOrDefault(each => each.Name == list) ?? lists.FirstOrDefault()) is not { } found)
+        {
+            return Result.Ok(ListGlance.None);
+        }
+
+        IEnumerable<string> ids = found.Entries.SelectMany(entry => entry.Parts).Select(part => part.Id);
+        return CatalogReading.FindAll(catalogPath, ids).Map(today => new ListGlance(
+            found.Name, lists.Length, [.. found.Entries.Select(entry => ShortlistGlance.Of(entry, today)).OfType<ShortlistGlance>()]));
+    });
 
     /// <inheritdoc/>
-    public Result<ListCircuit> Circuit(string list, int number) => CatalogStore.Load(catalogPath).Then(catalog =>
+    public Result<ImmutableArray<ShortlistReview>> Read(string list, CancellationToken cancellation) =>
+        CatalogReading.All(catalogPath, cancellation).Then(catalog => Read(list, catalog));
+
+    /// <inheritdoc/>
+    public Result<ListCircuit> Circuit(string list, int number, CancellationToken cancellation) => CatalogReading.All(
+        catalogPath, cancellation).Then(catalog =>
         ShortlistStore.Read(catalogPath, list).Then(found => found.Entries.FirstOrDefault(entry => entry.Number == number) is { } entry
             ? new ShortlistReviewer(catalog).Review(list, entry).Then(review =>
                 ChosenCircuit.Of(review, catalog).Map(chosen => new ListCircuit(review, chosen, catalog)))
@@ -29,37 +44,44 @@ public sealed class CatalogDesk(string catalogPath) : IShortlistDesk
                 "list", FormattableString.Invariant($"candidate {number} is not on it any more"), "a candidate that is on the list")));
 
     /// <inheritdoc/>
-    public Result<ShortlistEntry> Put(string list, CandidateParts choice, Requirement requirement, string? note) =>
-        CatalogStore.Load(catalogPath).Then(catalog =>
+    public Result<ShortlistEntry> Put(
+        string list, CandidateParts choice, Requirement requirement, string? note, CancellationToken cancellation) =>
+        CatalogReading.All(catalogPath, cancellation).Then(catalog =>
         {
             // The parts that are shown may be older than the catalogue.
             return ChosenParts.Of(choice, new SupportParts(null, null, null)).In(catalog) is { } now
                 ? new ShortlistReviewer(catalog).Make(now.Choice, null, requirement, note, Today)
                 : Result.Fail<ShortlistEntry>("circuit", "one of its parts is not in the catalogue any more", "a circuit of today's parts");
-        }).Then(entry => ShortlistStore.Add(catalogPath, list, entry));
+        }).Then(entry =>
+        {
+            cancellation.ThrowIfCancellationRequested();
+            return ShortlistStore.Add(catalogPath, list, entry);
+        });
 
     /// <inheritdoc/>
     public Problem? Remove(string list, int number) => ShortlistStore.Remove(catalogPath, list, number).Problem;
 
     /// <inheritdoc/>
-    public Result<string> Export(string list, string path, bool replace)
+    public Result<string> Export(string list, string path, bool replace, CancellationToken cancellation)
     {
         var target = new ExportTarget(path, replace, "file", catalogPath);
-        return ShortlistExport.Form(target).Then(form => CatalogStore.Load(catalogPath).Then(catalog =>
-            Read(list, catalog).Then(reviews => Export(list, reviews, catalog, target, form))));
+        return ShortlistExport.Form(target).Then(form => CatalogReading.All(catalogPath, cancellation).Then(catalog =>
+            Read(list, catalog).Then(reviews => Export(list, reviews, catalog, target, form, cancellation))));
     }
 
     /// <inheritdoc/>
     public bool IsThere(string path) => File.Exists(path);
 
     private static Result<string> Export(
-        string list, ImmutableArray<ShortlistReview> reviews, PartsCatalog catalog, ExportTarget target, ExportForm form)
+        string list, ImmutableArray<ShortlistReview> reviews, PartsCatalog catalog, ExportTarget target, ExportForm form,
+        CancellationToken cancellation)
     {
         var view = new ShortlistView(list, reviews);
         return ShortlistExport.Purchase(view, catalog, new PurchaseOptions()).Then(purchase =>
         {
             string text = ShortlistExport.Text(view, purchase, form, new CsvStyle(), Today);
             string total = $"{new PurchaseCells(purchase).Amount(purchase.Total)} {purchase.Currency}";
+            cancellation.ThrowIfCancellationRequested();
             return ShortlistExport.Save(target, text, mark: false) is { } problem
                 ? Result.Fail<string>(problem)
                 : Result.Ok(FormattableString.Invariant($"{purchase.Lines.Length} lines, {total}, written to {target.Path}"));

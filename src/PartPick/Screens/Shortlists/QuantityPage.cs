@@ -43,7 +43,8 @@ internal sealed class QuantityPage(IShortlistDesk desk, ScreenWork work, bool as
         (IsOpen, View, Problem) = (true, null, null);
         Scroll.Reset();
         _search.Start(
-            _ => desk.Circuit(list, number).Map(circuit => (Circuit: circuit, Curve: CostCurve.Of(circuit.Chosen.Board, MostBuilds))),
+            stop => desk.Circuit(list, number, stop)
+                .Map(circuit => (Circuit: circuit, Curve: CostCurve.Of(circuit.Chosen.Board, MostBuilds))),
             read =>
             {
                 Problem = read.Problem;

@@ -51,7 +51,7 @@ internal sealed class ReplacementsPage(IShortlistDesk desk, ScreenWork work)
     {
         (IsOpen, Circuit, Lines, Part, At, Problem) = (true, null, [], 0, 0, null);
         _found.Clear();
-        _search.Start(_ => desk.Circuit(list, number), Take);
+        _search.Start(stop => desk.Circuit(list, number, stop), Take);
     }
 
     /// <summary>Closes it, and ends what is being looked for.</summary>

@@ -28,6 +28,11 @@ internal static class ShortlistDrawing
             return QuantityDrawing.Draw(quantity, width, height, glyphs);
         }
 
+        if (page is { IsReading: true, Candidates.IsEmpty: true })
+        {
+            return [Rules.Draw($"List {page.Name}: reading its parts", "Esc stops it", width, glyphs, Tone.Accent)];
+        }
+
         int changed = page.Candidates.Count(each => each.IsChanged), unfit = page.Candidates.Count(each => !each.IsFit);
         string noun = page.Candidates.Length == 1 ? "candidate" : "candidates";
         string counts = FormattableString.Invariant($"{page.Candidates.Length} {noun}, {changed} changed, {unfit} unfit");
@@ -36,7 +41,7 @@ internal static class ShortlistDrawing
         int first = Math.Clamp(page.At - rows + 1, 0, Math.Max(0, page.Candidates.Length - rows));
         return
         [
-            Rules.Draw($"List {page.Name}: {counts}", page.Position, width, glyphs, Tone.Strong),
+            Rules.Draw($"List {page.Name}: {counts}", page.IsReading ? "at work" : page.Position, width, glyphs, Tone.Strong),
             Heading(page, width, glyphs),
             .. page.Candidates.Skip(first).Take(rows).Select((each, i) => Row(each, first + i == page.At, width, glyphs)),
             Rules.Draw(page.Chosen is { } chosen ? ReviewWords.Name(chosen) : "", "", width, glyphs),

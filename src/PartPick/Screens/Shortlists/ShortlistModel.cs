@@ -1,23 +1,19 @@
-using System.Globalization;
 using PartPick.Catalog;
 using PartPick.Selection;
-using PartPick.Values;
 
 namespace PartPick.Screens;
 
 /// <summary>Putting a candidate on a list, and the page of a list. Takes the keys while it asks or is open.</summary>
 internal sealed class ShortlistModel
 {
-    private readonly IShortlistDesk? _desk;
     private readonly ReplacementsPage? _replacements;
     private readonly QuantityPage? _quantity;
     private readonly ShortlistPage _page;
+    private readonly ListPutting? _putting;
     private string _list = ShortlistName.Usual;
-    private AskedFields _fields = new();
-    private (Candidate Candidate, Requirement Requirement)? _asked;
 
     /// <summary>Without any lists.</summary>
-    public ShortlistModel() => _page = new ShortlistPage(null, null, null);
+    public ShortlistModel() => _page = new ShortlistPage(null, null, null, null);
 
     /// <summary>With lists.</summary>
     /// <param name="desk">Where they are kept.</param>
@@ -25,22 +21,40 @@ internal sealed class ShortlistModel
     /// <param name="ascii">Whether only ASCII may be used.</param>
     public ShortlistModel(IShortlistDesk desk, ScreenWork work, bool ascii)
     {
-        _desk = desk;
         _replacements = new ReplacementsPage(desk, work);
         _quantity = new QuantityPage(desk, work, ascii);
+        _page = new ShortlistPage(desk, new LatestWork(work), _replacements, _quantity);
+        _putting = new ListPutting(desk, work);
+        Aside = new ListAside(desk, new LatestWork(work));
         _replacements.Changed += () => Redraw?.Invoke();
         _quantity.Changed += () => Redraw?.Invoke();
-        _page = new ShortlistPage(desk, _replacements, _quantity);
+        Aside.Changed += () => Redraw?.Invoke();
+        _page.Changed += said =>
+        {
+            Aside.Show(_page.IsOpen ? _page.Name : _list);
+            Say(said);
+        };
+        _putting.Put += (list, said) =>
+        {
+            _list = list;
+            Aside.Show(list);
+            _page.Refresh(list);
+            Say(said);
+        };
+        _putting.Failed += Say;
     }
 
     /// <summary>Raised when the screen looks different without a key having been pressed.</summary>
     public event Action? Redraw;
 
+    /// <summary>Raised with something to say that no key was pressed for.</summary>
+    public event Action<string>? Said;
+
     /// <summary>The fields that are asked for; null where nothing is.</summary>
-    public AskedFields? Asking => _asked is null ? _page.Asking : _fields;
+    public AskedFields? Asking => _putting?.Asking ?? _page.Asking;
 
     /// <summary>What Enter does while something is asked.</summary>
-    public string Enter => _asked is null ? "write" : "put it on the list";
+    public string Enter => _putting?.Asking is null ? "write" : "put it on the list";
 
     /// <summary>Whether the page of a list is open.</summary>
     public bool IsOpen => _page.IsOpen;
@@ -48,26 +62,28 @@ internal sealed class ShortlistModel
     /// <summary>The page.</summary>
     public ShortlistPage Page => _page;
 
+    /// <summary>The list at a glance; null without lists.</summary>
+    public ListAside? Aside { get; }
+
     /// <summary>Asks on which list a candidate goes, and for how many boards.</summary>
-    public void Ask(Candidate candidate, Requirement requirement)
-    {
-        if (_desk is not null)
-        {
-            _asked = (candidate, requirement);
-            _fields = new AskedFields(
-                ("list", _list, 60), ("boards", requirement.Builds.ToString(CultureInfo.InvariantCulture), 10), ("note", "", 200));
-        }
-    }
+    public void Ask(Candidate candidate, Requirement requirement) => _putting?.Ask(candidate, requirement, _list);
 
     /// <summary>Opens the page of the list that was last used.</summary>
-    /// <returns>A line to show; null for none.</returns>
-    public string? Open() => _desk is null ? null : _page.Open(_list);
+    public void Open()
+    {
+        if (_putting is not null)
+        {
+            _page.Open(_list);
+        }
+    }
 
     /// <summary>Ends what is being looked for.</summary>
     public void Stop()
     {
         _replacements?.Close();
         _quantity?.Close();
+        _page.Stop();
+        Aside?.Stop();
     }
 
     /// <summary>Takes a key, if something is asked or the page is open.</summary>
@@ -77,55 +93,16 @@ internal sealed class ShortlistModel
     public bool Press(KeyPress key, out string? notice)
     {
         notice = null;
-        if (_asked is { } asked)
-        {
-            notice = PressInFields(key, asked.Candidate, asked.Requirement);
-            return true;
-        }
-
-        return _page.IsOpen && _page.Press(key, out notice);
+        return (_putting is not null && _putting.Press(key, IsOpen, out notice)) || (_page.IsOpen && _page.Press(key, out notice));
     }
 
-    private string? PressInFields(KeyPress key, Candidate candidate, Requirement requirement)
+    private void Say(string? said)
     {
-        switch (key.Name)
+        if (said is not null)
         {
-            case KeyName.Escape:
-                _asked = null;
-                return null;
-            case KeyName.Enter:
-                return Put(candidate, requirement);
-            default:
-                _fields.Press(key);
-                return null;
+            Said?.Invoke(said);
         }
+
+        Redraw?.Invoke();
     }
-
-    private string? Put(Candidate candidate, Requirement requirement)
-    {
-        Result<string> name = ShortlistName.Read(_fields.Fields[0].Text, "list");
-        Result<int> boards = Boards(_fields.Fields[1].Text);
-        if (!name.IsOk || !boards.IsOk)
-        {
-            _fields.Problem = (name.Problem ?? boards.Problem)!.ToString();
-            return null;
-        }
-
-        string note = _fields.Fields[2].Text.Trim();
-        Result<ShortlistEntry> put = _desk!.Put(
-            name.Value, candidate.Choice, requirement with { Builds = boards.Value }, note.Length == 0 ? null : note);
-        if (!put.IsOk)
-        {
-            _fields.Problem = put.Problem.ToString();
-            return null;
-        }
-
-        _asked = null;
-        _list = name.Value;
-        return FormattableString.Invariant($"Candidate {put.Value.Number} of the list {name.Value}; l shows the list.");
-    }
-
-    private static Result<int> Boards(string text) => ValueText.Parse(text, Dimension.Count, "boards").Then(count => count >= 1
-        ? Result.Ok((int)count)
-        : Result.Fail<int>("boards", "is zero", "a whole number from 1"));
 }

@@ -4,18 +4,29 @@ using PartPick.Values;
 
 namespace PartPick.Screens;
 
-/// <summary>The page of one list: its candidates, which of them is chosen, and writing it to a file.</summary>
+/// <summary>
+/// The page of one list: its candidates, which of them is chosen, and writing it to a file. What the disk is needed for is done in
+/// the background.
+/// </summary>
 /// <param name="desk">Where the lists are kept; null where there are none.</param>
+/// <param name="reading">Reads, takes off and writes.</param>
 /// <param name="replacements">What may replace the parts of a candidate; null where there are no lists.</param>
 /// <param name="quantity">What a candidate costs over the number of boards; null where there are no lists.</param>
-internal sealed class ShortlistPage(IShortlistDesk? desk, ReplacementsPage? replacements, QuantityPage? quantity)
+internal sealed class ShortlistPage(
+    IShortlistDesk? desk, LatestWork? reading, ReplacementsPage? replacements, QuantityPage? quantity)
 {
     private ImmutableArray<string> _names = [];
     private bool _replaces;
     private int? _leaving;
 
+    /// <summary>Raised when it looks different without a key, with a line to show; null for none.</summary>
+    public event Action<string?>? Changed;
+
     /// <summary>Whether it is open.</summary>
     public bool IsOpen { get; private set; }
+
+    /// <summary>Whether it is being read or written.</summary>
+    public bool IsReading => reading is { IsRunning: true };
 
     /// <summary>The name of the list.</summary>
     public string Name { get; private set; } = "";
@@ -29,8 +40,9 @@ internal sealed class ShortlistPage(IShortlistDesk? desk, ReplacementsPage? repl
     /// <summary>The chosen candidate; null where the list is empty.</summary>
     public ShortlistReview? Chosen => Candidates.IsEmpty ? null : Candidates[At];
 
-    /// <summary>Which list of how many.</summary>
-    public string Position => FormattableString.Invariant($"list {_names.IndexOf(Name) + 1} of {_names.Length}");
+    /// <summary>Which list of how many; empty before that is known.</summary>
+    public string Position =>
+        _names.IndexOf(Name) is >= 0 and int at ? FormattableString.Invariant($"list {at + 1} of {_names.Length}") : "";
 
     /// <summary>The file that is asked for; null where none is.</summary>
     public AskedFields? Asking { get; private set; }
@@ -46,24 +58,24 @@ internal sealed class ShortlistPage(IShortlistDesk? desk, ReplacementsPage? repl
 
     /// <summary>Opens it.</summary>
     /// <param name="list">The list to show; where it is not there, the first one.</param>
-    /// <returns>A line to show; null for none.</returns>
-    public string? Open(string list)
+    public void Open(string list)
     {
-        Result<ImmutableArray<string>> names = desk!.Names();
-        if (!names.IsOk)
-        {
-            return names.Problem.ToString();
-        }
-
-        _names = names.Value;
-        if (_names.IsEmpty)
-        {
-            IsOpen = false;
-            return "There is no list yet; s puts the chosen circuit on one.";
-        }
-
-        return Show(_names.Contains(list) ? list : _names[0]);
+        (IsOpen, Name, Candidates) = (true, list, []);
+        Read(null, null);
     }
+
+    /// <summary>Reads it anew where it is open.</summary>
+    /// <param name="list">The list that has changed.</param>
+    public void Refresh(string list)
+    {
+        if (IsOpen && (list == Name || _names.IsEmpty))
+        {
+            Read(null, null);
+        }
+    }
+
+    /// <summary>Ends what is being read.</summary>
+    public void Stop() => reading?.Stop();
 
     /// <summary>Takes a key.</summary>
     /// <param name="key">The key.</param>
@@ -96,7 +108,7 @@ internal sealed class ShortlistPage(IShortlistDesk? desk, ReplacementsPage? repl
             { Name: KeyName.Left } => Turn(-1),
             { Name: KeyName.Right } => Turn(1),
             { Name: KeyName.Delete } => Remove(leaving),
-            { Name: KeyName.Letter, Letter: 'x' } => AskFile(),
+            { Name: KeyName.Letter, Letter: 'x' } when Chosen is not null => AskFile(),
             { Name: KeyName.Letter, Letter: 'r' } => Study(replacements!.Open),
             { Name: KeyName.Letter, Letter: 'b' } => Study(quantity!.Open),
             _ => null,
@@ -105,22 +117,47 @@ internal sealed class ShortlistPage(IShortlistDesk? desk, ReplacementsPage? repl
             || key is not { Name: KeyName.Letter, Letter: '?' or 'q' };
     }
 
-    private string? Show(string list)
+    // Reads the names of all lists and the candidates of this one, after something that is to be done before.
+    private void Read(Func<Problem?>? before, string? done)
     {
-        Result<ImmutableArray<ShortlistReview>> read = desk!.Read(list);
-        if (!read.IsOk)
+        string list = Name;
+        reading!.Start(stop => Look(list, before, stop), look =>
         {
-            return read.Problem.ToString();
+            if (!look.IsOk)
+            {
+                IsOpen = !Candidates.IsEmpty;
+                Changed?.Invoke("! " + look.Problem);
+                return;
+            }
+
+            (_names, string name, Candidates) = look.Value;
+            (At, Name) = (Math.Clamp(At, 0, Math.Max(0, Candidates.Length - 1)), name);
+            Scroll.Reset();
+            IsOpen &= !_names.IsEmpty;
+            Changed?.Invoke(_names.IsEmpty ? "There is no list yet; s puts the chosen circuit on one." : done);
+        });
+    }
+
+    private Result<(ImmutableArray<string> Names, string Name, ImmutableArray<ShortlistReview> Candidates)> Look(
+        string list, Func<Problem?>? before, CancellationToken stop)
+    {
+        if (before?.Invoke() is { } problem)
+        {
+            return Result.Fail<(ImmutableArray<string>, string, ImmutableArray<ShortlistReview>)>(problem);
         }
 
-        (IsOpen, Name, Candidates) = (true, list, read.Value);
-        At = Math.Clamp(At, 0, Candidates.Length - 1);
-        Scroll.Reset();
-        return null;
+        return desk!.Names().Then(names =>
+        {
+            string name = names.IsEmpty || names.Contains(list) ? list : names[0];
+            return names.IsEmpty
+                ? Result.Ok((names, name, ImmutableArray<ShortlistReview>.Empty))
+                : desk.Read(name, stop).Map(candidates => (names, name, candidates));
+        });
     }
 
     private string? Close()
     {
+        Stop();
         IsOpen = false;
         At = 0;
         return null;
@@ -136,8 +173,13 @@ internal sealed class ShortlistPage(IShortlistDesk? desk, ReplacementsPage? repl
     private string? Turn(int step)
     {
         int at = _names.IndexOf(Name) + step;
-        At = at >= 0 && at < _names.Length ? 0 : At;
-        return at >= 0 && at < _names.Length ? Show(_names[at]) : null;
+        if (at >= 0 && at < _names.Length)
+        {
+            At = 0;
+            Open(_names[at]);
+        }
+
+        return null;
     }
 
     private string? Remove(int? leaving)
@@ -154,9 +196,9 @@ internal sealed class ShortlistPage(IShortlistDesk? desk, ReplacementsPage? repl
             return FormattableString.Invariant($"Del once more takes candidate {number} off the list.");
         }
 
-        return desk!.Remove(Name, number) is { } problem
-            ? problem.ToString()
-            : Open(Name) ?? FormattableString.Invariant($"Candidate {number} was taken off.");
+        string list = Name;
+        Read(() => desk!.Remove(list, number), FormattableString.Invariant($"Candidate {number} was taken off."));
+        return null;
     }
 
     private string? Study(Action<string, int> open)
@@ -182,6 +224,7 @@ internal sealed class ShortlistPage(IShortlistDesk? desk, ReplacementsPage? repl
         switch (key.Name)
         {
             case KeyName.Escape:
+                Stop();
                 Asking = null;
                 return null;
             case KeyName.Enter:
@@ -193,24 +236,26 @@ internal sealed class ShortlistPage(IShortlistDesk? desk, ReplacementsPage? repl
         }
     }
 
+    // Whether a file is there is asked in the background too: it may be on a slow disk.
     private string? Write(AskedFields fields)
     {
-        string path = fields.Fields[0].Text.Trim();
-        if (!_replaces && desk!.IsThere(path))
-        {
-            fields.Problem = "It is there already: Enter once more replaces it, another name does not.";
-            _replaces = true;
-            return null;
-        }
+        string path = fields.Fields[0].Text.Trim(), list = Name;
+        bool replaces = _replaces;
+        reading!.Start(
+            stop => !replaces && desk!.IsThere(path) ? null : desk!.Export(list, path, replaces, stop),
+            written =>
+            {
+                if (written is { IsOk: true })
+                {
+                    Asking = null;
+                    Changed?.Invoke(written.Value + ".");
+                    return;
+                }
 
-        Result<string> written = desk!.Export(Name, path, _replaces);
-        if (!written.IsOk)
-        {
-            fields.Problem = written.Problem.ToString();
-            return null;
-        }
-
-        Asking = null;
-        return written.Value + ".";
+                _replaces = written is null;
+                fields.Problem = written?.Problem?.ToString() ?? "It is there already: Enter once more replaces it, another name does not.";
+                Changed?.Invoke(null);
+            });
+        return null;
     }
 }

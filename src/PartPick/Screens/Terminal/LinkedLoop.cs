@@ -27,6 +27,7 @@ internal sealed class LinkedLoop : IScreenLoop
     private readonly IApplication _app;
     private readonly AutoResetEvent _goesOn = new(false);
     private Action? _beforeEnd;
+    private volatile bool _isOver;
 
     /// <summary>Makes everything ready, without touching the terminal.</summary>
     /// <param name="traits">What the terminal can show.</param>
@@ -93,6 +94,7 @@ internal sealed class LinkedLoop : IScreenLoop
             stopped?.Dispose();
             intake.Rest();
             _link.Leave();
+            _isOver = true;
         }
 
         void StopFromOutside(PosixSignalContext context)
@@ -171,6 +173,14 @@ internal sealed class LinkedLoop : IScreenLoop
         context.Cancel = true;
         _beforeEnd?.Invoke();
         Post(_app.RequestStop);
-        _ = Task.Delay(LastMoment).ContinueWith(_ => Environment.Exit(ExitStatus.Fault), TaskScheduler.Default);
+        _ = Task.Delay(LastMoment).ContinueWith(
+            _ =>
+            {
+                if (!_isOver)
+                {
+                    Environment.Exit(ExitStatus.Fault);
+                }
+            },
+            TaskScheduler.Default);
     }
 }

@@ -1,4 +1,5 @@
 using PartPick.Catalog;
+using PartPick.Requirements;
 using PartPick.Selection;
 using PartPick.Values;
 
@@ -12,15 +13,18 @@ public sealed class RequirementKeeper(string catalogPath)
 
     private readonly Lock _lock = new();
     private string? _kept;
+    private string? _unread;
 
     /// <summary>The requirement that was kept.</summary>
     /// <returns>The requirement, null when none has been kept; or the problem.</returns>
     public Result<Requirement?> Recall()
     {
         Result<string?> kept = CatalogStore.ReadSetting(catalogPath, Setting);
-        return kept.Then(json => json is null
+        Result<Requirement?> read = kept.Then(json => json is null
             ? Result.Ok<Requirement?>(null)
             : RequirementFile.Read(json, "the requirement that was kept").Map<Requirement?>(requirement => requirement));
+        _unread = read.IsOk ? null : kept.ValueOr(null);
+        return read;
     }
 
     /// <summary>Keeps a requirement, if it is another one than before.</summary>
@@ -34,6 +38,17 @@ public sealed class RequirementKeeper(string catalogPath)
             if (json == _kept)
             {
                 return null;
+            }
+
+            // What could not be read is put aside before another one takes its place.
+            if (_unread is { } text)
+            {
+                if (new KeptRequirementStore(catalogPath).PutAside(text) is { } wrong)
+                {
+                    return wrong;
+                }
+
+                _unread = null;
             }
 
             Problem? problem = CatalogStore.WriteSetting(catalogPath, Setting, json);

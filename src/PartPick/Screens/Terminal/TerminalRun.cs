@@ -1,3 +1,4 @@
+using PartPick.Requirements;
 using PartPick.Selection;
 using PartPick.Values;
 
@@ -12,18 +13,21 @@ namespace PartPick.Screens;
 internal sealed class TerminalRun(
     string catalogPath, CatalogRanking ranking, TerminalTraits traits, Action<Requirement> keep, Task<Result<bool>> opening)
 {
+    private ScreenWork? _work;
+
     /// <summary>Shows the screen until it is left.</summary>
     /// <param name="loop">The loop, ready to run.</param>
     /// <param name="start">The requirement to begin with.</param>
     /// <param name="notice">A line to show until the first key; null for none.</param>
     /// <param name="desk">Where the lists of candidates are kept.</param>
+    /// <param name="store">Where requirements are kept.</param>
     /// <returns>The requirement at the end.</returns>
-    public Requirement Show(IScreenLoop loop, Requirement start, string? notice, IShortlistDesk desk)
+    public Requirement Show(IScreenLoop loop, Requirement start, string? notice, IShortlistDesk desk, KeptRequirementStore store)
     {
         Glyphs glyphs = traits.IsUtf8 ? Glyphs.Drawn : Glyphs.Ascii;
         Palette palette = traits.HasColour ? Palette.Coloured : Palette.Plain;
         using var live = new LiveRanking(ranking, loop.Post, TimeProvider.System);
-        var work = new ScreenWork(loop.Post);
+        ScreenWork work = _work = new ScreenWork(loop.Post);
         var parts = new PartsModel(catalogPath, work, glyphs, () => DateOnly.FromDateTime(TimeProvider.System.GetLocalNow().Date));
         var model = new MainModel(start, live, glyphs, notice, ranking.Currency, parts: parts);
         Await(opening);
@@ -34,6 +38,7 @@ internal sealed class TerminalRun(
         };
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
         model.KeepListsAt(desk, work);
+        model.KeepWantedAt(store, work, ranking);
         using var screen = new MainScreen(model, palette);
         loop.Run(screen, () => keep(model.Wanted.Accepted));
         model.Stop();
@@ -47,4 +52,9 @@ internal sealed class TerminalRun(
             _ = reading.ContinueWith(_ => loop.Post(() => model.PartsAreRead(ranking.Currency)), TaskScheduler.Default);
         }
     }
+
+    /// <summary>Waits for what was still being written when the screen was left.</summary>
+    /// <param name="longest">The most to wait.</param>
+    /// <returns>Whether all of it is done.</returns>
+    public bool Finish(TimeSpan longest) => _work is null || SpinWait.SpinUntil(() => _work.IsIdle, longest);
 }

@@ -80,6 +80,14 @@ public sealed class SentenceModel
         Become(Accepted, false);
     }
 
+    /// <summary>Gives it another name, which is none of its wants.</summary>
+    /// <param name="name">The name.</param>
+    public void Rename(string name)
+    {
+        Accepted = Accepted with { Name = name };
+        Current = Current with { Name = name };
+    }
+
     /// <summary>The sentence on the screen.</summary>
     /// <param name="width">Width in cells.</param>
     /// <param name="chosen">Whether the keys go to the sentence.</param>

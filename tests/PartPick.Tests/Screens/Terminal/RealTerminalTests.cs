@@ -22,7 +22,7 @@ public partial class RealTerminalTests
         using var terminal = new TmuxTerminal(term, locale, Sizes[first].Width, Sizes[first].Height);
         string before = terminal.Ask("stty -g");
         terminal.Start();
-        terminal.WaitFor("? shows all keys.");
+        terminal.WaitFor("? for all keys.");
         terminal.WaitFor("best first");
         terminal.Type("Down");
         for (int i = 0; i < Sizes.Length; i++)
@@ -155,7 +155,7 @@ public partial class RealTerminalTests
 
     private static void Edit(TmuxTerminal terminal)
     {
-        terminal.WaitFor("? shows all keys.");
+        terminal.WaitFor("? for all keys.");
         terminal.Type("e");
         terminal.WaitFor("output frequency");
         terminal.Type("5kHz", "Enter");
