@@ -75,13 +75,13 @@ internal sealed class PseudoTerminal : IDisposable
         }
     }
 
-    /// <summary>Processor time of the program with all its threads.</summary>
+    /// <summary>Processor time of the program with all its threads, those that have ended among them.</summary>
     public TimeSpan Work
     {
         get
         {
-            double nanoseconds = Directory.GetDirectories($"/proc/{_process.Id}/task").Sum(OfThread);
-            return TimeSpan.FromMicroseconds(nanoseconds / 1000);
+            _process.Refresh();
+            return _process.TotalProcessorTime;
         }
     }
 
@@ -137,19 +137,6 @@ internal sealed class PseudoTerminal : IDisposable
         _process.WaitForExit();
         _keys.Dispose();
         _process.Dispose();
-    }
-
-    // A thread may end while it is looked at.
-    private static double OfThread(string folder)
-    {
-        try
-        {
-            return double.Parse(File.ReadAllText(folder + "/schedstat").Split(' ')[0], CultureInfo.InvariantCulture);
-        }
-        catch (IOException)
-        {
-            return 0;
-        }
     }
 
     private void Read()

@@ -13,6 +13,7 @@ internal sealed class ScreensTable
 {
     private const string Down = "\x1b[B";
     private const string PageDown = "\x1b[6~";
+    private const string PageUp = "\x1b[5~";
 
     private static readonly TimeSpan Patience = TimeSpan.FromMinutes(2);
     private static readonly TimeSpan Still = TimeSpan.FromMilliseconds(700);
@@ -135,7 +136,7 @@ internal sealed class ScreensTable
         TimeSpan oursBefore = terminal.Work, emptyBefore = none.Work;
         int sentBefore = terminal.Sent, emptySent = none.Sent;
         long start = Stopwatch.GetTimestamp();
-        Thread.Sleep(TimeSpan.FromSeconds(15));
+        Thread.Sleep(TimeSpan.FromSeconds(30));
         double passed = Stopwatch.GetElapsedTime(start).TotalSeconds;
         double ours = (terminal.Work - oursBefore).TotalSeconds, empty = (none.Work - emptyBefore).TotalSeconds;
         _output.WriteLine(string.Create(
@@ -172,7 +173,7 @@ internal sealed class ScreensTable
         terminal.Type("c");
         terminal.WaitForRest(TimeSpan.FromSeconds(3));
         Row("Down in the catalogue" + which, terminal, 60, 100, _ => (Down, ""));
-        Row("PgDn in the catalogue" + which, terminal, 40, 100, _ => (PageDown, ""));
+        Row("PgDn, PgUp in the catalogue" + which, terminal, 40, 100, i => (i % 4 < 2 ? PageDown : PageUp, ""));
     }
 
     // Another output frequency each time: 1 kHz, 2 kHz and so on. What is typed has to be seen.
