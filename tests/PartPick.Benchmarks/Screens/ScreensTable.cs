@@ -105,7 +105,7 @@ internal sealed class ScreensTable
             }
 
             using PseudoTerminal terminal = PartPick();
-            double came = Until(terminal, "Wanted"), worked = terminal.Work.TotalMilliseconds;
+            double came = Until(terminal, "river logger"), worked = terminal.Work.TotalMilliseconds;
             double answered = Until(terminal, "best first");
             if (i > 0)
             {

@@ -5,6 +5,9 @@ namespace PartPick.Tests.Screens;
 /// <summary>The built program in real terminals, driven by keys and signals.</summary>
 public partial class RealTerminalTests
 {
+    // How the sentence of a fresh catalogue begins.
+    private const string Named = "river logger time base: ";
+
     private static readonly (int Width, int Height)[] Sizes = [(80, 24), (100, 30), (120, 40), (160, 48)];
 
     [Theory]
@@ -38,14 +41,14 @@ public partial class RealTerminalTests
         terminal.Type("2");
         terminal.WaitFor("as it was");
         terminal.Type("kHz", "Enter");
-        terminal.WaitFor("Wanted: 2 kHz");
+        terminal.WaitFor(Named + "2 kHz");
         terminal.Type("Escape");
         terminal.WaitFor("q quit");
         terminal.WaitFor("best first");
         terminal.Type("Enter");
         terminal.WaitFor("other circuits");
         terminal.Type("q");
-        terminal.WaitUntilGone("Wanted:");
+        terminal.WaitUntilGone(Named);
         AssertGivenBack(terminal, before);
         string written = terminal.Written;
         AssertUnderstood(written, term);
@@ -54,7 +57,7 @@ public partial class RealTerminalTests
         if (first == 0)
         {
             terminal.Start();
-            terminal.WaitFor("Wanted: 2 kHz");
+            terminal.WaitFor(Named + "2 kHz");
         }
     }
 
@@ -77,10 +80,10 @@ public partial class RealTerminalTests
             terminal.Signal(how);
         }
 
-        terminal.WaitUntilGone("Wanted:");
+        terminal.WaitUntilGone(Named);
         AssertGivenBack(terminal, before);
         terminal.Start();
-        terminal.WaitFor("Wanted: 5 kHz");
+        terminal.WaitFor(Named + "5 kHz");
     }
 
     [Fact]
@@ -90,9 +93,9 @@ public partial class RealTerminalTests
         terminal.Start();
         Edit(terminal);
         terminal.Signal("HUP");
-        terminal.WaitUntilGone("Wanted:");
+        terminal.WaitUntilGone(Named);
         terminal.Start();
-        terminal.WaitFor("Wanted: 5 kHz");
+        terminal.WaitFor(Named + "5 kHz");
         terminal.HangUp();
         long start = TimeProvider.System.GetTimestamp();
         while (terminal.Runs)
@@ -123,7 +126,7 @@ public partial class RealTerminalTests
         terminal.WaitFor("Stopped");
         AssertGivenBack(terminal, before);
         terminal.Type("fg", "Enter");
-        terminal.WaitFor("Wanted: 5 kHz");
+        terminal.WaitFor(Named + "5 kHz");
         terminal.WaitFor("q quit");
         terminal.Type("?");
         terminal.WaitFor("In the list");
@@ -138,7 +141,7 @@ public partial class RealTerminalTests
         terminal.Type("Enter");
         terminal.WaitFor("other circuits");
         terminal.Type("q");
-        terminal.WaitUntilGone("Wanted:");
+        terminal.WaitUntilGone(Named);
         Assert.DoesNotContain(terminal.Written, sign => sign >= 0x80);
     }
 
@@ -159,14 +162,14 @@ public partial class RealTerminalTests
         terminal.Type("e");
         terminal.WaitFor("output frequency");
         terminal.Type("5kHz", "Enter");
-        terminal.WaitFor("Wanted: 5 kHz");
+        terminal.WaitFor(Named + "5 kHz");
         terminal.Type("Escape");
         terminal.WaitFor("q quit");
     }
 
     private static bool Fills(string[] rows, int width, int height, bool isAscii) =>
         rows.Length == height
-        && rows[0].Contains("Wanted: 1 kHz", StringComparison.Ordinal)
+        && rows[0].Contains(Named + "1 kHz", StringComparison.Ordinal)
         && rows[^1].Contains("q quit", StringComparison.Ordinal)
         && rows.Any(row => row.Contains("best first", StringComparison.Ordinal))
         && rows.Any(row => row.StartsWith(isAscii ? "> " : "► ", StringComparison.Ordinal))
