@@ -1,6 +1,7 @@
 using PartPick.Physics.Bias;
 using PartPick.Physics.Circuits;
 using PartPick.Physics.Devices;
+using PartPick.Physics.Growth;
 using PartPick.Physics.Network;
 using PartPick.Physics.SmallSignal;
 using PartPick.Physics.Steady;
@@ -163,16 +164,45 @@ public static class OscillatorAnalysis
         return -1 / (radians * reactance);
     }
 
-    /// <summary>ln(Î/Î0)/σ with the thermal current Î0 = √(kT/Lm) of the motional branch, in seconds.</summary>
+    /// <summary>ln(Î/Î0)/σ with the thermal current Î0 of the motional branch, in seconds.</summary>
     /// <param name="circuit">The circuit.</param>
     /// <param name="growthRatePerSecond">Growth rate σ in 1/s, above zero.</param>
     /// <param name="currentRmsAmps">Steady motional current in amperes rms.</param>
-    public static double StartUpTimeSeconds(OscillatorCircuit circuit, double growthRatePerSecond, double currentRmsAmps)
+    public static double StartUpTimeSeconds(OscillatorCircuit circuit, double growthRatePerSecond, double currentRmsAmps) =>
+        Math.Log(currentRmsAmps * Math.Sqrt(2) / ThermalPeakAmps(circuit)) / growthRatePerSecond;
+
+    /// <summary>The thermal current Î0 = √(kT/Lm) of the motional branch, in amperes.</summary>
+    /// <param name="circuit">The circuit.</param>
+    public static double ThermalPeakAmps(OscillatorCircuit circuit)
     {
         ArgumentNullException.ThrowIfNull(circuit);
         double kelvins = circuit.TemperatureCelsius + PhysicalConstants.ZeroCelsiusKelvins;
-        double thermal = Math.Sqrt(PhysicalConstants.BoltzmannJoulesPerKelvin * kelvins / circuit.Crystal.InductanceHenries);
-        return Math.Log(currentRmsAmps * Math.Sqrt(2) / thermal) / growthRatePerSecond;
+        return Math.Sqrt(PhysicalConstants.BoltzmannJoulesPerKelvin * kelvins / circuit.Crystal.InductanceHenries);
+    }
+
+    /// <summary>
+    /// The growth of the amplitude after switch-on; null where it does not build up from noise, has no steady state, or is held at
+    /// an amplitude on the way.
+    /// </summary>
+    /// <param name="circuit">The circuit.</param>
+    /// <param name="cancellation">Ends it.</param>
+    public static AmplitudeGrowth? FindGrowth(OscillatorCircuit circuit, CancellationToken cancellation = default)
+    {
+        OscillatorResult result = Analyse(circuit, out RunningState? state);
+        if (result is not { Start: StartKind.BuildsUp, Steady: { } steady } || state is null || Balances(circuit) is not { } refinement)
+        {
+            return null;
+        }
+
+        double ohms = circuit.Crystal.ResistanceOhms;
+        double linear = (FindMarginAt(circuit, steady.FrequencyHz) - 1) * ohms;
+        return linear > 0 && ExcessCurve.Follow(refinement, state, ohms, linear, cancellation) is { } curve
+            ? GrowthSolver.Integrate(
+                ThermalPeakAmps(circuit),
+                steady.CurrentRmsAmps * Math.Sqrt(2),
+                result.StartUp.GrowthRatePerSecond,
+                depth => curve.At(depth) / linear)
+            : null;
     }
 
     private static OscillatorResult Analyse(GateCircuit gate, out RunningState? state)

@@ -59,6 +59,12 @@ public sealed record SteadyState
     /// <summary>Output swing in volts peak to peak: at the inverter's output, or at the emitter.</summary>
     public required double OutputSwingVolts { get; init; }
 
+    /// <summary>Lowest output voltage of the period in volts: an inverter's against half the supply, an emitter's against ground.</summary>
+    public double OutputLowVolts { get; init; }
+
+    /// <summary>Highest output voltage of the period in volts, against the same.</summary>
+    public double OutputHighVolts { get; init; }
+
     /// <summary>The figures that corners and sensitivities ask for.</summary>
     public RunningFigures Figures => new(FrequencyHz, LoadFarads, CurrentRmsAmps, DriveWatts);
 

@@ -13,6 +13,7 @@ internal static class CommandLine
     [
         RankCommand.Build,
         CheckCommand.Build,
+        PictureCommand.Build,
         CapsCommand.Build,
         CatalogCommand.Build,
         ShortlistCommand.Build,

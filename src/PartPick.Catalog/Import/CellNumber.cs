@@ -18,6 +18,13 @@ internal static class CellNumber
         (int start, int end) = WrittenNumber.Locate(text);
         string front = text[..start].Trim();
         string tail = text[end..];
+        // "G1" is a shelf and no number of pieces or ratio of currents: a letter stands for the decimal sign of values only.
+        if (dimension is Dimension.Count or Dimension.Number && front.Length > 0 && char.IsLetter(front[0]))
+        {
+            return Result.Fail<double>(
+                "", $"{Problem.Quote(cell)} does not begin with a number", dimension == Dimension.Count ? "a whole number" : "a number");
+        }
+
         if (start == end || IsLetterCode(front, tail))
         {
             return ValueText.ParseIn(text, dimension, power == ColumnUse.NoPlainNumbers ? 0 : power, "", allowNegative);

@@ -11,8 +11,9 @@ internal sealed class ColumnFit(PartKind kind, ColumnSample sample)
     private const double MostUnfit = 0.5;
 
     /// <summary>Whether they can.</summary>
-    public bool Holds(FieldMatch match, HeaderCell header)
+    public bool Holds(FieldMatch match)
     {
+        HeaderCell header = match.Reading;
         Dimension? dimension = ImportFields.DimensionOf(kind, match.Field);
         if (header.Unit.Length > 0 && !UnitFits(match.Field, dimension, header))
         {
@@ -56,12 +57,15 @@ internal sealed class ColumnFit(PartKind kind, ColumnSample sample)
         _ => true,
     };
 
-    // Also a figure that no part has speaks against it, where a unit says what it is.
+    // Also a figure that no part has speaks against it, whatever unit it may be in.
     private bool Plausibly(string field, Dimension dimension, HeaderCell header, string cell, NumberNotation notation)
     {
-        int? power = header.Unit.Length > 0 ? UnitSpelling.PowerOf(header.Unit, dimension) : null;
-        Result<double> read = CellNumber.Read(cell, dimension, power ?? 0, notation, AllowsNegative(field));
-        return read.IsOk && ((power is null && CellNumber.HasNoUnit(cell)) || read.Value == 0 || Plausible.Holds(kind, field, read.Value));
+        bool IsFigure(int power) =>
+            CellNumber.Read(cell, dimension, power, notation, AllowsNegative(field)) is { IsOk: true } read
+            && (read.Value == 0 || Plausible.Holds(kind, field, read.Value));
+        return header.Unit.Length > 0 && UnitSpelling.PowerOf(header.Unit, dimension) is { } stated ? IsFigure(stated)
+            : CellNumber.HasNoUnit(cell) ? UnitChoice.Units(dimension).Any(unit => IsFigure(unit.Power))
+            : IsFigure(0);
     }
 
     private static bool AllowsNegative(string field) =>

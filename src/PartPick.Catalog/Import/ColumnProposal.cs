@@ -65,14 +65,14 @@ internal sealed class ColumnProposal(PartKind kind, IReadOnlyList<string[]> rows
             return use;
         }
 
-        string unit = field is not "price" && wish?.Unit is { Length: > 0 } stated ? stated : header.Unit;
+        string unit = field is not "price" && wish?.Unit is { Length: > 0 } stated ? stated : use.HeaderUnit;
         Dimension? dimension = ImportFields.DimensionOf(kind, field);
         int? power = dimension is { } known && unit.Length > 0 ? UnitSpelling.PowerOf(unit, known) : null;
         (NumberNotation sign, string how) = notation.Of(use, power, file);
         use = use with { Notation = sign, Why = use.Why + how };
         if (field is "price" or "prices")
         {
-            return use with { Currency = Currencies.In(header.Text) ?? options.Currency };
+            return use with { Currency = Currencies.In(HeaderCell.Parted(header.Text)) ?? options.Currency };
         }
 
         if (dimension is not { } measured || field is "toleranceAny")

@@ -32,7 +32,8 @@ internal sealed class ColumnSample(IReadOnlyList<string[]> rows)
             && cells.Length > 1
             && cells.Distinct(StringComparer.Ordinal).Count() == cells.Length
             && cells.All(cell => cell.Length is >= 3 and <= 40 && cell.Any(char.IsAsciiDigit) && cell.Count(letter => letter == ' ') <= 1)
-            && (cells.Any(cell => cell.Any(char.IsLetter)) || cells.All(cell => cell.All(char.IsAsciiDigit) && cell.Length >= 5));
+            && (cells.Any(cell => cell.Any(char.IsLetter)) || cells.All(cell => cell.Count(char.IsAsciiDigit) >= 5
+                && cell.All(letter => char.IsAsciiDigit(letter) || letter is '-' or '/') && char.IsAsciiDigit(cell[0])));
     }
 
     /// <summary>Whether whole numbers stand in some columns, in each row in ascending order as far as they are there.</summary>

@@ -12,6 +12,9 @@ internal sealed record ColumnUse
     /// <summary>The cell of the header.</summary>
     public required string Header { get; init; }
 
+    /// <summary>The unit that the header states; empty for none.</summary>
+    public string HeaderUnit { get; init; } = "";
+
     /// <summary>The key of the figure, or temperature, toleranceAny, price or prices; null where the column is not used.</summary>
     public string? Field { get; init; }
 

@@ -6,27 +6,39 @@ namespace PartPick.Catalog.Import;
 /// <param name="Column">The place of the column.</param>
 /// <param name="Field">The field.</param>
 /// <param name="Score">Greater is surer: 85 and more for the whole name, less for a part of it or for words cut short.</param>
-internal readonly record struct FieldMatch(int Column, string Field, double Score)
+/// <param name="Reading">The way of reading the header in which it names the field.</param>
+internal readonly record struct FieldMatch(int Column, string Field, double Score, HeaderCell Reading)
 {
     /// <summary>From here on a header is the whole name of a field.</summary>
     public const double Whole = 85;
 
     private const double Compound = 0.8;
 
-    /// <summary>All fields that a header may name.</summary>
-    public static IEnumerable<FieldMatch> Of(PartKind kind, int column, HeaderCell header)
+    private static readonly UInt128 Least = Notions.Mark("minimum");
+    private static readonly UInt128 Greatest = Notions.Mark("maximum");
+
+    // What a way of reading is less sure than the first.
+    private const double OtherReading = 3;
+
+    /// <summary>All fields that a header may name, in any way of reading it.</summary>
+    public static IEnumerable<FieldMatch> Of(PartKind kind, int column, HeaderCell header) => header.Readings()
+        .SelectMany((reading, place) => OfReading(kind, column, reading)
+            .Select(match => match with { Score = match.Score - (place * OtherReading) }));
+
+    private static IEnumerable<FieldMatch> OfReading(PartKind kind, int column, HeaderCell header)
     {
         foreach (PartField field in PartShape.Of(kind).Fields)
         {
             if (Trade.Words(field.Key) == header.Name)
             {
                 string named = (kind, field.Key) is (PartKind.Capacitor, "tolerance") ? "toleranceAny" : field.Key;
-                yield return new FieldMatch(column, named, 110);
+                yield return new FieldMatch(column, named, 110, header);
             }
         }
 
         IReadOnlySet<string> known = TradeWords.Known(kind);
         HeaderCell[] alternatives = [.. header.Alternatives()];
+        HeaderNotions notions = HeaderNotions.Of(header.Plain);
         foreach (TradeWords words in TradeWords.Of(kind))
         {
             double best = Rate(header, words, known);
@@ -35,11 +47,35 @@ internal readonly record struct FieldMatch(int Column, string Field, double Scor
                 best = Math.Max(best, Rate(alternative, words, known) - 2);
             }
 
+            if (IsOtherEnd(kind, words.Field, notions))
+            {
+                continue;
+            }
+
+            Recipe[] recipes = [.. Recipes.Of(kind, words.Field)];
+            if (best < Whole && recipes.Length > 0 && recipes.All(recipe => recipe.IsContradicted(notions)))
+            {
+                best = 0;
+            }
+
+            if (recipes.Length > 0 && !words.IsOther(header))
+            {
+                best = Math.Max(best, recipes.Max(recipe => recipe.Rate(notions)));
+            }
+
             if (best > 40)
             {
-                yield return new FieldMatch(column, words.Field, best);
+                yield return new FieldMatch(column, words.Field, best, header);
             }
         }
+    }
+
+    // The least and the greatest are no typical figure where a part has a field for each.
+    private static bool IsOtherEnd(PartKind kind, string field, HeaderNotions header)
+    {
+        string[] key = field.Split(' ');
+        bool Has(string end) => PartShape.Of(kind).Fields.Any(each => each.Key == string.Join(' ', [key[0] + end, .. key[1..]]));
+        return (header.Says(Least) && Has("Min")) || (header.Says(Greatest) && Has("Max"));
     }
 
     private static double Rate(HeaderCell header, TradeWords words, IReadOnlySet<string> known)

@@ -54,12 +54,30 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
         return full == Name ? beside : beside.Append(new HeaderCell(Text, full, Unit, Basis));
     }
 
+    /// <summary>The ways of reading the cell: with a last word that may be a unit, and with the same word as a part of the name.</summary>
+    public IEnumerable<HeaderCell> Readings()
+    {
+        yield return this;
+        HeaderCell plain = Of(Text, unitAtEnd: false);
+        if (plain.Name != Name)
+        {
+            yield return plain;
+        }
+    }
+
     /// <summary>Takes a cell apart.</summary>
-    public static HeaderCell Of(string text)
+    public static HeaderCell Of(string text) => Of(text, unitAtEnd: true);
+
+    /// <summary>A text with its joined words parted: "unitPriceUsd" is "unit Price Usd".</summary>
+    public static string Parted(string text) =>
+        Joint().Replace(Initials().Replace(text, match => match.Value.Replace(".", "", StringComparison.Ordinal)), " ");
+
+    private static HeaderCell Of(string text, bool unitAtEnd)
     {
         string trimmed = text.Trim().Trim('\uFEFF');
         string unit = "";
         string rest = Condition().Replace(trimmed.StartsWith('@') ? "at " + trimmed[1..] : trimmed, " ");
+        rest = Untaxed().Replace(Parted(rest), " ");
         rest = Brackets().Replace(rest, match =>
         {
             string inner = match.Groups[1].Value.Trim();
@@ -72,14 +90,12 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
 
             return " " + inner + " ";
         });
-        if (unit.Length == 0 && Tail().Match(rest) is { Success: true } tail && HeaderUnit.IsUnit(tail.Groups[2].Value)
-            && (tail.Groups[2].Length > 1 || tail.Groups[1].Value.Trim() is not "" || tail.Groups[2].Value is "Ω" or "%"))
+        if (unitAtEnd && unit.Length == 0)
         {
-            unit = tail.Groups[2].Value;
-            rest = rest[..tail.Index];
+            (rest, unit) = UnitAtEnd(rest);
         }
 
-        string name = Trade.Words(Apostrophe().Replace(rest, ""));
+        string name = Trade.Words(Apostrophe().Replace(Elision().Replace(rest, " "), ""));
         string[] all = name.Split(' ');
         Basis basis = all.Any(Highest.Contains) ? Basis.Maximum
             : all.Any(Middle.Contains) ? Basis.Typical
@@ -87,12 +103,49 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
         return new HeaderCell(trimmed, name, unit, basis);
     }
 
+    private static (string Name, string Unit) UnitAtEnd(string text)
+    {
+        // "gm_ma_v": a quotient of units in names that have no other sign.
+        if (Quotient().Match(text) is { Success: true } two && $"{two.Groups[1].Value}/{two.Groups[2].Value}" is var quotient
+            && HeaderUnit.IsUnit(quotient))
+        {
+            return (text[..two.Index], quotient);
+        }
+
+        // A single letter is a unit behind "/" or "in", and in names such as "vdd_v".
+        bool isJoined = text.Contains('_', StringComparison.Ordinal) && !text.Contains(' ', StringComparison.Ordinal);
+        for (Match tail = Tail().Match(text); tail.Success; tail = Tail().Match(text, tail.Index + 1))
+        {
+            string unit = tail.Groups[2].Value;
+            unit = isJoined && unit is ("f" or "a" or "w") ? unit.ToUpperInvariant() : unit;
+            bool isApart = unit.Length > 1 || tail.Groups[1].Value.Trim() is not "" || unit is "Ω" or "%" || isJoined;
+            if (isApart && HeaderUnit.IsUnit(unit))
+            {
+                return (text[..tail.Index], unit);
+            }
+        }
+
+        return (text, "");
+    }
+
     [GeneratedRegex(@"[\(\[\{（]([^\)\]\}）]*)[\)\]\}）]")]
     private static partial Regex Brackets();
 
+    // Without a tax, or with one of nought: what says only that the price is the net one.
+    [GeneratedRegex(
+        @"\b(?:(?:excl?|exkl|excluding|without|ohne|hors|sin|sem|senza|zonder|uden|utan|bez)\b\.?\s*(?:of\s+)?"
+            + @"(?:vat|tax|mwst|ust|tva|taxes?|iva|btw|moms|mva|dph|kdv)\b|(?:alv|vat|mwst|ust|tva|iva|btw|moms|mva|dph|kdv)\b\.?\s*0\s*%)",
+        RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
+    private static partial Regex Untaxed();
+
+    // "d'alimentation", "all'ingresso".
+    [GeneratedRegex(@"\b(?:d|l|all|dell|nell|dall|sull)['’´`](?=\w)", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
+    private static partial Regex Elision();
+
+    // A unit behind a condition stays: "hFE @ IC (mA)" are currents.
     // "at 25 °C", "à 25°C", "@ IC", "bei +25 °C", "(25 °C)", "(IC=2mA)": under which condition the figures hold.
     [GeneratedRegex(
-        @"(?<=.)@.*$|\([^)]*=[^)]*\)|(?:\b(?:at|à|a|bei|b\.|bij|ved|vid|w|przy|pri|при|la))"
+        @"(?<=.)@[^\(\[]*|\([^)]*=[^)]*\)|(?:\b(?:at|à|a|bei|b\.|bij|ved|v\.|vid|w|przy|pri|при|la)|\s)"
             + @"\s*\+?\s*25\s*(?:[°º]\s*C?|deg\.?\s*C|C\b|℃)|\(\s*\+?25\s*(?:[°º]\s*C|C|℃)\s*\)",
         RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex Condition();
@@ -105,6 +158,17 @@ internal sealed partial record HeaderCell(string Text, string Name, string Unit,
         @"(?:[\s_,\-:;\.]|(?<=\w))(\s*(?:/|\bin\b|\ben\b|,)\s*)?(?<=[\s_,/\-:;\.±])±?([^\s_,\-:;±]+)\s*$",
         RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex Tail();
+
+    [GeneratedRegex(@"(?<=[a-z])[\s_]+([mµu]?a|ppm)[\s_]+(v|k|c|yr|y|year)\s*$", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
+    private static partial Regex Quotient();
+
+    // "P.U.", "C.L.": letters with full stops.
+    [GeneratedRegex(@"(?<!\w)(?:\p{L}\.){2,}(?=\W|$)")]
+    private static partial Regex Initials();
+
+    // "ratedVoltageVdc", "priceEUR": a capital letter behind small ones begins a word; "kHz" and "fTmin" are none.
+    [GeneratedRegex(@"(?<=[a-z]{3})(?=[A-Z])")]
+    private static partial Regex Joint();
 
     [GeneratedRegex(@"(?<=\w)['’´`](?=\w)")]
     private static partial Regex Apostrophe();

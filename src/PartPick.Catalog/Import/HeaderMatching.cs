@@ -5,6 +5,12 @@ namespace PartPick.Catalog.Import;
 /// <param name="sample">The first rows.</param>
 internal sealed class HeaderMatching(PartKind kind, ColumnSample sample)
 {
+    // How far behind its surest field a column may still be given another.
+    private const double MostBehind = 15;
+
+    // Two fields this near are named alike.
+    private const double Alike = 0.3;
+
     private readonly ColumnFit _fit = new(kind, sample);
 
     /// <summary>The columns of a header; what the user stated goes first.</summary>
@@ -27,12 +33,35 @@ internal sealed class HeaderMatching(PartKind kind, ColumnSample sample)
             .. cells.SelectMany((cell, i) => uses[i] is { Field: null, IsUnnamed: true } ? FieldMatch.Of(kind, i, cell) : [])
                 .OrderByDescending(match => match.Score).ThenBy(match => match.Column),
         ];
+        var unclear = new HashSet<int>();
+        var surest = matches.GroupBy(match => match.Column).ToDictionary(group => group.Key, group => group.First().Score);
         foreach (FieldMatch match in matches)
         {
+            // A column whose own field another one has more surely is not made the next best thing.
+            if (surest[match.Column] - match.Score > MostBehind && !uses[match.Column].IsUnnamed)
+            {
+                continue;
+            }
+
+            if (uses[match.Column].Field is null && Rival(match, matches, taken) is { } rival)
+            {
+                uses[match.Column] = uses[match.Column] with
+                {
+                    IsUnnamed = false,
+                    Why = $"may be {match.Field} or {rival}: state --column \"{cells[match.Column].Text}=FIELD\"",
+                };
+                unclear.Add(match.Column);
+            }
+
+            if (unclear.Contains(match.Column))
+            {
+                continue;
+            }
+
             // For how many a price is says something only beside a price.
             bool alone = match.Field == "priceFor" && !uses.Any(use => use.Field == "price")
                 && !matches.Any(other => other.Field == "price" && other.Column != match.Column);
-            if (alone || uses[match.Column].Field is not null || !_fit.Holds(match, cells[match.Column]))
+            if (alone || uses[match.Column].Field is not null || !_fit.Holds(match))
             {
                 continue;
             }
@@ -48,7 +77,7 @@ internal sealed class HeaderMatching(PartKind kind, ColumnSample sample)
             }
             else if (taken.Add(match.Field))
             {
-                uses[match.Column] = uses[match.Column] with { Field = match.Field, Why = "header" };
+                uses[match.Column] = uses[match.Column] with { Field = match.Field, HeaderUnit = match.Reading.Unit, Why = "header" };
             }
             else if (uses[match.Column].IsUnnamed)
             {
@@ -63,9 +92,17 @@ internal sealed class HeaderMatching(PartKind kind, ColumnSample sample)
         return uses;
     }
 
+    // Another field that the header names as surely and the cells hold as well, and that no column has yet.
+    private string? Rival(FieldMatch match, FieldMatch[] matches, HashSet<string> taken) =>
+        taken.Contains(match.Field) || match.Score >= FieldMatch.Whole || !_fit.Holds(match)
+            ? null
+            : matches.Where(other => other.Column == match.Column && other.Field != match.Field
+                && Math.Abs(other.Score - match.Score) < Alike && !taken.Contains(other.Field)
+                && ImportFields.IsNumeric(kind, other.Field) && _fit.Holds(other)).Select(other => other.Field).FirstOrDefault();
+
     private ColumnUse Begin(int index, HeaderCell cell, ColumnWish? wish)
     {
-        var use = new ColumnUse { Index = index, Header = cell.Text, Basis = cell.Basis };
+        var use = new ColumnUse { Index = index, Header = cell.Text, HeaderUnit = cell.Unit, Basis = cell.Basis };
         if (RejectedFile.IsOwnColumn(cell.Text))
         {
             return use with { Why = "added by an earlier import, not read" };

@@ -27,8 +27,35 @@ internal static class Plausible
         (PartKind.Transistor, "transitionFrequency") => (100e3, 500e9),
         (PartKind.Transistor, "currentMax") => (1e-3, 100),
         (PartKind.Transistor, "voltageMax") => (2, 2000),
-        (_, "temperatureMin") => (-100, 30),
-        (_, "temperatureMax") => (20, 300),
+        (PartKind.Transistor, "cje" or "cmu") => (0.01e-12, 10e-9),
+        (PartKind.Transistor, "tf") => (0.1e-12, 10e-6),
+        (PartKind.Transistor, "rbb") => (0.1, 10e3),
+        (PartKind.Transistor, "vbe") => (0.2, 2),
+        (PartKind.Inverter or PartKind.Counter or PartKind.Port, _) => OfAmplifier(field.Split(' ')[0]) ?? OfAny(field),
+        _ => OfAny(field),
+    };
+
+    private static (double Least, double Greatest)? OfAmplifier(string field) => field switch
+    {
+        "supply" => (0.5, 60),
+        "gmMin" or "gm" or "gmMax" => (10e-9, 1000),
+        "ro" => (1, 1e9),
+        "ron" => (0.01, 1e6),
+        "gain" => (1.5, 1e7),
+        "delay" => (0, 100e-6),
+        "clockMin" or "clock" => (1e3, 10e9),
+        "cin" or "cout" => (0.05e-12, 1e-9),
+        "cf" => (0.001e-12, 100e-12),
+        "criticalTransconductanceMax" => (1e-9, 1),
+        "swing" => (0.01, 60),
+        "frequencyMin" or "frequencyMax" => (1e3, 10e9),
+        _ => null,
+    };
+
+    private static (double Least, double Greatest)? OfAny(string field) => field switch
+    {
+        "temperatureMin" => (-100, 30),
+        "temperatureMax" => (20, 300),
         _ => null,
     };
 

@@ -42,6 +42,10 @@ internal static partial class PriceColumns
             }
         }
 
+        // Of two with the same quantity the one that names no price is the quantity itself: "Step 1", "Price 1".
+        found.RemoveAll(each => !each.Header.IsPriced
+            && found.Any(other => other.Header.IsPriced && other.Header.Quantity == each.Header.Quantity));
+
         // Numbers alone are quantities only side by side, and 1, 2, 3 may count the prices instead of the pieces.
         found.RemoveAll(each => each.Header is { IsBare: true, IsMarked: false } && found.Count < 2);
         bool counted = found.Count > 1 && found.Select(each => each.Header.Quantity).SequenceEqual(Enumerable.Range(1, found.Count))
@@ -108,6 +112,8 @@ internal static partial class PriceColumns
             }
         }
 
+        uses = together is null ? LeaveOutForMany(uses, sample) : uses;
+
         // What one column says of the currency holds for those that say nothing, where no other says otherwise.
         string[] currencies = [.. uses.Select(use => use.Field is "price" or "prices" ? use.Currency : null).OfType<string>().Distinct()];
         if (currencies.Length == 1)
@@ -128,6 +134,29 @@ internal static partial class PriceColumns
                 && !sample.Cells(use.Index).Any(cell => Currencies.In(cell) is not null)
                 ? use with { Field = null, Why = "prices without a currency are left out: state --currency" }
                 : use)];
+    }
+
+    // A column that is not known, beside the only price, with 1, 10, 100 and the like may say for how many pieces that price is: then it
+    // may be a hundred times too high.
+    private static ColumnUse[] LeaveOutForMany(ColumnUse[] uses, ColumnSample sample)
+    {
+        ColumnUse[] prices = [.. uses.Where(use => use.Field == "price")];
+        if (prices is not [{ IsQuantityStated: false, QuantityColumn: null } price])
+        {
+            return uses;
+        }
+
+        ColumnUse? open = uses.FirstOrDefault(use => use is { Field: null, IsUnnamed: true } && Math.Abs(use.Index - price.Index) <= 2
+            && sample.Cells(use.Index) is { Length: > 0 } cells
+            && cells.All(cell => cell is "1" or "10" or "100" or "1000" or "10000") && cells.Any(cell => cell is not "1"));
+        return open is null ? uses :
+        [
+            .. uses.Select(use => use != price ? use : use with
+            {
+                Field = null,
+                Why = $"{open.Header} may say for how many pieces it is: state --column \"{open.Header}=priceFor\" or \"{open.Header}=\"",
+            }),
+        ];
     }
 
     // "Price per 100" is the price of one from 100 on, or of 100 together: what the price of fewer pieces tells.

@@ -9,22 +9,19 @@ namespace PartPick.Catalog.Import;
 /// prices.</param>
 /// <param name="IsPer">Whether it may be the price of so many together: "Price per 100".</param>
 /// <param name="IsBare">Whether it is the number alone, or with words of quantity.</param>
-internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsPer, bool IsBare)
+/// <param name="IsPriced">Whether it names a price or a currency, and not only a step of quantities.</param>
+internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsPer, bool IsBare, bool IsPriced)
 {
-    private static readonly HashSet<string> Prices = Set(
-        "price prices preis preise prix precio precios prezzo prezzi preco precos prijs pris hinta cena ceny ar pret fiyat cost "
-        + "costo coste custo cout unit each rate ek vk pu ea net netto net ht stuckpreis einzelpreis stuksprijs styckpris stykpris "
-        + "stykkpris pc unitario unitaire unitprice 单价 价格 単価 価格 цена kosten usd eur gbp chf sek nok dkk pln czk huf inr cny jpy kr k sales excl ex vat sin iva "
-        + "bez dph hors taxe list tier break staffel scaglione palier tarif t egysegar egyseg birim jednostkowa unit unite unidad");
+    private static readonly Words Prices = new(
+        "k kr sales ar t r", "price", "unit", "net", "currency", "break");
 
-    private static readonly HashSet<string> Quantities = Set(
-        "qty quantity quantities menge antal antall aantal cantidad quantita qta quantite qte quantidade qtd ilosc mennyiseg adet "
-        + "miktar kpl pcs pieces piece pzs pz stk st stuck stueck stuks szt ks db шт 个 個 pieza piezas uds ud un units unites off q");
+    private static readonly Words Costs = new("k kr ar", "price", "net", "unit", "currency");
 
-    private static readonly HashSet<string> From = Set(
-        "ab from od desde des dessa dès da vanaf fran fra partir from at alkaen tol a");
+    private static readonly Words Quantities = new("off q", "quantity", "piece");
 
-    private static readonly HashSet<string> Per = Set("per pro je par por cada za p");
+    private static readonly Words From = new("a at v tol", "from");
+
+    private static readonly Words Per = new("p", "per");
 
     /// <summary>Takes a header apart; null where it is none of a price with a quantity.</summary>
     public static PriceHeader? Of(string header)
@@ -40,8 +37,9 @@ internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsP
             return null;
         }
 
-        string rest = Currencies.Without(Brackets().Replace(Number().Replace(header, " "), " "));
+        string rest = Currencies.Without(Brackets().Replace(HeaderCell.Parted(Number().Replace(header, " ")), " "));
         string[] words = TradePhrase.Folded(Trade.Words(rest)).Split(' ', StringSplitOptions.RemoveEmptyEntries);
+        words = [.. words.Where(word => !IsTax(word))];
         if (!words.All(word => Prices.Contains(word) || Quantities.Contains(word) || From.Contains(word) || Per.Contains(word)))
         {
             return null;
@@ -50,8 +48,10 @@ internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsP
         bool marked = numbers.Count == 2 || Plus().IsMatch(header) || words.Any(From.Contains) || words.Any(Quantities.Contains);
         bool per = !Plus().IsMatch(header) && numbers.Count == 1
             && (words.Any(Per.Contains) || Slash().IsMatch(header)) && !words.Any(From.Contains) && quantity > 1;
+        string? currency = Currencies.In(HeaderCell.Parted(header));
         return new PriceHeader(
-            quantity, marked, per, !words.Any(Prices.Contains) && Currencies.In(header) is null && !Plus().IsMatch(header));
+            quantity, marked, per, !words.Any(Prices.Contains) && currency is null && !Plus().IsMatch(header),
+            words.Any(Costs.Contains) || currency is not null);
     }
 
     private static int? Read(Match number)
@@ -63,7 +63,20 @@ internal sealed partial record PriceHeader(int Quantity, bool IsMarked, bool IsP
                 : null;
     }
 
-    private static HashSet<string> Set(string words) => new(words.Split(' '), StringComparer.Ordinal);
+    private static bool IsTax(string word) => Notions.Of(word) is [var notion, ..] && notion.Marks == Notions.Mark("vat");
+
+    private static readonly UInt128 Money = Notions.Mark("currency");
+
+    // Words for one thing: some by themselves, and all that stand for certain notions and for nothing else.
+    private sealed class Words(string more, params string[] notions)
+    {
+        private readonly HashSet<string> _more = new(more.Split(' '), StringComparer.Ordinal);
+        private readonly UInt128 _marks = notions.Aggregate((UInt128)0, (marks, name) => marks | Notions.Mark(name));
+
+        public bool Contains(string word) => _more.Contains(word)
+            || ((_marks & Money) != 0 && Currencies.IsName(word))
+            || Notions.Of(word).Any(notion => notion.Doubt <= 0.1 && (notion.Marks & ~_marks) == 0);
+    }
 
     [GeneratedRegex(@"(\d{1,3}(?:[.,' \u00A0]\d{3})+|\d+)([kK](?![a-zA-Z]))?")]
     private static partial Regex Number();

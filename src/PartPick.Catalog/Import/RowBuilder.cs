@@ -59,9 +59,15 @@ internal sealed class RowBuilder(PartKind kind, ColumnUse[] uses, string? stated
 
         Problem problem = figures.Problems.Find(each => Header(each.Where) is not null)
             ?? figures.Problems.Find(each => each.Where is "frequency" or "value" or "beta") ?? figures.Problems[0];
-        string what = $"{problem.Where} {problem.What}; fits {problem.Fits}";
+        string what = IsGmMissing(problem)
+            ? $"{problem.Where} is missing: whether an oscillator starts rests on the transconductance, and a class has no safe value, "
+                + "since too much stops it as too little does; fits a column of it, from the maker's data"
+            : $"{problem.Where} {problem.What}; fits {problem.Fits}";
         return (null, new RowRejection(line, Header(problem.Where), draft.Text(problem.Where), what));
     }
+
+    private static bool IsGmMissing(Problem problem) =>
+        problem.Where.StartsWith("gm ", StringComparison.Ordinal) && problem.What == "is missing";
 
     /// <summary>The header of the column of a figure; null where none states it.</summary>
     public string? Header(string key) => Array.Find(uses, use => use.Field == key)?.Header;

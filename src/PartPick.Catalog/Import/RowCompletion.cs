@@ -8,7 +8,8 @@ namespace PartPick.Catalog.Import;
 
 /// <summary>
 /// Fills in what a part cannot be without and a list does not state, and marks it assumed (common practice, from memory): the cut,
-/// overtone and series resonance of a crystal, the tolerance of a capacitor or resistor, the one stage of a counter's oscillator, the
+/// overtone and series resonance of a crystal, the tolerance of a capacitor or resistor, the one stage of the oscillator of a
+/// counter or controller, the
 /// gain of a transistor between its limits, a description.
 /// </summary>
 internal static class RowCompletion
@@ -37,8 +38,8 @@ internal static class RowCompletion
             case PartKind.Capacitor when !draft.Has("tolerance") && !draft.Has("toleranceAbsolute"):
                 Assume(draft, "tolerance", draft.Text("dielectric")?.ToUpperInvariant() is "C0G" or "NP0" or "NPO" or "COG" ? 0.05 : 0.2);
                 break;
-            // The oscillator of a counter is one stage; one of several is stated with its gain.
-            case PartKind.Counter when !draft.Has("gain 1") && !draft.Has("ron 1"):
+            // The oscillator of a counter or a controller is one stage; one of several is stated with its gain.
+            case PartKind.Counter or PartKind.Port when !draft.Has("gain 1") && !draft.Has("ron 1"):
                 Assume(draft, "stages", 1);
                 break;
             case PartKind.Resistor:

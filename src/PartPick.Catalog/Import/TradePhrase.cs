@@ -12,6 +12,9 @@ internal sealed record TradePhrase(string Text, string[] Words, bool IsWhole)
         "en", "em", "in", "im", "a", "al", "for", "pour", "for", "und", "and", "et", "y", "e", "i", "van", "av", "den", "per", "z", "w",
     };
 
+    /// <summary>Whether a word only joins others.</summary>
+    public static bool IsSmall(string word) => Small.Contains(word);
+
     /// <summary>A line of the lists of words, as it stands: behind "=" the phrase has to be the whole name.</summary>
     public static TradePhrase Of(string line)
     {

@@ -21,7 +21,14 @@ internal sealed record TradeWords(string Field, IReadOnlyList<(TradePhrase Phras
         kind => kind.Key, kind => kind.Value.SelectMany(words => words.Phrases).SelectMany(each => each.Phrase.Words).ToFrozenSet());
 
     /// <summary>Whether the cells are texts, which fit whatever the header means.</summary>
-    public bool IsText => Texts.Contains(Field);
+    public bool IsText => IsTextual(Field);
+
+    /// <summary>Whether the cells of a field are texts.</summary>
+    public static bool IsTextual(string field) => Texts.Contains(field);
+
+    /// <summary>The name under which kinds that have the same figures are listed together.</summary>
+    public static string Family(PartKind kind) =>
+        kind is PartKind.Inverter or PartKind.Counter or PartKind.Port ? "amplifiers" : kind.Word();
 
     /// <summary>Whether a header has a word with which it means something else.</summary>
     public bool IsOther(HeaderCell header) => Against.Any(words => words.All(header.Plain.Split(' ').Contains));
@@ -34,7 +41,7 @@ internal sealed record TradeWords(string Field, IReadOnlyList<(TradePhrase Phras
 
     private static IEnumerable<TradeWords> Gather(PartKind kind, List<(string Section, string Field, string[] Phrases)> lines)
     {
-        string family = kind is PartKind.Inverter or PartKind.Counter or PartKind.Port ? "amplifiers" : kind.Word();
+        string family = Family(kind);
         HashSet<string> fields =
         [
             .. PartShape.Of(kind).Fields.Select(field => field.Key), "price", "prices", "priceQuantity", "priceFor", "toleranceAny",

@@ -44,7 +44,8 @@ internal static class UnitChoice
                 : $"; no unit stated, {string.Join(" or ", possible.Select(each => each.Unit))} possible: state it");
     }
 
-    private static (int Power, string Unit)[] Units(Dimension dimension) => dimension switch
+    /// <summary>The units in which a dimension is written without naming it.</summary>
+    public static (int Power, string Unit)[] Units(Dimension dimension) => dimension switch
     {
         Dimension.Frequency => [(0, "Hz"), (3, "kHz"), (6, "MHz")],
         Dimension.Capacitance => [(0, "F"), (-15, "fF"), (-12, "pF"), (-9, "nF"), (-6, "uF")],

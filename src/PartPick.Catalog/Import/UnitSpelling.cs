@@ -26,7 +26,8 @@ internal static class UnitSpelling
         ["ppm / °c"] = "ppm/°C",
         ["℃"] = "°C", ["'c"] = "°C", ["°"] = "°C", ["kc"] = "kHz", ["mc"] = "MHz", ["pz"] = "", ["szt"] = "", ["ks"] = "", ["kpl"] = "",
         ["db"] = "", ["шт"] = "", ["个"] = "", ["個"] = "", ["ud"] = "", ["uds"] = "", ["pzas"] = "", ["pz."] = "", ["adet"] = "",
-        ["v="] = "V", ["volt dc"] = "V", ["vdcw"] = "V", ["ma max"] = "mA", ["ppm/an"] = "ppm", ["ppm/año"] = "ppm",
+        ["v="] = "V", ["vpp"] = "V", ["vss"] = "V", ["vp-p"] = "V", ["v pp"] = "V", ["vcc"] = "V",
+        ["volt dc"] = "V", ["vdcw"] = "V", ["ma max"] = "mA", ["ppm/an"] = "ppm", ["ppm/año"] = "ppm",
         ["ppm/anno"] = "ppm", ["ppm/ano"] = "ppm", ["ppm/år"] = "ppm", ["ppm/jaar"] = "ppm", ["ppm/rok"] = "ppm", ["ppm/annum"] = "ppm",
         ["ppm 1. jahr"] = "ppm", ["ppm/1st year"] = "ppm", ["ppm/1. jahr"] = "ppm",
         ["pcs"] = "", ["pcs."] = "", ["pc"] = "", ["stk"] = "", ["st"] = "", ["stück"] = "", ["ea"] = "", ["units"] = "", ["pieces"] = "",
@@ -35,8 +36,8 @@ internal static class UnitSpelling
 
     private static readonly Dictionary<string, string> CaseCounts = new(StringComparer.Ordinal)
     {
-        // Milli and mega differ in ohms and volts; a drive level in megawatts there is none.
-        ["MW"] = "mW", ["mW"] = "mW", ["mw"] = "mW", ["MOHM"] = "Mohm", ["MOhm"] = "Mohm", ["MOhms"] = "Mohm", ["Mohms"] = "Mohm",
+        // Milli and mega differ in ohms and volts; megawatts, megaamperes, megavolts and megasiemens no part has.
+        ["MA"] = "mA", ["MS"] = "mS", ["MV"] = "mV", ["MW"] = "mW", ["mW"] = "mW", ["mw"] = "mW", ["MOHM"] = "Mohm", ["MOhm"] = "Mohm", ["MOhms"] = "Mohm", ["Mohms"] = "Mohm",
         ["µF"] = "uF", ["μF"] = "uF", ["µW"] = "uW", ["μW"] = "uW", ["kΩ"] = "kohm", ["KΩ"] = "kohm", ["MΩ"] = "Mohm", ["mΩ"] = "mohm",
         ["Ω"] = "ohm", ["\u2126"] = "ohm",
     };

@@ -29,6 +29,8 @@ internal sealed class ValueMatching(PartKind kind, ColumnSample sample, NumberNo
             Take(uses, "prices", use => sample.Cells(use.Index).All(cell => PriceCells.List(cell, file) is { Count: > 1 }));
         }
 
+        Take(uses, "currency", use => sample.Cells(use.Index).All(Currencies.IsName));
+
         if (ImportFields.HasStages(kind))
         {
             Take(uses, "stages", use => sample.Cells(use.Index).All(cell => cell.Length > 3 && ImportFields.Stages(cell) is not null));
@@ -67,6 +69,7 @@ internal sealed class ValueMatching(PartKind kind, ColumnSample sample, NumberNo
                 Notation = file,
                 Why = field is "temperature" ? "its cells: temperature ranges"
                     : field is "stages" ? "its cells: buffered or not"
+                    : field is "currency" ? "its cells: currencies"
                     : field is "prices" ? "its cells: lists of prices" : "the unit of its cells",
             };
         }

@@ -106,7 +106,7 @@ internal sealed class BufferedBalance : AmplitudeBalance
     }
 
     /// <inheritdoc/>
-    public override double OutputSwingVolts()
+    public override (double Low, double High) OutputRangeVolts()
     {
         const int Points = 4096;
         const int Highest = Points / 2 - 1;
@@ -133,7 +133,7 @@ internal sealed class BufferedBalance : AmplitudeBalance
             largest = Math.Max(largest, Math.Abs(sample.Real));
         }
 
-        return 2 * largest;
+        return (-largest, largest);
     }
 
     /// <inheritdoc/>

@@ -88,6 +88,9 @@ internal abstract class ForcedState
     /// <summary>Whether this state has fewer harmonics than a kept one, for circuits alike to be compared.</summary>
     public virtual bool IsCoarserThan(RunningState near) => false;
 
-    /// <summary>Output swing in volts peak to peak of the last solved state.</summary>
-    public abstract double OutputSwingVolts();
+    /// <summary>
+    /// Lowest and highest output voltage of the last solved state, in volts: an inverter's against half the supply, an emitter's
+    /// against ground.
+    /// </summary>
+    public abstract (double Low, double High) OutputRangeVolts();
 }

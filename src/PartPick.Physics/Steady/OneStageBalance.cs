@@ -74,10 +74,11 @@ internal sealed class OneStageBalance : AmplitudeBalance
     }
 
     /// <inheritdoc/>
-    public override double OutputSwingVolts()
+    public override (double Low, double High) OutputRangeVolts()
     {
         ComputeVoltages(State, PeakAmps);
-        return 2 * HalfWave.LargestMagnitude(_output);
+        double largest = HalfWave.LargestMagnitude(_output);
+        return (-largest, largest);
     }
 
     /// <inheritdoc/>

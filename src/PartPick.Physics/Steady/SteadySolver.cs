@@ -267,13 +267,16 @@ internal static class SteadySolver
     private static SteadyState Describe(Crystal crystal, ForcedState balance)
     {
         RunningFigures figures = FiguresOf(crystal, balance);
+        (double low, double high) = balance.OutputRangeVolts();
         return new SteadyState
         {
             FrequencyHz = figures.FrequencyHz,
             LoadFarads = figures.LoadFarads,
             CurrentRmsAmps = figures.CurrentRmsAmps,
             DriveWatts = figures.DriveWatts,
-            OutputSwingVolts = balance.OutputSwingVolts(),
+            OutputSwingVolts = high - low,
+            OutputLowVolts = low,
+            OutputHighVolts = high,
             LimitedBySupply = balance.LimitedBySupply,
         };
     }

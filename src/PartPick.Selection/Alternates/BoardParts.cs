@@ -15,6 +15,21 @@ public sealed record BoardParts(CandidateParts Choice, SupportParts Support)
         return new BoardParts(choice, SupportParts.For(choice.Circuit, choice.Crystal.FrequencyHz, market));
     }
 
+    /// <summary>The parts of an analysed circuit.</summary>
+    /// <param name="candidate">The circuit.</param>
+    public static BoardParts Of(Candidate candidate)
+    {
+        ArgumentNullException.ThrowIfNull(candidate);
+        return new BoardParts(
+            candidate.Choice,
+            new SupportParts(
+                In(PartRoles.Feedback) as ResistorPart,
+                In(PartRoles.Decoupling) as CapacitorPart,
+                In(PartRoles.Coupling) as CapacitorPart));
+
+        Part? In(string role) => candidate.Parts.FirstOrDefault(use => use.Role == role)?.Part;
+    }
+
     /// <summary>The places that hold a part, in the order of the parts list.</summary>
     public ImmutableArray<PartPlace> Places => [.. Enum.GetValues<PartPlace>().Where(place => At(place) is not null)];
 

@@ -38,6 +38,7 @@ public static class BudgetBuilder
     {
         (double byC1, double byC2, double byAcross) = analysis.SlopesPerFarad;
         double reach = TemperatureReach(requirement);
+        var law = TemperatureLaw.Linear(reach);
         double strays = requirement.Board.UncertaintyRatio * (
             InputShare(choice) * Math.Abs(byC1) * requirement.Board.Strays.InputFarads
             + Math.Abs(byC2) * requirement.Board.Strays.OutputFarads
@@ -45,8 +46,14 @@ public static class BudgetBuilder
         var terms = crystalTerms.ToBuilder();
         terms.Add(new BudgetTerm("C1 tolerance", Math.Abs(byC1) * choice.C1.ValueFarads * Tolerance(choice.C1)));
         terms.Add(new BudgetTerm("C2 tolerance", Math.Abs(byC2) * choice.C2.ValueFarads * Tolerance(choice.C2)));
-        terms.Add(new BudgetTerm("C1 over temperature", Math.Abs(byC1) * choice.C1.ValueFarads * Coefficient(choice.C1) * reach));
-        terms.Add(new BudgetTerm("C2 over temperature", Math.Abs(byC2) * choice.C2.ValueFarads * Coefficient(choice.C2) * reach));
+        terms.Add(new BudgetTerm("C1 over temperature", Math.Abs(byC1) * choice.C1.ValueFarads * Coefficient(choice.C1) * reach)
+        {
+            Law = law,
+        });
+        terms.Add(new BudgetTerm("C2 over temperature", Math.Abs(byC2) * choice.C2.ValueFarads * Coefficient(choice.C2) * reach)
+        {
+            Law = law,
+        });
         terms.Add(new BudgetTerm("strays", strays, "assumed"));
         if (crystal.MotionalAssumed)
         {

@@ -7,7 +7,8 @@ namespace PartPick.Selection;
 /// <summary>A figure at its worst corner.</summary>
 /// <param name="Value">The figure, SI.</param>
 /// <param name="Corner">The corner in words: "4.5 V, 50 °C, weakest device, capacitances high".</param>
-public sealed record AtCorner(double Value, string Corner);
+/// <param name="Point">The corner itself; null where only its words are known.</param>
+public sealed record AtCorner(double Value, string Corner, OperatingPoint? Point = null);
 
 /// <summary>A fully analysed combination of parts.</summary>
 public sealed record Candidate

@@ -21,16 +21,14 @@ public sealed class CandidateBuilder(Requirement requirement, Market market)
     {
         ArgumentNullException.ThrowIfNull(choice);
         ArgumentNullException.ThrowIfNull(support);
-        CrystalModel model = CrystalModel.From(choice.Crystal);
-        if (TemplateOf(choice, support, model) is not { } template)
+        if (CandidateStudy.Of(requirement, choice, support) is not { } study)
         {
             return null;
         }
 
-        CircuitValues values = CircuitValues.Of(choice);
-        var analysis = new ValueAnalysis(template, requirement, values);
-        CornerAnalysis corners = CornersOf(choice, template, values);
-        ErrorBudget? budget = BudgetBuilder.Build(choice, requirement, model, CrystalSpread.Of(choice.Crystal, requirement), analysis);
+        (ValueAnalysis analysis, CornerAnalysis corners) = (study.Analysis, study.Corners);
+        ErrorBudget? budget = BudgetBuilder.Build(
+            choice, requirement, study.Model, CrystalSpread.Of(choice.Crystal, requirement), analysis);
         AtCorner? drive = budget is null ? null : corners.Drive(analysis);
         AtCorner? time = budget is null ? null : corners.StartUpTime(analysis);
         decimal cost = BillOfParts.UnitCost(choice, support, market);
@@ -73,18 +71,12 @@ public sealed class CandidateBuilder(Requirement requirement, Market market)
     /// <param name="support">The parts that the circuit needs besides.</param>
     internal bool? StartsWithMargin(CandidateParts choice, SupportParts support)
     {
-        if (TemplateOf(choice, support, CrystalModel.From(choice.Crystal)) is not { } template)
+        if (CandidateStudy.TemplateOf(requirement, choice, support, CrystalModel.From(choice.Crystal)) is not { } template)
         {
             return null;
         }
 
-        CornerAnalysis corners = CornersOf(choice, template, CircuitValues.Of(choice));
+        CornerAnalysis corners = CandidateStudy.CornersOf(requirement, choice, template);
         return corners.Margin.Value >= requirement.Margin && corners.Starts;
     }
-
-    private CircuitTemplate? TemplateOf(CandidateParts choice, SupportParts support, CrystalModel model) => CircuitTemplate.Create(
-        requirement, choice.Circuit, model, choice.Amplifier, support.Feedback?.ValueOhms ?? double.PositiveInfinity);
-
-    private CornerAnalysis CornersOf(CandidateParts choice, CircuitTemplate template, CircuitValues values) => new(
-        template, requirement, values, BudgetBuilder.Tolerance(choice.C1), BudgetBuilder.Tolerance(choice.C2));
 }

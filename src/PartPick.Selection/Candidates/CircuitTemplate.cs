@@ -13,11 +13,13 @@ public sealed class CircuitTemplate
     private readonly Requirement _requirement;
     private readonly Dictionary<(double Supply, DeviceStrength Strength), Inverter> _inverters = [];
     private readonly Dictionary<DeviceStrength, Transistor> _transistors = [];
+    private readonly Part _amplifier;
     private readonly double _feedbackOhms;
 
-    private CircuitTemplate(Requirement requirement, CircuitKind kind, CrystalModel crystal, double feedbackOhms)
+    private CircuitTemplate(Requirement requirement, CircuitKind kind, CrystalModel crystal, Part amplifier, double feedbackOhms)
     {
         _requirement = requirement;
+        _amplifier = amplifier;
         Kind = kind;
         Crystal = crystal;
         _feedbackOhms = feedbackOhms;
@@ -47,7 +49,7 @@ public sealed class CircuitTemplate
         Requirement requirement, CircuitKind kind, CrystalModel crystal, Part amplifier, double feedbackOhms)
     {
         ArgumentNullException.ThrowIfNull(requirement);
-        var template = new CircuitTemplate(requirement, kind, crystal, feedbackOhms);
+        var template = new CircuitTemplate(requirement, kind, crystal, amplifier, feedbackOhms);
         return template.TakeDevices(amplifier) ? template : null;
     }
 
@@ -91,11 +93,17 @@ public sealed class CircuitTemplate
             Strays = strays,
             SupplyVolts = point.SupplyVolts,
             TemperatureCelsius = point.TemperatureCelsius,
-            Inverter = _inverters[(point.SupplyVolts, point.Strength)],
+            Inverter = InverterAt(point),
             SeriesOhms = values.SeriesOhms,
             FeedbackOhms = _feedbackOhms,
         };
     }
+
+    // The corners' devices are at hand; one between them is made when it is asked for.
+    private Inverter InverterAt(OperatingPoint point) =>
+        _inverters.TryGetValue((point.SupplyVolts, point.Strength), out Inverter? device) ? device
+        : InverterModel.At((AmplifierPart)_amplifier, point.SupplyVolts, point.Strength)
+            ?? throw new ArgumentOutOfRangeException(nameof(point), point, "The amplifier is not specified there.");
 
     private bool TakeDevices(Part amplifier)
     {

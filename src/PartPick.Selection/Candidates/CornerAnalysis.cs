@@ -39,6 +39,45 @@ public sealed class CornerAnalysis
     /// <summary>Whether it builds up, or may be kicked into running, at every corner.</summary>
     public bool Starts => (_start ??= FindStart()).BuildsUp;
 
+    /// <summary>The corners of a candidate that is analysed already; null where its amplifier is not specified over the supply range.</summary>
+    /// <param name="candidate">The candidate.</param>
+    /// <param name="requirement">What is needed.</param>
+    public static CornerAnalysis? Of(Candidate candidate, Requirement requirement)
+    {
+        ArgumentNullException.ThrowIfNull(candidate);
+        CandidateParts choice = candidate.Choice;
+        double feedback = candidate.Nominal is GateCircuit gate ? gate.FeedbackOhms : double.PositiveInfinity;
+        return CircuitTemplate.Create(
+            requirement, choice.Circuit, CrystalModel.From(choice.Crystal), choice.Amplifier, feedback) is { } template
+            ? new CornerAnalysis(
+                template, requirement, CircuitValues.Of(choice), BudgetBuilder.Tolerance(choice.C1), BudgetBuilder.Tolerance(choice.C2))
+            : null;
+    }
+
+    /// <summary>
+    /// The margin at any operating point within the required ranges, and whether it builds up there or may be kicked into running;
+    /// the least over the corners is <see cref="Margin"/>.
+    /// </summary>
+    /// <param name="point">The operating point.</param>
+    public (double Margin, bool Starts) MarginAt(OperatingPoint point)
+    {
+        OscillatorCircuit circuit = _template.At(_values, point, _c1Tolerance, _c2Tolerance);
+        StartFigures figures = OscillatorAnalysis.FindStartFigures(circuit);
+        if (figures.GrowthRatePerSecond > 0)
+        {
+            return (figures.Margin, true);
+        }
+
+        if (!_requirement.AllowDisturbance)
+        {
+            return (figures.Margin, false);
+        }
+
+        OscillatorResult result = OscillatorAnalysis.Analyse(circuit);
+        bool kicked = result.Start == StartKind.NeedsDisturbance;
+        return (kicked ? result.RunningMargin : figures.Margin, kicked);
+    }
+
     /// <summary>Highest drive level in watts; null where a corner has no steady state.</summary>
     public AtCorner? Drive(ValueAnalysis analysis) => (_worst ??= FindRunning(analysis)).Drive;
 
@@ -55,6 +94,19 @@ public sealed class CornerAnalysis
     {
         ArgumentNullException.ThrowIfNull(analysis);
         return _template.Corners.Reverse().All(point => At(analysis, point) is { } steady && !(steady.DriveWatts > ratedWatts));
+    }
+
+    /// <summary>The circuit at a corner.</summary>
+    /// <param name="point">The corner.</param>
+    public OscillatorCircuit CircuitAt(OperatingPoint point) => _template.At(_values, point, _c1Tolerance, _c2Tolerance);
+
+    /// <summary>The steady state at a corner, as the worst of drive level and start-up time take it; null where there is none.</summary>
+    /// <param name="analysis">The figures of the nominal values.</param>
+    /// <param name="point">The corner.</param>
+    public RunningFigures? RunningAt(ValueAnalysis analysis, OperatingPoint point)
+    {
+        ArgumentNullException.ThrowIfNull(analysis);
+        return At(analysis, point);
     }
 
     private RunningFigures? At(ValueAnalysis analysis, OperatingPoint point)
@@ -75,29 +127,15 @@ public sealed class CornerAnalysis
         bool starts = true;
         foreach (OperatingPoint point in _template.Corners)
         {
-            OscillatorCircuit circuit = _template.At(_values, point, _c1Tolerance, _c2Tolerance);
-            StartFigures figures = OscillatorAnalysis.FindStartFigures(circuit);
-            double margin = figures.Margin;
-            if (figures.GrowthRatePerSecond <= 0)
-            {
-                bool kicked = false;
-                if (_requirement.AllowDisturbance)
-                {
-                    OscillatorResult result = OscillatorAnalysis.Analyse(circuit);
-                    kicked = result.Start == StartKind.NeedsDisturbance;
-                    margin = kicked ? result.RunningMargin : margin;
-                }
-
-                starts &= kicked;
-            }
-
+            (double margin, bool startsHere) = MarginAt(point);
+            starts &= startsHere;
             if (margin < least)
             {
                 (least, where) = (margin, point);
             }
         }
 
-        return (new AtCorner(least, where.Describe(_template.Kind)), starts);
+        return (new AtCorner(least, where.Describe(_template.Kind), where), starts);
     }
 
     private (AtCorner? Drive, AtCorner? Time) FindRunning(ValueAnalysis analysis)
@@ -130,7 +168,7 @@ public sealed class CornerAnalysis
         }
 
         return (
-            new AtCorner(mostDrive, driven.Describe(_template.Kind)),
-            double.IsFinite(longest) ? new AtCorner(longest, slow.Describe(_template.Kind)) : null);
+            new AtCorner(mostDrive, driven.Describe(_template.Kind), driven),
+            double.IsFinite(longest) ? new AtCorner(longest, slow.Describe(_template.Kind), slow) : null);
     }
 }

@@ -6,7 +6,11 @@ namespace PartPick.Selection;
 /// <param name="Term">What spreads, in words.</param>
 /// <param name="Ratio">Its largest effect on the frequency, as a ratio.</param>
 /// <param name="RestsOn">"typical" or "assumed" where the figure rests on such a value; null where it is guaranteed.</param>
-public sealed record BudgetTerm(string Term, double Ratio, string? RestsOn = null);
+public sealed record BudgetTerm(string Term, double Ratio, string? RestsOn = null)
+{
+    /// <summary>How the spread goes over temperature; null where it is the same at every temperature.</summary>
+    public TemperatureLaw? Law { get; init; }
+}
 
 /// <summary>The frequency error of a candidate: its centre and every spread, named.</summary>
 /// <param name="CentreRatio">e0 = f/(2^k f_target) − 1.</param>

@@ -1,3 +1,5 @@
+using System.Collections.Immutable;
+
 namespace PartPick.Selection;
 
 /// <summary>The hard limits of a requirement, in the order in which a candidate is judged.</summary>
@@ -38,4 +40,9 @@ public enum Limit
 /// <param name="Limit">Which one.</param>
 /// <param name="Sentence">How far it is off, as a sentence with the numbers in it.</param>
 /// <param name="Ratio">By how much: the used share of the limit, above one.</param>
-public sealed record Miss(Limit Limit, string Sentence, double Ratio);
+public sealed record Miss(Limit Limit, string Sentence, double Ratio)
+{
+    /// <summary>How far a candidate is from being fit: the sum of the logarithms of what it uses of the limits that it breaks.</summary>
+    /// <param name="misses">The limits that it breaks.</param>
+    internal static double Distance(ImmutableArray<Miss> misses) => misses.Sum(miss => Math.Log(Math.Max(miss.Ratio, 1)));
+}

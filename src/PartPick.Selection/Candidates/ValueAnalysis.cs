@@ -16,7 +16,7 @@ public sealed class ValueAnalysis
     private readonly OperatingPoint _nominal;
     private readonly RunningState? _state;
     private RunningFigures? _steady;
-    private (double Ratio, double Watts)? _amplifier;
+    private (double Ratio, double Watts, OperatingPoint? Farthest)? _amplifier;
     private (double C1, double C2, double Across)? _slopes;
     private (double C1, double C2, double Across)? _firstOrderSlopes;
 
@@ -73,6 +73,9 @@ public sealed class ValueAnalysis
     /// <summary>Largest relative |f(corner) − f| over amplifier, supply and ambient; infinite where a corner has no steady state.</summary>
     public double AmplifierRatio => (_amplifier ??= FindOverAmplifier()).Ratio;
 
+    /// <summary>The corner of amplifier, supply and ambient whose frequency is farthest off; null where none was found.</summary>
+    public OperatingPoint? AmplifierFarthest => (_amplifier ??= FindOverAmplifier()).Farthest;
+
     /// <summary>Highest drive level in watts over amplifier, supply and ambient, at nominal capacitances.</summary>
     public double AmplifierDriveWatts => (_amplifier ??= FindOverAmplifier()).Watts;
 
@@ -95,19 +98,21 @@ public sealed class ValueAnalysis
 
     private double BaseHz() => Base?.FrequencyHz ?? double.NaN;
 
-    private (double Ratio, double Watts) FindOverAmplifier()
+    private (double Ratio, double Watts, OperatingPoint? Farthest) FindOverAmplifier()
     {
         double most = 0;
         double watts = 0;
+        OperatingPoint? farthest = null;
         foreach (OperatingPoint point in _template.AmplifierCorners)
         {
             RunningFigures? state = Follow(_template.At(_values, point));
             double shift = state is null ? double.NaN : Math.Abs(state.FrequencyHz / BaseHz() - 1);
+            farthest = shift > most ? point : farthest;
             most = Math.Max(most, double.IsNaN(shift) ? double.PositiveInfinity : shift);
             watts = Math.Max(watts, state?.DriveWatts ?? double.PositiveInfinity);
         }
 
-        return (most, watts);
+        return (most, watts, farthest);
     }
 
     private (double C1, double C2, double Across) Slopes()

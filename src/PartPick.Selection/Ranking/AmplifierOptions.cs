@@ -61,8 +61,10 @@ internal sealed class AmplifierOptions
             EmitterOhms = emitter.ValueOhms,
         }).EmitterAmps;
 
-    // A resistor's tolerance does not enter the model, so of one value the cheapest is taken.
-    private static ImmutableArray<ResistorPart> ByValue(Market market, string series)
+    /// <summary>
+    /// The resistors of a series, one a value: a resistor's tolerance does not enter the model, so of one value the cheapest is taken.
+    /// </summary>
+    internal static ImmutableArray<ResistorPart> ByValue(Market market, string series)
     {
         SeriesMembership membership = new(series);
         return

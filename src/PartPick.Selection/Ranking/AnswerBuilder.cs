@@ -44,6 +44,7 @@ internal sealed class AnswerBuilder(SearchRun run, RankingOptions options)
             Candidates = [.. candidates],
             Front = [.. front.Select(point => point.Id)],
             NearestMisses = nearest,
+            CheapestCost = run.Leaders.Cheapest,
             Rejections = run.Tally.Rejections(),
             IsComplete = complete,
             ElapsedSeconds = elapsedSeconds,
@@ -56,11 +57,9 @@ internal sealed class AnswerBuilder(SearchRun run, RankingOptions options)
             .Concat(RelaxedSearch.Find(run.Space, NearestListed, run.Cancellation))
             .DistinctBy(CandidateId.Of)
             .Select(_builder.Build).OfType<Candidate>()
-            .OrderBy(Distance).ThenBy(candidate => candidate.Id, StringComparer.Ordinal)
+            .OrderBy(candidate => Miss.Distance(candidate.Misses)).ThenBy(candidate => candidate.Id, StringComparer.Ordinal)
             .Take(NearestListed),
     ];
-
-    private static double Distance(Candidate candidate) => candidate.Misses.Sum(miss => Math.Log(Math.Max(miss.Ratio, 1)));
 
     private FitPoint[] Snapshot()
     {

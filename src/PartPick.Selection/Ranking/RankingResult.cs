@@ -34,6 +34,9 @@ public sealed record RankingResult
     /// <summary>The nearest misses where nothing is fit, nearest first.</summary>
     public required ImmutableArray<Candidate> NearestMisses { get; init; }
 
+    /// <summary>Cheapest cost of a fit circuit, to which the scores are relative; null where nothing is fit.</summary>
+    public decimal? CheapestCost { get; init; }
+
     /// <summary>How many combinations each limit removed (each counted at the first limit it breaks).</summary>
     public required ImmutableDictionary<Limit, double> Rejections { get; init; }
 

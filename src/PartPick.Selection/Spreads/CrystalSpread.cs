@@ -7,11 +7,11 @@ namespace PartPick.Selection;
 public static class CrystalSpread
 {
     // Class defaults where a part states nothing (common practice, from memory).
+    internal const double AssumedAgeing = 5e-6;
+    internal const double ForkParabolaPerSquareKelvin = -0.034e-6;
+    internal const double ForkTurnoverCelsius = 25;
     private const double AssumedTolerance = 50e-6;
     private const double AssumedStability = 50e-6;
-    private const double AssumedAgeing = 5e-6;
-    private const double ForkParabolaPerSquareKelvin = -0.034e-6;
-    private const double ForkTurnoverCelsius = 25;
 
     /// <summary>Tolerance, temperature and ageing over a requirement.</summary>
     public static ImmutableArray<BudgetTerm> Of(CrystalPart part, Requirement requirement)
@@ -38,8 +38,12 @@ public static class CrystalSpread
             double reach = Math.Max(
                 Math.Abs(requirement.TemperatureMinCelsius - turnover),
                 Math.Abs(requirement.TemperatureMaxCelsius - turnover));
-            double curvature = Math.Abs(part.ParabolaPerSquareKelvin ?? ForkParabolaPerSquareKelvin);
-            return new BudgetTerm(Term, curvature * reach * reach, RestsOn(part, "parabola", part.ParabolaPerSquareKelvin));
+            double parabola = part.ParabolaPerSquareKelvin ?? ForkParabolaPerSquareKelvin;
+            double curvature = Math.Abs(parabola);
+            return new BudgetTerm(Term, curvature * reach * reach, RestsOn(part, "parabola", part.ParabolaPerSquareKelvin))
+            {
+                Law = TemperatureLaw.Parabola(turnover, reach, Math.Sign(parabola)),
+            };
         }
 
         return new BudgetTerm(Term, AssumedStability, "assumed");

@@ -22,6 +22,11 @@ internal static class Say
 
     public static string Celsius(double value) => ValueText.Format(value, Dimension.Temperature);
 
+    public static string Seconds(double value) => ValueText.Format(value, Dimension.Time);
+
+    /// <summary>An amount of money: two decimals, more where it has them.</summary>
+    public static string Money(decimal amount) => amount.ToString("0.00##", CultureInfo.InvariantCulture);
+
     /// <summary>A plain number to three digits, never with an exponent below a million.</summary>
     public static string Number(double value) => ValueText.Format(value, Dimension.Number);
 

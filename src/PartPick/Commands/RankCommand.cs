@@ -12,10 +12,12 @@ internal static class RankCommand
         partpick rank requirement.json
         partpick rank requirement.json --top 5 --budget "50 ppm" --circuits gate counter
         partpick rank --output "1 kHz" --supply "4.5 V..5.5 V" --temperature -10..50 --format json
+        partpick rank requirement.json --why-not X-04M096-18-H49-10
         A requirement file: { "output": "1 kHz", "waveform": "square", "budget": "80 ppm", "supply": ["4.5 V", "5.5 V"],
           "temperature": [-10, 50], "years": 5, "margin": 5, "builds": 200, "costLimit": 2.50, "board": "two-layer" }
         Only output is needed. Any key may be given as an option, which then counts instead of the file's.
-        Exit status: 0 done, 1 nothing fits (the nearest misses are printed), 2 wrong input, 3 the catalogue cannot be used.
+        Exit status: 0 done, 1 nothing fits (the nearest misses are printed) or the part of --why-not does not, 2 wrong input,
+        3 the catalogue cannot be used.
         """;
 
     /// <summary>Builds the command.</summary>
@@ -32,10 +34,14 @@ internal static class RankCommand
             Description = "The front alone: candidates that no other beats on error, margin and cost",
         };
         var all = new Option<bool>("--all") { Description = "Every fit candidate, not only the best of each group" };
+        var whyNot = new Option<string?>("--why-not")
+        {
+            Description = "Why a crystal or an amplifier is not in the list, and what change would let it in", HelpName = "ID",
+        };
         var quiet = new Option<bool>("--no-progress") { Description = "Show no progress" };
         var command = new Command("rank", "Ranks the combinations of parts that fit a requirement, best first.")
         {
-            file, top, front, all, quiet, context.Format,
+            file, top, front, all, whyNot, quiet, context.Format,
         };
         (RequirementKey Key, Option<string?> Option)[] keys = [.. RequirementKeys.All.Select(key => (key, OptionOf(key)))];
         foreach ((_, Option<string?> option) in keys)
@@ -55,6 +61,11 @@ internal static class RankCommand
                     .Select(key => new RequirementOption(key.Key, parsed.GetValue(key.Option))),
             ];
             Requirement requirement = CommandFailure.Unless(RequirementFile.Read(text, name, options));
+            if (parsed.GetValue(whyNot) is { } id)
+            {
+                return WhyNotRun.Of(context, parsed, requirement, id, whyNot.Name, parsed.GetValue(quiet));
+            }
+
             var wanted = new RankingOptions
             {
                 Top = Counts.Read(parsed.GetValue(top), top.Name) ?? (parsed.GetValue(all) ? null : 50),
@@ -69,9 +80,7 @@ internal static class RankCommand
     private static int Run(
         CommandContext context, ParseResult parsed, Requirement requirement, RankingOptions options, bool quiet)
     {
-        var parts = new PartsOnDemand(new Catalog.StoredParts(context.CatalogPath(parsed)));
-        CommandFailure.Unless(parts.Open(context.Surroundings.Cancellation), ExitStatus.NoCatalog);
-        RankingResult result = RankingProgress.Over(context.Surroundings, quiet, progress => Rank(context, requirement, parts, options, progress));
+        RankingResult result = Rank(context, parsed, requirement, options, quiet);
         var view = new RankView(result, context.Surroundings.UsesColour);
         switch (context.FormatOf(parsed))
         {
@@ -87,6 +96,15 @@ internal static class RankCommand
         }
 
         return result.Candidates.IsEmpty ? ExitStatus.NothingFits : ExitStatus.Done;
+    }
+
+    /// <summary>Ranks the parts of the catalogue, with its progress on a terminal.</summary>
+    internal static RankingResult Rank(
+        CommandContext context, ParseResult parsed, Requirement requirement, RankingOptions options, bool quiet)
+    {
+        var parts = new PartsOnDemand(new Catalog.StoredParts(context.CatalogPath(parsed)));
+        CommandFailure.Unless(parts.Open(context.Surroundings.Cancellation), ExitStatus.NoCatalog);
+        return RankingProgress.Over(context.Surroundings, quiet, progress => Rank(context, requirement, parts, options, progress));
     }
 
     private static RankingResult Rank(

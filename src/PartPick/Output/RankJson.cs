@@ -31,7 +31,8 @@ internal static class RankJson
         return json;
     }
 
-    private static JsonObject Candidate(Candidate candidate, double targetHz)
+    /// <summary>One candidate.</summary>
+    internal static JsonObject Candidate(Candidate candidate, double targetHz)
     {
         CandidateParts choice = candidate.Choice;
         CircuitDescription circuit = candidate.Describe(targetHz);

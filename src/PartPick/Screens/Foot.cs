@@ -28,28 +28,39 @@ internal sealed class Foot(MainModel model, Glyphs glyphs, int width)
             return naming.Draw(model.Kept.Enter, width, glyphs);
         }
 
+        if (model is { ShowsKeys: false, Pictures.Asking: { } file })
+        {
+            return file.Draw("write", width, glyphs);
+        }
+
         return model switch
         {
             { Notice: { } notice } => [new LineBuilder(glyphs).Add(" ").Column(notice, width - 1, Tone.Accent).Build()],
             { ShowsKeys: true } => [Keys((UpDown, "scroll"), ("Esc", "back"))],
+            { Questions.IsOpen: true } => [Keys(model.Questions.Keys(glyphs))],
             { Shortlists.Page.Replacements: not null } => [Keys(
                 (UpDown, "choose"), (glyphs.Left + " " + glyphs.Right, "other parts"), ("Esc", "the list"), ("?", "keys"))],
             { Shortlists.Page.Quantity: not null } => [Keys((UpDown, "scroll"), ("Esc", "the list"), ("?", "keys"))],
             { Shortlists.IsOpen: true } => [Keys(
                 (glyphs.Left + " " + glyphs.Right, "lists"), ("Del", "take off"), ("x", "to a file"), ("r", "replacements"),
                 ("b", "cost over boards"), ("Esc", "back"))],
+            { Differences.Pair: not null } => [Keys((UpDown, "scroll"), ("Esc", "back"), ("?", "keys"))],
             { Kept: { IsOpen: true, Comparison.IsOpen: true } } => [Keys(
                 (glyphs.Left + " " + glyphs.Right, "others"), (UpDown, "scroll"), ("Esc", "what is kept"), ("?", "keys"))],
             { Kept.IsOpen: true } => [Keys(KeptKeys)],
+            { Pictures.IsOpen: true } => [Keys(
+                (glyphs.Left + " " + glyphs.Right, "other pictures"), ("x", "to an SVG file"), ("Esc", "back"), ("?", "keys"))],
             { Place: Place.Sentence, Wanted.Typed: not null } => [Value(("Enter", "keep"), ("Esc", "as it was"))],
             { Place: Place.Sentence } => [Value(("Tab", "next"), ("Esc", model.IsReading ? "circuit" : "list"))],
-            { Place: Place.Circuit } => [Keys(
-                (UpDown, "scroll"), (glyphs.Left + " " + glyphs.Right, "other circuits"), ("s", "to a list"), ("Esc", "list"),
-                ("e", "edit"), ("?", "keys"))],
-            { List.Chosen: null } => [Keys([("e", "edit the wanted"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
+            { Place: Place.Circuit } => [Keys([
+                .. new[] { ("n", "next"), ("d", "differences"), ("h", "how"), (UpDown, "part"), (glyphs.Left + " " + glyphs.Right, "value") },
+                .. model.Swaps.IsChanged ? new[] { ("Backspace", "as ranked") } : [],
+                ("p", "pictures"), ("s", "to a list"), ("Esc", "list"), ("?", "keys")])],
+            { List.Chosen: null } =>
+                [Keys([("y", "why not a part"), ("e", "edit the wanted"), .. Catalogue, ("?", "keys"), ("q", "quit")])],
             _ => [Keys([
-                (UpDown, "choose"), ("Enter", "open"), ("s", "to a list"), .. Kept, ("e", "edit"), .. Catalogue, ("?", "keys"),
-                ("q", "quit")])],
+                (UpDown, "choose"), ("d", "differences"), ("h", "how"), .. Kept, .. Catalogue, ("y", "why not"), ("p", "pictures"),
+                ("s", "to a list"), ("Enter", "open"), ("e", "edit"), ("?", "keys"), ("q", "quit")])],
         };
     }
 

@@ -22,8 +22,12 @@ public static class KeysPage
         Key($"{glyphs.Up} {glyphs.Down}", "the circuit before, the next one; also PgUp, PgDn, Home, End");
         Key("Enter", "open the circuit: drawing, parts, error, figures, reasons");
         Key("s", "put the circuit on a list; so in a circuit, too");
+        Key("p", "pictures of the circuit, one after the other: " + glyphs.Left + " " + glyphs.Right + "; x writes one to an SVG file");
+        Key("d", "differences: marks the circuit, and shows the marked one and another side by side; so in a circuit, too");
         Key("l", "the lists: what changed since, and writing them to files");
         Key("w", "what is kept: requirements by name, to take one, copy it, or put some side by side");
+        Key("y", "why not: which limit keeps a crystal or amplifier out of the list, and what would let it in");
+        Key("h", "how each figure of the circuit comes about; so in a circuit, too");
         Key("e or Tab", "edit the wanted sentence; so does " + glyphs.Up + " on the first circuit");
         Key("c", "the catalogue: its parts, and the import of a list");
         Key("?", "this page");
@@ -37,9 +41,14 @@ public static class KeysPage
         Key("Space", "the next choice; the first letter of a choice picks it");
         Key("Esc", "leave the value as it was; once more, back to the list or circuit");
         Head("In a circuit");
-        Key($"{glyphs.Up} {glyphs.Down}", "scroll; also PgUp, PgDn, Home, End");
-        Key($"{glyphs.Left} {glyphs.Right}", "the circuit before, the next one, at the same place of the page");
-        Key("Esc", "back to the list");
+        Key($"{glyphs.Up} {glyphs.Down}", "choose a part: capacitors, resistors, crystal, amplifier, stage");
+        Key($"{glyphs.Left} {glyphs.Right}", "its value before, its next one: every figure follows, with its change against the ranked " +
+            "circuit; s puts the changed circuit on a list as it stands, d shows it beside the ranked one");
+        Key("0", "a direct connection in the place of Rs, or no lower base resistor");
+        Key("Backspace", "the chosen part as it was ranked; Del takes all changes back");
+        Key("n b", "the next circuit, the one before, at the same place of the page");
+        Key("PgUp PgDn", "scroll; also Space, Home, End");
+        Key("Esc", "back to the list; what was changed is kept until you leave the program");
         Head("The pictures");
         Text($"{Bars.Bar(0.5, 8, glyphs)} is a limit and the part of it that is used up: half of it here. " +
             $"{Bars.Bar(2, 8, glyphs)} is beyond it, {Bars.Bar(0.01, 8, glyphs)} hardly used. " +
@@ -82,6 +91,7 @@ public static class KeysPage
             Key($"{glyphs.Left} {glyphs.Right}", "mark a column; o puts the parts in its order, o again turns the order round");
             Key("k", "the next kind of part");
             Key("Enter", "open the part: each figure with what it rests on and where it came from");
+            Key("y", "why the part is not in the list of circuits; so in a part");
             Key("i", "import a list; u takes the last import back, when pressed twice");
             Head("In a part of the catalogue");
             Key("Enter", "change the figure; a digit begins a new one; no import changes what was set by hand");

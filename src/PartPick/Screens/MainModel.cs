@@ -1,11 +1,12 @@
 using System.Collections.Immutable;
 using PartPick.Requirements;
 using PartPick.Selection;
+using PartPick.WhyNot;
 
 namespace PartPick.Screens;
 
 /// <summary>The screen: sentence, list and circuit, and what the keys do. Knows nothing of the terminal.</summary>
-public sealed class MainModel
+public sealed partial class MainModel
 {
     private static readonly TimeSpan AfterChoice = TimeSpan.FromMilliseconds(150);
     private static readonly TimeSpan WhileTyping = TimeSpan.FromMilliseconds(400);
@@ -39,6 +40,7 @@ public sealed class MainModel
         Notice = notice;
         _waits = waits;
         _reading = new Reading(List);
+        Differences = new DifferencesModel(List);
         Wanted = SentenceOf(requirement, currency);
         _ranking.Answered += Take;
         _ranking.Failed += problem => Say($"! {problem}");
@@ -75,6 +77,12 @@ public sealed class MainModel
     /// <summary>The kept requirements.</summary>
     internal KeptModel Kept { get; private set; } = new();
 
+    /// <summary>The pictures of a candidate.</summary>
+    internal PicturesModel Pictures { get; private set; } = new();
+
+    /// <summary>What can be asked of the list and of a circuit.</summary>
+    internal QuestionModel Questions { get; private set; } = new();
+
     /// <summary>Where the keys go.</summary>
     public Place Place { get; private set; }
 
@@ -91,7 +99,7 @@ public sealed class MainModel
     internal bool KeepsReading => Place == Place.Sentence && _reading.IsThere;
 
     /// <summary>Whether the keys go to the list, with nothing open beside it.</summary>
-    internal bool IsInList => Place == Place.List && !ShowsKeys && !Shortlists.IsOpen && !Kept.IsOpen;
+    internal bool IsInList => Place == Place.List && !ShowsKeys && !Shortlists.IsOpen && !Kept.IsOpen && Differences.Pair is null;
 
     /// <summary>Whether the list answers an older requirement.</summary>
     public bool IsStale { get; private set; }
@@ -116,6 +124,9 @@ public sealed class MainModel
     {
         Kept.Stop();
         Shortlists.Stop();
+        Pictures.Close();
+        Swaps.Forget();
+        Questions.Stop();
         _ranking.Stop();
     }
 
@@ -140,9 +151,9 @@ public sealed class MainModel
         Redraw?.Invoke();
     }
 
-    /// <summary>Stops what the user may want to stop without leaving: an import that runs.</summary>
+    /// <summary>Stops what the user may want to stop without leaving: an import that runs, an answer that is looked for.</summary>
     /// <returns>Whether there was such a thing.</returns>
-    public bool Interrupt() => Place == Place.Parts && Parts!.Interrupt();
+    public bool Interrupt() => Questions.Interrupt() || Place == Place.Parts && Parts!.Interrupt();
 
     /// <summary>Takes a key.</summary>
     /// <param name="key">The key.</param>
@@ -155,9 +166,19 @@ public sealed class MainModel
             return;
         }
 
-        if (Shortlists.Press(key, out string? notice) || Kept.Press(key, out notice))
+        if (Questions.Press(key))
+        {
+            return;
+        }
+
+        if (Shortlists.Press(key, out string? notice) || Kept.Press(key, out notice) || Pictures.Press(key, out notice))
         {
             Notice = notice;
+            return;
+        }
+
+        if (Differences.Press(key))
+        {
             return;
         }
 
@@ -221,6 +242,24 @@ public sealed class MainModel
         };
     }
 
+    /// <summary>Lets pictures of circuits be opened; without it there are none.</summary>
+    /// <param name="work">Does what takes long.</param>
+    public void DrawPicturesWith(ScreenWork work)
+    {
+        Pictures = new PicturesModel(work);
+        Pictures.Redraw += () => Redraw?.Invoke();
+        Pictures.Said += Say;
+    }
+
+    /// <summary>Lets questions be asked; without it there are none.</summary>
+    /// <param name="desk">What answers why a part is not in the list.</param>
+    /// <param name="work">Does what takes long.</param>
+    public void AnswerQuestionsAt(IWhyNotDesk desk, ScreenWork work)
+    {
+        Questions = new QuestionModel(desk, work);
+        Questions.Redraw += () => Redraw?.Invoke();
+    }
+
     /// <summary>The screen as lines, each as wide as the screen.</summary>
     /// <param name="width">Width in cells.</param>
     /// <param name="height">Height in rows.</param>
@@ -247,35 +286,15 @@ public sealed class MainModel
         }
     }
 
-    private void PressInCircuit(KeyPress key)
-    {
-        if (CircuitScroll.Press(key))
-        {
-            return;
-        }
-
-        switch (key.Name)
-        {
-            case KeyName.Escape or KeyName.Enter or KeyName.Backspace:
-                _reading.Close();
-                Place = Place.List;
-                break;
-            case KeyName.Left or KeyName.Right:
-                List.Move(key.Name == KeyName.Left ? -1 : 1);
-                _reading.Open();
-                break;
-            default:
-                PressAnywhere(key);
-                break;
-        }
-    }
-
     private void PressInParts(KeyPress key)
     {
         switch (Parts!.Press(key))
         {
             case PartsAnswer.Leave:
                 LeaveParts();
+                break;
+            case PartsAnswer.NotMine when key.Letter == 'y' && Parts.AskableId is { } id:
+                Questions.AskWhyNot(Wanted.Accepted, null, id);
                 break;
             case PartsAnswer.NotMine when key.Letter is '?' or 'q':
                 PressAnywhere(key);
@@ -377,7 +396,7 @@ public sealed class MainModel
                 break;
             case KeyName.Enter when List.Chosen is not null:
                 CircuitScroll.Reset();
-                _reading.Open();
+                OpenCircuit();
                 Place = Place.Circuit;
                 break;
             case KeyName.Escape:
@@ -402,13 +421,25 @@ public sealed class MainModel
                 ShowsKeys = true;
                 break;
             case { Name: KeyName.Letter, Letter: 's' } when List is { Chosen: { } chosen, Result: { } result }:
-                Shortlists.Ask(chosen, result.Requirement);
+                PutOnList(chosen, result.Requirement);
+                break;
+            case { Name: KeyName.Letter, Letter: 'd' } when List is { Chosen: { } chosen, Result: { } result }:
+                SetBeside(chosen, result.Requirement);
                 break;
             case { Name: KeyName.Letter, Letter: 'l' }:
                 Shortlists.Open();
                 break;
             case { Name: KeyName.Letter, Letter: 'w' }:
                 Kept.Open(Wanted.Accepted);
+                break;
+            case { Name: KeyName.Letter, Letter: 'p' } when List is { Chosen: { } chosen, Result: { } result }:
+                Pictures.Open(chosen, result);
+                break;
+            case { Name: KeyName.Letter, Letter: 'y' }:
+                Questions.AskWhyNot(Wanted.Accepted, IsStale ? null : List.Result);
+                break;
+            case { Name: KeyName.Letter, Letter: 'h' } when List is { Chosen: { } shown, Result: { } ranked }:
+                Questions.ShowFigures(shown, ranked);
                 break;
             case { Name: KeyName.Letter, Letter: 'q' }:
                 IsDone = true;
@@ -427,6 +458,7 @@ public sealed class MainModel
 
     private void Rank(bool typing)
     {
+        Swaps.Forget();
         IsStale = List.Result is not null;
         _ranking.Ask(Wanted.Current, !_waits ? TimeSpan.Zero : typing ? WhileTyping : AfterChoice);
     }
@@ -436,12 +468,14 @@ public sealed class MainModel
         IsStale = false;
         List.Show(result);
         Kept.Figures.Take(result);
+        Pictures.Follow(result);
         if (Place == Place.Circuit && !_reading.IsThere)
         {
             Place = Place.List;
             SayWhereItIsGone();
         }
 
+        TakeInCircuit(result);
         if (result.IsComplete)
         {
             Settled?.Invoke(Wanted.Accepted);

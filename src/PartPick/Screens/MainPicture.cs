@@ -23,7 +23,7 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
             return Filled([Line.Empty, new LineBuilder(glyphs).Words(text, width).Build()], height);
         }
 
-        if (model is { Place: Place.Parts, ShowsKeys: false })
+        if (model is { Place: Place.Parts, ShowsKeys: false, Questions.IsOpen: false })
         {
             return model.Parts!.Draw(width, height);
         }
@@ -45,6 +45,14 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
                 : Beside(ScreenColumns.WithPage(width), page => KeysBody(page, room), room);
         }
 
+        if (model.Questions.IsOpen)
+        {
+            ScreenColumns asked = model.Place == Place.Parts ? ScreenColumns.Alone(width)
+                : model.Questions.IsTable ? ScreenColumns.WithTable(width)
+                : ScreenColumns.WithPage(width);
+            return Beside(asked, page => model.Questions.Draw(page, room, glyphs), room);
+        }
+
         if (model.Shortlists.IsOpen)
         {
             ShortlistPage list = model.Shortlists.Page;
@@ -54,16 +62,26 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
                 page => ShortlistDrawing.Draw(list, page, room, glyphs), room);
         }
 
+        if (model.Pictures.IsOpen)
+        {
+            return PicturesDrawing.Draw(model.Pictures, width, room, glyphs);
+        }
+
         if (model.Kept.IsOpen)
         {
             return Beside(
                 ScreenColumns.WithPage(width), page => KeptDrawing.Draw(model.Kept, model.Wanted.Currency, page, room, glyphs), room);
         }
 
+        if (model.Differences.Pair is not null)
+        {
+            return Beside(ScreenColumns.WithTable(width), page => DifferencesDrawing.Draw(model.Differences, page, room, glyphs), room);
+        }
+
         ScreenColumns reading = ScreenColumns.WithCircuit(width);
         bool reads = model.Place == Place.Circuit || (reading.List > 0 && model.KeepsReading);
         return reads && model.List.Chosen is { } candidate
-            ? Columns(reading, CircuitBody(candidate, reading.Page, room), room)
+            ? Columns(reading, CircuitBody(model.Swaps.Shown ?? candidate, reading.Page, room), room)
             : ScreenColumns.AtAGlance(width) is { Page: > 0 } glance ? Columns(glance, Glance(glance.Page), room)
             : NarrowBody(room);
     }
@@ -142,11 +160,12 @@ internal sealed class MainPicture(MainModel model, Glyphs glyphs, int width, int
     private ImmutableArray<Line> CircuitBody(Candidate candidate, int page, int room)
     {
         ImmutableArray<Line> shown =
-            model.CircuitScroll.Cut(CircuitPage.Draw(candidate, model.List.Result!, page, glyphs), room - 1);
+            model.CircuitScroll.Cut(CircuitPage.Draw(candidate, model.List.Result!, page, glyphs, model.Swaps), room - 1);
         string number = FormattableString.Invariant($"{model.List.At + 1} of {model.List.Candidates.Length}");
         string more = model.CircuitScroll.HasMore ? number + ", more below" : number;
-        string age = model.IsStale ? "for the wanted before, " : model.IsRanking ? "computing, " : "";
-        return [Rules.Draw(CircuitPane.ShortTitle(candidate), age + more, page, glyphs), .. shown];
+        string age = model.IsStale ? "for the wanted before, " : model.IsRanking || model.Swaps.IsComputing ? "computing, " : "";
+        string title = CircuitPane.ShortTitle(candidate) + (model.Swaps.IsChanged ? ", changed" : "");
+        return [Rules.Draw(title, age + more, page, glyphs), .. shown];
     }
 
     private ImmutableArray<Line> KeysBody(int page, int room)

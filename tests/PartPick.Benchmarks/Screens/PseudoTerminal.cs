@@ -74,6 +74,18 @@ internal sealed class PseudoTerminal : IDisposable
         }
     }
 
+    /// <summary>What was sent last, to be read.</summary>
+    public string Last
+    {
+        get
+        {
+            lock (_lock)
+            {
+                return _sent.ToString(Math.Max(0, _sent.Length - 400), Math.Min(400, _sent.Length)).Replace('\x1b', '^');
+            }
+        }
+    }
+
     /// <summary>Processor time of the program with all its threads, those that have ended among them.</summary>
     public TimeSpan Work
     {

@@ -12,10 +12,11 @@ namespace PartPick.Benchmarks;
 internal sealed class ScreensTable
 {
     private const string Down = "\x1b[B";
+    private const string Up = "\x1b[A";
     private const string PageDown = "\x1b[6~";
     private const string PageUp = "\x1b[5~";
 
-    private static readonly TimeSpan Patience = TimeSpan.FromMinutes(2);
+    private static readonly TimeSpan Patience = TimeSpan.FromSeconds(60);
     private static readonly TimeSpan Still = TimeSpan.FromMilliseconds(700);
 
     private readonly TextWriter _output;
@@ -169,7 +170,7 @@ internal sealed class ScreensTable
         terminal.WaitForRest(Still);
         terminal.Type("\x1b");
         terminal.WaitForRest(TimeSpan.FromSeconds(3));
-        Row("Down in the list" + which, terminal, 15, 200, _ => (Down, "►"));
+        Row("Down, Up in the list" + which, terminal, 40, 100, i => (i % 2 == 0 ? Down : Up, "►"));
         terminal.Type("c");
         terminal.WaitForRest(TimeSpan.FromSeconds(3));
         Row("Down in the catalogue" + which, terminal, 60, 100, _ => (Down, ""));
@@ -195,7 +196,7 @@ internal sealed class ScreensTable
             (string press, string shown) = key(i);
             long start = Stopwatch.GetTimestamp();
             int from = terminal.Type(press);
-            Need(terminal.WaitFor(shown, from, Patience), $"the answer to {press}");
+            Need(terminal.WaitFor(shown, from, Patience), $"the answer to key {i} of '{name}', after {terminal.Last}");
             times.Add(Stopwatch.GetElapsedTime(start).TotalMilliseconds);
             Thread.Sleep(pause);
             bytes.Add(terminal.Sent - from);

@@ -1,4 +1,5 @@
 using System.Collections.Concurrent;
+using PartPick.Catalog;
 using PartPick.Requirements;
 using PartPick.Screens;
 using PartPick.Selection;
@@ -36,6 +37,7 @@ internal sealed class Bench : IDisposable
         _app.Driver!.SetScreenSize(width, height);
         _live = new LiveRanking(Ranking, action => action(), TimeProvider.System);
         Model = new MainModel(requirement ?? SampleRanking.Wanted, _live, glyphs ?? Glyphs.Drawn, waits: false, parts: parts);
+        Model.DrawPicturesWith(_work);
         _screen = new MainScreen(Model, Palette.Plain);
         _app.Begin(_screen);
         _app.LayoutAndDraw();
@@ -52,6 +54,9 @@ internal sealed class Bench : IDisposable
     /// <summary>Keeps lists of candidates in a catalogue.</summary>
     public void KeepLists(string catalogue) => Model.KeepListsAt(new CatalogDesk(catalogue), _work);
 
+    /// <summary>Lets the parts of an open circuit be changed for others.</summary>
+    public void ChangeParts(PartsCatalog catalogue) => Model.ChangePartsFrom(new WholeCatalog(catalogue), _work);
+
     /// <summary>Keeps requirements beside a catalogue.</summary>
     public void KeepWanted(string catalogue) => Model.KeepWantedAt(new KeptRequirementStore(catalogue), _work, Ranking);
 
@@ -64,6 +69,12 @@ internal sealed class Bench : IDisposable
             Settle();
         }
     }
+
+    /// <summary>Answers questions from a catalogue.</summary>
+    public void AnswerQuestions(string catalogue) => AnswerQuestions(new WhyNot.WhyNotDesk(catalogue));
+
+    /// <summary>Answers questions.</summary>
+    public void AnswerQuestions(WhyNot.IWhyNotDesk desk) => Model.AnswerQuestionsAt(desk, _work);
 
     public void Press(params Key[] keys)
     {

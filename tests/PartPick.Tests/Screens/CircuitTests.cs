@@ -139,10 +139,12 @@ public class CircuitTests
     }
 
     [Fact]
-    public void At_80_columns_the_limits_stand_beside_the_drawing()
+    public void At_80_columns_the_parts_stand_beside_the_drawing()
     {
-        ImmutableArray<Line> page = CircuitPage.Draw(
-            SampleRanking.Counter, SampleRanking.Answer(SampleRanking.Wanted, SampleRanking.Counter), 80, Glyphs.Drawn);
+        RankingResult answer = SampleRanking.Answer(SampleRanking.Wanted, SampleRanking.Counter);
+        var swaps = new SwapModel();
+        swaps.Show(SampleRanking.Counter, answer);
+        ImmutableArray<Line> page = CircuitPage.Draw(SampleRanking.Counter, answer, 80, Glyphs.Drawn, swaps);
         Assert.Contains(page, line => line.Text.Contains("R1 1 MΩ", StringComparison.Ordinal)
             && line.Text[Schematic.Width..].Trim().Length > 0);
         Assert.All(page, line => Assert.True(line.ToString().Length <= 80, line.Text));

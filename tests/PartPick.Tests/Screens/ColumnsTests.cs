@@ -69,7 +69,7 @@ public sealed class ColumnsTests
         bench.Do(Key.Enter);
         Assert.Contains(Right(bench), row => row.Contains("1 CNT-14-HC", StringComparison.Ordinal));
         Assert.Contains("5 circuits fit", bench.Text, StringComparison.Ordinal);
-        bench.Do(Key.CursorRight, new Key('s'), Key.Enter, Key.Esc);
+        bench.Do(new Key('n'), new Key('s'), Key.Enter, Key.Esc);
         Assert.Contains(Right(bench), row => row.Contains("2 INV-HC-U-1", StringComparison.Ordinal));
         bench.Resize(120, 40);
         Assert.DoesNotContain("List default", bench.Text, StringComparison.Ordinal);
@@ -80,8 +80,8 @@ public sealed class ColumnsTests
     {
         var desk = new CatalogDesk(_db);
         CancellationToken cancellation = TestContext.Current.CancellationToken;
-        Assert.True(desk.Put("default", ListStudyTests.Fit(), SampleRanking.Wanted, null, cancellation).IsOk);
-        Assert.True(desk.Put("default", SampleRanking.SecondCounter.Choice, SampleRanking.Wanted, null, cancellation).IsOk);
+        Assert.True(desk.Put("default", ListStudyTests.Fit(), SampleRanking.Wanted, null, null, cancellation).IsOk);
+        Assert.True(desk.Put("default", SampleRanking.SecondCounter.Choice, SampleRanking.Wanted, null, null, cancellation).IsOk);
         using (Bench second = Open(160, 50))
         {
             Assert.Contains(Right(second), row => row.Contains("2 CNT-14-HC", StringComparison.Ordinal) && Ends(row, "unfit"));

@@ -137,7 +137,8 @@ public sealed class ListStudyTests
     {
         var bench = new Bench(width, height);
         bench.KeepLists(_db);
-        Assert.True(new CatalogDesk(_db).Put("default", Fit(), SampleRanking.Wanted, null, TestContext.Current.CancellationToken).IsOk);
+        var desk = new CatalogDesk(_db);
+        Assert.True(desk.Put("default", Fit(), SampleRanking.Wanted, null, null, TestContext.Current.CancellationToken).IsOk);
         bench.Press(new Key('l'));
         bench.Settle();
         return bench;

@@ -147,16 +147,18 @@ public class MainScreenTests
     }
 
     [Fact]
-    public void The_circuit_page_scrolls_and_right_goes_to_the_same_place_of_the_next_circuit()
+    public void The_circuit_page_scrolls_and_n_goes_to_the_same_place_of_the_next_circuit()
     {
         using var bench = new Bench();
         bench.Press(Key.Enter);
         Assert.Contains("1 of 5, more below", bench.Text, StringComparison.Ordinal);
         bench.Press(Key.End);
         Assert.Contains("Score 1.900", bench.Text, StringComparison.Ordinal);
-        bench.Press(Key.CursorRight);
+        bench.Press(new Key('n'));
         Assert.Contains("2 of 5", bench.Text, StringComparison.Ordinal);
         Assert.Contains("Score 1.900", bench.Text, StringComparison.Ordinal);
+        bench.Press(new Key('b'));
+        Assert.Contains("1 of 5", bench.Text, StringComparison.Ordinal);
     }
 
     [Fact]

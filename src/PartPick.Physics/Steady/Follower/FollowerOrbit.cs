@@ -126,8 +126,8 @@ internal sealed class FollowerOrbit
         return (forward, reverse, current);
     }
 
-    /// <summary>Largest vBC, and the swing of the emitter's voltage, between the stages by cubics.</summary>
-    public (double Reverse, double Swing) Extremes()
+    /// <summary>Largest vBC, and the emitter's lowest and highest voltage against the supply, between the stages by cubics.</summary>
+    public (double Reverse, double Low, double High) Extremes()
     {
         const int Parts = 8;
         double reverse = double.NegativeInfinity;
@@ -154,7 +154,7 @@ internal sealed class FollowerOrbit
             }
         }
 
-        return (reverse, high - low);
+        return (reverse, low, high);
     }
 
     private static Span<double> Room(ref double[] array, int count)

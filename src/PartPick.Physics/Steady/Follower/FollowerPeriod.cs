@@ -129,7 +129,11 @@ internal sealed partial class FollowerPeriod : ForcedState
     }
 
     /// <inheritdoc/>
-    public override double OutputSwingVolts() => _shooting.Now.Extremes().Swing * _units.Volts;
+    public override (double Low, double High) OutputRangeVolts()
+    {
+        (_, double low, double high) = _shooting.Now.Extremes();
+        return ((low + _units.Supply) * _units.Volts, (high + _units.Supply) * _units.Volts);
+    }
 
     private Complex LinearControl() =>
         _network.At(new Complex(0, Radians)).ControlPerCurrent(_bias.TransconductanceSiemens);

@@ -64,6 +64,13 @@ public static class Bars
     public static ImmutableArray<Line> DrawTall(ImmutableArray<LimitUse> uses, int width, Glyphs glyphs)
     {
         ArgumentNullException.ThrowIfNull(glyphs);
+        if (Width(uses, 4, glyphs) > width)
+        {
+            uses = [.. uses.Select(use => use.Change.Length == 0
+                ? use
+                : use with { Change = "", Because = $"{use.Change}; {use.Because}" })];
+        }
+
         int cells = Math.Clamp(width - Width(uses, 0, glyphs), 4, MostCells);
         var lines = ImmutableArray.CreateBuilder<Line>();
         foreach ((LineBuilder line, int i) in Pictures(uses, cells, glyphs).Select((line, i) => (line, i)))
@@ -77,13 +84,16 @@ public static class Bars
 
     private static int Width(ImmutableArray<LimitUse> uses, int cells, Glyphs glyphs) =>
         1 + Names + cells + 1 + Figures.LineUp([.. uses.Select(use => use.Figure)])[0].Length + 1
-        + uses.Max(use => glyphs.Show(use.Against).Length);
+        + uses.Max(use => glyphs.Show(use.Against).Length) + Changes(uses);
+
+    private static int Changes(ImmutableArray<LimitUse> uses) => uses.Max(use => use.Change.Length) is > 0 and int widest ? widest + 2 : 0;
 
     private static IEnumerable<LineBuilder> Pictures(ImmutableArray<LimitUse> uses, int cells, Glyphs glyphs)
     {
         LimitUse? nearest = LimitUses.Nearest(uses);
         string[] figures = Figures.LineUp([.. uses.Select(use => use.Figure)]);
         int against = uses.Max(use => glyphs.Show(use.Against).Length);
+        int changes = Changes(uses);
         for (int i = 0; i < uses.Length; i++)
         {
             LimitUse use = uses[i];
@@ -92,7 +102,8 @@ public static class Bars
             line = use.Used is null
                 ? line.Column(use.Unlimited, cells + 1, Tone.Quiet)
                 : line.Add(Bar(use.Used, cells, glyphs), tone).Add(" ");
-            yield return line.Add(figures[i], tone).Add(" ").Column(use.Against, against);
+            line.Add(figures[i], tone).Add(" ").Column(use.Against, against);
+            yield return changes == 0 ? line : line.Add("  ").Column(use.Change, changes - 2, Tone.Strong);
         }
     }
 }

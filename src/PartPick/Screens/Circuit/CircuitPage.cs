@@ -5,7 +5,7 @@ using PartPick.Values;
 namespace PartPick.Screens;
 
 /// <summary>The whole circuit as a page that scrolls.</summary>
-public static class CircuitPage
+internal static class CircuitPage
 {
     private const int Share = 20;
 
@@ -14,18 +14,25 @@ public static class CircuitPage
     /// <param name="result">The ranking that it belongs to.</param>
     /// <param name="width">Width in cells.</param>
     /// <param name="glyphs">The signs.</param>
-    public static ImmutableArray<Line> Draw(Candidate candidate, RankingResult result, int width, Glyphs glyphs)
+    /// <param name="swaps">What can be changed in it, and was; null for nothing.</param>
+    public static ImmutableArray<Line> Draw(
+        Candidate candidate, RankingResult result, int width, Glyphs glyphs, SwapModel? swaps = null)
     {
         ArgumentNullException.ThrowIfNull(candidate);
         ArgumentNullException.ThrowIfNull(result);
         Requirement requirement = result.Requirement;
         var lines = ImmutableArray.CreateBuilder<Line>();
-        foreach (string text in candidate.Misses.Select(miss => miss.Sentence).Concat(candidate.Warnings))
+        Watch(Broken.Sentences(candidate, swaps?.Ranked));
+        lines.AddRange(DrawingLimitsAndParts(candidate, requirement, width, glyphs, swaps));
+        if (candidate.Misses.Length + candidate.Warnings.Length > 0)
         {
-            lines.AddRange(Paragraph.Of(text, width, glyphs, " ! ", 3, Tone.Warning));
+            lines.Add(Line.Empty);
+            lines.Add(Heading("To be watched", glyphs));
+            Watch(candidate.Misses.Select(miss => miss.Sentence).Concat(candidate.Warnings));
         }
 
-        lines.AddRange(DrawingLimitsAndParts(candidate, requirement, width, glyphs));
+        lines.Add(Line.Empty);
+        lines.AddRange(PartsTable.Draw(candidate, glyphs));
         lines.AddRange(Budget(candidate, requirement, width, glyphs));
         lines.AddRange(Corners(candidate, width, glyphs));
         lines.AddRange(CircuitFigures.Draw(candidate, glyphs));
@@ -43,24 +50,33 @@ public static class CircuitPage
         }
 
         return lines.ToImmutable();
+
+        void Watch(IEnumerable<string> sentences) =>
+            lines.AddRange(sentences.SelectMany(text => Paragraph.Of(text, width, glyphs, " ! ", 3, Tone.Warning)));
     }
 
     internal static Line Heading(string text, Glyphs glyphs) => new LineBuilder(glyphs).Add(" " + text, Tone.Strong).Build();
 
-    // The limits stand beside the drawing, or above it with the parts beside it, or all follow each other.
-    private static IEnumerable<Line> DrawingLimitsAndParts(Candidate candidate, Requirement requirement, int width, Glyphs glyphs)
+    // The limits stand above the drawing with the parts that can be changed beside it, or all follow each other.
+    private static IEnumerable<Line> DrawingLimitsAndParts(
+        Candidate candidate, Requirement requirement, int width, Glyphs glyphs, SwapModel? swaps)
     {
         ImmutableArray<LimitUse> uses = LimitUses.Of(candidate, requirement);
-        ImmutableArray<Line> drawing = Schematic.Draw(candidate, glyphs);
-        ImmutableArray<Line> parts = PartsTable.Draw(candidate, glyphs);
-        if (width >= Schematic.Width + 64)
+        if (swaps is { Ranked: { } ranked } && !ReferenceEquals(ranked, candidate))
         {
-            return [.. Bars.Draw(uses, width, glyphs), Line.Empty, .. SideBySide(drawing, Schematic.Width + 3, parts)];
+            uses = LimitChanges.Mark(uses, ranked, candidate, requirement);
         }
 
-        return width >= Schematic.Width + 36
-            ? [.. SideBySide(drawing, Schematic.Width, Bars.DrawTall(uses, width - Schematic.Width, glyphs)), Line.Empty, .. parts]
-            : [.. Bars.DrawTall(uses, width, glyphs), Line.Empty, .. drawing, Line.Empty, .. parts];
+        ImmutableArray<Line> drawing = Schematic.Draw(candidate, glyphs);
+        if (width < Schematic.Width + 36)
+        {
+            ImmutableArray<Line> narrow = swaps is null ? [] : [.. SwapTable.Draw(swaps, width, glyphs), Line.Empty];
+            return [.. Bars.DrawTall(uses, width, glyphs), Line.Empty, .. narrow, .. drawing];
+        }
+
+        int left = width >= Schematic.Width + 64 ? Schematic.Width + 3 : Schematic.Width;
+        ImmutableArray<Line> beside = swaps is null ? [] : SwapTable.Draw(swaps, width - left, glyphs);
+        return [.. Bars.Draw(uses, width, glyphs), Line.Empty, .. SideBySide(drawing, left, beside)];
     }
 
     private static IEnumerable<Line> SideBySide(ImmutableArray<Line> left, int width, ImmutableArray<Line> right)
@@ -71,7 +87,8 @@ public static class CircuitPage
         }
     }
 
-    private static IEnumerable<Line> Budget(Candidate candidate, Requirement requirement, int width, Glyphs glyphs)
+    /// <summary>The error budget as bars: an empty line, a heading, and a line for each term and sum.</summary>
+    internal static IEnumerable<Line> Budget(Candidate candidate, Requirement requirement, int width, Glyphs glyphs)
     {
         yield return Line.Empty;
         if (candidate.Budget is not { } budget)
@@ -82,20 +99,13 @@ public static class CircuitPage
 
         string limit = ValueText.Format(requirement.BudgetRatio, Dimension.Relative);
         yield return Heading($"Frequency error, ppm; the bars are shares of {limit}", glyphs);
-        BudgetTerm[] terms = [.. budget.Terms.OrderByDescending(term => term.Ratio)];
+        BudgetBar[] bars = [.. BudgetBars.Of(budget)];
         string[] texts = Figures.LineUp(
-        [
-            Signed(budget.CentreRatio), .. terms.Select(term => glyphs.Show("±" + Figures.Ppm(term.Ratio))),
-            Figures.Ppm(budget.WorstRatio), Figures.Ppm(budget.RssRatio),
-        ]);
-        yield return Row(texts[0], Math.Abs(budget.CentreRatio), "centre: nominal values at 25 °C");
-        for (int i = 0; i < terms.Length; i++)
+            [.. bars.Select((bar, i) => bar.IsSpread ? glyphs.Show("±" + Figures.Ppm(bar.Ratio)) : i == 0 ? Signed(bar.Ratio) : Figures.Ppm(bar.Ratio))]);
+        for (int i = 0; i < bars.Length; i++)
         {
-            yield return Row(texts[i + 1], terms[i].Ratio, terms[i].Term + (terms[i].RestsOn is { } rest ? $" ({rest})" : ""));
+            yield return Row(texts[i], Math.Abs(bars[i].Ratio), bars[i].Name + (bars[i].RestsOn is { } rest ? $" ({rest})" : ""));
         }
-
-        yield return Row(texts[^2], budget.WorstRatio, "worst case, all together: the ranked figure");
-        yield return Row(texts[^1], budget.RssRatio, "root of the sum of squares");
 
         Line Row(string figure, double ratio, string words)
         {

@@ -37,6 +37,9 @@ public sealed record LimitUse
     /// <summary>What stands in the place of the bar where there is no limit: "no limit", "not rated".</summary>
     public string Unlimited { get; init; } = "";
 
+    /// <summary>How the figure has changed against another circuit: "+3.2 worse"; empty where there is none to compare with.</summary>
+    public string Change { get; init; } = "";
+
     /// <summary>What makes the figure what it is: "most: crystal over temperature".</summary>
     public required string Because { get; init; }
 

@@ -23,9 +23,10 @@ public static class Reasons
         if (candidate.IsFit)
         {
             reasons.Add(Score(candidate, result));
-            reasons.Add(candidate.OnFront
-                ? "No other fit circuit is as good in error, margin and cost together and better in one of them."
-                : "Another fit circuit is as good in error, margin and cost together and better in one of them.");
+            reasons.Add(candidate.OnFront ? "No other fit circuit is as good in error, margin and cost together and better in one of them."
+                : result.Candidates.Any(one => ReferenceEquals(one, candidate))
+                    ? "Another fit circuit is as good in error, margin and cost together and better in one of them."
+                : "It was changed by hand and is not ranked; its score is reckoned like the others.");
         }
 
         if (result.Requirement is { Waveform: Waveform.Any } && candidate.Choice.Circuit == CircuitKind.Follower)

@@ -43,6 +43,10 @@ internal sealed class ScreenColumns
         return width < Two ? new ScreenColumns(0, width, 0) : Beside(ListFor(width - (kept > 0 ? kept + 1 : 0), WidePage), width, kept);
     }
 
+    /// <summary>A page without the list.</summary>
+    /// <param name="width">Width of the screen in cells.</param>
+    public static ScreenColumns Alone(int width) => new(0, width, 0);
+
     /// <summary>The columns beside any other page.</summary>
     /// <param name="width">Width of the screen in cells.</param>
     public static ScreenColumns WithPage(int width) =>

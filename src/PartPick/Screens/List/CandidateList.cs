@@ -23,6 +23,12 @@ public sealed class CandidateList
     /// <summary>The chosen candidate; null while there is none.</summary>
     public Candidate? Chosen => Candidates.IsEmpty ? null : Candidates[At];
 
+    /// <summary>The candidate that is marked, to be set beside another one; null for none.</summary>
+    public Candidate? Marked { get; set; }
+
+    /// <summary>Whether something was changed by hand in a candidate of the list.</summary>
+    public Func<Candidate, bool> IsChanged { get; set; } = _ => false;
+
     /// <summary>Whether the list shows nearest misses because nothing is fit.</summary>
     public bool ShowsMisses => Result is { Candidates.IsEmpty: true } && !Candidates.IsEmpty;
 
@@ -102,12 +108,14 @@ public sealed class CandidateList
         for (int i = _top; i < Math.Min(Candidates.Length, _top + height); i++)
         {
             bool here = i == At;
-            Line line = ListDrawing.Row(columns.Rows[i], here, shape, glyphs);
+            Line line = ListDrawing.Row(columns.Rows[i], here, Sign(Candidates[i]), shape, glyphs);
             lines.Add(here && chosen ? line.Chosen() : here ? line.In(Tone.Strong) : stale ? line.In(Tone.Quiet) : line);
         }
 
         return lines.ToImmutable();
     }
+
+    private string Sign(Candidate candidate) => candidate.Id == Marked?.Id ? "=" : IsChanged(candidate) ? "*" : "";
 
     private int IndexOf(Func<Candidate, bool> wanted)
     {

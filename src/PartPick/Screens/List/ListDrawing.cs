@@ -38,12 +38,13 @@ internal static class ListDrawing
     /// <summary>A row.</summary>
     /// <param name="cells">Its texts.</param>
     /// <param name="here">Whether it is the chosen one.</param>
+    /// <param name="sign">A sign that marks it; empty for none.</param>
     /// <param name="shape">The columns.</param>
     /// <param name="glyphs">The signs.</param>
-    public static Line Row(CandidateCells cells, bool here, ListShape shape, Glyphs glyphs)
+    public static Line Row(CandidateCells cells, bool here, string sign, ListShape shape, Glyphs glyphs)
     {
         LimitUse? nearest = LimitUses.Nearest(cells.Uses);
-        LineBuilder line = new LineBuilder(glyphs).Column(here ? glyphs.Chosen : "", 2);
+        LineBuilder line = new LineBuilder(glyphs).Column((here ? glyphs.Chosen : " ") + sign, 2);
         Column(shape.HasCircuit, cells.Circuit, 8);
         Column(shape.HasFrequency, cells.FrequencyMegaHertz, 9, true);
         Column(shape.HasLoad, cells.LoadPicofarads, 4, true);

@@ -9,6 +9,9 @@ public sealed class CatalogRanking(PartsOnDemand parts) : IRankingService
 {
     private Task<Result<bool>> _opening = Task.FromResult(Result.Ok(true));
 
+    /// <summary>The parts that are ranked.</summary>
+    public IPartsSource Parts => parts;
+
     /// <summary>The main currency; empty before the parts were read.</summary>
     public string Currency => parts.Currency;
 

@@ -34,13 +34,14 @@ internal sealed class PartsFoot(PartsModel model, Glyphs glyphs, int width)
     private Line ListKeys() => model.List.Typed is not null
         ? Keys(("words", "or"), ("load<=18p", "and such"), ("Enter", "to the list"), ("Esc", "as it was"))
         : Keys(
-            ("Enter", "open"), ("f", "filter"), (glyphs.Left + " " + glyphs.Right + " o", "order"), ("k", "kind"), ("i", "import"),
+            ("y", "why not"), ("Enter", "open"), ("f", "filter"), (glyphs.Left + " " + glyphs.Right + " o", "order"), ("k", "kind"),
+                ("i", "import"),
             ("Esc", model.List.FilterText.Length > 0 ? "all" : "circuits"), ("?", "keys"));
 
     private Line PartKeys() => model.Page.Typed is not null
         ? Keys(("Enter", "keep"), ("Esc", "as it was"))
         : Keys(
-            ("Enter", "change"), ("b", "as supplied"), ("n", "note"), ("x", "exclude"), ("Esc", "list"), ("?", "keys"));
+            ("y", "why not"), ("Enter", "change"), ("b", "as supplied"), ("n", "note"), ("x", "exclude"), ("Esc", "list"), ("?", "keys"));
 
     private Line ImportKeys()
     {

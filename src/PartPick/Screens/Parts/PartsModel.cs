@@ -65,6 +65,11 @@ public sealed class PartsModel
     /// <summary>Whether keys are letters of a text here.</summary>
     public bool IsTyping => List.Typed is not null || Page.Typed is not null || Import.Typed is not null;
 
+    /// <summary>The crystal or amplifier that is open or chosen, of which circuits are made; null for none.</summary>
+    public string? AskableId => Place == PartsPlace.Import || List.Kind is PartKind.Capacitor or PartKind.Resistor
+        ? null
+        : Place == PartsPlace.Part ? Page.Id : List.Chosen?.Id;
+
     /// <summary>Shows the screens.</summary>
     public void Enter() => List.Begin();
 

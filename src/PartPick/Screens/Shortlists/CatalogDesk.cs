@@ -45,12 +45,13 @@ public sealed class CatalogDesk(string catalogPath) : IShortlistDesk
 
     /// <inheritdoc/>
     public Result<ShortlistEntry> Put(
-        string list, CandidateParts choice, Requirement requirement, string? note, CancellationToken cancellation) =>
+        string list, CandidateParts choice, Requirement requirement, string? note, SupportParts? support,
+        CancellationToken cancellation) =>
         CatalogReading.All(catalogPath, cancellation).Then(catalog =>
         {
             // The parts that are shown may be older than the catalogue.
-            return ChosenParts.Of(choice, new SupportParts(null, null, null)).In(catalog) is { } now
-                ? new ShortlistReviewer(catalog).Make(now.Choice, null, requirement, note, Today)
+            return ChosenParts.Of(choice, support ?? new SupportParts(null, null, null)).In(catalog) is { } now
+                ? new ShortlistReviewer(catalog).Make(now.Choice, support is null ? null : now.Support, requirement, note, Today)
                 : Result.Fail<ShortlistEntry>("circuit", "one of its parts is not in the catalogue any more", "a circuit of today's parts");
         }).Then(entry =>
         {

@@ -31,8 +31,10 @@ public interface IShortlistDesk
     /// <param name="choice">The parts.</param>
     /// <param name="requirement">What is wanted, with the number of boards.</param>
     /// <param name="note">Free text; null for none.</param>
+    /// <param name="support">The parts that the circuit needs besides; null for the usual ones.</param>
     /// <param name="cancellation">Ends it, as long as it is not on the list.</param>
-    Result<ShortlistEntry> Put(string list, CandidateParts choice, Requirement requirement, string? note, CancellationToken cancellation);
+    Result<ShortlistEntry> Put(
+        string list, CandidateParts choice, Requirement requirement, string? note, SupportParts? support, CancellationToken cancellation);
 
     /// <summary>Takes a candidate off a list.</summary>
     /// <param name="list">The name of the list.</param>

@@ -15,7 +15,7 @@ internal sealed class ListPutting(IShortlistDesk desk, ScreenWork work)
 {
     private readonly Lock _oneAtATime = new();
     private CancellationTokenSource? _last;
-    private (Candidate Candidate, Requirement Requirement)? _asked;
+    private (Candidate Candidate, Requirement Requirement, SupportParts? Support)? _asked;
     private AskedFields _fields = new();
     private int _running;
 
@@ -32,9 +32,10 @@ internal sealed class ListPutting(IShortlistDesk desk, ScreenWork work)
     /// <param name="candidate">The candidate.</param>
     /// <param name="requirement">What is wanted.</param>
     /// <param name="list">The list that is proposed.</param>
-    public void Ask(Candidate candidate, Requirement requirement, string list)
+    /// <param name="support">The parts that the circuit needs besides; null for the usual ones.</param>
+    public void Ask(Candidate candidate, Requirement requirement, string list, SupportParts? support)
     {
-        _asked = (candidate, requirement);
+        _asked = (candidate, requirement, support);
         _fields = new AskedFields(
             ("list", list, 60), ("boards", requirement.Builds.ToString(CultureInfo.InvariantCulture), 10), ("note", "", 200));
     }
@@ -63,7 +64,7 @@ internal sealed class ListPutting(IShortlistDesk desk, ScreenWork work)
                 _asked = null;
                 break;
             case KeyName.Enter:
-                notice = Start(asked.Candidate, asked.Requirement);
+                notice = Start(asked.Candidate, asked.Requirement, asked.Support);
                 break;
             default:
                 _fields.Press(key);
@@ -73,7 +74,7 @@ internal sealed class ListPutting(IShortlistDesk desk, ScreenWork work)
         return true;
     }
 
-    private string? Start(Candidate candidate, Requirement requirement)
+    private string? Start(Candidate candidate, Requirement requirement, SupportParts? support)
     {
         Result<string> name = ShortlistName.Read(_fields.Fields[0].Text, "list");
         Result<int> boards = Boards(_fields.Fields[1].Text);
@@ -93,7 +94,7 @@ internal sealed class ListPutting(IShortlistDesk desk, ScreenWork work)
                 lock (_oneAtATime)
                 {
                     return desk.Put(
-                        list, candidate.Choice, requirement with { Builds = boards.Value }, note.Length == 0 ? null : note, stop);
+                        list, candidate.Choice, requirement with { Builds = boards.Value }, note.Length == 0 ? null : note, support, stop);
                 }
             },
             put =>

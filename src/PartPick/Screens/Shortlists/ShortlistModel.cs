@@ -66,7 +66,11 @@ internal sealed class ShortlistModel
     public ListAside? Aside { get; }
 
     /// <summary>Asks on which list a candidate goes, and for how many boards.</summary>
-    public void Ask(Candidate candidate, Requirement requirement) => _putting?.Ask(candidate, requirement, _list);
+    /// <param name="candidate">The candidate.</param>
+    /// <param name="requirement">What is wanted.</param>
+    /// <param name="changed">Whether its parts were changed, so that all of them go on the list as they are.</param>
+    public void Ask(Candidate candidate, Requirement requirement, bool changed = false) =>
+        _putting?.Ask(candidate, requirement, _list, changed ? BoardParts.Of(candidate).Support : null);
 
     /// <summary>Opens the page of the list that was last used.</summary>
     public void Open()

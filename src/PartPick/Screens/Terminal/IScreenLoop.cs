@@ -7,7 +7,10 @@ internal interface IScreenLoop : IDisposable
     /// <param name="traits">What the terminal can show.</param>
     static IScreenLoop Prepare(TerminalTraits traits) => OperatingSystem.IsWindows() ? new ToolkitLoop() : new LinkedLoop(traits);
 
-    /// <summary>Runs something on the screen's thread; called from any thread.</summary>
+    /// <summary>
+    /// Runs something on the screen's thread, in a later turn even where it is called on that thread: work that is done before its
+    /// starter could note that it began would else be answered too early, and wait for that answer for ever.
+    /// </summary>
     /// <param name="action">What is run.</param>
     void Post(Action action);
 

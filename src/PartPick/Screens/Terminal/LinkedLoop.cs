@@ -41,17 +41,15 @@ internal sealed class LinkedLoop : IScreenLoop
     }
 
     /// <inheritdoc/>
-    public void Post(Action action)
-    {
-        try
+    public void Post(Action action) => _app.AddTimeout(
+        TimeSpan.Zero,
+        () =>
         {
-            _app.Invoke(action);
-        }
-        catch (NotInitializedException)
-        {
-            // The screen was left in the meantime.
-        }
-    }
+            // What it changes is drawn in the next turn, which is not to wait.
+            action();
+            _pace.Wake();
+            return false;
+        });
 
     /// <inheritdoc/>
     public void Run(MainScreen screen, Action beforeEnd)
@@ -126,7 +124,6 @@ internal sealed class LinkedLoop : IScreenLoop
         _link.Dispose();
         _app.Dispose();
         _goesOn.Dispose();
-        _pace.Dispose();
     }
 
     private static Size Size => new(Math.Max(1, Console.WindowWidth), Math.Max(1, Console.WindowHeight));

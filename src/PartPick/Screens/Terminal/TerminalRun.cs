@@ -1,6 +1,7 @@
 using PartPick.Requirements;
 using PartPick.Selection;
 using PartPick.Values;
+using PartPick.WhyNot;
 
 namespace PartPick.Screens;
 
@@ -24,7 +25,7 @@ internal sealed class TerminalRun(
     /// <returns>The requirement at the end.</returns>
     public Requirement Show(IScreenLoop loop, Requirement start, string? notice, IShortlistDesk desk, KeptRequirementStore store)
     {
-        Glyphs glyphs = traits.IsUtf8 ? Glyphs.Drawn : Glyphs.Ascii;
+        Glyphs glyphs = traits.Glyphs;
         Palette palette = traits.HasColour ? Palette.Coloured : Palette.Plain;
         using var live = new LiveRanking(ranking, loop.Post, TimeProvider.System);
         ScreenWork work = _work = new ScreenWork(loop.Post);
@@ -38,7 +39,10 @@ internal sealed class TerminalRun(
         };
         model.Settled += requirement => _ = Task.Run(() => keep(requirement));
         model.KeepListsAt(desk, work);
+        model.ChangePartsFrom(ranking.Parts, work);
+        model.AnswerQuestionsAt(new WhyNotDesk(catalogPath), work);
         model.KeepWantedAt(store, work, ranking);
+        model.DrawPicturesWith(work);
         using var screen = new MainScreen(model, palette);
         loop.Run(screen, () => keep(model.Wanted.Accepted));
         model.Stop();

@@ -39,6 +39,12 @@ public sealed record TerminalTraits(bool HasColour, bool IsUtf8)
 
     private int Number => int.TryParse(new string([.. Family.Skip(2).TakeWhile(char.IsAsciiDigit)]), out int number) ? number : 0;
 
+    /// <summary>Whether the font has Braille patterns, as far as the kind of terminal tells.</summary>
+    public bool HasBraille { get; init; }
+
+    /// <summary>The signs to draw with.</summary>
+    internal Glyphs Glyphs => !IsUtf8 ? Glyphs.Ascii : HasBraille ? Glyphs.Drawn : Glyphs.DrawnInBlocks;
+
     /// <summary>Reads the environment: NO_COLOR, TERM, and the first of LC_ALL, LC_CTYPE, LANG that is set.</summary>
     /// <param name="environment">Looks up a variable.</param>
     public static TerminalTraits Of(Func<string, string?> environment)
@@ -52,6 +58,11 @@ public sealed record TerminalTraits(bool HasColour, bool IsUtf8)
             && !named.Name.EndsWith("-mono", StringComparison.Ordinal);
         string locale = LocaleNames.Select(environment).FirstOrDefault(text => !string.IsNullOrEmpty(text)) ?? "";
         string plain = locale.Replace("-", "", StringComparison.Ordinal);
-        return named with { HasColour = colour, IsUtf8 = !named.IsTube && plain.Contains("UTF8", StringComparison.OrdinalIgnoreCase) };
+        return named with
+        {
+            HasColour = colour,
+            IsUtf8 = !named.IsTube && plain.Contains("UTF8", StringComparison.OrdinalIgnoreCase),
+            HasBraille = BrailleFonts.Has(named.Name),
+        };
     }
 }

@@ -18,17 +18,13 @@ internal sealed class ToolkitLoop : IScreenLoop
     }
 
     /// <inheritdoc/>
-    public void Post(Action action)
-    {
-        try
+    public void Post(Action action) => _app.AddTimeout(
+        TimeSpan.Zero,
+        () =>
         {
-            _app.Invoke(action);
-        }
-        catch (NotInitializedException)
-        {
-            // The screen was left in the meantime.
-        }
-    }
+            action();
+            return false;
+        });
 
     /// <inheritdoc/>
     public void Run(MainScreen screen, Action beforeEnd) => _app.Run(screen);

@@ -23,8 +23,11 @@ public sealed record Glyphs
         IsAscii = false,
         Horizontal = '─', Vertical = '│', DownRight = '┌', DownLeft = '┐', UpRight = '└', UpLeft = '┘',
         TeeRight = '├', TeeLeft = '┤', TeeDown = '┬', TeeUp = '┴', Cross = '┼', Ground = "═╧═", Full = '■', Free = '·', Trace = '-',
-        Chosen = "►", Up = "↑", Down = "↓", Left = "←", Right = "→",
+        Chosen = "►", Up = "↑", Down = "↓", Left = "←", Right = "→", HasBraille = true,
     };
+
+    /// <summary>Line drawing and block signs, without the Braille patterns that the fonts of a console lack.</summary>
+    public static Glyphs DrawnInBlocks { get; } = Drawn with { HasBraille = false };
 
     /// <summary>ASCII alone.</summary>
     public static Glyphs Ascii { get; } = new()
@@ -37,6 +40,9 @@ public sealed record Glyphs
 
     /// <summary>Whether every sign has to be ASCII.</summary>
     public required bool IsAscii { get; init; }
+
+    /// <summary>Whether Braille patterns may be used, as dots of pictures.</summary>
+    public bool HasBraille { get; init; }
 
     /// <summary>Horizontal line.</summary>
     public required char Horizontal { get; init; }

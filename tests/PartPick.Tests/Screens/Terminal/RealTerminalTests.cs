@@ -47,8 +47,10 @@ public partial class RealTerminalTests
         terminal.WaitFor("best first");
         terminal.Type("Enter");
         terminal.WaitFor("other circuits");
+        terminal.Type("Escape", "c");
+        terminal.WaitFor(" X-");
         terminal.Type("q");
-        terminal.WaitUntilGone(Named);
+        terminal.WaitUntilGone("Listed:");
         AssertGivenBack(terminal, before);
         string written = terminal.Written;
         AssertUnderstood(written, term);

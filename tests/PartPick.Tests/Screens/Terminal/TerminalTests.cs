@@ -61,6 +61,19 @@ public class TerminalTests
     public void A_VT100_is_never_sent_Unicode() =>
         Assert.False(TerminalTraits.Of(name => name switch { "TERM" => "vt100", "LANG" => "C.UTF-8", _ => null }).IsUtf8);
 
+    [Theory]
+    [InlineData("xterm-256color", true, false)]
+    [InlineData("tmux-256color", true, false)]
+    [InlineData("linux", false, false)]
+    [InlineData("ansi", false, false)]
+    [InlineData("xterm-256color", false, true)]
+    public void Dots_are_drawn_with_what_the_font_of_the_terminal_has(string term, bool braille, bool ascii)
+    {
+        TerminalTraits traits = TerminalTraits.Of(name => name switch { "TERM" => term, "LANG" => ascii ? "C" : "C.UTF-8", _ => null });
+
+        Assert.Equal((braille, ascii), (traits.Glyphs.HasBraille, traits.Glyphs.IsAscii));
+    }
+
     [Fact]
     public void The_requirement_is_kept_and_recalled()
     {

@@ -4,7 +4,7 @@ namespace PartPick.Screens;
 /// Lets the toolkit's loop rest until there is something to do: by itself it looks for keys all the time, which costs a processor that
 /// others want, and answers a key only when it looks the next time.
 /// </summary>
-internal sealed class LoopPace : IDisposable
+internal sealed class LoopPace
 {
     private static readonly TimeSpan Calm = TimeSpan.FromMilliseconds(100);
     private static readonly TimeSpan Lively = TimeSpan.FromMilliseconds(10);
@@ -15,23 +15,38 @@ internal sealed class LoopPace : IDisposable
     /// <summary>How long a stop may take to begin.</summary>
     public static readonly TimeSpan UntilStopped = TimeSpan.FromMilliseconds(300);
 
-    private readonly AutoResetEvent _something = new(false);
+    private readonly object _lock = new();
+    private bool _something;
     private long _lastKeys;
 
     /// <summary>Ends the rest; called from any thread.</summary>
-    public void Wake() => _something.Set();
+    public void Wake()
+    {
+        lock (_lock)
+        {
+            _something = true;
+            Monitor.Pulse(_lock);
+        }
+    }
 
     /// <summary>Ends the rest since keys came, and keeps rests short for a moment; called from any thread.</summary>
     public void WakeForKeys()
     {
         Volatile.Write(ref _lastKeys, TimeProvider.System.GetTimestamp());
-        _something.Set();
+        Wake();
     }
 
     /// <summary>Waits until there is something to do, but not for long.</summary>
-    public void Rest() =>
-        _something.WaitOne(TimeProvider.System.GetElapsedTime(Volatile.Read(ref _lastKeys)) < AfterKeys ? Lively : Calm);
+    public void Rest()
+    {
+        lock (_lock)
+        {
+            if (!_something)
+            {
+                Monitor.Wait(_lock, TimeProvider.System.GetElapsedTime(Volatile.Read(ref _lastKeys)) < AfterKeys ? Lively : Calm);
+            }
 
-    /// <inheritdoc/>
-    public void Dispose() => _something.Dispose();
+            _something = false;
+        }
+    }
 }
