@@ -62,7 +62,8 @@ public static class OscillatorAnalysis
             return null;
         }
 
-        if (SteadySolver.Follow(circuit.Crystal, refinement, near, fineness, out state) is { } figures)
+        RunningFigures? figures = SteadySolver.Follow(circuit.Crystal, refinement, near, fineness, out state);
+        if (figures is not null || fineness == Fineness.OneFinerRoughly)
         {
             return figures;
         }
@@ -83,7 +84,16 @@ public static class OscillatorAnalysis
     /// <param name="circuit">The circuit.</param>
     /// <param name="near">The state of an estimate of a circuit like it; null to start from nothing.</param>
     /// <param name="state">The state, for the next estimate.</param>
-    public static SteadyEstimate? EstimateSteadyState(OscillatorCircuit circuit, RunningState? near, out RunningState? state)
+    public static SteadyEstimate? EstimateSteadyState(OscillatorCircuit circuit, RunningState? near, out RunningState? state) =>
+        EstimateSteadyState(circuit, near, null, out state);
+
+    /// <summary>A quick estimate of the steady state from one of two others; null where there is none.</summary>
+    /// <param name="circuit">The circuit.</param>
+    /// <param name="near">The state of an estimate of a circuit like it; null to start from nothing.</param>
+    /// <param name="other">Another such state, for where it is not found from the first.</param>
+    /// <param name="state">The state, for the next estimate.</param>
+    public static SteadyEstimate? EstimateSteadyState(
+        OscillatorCircuit circuit, RunningState? near, RunningState? other, out RunningState? state)
     {
         state = null;
         if (Balances(circuit) is not { } refinement)
@@ -94,10 +104,10 @@ public static class OscillatorAnalysis
         switch (circuit)
         {
             case GateCircuit gate:
-                return SteadySolver.Estimate(gate.Crystal, SmallSignals(gate), Transconductance(gate), refinement, near, out state);
+                return SteadySolver.Estimate(gate.Crystal, SmallSignals(gate), Transconductance(gate), refinement, near, other, out state);
             case FollowerCircuit follower:
                 double siemens = FollowerBias.Solve(follower).TransconductanceSiemens;
-                return SteadySolver.Estimate(follower.Crystal, new FollowerNetwork(follower), siemens, refinement, near, out state);
+                return SteadySolver.Estimate(follower.Crystal, new FollowerNetwork(follower), siemens, refinement, near, other, out state);
             default:
                 throw new ArgumentException("Unknown kind of circuit.", nameof(circuit));
         }

@@ -55,6 +55,11 @@ internal abstract class ForcedState
     /// <summary>The state as a starting point for a circuit like this one.</summary>
     public abstract RunningState Keep();
 
+    /// <summary>Gives back what can serve another state; of this one only impedance, amplitude and frequency stay.</summary>
+    public virtual void Release()
+    {
+    }
+
     /// <summary>Puts the state of small signals at an amplitude as the starting point.</summary>
     public abstract void StartLinear(double peakAmps);
 

@@ -113,13 +113,19 @@ internal static class SteadySolver
     /// off by about a hundredth of the pull from series resonance: good to leave out what is far off, never shown.
     /// </summary>
     public static SteadyEstimate? Estimate<TNetwork>(
-        Crystal crystal, in TNetwork network, double siemens, Refinement refinement, RunningState? near, out RunningState? state)
+        Crystal crystal,
+        in TNetwork network,
+        double siemens,
+        Refinement refinement,
+        RunningState? near,
+        RunningState? other,
+        out RunningState? state)
         where TNetwork : struct, ILinearNetwork
     {
         state = null;
         var branch = new CrystalBranch(crystal);
-        ForcedState? balance = near is null ? null : refinement.From(near);
-        if (balance is null || !balance.SolveRunning(crystal.ResistanceOhms, EstimateTolerance) || !balance.Stays)
+        ForcedState? balance = EstimateFrom(crystal, refinement, near) ?? EstimateFrom(crystal, refinement, other);
+        if (balance is null)
         {
             var scan = new AmplitudeScan(refinement, FirstGuess(branch, network, siemens), crystal.ResistanceOhms, runningOnly: true);
             balance = scan.Running;
@@ -133,7 +139,25 @@ internal static class SteadySolver
         double radians = FrequencyOf(branch, balance);
         double rms = balance.PeakAmps / Math.Sqrt(2);
         state = balance.Keep();
-        return new SteadyEstimate(radians / (2 * Math.PI), crystal.ResistanceOhms * rms * rms, balance.HarmonicShare);
+        double share = balance.HarmonicShare;
+        balance.Release();
+        return new SteadyEstimate(radians / (2 * Math.PI), crystal.ResistanceOhms * rms * rms, share);
+    }
+
+    private static ForcedState? EstimateFrom(Crystal crystal, Refinement refinement, RunningState? near)
+    {
+        if (near is null || refinement.From(near) is not { } balance)
+        {
+            return null;
+        }
+
+        if (balance.SolveRunning(crystal.ResistanceOhms, EstimateTolerance) && balance.Stays)
+        {
+            return balance;
+        }
+
+        balance.Release();
+        return null;
     }
 
     /// <summary>
@@ -143,9 +167,14 @@ internal static class SteadySolver
     public static double? FirstOrder(Crystal crystal, Refinement refinement, RunningState near)
     {
         var branch = new CrystalBranch(crystal);
-        return refinement.From(near) is { } balance && balance.StepTowardsRunning(crystal.ResistanceOhms)
-            ? FrequencyOf(branch, balance) / (2 * Math.PI)
-            : null;
+        if (refinement.From(near) is not { } balance)
+        {
+            return null;
+        }
+
+        double? hertz = balance.StepTowardsRunning(crystal.ResistanceOhms) ? FrequencyOf(branch, balance) / (2 * Math.PI) : null;
+        balance.Release();
+        return hertz;
     }
 
     private static RunningFigures? Follow(
@@ -162,22 +191,29 @@ internal static class SteadySolver
             return Refine(branch, refinement, balance, out state) is { } refined ? FiguresOf(crystal, refined) : null;
         }
 
-        if (!Settle(branch, balance, roughly: true))
+        if (fineness is Fineness.OneFiner or Fineness.OneFinerRoughly && !refinement.CoarseIsFollowed)
+        {
+            balance = refinement.Finer(balance) ?? balance;
+        }
+
+        if (fineness == Fineness.OneFinerRoughly)
+        {
+            if (!balance.SolveRunning(branch.ResistanceOhms, EstimateTolerance))
+            {
+                return null;
+            }
+
+            balance.SetFrequency(FrequencyOf(branch, balance));
+        }
+        else if (!Settle(branch, balance, roughly: true))
         {
             return null;
         }
 
-        if (fineness == Fineness.OneFiner && !refinement.CoarseIsFollowed)
-        {
-            balance = refinement.Finer(balance) ?? balance;
-            if (!Settle(branch, balance, roughly: true))
-            {
-                return null;
-            }
-        }
-
         state = balance.Keep();
-        return FiguresOf(crystal, balance);
+        RunningFigures figures = FiguresOf(crystal, balance);
+        balance.Release();
+        return figures;
     }
 
     private static ForcedState? Refine(

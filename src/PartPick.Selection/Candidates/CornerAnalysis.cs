@@ -6,6 +6,9 @@ namespace PartPick.Selection;
 /// <summary>The worst of margin, drive level and start-up time over the corners, for capacitors of given tolerances.</summary>
 public sealed class CornerAnalysis
 {
+    // Between the crystal's frequency and that of the natural mode the margin changes by less than a hundredth.
+    private const double MarginReserve = 1.03;
+    private const double ClearOfOne = 1.1;
     private readonly CircuitTemplate _template;
     private readonly CircuitValues _values;
     private readonly Requirement _requirement;
@@ -90,10 +93,23 @@ public sealed class CornerAnalysis
     /// </summary>
     /// <param name="analysis">The figures of the nominal values.</param>
     /// <param name="ratedWatts">Highest rated drive level in watts; null where none is stated.</param>
-    public bool RunsWithin(ValueAnalysis analysis, double? ratedWatts)
+    /// <param name="mostOverNominal">
+    /// Largest drive level at a corner over that at the same one with nominal capacitances; corners that this settles are not looked
+    /// at. Infinite to look at all.
+    /// </param>
+    internal bool RunsWithin(ValueAnalysis analysis, double? ratedWatts, double mostOverNominal)
     {
-        ArgumentNullException.ThrowIfNull(analysis);
-        return _template.Corners.Reverse().All(point => At(analysis, point) is { } steady && !(steady.DriveWatts > ratedWatts));
+        for (int corner = _template.Corners.Length - 1; corner >= 0; corner--)
+        {
+            // Each corner of the amplifier stands twice, with capacitances low and high.
+            bool settled = mostOverNominal * analysis.AmplifierDriveWattsAt(corner / 2) <= (ratedWatts ?? double.MaxValue);
+            if (!settled && !(At(analysis, _template.Corners[corner]) is { } steady && !(steady.DriveWatts > ratedWatts)))
+            {
+                return false;
+            }
+        }
+
+        return true;
     }
 
     /// <summary>The circuit at a corner.</summary>
@@ -109,6 +125,12 @@ public sealed class CornerAnalysis
         return At(analysis, point);
     }
 
+    /// <summary>Whether it runs at the last corner, which likely drives most, with no more than a drive level.</summary>
+    /// <param name="analysis">The figures of the nominal values.</param>
+    /// <param name="ratedWatts">Highest rated drive level in watts.</param>
+    internal bool HardestRunsWithin(ValueAnalysis analysis, double ratedWatts) =>
+        At(analysis, _template.Corners[^1]) is { } steady && steady.DriveWatts <= ratedWatts;
+
     private RunningFigures? At(ValueAnalysis analysis, OperatingPoint point)
     {
         if (!_running.TryGetValue(point, out RunningFigures? figures))
@@ -120,13 +142,24 @@ public sealed class CornerAnalysis
         return figures;
     }
 
+    // Without a disturbance: the margin at the crystal's frequency costs little and is near that of the natural mode: only corners where it may be the least,
+    // or where it is not clear of one, are looked at in full.
     private (AtCorner Margin, bool BuildsUp) FindStart()
     {
         double least = double.PositiveInfinity;
         OperatingPoint where = _template.Corners[0];
         bool starts = true;
-        foreach (OperatingPoint point in _template.Corners)
+        double hertz = _template.Crystal.Crystal.NominalHz;
+        double[] near = [.. _template.Corners.Select(point => OscillatorAnalysis.FindMarginAt(CircuitAt(point), hertz))];
+        double looked = _requirement.AllowDisturbance ? double.PositiveInfinity : Math.Max(near.Min() * MarginReserve, ClearOfOne);
+        for (int corner = 0; corner < near.Length; corner++)
         {
+            if (near[corner] > looked)
+            {
+                continue;
+            }
+
+            OperatingPoint point = _template.Corners[corner];
             (double margin, bool startsHere) = MarginAt(point);
             starts &= startsHere;
             if (margin < least)

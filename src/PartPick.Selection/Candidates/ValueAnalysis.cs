@@ -16,6 +16,8 @@ public sealed class ValueAnalysis
     private readonly OperatingPoint _nominal;
     private readonly RunningState? _state;
     private RunningFigures? _steady;
+    private readonly RunningFigures?[] _overAmplifier;
+    private readonly bool[] _isFound;
     private (double Ratio, double Watts, OperatingPoint? Farthest)? _amplifier;
     private (double C1, double C2, double Across)? _slopes;
     private (double C1, double C2, double Across)? _firstOrderSlopes;
@@ -34,11 +36,19 @@ public sealed class ValueAnalysis
     /// <param name="requirement">What is needed.</param>
     /// <param name="values">Nominal values.</param>
     /// <param name="near">The running state; null to start from nothing.</param>
-    public ValueAnalysis(CircuitTemplate template, Requirement requirement, CircuitValues values, RunningState? near)
+    /// <param name="fineness">How finely it is resolved from there.</param>
+    public ValueAnalysis(
+        CircuitTemplate template,
+        Requirement requirement,
+        CircuitValues values,
+        RunningState? near,
+        Fineness fineness = Fineness.OneFiner)
     {
         ArgumentNullException.ThrowIfNull(template);
         _template = template;
         _values = values;
+        _overAmplifier = new RunningFigures?[template.AmplifierCorners.Length];
+        _isFound = new bool[template.AmplifierCorners.Length];
         _nominal = OperatingPoint.Nominal(requirement);
         Circuit = template.At(values, _nominal);
         if (near is null)
@@ -49,7 +59,7 @@ public sealed class ValueAnalysis
         }
         else
         {
-            Base = OscillatorAnalysis.FindSteadyState(Circuit, near, Fineness.OneFiner, out _state);
+            Base = OscillatorAnalysis.FindSteadyState(Circuit, near, fineness, out _state);
         }
     }
 
@@ -75,6 +85,16 @@ public sealed class ValueAnalysis
 
     /// <summary>The corner of amplifier, supply and ambient whose frequency is farthest off; null where none was found.</summary>
     public OperatingPoint? AmplifierFarthest => (_amplifier ??= FindOverAmplifier()).Farthest;
+
+    /// <summary>
+    /// The same over the first and the last of these corners alone, which lie furthest apart: no more than over all, and found with
+    /// a fraction of the work.
+    /// </summary>
+    internal double LeastAmplifierRatio => Math.Max(ShiftAt(0), ShiftAt(_overAmplifier.Length - 1));
+
+    /// <summary>The drive level in watts at one of these corners; infinite where there is no steady state.</summary>
+    /// <param name="corner">Place of the corner in <see cref="CircuitTemplate.AmplifierCorners"/>.</param>
+    internal double AmplifierDriveWattsAt(int corner) => OverAmplifier(corner)?.DriveWatts ?? double.PositiveInfinity;
 
     /// <summary>Highest drive level in watts over amplifier, supply and ambient, at nominal capacitances.</summary>
     public double AmplifierDriveWatts => (_amplifier ??= FindOverAmplifier()).Watts;
@@ -103,16 +123,32 @@ public sealed class ValueAnalysis
         double most = 0;
         double watts = 0;
         OperatingPoint? farthest = null;
-        foreach (OperatingPoint point in _template.AmplifierCorners)
+        for (int corner = 0; corner < _overAmplifier.Length; corner++)
         {
-            RunningFigures? state = Follow(_template.At(_values, point));
-            double shift = state is null ? double.NaN : Math.Abs(state.FrequencyHz / BaseHz() - 1);
-            farthest = shift > most ? point : farthest;
-            most = Math.Max(most, double.IsNaN(shift) ? double.PositiveInfinity : shift);
-            watts = Math.Max(watts, state?.DriveWatts ?? double.PositiveInfinity);
+            double shift = ShiftAt(corner);
+            farthest = double.IsFinite(shift) && shift > most ? _template.AmplifierCorners[corner] : farthest;
+            most = Math.Max(most, shift);
+            watts = Math.Max(watts, AmplifierDriveWattsAt(corner));
         }
 
         return (most, watts, farthest);
+    }
+
+    private double ShiftAt(int corner)
+    {
+        double shift = OverAmplifier(corner) is { } state ? Math.Abs(state.FrequencyHz / BaseHz() - 1) : double.NaN;
+        return double.IsNaN(shift) ? double.PositiveInfinity : shift;
+    }
+
+    private RunningFigures? OverAmplifier(int corner)
+    {
+        if (!_isFound[corner])
+        {
+            _overAmplifier[corner] = Follow(_template.At(_values, _template.AmplifierCorners[corner]));
+            _isFound[corner] = true;
+        }
+
+        return _overAmplifier[corner];
     }
 
     private (double C1, double C2, double Across) Slopes()

@@ -9,9 +9,16 @@ namespace PartPick.Selection.Search;
 /// critical transconductance is near one, and smooth along the logarithms of all three. A follower, whose estimates cost most, has
 /// every sixth value of the capacitors, and every third of its base resistor.
 /// </summary>
-internal sealed class EstimateGrid
+internal sealed partial class EstimateGrid
 {
     private const double AmplifierShare = 0.8;
+
+    // Shift over amplifier and supply in full over that of estimates: a small one may be off by half, a large one hardly at all.
+    private const double RoughShare = 0.85;
+    private const double RoughRatio = 1e-6;
+    private const double FairShare = 0.95;
+    private const double FairRatio = 2.2e-6;
+    private const double CornerDriveShare = 0.97;
 
     // By how much a load outside the window must lie outside for its neighbours to be taken for outside.
     private const double SideReserve = 1.06;
@@ -24,8 +31,8 @@ internal sealed class EstimateGrid
     private readonly double _shunt;
     private readonly LoadRange _window;
     private readonly Dictionary<(int Option, int C1, int C2), int> _sides = [];
-    private readonly double[] _values;
-    private readonly OptionBracket[] _options;
+    private readonly NodeBracket[] _values;
+    private readonly NodeBracket[] _options;
     private readonly Dictionary<(int Option, int C1, int C2), Node> _nodes = [];
     private RunningState? _last;
 
@@ -42,15 +49,15 @@ internal sealed class EstimateGrid
         _shunt = _template.Crystal.Crystal.ShuntFarads;
         _nominal = OperatingPoint.Nominal(space.Requirement);
         _critical = new CriticalLoad(_template, _nominal, family.Members[0].Crystal.FrequencyHz);
-        _values = [.. space.Capacitors.Select(value => Math.Log(value.Farads))];
+        _values = NodeBracket.Along([.. space.Capacitors.Select(value => Math.Log(value.Farads))], _fineness.Step);
         _options = OptionBracket.Of(family);
     }
 
     /// <summary>The places of the nodes along the capacitors.</summary>
-    public IEnumerable<int> Values() => Places(_values.Length, Step);
+    public IEnumerable<int> Values() => Nodes(_values);
 
     /// <summary>The places of the nodes along the options.</summary>
-    public IEnumerable<int> Options() => Enumerable.Range(0, _options.Length).Where(option => _options[option].IsNode);
+    public IEnumerable<int> Options() => Nodes(_options);
 
     /// <summary>
     /// Whether the load of a node is known to be outside the window, from its neighbours: the load grows with C1 and with C2. Nodes
@@ -61,11 +68,11 @@ internal sealed class EstimateGrid
     /// <summary>Whether the load of any combination is outside the window, from the nodes round it.</summary>
     public bool LiesOutside(int option, int c1, int c2)
     {
-        (int lowC1, int highC1, _) = Bracket(_values, c1, Step);
-        (int lowC2, int highC2, _) = Bracket(_values, c2, Step);
-        (int low, int high, _) = _options[option];
-        return (KnownSide(low, lowC1, lowC2) > 0 && KnownSide(high, lowC1, lowC2) > 0)
-            || (KnownSide(low, highC1, highC2) < 0 && KnownSide(high, highC1, highC2) < 0);
+        NodeBracket first = _values[c1];
+        NodeBracket second = _values[c2];
+        NodeBracket at = _options[option];
+        return (KnownSide(at.Low, first.Low, second.Low) > 0 && KnownSide(at.High, first.Low, second.Low) > 0)
+            || (KnownSide(at.Low, first.High, second.High) < 0 && KnownSide(at.High, first.High, second.High) < 0);
     }
 
     // Which side of the window a node lies on, where it or its neighbours tell: above is 1, below is −1.
@@ -114,18 +121,18 @@ internal sealed class EstimateGrid
         }
 
         // At the far ends of a resistor a circuit may not run at all: then it is left alone.
-        return Range(c1, c2, _options[option].Ends, critical)
-            ?? (_options[option].IsNode ? null : Range(c1, c2, (option, option, 0), critical))
+        return Range(option, c1, c2, true, critical)
+            ?? (_options[option].IsNode ? null : Range(option, c1, c2, false, critical))
             ?? Load(critical * _fineness.Least, critical * _fineness.Most, _fineness.MostHarmonics);
     }
 
-    private LoadRange? Range(int c1, int c2, (int Low, int High, double Weight) options, double critical)
+    private LoadRange? Range(int option, int c1, int c2, bool between, double critical)
     {
         double share = 0;
         double least = double.PositiveInfinity;
         double most = 0;
         double harmonics = 0;
-        foreach ((Node? node, double weight) in Around(options, c1, c2))
+        foreach ((Node? node, double weight) in Around(option, c1, c2, between))
         {
             if (node is null || node.Share == 0)
             {
@@ -157,27 +164,39 @@ internal sealed class EstimateGrid
     public double LeastAmplifierRatio(int option, int c1, int c2)
     {
         double least = double.PositiveInfinity;
-        foreach ((Node? node, _) in Around(_options[option].Ends, c1, c2))
+        foreach ((Node? node, _) in Around(option, c1, c2))
         {
             if (node is null)
             {
                 return 0;
             }
 
-            least = Math.Min(least, node.AmplifierRatio ??= FindAmplifierRatio(node));
+            least = Math.Min(least, (node.Amplifier ??= FindOverAmplifier(node)).Ratio);
         }
 
         return AmplifierShare * least;
     }
 
-    // The nodes round a combination with their weights; null for one without a steady state.
-    private IEnumerable<(Node? Node, double Weight)> Around((int Low, int High, double Weight) options, int c1, int c2)
+    /// <summary>
+    /// What the full analysis at least finds at the corners of amplifier and supply, from estimates at those furthest apart: the
+    /// shift of the frequency as a ratio, and the drive level in watts.
+    /// </summary>
+    public (double Ratio, double Watts) LeastOverAmplifier(int option, int c1, int c2)
     {
-        foreach ((int i, double byC1) in Ends(Bracket(_values, c1, Step)))
+        Node node = Find(option, c1, c2);
+        (double ratio, double watts) = node.Amplifier ??= FindOverAmplifier(node);
+        double least = Math.Max(RoughShare * ratio - RoughRatio, FairShare * ratio - FairRatio);
+        return (Math.Max(0, least), CornerDriveShare * ProspectAnalysis.LeastCornerDrive * watts);
+    }
+
+    // The nodes round a combination with their weights; null for one without a steady state.
+    private IEnumerable<(Node? Node, double Weight)> Around(int option, int c1, int c2, bool between = true)
+    {
+        foreach ((int i, double byC1) in Ends(_values[c1]))
         {
-            foreach ((int j, double byC2) in Ends(Bracket(_values, c2, Step)))
+            foreach ((int j, double byC2) in Ends(_values[c2]))
             {
-                foreach ((int o, double byOption) in Ends(options))
+                foreach ((int o, double byOption) in between ? Ends(_options[option]) : [(option, 1.0)])
                 {
                     Node node = Find(o, i, j);
                     yield return (node.Estimate is null ? null : node, byC1 * byC2 * byOption);
@@ -194,30 +213,13 @@ internal sealed class EstimateGrid
 
     private int After(int place) => Math.Min(place + Step, _values.Length - 1) is var next && next > place ? next : int.MaxValue;
 
-    private static IEnumerable<int> Places(int count, int step)
-    {
-        for (int i = 0; i < count; i += step)
-        {
-            yield return i;
-        }
+    private static IEnumerable<int> Nodes(NodeBracket[] places) =>
+        Enumerable.Range(0, places.Length).Where(place => places[place].IsNode);
 
-        if (count > 0 && (count - 1) % step != 0)
-        {
-            yield return count - 1;
-        }
-    }
-
-    private static (int Low, int High, double Weight) Bracket(double[] along, int place, int step)
-    {
-        int low = place / step * step;
-        int high = low == place ? place : Math.Min(low + step, along.Length - 1);
-        return (low, high, high == low ? 0 : (along[place] - along[low]) / (along[high] - along[low]));
-    }
-
-    private static IEnumerable<(int Place, double Weight)> Ends((int Low, int High, double Weight) bracket)
+    private static IEnumerable<(int Place, double Weight)> Ends(NodeBracket bracket)
     {
         yield return (bracket.Low, 1 - bracket.Weight);
-        if (bracket.High != bracket.Low)
+        if (!bracket.IsNode)
         {
             yield return (bracket.High, bracket.Weight);
         }
@@ -229,9 +231,12 @@ internal sealed class EstimateGrid
         {
             CircuitValues values = Values(option, c1, c2);
             node = new Node(values);
-            RunningState? near = Near(option, c1, c2) ?? _last;
+            (RunningState? near, RunningState? other) = Near(option, c1, c2);
             OscillatorCircuit circuit = _template.At(values, _nominal);
-            if (OscillatorAnalysis.EstimateSteadyState(circuit, near, out RunningState? state) is { } estimate && state is not null)
+            RunningState? state = null;
+            if (MayBuildUp(circuit)
+                && OscillatorAnalysis.EstimateSteadyState(circuit, near, other, out state) is { } estimate
+                && state is not null)
             {
                 _last = state;
                 double load = _template.Crystal.Crystal.LoadAtFrequencyFarads(estimate.FrequencyHz);
@@ -249,36 +254,55 @@ internal sealed class EstimateGrid
         return node;
     }
 
-    // The state of the nearest node that is known.
-    private RunningState? Near(int option, int c1, int c2)
+    // To find that there is no state costs as much as many estimates; where none is known, a combination is only looked at for longer.
+    private bool MayBuildUp(OscillatorCircuit circuit) =>
+        _space.Requirement.AllowDisturbance || OscillatorAnalysis.FindMarginAt(circuit, _family.Members[0].Crystal.FrequencyHz) > 1;
+
+    // The states of the two nearest combinations that are known.
+    private (RunningState? Near, RunningState? Other) Near(int option, int c1, int c2)
     {
         int o = _options[option].Low;
         int i = c1 / Step * Step;
         int j = c2 / Step * Step;
-        return Known(o, i, j)
-            ?? Known(o, i, j - Step)
-            ?? Known(o, i - Step, j)
-            ?? Known(_options[option].High, i, j)
-            ?? (option > 0 ? Known(_options[option - 1].Low, i, j) : null);
+        RunningState? near = null;
+        foreach ((int atOption, int atC1, int atC2) in (ReadOnlySpan<(int, int, int)>)
+        [
+            (option, c1, c2 + 1), (option, c1, c2 - 1), (option, c1 - 1, c2), (option, c1 + 1, c2), (option, c1 - 1, c2 + 1),
+            (option, c1 + 1, c2 - 1), (o, i, j), (o, i, j - Step), (o, i - Step, j), (_options[option].High, i, j),
+            (option > 0 ? _options[option - 1].Low : option, i, j),
+        ])
+        {
+            if (_nodes.TryGetValue((atOption, atC1, atC2), out Node? node) && node.Estimate is { State: var state } && state != near)
+            {
+                if (near is not null)
+                {
+                    return (near, state);
+                }
 
-        RunningState? Known(int atOption, int atC1, int atC2) =>
-            _nodes.TryGetValue((atOption, atC1, atC2), out Node? node) ? node.Estimate?.State : null;
+                near = state;
+            }
+        }
+
+        return (near ?? _last, _last);
     }
 
-    private double FindAmplifierRatio(Node node)
+    // The shift over the corners furthest apart, and the higher drive level there.
+    private (double Ratio, double Watts) FindOverAmplifier(Node node)
     {
         Estimate estimate = node.Estimate!;
         double hertz = _template.Crystal.Crystal.FrequencyAtLoadHz(estimate.LoadFarads);
         double most = 0;
+        double watts = 0;
         foreach (OperatingPoint point in new[] { _template.AmplifierCorners[0], _template.AmplifierCorners[^1] })
         {
             if (OscillatorAnalysis.EstimateSteadyState(_template.At(node.Values, point), estimate.State, out _) is { } there)
             {
                 most = Math.Max(most, Math.Abs(there.FrequencyHz / hertz - 1));
+                watts = Math.Max(watts, there.DriveWatts);
             }
         }
 
-        return most;
+        return (most, watts);
     }
 
     private CircuitValues Values(int option, int c1, int c2) =>
@@ -295,6 +319,6 @@ internal sealed class EstimateGrid
 
         public (double C1, double C2, double Across)? Slopes { get; set; }
 
-        public double? AmplifierRatio { get; set; }
+        public (double Ratio, double Watts)? Amplifier { get; set; }
     }
 }

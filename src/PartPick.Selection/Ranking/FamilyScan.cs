@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using PartPick.Physics;
 
 namespace PartPick.Selection.Search;
@@ -23,6 +24,8 @@ internal sealed class FamilyScan
     private readonly HashSet<(int Option, int C1, int C2)> _sparse = [];
     private readonly double _wanted;
     private readonly double _screenHz;
+    private readonly double _mostWatts;
+    private int _weakest;
 
     public FamilyScan(SearchRun run, CircuitFamily family)
     {
@@ -33,6 +36,7 @@ internal sealed class FamilyScan
         _requirement = _space.Requirement;
         Grid = new EstimateGrid(_space, family, Window());
         _wanted = _requirement.Margin * MarginSlack;
+        _mostWatts = family.Members.Max(member => member.Crystal.DriveLevelWatts ?? double.PositiveInfinity);
         _screenHz = family.Members[0].Crystal.FrequencyHz;
     }
 
@@ -44,6 +48,9 @@ internal sealed class FamilyScan
 
     /// <summary>Combinations (of parts, for one crystal) that the frequency error removed for every crystal.</summary>
     public double ErrorRejections { get; private set; }
+
+    /// <summary>Combinations (of parts, for one crystal) that the drive level removed for every crystal.</summary>
+    public double DriveRejections { get; private set; }
 
     /// <summary>
     /// A few combinations spread over the whole, for good answers early: against them the rest can be left out sooner.
@@ -145,16 +152,13 @@ internal sealed class FamilyScan
                 continue;
             }
 
-            double amplifier = 0;
             if (range != LoadRange.Any)
             {
                 slopes = Grid.Slopes(option, i, j, range);
-                amplifier = _family.IsGate ? Grid.LeastAmplifierRatio(option, i, j) : 0;
-            }
-
-            if (!MayMatter(option, i, j, range, slopes, amplifier, screened / ScreenSlack, weight))
-            {
-                continue;
+                if (!MayMatter(option, i, j, range, slopes, 0, screened / ScreenSlack, weight))
+                {
+                    continue;
+                }
             }
 
             double margin = WorstMargin(option, i, j);
@@ -162,11 +166,56 @@ internal sealed class FamilyScan
             {
                 MarginRejections += weight;
             }
-            else if (MayMatter(option, i, j, range, slopes, amplifier, margin, weight))
+            else if (Narrowed(option, i, j, range, slopes, margin, weight) is { } spot)
             {
-                found.Add(new Spot(option, i, j, margin, range, slopes, amplifier));
+                found.Add(spot);
             }
         }
+    }
+
+    // What the margin left, with ever more from the nodes round it.
+    private Spot? Narrowed(int option, int i, int j, LoadRange range, LoadSlopes slopes, double margin, double weight)
+    {
+        if (range == LoadRange.Any)
+        {
+            return MayMatter(option, i, j, range, slopes, 0, margin, weight) ? new Spot(option, i, j, margin, range, slopes, 0) : null;
+        }
+
+        if (!MayMatter(option, i, j, range, slopes, 0, margin, weight))
+        {
+            return null;
+        }
+
+        
+        range = Grid.Sharp(option, i, j, range);
+        slopes = Grid.Slopes(option, i, j, range);
+        if (!MayMatter(option, i, j, range, slopes, 0, margin, weight))
+        {
+            return null;
+        }
+
+        
+        if (Grid.LeastDriveWatts(option, i, j, highest: false) > _mostWatts)
+        {
+            DriveRejections += weight;
+            return null;
+        }
+
+        
+        double amplifier = _family.IsGate ? Grid.LeastAmplifierRatio(option, i, j) : 0;
+        if (!MayMatter(option, i, j, range, slopes, amplifier, margin, weight))
+        {
+            return null;
+        }
+
+        
+        if (_family.IsGate && Grid.LeastDriveWatts(option, i, j, highest: true) > _mostWatts)
+        {
+            DriveRejections += weight;
+            return null;
+        }
+
+        return new Spot(option, i, j, margin, range, slopes, amplifier);
     }
 
     // The margin of the weakest device at the lowest supply at the crystal's nominal frequency: the worst one is no better.
@@ -240,14 +289,22 @@ internal sealed class FamilyScan
         return Math.Max(0, off - member.Quality.ErrorRatio(crystal, fastest, range.HarmonicShare));
     }
 
+    // Least margin over supply, ambient and device at nominal capacitances, no less than the full analysis finds; the corner that
+    // was least somewhere is looked at first elsewhere.
     private double WorstMargin(int option, int i, int j)
     {
         double least = double.PositiveInfinity;
         CircuitValues values = Values(option, i, j);
-        for (int corner = 0; corner < _template.AmplifierCorners.Length && least >= _wanted; corner++)
+        ImmutableArray<OperatingPoint> corners = _template.AmplifierCorners;
+        int first = _weakest;
+        for (int k = 0; k < corners.Length && least >= _wanted; k++)
         {
-            double margin = OscillatorAnalysis.FindStartFigures(_template.At(values, _template.AmplifierCorners[corner])).Margin;
-            least = Math.Min(least, Bound(margin));
+            int corner = (first + k) % corners.Length;
+            double margin = Bound(OscillatorAnalysis.FindMarginAt(_template.At(values, corners[corner]), _screenHz)) / ScreenSlack;
+            if (margin < least)
+            {
+                (least, _weakest) = (margin, corner);
+            }
         }
 
         return least;

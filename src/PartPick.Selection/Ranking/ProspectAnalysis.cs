@@ -1,5 +1,6 @@
 using PartPick.Catalog;
 using PartPick.Physics;
+using PartPick.Physics.Circuits;
 
 namespace PartPick.Selection.Search;
 
@@ -11,12 +12,15 @@ internal sealed class ProspectAnalysis
 {
     // By how much the steady state at the fineness of the corners may differ from the converged one.
     private const double BaseSlack = 1e-6;
+    private const double RoughSlack = 1.5e-6;
     private const double BaseDriveSlack = 0.01;
     private const double FirstOrderShare = 0.93;
 
     // By how much the highest drive level over all corners may differ from that over those at nominal capacitances.
-    private const double LeastCornerDrive = 0.85;
+    /// <summary>Least share of the former over the latter.</summary>
+    public const double LeastCornerDrive = 0.85;
     private const double MostCornerDrive = 1.7;
+    private const double LikelyCornerDrive = 1.2;
     private readonly SearchRun _run;
     private readonly CircuitFamily _family;
     private readonly FamilyMember _member;
@@ -66,13 +70,19 @@ internal sealed class ProspectAnalysis
         if (!Left(pair => MayReach(pair, least + terms.Ratio(pair.C1.Spread(_reach), pair.C2.Spread(_reach))))
             || !Left(pair => MayReachFirst(pair, least, grid))
             || (!_requirement.AllowDisturbance && !Left(Margins))
-            || !Left(Stock))
+            || !Left(Stock)
+            || !MayReachOverAmplifier(least - _spot.AmplifierRatio, grid))
+        {
+            return;
+        }
+
+        if (Rough(estimate, grid) is not { } start)
         {
             return;
         }
 
         _run.Tally.CountAnalysed();
-        var analysis = new ValueAnalysis(_member.Template, _requirement, _values, estimate.State);
+        var analysis = new ValueAnalysis(_member.Template, _requirement, _values, start.State, start.Fineness);
         if (analysis.Base is not { } nominal)
         {
             Reject(Limit.Error);
@@ -81,14 +91,36 @@ internal sealed class ProspectAnalysis
         {
             Reject(Limit.Drive);
         }
-        else if (MayReach(nominal, analysis)
-            && Left(pair => Budget(pair, nominal, analysis, BaseSlack))
+        else if (Left(pair => MayRunHardest(pair, analysis)) && MayReach(nominal, analysis)
+            && _family.IsGate ? Left(pair => Budget(pair, nominal, analysis, BaseSlack)) : MayReachSteady(analysis)
             && Left(pair => Budget(pair, analysis.Steady, analysis, 0))
             && Left(Margins))
         {
             _pairs.RemoveAll(pair => !Runs(pair, analysis));
             Add();
         }
+    }
+
+    // An estimate of a buffered inverter may be far off; half of the way to its steady state tells the frequency. Where the full
+    // analysis starts from, or null where it need not be made.
+    private (RunningState State, Fineness Fineness)? Rough(Estimate estimate, EstimateGrid grid)
+    {
+        if (_family.Amplifier is not AmplifierPart { IsBuffered: true })
+        {
+            return (estimate.State, Fineness.OneFiner);
+        }
+
+        OscillatorCircuit circuit = _member.Template.At(_values, OperatingPoint.Nominal(_requirement));
+        RunningFigures? rough =
+            OscillatorAnalysis.FindSteadyState(circuit, estimate.State, Fineness.OneFinerRoughly, out RunningState? state);
+        if (rough is null || state is null)
+        {
+            return (estimate.State, Fineness.OneFiner);
+        }
+
+        LeastTerms terms = LeastTerms.OfSlopes(
+            _requirement.Board, _family.IsGate, _values, grid.FirstOrder(_spot.Option, _spot.C1, _spot.C2), _member.Quality.SlopeShare);
+        return Left(pair => MayReach(pair, rough, terms, _spot.AmplifierRatio, RoughSlack)) ? (state, Fineness.Same) : null;
     }
 
     // With slopes of the first order, from the estimate's state.
@@ -100,25 +132,59 @@ internal sealed class ProspectAnalysis
         return !double.IsFinite(terms) || MayReach(pair, least + terms);
     }
 
+    // With the amplifier's shift at the corners furthest apart, and the drive level there, as estimated.
+    private bool MayReachOverAmplifier(double least, EstimateGrid grid)
+    {
+        if (_family.Amplifier is not AmplifierPart { Stages: <= 1 })
+        {
+            return true;
+        }
+
+        (double ratio, double watts) = grid.LeastOverAmplifier(_spot.Option, _spot.C1, _spot.C2);
+        if (watts > _member.Crystal.DriveLevelWatts)
+        {
+            Reject(Limit.Drive);
+            return false;
+        }
+
+        return Left(pair => MayReachFirst(pair, least + ratio, grid));
+    }
+
     // Ever more of the error budget, from what costs least to find.
     private bool MayReach(RunningFigures nominal, ValueAnalysis analysis)
     {
-        Board board = _requirement.Board;
         LeastTerms terms = LeastTerms.OfLoad(
-            board, _family.IsGate, _member.Model.Crystal, _values, _spot.Slopes, nominal.LoadFarads);
-        if (!Left(pair => MayReach(pair, nominal, terms, 0)))
+            _requirement.Board, _family.IsGate, _member.Model.Crystal, _values, _spot.Slopes, nominal.LoadFarads);
+        if (!Left(pair => MayReach(pair, nominal, terms, 0, BaseSlack)))
         {
             return false;
         }
 
-        (double C1, double C2, double Across) slopes = analysis.FirstOrderSlopesPerFarad;
-        if (double.IsFinite(slopes.C1 + slopes.C2 + slopes.Across))
+        terms = FirstOrderTerms(analysis, terms);
+        return Left(pair => MayReach(pair, nominal, terms, 0, BaseSlack))
+            && (!_family.IsGate || Left(pair => MayReach(pair, nominal, terms, analysis.LeastAmplifierRatio, BaseSlack)));
+    }
+
+    // A follower's converged state costs little more than another one at the same fineness.
+    private bool MayReachSteady(ValueAnalysis analysis)
+    {
+        if (analysis.Steady is not { } steady)
         {
-            terms = LeastTerms.OfSlopes(board, _family.IsGate, _values, slopes, FirstOrderShare);
+            Reject(Limit.Error);
+            return false;
         }
 
-        return Left(pair => MayReach(pair, nominal, terms, 0))
-            && Left(pair => MayReach(pair, nominal, terms, analysis.AmplifierRatio));
+        LeastTerms terms = FirstOrderTerms(analysis, default);
+        return Left(pair => MayReach(pair, steady, terms, 0, 0))
+            && Left(pair => MayReach(pair, steady, terms, analysis.LeastAmplifierRatio, 0));
+    }
+
+    private LeastTerms FirstOrderTerms(ValueAnalysis analysis, in LeastTerms otherwise)
+    {
+        (double C1, double C2, double Across) slopes = analysis.FirstOrderSlopesPerFarad;
+        return double.IsFinite(slopes.C1 + slopes.C2 + slopes.Across)
+            ? LeastTerms.OfSlopes(_requirement.Board, _family.IsGate, _values, slopes, FirstOrderShare)
+            : otherwise;
     }
 
     private bool Left(Predicate<CapacitorPair> stays)
@@ -139,10 +205,10 @@ internal sealed class ProspectAnalysis
             && MayEnter(pair);
     }
 
-    private bool MayReach(CapacitorPair pair, RunningFigures nominal, in LeastTerms terms, double amplifierRatio)
+    private bool MayReach(CapacitorPair pair, RunningFigures nominal, in LeastTerms terms, double amplifierRatio, double slack)
     {
         double least = _member.TermsRatio
-            + Math.Max(0, Math.Abs(nominal.FrequencyHz / _member.TargetHz - 1) - BaseSlack)
+            + Math.Max(0, Math.Abs(nominal.FrequencyHz / _member.TargetHz - 1) - slack)
             + MemberSearch.AssumedShift(_member, nominal.FrequencyHz, 0)
             + terms.Ratio(pair.C1.Spread(_reach), pair.C2.Spread(_reach))
             + amplifierRatio;
@@ -169,6 +235,21 @@ internal sealed class ProspectAnalysis
 
     private bool WithinBudget(CapacitorPair pair) => Holds(pair, pair.ErrorRatio <= _requirement.BudgetRatio, Limit.Error);
 
+    // The corner that likely drives most, before anything that costs more: in a small crystal it often settles the matter.
+    private bool MayRunHardest(CapacitorPair pair, ValueAnalysis analysis)
+    {
+        if (!_family.IsGate || _member.Crystal.DriveLevelWatts is not { } rated)
+        {
+            return true;
+        }
+
+        double watts = analysis.AmplifierDriveWattsAt(_member.Template.AmplifierCorners.Length - 1);
+        return Holds(
+            pair,
+            watts * LeastCornerDrive <= rated && (watts * LikelyCornerDrive <= rated || Corners(pair).HardestRunsWithin(analysis, rated)),
+            Limit.Drive);
+    }
+
     private bool Runs(CapacitorPair pair, ValueAnalysis analysis)
     {
         CornerAnalysis corners = Corners(pair);
@@ -179,14 +260,8 @@ internal sealed class ProspectAnalysis
         }
 
         // A buffered inverter may build up and yet find no steady state at a corner; the others always do.
-        if (_family.Amplifier is not AmplifierPart { Stages: > 1 }
-            && _requirement.StartUpTimeSeconds is null
-            && !(analysis.AmplifierDriveWatts * MostCornerDrive > rated))
-        {
-            return true;
-        }
-
-        return Holds(pair, corners.RunsWithin(analysis, rated), Limit.Drive)
+        double most = _family.Amplifier is AmplifierPart { Stages: > 1 } ? double.PositiveInfinity : MostCornerDrive;
+        return Holds(pair, corners.RunsWithin(analysis, rated, most), Limit.Drive)
             && Holds(
                 pair,
                 _requirement.StartUpTimeSeconds is not { } wanted || corners.StartUpTime(analysis)?.Value <= wanted,

@@ -205,6 +205,7 @@ internal sealed class SearchRun
         Look(family, scan.Rest(), scan.Grid);
         Tally.Reject(Limit.Margin, scan.MarginRejections * family.Members.Length);
         Tally.Reject(Limit.Error, scan.ErrorRejections * family.Members.Length);
+        Tally.Reject(Limit.Drive, scan.DriveRejections * family.Members.Length);
         Tally.Cover(Space.CapacitorPairs * family.Options.Length * family.Members.Length);
     }
 

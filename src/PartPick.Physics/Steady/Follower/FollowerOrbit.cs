@@ -1,3 +1,4 @@
+using System.Buffers;
 using System.Numerics;
 using System.Runtime.InteropServices;
 using System.Runtime.Intrinsics;
@@ -157,11 +158,30 @@ internal sealed class FollowerOrbit
         return (reverse, low, high);
     }
 
+    /// <summary>Gives the room for its numbers back; what it knew is lost.</summary>
+    public void Release()
+    {
+        Give(ref _volts);
+        Give(ref _currents);
+        Give(ref _slopes);
+    }
+
+    private static void Give(ref double[] array)
+    {
+        if (array.Length > 0)
+        {
+            ArrayPool<double>.Shared.Return(array);
+            array = [];
+        }
+    }
+
     private static Span<double> Room(ref double[] array, int count)
     {
         if (array.Length < count)
         {
-            array = new double[count];
+            Give(ref array);
+            array = ArrayPool<double>.Shared.Rent(count);
+            Array.Clear(array);
         }
 
         return array.AsSpan(0, count);

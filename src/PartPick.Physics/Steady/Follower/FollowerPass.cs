@@ -136,7 +136,7 @@ internal sealed class FollowerPass
         var begin = new ChargeRows(_endSlopes);
         ReadOnlySpan<Vector256<double>> lines = MemoryMarshal.Cast<double, Vector256<double>>(slopes);
         Span<Vector256<double>> ends = MemoryMarshal.Cast<double, Vector256<double>>(_endSlopes.AsSpan());
-        int carrying = currents[Stages] == 0 ? Stages : Voltages;
+        int carrying = currents[0] + currents[1] + currents[2] == 0 ? 0 : currents[Stages] == 0 ? Stages : Voltages;
         Span<double> charges = stackalloc double[3];
         for (int row = 0; row < 3; row++)
         {

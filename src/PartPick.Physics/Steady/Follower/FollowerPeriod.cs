@@ -135,6 +135,13 @@ internal sealed partial class FollowerPeriod : ForcedState
         return ((low + _units.Supply) * _units.Volts, (high + _units.Supply) * _units.Volts);
     }
 
+    /// <inheritdoc/>
+    public override void Release()
+    {
+        _shooting.Release();
+        _remembered.Release();
+    }
+
     private Complex LinearControl() =>
         _network.At(new Complex(0, Radians)).ControlPerCurrent(_bias.TransconductanceSiemens);
 

@@ -56,6 +56,13 @@ internal sealed class FollowerShooting
     /// <summary>d ln(−Re Zc)/d ln I of a state solved for its amplitude.</summary>
     public double RunningSlope => 1 / _inverse[LogAmps * Unknowns + LogAmps];
 
+    /// <summary>Gives the room of both orbits back; nothing can be asked of them any more.</summary>
+    public void Release()
+    {
+        Now.Release();
+        At.Release();
+    }
+
     /// <summary>Solves for the periodic state, from what is known.</summary>
     /// <param name="resistanceOhms">Rm in ohms; null where the amplitude is given.</param>
     /// <param name="tolerance">Largest last step of a voltage, in thermal voltages.</param>

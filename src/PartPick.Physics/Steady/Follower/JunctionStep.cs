@@ -39,6 +39,15 @@ internal static class JunctionStep
         Span<double> currents,
         Span<double> slopes)
     {
+        // A current lowers the voltage that makes it: where neither junction would conduct without one, neither does.
+        if (IsNegligible(offsets) && IsNegligible(offsets[Stages..]))
+        {
+            offsets.CopyTo(volts);
+            right.CopyTo(slopes);
+            currents.Clear();
+            return 0;
+        }
+
         if (IsNegligible(volts[Stages..]))
         {
             double left = SingleJunction.Solve(map, offsets, right, volts, currents, slopes);

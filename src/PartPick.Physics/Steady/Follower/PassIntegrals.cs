@@ -72,6 +72,11 @@ internal sealed class PassIntegrals
         ReadOnlySpan<double> currents,
         ReadOnlySpan<double> slopes)
     {
+        if (currents[0] + currents[1] + currents[2] == 0 && !_holdsBase)
+        {
+            return;
+        }
+
         ReadOnlySpan<Vector256<double>> lines = MemoryMarshal.Cast<double, Vector256<double>>(slopes);
         Span<Vector256<double>> emitter = MemoryMarshal.Cast<double, Vector256<double>>(_emitter.AsSpan());
         Span<Vector256<double>> resistance = MemoryMarshal.Cast<double, Vector256<double>>(_resistance.AsSpan());
