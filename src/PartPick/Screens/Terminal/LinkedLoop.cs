@@ -57,12 +57,13 @@ internal sealed class LinkedLoop : IScreenLoop
         _beforeEnd = beforeEnd;
         IDriver driver = _app.Driver!;
         var intake = new KeyIntake();
+        var feed = new KeyFeed(_app);
         PosixSignalRegistration? stopped = null;
         screen.StopAsked += Suspend;
         screen.RepaintAsked += Repaint;
         driver.SetScreenSize(Size.Width, Size.Height);
         _app.TimedEvents!.Added += (_, _) => _pace.Wake();
-        _app.Iteration += (_, _) => BeforeTurn();
+        _app.Iteration += (_, _) => BeforeTurn(feed);
         _app.LayoutAndDrawComplete += (_, _) => Show();
         using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, End);
         using PosixSignalRegistration interrupt = PosixSignalRegistration.Create(PosixSignal.SIGINT, End);
@@ -71,15 +72,10 @@ internal sealed class LinkedLoop : IScreenLoop
         using PosixSignalRegistration goesOn = PosixSignalRegistration.Create(PosixSignal.SIGCONT, GoOn);
         stopped = PosixSignalRegistration.Create(PosixSignal.SIGTSTP, StopFromOutside);
         _link.Enter(Size.Height, Size.Width);
-        var keys = (InputProcessorImpl<char>)driver.GetInputProcessor();
         intake.Start(
             typed =>
             {
-                foreach (char sign in typed)
-                {
-                    keys.InputQueue.Enqueue(sign);
-                }
-
+                feed.Take(typed);
                 _pace.WakeForKeys();
             },
             () => Post(_app.RequestStop));
@@ -128,9 +124,10 @@ internal sealed class LinkedLoop : IScreenLoop
 
     private static Size Size => new(Math.Max(1, Console.WindowWidth), Math.Max(1, Console.WindowHeight));
 
-    private void BeforeTurn()
+    private void BeforeTurn(KeyFeed feed)
     {
         _pace.Rest();
+        feed.HandOn();
         if (_app.Driver!.Screen.Size != Size)
         {
             Size size = Size;

@@ -9,7 +9,7 @@ internal sealed class LoopPace
     private static readonly TimeSpan Calm = TimeSpan.FromMilliseconds(100);
     private static readonly TimeSpan Lively = TimeSpan.FromMilliseconds(10);
 
-    // The toolkit holds a lone Esc back for 50 ms, since it may begin the sequence of another key.
+    // A lone Esc is held back for 50 ms, since it may begin the sequence of another key.
     private static readonly TimeSpan AfterKeys = TimeSpan.FromMilliseconds(150);
 
     /// <summary>How long a stop may take to begin.</summary>
