@@ -96,8 +96,9 @@ internal sealed class TerminalLink : IDisposable
             // First the modes: who sees the screen go may type at once.
             _isIn = false;
             GiveModesBack();
-            Send((_traits.HasAlternateScreen ? "\x1b[m" + MainScreen : PlainAndClear)
-                + (_traits.HidesCursor ? ShowCursor : "") + OrdinaryKeys);
+
+            // Cleared even where another screen is behind it: one that has become smaller in the meantime may not hide all of this one.
+            Send(PlainAndClear + (_traits.HasAlternateScreen ? MainScreen : "") + (_traits.HidesCursor ? ShowCursor : "") + OrdinaryKeys);
         }
     }
 
