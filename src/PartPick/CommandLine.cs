@@ -82,7 +82,9 @@ internal static class CommandLine
             root.Add(build(context));
         }
 
-        root.SetAction(parsed => ScreenHost.Run(context.CatalogPath(parsed), null));
+        var ascii = new Option<bool>("--ascii") { Description = "Draw the terminal interface with ASCII signs alone." };
+        root.Add(ascii);
+        root.SetAction(parsed => ScreenHost.Run(context.CatalogPath(parsed), null, parsed.GetValue(ascii)));
         HelpFooter.AddTo(root, "Cautions", HelpFooter.Cautions);
         return root;
     }

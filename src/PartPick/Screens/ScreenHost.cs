@@ -11,20 +11,30 @@ public static class ScreenHost
     private static readonly TimeSpan ReadingTime = TimeSpan.FromMilliseconds(300);
     private static readonly TimeSpan WritingTime = TimeSpan.FromSeconds(60);
 
+    private const string WithoutScreens = "the commands work without one (partpick --help)";
+
     /// <summary>Runs the terminal interface until it is left.</summary>
     /// <param name="catalogPath">Path of the catalogue's file.</param>
     /// <param name="requirementPath">A requirement file to begin with; null to go on with the one that was kept.</param>
-    /// <returns>0; 2 where there is no terminal or the file is wrong; 3 where the catalogue cannot be used.</returns>
-    public static int Run(string catalogPath, string? requirementPath)
+    /// <param name="ascii">Whether to draw with ASCII signs alone, whatever the locale says.</param>
+    /// <returns>0; 2 where there is no fit terminal or the file is wrong; 3 where the catalogue cannot be used.</returns>
+    public static int Run(string catalogPath, string? requirementPath, bool ascii = false)
     {
         if (Console.IsInputRedirected || Console.IsOutputRedirected)
         {
-            return Fail(ExitStatus.WrongInput, "the screens need a terminal; the commands work without one (partpick --help)");
+            return Fail(ExitStatus.WrongInput, "the screens need a terminal; " + WithoutScreens);
+        }
+
+        TerminalTraits traits = TerminalTraits.Of(Environment.GetEnvironmentVariable);
+        if (!traits.CanPlace)
+        {
+            string name = traits.Name.Length == 0 ? "none is named in TERM" : $"TERM names {Problem.Quote(traits.Name)}";
+            return Fail(ExitStatus.WrongInput, $"the screens need a terminal that can place the cursor, and {name}; {WithoutScreens}");
         }
 
         try
         {
-            return Open(catalogPath, requirementPath);
+            return Open(catalogPath, requirementPath, ascii ? traits with { IsUtf8 = false } : traits);
         }
         catch (Exception error)
         {
@@ -33,7 +43,7 @@ public static class ScreenHost
         }
     }
 
-    private static int Open(string catalogPath, string? requirementPath)
+    private static int Open(string catalogPath, string? requirementPath, TerminalTraits traits)
     {
         Result<ImportNote?> probe = CatalogReading.Undoable(catalogPath);
         if (!probe.IsOk)
@@ -44,6 +54,7 @@ public static class ScreenHost
         // A small catalogue is read in this time, and any problem of it is said before the screen opens.
         var ranking = new CatalogRanking(new PartsOnDemand(new StoredParts(catalogPath)));
         Task<Result<bool>> opening = ranking.Open();
+        using IScreenLoop loop = IScreenLoop.Prepare(traits);
         if (opening.Wait(ReadingTime) && opening.GetAwaiter().GetResult() is { IsOk: false } failed)
         {
             return Fail(ExitStatus.NoCatalog, failed.Problem.ToString());
@@ -59,10 +70,9 @@ public static class ScreenHost
         string? notice = !start.IsOk ? "! " + start.Problem
             : start.Value is null ? "A river-level logger, as an example: press e to change it, ? for all keys."
             : null;
-        var run = new TerminalRun(
-            catalogPath, ranking, TerminalTraits.Of(Environment.GetEnvironmentVariable), requirement => keeper.Keep(requirement), opening);
+        var run = new TerminalRun(catalogPath, ranking, traits, requirement => keeper.Keep(requirement), opening);
         Requirement end = run.Show(
-            start.ValueOr(null) ?? FirstRequirement.RiverLogger, notice, new CatalogDesk(catalogPath),
+            loop, start.ValueOr(null) ?? FirstRequirement.RiverLogger, notice, new CatalogDesk(catalogPath),
             new KeptRequirementStore(catalogPath));
         if (!run.Finish(WritingTime))
         {

@@ -21,7 +21,7 @@ internal static class MidsizeTable
         }
 
         bool equal = true;
-        foreach (string name in MidWorld.Names.Where(name => arguments.Length == 0 || arguments.Any(part => name.Contains(part, StringComparison.Ordinal))))
+        foreach (string name in MidWorld.Names.Where(name => arguments.Length == 0 || arguments.Any(name.Contains)))
         {
             SmallWorld world = MidWorld.Named(name);
             RankingResult best = Ranker.Rank(world.Requirement, world.Catalog);
@@ -29,28 +29,46 @@ internal static class MidsizeTable
             output.WriteLine(string.Create(
                 CultureInfo.InvariantCulture,
                 $"{name}: {best.Combinations:0} combinations, {every.Tried} tried, {every.Fit} fit, {best.Analysed} full analyses by the search"));
-            equal &= Compare("front", every.Front(), [.. best.Front], output);
-            equal &= Compare("first 50", [.. every.BestOfGroups().Take(50)], [.. best.Candidates.Select(one => one.Id)], output);
+            equal &= Compare("front", every, every.Front(), [.. best.Front], output);
+            equal &= Compare(
+                "first 50", every, [.. every.BestOfGroups().Take(50)], [.. best.Candidates.Select(one => one.Id)], output);
         }
 
         return equal ? 0 : 1;
     }
 
-    private static bool Compare(string what, string[] every, string[] search, TextWriter output)
+    private static bool Compare(string what, EveryCombination every, string[] tried, string[] search, TextWriter output)
     {
-        bool equal = every.SequenceEqual(search);
-        output.WriteLine($"  {what}: {every.Length} of every combination, {search.Length} of the search, {(equal ? "equal" : "DIFFERENT")}");
-        foreach (string id in equal ? [] : every.Except(search))
+        bool equal = tried.SequenceEqual(search);
+        output.WriteLine($"  {what}: {tried.Length} of every combination, {search.Length} of the search, {(equal ? "equal" : "DIFFERENT")}");
+        foreach (string id in tried.Except(search))
         {
-            output.WriteLine($"    only of every combination: {id}");
+            output.WriteLine($"    only of every combination: {Figures(every, id)}");
         }
 
-        foreach (string id in equal ? [] : search.Except(every))
+        foreach (string id in search.Except(tried))
         {
-            output.WriteLine($"    only of the search: {id}");
+            output.WriteLine($"    only of the search: {Figures(every, id)}");
         }
 
         output.Flush();
         return equal;
+    }
+
+    // With the one that comes nearest to beating it: no less margin, no dearer, and the least error.
+    private static string Figures(EveryCombination every, string id)
+    {
+        if (every.FitOnes.FirstOrDefault(one => one.Id == id) is not { } choice)
+        {
+            return $"{id} (not fit)";
+        }
+
+        TriedChoice? rival = every.FitOnes
+            .Where(one => one.Id != id && one.Margin >= choice.Margin && one.Cost <= choice.Cost).MinBy(one => one.ErrorRatio);
+        return string.Create(
+            CultureInfo.InvariantCulture,
+            $"{id} (error {choice.ErrorRatio * 1e6:0.000} ppm, margin {choice.Margin:0.000}, cost {choice.Cost:0.0000}; ")
+            + (rival is null ? "none has as much margin for no more)" : string.Create(
+                CultureInfo.InvariantCulture, $"{(rival.ErrorRatio - choice.ErrorRatio) * 1e6:+0.000;-0.000} ppm: {rival.Id})"));
     }
 }

@@ -3,7 +3,7 @@ using System.Runtime.ExceptionServices;
 namespace PartPick.Screens;
 
 /// <summary>Does what takes long on threads of its own; what comes of it is taken where the screen's thread is.</summary>
-/// <param name="post">Runs something on the screen's thread.</param>
+/// <param name="post">Runs something on the screen's thread, never before it returns.</param>
 public sealed class ScreenWork(Action<Action> post)
 {
     private int _running;

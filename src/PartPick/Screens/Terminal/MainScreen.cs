@@ -24,6 +24,12 @@ internal sealed class MainScreen : Runnable
         model.Redraw += Refresh;
     }
 
+    /// <summary>Raised when the program is to stop and leave the terminal to the shell.</summary>
+    public event Action? StopAsked;
+
+    /// <summary>Raised when the whole screen is to be sent again.</summary>
+    public event Action? RepaintAsked;
+
     /// <summary>Brings every row that looks different up to date.</summary>
     public void Refresh()
     {
@@ -58,6 +64,18 @@ internal sealed class MainScreen : Runnable
         if (key == Key.Q.WithCtrl || key == Key.C.WithCtrl)
         {
             App?.RequestStop();
+            return true;
+        }
+
+        if (key == Key.Z.WithCtrl)
+        {
+            StopAsked?.Invoke();
+            return true;
+        }
+
+        if (key == Key.L.WithCtrl)
+        {
+            RepaintAsked?.Invoke();
             return true;
         }
 

@@ -32,6 +32,36 @@ public class TerminalTests
     }
 
     [Theory]
+    [InlineData("xterm-256color", true, true, true)]
+    [InlineData("screen.xterm-256color", true, true, true)]
+    [InlineData("tmux", true, true, true)]
+    [InlineData("linux", false, true, true)]
+    [InlineData("vt220", false, true, false)]
+    [InlineData("vt100", false, false, false)]
+    [InlineData("vt102", false, false, false)]
+    [InlineData("ansi", false, false, false)]
+    [InlineData("something-new", false, false, false)]
+    public void Only_what_the_terminal_has_is_asked_of_it(string term, bool alternateScreen, bool hidesCursor, bool faint)
+    {
+        TerminalTraits traits = TerminalTraits.Of(name => name == "TERM" ? term : null);
+
+        Assert.True(traits.CanPlace);
+        Assert.Equal((alternateScreen, hidesCursor, faint), (traits.HasAlternateScreen, traits.HidesCursor, traits.HasFaint));
+    }
+
+    [Theory]
+    [InlineData("dumb")]
+    [InlineData("")]
+    [InlineData(null)]
+    [InlineData("vt52")]
+    public void A_terminal_that_cannot_place_the_cursor_is_known(string? term) =>
+        Assert.False(TerminalTraits.Of(name => name == "TERM" ? term : null).CanPlace);
+
+    [Fact]
+    public void A_VT100_is_never_sent_Unicode() =>
+        Assert.False(TerminalTraits.Of(name => name switch { "TERM" => "vt100", "LANG" => "C.UTF-8", _ => null }).IsUtf8);
+
+    [Theory]
     [InlineData("xterm-256color", true, false)]
     [InlineData("tmux-256color", true, false)]
     [InlineData("linux", false, false)]
