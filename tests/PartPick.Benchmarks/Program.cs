@@ -25,6 +25,8 @@ if (args is ["--scale", .. var scale])
 if (args is ["--midsize", .. var worlds])
 {
     return MidsizeTable.Print(worlds, Console.Out, Console.Error);
+}
+
 if (args is ["--screens", .. var screens])
 {
     return ScreensTable.Print(screens, Console.Out);

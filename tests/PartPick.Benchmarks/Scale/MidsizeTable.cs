@@ -28,7 +28,7 @@ internal static class MidsizeTable
             var every = new EveryCombination(world.Requirement, world.Catalog);
             output.WriteLine(string.Create(
                 CultureInfo.InvariantCulture,
-                $"{name}: {best.Combinations:0} combinations, {every.Tried} tried, {every.Fit} fit, {best.Analysed} full analyses by the search"));
+                $"{name}: {best.Combinations:0} combinations, {every.Tried} tried, {every.Fit} fit, {best.Analysed} full analyses by search"));
             equal &= Compare("front", every, every.Front(), [.. best.Front], output);
             equal &= Compare(
                 "first 50", every, [.. every.BestOfGroups().Take(50)], [.. best.Candidates.Select(one => one.Id)], output);
@@ -40,7 +40,8 @@ internal static class MidsizeTable
     private static bool Compare(string what, EveryCombination every, string[] tried, string[] search, TextWriter output)
     {
         bool equal = tried.SequenceEqual(search);
-        output.WriteLine($"  {what}: {tried.Length} of every combination, {search.Length} of the search, {(equal ? "equal" : "DIFFERENT")}");
+        string verdict = equal ? "equal" : "DIFFERENT";
+        output.WriteLine($"  {what}: {tried.Length} of every combination, {search.Length} of the search, {verdict}");
         foreach (string id in tried.Except(search))
         {
             output.WriteLine($"    only of every combination: {Figures(every, id)}");

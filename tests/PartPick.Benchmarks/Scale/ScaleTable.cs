@@ -80,7 +80,8 @@ internal sealed class ScaleTable(ScaleArguments arguments, TextWriter output)
         Sampled sample = Sampled.Of(requirement, catalog, arguments.Drawn);
         ScaleSpace space = ScaleSpace.Of(requirement, catalog);
         Line("crystals that match", Text($"{space.Crystals} (aim: about 400)"));
-        Line("combinations of the space", Text($"{space.Combinations:0.00e0}, of which {sample.Admitted:0.00e0} within the stated limits of their parts"));
+        Line("combinations of the space",
+            Text($"{space.Combinations:0.00e0}, of which {sample.Admitted:0.00e0} within the stated limits of their parts"));
         double[] firsts = [.. runs.Select(run => run.FirstSeconds).OfType<double>()];
         Line("first best-so-far", firsts.Length == 0 ? "none" : Text($"{Median(firsts) * 1000:0} ms (aim: 100)"));
         bool whole = runs.All(run => run.Answer is not null);
@@ -97,7 +98,8 @@ internal sealed class ScaleTable(ScaleArguments arguments, TextWriter output)
     private void WriteBruteForce(Sampled sample, double seconds, bool whole)
     {
         string than = whole ? "" : "less than ";
-        Line("brute force, every figure of every combination", Text($"{sample.FullSeconds:0.0e0} s (NOT run: {sample.Drawn} drawn evenly, timed on all cores, scaled)"));
+        Line("brute force, every figure of every combination",
+            Text($"{sample.FullSeconds:0.0e0} s (NOT run: {sample.Drawn} drawn evenly, timed on all cores, scaled)"));
         Line("  over the exact search", Text($"{than}{sample.FullSeconds / seconds:0.0e0} (aim: 1e5)"));
         Line("brute force, margin first", Text($"{sample.MarginFirstSeconds:0.0e0} s (scaled in the same way)"));
         Line("  over the exact search", Text($"{than}{sample.MarginFirstSeconds / seconds:0.0e0}"));

@@ -3,7 +3,9 @@ using PartPick.Selection.Search;
 
 namespace PartPick.Selection.Tests.Ranking;
 
-/// <summary>Catalogues of some 100 000 combinations drawn from the built-in parts: several crystals, amplifiers and parts of a value.</summary>
+/// <summary>
+/// Catalogues of some 100 000 combinations drawn from the built-in parts: several crystals, amplifiers and parts of a value.
+/// </summary>
 internal static class MidWorld
 {
     /// <summary>The worlds: inverters, buffered ones among them; counters and ports; followers.</summary>

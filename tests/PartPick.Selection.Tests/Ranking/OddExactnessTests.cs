@@ -17,7 +17,11 @@ public class OddExactnessTests
         get
         {
             var data = new TheoryData<int, string>();
-            data.AddRange([.. Enumerable.Range(0, Worlds).Select(number => new TheoryDataRow<int, string>(number, OddWorld.Oddity(number)))]);
+            foreach (int number in Enumerable.Range(0, Worlds))
+            {
+                data.Add(number, OddWorld.Oddity(number));
+            }
+
             return data;
         }
     }
