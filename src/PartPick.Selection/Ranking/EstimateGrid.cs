@@ -134,7 +134,7 @@ internal sealed partial class EstimateGrid
         double harmonics = 0;
         foreach ((Node? node, double weight) in Around(option, c1, c2, between))
         {
-            if (node is null || node.Share == 0)
+            if (node is null)
             {
                 return null;
             }
@@ -189,7 +189,7 @@ internal sealed partial class EstimateGrid
         return (Math.Max(0, least), CornerDriveShare * ProspectAnalysis.LeastCornerDrive * watts);
     }
 
-    // The nodes round a combination with their weights; null for one without a steady state.
+    // The nodes round a combination with their weights; null for one of which nothing is known.
     private IEnumerable<(Node? Node, double Weight)> Around(int option, int c1, int c2, bool between = true)
     {
         foreach ((int i, double byC1) in Ends(_values[c1]))
@@ -199,7 +199,7 @@ internal sealed partial class EstimateGrid
                 foreach ((int o, double byOption) in between ? Ends(_options[option]) : [(option, 1.0)])
                 {
                     Node node = Find(o, i, j);
-                    yield return (node.Estimate is null ? null : node, byC1 * byC2 * byOption);
+                    yield return (node.Share == 0 ? null : node, byC1 * byC2 * byOption);
                 }
             }
         }
@@ -240,12 +240,12 @@ internal sealed partial class EstimateGrid
             {
                 _last = state;
                 double load = _template.Crystal.Crystal.LoadAtFrequencyFarads(estimate.FrequencyHz);
-                node.Share = (load + _shunt) / _critical.Farads(values) ?? 0;
+                node.Share = EstimateQuality.Trusts(estimate.HarmonicShare) ? (load + _shunt) / _critical.Farads(values) ?? 0 : 0;
                 node.Estimate = new Estimate(estimate.FrequencyHz, load, estimate.DriveWatts, estimate.HarmonicShare, state.Slim());
             }
 
             _nodes.Add((option, c1, c2), node);
-            if (node.Estimate is { LoadFarads: var farads })
+            if (node is { Share: > 0, Estimate.LoadFarads: var farads })
             {
                 _sides[(option, c1, c2)] = farads > _window.Highest * SideReserve ? 1 : farads < _window.Lowest / SideReserve ? -1 : 0;
             }

@@ -19,6 +19,9 @@ internal readonly record struct EstimateQuality(double PullShare, double PerHarm
     private const double SinusoidalShare = 0.001;
     private const double NearlySinusoidal = 0.02;
     private const double NearlySinusoidalShare = 0.006;
+
+    // Beyond this third harmonic the few harmonics of an estimate may have found another state than the circuit's own.
+    private const double Trusted = 0.15;
     private static readonly EstimateQuality Follower = new(0.001, 0, 0.5e-6, 0.02, 0.95);
     private static readonly EstimateQuality OneStage = new(0.012, 0, 0.3e-6, 0.08, 0.86);
     private static readonly EstimateQuality Buffered = new(0.005, 1.7, 1e-6, 0.3, 0.75);
@@ -31,6 +34,10 @@ internal readonly record struct EstimateQuality(double PullShare, double PerHarm
         _ => OneStage,
     };
 
+    /// <summary>Whether an estimate with such harmonics says anything of its circuit.</summary>
+    /// <param name="harmonicShare">The estimate's harmonics.</param>
+    public static bool Trusts(double harmonicShare) => harmonicShare < Trusted;
+
     /// <summary>Largest error of an estimated frequency, as a ratio.</summary>
     /// <param name="crystal">The crystal.</param>
     /// <param name="hertz">The estimate.</param>
@@ -39,7 +46,8 @@ internal readonly record struct EstimateQuality(double PullShare, double PerHarm
         Share(harmonicShare) * Math.Abs(hertz / crystal.SeriesHz - 1) + Ratio;
 
     private double Share(double harmonicShare) =>
-        PerHarmonic == 0 || harmonicShare >= NearlySinusoidal ? PullShare + PerHarmonic * harmonicShare
+        !Trusts(harmonicShare) ? 1
+        : PerHarmonic == 0 || harmonicShare >= NearlySinusoidal ? PullShare + PerHarmonic * harmonicShare
         : harmonicShare >= Sinusoidal ? NearlySinusoidalShare
         : SinusoidalShare;
 }

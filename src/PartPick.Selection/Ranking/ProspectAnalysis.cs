@@ -56,7 +56,8 @@ internal sealed class ProspectAnalysis
             return;
         }
 
-        if (estimate.DriveWatts * (1 - _member.Quality.DriveShare) > _member.Crystal.DriveLevelWatts)
+        bool trusted = EstimateQuality.Trusts(estimate.HarmonicShare);
+        if (trusted && estimate.DriveWatts * (1 - _member.Quality.DriveShare) > _member.Crystal.DriveLevelWatts)
         {
             Reject(Limit.Drive);
             return;
@@ -68,7 +69,7 @@ internal sealed class ProspectAnalysis
             _requirement.Board, _family.IsGate, _member.Model.Crystal, _values, _spot.Slopes, load.Highest);
         double least = MemberSearch.LeastRatio(_member, load) + _spot.AmplifierRatio;
         if (!Left(pair => MayReach(pair, least + terms.Ratio(pair.C1.Spread(_reach), pair.C2.Spread(_reach))))
-            || !Left(pair => MayReachFirst(pair, least, grid))
+            || (trusted && !Left(pair => MayReachFirst(pair, least, grid)))
             || (!_requirement.AllowDisturbance && !Left(Margins))
             || !Left(Stock)
             || !MayReachOverAmplifier(least - _spot.AmplifierRatio, grid))
@@ -91,8 +92,9 @@ internal sealed class ProspectAnalysis
         {
             Reject(Limit.Drive);
         }
-        else if (Left(pair => MayRunHardest(pair, analysis)) && MayReach(nominal, analysis)
-            && _family.IsGate ? Left(pair => Budget(pair, nominal, analysis, BaseSlack)) : MayReachSteady(analysis)
+        else if (Left(pair => MayRunHardest(pair, analysis))
+            && MayReach(nominal, analysis)
+            && (_family.IsGate ? Left(pair => Budget(pair, nominal, analysis, BaseSlack)) : MayReachSteady(analysis))
             && Left(pair => Budget(pair, analysis.Steady, analysis, 0))
             && Left(Margins))
         {
@@ -118,8 +120,10 @@ internal sealed class ProspectAnalysis
             return (estimate.State, Fineness.OneFiner);
         }
 
-        LeastTerms terms = LeastTerms.OfSlopes(
-            _requirement.Board, _family.IsGate, _values, grid.FirstOrder(_spot.Option, _spot.C1, _spot.C2), _member.Quality.SlopeShare);
+        LeastTerms terms = EstimateQuality.Trusts(estimate.HarmonicShare)
+            ? LeastTerms.OfSlopes(
+                _requirement.Board, _family.IsGate, _values, grid.FirstOrder(_spot.Option, _spot.C1, _spot.C2), _member.Quality.SlopeShare)
+            : default;
         return Left(pair => MayReach(pair, rough, terms, _spot.AmplifierRatio, RoughSlack)) ? (state, Fineness.Same) : null;
     }
 

@@ -17,7 +17,9 @@ internal static class WhyNotDrawing
 
     private static ImmutableArray<Line> Picker(PartPicker picker, int width, int height, Glyphs glyphs)
     {
-        string count = picker.Count == 0 && picker.IsLooking ? "" : FormattableString.Invariant($"{picker.Count} crystals and amplifiers");
+        string count = picker.Count == 0 && picker.IsLooking ? ""
+            : picker.Count == 1 ? "1 part"
+            : FormattableString.Invariant($"{picker.Count} crystals and amplifiers");
         LineBuilder typed = new LineBuilder(glyphs).Add(" Part with ");
         var lines = ImmutableArray.CreateBuilder<Line>();
         lines.Add(Rules.Draw(
