@@ -17,6 +17,16 @@ if (args is ["--large", .. var large])
     return LargeTable.Print(large, Console.Out);
 }
 
+if (args is ["--scale", .. var scale])
+{
+    return ScaleTable.Print(scale, Console.Out, Console.Error);
+}
+
+if (args is ["--midsize", .. var worlds])
+{
+    return MidsizeTable.Print(worlds, Console.Out, Console.Error);
+}
+
 if (args is ["--screens", .. var screens])
 {
     return ScreensTable.Print(screens, Console.Out);

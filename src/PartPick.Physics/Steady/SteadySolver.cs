@@ -191,13 +191,9 @@ internal static class SteadySolver
             return Refine(branch, refinement, balance, out state) is { } refined ? FiguresOf(crystal, refined) : null;
         }
 
-        if (fineness is Fineness.OneFiner or Fineness.OneFinerRoughly && !refinement.CoarseIsFollowed)
-        {
-            balance = refinement.Finer(balance) ?? balance;
-        }
-
         if (fineness == Fineness.OneFinerRoughly)
         {
+            balance = refinement.CoarseIsFollowed ? balance : refinement.Finer(balance) ?? balance;
             if (!balance.SolveRunning(branch.ResistanceOhms, EstimateTolerance))
             {
                 return null;
@@ -205,9 +201,18 @@ internal static class SteadySolver
 
             balance.SetFrequency(FrequencyOf(branch, balance));
         }
+        else if (fineness == Fineness.OneFiner && !refinement.CoarseIsFollowed && Finer(branch, refinement, balance) is { } finer)
+        {
+            balance = finer;
+        }
         else if (!Settle(branch, balance, roughly: true))
         {
             return null;
+        }
+        else if (fineness == Fineness.OneFiner && !refinement.CoarseIsFollowed)
+        {
+            // As from nothing: from the settled state, or the coarse one where no finer one is found.
+            balance = Finer(branch, refinement, balance) ?? balance;
         }
 
         state = balance.Keep();
@@ -215,6 +220,9 @@ internal static class SteadySolver
         balance.Release();
         return figures;
     }
+
+    private static ForcedState? Finer(in CrystalBranch branch, Refinement refinement, ForcedState balance) =>
+        refinement.Finer(balance) is { } finer && Settle(branch, finer, roughly: true) ? finer : null;
 
     private static ForcedState? Refine(
         in CrystalBranch branch, Refinement refinement, ForcedState balance, out RunningState? state)

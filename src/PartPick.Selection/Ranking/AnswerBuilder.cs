@@ -27,11 +27,18 @@ internal sealed class AnswerBuilder(SearchRun run, RankingOptions options)
         Candidate[] candidates =
         [
             .. points.AsParallel().AsOrdered().WithDegreeOfParallelism(complete ? Environment.ProcessorCount : 1).Select(point =>
-                _built.GetOrAdd(point.Id, _ => _builder.Build(point.Choice)!) with
+                Shown(_built.GetOrAdd(point.Id, _ => _builder.Build(point.Choice)!), cheapest) with
                 {
-                    Score = Score.Of(requirement, point.ErrorRatio, point.Margin, point.Cost, cheapest),
                     OnFront = onFront.Contains(point.Id),
                 }),
+        ];
+        candidates =
+        [
+            .. candidates
+                .OrderBy(candidate => candidate.Score)
+                .ThenBy(candidate => candidate.Budget?.WorstRatio)
+                .ThenBy(candidate => candidate.Cost)
+                .ThenBy(candidate => candidate.Id, StringComparer.Ordinal),
         ];
         ImmutableArray<Candidate> nearest = complete && points.Length == 0 ? Nearest() : [];
         return new RankingResult
@@ -50,6 +57,12 @@ internal sealed class AnswerBuilder(SearchRun run, RankingOptions options)
             ElapsedSeconds = elapsedSeconds,
         };
     }
+
+    // Score and order go by the figures that are shown: they are solved from nothing, those of the search from neighbours.
+    private Candidate Shown(Candidate candidate, decimal cheapest) => candidate.Budget is not { } budget ? candidate : candidate with
+    {
+        Score = Score.Of(run.Space.Requirement, budget.WorstRatio, candidate.Margin.Value, candidate.Cost, cheapest),
+    };
 
     private ImmutableArray<Candidate> Nearest() =>
     [

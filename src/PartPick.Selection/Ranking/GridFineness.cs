@@ -30,7 +30,7 @@ internal readonly record struct GridFineness(
 {
     private static readonly GridFineness Follower = new(6, 0.035, 0.6, 0.018, 0.2, 0.6, 1.4, 0, 0.88, 0.4);
     private static readonly GridFineness OneStage = new(3, 0.01, 0.25, 0.002, 0.2, 0.22, 1.25, 0, 0.8, 0.3);
-    private static readonly GridFineness Buffered = new(3, 0.015, 0.6, 0.012, 0.42, 0.68, 1.1, 0.3, 0.68, 0.6);
+    private static readonly GridFineness Buffered = new(3, 0.015, 0.6, 0.012, 0.42, 0.6, 1.1, 0.3, 0.68, 0.6);
 
     /// <summary>The grid for an amplifier.</summary>
     public static GridFineness Of(Part amplifier) => amplifier switch

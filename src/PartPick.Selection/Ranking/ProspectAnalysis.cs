@@ -84,6 +84,14 @@ internal sealed class ProspectAnalysis
 
         _run.Tally.CountAnalysed();
         var analysis = new ValueAnalysis(_member.Template, _requirement, _values, start.State, start.Fineness);
+        if (_family.Amplifier is AmplifierPart { IsBuffered: true }
+            && start.State is not null
+            && (analysis.Base is null || double.IsInfinity(analysis.AmplifierRatio)))
+        {
+            // What was not found from here may be found from nothing, which is what counts.
+            analysis = new ValueAnalysis(_member.Template, _requirement, _values);
+        }
+
         if (analysis.Base is not { } nominal)
         {
             Reject(Limit.Error);
@@ -104,8 +112,8 @@ internal sealed class ProspectAnalysis
     }
 
     // An estimate of a buffered inverter may be far off; half of the way to its steady state tells the frequency. Where the full
-    // analysis starts from, or null where it need not be made.
-    private (RunningState State, Fineness Fineness)? Rough(Estimate estimate, EstimateGrid grid)
+    // analysis starts from (no state: from nothing), or null where it need not be made.
+    private (RunningState? State, Fineness Fineness)? Rough(Estimate estimate, EstimateGrid grid)
     {
         if (_family.Amplifier is not AmplifierPart { IsBuffered: true })
         {
@@ -117,7 +125,8 @@ internal sealed class ProspectAnalysis
             OscillatorAnalysis.FindSteadyState(circuit, estimate.State, Fineness.OneFinerRoughly, out RunningState? state);
         if (rough is null || state is null)
         {
-            return (estimate.State, Fineness.OneFiner);
+            // Hard to solve: which state is found depends on the way to it, and the one that counts is found from nothing.
+            return (null, Fineness.OneFiner);
         }
 
         LeastTerms terms = EstimateQuality.Trusts(estimate.HarmonicShare)

@@ -54,7 +54,11 @@ public class ErrorAgainstCostTests
 
     private static Candidate Made(string id, double error, decimal cost, bool front) => PicturedCandidates.Gate with
     {
-        Id = id, Budget = new ErrorBudget(0, [new BudgetTerm("all", error)]), Cost = cost, OnFront = front, Misses = [],
+        Id = id,
+        Budget = new ErrorBudget(0, [new BudgetTerm("all", error)]),
+        Cost = cost,
+        OnFront = front,
+        Misses = [],
     };
 
     private static RankingResult Answer(params Candidate[] candidates) => new()

@@ -3,66 +3,61 @@ using PartPick.Selection.Search;
 
 namespace PartPick.Selection.Tests.Ranking;
 
-/// <summary>The answer of a ranking by trying every combination, each analysed in full from nothing, by the definitions alone.</summary>
+/// <summary>
+/// The answer of a ranking by trying every combination, each analysed in full from nothing, by the definitions alone. Parts of one
+/// value share the analysis of their values; what lacks the wanted margin, is too dear or short of stock is not analysed further.
+/// </summary>
 internal sealed class EveryCombination
 {
     private readonly Requirement _requirement;
-    private readonly List<Candidate> _fit;
+    private readonly List<TriedChoice> _fit;
 
     public EveryCombination(Requirement requirement, PartsCatalog catalog)
     {
         _requirement = requirement;
         var space = new SearchSpace(requirement, catalog, every: true);
-        var builder = new CandidateBuilder(requirement, space.Market);
-        CandidateParts[] choices =
+        SameValues[] values =
         [
             .. from family in space.Families
-               from member in family.Members
-               from choice in Choices(space, family, member)
-               select choice,
+               from members in family.Members.GroupBy(member => member.Model.Crystal)
+               from option in Enumerable.Range(0, family.Options.Length)
+               from c1 in space.Capacitors
+               from c2 in space.Capacitors
+               select new SameValues(requirement, space.Market, family, [.. members], option, c1, c2),
         ];
-        Tried = choices.Length;
-        _fit = [.. choices.AsParallel().AsOrdered().Select(builder.Build).OfType<Candidate>().Where(candidate => candidate.IsFit)];
+        Tried = values.Sum(one => one.Count);
+        _fit = [.. values.AsParallel().AsOrdered().SelectMany(one => one.Fit())];
     }
 
-    /// <summary>Number of combinations analysed.</summary>
+    /// <summary>Number of combinations tried.</summary>
     public int Tried { get; }
 
     /// <summary>Number of fit ones.</summary>
     public int Fit => _fit.Count;
 
+    /// <summary>Every fit combination, in no order.</summary>
+    public IReadOnlyList<TriedChoice> FitOnes => _fit;
+
     /// <summary>Ids of the front, in order.</summary>
-    public string[] Front() =>
-        [.. Order(_fit.Where(one => !_fit.Any(other => Dominates(other, one)))).Select(candidate => candidate.Id)];
+    public string[] Front() => [.. Order(_fit.Where(one => !_fit.Any(other => Dominates(other, one)))).Select(choice => choice.Id)];
 
     /// <summary>Ids of the best of each circuit–crystal–amplifier group, in order.</summary>
     public string[] BestOfGroups() =>
-        [.. Order(_fit.GroupBy(one => (one.Choice.Circuit, one.Choice.Crystal.Id, one.Choice.Amplifier.Id, one.Choice.Tap))
-            .Select(group => Order(group).First())).Select(candidate => candidate.Id)];
+        [.. Order(_fit.GroupBy(one => one.Group).Select(group => Order(group).First())).Select(choice => choice.Id)];
 
     /// <summary>Ids of every fit candidate, in order.</summary>
-    public string[] All() => [.. Order(_fit).Select(candidate => candidate.Id)];
+    public string[] All() => [.. Order(_fit).Select(choice => choice.Id)];
 
-    private static IEnumerable<CandidateParts> Choices(SearchSpace space, CircuitFamily family, FamilyMember member) =>
-        from option in Enumerable.Range(0, family.Options.Length)
-        from c1 in space.Capacitors.SelectMany(value => value.Contenders)
-        from c2 in space.Capacitors.SelectMany(value => value.Contenders)
-        select SearchRun.Choice(family, member, option, c1.Part, c2.Part);
+    private static bool Dominates(TriedChoice one, TriedChoice other) =>
+        one.ErrorRatio <= other.ErrorRatio && one.Margin >= other.Margin && one.Cost <= other.Cost
+        && (one.ErrorRatio < other.ErrorRatio || one.Margin > other.Margin || one.Cost < other.Cost);
 
-    private static bool Dominates(Candidate one, Candidate other)
+    private IOrderedEnumerable<TriedChoice> Order(IEnumerable<TriedChoice> choices)
     {
-        double error = one.Budget!.WorstRatio;
-        double otherError = other.Budget!.WorstRatio;
-        return error <= otherError && one.Margin.Value >= other.Margin.Value && one.Cost <= other.Cost
-            && (error < otherError || one.Margin.Value > other.Margin.Value || one.Cost < other.Cost);
-    }
-
-    private IOrderedEnumerable<Candidate> Order(IEnumerable<Candidate> candidates)
-    {
-        decimal cheapest = _fit.Select(candidate => candidate.Cost).DefaultIfEmpty(1).Min();
-        return candidates
-            .OrderBy(one => Score.Of(_requirement, one.Budget!.WorstRatio, one.Margin.Value, one.Cost, cheapest))
-            .ThenBy(one => one.Budget!.WorstRatio)
+        decimal cheapest = _fit.Select(choice => choice.Cost).DefaultIfEmpty(1).Min();
+        return choices
+            .OrderBy(one => Score.Of(_requirement, one.ErrorRatio, one.Margin, one.Cost, cheapest))
+            .ThenBy(one => one.ErrorRatio)
             .ThenBy(one => one.Cost)
             .ThenBy(one => one.Id, StringComparer.Ordinal);
     }

@@ -11,10 +11,28 @@ internal sealed record SmallWorld(Requirement Requirement, PartsCatalog Catalog)
     public static SmallWorld Draw(int seed)
     {
         var random = new Random(seed);
-        PartsCatalog all = PartsCatalog.BuiltIn();
         double output = Pick(random, Outputs);
         CircuitKind kind = output == 1000 ? CircuitKind.Counter : (CircuitKind)random.Next(4);
         kind = output == 32768 && kind == CircuitKind.Follower ? CircuitKind.Gate : kind;
+        return Draw(random, output, kind, capacitors: 3, damping: 2);
+    }
+
+    /// <summary>Draws a world of one circuit; the same seed always draws the same.</summary>
+    public static SmallWorld Draw(int seed, CircuitKind kind, int capacitors, int damping)
+    {
+        var random = new Random(seed);
+        double[] outputs = kind switch
+        {
+            CircuitKind.Counter => [1000],
+            CircuitKind.Follower => [4e6, 8e6, 16e6, 12e6],
+            _ => [4e6, 8e6, 32768, 16e6, 12e6],
+        };
+        return Draw(random, Pick(random, outputs), kind, capacitors, damping);
+    }
+
+    private static SmallWorld Draw(Random random, double output, CircuitKind kind, int capacitors, int damping)
+    {
+        PartsCatalog all = PartsCatalog.BuiltIn();
         bool clock = output == 32768;
         double factor = clock ? 1.5 : 1;
         double supply = kind == CircuitKind.Port ? 3.3 : Pick(random, [3.3, 5.0, 5.0, 12.0]);
@@ -38,8 +56,8 @@ internal sealed record SmallWorld(Requirement Requirement, PartsCatalog Catalog)
         [
             .. Sample(random, 2, all.Crystals.Where(part => Near(part, output, kind))),
             .. Amplifiers(random, all, kind),
-            .. Sample(random, 3, all.Capacitors.Where(part => part.Dielectric == "C0G" && Usual(part, clock, kind))),
-            .. Sample(random, 2, all.Resistors.Where(part => Damping(part, clock, kind))),
+            .. Sample(random, capacitors, all.Capacitors.Where(part => part.Dielectric == "C0G" && Usual(part, clock, kind))),
+            .. Sample(random, damping, all.Resistors.Where(part => Damping(part, clock, kind))),
             .. all.Resistors.Where(part => part.ValueOhms is 1e6 or 4.7e6 or 1e7),
             .. all.Resistors.Where(part => kind == CircuitKind.Follower && part.ValueOhms is 2200 or 100e3),
             .. Sample(random, 1, all.Capacitors.Where(part => part.ValueFarads is > 90e-9 and < 110e-9)),

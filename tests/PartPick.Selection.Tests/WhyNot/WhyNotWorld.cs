@@ -16,7 +16,10 @@ internal static class WhyNotWorld
 
     public static CrystalPart Crystal { get; } = Sample.Crystal with
     {
-        ToleranceRatio = 30e-6, StabilityRatio = 30e-6, AgeingRatio = 3e-6, AgeingYearlyRatio = 1e-6,
+        ToleranceRatio = 30e-6,
+        StabilityRatio = 30e-6,
+        AgeingRatio = 3e-6,
+        AgeingYearlyRatio = 1e-6,
     };
 
     public static PartsCatalog Of(params Part[] parts) => new([.. Others.Select(Steady), .. parts]);

@@ -20,7 +20,7 @@ internal sealed class Arithmetic
     private static readonly Dictionary<string, double> Prefixes = new(StringComparer.Ordinal)
     {
         [""] = 1, ["a"] = 1e-18, ["f"] = 1e-15, ["p"] = 1e-12, ["n"] = 1e-9, ["µ"] = 1e-6, ["m"] = 1e-3, ["k"] = 1e3, ["M"] = 1e6,
-            ["G"] = 1e9,
+        ["G"] = 1e9,
     };
 
     private static readonly string[] Bases = ["F", "Hz", "Ω", "S", "V", "A", "W", "s"];

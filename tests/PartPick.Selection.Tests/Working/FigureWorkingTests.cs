@@ -157,7 +157,10 @@ public class FigureWorkingTests
     {
         CircuitKind kind = circuit switch
         {
-            "counter" => CircuitKind.Counter, "port" => CircuitKind.Port, "follower" => CircuitKind.Follower, _ => CircuitKind.Gate,
+            "counter" => CircuitKind.Counter,
+            "port" => CircuitKind.Port,
+            "follower" => CircuitKind.Follower,
+            _ => CircuitKind.Gate,
         };
         Part amplifier = circuit switch
         {

@@ -13,7 +13,9 @@ public sealed class WhyNotScreenTests : IDisposable
     // A small space: the counters of the built-in parts with capacitors and resistors of E3.
     private static readonly Requirement Wanted = SampleRanking.Wanted with
     {
-        Circuits = [CircuitKind.Counter], CapacitorSeries = "E3", ResistorSeries = "E3",
+        Circuits = [CircuitKind.Counter],
+        CapacitorSeries = "E3",
+        ResistorSeries = "E3",
     };
 
     private readonly string _directory = Directory.CreateTempSubdirectory("partpick-whynot-").FullName;
