@@ -121,7 +121,8 @@ internal sealed class ScreensTable
         double unit = Median(empty);
         _output.WriteLine(string.Create(
             CultureInfo.InvariantCulture,
-            $"first frame over that of an empty program: {Median(ours) / unit:F2}, in processor time {Median(work) / Median(emptyWork):F2}; "
+            $"first frame over that of an empty program: {Median(ours) / unit:F2}, "
+            + $"in processor time {Median(work) / Median(emptyWork):F2}; "
             + $"first circuits: {Median(answers) / unit:F2}"));
         _output.WriteLine(string.Create(
             CultureInfo.InvariantCulture,
@@ -180,7 +181,7 @@ internal sealed class ScreensTable
     // Another output frequency each time: 1 kHz, 2 kHz and so on. What is typed has to be seen.
     private static (string Key, string Shown) Typed(int number) => (number % 5) switch
     {
-        0 => ((1 + number / 5 % 9).ToString(CultureInfo.InvariantCulture), (1 + number / 5 % 9).ToString(CultureInfo.InvariantCulture)),
+        0 => (((char)(0x31 + number / 5 % 9)).ToString(), ((char)(0x31 + number / 5 % 9)).ToString()),
         1 => ("k", "k"),
         2 => ("H", "H"),
         3 => ("z", "z"),

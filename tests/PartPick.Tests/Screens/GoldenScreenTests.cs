@@ -99,7 +99,9 @@ public sealed class GoldenScreenTests : IDisposable
 
         Assert.True(File.Exists(file), $"There is no {name} yet: run with {Accept}=1, and read it.\n{shown}");
         string accepted = File.ReadAllText(file);
-        Assert.True(shown == accepted, $"{name} is not what the screen looks like. Is it better? Then run with {Accept}=1.\n{Compare(accepted, shown)}");
+        Assert.True(
+            shown == accepted,
+            $"{name} is not what the screen looks like. Is it better? Then run with {Accept}=1.\n{Compare(accepted, shown)}");
     }
 
     [Fact]

@@ -8,7 +8,8 @@ public sealed record TerminalTraits(bool HasColour, bool IsUtf8)
     private static readonly string[] LocaleNames = ["LC_ALL", "LC_CTYPE", "LANG"];
 
     // Names of terminals that cannot place the cursor, or not by the sequences of ECMA-48.
-    private static readonly string[] Unplaced = ["", "dumb", "unknown", "network", "printer", "lp", "emacs", "vt52", "adm3a", "wy50", "tvi920"];
+    private static readonly string[] Unplaced =
+        ["", "dumb", "unknown", "network", "printer", "lp", "emacs", "vt52", "adm3a", "wy50", "tvi920"];
 
     // Names, up to the first sign that is no letter or digit, of terminals in windows, and of those that run in them.
     private static readonly string[] Windowed =

@@ -3,7 +3,7 @@ using Terminal.Gui.Drivers;
 
 namespace PartPick.Screens;
 
-/// <summary>The toolkit's loop with the toolkit's own link to the terminal, for Windows, whose consoles all understand what it sends.</summary>
+/// <summary>The toolkit's loop with its own link to the terminal, for Windows, whose consoles understand what it sends.</summary>
 internal sealed class ToolkitLoop : IScreenLoop
 {
     private const ushort TurnsPerSecond = 60;

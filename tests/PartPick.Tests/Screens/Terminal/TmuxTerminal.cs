@@ -1,5 +1,6 @@
 using System.Diagnostics;
 using System.Globalization;
+using System.Runtime.InteropServices;
 using System.Text;
 
 namespace PartPick.Tests.Screens;
@@ -14,8 +15,8 @@ internal sealed class TmuxTerminal : IDisposable
 
     private static readonly TimeSpan Patience = TimeSpan.FromSeconds(90);
 
-    private readonly string _server = "partpick-test-" + Guid.NewGuid().ToString("N");
-    private readonly string _folder = Directory.CreateTempSubdirectory("partpick-tmux-").FullName;
+    // Its server keeps its socket there, so that nothing of it stays behind and nobody else's is met.
+    private readonly string _folder;
     private int _asked;
 
     /// <summary>Opens a window.</summary>
@@ -26,8 +27,10 @@ internal sealed class TmuxTerminal : IDisposable
     public TmuxTerminal(string term, string locale, int width, int height)
     {
         Assert.SkipWhen(Missing is not null, Missing ?? "");
+        _folder = Directory.CreateTempSubdirectory("partpick-tmux-").FullName;
         string program = Path.Combine(_folder, "partpick");
-        File.WriteAllText(program, $"echo $$ >'{Pid}'\necho {Mark}\nexec '{Host}' '{Path.Combine(AppContext.BaseDirectory, "partpick.dll")}' \"$@\"\n");
+        string library = Path.Combine(AppContext.BaseDirectory, "partpick.dll");
+        File.WriteAllText(program, $"echo $$ >'{Pid}'\necho {Mark}\nexec '{Host}' '{library}' \"$@\"\n");
         string shell = $"exec env -i PATH=\"$PATH\" HOME='{_folder}' PS1='ready> ' TERM={term} LC_ALL={locale}"
             + $" DOTNET_NOLOGO=1 PARTPICK_CATALOG='{Path.Combine(_folder, "catalog.db")}' sh -i";
         Tmux(
@@ -62,7 +65,7 @@ internal sealed class TmuxTerminal : IDisposable
     private static string Host => Environment.ProcessPath is { } running && Path.GetFileNameWithoutExtension(running) == "dotnet"
         ? running
         : Environment.GetEnvironmentVariable("DOTNET_HOST_PATH")
-            ?? Path.GetFullPath(Path.Combine(System.Runtime.InteropServices.RuntimeEnvironment.GetRuntimeDirectory(), "..", "..", "..", "dotnet"));
+            ?? Path.GetFullPath(Path.Combine(RuntimeEnvironment.GetRuntimeDirectory(), "..", "..", "..", "dotnet"));
 
     /// <summary>Starts the program from the shell, on the catalogue of this terminal.</summary>
     public void Start(string arguments = "") => Type($"sh '{Path.Combine(_folder, "partpick")}' {arguments}", "Enter");
@@ -101,7 +104,8 @@ internal sealed class TmuxTerminal : IDisposable
         while (!isSo())
         {
             Assert.True(
-                TimeProvider.System.GetElapsedTime(start) < Patience, $"Waited in vain for {what}; on the screen:\n" + string.Join('\n', Rows));
+                TimeProvider.System.GetElapsedTime(start) < Patience,
+                $"Waited in vain for {what}; on the screen:\n" + string.Join('\n', Rows));
             Thread.Sleep(50);
         }
     }
@@ -110,7 +114,7 @@ internal sealed class TmuxTerminal : IDisposable
 
     public void Dispose()
     {
-        Execute("tmux", ["-L", _server, "kill-server"]);
+        Execute("tmux", ["kill-server"], _folder);
         WaitForEnd();
         Directory.Delete(_folder, recursive: true);
     }
@@ -134,10 +138,15 @@ internal sealed class TmuxTerminal : IDisposable
 
     private static string Text(int number) => number.ToString(CultureInfo.InvariantCulture);
 
-    private static (int Status, string Output, string Error) Execute(string program, IEnumerable<string> arguments)
+    private static (int Status, string Output, string Error) Execute(string program, IEnumerable<string> arguments, string? sockets = null)
     {
         var start = new ProcessStartInfo(program, arguments) { RedirectStandardOutput = true, RedirectStandardError = true };
         start.Environment.Remove("TMUX");
+        if (sockets is not null)
+        {
+            start.Environment["TMUX_TMPDIR"] = sockets;
+        }
+
         using Process process = Process.Start(start)!;
         Task<string> error = process.StandardError.ReadToEndAsync();
         string output = process.StandardOutput.ReadToEnd();
@@ -147,7 +156,7 @@ internal sealed class TmuxTerminal : IDisposable
 
     private string Tmux(params string[] arguments)
     {
-        (int status, string output, string error) = Execute("tmux", ["-L", _server, .. arguments]);
+        (int status, string output, string error) = Execute("tmux", arguments, _folder);
         Assert.True(status == 0, $"tmux {string.Join(' ', arguments)}: {error}");
         return output;
     }
