@@ -7,7 +7,7 @@ using PartPick.Catalog.Mapping;
 namespace PartPick.Catalog;
 
 /// <summary>An open catalogue file; the lock has to be held while it is.</summary>
-internal sealed class CatalogFile : IDisposable
+internal sealed partial class CatalogFile : IDisposable
 {
     /// <summary>The number of the form in which the documents are stored.</summary>
     public const int Schema = 1;
@@ -109,47 +109,6 @@ internal sealed class CatalogFile : IDisposable
         }
     }
 
-    /// <summary>Copies a catalogue that no one else has open, whole.</summary>
-    public static bool Copy(string path, string copy)
-    {
-        // Opening and closing applies what a process that died left in the log beside the file.
-        using (Open(path))
-        {
-        }
-
-        Delete(copy);
-        File.Copy(path, copy);
-        return true;
-    }
-
-    /// <summary>Puts a changed copy in the place of the catalogue; the settings that were kept meanwhile come along.</summary>
-    public static bool TakePlace(string copy, string path)
-    {
-        using (CatalogFile changed = Open(copy), current = Open(path))
-        {
-            foreach (BsonDocument setting in current.Settings.FindAll())
-            {
-                changed.Settings.Upsert(setting);
-            }
-        }
-
-        Publish(copy, path);
-        return true;
-    }
-
-    /// <summary>Forces a closed file to the disk and puts it in the place of another.</summary>
-    public static void Publish(string copy, string path)
-    {
-        using (var stream = new FileStream(copy, FileMode.Open, FileAccess.ReadWrite))
-        {
-            stream.Flush(flushToDisk: true);
-        }
-
-        // What a damaged file of this name left in its log must not be applied to the new one.
-        File.Delete(LogOf(path));
-        File.Move(copy, path, overwrite: true);
-    }
-
     /// <summary>All stored parts, each with the id under which it is found.</summary>
     public IEnumerable<(string Id, StoredPart? Part)> ReadNamed() =>
         PartPages.All(Parts).Select(document => (document["_id"].AsString, PartDocument.ReadStored(document)));
@@ -194,10 +153,6 @@ internal sealed class CatalogFile : IDisposable
         Unmark();
         Parts.Upsert(PartDocument.Write(part));
     }
-
-    /// <summary>What is kept about the imports, by their numbers.</summary>
-    public Dictionary<int, ImportNote> ReadImports() =>
-        ImportNotes.FindAll().Select(ImportDocument.Read).OfType<ImportNote>().ToDictionary(note => note.Number);
 
     /// <summary>The names of the column maps.</summary>
     public List<string> MapNames() => [.. Maps.FindAll().Select(document => document["_id"].AsString)];
@@ -249,100 +204,6 @@ internal sealed class CatalogFile : IDisposable
             document[PartDocument.Digest].IsBinary ? RowDigest.Of(document[PartDocument.Digest].AsBinary) : 0);
     });
 
-    /// <summary>The number of the next import.</summary>
-    public int NextImport() => 1 + int.Parse(
-        TextDocument.Read(About.FindById(ImportCountKey)) ?? "0", System.Globalization.CultureInfo.InvariantCulture);
-
-    /// <summary>Puts in parts whose ids are new.</summary>
-    public void InsertNew(List<BsonDocument> parts)
-    {
-        Unmark();
-        Parts.InsertBulk(parts, parts.Count);
-    }
-
-    /// <summary>Keeps a part as it was before an import changes it.</summary>
-    public void KeepEarlier(string id, int import)
-    {
-        if (_earlierOf != import)
-        {
-            _database.DropCollection(EarlierCollection);
-            _earlierOf = import;
-        }
-
-        Earlier.Insert(new BsonDocument { ["_id"] = id, ["part"] = Parts.FindById(id) });
-    }
-
-    /// <summary>Keeps the note of an import; what an earlier one kept for undoing goes.</summary>
-    public void WriteImport(ImportNote note)
-    {
-        if (_earlierOf != note.Number)
-        {
-            _database.DropCollection(EarlierCollection);
-        }
-
-        ImportNotes.Insert(ImportDocument.Write(note));
-        string count = note.Number.ToString(System.Globalization.CultureInfo.InvariantCulture);
-        About.Upsert(TextDocument.Write(ImportCountKey, count));
-        About.Upsert(TextDocument.Write(UndoableKey, count));
-    }
-
-    /// <summary>The import that can be taken back; null where there is none.</summary>
-    public ImportNote? Undoable() =>
-        int.TryParse(TextDocument.Read(About.FindById(UndoableKey)), out int number) && ImportNotes.FindById(number) is { } document
-            ? ImportDocument.Read(document)
-            : null;
-
-    /// <summary>Takes back the last import, as far as it was not taken back before; null where there is none.</summary>
-    public ImportNote? UndoLastImport()
-    {
-        if (Undoable() is not { } note)
-        {
-            return null;
-        }
-
-        Unmark();
-        int number = note.Number;
-        foreach (BsonDocument earlier in Earlier.FindAll().ToList())
-        {
-            StoredPart? now = FindStored(earlier["_id"].AsString);
-            StoredPart before = PartDocument.ReadStored(earlier["part"].AsDocument)
-                ?? throw new InvalidDataException("A part in it cannot be read.");
-            Put(now is null ? before : new StoredPart
-            {
-                Kind = before.Kind,
-                BuiltIn = before.BuiltIn,
-                Supplied = before.Supplied,
-                Place = before.Place,
-                Elsewhere = before.Elsewhere,
-                Digest = before.Digest,
-                ByHand = now.ByHand,
-                Cleared = now.Cleared,
-                HandDate = now.HandDate,
-            });
-        }
-
-        // In pieces: what one transaction changes is held in memory.
-        string[] added =
-        [
-            .. PartPages.All(Parts).Where(part => part[PartDocument.Import] == number).Select(part => part["_id"].AsString),
-        ];
-        foreach (string[] ids in added.Chunk(2000))
-        {
-            _database.BeginTrans();
-            foreach (string id in ids)
-            {
-                Parts.Delete(id);
-            }
-
-            _database.Commit();
-        }
-
-        ImportNotes.Delete(number);
-        About.Delete(UndoableKey);
-        _database.DropCollection(EarlierCollection);
-        return note;
-    }
-
     public string? ReadSetting(string key) => TextDocument.Read(Settings.FindById(key));
 
     public void WriteSetting(string key, string text) => Settings.Upsert(TextDocument.Write(key, text));
@@ -381,29 +242,4 @@ internal sealed class CatalogFile : IDisposable
         Cleared = earlier?.Cleared ?? [],
         HandDate = earlier?.HandDate,
     };
-
-    // A file of whole pages that carries the mark of the file format: anything else would be taken for a new, empty file.
-    private static bool LooksWhole(string path)
-    {
-        using FileStream stream = File.OpenRead(path);
-        if (stream.Length < PageBytes || stream.Length % PageBytes != 0)
-        {
-            return false;
-        }
-
-        ReadOnlySpan<byte> mark = "** This is a LiteDB file **"u8;
-        Span<byte> start = stackalloc byte[MarkOffset + 27];
-        stream.ReadExactly(start);
-        return start[MarkOffset..].SequenceEqual(mark);
-    }
-
-    /// <summary>Removes a file with its log, where they are there.</summary>
-    public static void Delete(string path)
-    {
-        File.Delete(path);
-        File.Delete(LogOf(path));
-    }
-
-    private static string LogOf(string path) => Path.Combine(
-        Path.GetDirectoryName(path) ?? "", $"{Path.GetFileNameWithoutExtension(path)}-log{Path.GetExtension(path)}");
 }

@@ -1,8 +1,6 @@
 using System.Collections.Concurrent;
 using System.Diagnostics;
 using System.Globalization;
-using PartPick.Catalog;
-using PartPick.Catalog.Import;
 using PartPick.Screens;
 
 namespace PartPick.Benchmarks;
@@ -30,24 +28,12 @@ internal sealed class BrowseTable
     /// <param name="output">Where to print.</param>
     public static int Print(string[] arguments, TextWriter output)
     {
-        int rows = arguments.Length > 0 ? int.Parse(arguments[0], CultureInfo.InvariantCulture) : 500_000;
-        string folder = Directory.CreateTempSubdirectory("partpick-browse-bench-").FullName;
-        try
-        {
-            string list = Path.Combine(folder, "list.csv");
-            string db = Path.Combine(folder, "catalog.db");
-            ImportTable.WriteList(list, rows);
-            var request = new ImportRequest { Kind = PartKind.Crystal, Name = "list.csv", Date = new DateOnly(2026, 3, 1) };
-            int added = CatalogImport.Run(db, File.OpenRead(list), request, null, CancellationToken.None).Value.Added;
-            output.WriteLine(string.Create(CultureInfo.InvariantCulture, $"{added} parts beside the built-in ones, 120 x 40, ms"));
-            output.WriteLine("keys                        median     worst   worst until the answer");
-            new BrowseTable(db, output).Measure();
-            return 0;
-        }
-        finally
-        {
-            Directory.Delete(folder, recursive: true);
-        }
+        using var catalog = new LargeCatalog(LargeCatalog.RowsOf(arguments, 500_000));
+        output.WriteLine(string.Create(
+            CultureInfo.InvariantCulture, $"{catalog.Added} parts beside the built-in ones, 120 x 40, ms"));
+        output.WriteLine("keys                        median     worst   worst until the answer");
+        new BrowseTable(catalog.Path, output).Measure();
+        return 0;
     }
 
     private void Measure()

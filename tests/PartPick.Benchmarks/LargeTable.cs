@@ -2,7 +2,6 @@ using System.Collections.Concurrent;
 using System.Diagnostics;
 using System.Globalization;
 using PartPick.Catalog;
-using PartPick.Catalog.Import;
 using PartPick.Screens;
 using PartPick.Selection;
 
@@ -28,28 +27,16 @@ internal sealed class LargeTable
     /// <param name="output">Where to print.</param>
     public static int Print(string[] arguments, TextWriter output)
     {
-        int rows = arguments.Length > 0 ? int.Parse(arguments[0], CultureInfo.InvariantCulture) : 1_000_000;
-        string folder = Directory.CreateTempSubdirectory("partpick-large-bench-").FullName;
-        try
-        {
-            string list = Path.Combine(folder, "list.csv");
-            string db = Path.Combine(folder, "catalog.db");
-            ImportTable.WriteList(list, rows);
-            var request = new ImportRequest { Kind = PartKind.Crystal, Name = "list.csv", Date = new DateOnly(2026, 3, 1) };
-            int added = CatalogImport.Run(db, File.OpenRead(list), request, null, CancellationToken.None).Value.Added;
-            output.WriteLine(string.Create(CultureInfo.InvariantCulture, $"{added} parts beside the built-in ones, 120 x 40, ms"));
-            var table = new LargeTable(db, output);
-            output.WriteLine("                              parts read     first   answer");
-            table.Start("without a directory");
-            table.Start("with the directory");
-            output.WriteLine("keys                              median     worst");
-            table.Type();
-            return 0;
-        }
-        finally
-        {
-            Directory.Delete(folder, recursive: true);
-        }
+        using var catalog = new LargeCatalog(LargeCatalog.RowsOf(arguments, 1_000_000));
+        output.WriteLine(string.Create(
+            CultureInfo.InvariantCulture, $"{catalog.Added} parts beside the built-in ones, 120 x 40, ms"));
+        var table = new LargeTable(catalog.Path, output);
+        output.WriteLine("                              parts read     first   answer");
+        table.Start("without a directory");
+        table.Start("with the directory");
+        output.WriteLine("keys                              median     worst");
+        table.Type();
+        return 0;
     }
 
     private void Start(string name)

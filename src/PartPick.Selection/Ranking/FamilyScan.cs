@@ -186,7 +186,6 @@ internal sealed class FamilyScan
             return null;
         }
 
-
         range = Grid.Sharp(option, i, j, range);
         slopes = Grid.Slopes(option, i, j, range);
         if (!MayMatter(option, i, j, range, slopes, 0, margin, weight))
@@ -194,20 +193,17 @@ internal sealed class FamilyScan
             return null;
         }
 
-
         if (Grid.LeastDriveWatts(option, i, j, highest: false) > _mostWatts)
         {
             DriveRejections += weight;
             return null;
         }
 
-
         double amplifier = _family.IsGate ? Grid.LeastAmplifierRatio(option, i, j) : 0;
         if (!MayMatter(option, i, j, range, slopes, amplifier, margin, weight))
         {
             return null;
         }
-
 
         if (_family.IsGate && Grid.LeastDriveWatts(option, i, j, highest: true) > _mostWatts)
         {

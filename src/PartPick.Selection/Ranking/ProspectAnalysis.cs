@@ -27,11 +27,12 @@ internal sealed class ProspectAnalysis
     private readonly Spot _spot;
     private readonly List<CapacitorPair> _pairs;
     private readonly Misses _misses;
-    private LeastTerms? _first;
     private readonly Requirement _requirement;
     private readonly CircuitValues _values;
     private readonly double _reach;
+    private readonly bool _isBuffered;
     private readonly Dictionary<(double, double), CornerAnalysis> _corners = [];
+    private LeastTerms? _first;
 
     public ProspectAnalysis(SearchRun run, CircuitFamily family, FamilyMember member, Prospect prospect, Misses misses)
     {
@@ -43,6 +44,7 @@ internal sealed class ProspectAnalysis
         _misses = misses;
         _requirement = run.Space.Requirement;
         _reach = BudgetBuilder.TemperatureReach(_requirement);
+        _isBuffered = family.Amplifier is AmplifierPart { IsBuffered: true };
         _values = family.Options[_spot.Option].With(
             run.Space.Capacitors[_spot.C1].Farads, run.Space.Capacitors[_spot.C2].Farads);
     }
@@ -84,7 +86,7 @@ internal sealed class ProspectAnalysis
 
         _run.Tally.CountAnalysed();
         var analysis = new ValueAnalysis(_member.Template, _requirement, _values, start.State, start.Fineness);
-        if (_family.Amplifier is AmplifierPart { IsBuffered: true }
+        if (_isBuffered
             && start.State is not null
             && (analysis.Base is null || double.IsInfinity(analysis.AmplifierRatio)))
         {
@@ -115,7 +117,7 @@ internal sealed class ProspectAnalysis
     // analysis starts from (no state: from nothing), or null where it need not be made.
     private (RunningState? State, Fineness Fineness)? Rough(Estimate estimate, EstimateGrid grid)
     {
-        if (_family.Amplifier is not AmplifierPart { IsBuffered: true })
+        if (!_isBuffered)
         {
             return (estimate.State, Fineness.OneFiner);
         }
@@ -148,7 +150,7 @@ internal sealed class ProspectAnalysis
     // With the amplifier's shift at the corners furthest apart, and the drive level there, as estimated.
     private bool MayReachOverAmplifier(double least, EstimateGrid grid)
     {
-        if (_family.Amplifier is not AmplifierPart { Stages: <= 1 })
+        if (!_family.IsGate || _isBuffered)
         {
             return true;
         }
@@ -273,7 +275,7 @@ internal sealed class ProspectAnalysis
         }
 
         // A buffered inverter may build up and yet find no steady state at a corner; the others always do.
-        double most = _family.Amplifier is AmplifierPart { Stages: > 1 } ? double.PositiveInfinity : MostCornerDrive;
+        double most = _isBuffered ? double.PositiveInfinity : MostCornerDrive;
         return Holds(pair, corners.RunsWithin(analysis, rated, most), Limit.Drive)
             && Holds(
                 pair,

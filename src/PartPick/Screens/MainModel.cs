@@ -1,7 +1,5 @@
 using System.Collections.Immutable;
-using PartPick.Requirements;
 using PartPick.Selection;
-using PartPick.WhyNot;
 
 namespace PartPick.Screens;
 
@@ -15,7 +13,6 @@ public sealed partial class MainModel
     private readonly Glyphs _glyphs;
     private readonly bool _waits;
     private readonly Reading _reading;
-    private bool _putOff;
 
     /// <summary>Makes the screen of a requirement and starts ranking.</summary>
     /// <param name="requirement">The requirement.</param>
@@ -70,18 +67,6 @@ public sealed partial class MainModel
 
     /// <summary>The list.</summary>
     public CandidateList List { get; } = new();
-
-    /// <summary>The lists of candidates.</summary>
-    internal ShortlistModel Shortlists { get; private set; } = new();
-
-    /// <summary>The kept requirements.</summary>
-    internal KeptModel Kept { get; private set; } = new();
-
-    /// <summary>The pictures of a candidate.</summary>
-    internal PicturesModel Pictures { get; private set; } = new();
-
-    /// <summary>What can be asked of the list and of a circuit.</summary>
-    internal QuestionModel Questions { get; private set; } = new();
 
     /// <summary>Where the keys go.</summary>
     public Place Place { get; private set; }
@@ -199,67 +184,6 @@ public sealed partial class MainModel
         }
     }
 
-    /// <summary>Lets circuits be put on lists; without it there are none.</summary>
-    /// <param name="desk">Where the lists are kept.</param>
-    /// <param name="work">Does what takes long.</param>
-    public void KeepListsAt(IShortlistDesk desk, ScreenWork work)
-    {
-        Shortlists = new ShortlistModel(desk, work, _glyphs.IsAscii);
-        Shortlists.Redraw += () => Redraw?.Invoke();
-        Shortlists.Said += Say;
-    }
-
-    /// <summary>Lets requirements be kept; without it none are.</summary>
-    /// <param name="store">Where they are kept.</param>
-    /// <param name="work">Does what takes long.</param>
-    /// <param name="service">What ranks those that are compared.</param>
-    public void KeepWantedAt(KeptRequirementStore store, ScreenWork work, IRankingService service)
-    {
-        Kept = new KeptModel(store, work, service);
-        if (List.Result is { } result)
-        {
-            Kept.Figures.Take(result);
-        }
-
-        Kept.Changed += said =>
-        {
-            Notice = said ?? Notice;
-            Redraw?.Invoke();
-        };
-        Kept.Named += name => Wanted.Rename(name);
-        Kept.Taken += Begin;
-        Kept.Comparison!.Ranked += TakeInstead;
-        Kept.Comparison.Ranks += ranks =>
-        {
-            if (ranks)
-            {
-                PutOffRanking();
-            }
-            else
-            {
-                GoOnRanking();
-            }
-        };
-    }
-
-    /// <summary>Lets pictures of circuits be opened; without it there are none.</summary>
-    /// <param name="work">Does what takes long.</param>
-    public void DrawPicturesWith(ScreenWork work)
-    {
-        Pictures = new PicturesModel(work);
-        Pictures.Redraw += () => Redraw?.Invoke();
-        Pictures.Said += Say;
-    }
-
-    /// <summary>Lets questions be asked; without it there are none.</summary>
-    /// <param name="desk">What answers why a part is not in the list.</param>
-    /// <param name="work">Does what takes long.</param>
-    public void AnswerQuestionsAt(IWhyNotDesk desk, ScreenWork work)
-    {
-        Questions = new QuestionModel(desk, work);
-        Questions.Redraw += () => Redraw?.Invoke();
-    }
-
     /// <summary>The screen as lines, each as wide as the screen.</summary>
     /// <param name="width">Width in cells.</param>
     /// <param name="height">Height in rows.</param>
@@ -283,45 +207,6 @@ public sealed partial class MainModel
             case SentenceAnswer.NotMine:
                 PressAnywhere(key);
                 break;
-        }
-    }
-
-    private void PressInParts(KeyPress key)
-    {
-        switch (Parts!.Press(key))
-        {
-            case PartsAnswer.Leave:
-                LeaveParts();
-                break;
-            case PartsAnswer.NotMine when key.Letter == 'y' && Parts.AskableId is { } id:
-                Questions.AskWhyNot(Wanted.Accepted, null, id);
-                break;
-            case PartsAnswer.NotMine when key.Letter is '?' or 'q':
-                PressAnywhere(key);
-                break;
-        }
-    }
-
-    private void EnterParts()
-    {
-        Place = Place.Parts;
-        PutOffRanking();
-        Parts!.Enter();
-    }
-
-    // A ranking takes all the machine there is; it waits while the catalogue is open or others are compared.
-    private void PutOffRanking()
-    {
-        _putOff |= _ranking.IsRunning;
-        _ranking.Stop();
-    }
-
-    private void GoOnRanking()
-    {
-        if (_putOff)
-        {
-            _putOff = false;
-            _ranking.Ask(Wanted.Current, TimeSpan.Zero);
         }
     }
 
@@ -352,23 +237,6 @@ public sealed partial class MainModel
         var sentence = new SentenceModel(requirement, _glyphs, currency);
         sentence.Changed += Rank;
         return sentence;
-    }
-
-    // The ranking that was put off goes on where the parts are the same; else it waits for the new ones.
-    private void LeaveParts()
-    {
-        Place = _reading.IsThere ? Place.Circuit : Place.List;
-        if (Parts!.HasChanged)
-        {
-            (Parts.HasChanged, _putOff) = (false, false);
-            Kept.Figures.Clear();
-            Shortlists.Aside?.Refresh();
-            PartsChanged?.Invoke();
-        }
-        else
-        {
-            GoOnRanking();
-        }
     }
 
     private void LeaveSentence()

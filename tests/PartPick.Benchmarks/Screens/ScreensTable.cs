@@ -1,7 +1,5 @@
 using System.Diagnostics;
 using System.Globalization;
-using PartPick.Catalog;
-using PartPick.Catalog.Import;
 
 namespace PartPick.Benchmarks;
 
@@ -33,7 +31,7 @@ internal sealed class ScreensTable
     /// <param name="output">Where to print.</param>
     public static int Print(string[] arguments, TextWriter output)
     {
-        int rows = arguments.Length > 0 ? int.Parse(arguments[0], CultureInfo.InvariantCulture) : 500_000;
+        int rows = LargeCatalog.RowsOf(arguments, 500_000);
         int starts = arguments.Length > 1 ? int.Parse(arguments[1], CultureInfo.InvariantCulture) : 9;
         string folder = Directory.CreateTempSubdirectory("partpick-screens-bench-").FullName;
         try
@@ -45,9 +43,8 @@ internal sealed class ScreensTable
             small.Keys("");
             if (rows > 0)
             {
-                var large = new ScreensTable(Path.Combine(folder, "large.db"), output);
-                large.Fill(folder, rows);
-                large.Keys(string.Create(CultureInfo.InvariantCulture, $", {rows} parts"));
+                using var catalog = new LargeCatalog(rows);
+                new ScreensTable(catalog.Path, output).Keys(string.Create(CultureInfo.InvariantCulture, $", {rows} parts"));
             }
 
             return 0;
@@ -145,17 +142,6 @@ internal sealed class ScreensTable
             CultureInfo.InvariantCulture,
             $"idle: {ours / empty:F2} of the empty program's processor time ({ours / passed:P2} and {empty / passed:P2} of a core); "
             + $"sent meanwhile: {terminal.Sent - sentBefore} and {none.Sent - emptySent} bytes"));
-    }
-
-    private void Fill(string folder, int rows)
-    {
-        string list = Path.Combine(folder, "list.csv");
-        ImportTable.WriteList(list, rows);
-        var request = new ImportRequest { Kind = PartKind.Crystal, Name = "list.csv", Date = new DateOnly(2026, 3, 1) };
-        if (!CatalogImport.Run(_catalog, File.OpenRead(list), request, null, CancellationToken.None).IsOk)
-        {
-            throw new InvalidOperationException("The list cannot be imported.");
-        }
     }
 
     private void Keys(string which)

@@ -93,11 +93,7 @@ public sealed class WhyNotScreenTests : IDisposable
     public void While_it_computes_the_screen_answers_and_Esc_stops_it()
     {
         var desk = new SlowDesk(CatalogFile);
-        using Bench bench = Open();
-        bench.AnswerQuestions(desk);
-        bench.Press(new Key('y'));
-        bench.Settle();
-        bench.Press(Key.Enter);
+        using Bench bench = Asking(desk);
         bench.SettleUntil(() => bench.Model.Draw(80, 24).Any(line => line.Text.Contains("Looking for nothing", StringComparison.Ordinal)));
 
         bench.Resize(100, 30);
@@ -118,11 +114,7 @@ public sealed class WhyNotScreenTests : IDisposable
     public void Ctrl_C_stops_it_without_leaving()
     {
         var desk = new SlowDesk(CatalogFile);
-        using Bench bench = Open();
-        bench.AnswerQuestions(desk);
-        bench.Press(new Key('y'));
-        bench.Settle();
-        bench.Press(Key.Enter);
+        using Bench bench = Asking(desk);
 
         bench.Press(Key.C.WithCtrl);
         bench.Settle();
@@ -168,6 +160,16 @@ public sealed class WhyNotScreenTests : IDisposable
 
         Assert.Contains("Listed: capacitors", bench.Text, StringComparison.Ordinal);
         Assert.DoesNotContain("Why not", bench.Rows[3], StringComparison.Ordinal);
+    }
+
+    private Bench Asking(SlowDesk desk)
+    {
+        Bench bench = Open();
+        bench.AnswerQuestions(desk);
+        bench.Press(new Key('y'));
+        bench.Settle();
+        bench.Press(Key.Enter);
+        return bench;
     }
 
     private Bench Open(int width = 80, int height = 24, bool catalogue = false)
