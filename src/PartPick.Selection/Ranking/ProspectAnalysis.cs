@@ -86,11 +86,8 @@ internal sealed class ProspectAnalysis
 
         _run.Tally.CountAnalysed();
         var analysis = new ValueAnalysis(_member.Template, _requirement, _values, start.State, start.Fineness);
-        if (_isBuffered
-            && start.State is not null
-            && (analysis.Base is null || double.IsInfinity(analysis.AmplifierRatio)))
+        if (_isBuffered && start.State is not null && IsLost(analysis))
         {
-            // What was not found from here may be found from nothing, which is what counts.
             analysis = new ValueAnalysis(_member.Template, _requirement, _values);
         }
 
@@ -136,6 +133,18 @@ internal sealed class ProspectAnalysis
                 _requirement.Board, _family.IsGate, _values, grid.FirstOrder(_spot.Option, _spot.C1, _spot.C2), _member.Quality.SlopeShare)
             : default;
         return Left(pair => MayReach(pair, rough, terms, _spot.AmplifierRatio, RoughSlack)) ? (state, Fineness.Same) : null;
+    }
+
+    // Whether a state was not found from where the analysis started: it may be found from nothing, which is what counts.
+    private bool IsLost(ValueAnalysis analysis)
+    {
+        if (analysis.Base is not { } nominal)
+        {
+            return true;
+        }
+
+        LeastTerms terms = FirstOrderTerms(analysis, default);
+        return Left(pair => MayReach(pair, nominal, terms, 0, BaseSlack)) && double.IsInfinity(analysis.AmplifierRatio);
     }
 
     // With slopes of the first order, from the estimate's state.
